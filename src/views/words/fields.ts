@@ -1,0 +1,78 @@
+/** Labels of the document's fields by path, and how a sentence names each. */
+
+const labels: Readonly<Record<string, string>> = {
+  tag: 'Tag',
+  service: 'Service',
+  find: 'Find',
+  fluid: 'Fluid',
+  'fluid.kind': 'Fluid',
+  'fluid.phase': 'Phase',
+  'fluid.density': 'Density',
+  'fluid.viscosity': 'Dynamic viscosity',
+  'fluid.isentropicExponent': 'Isentropic exponent',
+  'fluid.molarMass': 'Molar mass',
+  'fluid.compressibility': 'Compressibility factor',
+  'fluid.vapourPressure': 'Vapour pressure',
+  'fluid.baseDensity': 'Density at the base state',
+  upstream: 'Upstream state',
+  'upstream.pressure': 'Upstream pressure',
+  'upstream.temperature': 'Temperature',
+  pipe: 'Pipe',
+  'pipe.size': 'Pipe size',
+  'pipe.bore': 'Pipe bore',
+  'pipe.material': 'Pipe material',
+  'pipe.measuredAt': 'Pipe bore measured at',
+  'pipe.roughness': 'Pipe roughness Ra',
+  element: 'Element',
+  'element.kind': 'Kind of element',
+  'element.tappings': 'Tappings',
+  'element.convergent': 'Convergent',
+  'element.bore': 'Bore',
+  'element.material': 'Element material',
+  'element.measuredAt': 'Bore measured at',
+  'element.plateThickness': 'Plate thickness',
+  'element.edgeThickness': 'Edge thickness',
+  'element.calibration': 'Calibration',
+  duty: 'Flows',
+  'duty.maximum': 'Maximum flow',
+  'duty.normal': 'Normal flow',
+  'duty.minimum': 'Minimum flow',
+  differential: 'Differential pressure',
+  uncertainty: 'Uncertainties',
+  'uncertainty.bore': 'Uncertainty of the bore',
+  'uncertainty.pipe': 'Uncertainty of the pipe bore',
+  'uncertainty.differential': 'Uncertainty of the differential',
+  'uncertainty.density': 'Uncertainty of the density',
+  installation: 'Installation',
+  'installation.fitting': 'Nearest fitting upstream',
+  'installation.before': 'Straight pipe before',
+  'installation.after': 'Straight pipe after',
+  title: 'Title',
+  revision: 'Revision',
+  preparedBy: 'Prepared by',
+  checkedBy: 'Checked by',
+  'site.atmosphere': 'Atmospheric pressure',
+  'site.gravity': 'Gravity',
+  'base.pressure': 'Base pressure',
+  'base.temperature': 'Base temperature',
+  display: 'Units',
+  instrument: 'Instrument',
+  readings: 'Readings',
+  log: 'Log',
+  meters: 'Meters',
+  traverses: 'Surveys',
+};
+
+/** A path without the meter it stands in and with its row numbers apart. */
+const own = (path: string): string => path.replace(/^meters(\.\d+\.|\[\d+\]\.)/, '');
+
+/** Label of a field; a row of a list is numbered from 1, a field this version does not know stands as written. */
+export function fieldLabel(path: string): string {
+  const plain = own(path);
+  const known = labels[plain];
+  if (known !== undefined) return known;
+  const row = /^(.+?)[.[](\d+)\]?(?:\.(.+))?$/.exec(plain);
+  if (row === null) return plain === '' ? 'Meter' : plain;
+  const [, list = '', place = '0', rest] = row;
+  return `${labels[list] ?? list}, row ${Number(place) + 1}${rest === undefined ? '' : `, ${rest}`}`;
+}

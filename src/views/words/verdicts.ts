@@ -1,0 +1,45 @@
+/** Verdicts, duty points and the unknown in words. */
+import type { Finding } from '../../core/check/finding.ts';
+import type { DutyName, Unknown } from '../../core/document/project.ts';
+import type { Choice } from './elements.ts';
+
+export type Verdict = Finding['verdict'];
+
+export const verdictWords: Readonly<Record<Verdict, string>> = {
+  inside: 'inside',
+  caution: 'caution',
+  outside: 'outside',
+};
+
+/** The state of a whole meter: 'inside', '1 caution', '2 outside', 'not solved'. */
+export function meterVerdict(verdicts: readonly Verdict[]): { readonly worst: Verdict; readonly words: string } {
+  const outside = verdicts.filter((verdict) => verdict === 'outside').length;
+  if (outside > 0) return { worst: 'outside', words: `${outside} outside` };
+  const cautions = verdicts.filter((verdict) => verdict === 'caution').length;
+  if (cautions > 0) return { worst: 'caution', words: cautions === 1 ? '1 caution' : `${cautions} cautions` };
+  return { worst: 'inside', words: 'inside' };
+}
+
+export const notSolved = 'not solved';
+
+export const dutyNames: readonly DutyName[] = ['maximum', 'normal', 'minimum'];
+
+export const dutyLabels: Readonly<Record<DutyName, string>> = {
+  maximum: 'maximum',
+  normal: 'normal',
+  minimum: 'minimum',
+};
+
+/** The question that a meter answers, in the order of the list. */
+export const unknownChoices: readonly (Choice & { readonly value: Unknown })[] = [
+  { value: 'bore', label: 'Bore' },
+  { value: 'differential', label: 'Differential pressure' },
+  { value: 'flow', label: 'Flow' },
+];
+
+/** What an unknown was found from, beside the shaded field. */
+export const foundFrom: Readonly<Record<Unknown, string>> = {
+  bore: 'found from flow and differential',
+  differential: 'found from flow and bore',
+  flow: 'found from bore and differential',
+};
