@@ -1,0 +1,25 @@
+/** Every primary element of this version, by the kind the file writes. */
+import { fail, type Outcome, ok } from '../quantity/outcome.ts';
+import type { Element } from './contract.ts';
+import { orificePlate } from './orifice-plate.ts';
+
+export const elements: readonly Element[] = [orificePlate];
+
+/** Kinds that the file format names and this version does not compute. */
+export const notOffered: readonly string[] = [
+  'cone',
+  'wedge',
+  'quarter-circle-plate',
+  'conical-entrance-plate',
+  'eccentric-plate',
+  'segmental-plate',
+  'averaging-pitot',
+];
+
+/** The element of a kind, or the problem `element-not-offered` or `element-unknown` at `element.kind`. */
+export const elementOf = (kind: string): Outcome<Element> => {
+  const element = elements.find((one) => one.kind === kind);
+  if (element !== undefined) return ok(element);
+  const code = notOffered.includes(kind) ? 'element-not-offered' : 'element-unknown';
+  return fail(code, 'element.kind', { written: kind, known: elements.map((one) => one.kind).join(', ') });
+};
