@@ -17,7 +17,7 @@ const YARD_AND_POUND: Source = { clause: 'International yard and pound, 1959; NI
 const GRAVITY: Source = { clause: 'CGPM 1901: standard acceleration of free fall', seen: 'second-hand' };
 const SP811: Source = { clause: 'NIST SP 811, B.8', seen: 'second-hand' };
 const GALLON: Source = { clause: 'NIST Handbook 44, appendix C: US gallon and barrel', seen: 'second-hand' };
-const COLUMN: Source = { clause: 'ISO 80000-4: conventional liquid columns', seen: 'memory' };
+const COLUMN: Source = { clause: 'NIST SP 811, B.8: conventional water and mercury', seen: 'second-hand' };
 const TANAKA: Source = { clause: 'Tanaka et al., Metrologia 38 (2001) 301, eq. 1: air-free water', seen: 'memory' };
 
 const exact = (value: string, source: Source): Factor => ({ value, source, exact: true });

@@ -3,7 +3,7 @@ import { Exact, fractionOf, nearestDouble } from './exact.ts';
 import { FACTORS } from './factors.table.ts';
 import type { Measure, Unit } from './measure.ts';
 import type { Source } from './source.ts';
-import { UNIT_ROWS, type Row } from './units.table.ts';
+import { type Row, UNIT_ROWS } from './units.table.ts';
 
 export type { Measure, Unit } from './measure.ts';
 
@@ -47,7 +47,9 @@ const menus = new Map(MEASURES.map((measure) => [measure, UNIT_ROWS[measure].map
 const spellings = new Map(
   [...menus].map(([measure, units]) => [
     measure,
-    new Map(units.flatMap((unit) => [unit.symbol, unit.print, ...unit.aliases].map((text) => [plainSpelling(text), unit]))),
+    new Map(
+      units.flatMap((unit) => [unit.symbol, unit.print, ...unit.aliases].map((text) => [plainSpelling(text), unit])),
+    ),
   ]),
 );
 
@@ -74,13 +76,23 @@ export const measuresOf = (spelling: string): readonly Measure[] =>
  */
 export function toSI(number: string, unit: Unit): number {
   const { numerator, denominator } = fractionOf(unit.factor);
-  return nearestDouble(new Exact(number).plus(unit.offset ?? 0).times(numerator).div(denominator));
+  return nearestDouble(
+    new Exact(number)
+      .plus(unit.offset ?? 0)
+      .times(numerator)
+      .div(denominator),
+  );
 }
 
 /** Number in a unit of an SI value, read as its shortest decimal: 0.10226 m gives 102.26 mm and no more digits. */
 export function fromSI(si: number, unit: Unit): number {
   const { numerator, denominator } = fractionOf(unit.factor);
-  return nearestDouble(new Exact(si).times(denominator).div(numerator).minus(unit.offset ?? 0));
+  return nearestDouble(
+    new Exact(si)
+      .times(denominator)
+      .div(numerator)
+      .minus(unit.offset ?? 0),
+  );
 }
 
 /**
@@ -88,7 +100,8 @@ export function fromSI(si: number, unit: Unit): number {
  * exact number has no more.
  */
 export function convert(number: string, from: Unit, to: Unit): string {
-  if (from.measure !== to.measure) throw new Error(`expected units of one measure, got ${from.symbol} and ${to.symbol}`);
+  if (from.measure !== to.measure)
+    throw new Error(`expected units of one measure, got ${from.symbol} and ${to.symbol}`);
   if (from.symbol === to.symbol) return number;
   const [a, b] = [fractionOf(from.factor), fractionOf(to.factor)];
   return new Exact(number)

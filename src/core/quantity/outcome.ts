@@ -1,0 +1,23 @@
+/**
+ * An answer that can fail: the value, or a problem. A problem is input that cannot be read or solved; it names its
+ * place and its cause by code, views/words turns it into a sentence. It is never thrown.
+ */
+export interface Problem {
+  /** Code in kebab case, for example `unit-unknown`. Every code has a sentence in views/words. */
+  readonly code: string;
+  /** Path of the field in the document, dots between keys, for example `upstream.pressure`. */
+  readonly field: string;
+  /** What the sentence needs: what was written, what was expected, bounds, figures in SI. */
+  readonly detail: Readonly<Record<string, string | number>>;
+}
+
+export type Outcome<Value> =
+  | { readonly ok: true; readonly value: Value }
+  | { readonly ok: false; readonly problems: readonly [Problem, ...Problem[]] };
+
+export const ok = <Value>(value: Value): Outcome<Value> => ({ ok: true, value });
+
+export const fail = (code: string, field: string, detail: Problem['detail'] = {}): Outcome<never> => ({
+  ok: false,
+  problems: [{ code, field, detail }],
+});
