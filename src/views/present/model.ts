@@ -2,10 +2,14 @@
  * What the views print. present/ turns a result into these rows in display units, by one rounding rule; screen, chart,
  * sheet and headless print them and compute nothing.
  */
-import type { Assumption, Verdict } from '../../core/check/finding.ts';
 import type { DutyName, Unknown } from '../../core/document/project.ts';
 import type { Seen } from '../../core/quantity/source.ts';
+import type { Solved } from '../../core/result/record.ts';
 import type { Expression } from './formula.ts';
+
+export type Finding = Solved['checks'][number];
+export type Verdict = Finding['verdict'];
+export type Assumption = Finding['assumption'];
 
 /** A number as printed. `text` is number, no-break space, unit; `plain` is the same in ASCII, for the clipboard. */
 export interface Value {

@@ -4,7 +4,7 @@ export interface Token {
   readonly text: string;
 }
 
-const pattern = /(\d+(?:\.\d+)?(?:[eE][+-]?\d+)?)|(\p{L}[\p{L}\p{N}]*(?:_[\p{L}\p{N}]+)?)|([-+*/^();])/uy;
+const pattern = /(\d+(?:\.\d+)?(?:[eE][+-]?\d+)?)|(\p{L}[\p{L}\p{N}']*(?:_[\p{L}\p{N}]+)?)|([-+*/^();])/uy;
 
 /** The formula cut into tokens, spaces left out. Throws a defect at a sign that the notation does not have. */
 export function tokens(text: string): readonly Token[] {

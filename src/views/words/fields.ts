@@ -76,3 +76,10 @@ export function fieldLabel(path: string): string {
   const [, list = '', place = '0', rest] = row;
   return `${labels[list] ?? list}, row ${Number(place) + 1}${rest === undefined ? '' : `, ${rest}`}`;
 }
+
+/** The field as it stands inside a sentence: 'the upstream pressure', 'the tappings'. */
+export function fieldPlace(path: string): string {
+  const label = fieldLabel(path);
+  const plain = /^[A-Z][a-z]/.test(label) ? label.charAt(0).toLowerCase() + label.slice(1) : label;
+  return `the ${plain}`;
+}

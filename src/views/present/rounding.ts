@@ -1,0 +1,44 @@
+/** The one rounding rule: how many digits each quantity is printed with, the same on screen, paper and in sentences. */
+import type { Role } from '../words/print.ts';
+
+/** Significant digits, or decimals in the unit that is shown. */
+export type Rounding = { readonly significant: number } | { readonly decimals: number };
+
+const rounding: Readonly<Record<Role, Rounding>> = {
+  bore: { significant: 5 },
+  length: { significant: 3 },
+  roughness: { significant: 2 },
+  pressure: { significant: 4 },
+  differential: { significant: 4 },
+  loss: { significant: 3 },
+  massFlow: { significant: 4 },
+  volumeFlow: { significant: 4 },
+  baseVolumeFlow: { significant: 4 },
+  temperature: { decimals: 1 },
+  density: { significant: 4 },
+  viscosity: { significant: 4 },
+  velocity: { significant: 3 },
+  head: { significant: 3 },
+  angle: { significant: 3 },
+  molarMass: { significant: 5 },
+  reynolds: { significant: 3 },
+  ratio: { decimals: 4 },
+  coefficient: { decimals: 4 },
+  factor: { decimals: 4 },
+  percent: { significant: 2 },
+  uncertainty: { significant: 2 },
+  bores: { significant: 3 },
+  number: { significant: 4 },
+};
+
+/** A workshop reads a diameter to the hundredth of a millimetre, whatever its size. */
+const boreDecimals: Readonly<Record<string, number>> = { mm: 2, cm: 3, m: 5, in: 4, ft: 5 };
+
+/** The rule for one role in the unit shown. */
+export function roundingOf(role: Role, unit: string): Rounding {
+  const decimals = role === 'bore' ? boreDecimals[unit] : undefined;
+  return decimals === undefined ? rounding[role] : { decimals };
+}
+
+/** Figures inside a working line: enough for a reader to repeat it and meet the result. */
+export const workingRounding: Rounding = { significant: 6 };

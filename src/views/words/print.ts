@@ -1,0 +1,62 @@
+/**
+ * How a sentence gets its figures: it names the figure and its role, present/ prints it in display units. Words know
+ * no units and round nothing.
+ */
+export type Role =
+  | 'bore' // pipe, bore and throat diameters
+  | 'length'
+  | 'roughness'
+  | 'pressure' // absolute
+  | 'differential'
+  | 'loss'
+  | 'massFlow'
+  | 'volumeFlow'
+  | 'baseVolumeFlow'
+  | 'temperature'
+  | 'density'
+  | 'viscosity'
+  | 'velocity'
+  | 'head'
+  | 'angle'
+  | 'molarMass'
+  | 'reynolds'
+  | 'ratio' // diameter ratio
+  | 'coefficient'
+  | 'factor'
+  | 'percent' // the figure is a percentage
+  | 'uncertainty' // the same, of a flow
+  | 'bores' // multiples of the pipe bore
+  | 'number';
+
+/** An SI figure as text with its unit. */
+export type Print = (si: number, role: Role) => string;
+
+const siUnits: Readonly<Record<Role, string>> = {
+  bore: 'm',
+  length: 'm',
+  roughness: 'm',
+  pressure: 'Pa(a)',
+  differential: 'Pa',
+  loss: 'Pa',
+  massFlow: 'kg/s',
+  volumeFlow: 'm³/s',
+  baseVolumeFlow: 'base m³/s',
+  temperature: 'K',
+  density: 'kg/m³',
+  viscosity: 'Pa·s',
+  velocity: 'm/s',
+  head: 'm',
+  angle: 'rad',
+  molarMass: 'kg/mol',
+  reynolds: '',
+  ratio: '',
+  coefficient: '',
+  factor: '',
+  percent: '%',
+  uncertainty: '%',
+  bores: 'D',
+  number: '',
+};
+
+/** The figure as it is, in SI: where no meter says which units to show. */
+export const printSI: Print = (si, role) => `${si} ${siUnits[role]}`.trimEnd();

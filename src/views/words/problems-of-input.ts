@@ -1,0 +1,38 @@
+/** Problems of a meter's fields: type, choice, what is missing. */
+import type { ProblemWords } from './detail.ts';
+
+export const inputProblems: ProblemWords = {
+  'field-missing': (d) => ({ cause: `${d.place} is not given.`, next: 'Fill it in.' }),
+  'text-expected': (d) => ({
+    cause: `${d.place} should be text, and the file has ${d.text('written')}.`,
+    next: 'Write the number with its unit between quotation marks.',
+  }),
+  'number-expected': (d) => ({
+    cause: `${d.place} should be a number, and the file has ${d.text('written')}.`,
+    next: 'Write a plain number.',
+  }),
+  'group-expected': (d) => ({
+    cause: `${d.place} should be a group of named fields, and the file has ${d.text('written')}.`,
+    next: 'Write it between braces, each field with its name.',
+  }),
+  'list-expected': (d) => ({
+    cause: `${d.place} should be a list, and the file has ${d.text('written')}.`,
+    next: 'Write it between square brackets.',
+  }),
+  'choice-unknown': (d) => ({
+    cause: `'${d.text('written')}' is no choice for ${d.place}.`,
+    next: `Choose ${d.list('choices')}.`,
+  }),
+  'calibration-order': (d) => ({
+    cause: `${d.place} '${d.text('written')}' does not lie above the row before.`,
+    next: 'Put the rows in order of rising Reynolds number, each once.',
+  }),
+  'element-unknown': (d) => ({
+    cause: `'${d.text('written')}' is no kind of element.`,
+    next: `Choose ${d.list('known')}.`,
+  }),
+  'element-not-offered': (d) => ({
+    cause: `This version keeps '${d.text('written')}' in the file and does not compute it.`,
+    next: `Choose ${d.list('known')}.`,
+  }),
+};

@@ -1,0 +1,58 @@
+/** Problems of the fluid's state and of the solution. */
+import type { ProblemWords } from './detail.ts';
+
+export const solvingProblems: ProblemWords = {
+  'water-out-of-range': (d) => ({
+    cause:
+      `${d.figure('pressure', 'pressure')} and ${d.figure('temperature', 'temperature')} lie outside the ` +
+      'formulation of water and steam.',
+    next:
+      `It holds from ${d.figure('lowestTemperature', 'temperature')} to ` +
+      `${d.figure('highestTemperature', 'temperature')}, and at this temperature up to ` +
+      `${d.figure('highestPressure', 'pressure')}: check ${d.place}.`,
+  }),
+  'phase-impossible': (d) => ({
+    cause:
+      `Water is no ${d.text('phase')} at ${d.figure('pressure', 'pressure')} and ` +
+      `${d.figure('temperature', 'temperature')}.`,
+    next: 'Leave the phase to the state, or check pressure and temperature.',
+  }),
+  'phase-far-from-saturation': (d) => ({
+    cause:
+      `At ${d.figure('pressure', 'pressure')} water boils at ${d.figure('saturationTemperature', 'temperature')}; ` +
+      `at ${d.figure('temperature', 'temperature')} it is too far from there to be held as ${d.text('phase')}.`,
+    next: 'Leave the phase to the state, or check pressure and temperature.',
+  }),
+  'differential-exceeds-pressure': (d) => ({
+    cause:
+      `The differential of ${d.figure('differential', 'differential')} is as large as the upstream pressure of ` +
+      `${d.figure('pressure', 'pressure')}.`,
+    next: 'Lower the differential or the flow, or check the upstream pressure.',
+  }),
+  'differential-too-large': (d) => ({
+    cause:
+      `This flow needs a differential beyond the part of the upstream pressure ${d.figure('pressure', 'pressure')} ` +
+      'for which the expansibility factor is known.',
+    next: 'Choose a larger bore or a smaller flow.',
+  }),
+  'flow-unsettled': (d) => ({
+    cause:
+      `The flow did not settle: the discharge coefficient was last sought from ` +
+      `${d.figure('lower', 'coefficient')} to ${d.figure('upper', 'coefficient')}.`,
+    next: 'Check bore, differential and fluid.',
+  }),
+  'bore-unsettled': (d) => ({
+    cause:
+      `The bore did not settle: the diameter ratio was last sought from ${d.figure('lower', 'ratio')} to ` +
+      `${d.figure('upper', 'ratio')}.`,
+    next: 'Check flow, differential and fluid.',
+  }),
+  'bore-too-large': (d) => ({
+    cause: `Even a diameter ratio of ${d.figure('ratio', 'ratio')} makes more than this differential.`,
+    next: 'Raise the differential, lower the flow or choose a larger pipe.',
+  }),
+  'bore-too-small': (d) => ({
+    cause: `Even a diameter ratio of ${d.figure('ratio', 'ratio')} makes less than this differential.`,
+    next: 'Lower the differential, raise the flow or choose a smaller pipe.',
+  }),
+};
