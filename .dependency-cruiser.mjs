@@ -2,6 +2,17 @@
  * The import rule: who may import whom, as two tables. A room may import itself and the rooms in its row; every other
  * path under src/ is closed to it. An import only points to what already exists when the room runs.
  */
+import swc from '@swc/core';
+
+/**
+ * dependency-cruiser asks the parser for TypeScript without JSX and stops at the first tag: tell it which files have tags.
+ */
+const { parseFileSync } = swc;
+Object.assign(swc, {
+  parseFileSync: (/** @type {string} */ path, /** @type {object} */ options) =>
+    parseFileSync(path, { ...options, syntax: 'typescript', tsx: path.endsWith('.tsx') }),
+});
+
 const core = [
   'numeric',
   'quantity',
@@ -19,7 +30,7 @@ const core = [
   'compare',
   'log',
 ];
-const before = (room) => core.slice(0, core.indexOf(room)).map((earlier) => `core/${earlier}`);
+const before = (/** @type {string} */ room) => core.slice(0, core.indexOf(room)).map((earlier) => `core/${earlier}`);
 const seen = ['core/result', 'views/present', 'views/words'];
 
 export const mayImport = {
@@ -52,9 +63,9 @@ export const packages = {
   vite: ['app'],
 };
 
-const at = (rooms) => `^src/(${rooms.join('|')})(/|\\.)`;
-const literal = (text) => text.replaceAll('.', '\\.');
-const packagePath = (name) => `^(node_modules/)?${literal(name)}(/|$)`;
+const at = (/** @type {string[]} */ rooms) => `^src/(${rooms.join('|')})(/|\\.)`;
+const literal = (/** @type {string} */ text) => text.replaceAll('.', '\\.');
+const packagePath = (/** @type {string} */ name) => `(^|/node_modules/|^node_modules/)${literal(name)}(/|$)`;
 
 const roomRules = Object.entries(mayImport).map(([room, rooms]) => ({
   name: `room-${room.replace('/', '-')}`,
@@ -133,6 +144,10 @@ export default {
     tsPreCompilationDeps: true, // type-only imports count too
     parser: 'swc', // without a parser of its own the tool reads no TypeScript and reports success
     doNotFollow: { path: 'node_modules' },
-    enhancedResolveOptions: { extensions: ['.ts', '.tsx', '.js', '.mjs'] },
+    enhancedResolveOptions: {
+      extensions: ['.ts', '.tsx', '.js', '.mjs'],
+      exportsFields: ['exports'],
+      conditionNames: ['import', 'node', 'default'],
+    },
   },
 };

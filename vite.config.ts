@@ -74,9 +74,8 @@ const offline = () =>
       inlineWorkboxRuntime: true,
       sourcemap: false,
       cleanupOutdatedCaches: true,
+      clientsClaim: true, // the first visit is already kept, chunks of later screens included
       maximumFileSizeToCacheInBytes: 4_000_000,
-      // A module script is answered with `Vary: Origin`; without this its kept copy is not found and the page stays white.
-      matchOptions: { ignoreVary: true },
     },
   });
 
