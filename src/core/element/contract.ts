@@ -85,6 +85,8 @@ export interface Primary {
   readonly ratioRange: { readonly min: number; readonly max: number };
   /** Share of the lower Reynolds limit below which C is held (see methods of solve); absolute number. */
   readonly reynoldsFloor: (at: Geometry) => number;
+  /** First guess of C for the solver: ISO 5167-1:2003, Annex A (0.606 for orifice plates, 1 for the others). */
+  readonly guess: number;
   readonly discharge: (at: Geometry) => Discharge;
   readonly expansibility: (ratio: number, isentropicExponent: number) => Expansibility;
   /** Permanent pressure loss as a share of the differential. */

@@ -1,7 +1,7 @@
 /**
  * Orifice plate, square-edged with corner, flange or D and D/2 tappings.
  * Standard: ISO 5167-2:2022, clauses: geometry 5.1, discharge 5.3.2.1, expansibility 5.3.2.2, uncertainty 5.3.3, limits 5.3.1.
- * Symbols: clause 4 of the standard, SI.
+ * Symbols: clause 3 of the standard, SI.
  * Departs: 6.2: tabled lengths and roughness are interpolated in β, because the tables leave it open.
  */
 import type { Given, Working } from '../quantity/working.ts';
@@ -66,12 +66,12 @@ const discharge = (tappings: Tappings, at: Geometry): Discharge => {
 };
 
 const formula = (tappings: Tappings, D: number): string => {
-  const core = '0.5961 + 0.0261 * β^2 - 0.216 * β^8 + 0.000521 * (1e6 * β / Re_D)^0.7';
-  const reynolds = ' + (0.0188 + 0.0063 * A) * β^3.5 * (1e6 / Re_D)^0.3';
+  const core = '0.5961 + 0.0261 * β^2 - 0.216 * β^8 + 0.000521 * (1e6 * β / Re_D)^0.7'; // Formula (4)
+  const reynolds = ' + (0.0188 + 0.0063 * A) * β^3.5 * (1e6 / Re_D)^0.3'; // Formula (4)
   const tapping = // zero with corner tappings
-    ' + (0.043 + 0.08 * exp(-10 * L_1) - 0.123 * exp(-7 * L_1)) * (1 - 0.11 * A) * β^4 / (1 - β^4)' +
-    ' - 0.031 * (M_2 - 0.8 * M_2^1.1) * β^1.3';
-  const small = ' + 0.011 * (0.75 - β) * (2.8 - D / 25.4)';
+    ' + (0.043 + 0.08 * exp(-10 * L_1) - 0.123 * exp(-7 * L_1)) * (1 - 0.11 * A) * β^4 / (1 - β^4)' + // Formula (4)
+    ' - 0.031 * (M_2 - 0.8 * M_2^1.1) * β^1.3'; // Formula (4)
+  const small = ' + 0.011 * (0.75 - β) * (2.8 - D / 25.4)'; // Formula (4)
   return core + reynolds + (tappings === 'corner' ? '' : tapping) + (D < smallPipe ? small : '');
 };
 
@@ -106,7 +106,7 @@ const leastReynolds = (tappings: Tappings, { ratio, pipe }: Geometry): number =>
 
 const limits = (tappings: Tappings, at: Geometry, reynolds: number): readonly Limit[] => [
   { id: 'pipe-bore', min: 0.05, max: 1, source: iso('5.3.1', 'read') },
-  { id: 'element-bore', min: 0.0125, source: iso('5.3.1', 'second-hand') },
+  { id: 'element-bore', min: 0.0125, source: iso('5.3.1', 'second-hand') }, // 5.3.1
   { id: 'diameter-ratio', min: 0.1, max: 0.75, source: iso('5.3.1', 'second-hand') },
   { id: 'reynolds-pipe', min: leastReynolds(tappings, at), source: iso('5.3.1', 'second-hand') },
   { id: 'pressure-ratio', min: 0.75, source: iso('5.3.2.2', 'second-hand') },
@@ -140,8 +140,8 @@ const expansibilityUncertainty = (flow: Condition): Part => ({
 const plateDimensions = ({ pipe: D, bore: d, ratio }: Geometry): readonly Dimension[] => {
   const edge = dimensionsOf(iso2003('5.1.7', 'memory'));
   const plate = dimensionsOf(iso2003('5.1.3 to 5.1.6', 'memory'));
-  const line = dimensionsOf(iso2003('6.4.1 and 6.5.2', 'memory'));
-  const offset = 0.0025 / (0.1 + 2.3 * ratio ** 4); // 6.5.2, e_cl over D
+  const line = dimensionsOf(iso2003('6.4.1 and 6.5', 'memory'));
+  const offset = 0.0025 / (0.1 + 2.3 * ratio ** 4); // 6.5, e_cl over D
   return [
     plate.length('plate-thickness-edge', 'e', { min: 0.005 * D, max: 0.02 * D }), // 5.1.5
     plate.length('plate-thickness', 'E', { min: 0.005 * D, max: D <= 0.064 ? 0.0032 : 0.05 * D }), // 5.1.5
@@ -153,8 +153,8 @@ const plateDimensions = ({ pipe: D, bore: d, ratio }: Geometry): readonly Dimens
     edge.angle('edge-angle', 'G', within(90, 0.3)), // 5.1.7
     edge.ratio('bore-roundness', 'Δd/d', { max: 0.0005 }), // 5.1.8
     line.ratio('pipe-roundness', 'ΔD/D', { max: 0.003 }), // 6.4.1
-    line.length('eccentricity-along', 'e_cl', { max: offset * D }), // 6.5.2, parallel to the tappings
-    line.length('eccentricity-across', 'e_cn', { max: 2 * offset * D }), // 6.5.2
+    line.length('eccentricity-along', 'e_cl', { max: offset * D }), // 6.5, parallel to the tappings
+    line.length('eccentricity-across', 'e_cn', { max: 2 * offset * D }), // 6.5
   ];
 };
 
@@ -196,6 +196,7 @@ const primary = (tappings: Tappings): Primary => ({
   standard: 'ISO 5167-2:2022',
   ratioRange: { min: 0.05, max: 0.85 },
   reynoldsFloor: (at) => 0.1 * leastReynolds(tappings, at),
+  guess: 0.606, // ISO 5167-1:2003, Annex A
   discharge: (at) => discharge(tappings, at),
   expansibility: orificeExpansibility,
   lossShare: (at, coefficient) => jetLossShare(at.ratio, coefficient),

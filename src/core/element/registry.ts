@@ -1,9 +1,13 @@
 /** Every primary element of this version, by the kind the file writes. */
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import type { Element } from './contract.ts';
+import { isa1932Nozzle } from './isa-1932-nozzle.ts';
+import { longRadiusNozzle } from './long-radius-nozzle.ts';
 import { orificePlate } from './orifice-plate.ts';
+import { venturiNozzle } from './venturi-nozzle.ts';
+import { venturiTube } from './venturi-tube.ts';
 
-export const elements: readonly Element[] = [orificePlate];
+export const elements: readonly Element[] = [orificePlate, isa1932Nozzle, longRadiusNozzle, venturiNozzle, venturiTube];
 
 /** Kinds that the file format names and this version does not compute. */
 export const notOffered: readonly string[] = [

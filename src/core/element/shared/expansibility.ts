@@ -20,13 +20,14 @@ export const orificeExpansibility = (ratio: number, isentropicExponent: number):
  * Nozzles, Venturi nozzles and Venturi tubes: one-dimensional isentropic flow,
  * eps^2 = [kappa tau^(2/kappa)/(kappa-1)] [(1-beta^4)/(1-beta^4 tau^(2/kappa))] [(1-tau^((kappa-1)/kappa))/(1-tau)].
  * Written with expm1 and log1p, so that it keeps every digit at small x and passes kappa = 1 and x = 0 smoothly.
- * Source: ISO 5167-3:2022, Formula (6), and ISO 5167-4:2003, Formula (2). Throws a defect for x outside [0, 1).
+ * Source: ISO 5167-3:2022, 5.1.6.3, and ISO 5167-4:2003, 5.6. Throws a defect for x outside [0, 1).
  */
 export const nozzleExpansibility = (ratio: number, isentropicExponent: number): Expansibility => {
   const b4 = ratio ** 4;
   const n = (isentropicExponent - 1) / isentropicExponent;
   return (x) => {
     const l = logTau(x); // ln tau
+    // ISO 5167-3, 5.1.6.3, factor by factor
     const jet = Math.exp((2 * l) / isentropicExponent); // tau^(2/kappa)
     const area = (1 - b4) / (1 - b4 * jet);
     const work = x === 0 ? 1 : (-l / x) * relativeExpm1(n * l); // kappa/(kappa-1) (1-tau^((kappa-1)/kappa))/(1-tau)
