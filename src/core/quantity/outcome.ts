@@ -21,3 +21,10 @@ export const fail = (code: string, field: string, detail: Problem['detail'] = {}
   ok: false,
   problems: [{ code, field, detail }],
 });
+
+/** The problems of several outcomes together, in their order; at least one of them must have failed. */
+export function gather(...outcomes: readonly Outcome<unknown>[]): Outcome<never> {
+  const [first, ...rest] = outcomes.flatMap((outcome) => (outcome.ok ? [] : outcome.problems));
+  if (first === undefined) throw new Error('gather: expected a failed outcome, got none');
+  return { ok: false, problems: [first, ...rest] };
+}

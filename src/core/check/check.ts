@@ -1,0 +1,32 @@
+/** Every check of a solved meter, grouped by the order of the assumptions. */
+import type { Budgets } from '../uncertainty/duty.ts';
+import { checkCalibration } from './calibration.ts';
+import type { Case } from './case.ts';
+import type { Assumption, Finding } from './finding.ts';
+import { checkLimits } from './limits.ts';
+import { checkPhase } from './phase.ts';
+import { checkPlate } from './plate.ts';
+import { checkPractice } from './practice.ts';
+
+export const ASSUMPTIONS: readonly Assumption[] = [
+  'steady',
+  'incompressible',
+  'frictionless',
+  'one-streamline',
+  'one-phase',
+  'range-and-span',
+];
+
+/** All findings; `straight` are those of straight.ts, which the uncertainty needed earlier. */
+export function check(subject: Case, budgets: Budgets, straight: readonly Finding[]): readonly Finding[] {
+  const findings = [
+    ...checkLimits(subject),
+    ...checkCalibration(subject),
+    ...straight,
+    ...checkPhase(subject),
+    ...checkPlate(subject),
+    ...checkPractice(subject, budgets),
+  ];
+  const rank = ({ assumption }: Finding) => ASSUMPTIONS.indexOf(assumption);
+  return findings.sort((one, other) => rank(one) - rank(other));
+}

@@ -1,0 +1,81 @@
+/** One phase: boiling of a liquid behind and in the jet, condensation of a vapour, a phase settled by the user. */
+import type { Source } from '../quantity/source.ts';
+import { type Case, flowsOf, largest } from './case.ts';
+import type { Finding } from './finding.ts';
+
+const JET: Source = { clause: 'one-dimensional jet behind ISO 5167-2:2003, Eq (7)', seen: 'derived' };
+const MARGIN: Source = { clause: 'cavitation index (p1 - dp - pv)/dp; 0.5 is custom', seen: 'practice' };
+const SATURATION: Source = { clause: 'IAPWS R7-97(2012), Eq (31); 5 K is custom', seen: 'practice' };
+/** Below it the jet is close to boiling; where C itself may shift is lower, near 0.2. */
+const LEAST_MARGIN = 0.5;
+/** Superheat or subcooling that a line's swings of pressure and temperature may eat up. */
+const LEAST_DISTANCE = 5; // K
+
+export function checkPhase(subject: Case): readonly Finding[] {
+  return [...checkBoiling(subject), ...checkSaturation(subject)];
+}
+
+/** Pressure behind the element and in the jet against the vapour pressure, at the flow with the largest differential. */
+function checkBoiling(subject: Case): Finding[] {
+  const { meter } = subject.solution;
+  const { state, primary, geometry } = meter;
+  const vapour = state.vapourPressure;
+  if (state.phase !== 'liquid' || vapour === undefined) return [];
+  const flow = largest(flowsOf(subject), ({ differential }) => differential);
+  const loss = flow.differential * primary.lossShare(geometry, flow.coefficient, flow.reynolds);
+  const common = { assumption: 'one-phase', at: flow.name } as const;
+  const behind = state.pressure - loss;
+  const jet = state.pressure - flow.differential;
+  const flashing: Finding = {
+    ...common,
+    id: 'flashing',
+    verdict: behind <= vapour ? 'outside' : 'inside',
+    value: behind,
+    unit: 'Pa',
+    limit: { min: vapour },
+    source: JET,
+  };
+  const cavitation: Finding = {
+    ...common,
+    id: 'cavitation',
+    verdict: jet <= vapour ? 'outside' : 'inside',
+    value: jet,
+    unit: 'Pa',
+    limit: { min: vapour },
+    source: JET,
+  };
+  const index = (jet - vapour) / flow.differential;
+  const margin: Finding = {
+    ...common,
+    id: 'cavitation-margin',
+    verdict: index < LEAST_MARGIN ? 'caution' : 'inside',
+    value: index,
+    unit: '1',
+    limit: { min: LEAST_MARGIN },
+    source: MARGIN,
+  };
+  return jet <= vapour ? [flashing, cavitation] : [flashing, cavitation, margin];
+}
+
+/** Distance from the saturation line; a phase that was settled against or on the line is a caution. */
+function checkSaturation({ solution }: Case): Finding[] {
+  const { state } = solution.meter;
+  if (state.saturationTemperature === undefined || state.phase === 'supercritical') return [];
+  const liquid = state.phase === 'liquid';
+  const distance = liquid
+    ? state.saturationTemperature - state.temperature
+    : state.temperature - state.saturationTemperature;
+  const near = distance < LEAST_DISTANCE;
+  return [
+    {
+      id: liquid ? 'subcooling' : 'superheat',
+      assumption: 'one-phase',
+      verdict: near || state.phaseForced === true ? 'caution' : 'inside',
+      value: distance,
+      unit: 'K',
+      limit: { min: LEAST_DISTANCE },
+      source: SATURATION,
+      detail: { saturation: state.saturationTemperature, forced: state.phaseForced === true ? 'yes' : 'no' },
+    },
+  ];
+}

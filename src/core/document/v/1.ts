@@ -1,0 +1,97 @@
+/**
+ * The project file, version 1: what the user wrote, as text. Every value with a dimension is a string kept byte for
+ * byte; a plain number stands only for what has no unit. Keys this version does not know are kept.
+ */
+
+export type Unknown = 'bore' | 'differential' | 'flow';
+export type Display = 'SI' | 'US';
+export type DutyName = 'maximum' | 'normal' | 'minimum';
+
+export interface FluidText {
+  kind?: string;
+  phase?: string; // 'liquid' | 'vapour' settles the saturation line
+  density?: string;
+  viscosity?: string;
+  isentropicExponent?: string | number;
+  molarMass?: string;
+  compressibility?: string | number;
+  vapourPressure?: string;
+  baseDensity?: string;
+  [key: string]: unknown;
+}
+
+export interface PipeText {
+  size?: string; // name of the pipe size the bore was taken from, for example 'DN 100, 40'
+  bore?: string;
+  material?: string;
+  measuredAt?: string;
+  roughness?: string; // Ra
+  [key: string]: unknown;
+}
+
+export interface CalibrationRow {
+  reynolds?: string | number;
+  coefficient?: string | number;
+  [key: string]: unknown;
+}
+
+export interface ElementText {
+  kind?: string;
+  tappings?: string;
+  convergent?: string;
+  bore?: string;
+  material?: string;
+  measuredAt?: string;
+  plateThickness?: string; // E
+  edgeThickness?: string; // e
+  calibration?: CalibrationRow[];
+  [key: string]: unknown;
+}
+
+/** What stands before and after the element; lengths as '30 D' or as a length. */
+export interface InstallationText {
+  fitting?: string; // nearest fitting upstream
+  before?: string;
+  after?: string;
+  [key: string]: unknown;
+}
+
+/** Expanded relative uncertainties at 95 %, as '0.4 %'; the differential as '0.1 % of span' or '% of reading'. */
+export interface UncertaintyText {
+  bore?: string;
+  pipe?: string;
+  differential?: string;
+  density?: string;
+  [key: string]: unknown;
+}
+
+export interface MeterText {
+  tag?: string;
+  service?: string;
+  fluid?: FluidText;
+  upstream?: { pressure?: string; temperature?: string; [key: string]: unknown };
+  pipe?: PipeText;
+  element?: ElementText;
+  duty?: { maximum?: string; normal?: string; minimum?: string; [key: string]: unknown };
+  differential?: string;
+  find?: Unknown;
+  uncertainty?: UncertaintyText;
+  installation?: InstallationText;
+  [key: string]: unknown;
+}
+
+export interface ProjectV1 {
+  format: 'headwright';
+  version: 1;
+  title?: string;
+  revision?: string;
+  preparedBy?: string;
+  checkedBy?: string;
+  site?: { atmosphere?: string; gravity?: string; [key: string]: unknown };
+  base?: { pressure?: string; temperature?: string; [key: string]: unknown };
+  display?: Display;
+  /** Anything may stand in the list: what is no meter is refused where it stands, the others are solved. */
+  meters: MeterText[];
+  traverses?: unknown[];
+  [key: string]: unknown;
+}

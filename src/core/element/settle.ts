@@ -1,0 +1,12 @@
+/** An element with its own fields settled, and its coefficient replaced where the meter was calibrated. */
+import type { Element, Primary } from './contract.ts';
+import { type CalibrationPoint, calibrated } from './shared/calibration.ts';
+
+export function settled(
+  element: Element,
+  own: Readonly<Record<string, string | number>>,
+  calibration: readonly CalibrationPoint[],
+): Primary {
+  const primary = element.primary(own);
+  return calibration.length > 0 ? calibrated(primary, calibration) : primary;
+}

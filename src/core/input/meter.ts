@@ -1,0 +1,193 @@
+/**
+ * One meter of the document -> parsed quantities, or every problem found. What is to be found is not read.
+ * The element's own fields are declared by the element and handed in by run.ts.
+ */
+import type { DutyName, FluidText, MeterText, Unknown } from '../document/project.ts';
+import type {
+  AbsolutePressure,
+  BaseVolumeFlow,
+  Length,
+  MassFlow,
+  PressureDifference,
+  Temperature,
+  VolumeFlow,
+} from '../quantity/kinds.ts';
+import type { Outcome, Problem } from '../quantity/outcome.ts';
+import type { Quantity } from '../quantity/text.ts';
+import type { Field } from './field.ts';
+import { type Form, openForm } from './form.ts';
+import { type Installation, readInstallation } from './installation.ts';
+import type { Site } from './site.ts';
+import { readUncertainty, type StatedUncertainty } from './uncertainty.ts';
+
+export type FlowInput =
+  | { readonly basis: 'mass'; readonly value: MassFlow }
+  | { readonly basis: 'volume'; readonly value: VolumeFlow }
+  | { readonly basis: 'base'; readonly value: BaseVolumeFlow };
+
+export interface CalibrationPoint {
+  readonly reynolds: number;
+  readonly coefficient: number;
+}
+
+export interface MetalInput {
+  readonly bore: Length; // as measured
+  readonly material?: string;
+  readonly measuredAt: Temperature;
+}
+
+export interface MeterInput {
+  readonly tag: string;
+  readonly find: Unknown;
+  readonly fluid: FluidText;
+  readonly upstream: { readonly pressure: AbsolutePressure; readonly temperature: Temperature };
+  readonly pipe: MetalInput & { readonly roughness?: Length };
+  readonly element: Partial<MetalInput> & {
+    readonly measuredAt: Temperature;
+    readonly own: Readonly<Record<string, string | number>>;
+    readonly plateThickness?: Length;
+    readonly edgeThickness?: Length;
+    readonly calibration: readonly CalibrationPoint[];
+  };
+  readonly duty: Readonly<Partial<Record<DutyName, FlowInput>>>;
+  readonly differential?: PressureDifference;
+  readonly uncertainty: StatedUncertainty;
+  readonly installation: Installation;
+}
+
+const MEASURED_AT = 293.15 as Temperature; // 20 degC, the file contract's default
+const UNKNOWNS: readonly Unknown[] = ['bore', 'differential', 'flow'];
+
+/** Reads a meter whose shape is checked; `materials` are the keys thermal growth is known for. */
+export function readMeter(
+  meter: MeterText,
+  site: Site,
+  fields: readonly Field[],
+  materials: readonly string[],
+): Outcome<MeterInput> {
+  const form = openForm(meter);
+  const find = form.choice('find', UNKNOWNS, true);
+  const pressure = readPressure(form, site);
+  const temperature = form.positive('upstream.temperature', ['temperature'], true);
+  const pipe = readMetal(form, 'pipe', materials, true);
+  const element = readMetal(form, 'element', materials, find !== 'bore');
+  const roughness = form.positive('pipe.roughness', ['length']);
+  const plate = form.positive('element.plateThickness', ['length']);
+  const edge = form.positive('element.edgeThickness', ['length']);
+  const own = readOwn(form, fields);
+  const calibration = readCalibration(form, meter.element?.calibration?.length ?? 0);
+  const duty = readDuty(form, find);
+  const differential =
+    find === 'differential' ? undefined : form.positive('differential', ['pressure difference'], find !== undefined);
+  const uncertainty = readUncertainty(form);
+  const installation = readInstallation(form, pipe?.bore);
+  if (form.problems.length > 0 || !(find && pressure && temperature && pipe?.bore && element)) {
+    return { ok: false, problems: form.problems as [Problem, ...Problem[]] };
+  }
+  return {
+    ok: true,
+    value: {
+      tag: meter.tag ?? '',
+      find,
+      fluid: meter.fluid ?? {},
+      upstream: { pressure, temperature: temperature.si as Temperature },
+      pipe: { ...pipe, bore: pipe.bore, ...given('roughness', roughness?.si as Length | undefined) },
+      element: {
+        ...(find === 'bore' ? without(element, 'bore') : element),
+        measuredAt: element.measuredAt,
+        own,
+        calibration,
+        ...given('plateThickness', plate?.si as Length | undefined),
+        ...given('edgeThickness', edge?.si as Length | undefined),
+      },
+      duty,
+      ...given('differential', differential?.si as PressureDifference | undefined),
+      uncertainty,
+      installation,
+    },
+  };
+}
+
+/** Absolute as written, or gauge above the site's atmosphere. */
+function readPressure(form: Form, site: Site): AbsolutePressure | undefined {
+  const pressure = form.quantity('upstream.pressure', ['absolute pressure', 'gauge pressure'], true);
+  if (pressure === undefined) return undefined;
+  const absolute = pressure.unit.measure === 'gauge pressure' ? pressure.si + site.atmosphere : pressure.si;
+  if (absolute > 0) return absolute as AbsolutePressure;
+  return form.report('not-above-vacuum', 'upstream.pressure', {
+    written: `${pressure.number} ${pressure.unit.symbol}`,
+    absolute,
+  });
+}
+
+function readMetal(form: Form, group: 'pipe' | 'element', materials: readonly string[], boreRequired: boolean) {
+  const bore = boreRequired ? form.positive(`${group}.bore`, ['length'], true) : undefined;
+  const material = form.choice(`${group}.material`, materials);
+  const measuredAt = form.positive(`${group}.measuredAt`, ['temperature']);
+  return {
+    ...given('bore', bore?.si as Length | undefined),
+    ...given('material', material),
+    measuredAt: (measuredAt?.si ?? MEASURED_AT) as Temperature,
+  };
+}
+
+function readOwn(form: Form, fields: readonly Field[]): Record<string, string | number> {
+  const read = (field: Field): string | number | undefined => {
+    const path = `element.${field.name}`;
+    if (field.type === 'choice') return form.choice(path, field.choices, field.required);
+    if (field.type === 'number') return form.number(path, field.required);
+    return form.quantity(path, [field.measure], field.required)?.si;
+  };
+  return Object.fromEntries(
+    fields.flatMap((field) => {
+      const value = read(field);
+      return value === undefined ? [] : [[field.name, value]];
+    }),
+  );
+}
+
+function readCalibration(form: Form, rows: number): CalibrationPoint[] {
+  const points: CalibrationPoint[] = [];
+  for (let row = 0; row < rows; row += 1) {
+    const path = `element.calibration.${row}`;
+    const reynolds = positiveNumber(form, `${path}.reynolds`);
+    const coefficient = positiveNumber(form, `${path}.coefficient`);
+    if (reynolds === undefined || coefficient === undefined) continue;
+    const before = points.at(-1);
+    if (before && reynolds <= before.reynolds)
+      form.report('calibration-order', `${path}.reynolds`, { written: reynolds });
+    points.push({ reynolds, coefficient });
+  }
+  return points;
+}
+
+function positiveNumber(form: Form, field: string): number | undefined {
+  const value = form.number(field, true);
+  if (value === undefined || value > 0) return value;
+  return form.report('not-positive', field, { written: String(value) });
+}
+
+function readDuty(form: Form, find: Unknown | undefined): Partial<Record<DutyName, FlowInput>> {
+  const names: readonly DutyName[] = find === 'flow' ? ['normal', 'minimum'] : ['maximum', 'normal', 'minimum'];
+  const flows = names.flatMap((name) => {
+    const flow = form.positive(`duty.${name}`, ['mass flow', 'volume flow', 'base volume flow'], name === 'maximum');
+    return flow === undefined ? [] : [[name, flowOf(flow)] as const];
+  });
+  return Object.fromEntries(flows);
+}
+
+function flowOf({ si, unit }: Quantity): FlowInput {
+  if (unit.measure === 'volume flow') return { basis: 'volume', value: si as VolumeFlow };
+  if (unit.measure === 'base volume flow') return { basis: 'base', value: si as BaseVolumeFlow };
+  return { basis: 'mass', value: si as MassFlow };
+}
+
+/** A key that is absent when it has no value. */
+function given<Key extends string, Value>(key: Key, value: Value | undefined): { readonly [K in Key]?: Value } {
+  return (value === undefined ? {} : { [key]: value }) as { readonly [K in Key]?: Value };
+}
+
+function without<Group extends object, Key extends keyof Group>(group: Group, key: Key): Omit<Group, Key> {
+  const { [key]: _, ...rest } = group;
+  return rest;
+}

@@ -1,0 +1,36 @@
+/**
+ * Heads along the pipe at one flow, in metres of the upstream fluid above the pressure behind the meter. Up to the
+ * downstream tapping the total head is kept; what the jet then loses is the permanent loss. That is the model behind
+ * the standard's own loss formula, ISO 5167-2:2003, Eq (7).
+ */
+import type { Acceleration } from '../quantity/kinds.ts';
+import type { Meter, Operation } from '../solve/equation.ts';
+import type { HeadPoint } from './record.ts';
+import { velocityOf } from './working.ts';
+
+/** Straight pipe shown before the upstream tapping, in pipe bores. */
+const INLET = 3;
+
+export function headsOf(meter: Meter, operation: Operation, gravity: Acceleration): HeadPoint[] {
+  const { primary, geometry, state } = meter;
+  const head = (pressure: number) => pressure / (state.density * gravity); // p/(rho g)
+  const velocity = velocityOf(operation.massFlow, state.density, geometry.pipe) ** 2 / (2 * gravity); // V2/2g
+  const loss = head(operation.differential * primary.lossShare(geometry, operation.coefficient, operation.reynolds));
+  const throat = loss - head(operation.differential);
+  const tappings = primary.tappings(geometry);
+  const point = (station: string, position: number, pressure: number, total: number): HeadPoint => ({
+    station,
+    position_D: position,
+    total_m: total,
+    pressure_m: pressure,
+    computed: true,
+  });
+  const upstream = -tappings.upstream / geometry.pipe;
+  const downstream = tappings.downstream / geometry.pipe;
+  return [
+    point('inlet', upstream - INLET, loss, loss + velocity),
+    point('tapping-upstream', upstream, loss, loss + velocity),
+    point('tapping-downstream', downstream, throat, loss + velocity),
+    point('recovered', primary.recovery, 0, velocity),
+  ];
+}

@@ -1,0 +1,121 @@
+/**
+ * The one record every view reads. Keys that the headless output prints carry their SI unit, as the contract of the
+ * file writes them. A number that does not apply is absent.
+ */
+import type { Finding } from '../check/finding.ts';
+import type { DutyName, Unknown } from '../document/project.ts';
+import type { Dimension, StraightLength } from '../element/contract.ts';
+import type { Phase } from '../fluid/contract.ts';
+import type { Problem } from '../quantity/outcome.ts';
+import type { Source } from '../quantity/source.ts';
+import type { Working } from '../quantity/working.ts';
+
+export interface StateRecord {
+  readonly density_kg_m3: number;
+  readonly viscosity_Pa_s: number;
+  readonly isentropicExponent?: number;
+  readonly compressibility?: number;
+  readonly phase: Phase;
+  readonly vapourPressure_Pa?: number;
+  readonly saturationTemperature_K?: number;
+  readonly baseDensity_kg_m3?: number;
+  readonly pressure_Pa: number; // absolute, upstream tapping
+  readonly temperature_K: number;
+}
+
+export interface UncertaintyTerm {
+  readonly name: 'C' | 'epsilon' | 'pipe' | 'bore' | 'differential' | 'density';
+  readonly percentOfFlow: number;
+}
+
+export interface PointUncertainty {
+  readonly expanded_percent: number;
+  readonly terms: readonly UncertaintyTerm[];
+  /** Additive parts of the uncertainty of C, by the id of their words. */
+  readonly parts: readonly { readonly name: string; readonly percentOfC: number }[];
+}
+
+export interface PointRecord {
+  readonly massFlow_kg_s: number;
+  readonly volumeFlow_m3_s: number;
+  readonly baseVolumeFlow_m3_s?: number;
+  readonly differential_Pa: number;
+  readonly C: number;
+  readonly epsilon: number;
+  readonly reynoldsPipe: number;
+  readonly permanentLoss_Pa: number;
+  readonly velocityPipe_m_s: number;
+  readonly velocityBore_m_s: number;
+  readonly uncertainty: PointUncertainty;
+  /** The working of every figure of this point, in the order of the calculation. */
+  readonly working: readonly Working[];
+}
+
+/** A point of flow against differential; `inside` is false outside the Reynolds limits of the standard. */
+export interface CurvePoint {
+  readonly differential_Pa: number;
+  readonly massFlow_kg_s: number;
+  readonly reynoldsPipe: number;
+  readonly expanded_percent: number;
+  readonly inside: boolean;
+}
+
+/** Heads above the pipe axis at maximum flow, relative to the outlet's pressure head; metres of flowing fluid. */
+export interface HeadPoint {
+  /** inlet, tapping-upstream, tapping-downstream, recovered; sections of a Venturi between. */
+  readonly station: string;
+  /** Distance from the upstream face of the element, in pipe bores. */
+  readonly position_D: number;
+  readonly total_m: number;
+  readonly pressure_m: number;
+  /** False for a point that is drawn, not computed. */
+  readonly computed: boolean;
+}
+
+export interface Solved {
+  readonly tag: string;
+  readonly status: 'solved';
+  readonly find: Unknown;
+  /** Code of the words of kind and variant, for example `orifice-plate.flange`. */
+  readonly element: string;
+  readonly standard: string;
+  readonly state: StateRecord;
+  readonly bore_m: number;
+  readonly pipe_m: number;
+  readonly diameterRatio: number;
+  readonly boreAsMeasured_m: number;
+  readonly pipeAsMeasured_m: number;
+  readonly points: Readonly<Partial<Record<DutyName, PointRecord>>>;
+  /** The differential of the span: what the user set, or that of the maximum flow. */
+  readonly span_Pa: number;
+  readonly checks: readonly Finding[];
+  readonly curve: readonly CurvePoint[];
+  /** Pipe Reynolds numbers and differentials between which the standard holds for this element. */
+  readonly reynoldsLimits: { readonly min?: number; readonly max?: number; readonly source: Source };
+  readonly heads: readonly HeadPoint[];
+  readonly dimensions: readonly Dimension[];
+  readonly tappings: { readonly upstream_m: number; readonly downstream_m: number };
+  readonly straightLengths: readonly StraightLength[];
+  /** Working that belongs to the meter, not to one flow: state, thermal growth, diameter ratio, the found bore. */
+  readonly working: readonly Working[];
+  /** Every source behind the figures of this result, worst `seen` first, each once. */
+  readonly sources: readonly Source[];
+  /** Keys of the meter that this version keeps but does not evaluate (readings, log, ...). */
+  readonly unread: readonly string[];
+}
+
+export interface Refused {
+  readonly tag: string;
+  readonly status: 'refused';
+  /** The first cause; `problems` has all of them. */
+  readonly problem: Problem;
+  readonly problems: readonly Problem[];
+}
+
+export type MeterResult = Solved | Refused;
+
+export interface Results {
+  readonly results: readonly MeterResult[];
+  /** Traverses the document holds, refused until this version computes them. */
+  readonly traverses: readonly Refused[];
+}

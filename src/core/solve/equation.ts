@@ -1,0 +1,63 @@
+/** The flow equation of ISO 5167-1 and what all three unknowns share. */
+import type { Discharge, Expansibility, Geometry, Primary } from '../element/contract.ts';
+import { approachFactor } from '../element/shared/approach.ts';
+import type { FluidState } from '../fluid/contract.ts';
+import type { Length, MassFlow, PressureDifference } from '../quantity/kinds.ts';
+
+/** A meter with everything known but the flow and the differential. */
+export interface Meter {
+  readonly primary: Primary;
+  readonly geometry: Geometry;
+  readonly state: FluidState;
+}
+
+/** One flow through one meter. */
+export interface Operation {
+  readonly massFlow: MassFlow;
+  readonly differential: PressureDifference;
+  readonly coefficient: number;
+  readonly epsilon: number;
+  readonly reynolds: number; // Re_D
+  /** Reynolds number at which C was held, when the flow lies below the floor of the element. */
+  readonly heldAt?: number;
+  /** Evaluations of C (flow, bore) or of the expansibility (differential) that the solution took. */
+  readonly evaluations: number;
+}
+
+/** The bore equation's other name for C: never evaluated below the element's floor. */
+export interface Held {
+  readonly floor: number;
+  readonly at: Discharge;
+}
+
+export const heldDischarge = (primary: Primary, geometry: Geometry): Held => {
+  const floor = primary.reynoldsFloor(geometry);
+  const discharge = primary.discharge(geometry);
+  return { floor, at: (reynolds) => discharge(Math.max(reynolds, floor)) };
+};
+
+/** Expansibility factor against x; 1 for a liquid. */
+export const expansibilityOf = (primary: Primary, ratio: number, state: FluidState): Expansibility =>
+  state.expands ? primary.expansibility(ratio, expect(state.isentropicExponent)) : () => 1;
+
+/** Pipe Reynolds number of a mass flow: 4 q_m/(pi mu D), ISO 5167-1:2003, 3.3.2. */
+export const reynoldsOf = (massFlow: number, viscosity: number, pipe: number): number =>
+  (4 * massFlow) / (Math.PI * viscosity * pipe); // ISO 5167-1:2003, 3.3.2
+
+/** q_m/(C epsilon): E (pi/4) d2 sqrt(2 dp rho), ISO 5167-1:2022, Formula (1). */
+export const idealFlow = (geometry: Geometry, differential: number, density: number): number =>
+  approachFactor(geometry.ratio) * (Math.PI / 4) * geometry.bore ** 2 * Math.sqrt(2 * differential * density); // Formula (1)
+
+export const geometryOf = (pipe: Length, bore: number): Geometry => ({
+  pipe,
+  bore: bore as Length,
+  ratio: bore / pipe,
+});
+
+const expect = (exponent: number | undefined): number => {
+  if (exponent === undefined)
+    throw new Error('solve: expected an isentropic exponent for a fluid that expands, got none');
+  return exponent;
+};
+
+export const heldAt = (held: Held, reynolds: number) => (reynolds < held.floor ? { heldAt: held.floor } : {});

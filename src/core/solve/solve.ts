@@ -1,0 +1,92 @@
+/** Turns the one unknown into a meter that stands, and then asks that meter for every duty point. */
+
+import type { DutyName } from '../document/project.ts';
+import type { Primary } from '../element/contract.ts';
+import type { FluidState } from '../fluid/contract.ts';
+import type { FlowInput, MeterInput } from '../input/meter.ts';
+import type { Length, MassFlow, PressureDifference } from '../quantity/kinds.ts';
+import { fail, type Outcome, ok } from '../quantity/outcome.ts';
+import { boreFrom } from './bore.ts';
+import { differentialFrom } from './differential.ts';
+import type { Meter, Operation } from './equation.ts';
+import { flowFrom } from './flow.ts';
+import { asMeasured, atLine, hotGeometry } from './metal.ts';
+
+export interface Solution {
+  readonly meter: Meter;
+  readonly boreAsMeasured: Length;
+  readonly pipeAsMeasured: Length;
+  readonly duty: Readonly<Partial<Record<DutyName, Operation>>>;
+  /** The differential of the span: what was set, or that of the maximum flow. */
+  readonly span: PressureDifference;
+}
+
+/** Solves the unknown of a meter and its other duty points. Problems: those of flow.ts, differential.ts, bore.ts, metal.ts. */
+export function solve(input: MeterInput, primary: Primary, state: FluidState): Outcome<Solution> {
+  const first = solveUnknown(input, primary, state);
+  if (!first.ok) return first;
+  const { meter, boreAsMeasured, maximum } = first.value;
+  const span = input.differential ?? maximum.differential;
+  const duty: Partial<Record<DutyName, Operation>> = { maximum };
+  for (const name of ['normal', 'minimum'] as const) {
+    const flow = input.duty[name];
+    if (flow === undefined) continue;
+    const operation = operate(flow, meter, name, span);
+    if (!operation.ok) return operation;
+    duty[name] = operation.value;
+  }
+  return ok({ meter, boreAsMeasured, pipeAsMeasured: input.pipe.bore, duty, span });
+}
+
+interface First {
+  readonly meter: Meter;
+  readonly boreAsMeasured: Length;
+  readonly maximum: Operation;
+}
+
+function solveUnknown(input: MeterInput, primary: Primary, state: FluidState): Outcome<First> {
+  if (input.find === 'bore') return findBore(input, primary, state);
+  const bore = known(input.element.bore, 'element.bore');
+  const geometry = hotGeometry(bore, input);
+  if (!geometry.ok) return geometry;
+  const meter: Meter = { primary, geometry: geometry.value, state };
+  const maximum =
+    input.find === 'flow'
+      ? flowFrom(known(input.differential, 'differential'), meter)
+      : operate(known(input.duty.maximum, 'duty.maximum'), meter, 'maximum', 0);
+  return maximum.ok ? ok({ meter, boreAsMeasured: bore, maximum: maximum.value }) : maximum;
+}
+
+function findBore(input: MeterInput, primary: Primary, state: FluidState): Outcome<First> {
+  const massFlow = massFlowOf(known(input.duty.maximum, 'duty.maximum'), state, 'duty.maximum');
+  if (!massFlow.ok) return massFlow;
+  const line = input.upstream.temperature;
+  const pipe = atLine(input.pipe.bore, input.pipe, line);
+  const found = boreFrom(massFlow.value, known(input.differential, 'differential'), pipe, primary, state);
+  if (!found.ok) return found;
+  const { geometry, operation } = found.value;
+  return ok({
+    meter: { primary, geometry, state },
+    boreAsMeasured: asMeasured(geometry.bore, input.element, line),
+    maximum: operation,
+  });
+}
+
+const operate = (flow: FlowInput, meter: Meter, name: DutyName, span: number): Outcome<Operation> => {
+  const massFlow = massFlowOf(flow, meter.state, `duty.${name}`);
+  return massFlow.ok ? differentialFrom(massFlow.value, meter, `duty.${name}`, span) : massFlow;
+};
+
+/** A flow as mass. Problem base-density-missing: this fluid has no base volume. */
+function massFlowOf(flow: FlowInput, state: FluidState, field: string): Outcome<MassFlow> {
+  if (flow.basis === 'mass') return ok(flow.value);
+  if (flow.basis === 'volume') return ok((flow.value * state.density) as MassFlow);
+  if (state.baseDensity === undefined) return fail('base-density-missing', field, {});
+  return ok((flow.value * state.baseDensity) as MassFlow);
+}
+
+/** What input has already required; its absence here is our error. */
+function known<Value>(value: Value | undefined, field: string): Value {
+  if (value === undefined) throw new Error(`solve: expected ${field}, got nothing`);
+  return value;
+}

@@ -1,0 +1,87 @@
+/**
+ * Uncertainty of the flow rate by ISO 5167-1:2003, 8.2.2.1, Eq (3): relative, expanded, at 95 %; additive parts of C
+ * are summed before the squares. What the user does not state takes the standard's allowance (pipe, bore) or is left out.
+ */
+import type { Condition, Part } from '../element/contract.ts';
+import type { StatedUncertainty } from '../input/uncertainty.ts';
+import type { Source } from '../quantity/source.ts';
+import type { Meter, Operation } from '../solve/equation.ts';
+
+export const EQUATION: Source = { clause: 'ISO 5167-1:2003, 8.2.2.1, Eq (3)', seen: 'memory' };
+/** Largest uncertainties the standard itself leaves for D and d, used where none is stated: 0.4 % and 0.1 %. */
+export const PIPE_ALLOWANCE = 0.4; // %, ISO 5167-1:2003, 8.2.2.2
+export const BORE_ALLOWANCE = 0.1; // %, ISO 5167-1:2003, 8.2.2.3
+
+export type TermName = 'C' | 'epsilon' | 'pipe' | 'bore' | 'differential' | 'density';
+
+export interface Term {
+  readonly name: TermName;
+  /** Relative uncertainty of the quantity itself, %. */
+  readonly percent: number;
+  /** What one percent of it moves the flow by. */
+  readonly sensitivity: number;
+  readonly percentOfFlow: number;
+  readonly stated: boolean;
+}
+
+export interface Budget {
+  readonly expandedPercent: number;
+  readonly terms: readonly Term[];
+  readonly coefficientParts: readonly Part[];
+}
+
+/** Conditions of one operation for limits and uncertainties. */
+export const conditionOf = ({ state }: Meter, operation: Operation): Condition => ({
+  reynolds: operation.reynolds,
+  expansion: operation.differential / state.pressure,
+  isentropicExponent: state.isentropicExponent ?? 1,
+  expands: state.expands,
+});
+
+/** Uncertainty of the flow of one operation; `extra` are further additive parts of C (straight lengths). */
+export function flowUncertainty(
+  meter: Meter,
+  operation: Operation,
+  stated: StatedUncertainty,
+  span: number,
+  extra: readonly Part[] = [],
+): Budget {
+  const { primary, geometry, state } = meter;
+  const condition = conditionOf(meter, operation);
+  const coefficientParts = [...primary.coefficientUncertainty(geometry, condition), ...extra];
+  const b4 = geometry.ratio ** 4;
+  const epsilon = state.expands ? primary.expansibilityUncertainty(geometry, condition).percent : 0;
+  const terms = [
+    term(
+      'C',
+      coefficientParts.reduce((sum, part) => sum + part.percent, 0),
+      1,
+      true,
+    ),
+    term('epsilon', epsilon, 1, true),
+    term('pipe', percent(stated.pipe) ?? PIPE_ALLOWANCE, (2 * b4) / (1 - b4), stated.pipe !== undefined), // Eq (3)
+    term('bore', percent(stated.bore) ?? BORE_ALLOWANCE, 2 / (1 - b4), stated.bore !== undefined), // Eq (3)
+    term('differential', differentialPercent(stated, operation, span), 0.5, stated.differential !== undefined), // Eq (3)
+    term('density', percent(stated.density) ?? 0, 0.5, stated.density !== undefined), // Eq (3)
+  ];
+  const squares = terms.reduce((sum, { percentOfFlow }) => sum + percentOfFlow ** 2, 0); // Eq (3)
+  return { expandedPercent: Math.sqrt(squares), terms, coefficientParts };
+}
+
+const term = (name: TermName, percentage: number, sensitivity: number, stated: boolean): Term => ({
+  name,
+  percent: percentage,
+  sensitivity,
+  percentOfFlow: sensitivity * percentage,
+  stated,
+});
+
+const percent = (share: number | undefined): number | undefined => (share === undefined ? undefined : 100 * share);
+
+/** Relative uncertainty of the differential itself, %. */
+function differentialPercent({ differential }: StatedUncertainty, operation: Operation, span: number): number {
+  if (differential === undefined) return 0;
+  if (differential.of === 'pressure') return (100 * differential.value) / operation.differential;
+  const whole = differential.of === 'span' ? span : operation.differential;
+  return (100 * differential.share * whole) / operation.differential;
+}
