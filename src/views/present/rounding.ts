@@ -15,6 +15,7 @@ const rounding: Readonly<Record<Role, Rounding>> = {
   volumeFlow: { significant: 4 },
   baseVolumeFlow: { significant: 4 },
   temperature: { decimals: 1 },
+  temperatureDifference: { decimals: 1 },
   density: { significant: 4 },
   viscosity: { significant: 4 },
   velocity: { significant: 3 },

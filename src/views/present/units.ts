@@ -25,6 +25,7 @@ const usual: Readonly<Record<UnitRole, Usual>> = {
   volumeFlow: ['volume flow', 'm3/h', 'gal/min'],
   baseVolumeFlow: ['base volume flow', 'base m3/h', 'base ft3/h'],
   temperature: ['temperature', 'degC', 'degF'],
+  temperatureDifference: ['temperature difference', 'K', 'degF'],
   density: ['density', 'kg/m3', 'lb/ft3'],
   viscosity: ['dynamic viscosity', 'mPa.s', 'cP'],
   velocity: ['velocity', 'm/s', 'ft/s'],

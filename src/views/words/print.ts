@@ -13,6 +13,7 @@ export type Role =
   | 'volumeFlow'
   | 'baseVolumeFlow'
   | 'temperature'
+  | 'temperatureDifference'
   | 'density'
   | 'viscosity'
   | 'velocity'
@@ -42,6 +43,7 @@ const siUnits: Readonly<Record<Role, string>> = {
   volumeFlow: 'm³/s',
   baseVolumeFlow: 'base m³/s',
   temperature: 'K',
+  temperatureDifference: 'K',
   density: 'kg/m³',
   viscosity: 'Pa·s',
   velocity: 'm/s',

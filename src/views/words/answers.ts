@@ -1,0 +1,20 @@
+/** The answer as one sentence, its figures left open. */
+import type { DutyName, Unknown } from '../../core/document/project.ts';
+
+export type Figure = 'bore' | 'differential' | 'flow';
+export type Piece = string | { readonly figure: Figure };
+
+const bore: Piece = { figure: 'bore' };
+const differential: Piece = { figure: 'differential' };
+const flow: Piece = { figure: 'flow' };
+
+/** `opening` is 'bore' or 'throat'; `article` fits the figure of the bore. */
+export function answerPieces(find: Unknown, opening: string, article: string): readonly Piece[] {
+  if (find === 'flow') return [`${article} `, bore, ` ${opening} at `, differential, ' passes ', flow, '.'];
+  return [`${article} `, bore, ` ${opening} reads `, differential, ' at ', flow, '.'];
+}
+
+/** 'A' or 'An' before a printed number: an 8, an 11, an 18, an 80; a 62.5, a 110. */
+export const article = (number: string): 'A' | 'An' => (/^(8|1[18](?!\d))/.test(number) ? 'An' : 'A');
+
+export const uncertaintyAt = (text: string, at: DutyName): string => `±${text} at ${at} flow, 95 %`;

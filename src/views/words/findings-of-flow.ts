@@ -1,0 +1,45 @@
+/** Findings on fluid and flow. `{where}` stands for the flow at which it was found. */
+import type { Detail } from './detail.ts';
+import type { FindingWords } from './findings.ts';
+
+const held = (detail: Detail): string =>
+  detail.has('heldAt') ? `; the coefficient was held at that of ${detail.figure('heldAt', 'reynolds')}` : '';
+
+const saturation = (word: string, side: string): FindingWords => ({
+  role: 'temperatureDifference',
+  text: (figure, detail) => {
+    const forced = detail.text('forced') === 'yes' ? '; the phase was settled by hand' : '';
+    return `${word} ${figure}, ${side} ${detail.figure('saturation', 'temperature')}${forced}`;
+  },
+});
+
+const vapour: Pick<FindingWords, 'limit'> = { limit: (bounds) => `${bounds}, the vapour pressure` };
+
+export const checksOfFlow: Readonly<Record<string, FindingWords>> = {
+  'reynolds-pipe': {
+    role: 'reynolds',
+    text: (figure, detail) => `Pipe Reynolds number ${figure}{where}${held(detail)}`,
+  },
+  'calibration-range': {
+    role: 'reynolds',
+    text: (figure) => `Pipe Reynolds number ${figure}{where}, against the calibration`,
+  },
+  'pressure-ratio': { role: 'factor', text: (figure) => `Pressure ratio p₂/p₁ ${figure}{where}` },
+  flashing: { role: 'pressure', text: (figure) => `Pressure behind the element ${figure}{where}`, ...vapour },
+  cavitation: { role: 'pressure', text: (figure) => `Pressure in the jet ${figure}{where}`, ...vapour },
+  'cavitation-margin': {
+    role: 'factor',
+    text: (figure) => `Margin of the jet over boiling, as a share of the differential, ${figure}{where}`,
+  },
+  subcooling: saturation('Subcooling', 'below boiling at'),
+  superheat: saturation('Superheat', 'above condensing at'),
+  velocity: { role: 'velocity', text: (figure) => `Pipe velocity ${figure}{where}` },
+  span: { role: 'differential', text: (figure) => `Differential of the span ${figure}` },
+  turndown: {
+    role: 'percent',
+    text: (figure, detail) => {
+      const alone = detail.has('alone') ? `; the differential alone gives ±${detail.figure('alone', 'uncertainty')}` : '';
+      return `The differential uses ${figure} of the span{where}${alone}`;
+    },
+  },
+};

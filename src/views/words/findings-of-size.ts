@@ -1,0 +1,38 @@
+/** Findings on pipe, element and plate. `{where}` stands for the flow at which it was found. */
+import type { FindingWords } from './findings.ts';
+import { fittingLabel } from './fittings.ts';
+import { noteText } from './notes.ts';
+
+const straight = (side: string): FindingWords => ({
+  role: 'bores',
+  text: (figure) => `Straight pipe ${side} the element ${figure}`,
+  limit: (bounds, detail) => {
+    const fitting = detail.text('fitting');
+    const behind = fitting === 'downstream' ? '' : ` behind: ${lower(fittingLabel(fitting))}`;
+    const shorter = detail.has('reduced') ? `, or ${detail.figure('reduced', 'bores')} with 0.5 % more uncertainty` : '';
+    const both = detail.has('both') ? '; not shortened on both sides at once' : '';
+    const note = detail.has('note') ? `; ${lower(noteText(detail.text('note')))}` : '';
+    return `${bounds}${behind}${shorter}${both}${note}`;
+  },
+});
+
+const lower = (text: string): string => text.charAt(0).toLowerCase() + text.slice(1);
+
+export const checksOfSize: Readonly<Record<string, FindingWords>> = {
+  'pipe-bore': { role: 'bore', text: (figure) => `Pipe bore ${figure}` },
+  'element-bore': { role: 'bore', text: (figure) => `Bore of the element ${figure}` },
+  'diameter-ratio': { role: 'ratio', text: (figure) => `Diameter ratio ${figure}` },
+  'pipe-roughness': { role: 'roughness', text: (figure) => `Pipe roughness Ra ${figure}` },
+  'straight-upstream': straight('before'),
+  'straight-downstream': straight('after'),
+  'plate-thickness': { role: 'length', text: (figure) => `Plate thickness E ${figure}` },
+  'plate-thickness-edge': { role: 'length', text: (figure) => `Edge thickness e ${figure}` },
+  'plate-edge-order': {
+    role: 'length',
+    text: (figure) => `Edge thickness e ${figure}, more than the plate it is cut from`,
+  },
+  'plate-bending': {
+    role: 'length',
+    text: (figure) => `Plate of ${figure} against bending for good{where}`,
+  },
+};

@@ -1,0 +1,40 @@
+/** Remarks on a working line and notes of the tables of straight lengths: what a formula or a figure cannot say. */
+import { catalogue } from './catalogue.ts';
+
+const byRegion = (region: number): Readonly<Record<string, string>> => ({
+  [`if97-region-${region}`]: `From the equation of region ${region} of the formulation; too long to print here.`,
+  [`if97-region-${region}-beyond-saturation`]:
+    `From the equation of region ${region}, continued a little beyond the saturation line to hold the phase.`,
+});
+
+export const remarks: Readonly<Record<string, string>> = {
+  ...byRegion(1),
+  ...byRegion(2),
+  ...byRegion(3),
+  ...byRegion(5),
+  'if97-region-4': 'From the saturation equation of the formulation.',
+  'if97-at-base': 'From the formulation at the base state of the project.',
+  'viscosity-by-release': 'From the correlation of the release; too long to print here.',
+  'viscosity-extrapolated': 'From the correlation of the release, continued above its range: take it with care.',
+  stated: 'Stated by the user.',
+  'expansion-held': 'The temperature lies outside the table of expansion; its nearest value is held.',
+  'expansibility-isentropic': 'Written here with τ as the ratio of the pressures.',
+  'venturi-loss-curve': 'The share is read from a curve of the standard.',
+  'venturi-annex-b': 'From the list for low Reynolds numbers, which is for information only.',
+  'venturi-held': 'Outside the Reynolds numbers of the standard; the constant is held.',
+  'venturi-machined-doubt': 'The 2022 edition may give another value: check your copy.',
+  'calibration-constant': 'From the calibration of this meter, one point.',
+  'calibration-held': 'Outside the calibration of this meter; its end value is held.',
+  'calibration-interpolated': 'From the calibration of this meter, between two points.',
+  'coefficient-held': 'The flow lies far below the Reynolds numbers of the standard; the coefficient is held.',
+  'uncertainty-allowance':
+    'Pipe bore or bore have no uncertainty of their own: the largest that the standard allows is taken.',
+  'uncertainty-gaps': 'Differential or density have no uncertainty stated and are left out: the true figure is larger.',
+  'uncertainty-allowance-and-gaps':
+    'Pipe bore or bore take the largest uncertainty that the standard allows; differential or density are left out, so ' +
+    'the true figure is larger.',
+  'straight-perpendicular-high-reynolds': 'Longer at high Reynolds numbers',
+  'straight-perpendicular-conditioner': 'A flow conditioner is advised',
+};
+
+export const noteText = catalogue('note', remarks);

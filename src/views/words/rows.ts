@@ -1,0 +1,43 @@
+/** Labels of the rows of state, pipe and element. */
+import type { DutyName } from '../../core/document/project.ts';
+
+export const stateLabels = {
+  pressure: 'Pressure upstream',
+  temperature: 'Temperature',
+  density: 'Density',
+  viscosity: 'Dynamic viscosity',
+  isentropicExponent: 'Isentropic exponent',
+  compressibility: 'Compressibility factor',
+  vapourPressure: 'Vapour pressure',
+  saturationTemperature: 'Saturation temperature',
+  baseDensity: 'Density at the base state',
+} as const;
+
+export const withMaterial = (label: string, material: string | undefined): string =>
+  material === undefined ? label : `${label}, ${material.charAt(0).toLowerCase()}${material.slice(1)}`;
+
+export const measuredAt = (temperature: string): string => `measured at ${temperature}`;
+export const noGrowth = 'no material given: no thermal growth';
+
+export const metalLabels = {
+  pipe: 'Pipe bore',
+  pipeAtLine: 'Pipe bore at the line temperature',
+  roughness: 'Pipe roughness',
+  before: 'Straight pipe before',
+  after: 'Straight pipe after',
+  atLine: (opening: string): string => `${opening === 'throat' ? 'Throat' : 'Bore'} at the line temperature`,
+  opening: (opening: string): string => (opening === 'throat' ? 'Throat' : 'Bore'),
+  ratio: 'Diameter ratio',
+  plate: 'Plate thickness',
+  edge: 'Edge thickness',
+} as const;
+
+export const workingGroupTitles: Readonly<Record<'meter' | DutyName, string>> = {
+  meter: 'State and metal',
+  maximum: 'At maximum flow',
+  normal: 'At normal flow',
+  minimum: 'At minimum flow',
+};
+
+/** What the file keeps and this version does not evaluate. */
+export const unreadNote = (keys: string): string => `Kept in the file, not evaluated by this version: ${keys}.`;
