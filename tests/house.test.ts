@@ -202,7 +202,7 @@ describe('what is never written', () => {
       planted: '<script>1</script>',
     },
   ];
-  it.each(bans)('$name', ({ in: files, except, pattern, planted }) => {
+  it.each(bans.map((ban) => [ban.name, ban] as const))('%s', (_name, { in: files, except, pattern, planted }) => {
     expect(pattern.test(planted)).toBe(true);
     expect(files.length).toBeGreaterThan(0);
     const found = files.filter(({ path, text }) => !except?.test(path) && pattern.test(text));
@@ -327,7 +327,7 @@ describe('files are small and alike', () => {
       ninth: 250,
       most: 250,
     },
-  ])('$room', ({ files, median, ninth, most }) => {
+  ])('in $room', ({ files, median, ninth, most }) => {
     expect(files.length).toBeGreaterThan(5);
     const measured = files.filter(({ path }) => !path.endsWith('.table.ts'));
     const sorted = measured.map(lines).sort((one, other) => one - other);
