@@ -63,7 +63,6 @@ const offline = () =>
       icons: [
         { src: 'icons/icon-192.png', sizes: '192x192', type: 'image/png' },
         { src: 'icons/icon-512.png', sizes: '512x512', type: 'image/png' },
-        { src: 'icons/icon-512.png', sizes: '512x512', type: 'image/png', purpose: 'maskable' },
         { src: 'icons/icon.svg', sizes: 'any', type: 'image/svg+xml' },
       ],
     },
@@ -79,12 +78,9 @@ const offline = () =>
     },
   });
 
-export default defineConfig(({ command, isSsrBuild }) => ({
+export default defineConfig({
   appType: 'spa',
-  plugins:
-    command === 'build' && !isSsrBuild
-      ? [react(), contentSecurityPolicy(), offline(), everythingKeptOffline()]
-      : [react()],
+  plugins: [react(), contentSecurityPolicy(), offline(), everythingKeptOffline()],
   build: { target: 'es2023', assetsInlineLimit: 0, modulePreload: { polyfill: false } },
   server: { host: '127.0.0.1' },
   preview: { host: '127.0.0.1', port: 4173 },
@@ -94,4 +90,4 @@ export default defineConfig(({ command, isSsrBuild }) => ({
     testTimeout: 60_000,
     hookTimeout: 60_000,
   },
-}));
+});
