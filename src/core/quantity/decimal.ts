@@ -3,7 +3,7 @@
 /** A number at the beginning of a text, right or wrong, up to its last digit or mark, with its power of ten. */
 export const TYPED_NUMBER = /^[+\-\u2212]?[\d.,](?:[\d.,'’\s]*[\d.,])?(?:e[+\-\u2212]?\d+|\s?×\s?10[⁻⁺]?[⁰¹²³⁴-⁹]+)?/i;
 
-const PARTS = /^([+\-\u2212]?)([\d., \u00a0\u2009\u202f]+)(?:e(.+)|\s?×\s?10(.+))?$/i;
+const PARTS = /^([+\-\u2212]?)([\d.,](?:[\d., \u00a0\u2009\u202f]*[\d.,])?)(?:e(.+)|\s?×\s?10(.+))?$/i;
 const SPACES = /[ \u00a0\u2009\u202f]/g;
 const SUPERSCRIPTS = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 

@@ -4,6 +4,7 @@ import { fail, type Outcome, ok } from './outcome.ts';
 import { measuresOf, plainSpelling, unitOf, unitsFor } from './units.ts';
 
 const LONGEST = 40; // characters of a spelling that are quoted and compared
+const LEFT_OUT = 0.3; // cost of a letter left out, see editDistance
 
 /** What a problem quotes of a text: its beginning when it is long. */
 export const quoted = (text: string): string => (text.length <= LONGEST ? text : `${text.slice(0, LONGEST)}…`);
@@ -59,15 +60,18 @@ export function nearestSpellings(spelling: string, measures: readonly Measure[])
   return [...new Set(ranked.map((candidate) => candidate.symbol))].slice(0, 3);
 }
 
-/** Insertions, deletions and replacements from one spelling to another; a change of case counts a quarter. */
+/**
+ * Deletions and replacements from one spelling to another count one, a change of case a quarter; a letter left out
+ * counts little, because units are abbreviated: `C` is nearer to `degC` than to `K`.
+ */
 function editDistance(from: string, to: string): number {
-  let row = Array.from({ length: to.length + 1 }, (_, column) => column);
+  let row = Array.from({ length: to.length + 1 }, (_, column) => column * LEFT_OUT);
   for (const [line, letter] of [...from].entries()) {
     const next = [line + 1];
     for (const [column, target] of [...to].entries()) {
       const replace = letter === target ? 0 : letter.toLowerCase() === target.toLowerCase() ? 0.25 : 1;
       const [left = 0, above = 0, diagonal = 0] = [next[column], row[column + 1], row[column]];
-      next.push(Math.min(left + 1, above + 1, diagonal + replace));
+      next.push(Math.min(left + LEFT_OUT, above + 1, diagonal + replace));
     }
     row = next;
   }
