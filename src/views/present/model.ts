@@ -185,6 +185,8 @@ export interface PresentedSizing extends PresentedMeter {
   /** What was found, for the shaded field: bore as measured, differential or flow. */
   readonly found: { readonly value: Value; readonly from: string };
   readonly loss: Value; // permanent loss at maximum flow
+  /** Name and phase of the fluid: 'Water', 'liquid'. */
+  readonly fluid: { readonly name: string; readonly phase: string };
   readonly state: readonly Row[];
   readonly pipe: readonly Row[];
   readonly metal: readonly Row[]; // the element: bore, ratio, plate

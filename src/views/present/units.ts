@@ -2,7 +2,7 @@
  * The unit of every quantity that is shown: the one the user wrote in the same field, where it belongs to the system
  * of the display, else the usual one of that system.
  */
-import type { Display, MeterText, Project } from '../../core/document/project.ts';
+import type { Display, MeterText } from '../../core/document/project.ts';
 import { type Quantity, readQuantity } from '../../core/quantity/text.ts';
 import { type Measure, type Unit, unitOf } from '../../core/quantity/units.ts';
 import type { Role } from '../words/print.ts';
@@ -21,7 +21,7 @@ const usual: Readonly<Record<UnitRole, Usual>> = {
   pressure: ['absolute pressure', 'bar(a)', 'psi(a)'],
   differential: ['pressure difference', 'mbar', 'inH2O'],
   loss: ['pressure difference', 'mbar', 'inH2O'],
-  massFlow: ['mass flow', 'kg/h', 'lb/h'],
+  massFlow: ['mass flow', 't/h', 'lb/h'],
   volumeFlow: ['volume flow', 'm3/h', 'gal/min'],
   baseVolumeFlow: ['base volume flow', 'base m3/h', 'base ft3/h'],
   temperature: ['temperature', 'degC', 'degF'],
@@ -63,11 +63,9 @@ export function unit(symbol: string, measure: Measure): Unit {
 }
 
 /** The units of every quantity of one meter. */
-export function displayUnits(meter: MeterText, project: Project): DisplayUnits {
-  const display = project.display ?? 'SI';
+export function displayUnits(meter: MeterText, display: Display): DisplayUnits {
   const own = (texts: readonly unknown[], measures: readonly Measure[]): Unit | undefined =>
     texts.map((text) => written(text, measures)?.unit).find((found) => found !== undefined && belongs(found, display));
-  const [absolute] = pressureMeasures;
   const standard = (role: UnitRole): Unit => {
     const [measure, si, us] = usual[role];
     return unit(display === 'US' ? us : si, measure);
@@ -85,7 +83,7 @@ export function displayUnits(meter: MeterText, project: Project): DisplayUnits {
     differential,
     loss: differential,
     bore: own([meter.element?.bore, meter.pipe?.bore], ['length']) ?? plain.bore,
-    pressure: pressure === undefined ? plain.pressure : unit(`${pressure.symbol.slice(0, -3)}(a)`, absolute as Measure),
+    pressure: pressure === undefined ? plain.pressure : unit(`${pressure.symbol.slice(0, -3)}(a)`, 'absolute pressure'),
     temperature: own([meter.upstream?.temperature], ['temperature']) ?? plain.temperature,
     density: own([meter.fluid?.density], ['density']) ?? plain.density,
     viscosity: own([meter.fluid?.viscosity], ['dynamic viscosity']) ?? plain.viscosity,

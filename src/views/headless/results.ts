@@ -1,0 +1,84 @@
+/** Results as the file contract writes them: SI, the unit in the key, full double precision, sentences beside codes. */
+import type { MeterText, Project } from '../../core/document/project.ts';
+import type { MeterResult, PointRecord, Refused, Results, Solved } from '../../core/result/record.ts';
+import { contextOf } from '../present/context.ts';
+import { findingText } from '../words/findings.ts';
+import type { Print } from '../words/print.ts';
+import { type Problem, problemSentence } from '../words/problems.ts';
+import { dutyNames } from '../words/verdicts.ts';
+
+export interface Asked {
+  /** Whether the working of every figure is written too. */
+  readonly working?: boolean;
+}
+
+/** The whole output; its keys keep this order. */
+export function resultsOf(project: Project, results: Results, asked: Asked): object {
+  const none: MeterText = {};
+  return {
+    format: 'headwright-results',
+    version: 1,
+    results: results.results.map((result, index) => {
+      const { text } = contextOf(project.meters[index] ?? none, project);
+      return meterOf(result, text, asked);
+    }),
+    traverses: results.traverses.map((traverse) => refusedOf(traverse, contextOf(none, project).text)),
+  };
+}
+
+const meterOf = (result: MeterResult, print: Print, asked: Asked): object =>
+  result.status === 'refused' ? refusedOf(result, print) : solvedOf(result, print, asked);
+
+function solvedOf(result: Solved, print: Print, { working = false }: Asked): object {
+  const points = dutyNames.flatMap((name) => {
+    const point = result.points[name];
+    return point === undefined ? [] : [[name, pointOf(point, working)] as const];
+  });
+  return {
+    tag: result.tag,
+    status: result.status,
+    find: result.find,
+    element: result.element,
+    standard: result.standard,
+    state: result.state,
+    bore_m: result.bore_m,
+    pipe_m: result.pipe_m,
+    diameterRatio: result.diameterRatio,
+    boreAsMeasured_m: result.boreAsMeasured_m,
+    pipeAsMeasured_m: result.pipeAsMeasured_m,
+    points: Object.fromEntries(points),
+    checks: result.checks.map((finding) => checkOf(finding, print)),
+    ...(working ? { working: result.working } : {}),
+    unread: result.unread,
+  };
+}
+
+function pointOf({ working, ...figures }: PointRecord, asked: boolean): object {
+  return asked ? { ...figures, working } : figures;
+}
+
+function checkOf(finding: Solved['checks'][number], print: Print): object {
+  const { id, assumption, verdict, value, unit, limit, source, at } = finding;
+  const { text, limit: bounds } = findingText(finding, print);
+  return {
+    id,
+    assumption,
+    verdict,
+    value,
+    unit,
+    limit,
+    source: source.clause,
+    seen: source.seen,
+    ...(at === undefined ? {} : { at }),
+    message: bounds === '' ? `${text}.` : `${text}; limit: ${bounds}.`,
+  };
+}
+
+function refusedOf({ tag, status, problem, problems }: Refused, print: Print): object {
+  const written = ({ code, field, detail }: Problem) => ({
+    code,
+    field,
+    message: problemSentence({ code, field, detail }, print),
+  });
+  return { tag, status, problem: written(problem), problems: problems.map(written) };
+}

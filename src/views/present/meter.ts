@@ -1,0 +1,106 @@
+/** One meter, ready to print: every row, sentence and curve that the views show. */
+import type { MeterText, Project } from '../../core/document/project.ts';
+import type { MeterResult, Refused, Solved } from '../../core/result/record.ts';
+import { cautions } from '../words/cautions.ts';
+import { elementLabel } from '../words/elements.ts';
+import { fieldLabel } from '../words/fields.ts';
+import { fluidLabel, phaseWord } from '../words/fluids.ts';
+import { provenanceNotes } from '../words/provenance.ts';
+import { unreadNote } from '../words/rows.ts';
+import { meterVerdict, notSolved } from '../words/verdicts.ts';
+import { answerOf, foundOf, underOf } from './answer.ts';
+import { chartOf } from './chart.ts';
+import { checkGroups } from './checks.ts';
+import { type Context, contextOf, maximumOf } from './context.ts';
+import { dimensionRows } from './dimensions.ts';
+import { dutyRows } from './duty.ts';
+import { headsOf } from './heads.ts';
+import { metalRows, pipeRows } from './metal.ts';
+import type { PresentedMeter, PresentedSizing, Shape } from './model.ts';
+import { presentProblem } from './problem.ts';
+import { stateRows } from './state.ts';
+import { straightRows } from './straight.ts';
+import { workingGroups } from './working.ts';
+
+/** A solved meter with everything, or a refused one with its problems. */
+export function presentMeter(
+  meter: MeterText,
+  project: Project,
+  result: MeterResult,
+): PresentedMeter | PresentedSizing {
+  const at = contextOf(meter, project);
+  return result.status === 'refused' ? refusedMeter(at, result) : solvedMeter(at, result);
+}
+
+function refusedMeter(at: Context, result: Refused): PresentedMeter {
+  const { service, element } = at.meter;
+  const variant = element?.tappings ?? element?.convergent;
+  const kind = textOf(element?.kind);
+  return {
+    tag: result.tag,
+    service: textOf(service),
+    element: elementLabel(typeof variant === 'string' ? `${kind}.${variant}` : kind),
+    standard: '',
+    status: 'refused',
+    problems: result.problems.map((problem) => presentProblem(problem, at.text)),
+    verdict: { worst: 'refused', words: notSolved },
+  };
+}
+
+function solvedMeter(at: Context, result: Solved): PresentedSizing {
+  const duty = dutyRows(at, result);
+  const kind = textOf(at.meter.fluid?.kind);
+  return {
+    tag: result.tag,
+    service: textOf(at.meter.service),
+    element: elementLabel(result.element),
+    standard: result.standard,
+    status: 'solved',
+    problems: [],
+    verdict: meterVerdict(result.checks.map(({ verdict }) => verdict)),
+    find: result.find,
+    answer: answerOf(at, result),
+    under: underOf(at, result),
+    found: foundOf(at, result),
+    loss: at.value(maximumOf(result).permanentLoss_Pa, 'loss'),
+    fluid: { name: fluidLabel(kind, result.state.phase), phase: phaseWord(result.state.phase) },
+    state: stateRows(at, result),
+    pipe: pipeRows(at, result),
+    metal: metalRows(at, result),
+    duty,
+    checks: checkGroups(at, result),
+    working: workingGroups(result),
+    dimensions: dimensionRows(at, result),
+    straight: straightRows(at, result),
+    chart: chartOf(at, result, duty),
+    heads: headsOf(at, result),
+    shape: shapeOf(result),
+    notes: notesOf(result),
+    cautions: cautions({ fluid: kind, phase: result.state.phase }),
+  };
+}
+
+/** Notes for the marks of every source that is shown, and what the file keeps for later. */
+function notesOf(result: Solved): readonly string[] {
+  const sources = [...result.sources, ...result.dimensions, ...result.straightLengths];
+  const seen = sources.map((one) => ('source' in one ? one.source.seen : one.seen));
+  const unread = result.unread.map((key) => fieldLabel(key).toLowerCase()).join(', ');
+  return [...provenanceNotes(seen), ...(unread === '' ? [] : [unreadNote(unread)])];
+}
+
+/** The recovered station of the head lines is where the pressure has recovered. */
+function shapeOf(result: Solved): Shape {
+  const recovered = result.heads.find(({ station }) => station === 'recovered');
+  if (recovered === undefined) throw new Error(`expected a recovered station of ${result.tag}, got none`);
+  return {
+    element: result.element,
+    pipe: result.pipe_m,
+    bore: result.bore_m,
+    ratio: result.diameterRatio,
+    tappingUpstream: result.tappings.upstream_m,
+    tappingDownstream: result.tappings.downstream_m,
+    recovery_D: recovered.position_D,
+  };
+}
+
+const textOf = (written: unknown): string => (typeof written === 'string' ? written : '');
