@@ -3,7 +3,7 @@ import { defineConfig } from '@playwright/test';
 import { launchOptions } from './browser.mjs';
 
 const root = fileURLToPath(new URL('../..', import.meta.url));
-const port = Number(process.env.HEADWRIGHT_PORT ?? 4173);
+const port = Number(process.env.HEADWRIGHT_PORT ?? 4174);
 const address = `http://127.0.0.1:${port}`;
 const inCI = Boolean(process.env.CI);
 
