@@ -69,7 +69,7 @@ describe('writeAt', () => {
     }
     const inherited = writeAt({}, 'toString.length', '9');
     expect(Object.hasOwn(inherited, 'toString')).toBe(true);
-    expect(({} as Record<string, unknown>)['polluted']).toBeUndefined();
+    expect(({} as Record<string, unknown>).polluted).toBeUndefined();
     expect(Object.prototype.toString.length).toBe(0);
   });
 

@@ -163,7 +163,7 @@ describe('the list', () => {
       'FE-1102',
       undefined,
     ]);
-    expect(at().project.meters[1]?.['keptForLater']).toEqual({ depth: [1, 2] });
+    expect(at().project.meters[1]?.keptForLater).toEqual({ depth: [1, 2] });
     expect(new Set(at().keys).size).toBe(5);
   });
 
