@@ -4,13 +4,7 @@
  */
 import { readFileSync } from 'node:fs';
 import { resolve } from 'node:path';
-import { solveText } from '../views/headless/solve.ts';
-
-interface Answer {
-  readonly exit: 0 | 1 | 2;
-  readonly output: string;
-  readonly error: string;
-}
+import { type Answer, solveText } from '../views/headless/solve.ts';
 
 const refuse = (error: string): Answer => ({ exit: 2, output: '', error });
 
