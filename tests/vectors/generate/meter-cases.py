@@ -146,7 +146,7 @@ write("fluids-coefficient.json", "coefficient", close("C", 1e-12, "same formula 
       list(coefficients()))
 write("fluids-expansibility.json", "expansibility",
       close("epsilon", 1e-12, "the library's form loses digits where x is small"), list(expansibilities()))
-write("fluids-flow.json", "flow-from-differential", close("q_m", 1e-11, "substituted until it stood still"),
+write("fluids-flow.json", "gas-flow-from-differential", close("q_m", 1e-11, "substituted until it stood still"),
       list(flows()))
 write("fluids-jet-loss.json", "loss-share", close("share", 1e-12, "same formula in doubles, other order"),
       list(jet_losses()))

@@ -1,8 +1,17 @@
-/** What the vectors of elements ask of the core: coefficients and expansibility, without solving. */
+/** What the vectors of elements ask of the core: coefficients, expansibility, loss, and the flow of a gas. */
 import type { Geometry, Primary } from '../../../src/core/element/contract.ts';
 import { elementOf } from '../../../src/core/element/registry.ts';
 import { approachFactor } from '../../../src/core/element/shared/approach.ts';
-import type { Length } from '../../../src/core/quantity/kinds.ts';
+import type { FluidState } from '../../../src/core/fluid/contract.ts';
+import type {
+  AbsolutePressure,
+  Density,
+  DynamicViscosity,
+  Length,
+  PressureDifference,
+  Temperature,
+} from '../../../src/core/quantity/kinds.ts';
+import { flowFrom } from '../../../src/core/solve/flow.ts';
 
 type Given = Readonly<Record<string, number | string>>;
 
@@ -28,6 +37,22 @@ export function geometryOf(given: Given): Geometry {
   return { pipe: pipe as Length, bore: (ratio * pipe) as Length, ratio };
 }
 
+/** A gas of stated properties; its temperature plays no part in the flow. */
+function gas(given: Given): FluidState {
+  const source = { clause: 'as the case states', seen: 'read' } as const;
+  return {
+    pressure: number(given, 'p1') as AbsolutePressure,
+    temperature: 288.15 as Temperature,
+    density: number(given, 'rho') as Density,
+    viscosity: number(given, 'mu') as DynamicViscosity,
+    isentropicExponent: number(given, 'kappa'),
+    phase: 'gas',
+    expands: true,
+    sources: { density: source, viscosity: source },
+    working: [],
+  };
+}
+
 export const subjects: Readonly<Record<string, (given: Given) => Record<string, number>>> = {
   coefficient: (given) => ({
     C: primaryOf(String(given.element)).discharge(geometryOf(given))(number(given, 'Re_D')),
@@ -45,6 +70,12 @@ export const subjects: Readonly<Record<string, (given: Given) => Record<string, 
   'loss-share': (given) => {
     const primary = primaryOf(String(given.element));
     return { share: primary.lossShare(geometryOf(given), number(given, 'C'), number(given, 'Re_D')) };
+  },
+  'gas-flow-from-differential': (given) => {
+    const meter = { primary: primaryOf(String(given.element)), geometry: geometryOf(given), state: gas(given) };
+    const found = flowFrom(number(given, 'dp') as PressureDifference, meter);
+    if (!found.ok) throw new Error(`expected a flow, got ${JSON.stringify(found.problems)}`);
+    return { q_m: found.value.massFlow };
   },
   /** A loss of k inlet velocity heads before the throat: C = 1/sqrt(1 + k beta^4 E^2). */
   'coefficient-from-loss': (given) => {
