@@ -299,7 +299,8 @@ describe('vectors', () => {
   it('say where they come from and what they mean, and are used', () => {
     const faults = vectors.flatMap(({ path, text }) => {
       const { subject, source: from, origin, about, tolerance, cases } = JSON.parse(text) as Record<string, unknown>;
-      const used = subjects.some((file) => file.text.includes(`'${String(subject)}'`));
+      const key = new RegExp(`'${String(subject)}'|\\b${String(subject)}\\s*[:,}]`);
+      const used = subjects.some((file) => key.test(file.text));
       return [
         ...(typeof from === 'string' && from !== '' ? [] : [`${path}: no source`]),
         ...(['published', 'independent', 'unseen'].includes(String(origin))
