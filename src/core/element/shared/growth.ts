@@ -2,24 +2,20 @@
 import type { Length, Temperature } from '../../quantity/kinds.ts';
 import type { Source } from '../../quantity/source.ts';
 import type { Given, Working } from '../../quantity/working.ts';
+import { along } from './bracket.ts';
 import { type Material, materials } from './materials.table.ts';
 
 const reference = 293.15; // K; the mean coefficients count from 20 degC
+
+/** The keys that the file may write. */
+export const materialKeys: readonly string[] = materials.map(({ key }) => key);
 
 /** The material of a key of the file; undefined when the table has none of that name. */
 export const materialOf = (key: string): Material | undefined => materials.find((row) => row.key === key);
 
 /** Mean expansion from 20 degC to `temperature`, 1/K; linear between the figures of the table, held outside. */
-export const meanExpansion = (material: Material, temperature: Temperature): number => {
-  const { celsius, expansion } = material;
-  const at = temperature - 273.15;
-  const after = celsius.findIndex((edge) => edge > at);
-  if (after === 0) return (expansion[0] as number) * 1e-6;
-  if (after < 0) return (expansion[expansion.length - 1] as number) * 1e-6;
-  const [t0, t1] = [celsius[after - 1] as number, celsius[after] as number];
-  const [a0, a1] = [expansion[after - 1] as number, expansion[after] as number];
-  return (a0 + ((a1 - a0) * (at - t0)) / (t1 - t0)) * 1e-6;
-};
+export const meanExpansion = (material: Material, temperature: Temperature): number =>
+  along(material.celsius, material.expansion, temperature - 273.15) * 1e-6;
 
 /** Whether the table reaches `temperature`; it counts from 20 degC, so that and its nearest figure are always reached. */
 export const expansionKnown = (material: Material, temperature: Temperature): boolean => {

@@ -1,6 +1,7 @@
 /** Permanent pressure loss as a share of the differential. */
 import type { Source } from '../../quantity/source.ts';
 import type { Working } from '../../quantity/working.ts';
+import { along } from './bracket.ts';
 import { venturiLoss } from './loss.table.ts';
 
 /**
@@ -58,14 +59,3 @@ export const venturiLossWorking = (share: number, differential: number): Working
 });
 
 const clamp = (value: number, low: number, high: number): number => Math.min(Math.max(value, low), high);
-
-/** Linear between the points, held outside. */
-const along = (xs: readonly number[], ys: readonly number[], x: number): number => {
-  const last = xs.length - 1;
-  const held = clamp(x, xs[0] as number, xs[last] as number);
-  const i = Math.min(last - 1, Math.max(0, xs.findIndex((edge) => edge > held) - 1));
-  const index = held >= (xs[last] as number) ? last - 1 : i;
-  const [x0, x1] = [xs[index] as number, xs[index + 1] as number];
-  const [y0, y1] = [ys[index] as number, ys[index + 1] as number];
-  return y0 + ((y1 - y0) * (held - x0)) / (x1 - x0);
-};

@@ -1,6 +1,7 @@
 /** Limits of the roughness of the upstream pipe, Ra in m. */
 import type { Length } from '../../quantity/kinds.ts';
 import type { Limit } from '../contract.ts';
+import { along, between, bracket } from './bracket.ts';
 import {
   nozzleRoughest,
   orificeRoughest,
@@ -34,20 +35,7 @@ export const nozzleRoughness = (pipe: Length, ratio: number): Limit => ({
 
 /** The figure of the table in 1e-4 Ra/D, bilinear in beta and lg Re_D, held outside. */
 const lookUp = (table: RoughnessTable, ratio: number, reynolds: number): number => {
-  const row = place(table.ratios, ratio);
-  const column = place(table.reynolds.map(Math.log10), Math.log10(reynolds));
-  const cell = (i: number, j: number) => (table.values[i] as readonly number[])[j] as number;
-  const along = (i: number) => mix(cell(i, column.low), cell(i, column.high), column.share);
-  return mix(along(row.low), along(row.high), row.share);
-};
-
-const mix = (a: number, b: number, share: number): number => a + share * (b - a);
-
-const place = (edges: readonly number[], at: number): { low: number; high: number; share: number } => {
-  const last = edges.length - 1;
-  const after = edges.findIndex((edge) => edge > at);
-  if (after === 0 || last === 0) return { low: 0, high: 0, share: 0 };
-  if (after < 0) return { low: last, high: last, share: 0 };
-  const [from, to] = [edges[after - 1] as number, edges[after] as number];
-  return { low: after - 1, high: after, share: (at - from) / (to - from) };
+  const column = bracket(table.reynolds.map(Math.log10), Math.log10(reynolds));
+  const atReynolds = table.values.map((row) => between(row, column));
+  return along(table.ratios, atReynolds, ratio);
 };

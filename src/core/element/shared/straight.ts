@@ -5,6 +5,7 @@
  */
 import type { Source } from '../../quantity/source.ts';
 import type { StraightLength } from '../contract.ts';
+import { bracket } from './bracket.ts';
 
 /** Columns A and B of one fitting, in pipe bores. B is absent where the table gives none. */
 export type Columns = readonly [full: number, reduced?: number];
@@ -45,13 +46,12 @@ export const straightLengths = (table: StraightTable, ratio: number, reynolds: n
 type Row = StraightTable['rows'][number];
 type Spot = { readonly low: Row; readonly high: Row; readonly share: number };
 
-const neighbours = (table: StraightTable, ratio: number): Spot => {
-  const rows = table.rows;
-  const after = rows.findIndex((row) => row.ratio >= ratio);
-  const high = rows[after < 0 ? rows.length - 1 : after] as Row;
-  const low = rows[after < 0 ? rows.length - 1 : Math.max(0, after - 1)] as Row;
-  if (ratio === high.ratio || low === high) return { low: high, high, share: 0 };
-  return { low, high, share: (ratio - low.ratio) / (high.ratio - low.ratio) };
+const neighbours = ({ rows }: StraightTable, ratio: number): Spot => {
+  const { low, high, share } = bracket(
+    rows.map((row) => row.ratio),
+    ratio,
+  );
+  return { low: rows[low] as Row, high: rows[high] as Row, share };
 };
 
 const noteFor = (table: StraightTable, fitting: string, spot: Spot, reynolds: number): StraightNote | undefined =>
