@@ -16,25 +16,20 @@ export function decimalText(typed: string): { readonly number: string } | { read
   const [, sign = '', body, exponent, power] = PARTS.exec(typed) ?? [];
   if (body === undefined || !/\d/.test(body)) return { code: 'number-unreadable' };
   const [whole, fraction] = splitAtMark(body.replace(SPACES, ' '));
-  const integer = whole === undefined ? undefined : withoutGroups(whole);
-  if (integer === undefined || fraction === undefined) return { code: 'number-grouping' };
-  if (!/^(\d*|\d{3}( \d{3})* \d{1,3})$/.test(fraction)) return { code: 'number-grouping' };
+  const integer = withoutGroups(whole);
+  if (integer === undefined || !/^(\d*|\d{3}( \d{3})* \d{1,3})$/.test(fraction)) return { code: 'number-grouping' };
   const digits = fraction.replaceAll(' ', '');
   const mantissa = integer.replace(/^0+(?=\d)/, '') + (digits === '' ? '' : `.${digits}`);
   const minus = sign === '' || sign === '+' || !/[1-9]/.test(mantissa) ? '' : '-';
   return { number: minus + mantissa + tenPower(exponent ?? power) };
 }
 
-/** The digits before and after the decimal mark; undefined when no mark can be the decimal mark. */
-function splitAtMark(body: string): readonly [string?, string?] {
+/** The digits before and after the decimal mark: the last mark, unless it is one of several and the only sort. */
+function splitAtMark(body: string): readonly [whole: string, fraction: string] {
   const marks = body.match(/[.,]/g) ?? [];
-  const last = marks.at(-1);
-  if (last === undefined) return [body, ''];
-  const alike = marks.filter((mark) => mark === last).length;
-  if (alike === marks.length && alike > 1) return [body, '']; // one mark, repeated: it groups
-  if (alike > 1) return [];
-  const at = body.lastIndexOf(last);
-  return [body.slice(0, at), body.slice(at + 1)];
+  const grouping = marks.length > 1 && new Set(marks).size === 1;
+  const at = grouping ? -1 : Math.max(body.lastIndexOf('.'), body.lastIndexOf(','));
+  return at < 0 ? [body, ''] : [body.slice(0, at), body.slice(at + 1)];
 }
 
 /** The whole digits without their group marks, all of one sort; undefined when a group is not of three. */

@@ -232,9 +232,11 @@ describe('conversion', () => {
     ['-0', 'mm', 'length', 0],
     ['0.1', '%', 'share', 0.001],
     ['36', 't/h', 'mass flow', 10],
+    ['9007199254740993', 'm', 'length', 9007199254740992], // half way between two doubles: to the even one
+    ['9007199254740993.0000000000000000000000000000000000000001', 'm', 'length', 9007199254740994], // just above it
   ] as const)('%s %s is the nearest double', (number, symbol, measure, si) => {
     expect(Object.is(toSI(number, unit(symbol, measure)), si)).toBe(true);
-    expect(fromSI(si, unit(symbol, measure))).toBe(Number(number) || 0);
+    if (si < 1e15) expect(fromSI(si, unit(symbol, measure))).toBe(Number(number) || 0);
   });
 
   test.each([
