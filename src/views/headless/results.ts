@@ -19,10 +19,10 @@ export function resultsOf(project: Project, results: Results, asked: Asked): obj
     format: 'headwright-results',
     version: 1,
     results: results.results.map((result, index) => {
-      const { text } = contextOf(project.meters[index] ?? none, project);
-      return meterOf(result, text, asked);
+      const { print } = contextOf(project.meters[index] ?? none, project);
+      return meterOf(result, print, asked);
     }),
-    traverses: results.traverses.map((traverse) => refusedOf(traverse, contextOf(none, project).text)),
+    traverses: results.traverses.map((traverse) => refusedOf(traverse, contextOf(none, project).print)),
   };
 }
 

@@ -43,7 +43,7 @@ export function underOf(at: Context, result: Solved): string {
     result.tag,
     variantWords(result.element),
     result.standard,
-    uncertaintyAt(at.text(expanded_percent, 'uncertainty'), name),
+    uncertaintyAt(at.value(expanded_percent, 'uncertainty').text, name),
   ];
   return parts.filter((part) => part !== undefined && part !== '').join(' · ');
 }

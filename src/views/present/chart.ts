@@ -41,7 +41,7 @@ export function chartOf(at: Context, result: Solved, duty: readonly DutyRow[]): 
     summary: chartSummary(
       duty.map(({ cells }) => dutyAt(cells.flow.text, cells.differential.text)),
       outside.map(({ from, to, label }) =>
-        outsideRange(at.text(from, 'differential'), at.text(to, 'differential'), label),
+        outsideRange(at.print.figure(from, 'differential'), at.print.figure(to, 'differential'), label),
       ),
     ),
   };

@@ -24,7 +24,7 @@ function checkRow(at: Context, finding: Finding): CheckRow {
     key: name === undefined ? id : `${id}.${name}`,
     verdict,
     verdictWord: verdictWords[verdict],
-    ...findingText(finding, at.text),
+    ...findingText(finding, at.print),
     cited: cited(source),
     ...(name === undefined ? {} : { at: name }),
   };

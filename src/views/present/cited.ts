@@ -3,4 +3,4 @@ import type { Source } from '../../core/quantity/source.ts';
 import { provenanceMark } from '../words/provenance.ts';
 import type { Cited } from './model.ts';
 
-export const cited = ({ clause, seen }: Source): Cited => ({ clause, seen, mark: provenanceMark(seen) });
+export const cited = (source: Source): Cited => ({ ...source, mark: provenanceMark(source) });

@@ -26,7 +26,7 @@ export function contextOf(meter: MeterText, project: Project): Context {
   const sound: MeterText = isGroup(meter) ? meter : {};
   const display = project.display === 'US' ? 'US' : 'SI';
   const units = displayUnits(sound, display);
-  const { value, text } = printer(units);
+  const { value, print } = printer(units);
   const own = (read: Quantity | undefined): Value | undefined =>
     read !== undefined && belongs(read.unit, display) ? asWritten(read) : undefined;
   const role = flowRole(units.flow);
@@ -39,7 +39,7 @@ export function contextOf(meter: MeterText, project: Project): Context {
     display,
     units,
     value,
-    text,
+    print,
     given: (from, measures, si, as) => own(written(from, measures)) ?? value(si, as),
     stated: (from, measures, as) => {
       const read = written(from, measures);

@@ -17,7 +17,7 @@ export function evaluate(e: Expression, values: Readonly<Record<string, number>>
     case 'number':
       return e.value ?? lost(`a figure of the notation`, e.text);
     case 'name':
-      return valueOf(nameOf(e), values);
+      return valueFor(nameOf(e), values);
     case 'negative':
       return -of(e.of);
     case 'sum':
@@ -35,7 +35,7 @@ export function evaluate(e: Expression, values: Readonly<Record<string, number>>
   }
 }
 
-function valueOf(name: string, values: Readonly<Record<string, number>>): number {
+function valueFor(name: string, values: Readonly<Record<string, number>>): number {
   if (name === 'π') return Math.PI;
   return values[name] ?? lost(`a value for each name, of ${Object.keys(values).join(', ')}`, name);
 }

@@ -29,61 +29,68 @@ const functions: Readonly<Record<string, readonly [number, number]>> = {
 const precedence: Readonly<Record<string, number>> = { '+': 1, '-': 1, '*': 2, '/': 2, '^': 4 };
 const ofNegative = 3; // -x^2 is -(x^2); -x*y is (-x)*y
 
+/** The formula while it is read: its tokens and how far the reading has come. */
+interface Reading {
+  readonly text: string;
+  readonly list: readonly Token[];
+  at: number;
+}
+
 /** Formula to tree. Products and fractions bind from the left, powers from the right. Throws a defect if malformed. */
 export function parseFormula(text: string): Expression {
-  const list = tokens(text);
-  let at = 0;
-  const peek = (): Token | undefined => list[at];
-  const wrong = (expected: string): never => {
-    throw new Error(`expected ${expected} in formula '${text}', got ${list[at]?.text ?? 'its end'}`);
-  };
-  const take = (mark: string): void => {
-    if (peek()?.text !== mark) wrong(`'${mark}'`);
-    at += 1;
-  };
+  const reading: Reading = { text, list: tokens(text), at: 0 };
+  const whole = expression(reading, 0);
+  return reading.at < reading.list.length ? wrong(reading, 'an operator or the end') : whole;
+}
 
-  const call = (name: string): Expression => {
-    const [least, most] = functions[name] ?? wrong(`a function out of ${Object.keys(functions).join(', ')}`);
-    take('(');
-    const found = [expression(0)];
-    while (peek()?.text === ';') {
-      at += 1;
-      found.push(expression(0));
-    }
-    take(')');
-    if (found.length < least || found.length > most) wrong(`${least} to ${most} arguments of ${name}`);
-    return { type: 'call', name, arguments: found };
-  };
+function wrong({ text, list, at }: Reading, expected: string): never {
+  throw new Error(`expected ${expected} in formula '${text}', got ${list[at]?.text ?? 'its end'}`);
+}
 
-  const operand = (): Expression => {
-    const token = peek() ?? wrong('a number, a name or a parenthesis');
-    at += 1;
-    if (token.type === 'number') return { type: 'number', text: printed(token.text), value: Number(token.text) };
-    if (token.type === 'name') return peek()?.text === '(' ? call(token.text) : named(token.text);
-    if (token.text === '-') return { type: 'negative', of: expression(ofNegative) };
-    if (token.text === '(') {
-      const of = expression(0);
-      take(')');
-      return { type: 'group', of };
-    }
-    at -= 1;
-    return wrong('a number, a name or a parenthesis');
-  };
+const next = ({ list, at }: Reading): string => list[at]?.text ?? '';
 
-  const expression = (above: number): Expression => {
-    let left = operand();
-    for (;;) {
-      const mark = peek()?.text ?? '';
-      const strength = precedence[mark] ?? 0;
-      if (strength <= above) return left;
-      at += 1;
-      left = combined(mark, left, expression(mark === '^' ? ofNegative : strength));
-    }
-  };
+function take(reading: Reading, mark: string): void {
+  if (next(reading) !== mark) wrong(reading, `'${mark}'`);
+  reading.at += 1;
+}
 
-  const whole = expression(0);
-  if (at < list.length) wrong('an operator or the end');
-  return whole;
+/** An operand and every operator after it that binds more strongly than `above`. */
+function expression(reading: Reading, above: number): Expression {
+  let left = operand(reading);
+  for (;;) {
+    const mark = next(reading);
+    const strength = precedence[mark] ?? 0;
+    if (strength <= above) return left;
+    reading.at += 1;
+    left = combined(mark, left, expression(reading, mark === '^' ? ofNegative : strength));
+  }
+}
+
+function operand(reading: Reading): Expression {
+  const token = reading.list[reading.at];
+  if (token === undefined) return wrong(reading, 'a number, a name or a parenthesis');
+  const { type, text } = token;
+  if (type === 'mark' && text !== '-' && text !== '(') return wrong(reading, 'a number, a name or a parenthesis');
+  reading.at += 1;
+  if (type === 'number') return { type, text: printed(text), value: Number(text) };
+  if (type === 'name') return next(reading) === '(' ? call(reading, text) : named(text);
+  if (text === '-') return { type: 'negative', of: expression(reading, ofNegative) };
+  const of = expression(reading, 0);
+  take(reading, ')');
+  return { type: 'group', of };
+}
+
+function call(reading: Reading, name: string): Expression {
+  const [least, most] = functions[name] ?? wrong(reading, `a function out of ${Object.keys(functions).join(', ')}`);
+  take(reading, '(');
+  const found = [expression(reading, 0)];
+  while (next(reading) === ';') {
+    reading.at += 1;
+    found.push(expression(reading, 0));
+  }
+  take(reading, ')');
+  if (found.length < least || found.length > most) wrong(reading, `${least} to ${most} arguments of ${name}`);
+  return { type: 'call', name, arguments: found };
 }
 
 function combined(mark: string, left: Expression, right: Expression): Expression {

@@ -8,7 +8,8 @@ export function headsOf(at: Context, { heads }: Solved): Heads {
   const { head } = at.units;
   const station = (name: string): HeadPoint => {
     const found = heads.find((point) => point.station === name);
-    if (found === undefined) throw new Error(`expected the head at ${name}, got ${heads.map((point) => point.station)}`);
+    if (found === undefined)
+      throw new Error(`expected the head at ${name}, got ${heads.map((point) => point.station)}`);
     return found;
   };
   const drop = station('tapping-upstream').pressure_m - station('tapping-downstream').pressure_m;

@@ -42,7 +42,7 @@ function refusedMeter(at: Context, result: Refused): PresentedMeter {
     element: elementLabel(typeof variant === 'string' ? `${kind}.${variant}` : kind),
     standard: '',
     status: 'refused',
-    problems: result.problems.map((problem) => presentProblem(problem, at.text)),
+    problems: result.problems.map((problem) => presentProblem(problem, at.print)),
     verdict: { worst: 'refused', words: notSolved },
   };
 }
@@ -83,9 +83,9 @@ function solvedMeter(at: Context, result: Solved): PresentedSizing {
 /** Notes for the marks of every source that is shown, and what the file keeps for later. */
 function notesOf(result: Solved): readonly string[] {
   const sources = [...result.sources, ...result.dimensions, ...result.straightLengths];
-  const seen = sources.map((one) => ('source' in one ? one.source.seen : one.seen));
+  const cited = sources.map((one) => ('source' in one ? one.source : one));
   const unread = result.unread.map((key) => fieldLabel(key).toLowerCase()).join(', ');
-  return [...provenanceNotes(seen), ...(unread === '' ? [] : [unreadNote(unread)])];
+  return [...provenanceNotes(cited), ...(unread === '' ? [] : [unreadNote(unread)])];
 }
 
 /** The recovered station of the head lines is where the pressure has recovered. */

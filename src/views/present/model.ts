@@ -119,7 +119,12 @@ export interface ChartPoint {
 }
 export interface Chart {
   readonly points: readonly ChartPoint[];
-  readonly duty: readonly { readonly name: DutyName; readonly label: string; readonly differential: number; readonly flow: number }[];
+  readonly duty: readonly {
+    readonly name: DutyName;
+    readonly label: string;
+    readonly differential: number;
+    readonly flow: number;
+  }[];
   readonly differentialUnit: string;
   readonly flowUnit: string;
   /** Range of differential outside the Reynolds limits, with its words; empty when the whole curve is inside. */

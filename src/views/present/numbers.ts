@@ -4,7 +4,7 @@ import type { Quantity } from '../../core/quantity/text.ts';
 import { fromSI, type Unit } from '../../core/quantity/units.ts';
 import type { Print, Role } from '../words/print.ts';
 import type { Value } from './model.ts';
-import { type Rounding, roundingOf } from './rounding.ts';
+import { ofLimit, type Rounding, roundingOf } from './rounding.ts';
 import type { DisplayUnits } from './units.ts';
 
 const NO_BREAK = '\u00a0';
@@ -12,17 +12,23 @@ const NO_BREAK = '\u00a0';
 /** An SI figure in a unit, by a rounding rule; without a unit it is a plain number. */
 export function show(si: number, unit: Unit | undefined, rounding: Rounding): Value {
   const value = unit === undefined ? si : fromSI(si, unit);
-  const number = spell(value, { ...rounding, typographic: true });
-  const plain = spell(value, { ...rounding, typographic: false });
-  return valueOf(number, plain, unit, si);
+  return printed(spelled(value, rounding, true), spelled(value, rounding, false), unit, si);
+}
+
+/** The one place where a figure of a view is rounded and spelled. */
+export function spelled(value: number, { trim = false, ...rounding }: Rounding, typographic: boolean): string {
+  if (!trim) return spell(value, { ...rounding, typographic });
+  const kept = Number(spell(value, { ...rounding, typographic: false })); // rounded, its zeros forgotten
+  const { plainTo } = rounding;
+  return spell(kept, { typographic, plainFrom: 1e-5, ...(plainTo === undefined ? {} : { plainTo }) });
 }
 
 /** What the user wrote, digit for digit, with the sign and the unit as they are printed. */
 export function asWritten({ number, unit, si }: Quantity): Value {
-  return valueOf(number.trim().replace('-', '\u2212').replace(/^\+/, ''), number.trim().replace(/^\+/, ''), unit, si);
+  return printed(number.trim().replace('-', '\u2212').replace(/^\+/, ''), number.trim().replace(/^\+/, ''), unit, si);
 }
 
-function valueOf(number: string, plain: string, unit: Unit | undefined, si: number): Value {
+function printed(number: string, plain: string, unit: Unit | undefined, si: number): Value {
   if (unit === undefined) return { number, unit: '', text: number, plain, si };
   const gap = unit.symbol === 'deg' ? '' : NO_BREAK; // a plane angle carries its sign without a space
   return { number, unit: unit.print, text: `${number}${gap}${unit.print}`, plain: `${plain} ${unit.symbol}`, si };
@@ -31,22 +37,30 @@ function valueOf(number: string, plain: string, unit: Unit | undefined, si: numb
 /** Figures of one meter by role: the unit of the display and the one rounding rule. */
 export interface Printer {
   readonly units: DisplayUnits;
+  /** `percent` and `uncertainty` take a percentage, not a share: 0.7 is printed 0.70 %. */
   readonly value: (si: number, role: Role) => Value;
-  readonly text: Print;
+  readonly print: Print;
 }
 
 const plainRoles: readonly Role[] = ['reynolds', 'ratio', 'coefficient', 'factor', 'number'];
 
-/** `percent` and `uncertainty` take a percentage, not a share: 0.7 is printed 0.70 %. */
 export function printer(units: DisplayUnits): Printer {
-  const value = (si: number, role: Role): Value => {
-    if (isPlain(role)) return show(si, undefined, roundingOf(role, ''));
+  const rounded = (si: number, role: Role, rule: (rounding: Rounding) => Rounding): Value => {
+    if (isPlain(role)) return show(si, undefined, rule(roundingOf(role, '')));
     const unit = units[role];
-    const rounding = roundingOf(role, unit.symbol);
+    const rounding = rule(roundingOf(role, unit.symbol));
     if (role !== 'percent' && role !== 'uncertainty') return show(si, unit, rounding);
     return { ...show(si / 100, unit, rounding), si };
   };
-  return { units, value, text: (si, role) => value(si, role).text };
+  const value = (si: number, role: Role): Value => rounded(si, role, (rounding) => rounding);
+  return {
+    units,
+    value,
+    print: {
+      figure: (si, role) => value(si, role).text,
+      limit: (si, role) => rounded(si, role, ofLimit).text,
+    },
+  };
 }
 
 const isPlain = (role: Role): role is Exclude<Role, keyof DisplayUnits> => plainRoles.includes(role);

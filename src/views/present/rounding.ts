@@ -1,8 +1,15 @@
 /** The one rounding rule: how many digits each quantity is printed with, the same on screen, paper and in sentences. */
 import type { Role } from '../words/print.ts';
 
-/** Significant digits, or decimals in the unit that is shown. */
-export type Rounding = { readonly significant: number } | { readonly decimals: number };
+export interface Rounding {
+  /** Significant digits, or else decimals in the unit that is shown. */
+  readonly significant?: number;
+  readonly decimals?: number;
+  /** Leaves out the zeros that only say how many digits were kept: for figures that are set, not measured. */
+  readonly trim?: boolean;
+  /** Largest figure without a power of ten; a million unless given. */
+  readonly plainTo?: number;
+}
 
 const rounding: Readonly<Record<Role, Rounding>> = {
   bore: { significant: 5 },
@@ -22,13 +29,13 @@ const rounding: Readonly<Record<Role, Rounding>> = {
   head: { significant: 3 },
   angle: { significant: 3 },
   molarMass: { significant: 5 },
-  reynolds: { significant: 3 },
+  reynolds: { significant: 3, plainTo: 99_999 },
   ratio: { decimals: 4 },
   coefficient: { decimals: 4 },
   factor: { decimals: 4 },
-  percent: { significant: 2 },
+  percent: { significant: 3 },
   uncertainty: { significant: 2 },
-  bores: { significant: 3 },
+  bores: { significant: 3, trim: true },
   number: { significant: 4 },
 };
 
@@ -40,6 +47,9 @@ export function roundingOf(role: Role, unit: string): Rounding {
   const decimals = role === 'bore' ? boreDecimals[unit] : undefined;
   return decimals === undefined ? rounding[role] : { decimals };
 }
+
+/** A limit is set, not measured: 0.75, not 0.7500. */
+export const ofLimit = (rounding: Rounding): Rounding => ({ ...rounding, trim: true });
 
 /** Figures inside a working line: enough for a reader to repeat it and meet the result. */
 export const workingRounding: Rounding = { significant: 6 };

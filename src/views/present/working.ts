@@ -1,5 +1,4 @@
 /** The working: each formula in symbols, the same with the numbers put in, and the result. */
-import { spell } from '../../core/quantity/digits.ts';
 import type { Given, Working } from '../../core/quantity/working.ts';
 import type { Solved } from '../../core/result/record.ts';
 import { noteText } from '../words/notes.ts';
@@ -10,6 +9,7 @@ import { workingTitle } from '../words/working.ts';
 import { cited } from './cited.ts';
 import { parseFormula } from './formula.ts';
 import type { Row, Value, WorkingGroup, WorkingRow } from './model.ts';
+import { spelled } from './numbers.ts';
 import { workingRounding } from './rounding.ts';
 import { substitute } from './substitute.ts';
 import { unitText } from './unit-text.ts';
@@ -52,8 +52,8 @@ const givenRow = ({ symbol, value, unit, words }: Given): Row => ({
 
 /** A figure of a formula in the formula's own unit, which is SI: no display changes it. */
 function figure(value: number, unit: string): Value {
-  const number = spell(value, { ...workingRounding, typographic: true });
-  const plain = spell(value, { ...workingRounding, typographic: false });
+  const number = spelled(value, workingRounding, true);
+  const plain = spelled(value, workingRounding, false);
   const print = unitText(unit);
   if (unit === '') return { number, unit: '', text: number, plain, si: value };
   return { number, unit: print, text: `${number}\u00a0${print}`, plain: `${plain} ${unit}`, si: value };

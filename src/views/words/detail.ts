@@ -11,6 +11,8 @@ export interface Detail {
   list(key: string): string;
   /** An SI figure in its display unit. */
   figure(key: string, role: Role): string;
+  /** The same for a figure that is set. */
+  limit(key: string, role: Role): string;
 }
 
 /** What a sentence says: what is wrong and where, then what to do. */
@@ -29,7 +31,8 @@ export function detailOf(
 ): Detail {
   const value = (key: string): string | number => {
     const found = values[key];
-    if (found === undefined) throw new Error(`expected detail '${key}' of ${code}, got ${Object.keys(values).join(', ')}`);
+    if (found === undefined)
+      throw new Error(`expected detail '${key}' of ${code}, got ${Object.keys(values).join(', ')}`);
     return found;
   };
   return {
@@ -37,7 +40,8 @@ export function detailOf(
     has: (key) => values[key] !== undefined && values[key] !== '',
     text: (key) => String(value(key)),
     list: (key) => oneOf(String(value(key))),
-    figure: (key, role) => print(Number(value(key)), role),
+    figure: (key, role) => print.figure(Number(value(key)), role),
+    limit: (key, role) => print.limit(Number(value(key)), role),
   };
 }
 

@@ -28,8 +28,8 @@ export const checksOfFlow: Readonly<Record<string, FindingWords>> = {
   flashing: { role: 'pressure', text: (figure) => `Pressure behind the element ${figure}{where}`, ...vapour },
   cavitation: { role: 'pressure', text: (figure) => `Pressure in the jet ${figure}{where}`, ...vapour },
   'cavitation-margin': {
-    role: 'factor',
-    text: (figure) => `Margin of the jet over boiling, as a share of the differential, ${figure}{where}`,
+    role: 'number',
+    text: (figure) => `Margin of the jet over boiling, in differentials, ${figure}{where}`,
   },
   subcooling: saturation('Subcooling', 'below boiling at'),
   superheat: saturation('Superheat', 'above condensing at'),
@@ -38,7 +38,9 @@ export const checksOfFlow: Readonly<Record<string, FindingWords>> = {
   turndown: {
     role: 'percent',
     text: (figure, detail) => {
-      const alone = detail.has('alone') ? `; the differential alone gives ±${detail.figure('alone', 'uncertainty')}` : '';
+      const alone = detail.has('alone')
+        ? `; the differential alone gives ±${detail.figure('alone', 'uncertainty')}`
+        : '';
       return `The differential uses ${figure} of the span{where}${alone}`;
     },
   },

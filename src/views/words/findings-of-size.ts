@@ -8,11 +8,13 @@ const straight = (side: string): FindingWords => ({
   text: (figure) => `Straight pipe ${side} the element ${figure}`,
   limit: (bounds, detail) => {
     const fitting = detail.text('fitting');
-    const behind = fitting === 'downstream' ? '' : ` behind: ${lower(fittingLabel(fitting))}`;
-    const shorter = detail.has('reduced') ? `, or ${detail.figure('reduced', 'bores')} with 0.5 % more uncertainty` : '';
-    const both = detail.has('both') ? '; not shortened on both sides at once' : '';
-    const note = detail.has('note') ? `; ${lower(noteText(detail.text('note')))}` : '';
-    return `${bounds}${behind}${shorter}${both}${note}`;
+    const parts = [
+      fitting === 'downstream' ? bounds : `${bounds} for: ${lower(fittingLabel(fitting))}`,
+      detail.has('reduced') ? `${detail.limit('reduced', 'bores')} adds 0.5 % to the uncertainty of C` : '',
+      detail.has('both') ? 'not shortened on both sides at once' : '',
+      detail.has('note') ? lower(noteText(detail.text('note'))) : '',
+    ];
+    return parts.filter((part) => part !== '').join('; ');
   },
 });
 
@@ -33,6 +35,6 @@ export const checksOfSize: Readonly<Record<string, FindingWords>> = {
   },
   'plate-bending': {
     role: 'length',
-    text: (figure) => `Plate of ${figure} against bending for good{where}`,
+    text: (figure) => `Plate thickness E ${figure} against lasting bending{where}`,
   },
 };

@@ -1,8 +1,8 @@
 /** Every finding as a line: the figure that was compared, where, and the limit it was held against. */
 import type { Finding } from '../../core/check/finding.ts';
 import { type Detail, detailOf } from './detail.ts';
-import { checksOfSize } from './findings-of-size.ts';
 import { checksOfFlow } from './findings-of-flow.ts';
+import { checksOfSize } from './findings-of-size.ts';
 import type { Print, Role } from './print.ts';
 import { dutyLabels } from './verdicts.ts';
 
@@ -18,17 +18,18 @@ export const findingWords: Readonly<Record<string, FindingWords>> = { ...checksO
 
 /** The line of a finding and its limit, figures printed by `print`. A code without words is a defect. */
 export function findingText(finding: Finding, print: Print): { readonly text: string; readonly limit: string } {
-  const words = findingWords[finding.id];
-  if (words === undefined) throw new Error(`expected words for the finding ${finding.id}, got none`);
-  const values = finding.detail ?? {};
-  const detail = detailOf(finding.id, '', values, print);
-  const first = print(finding.value, words.role);
-  const highest = values['highest'];
-  const figure = highest === undefined ? first : range(first, print(Number(highest), words.role));
-  const where = finding.at === undefined ? '' : ` at ${dutyLabels[finding.at]} flow`;
-  const bounds = boundsText(finding.limit, (value) => print(value, words.role));
-  const limit = words.limit?.(bounds, detail) ?? bounds;
-  return { text: `${words.text(figure, detail).replace('{where}', where)}`, limit };
+  const { id, value, limit, at, detail: values = {} } = finding;
+  const words = findingWords[id];
+  if (words === undefined) throw new Error(`expected words for the finding ${id}, got none`);
+  const detail = detailOf(id, '', values, print);
+  const first = print.figure(value, words.role);
+  const figure = detail.has('highest') ? range(first, detail.figure('highest', words.role)) : first;
+  const where = at === undefined ? '' : ` at ${dutyLabels[at]} flow`;
+  const bounds = boundsText(limit, (bound) => print.limit(bound, words.role));
+  return {
+    text: words.text(figure, detail).replace('{where}', where),
+    limit: words.limit?.(bounds, detail) ?? bounds,
+  };
 }
 
 /** 'at least a', 'at most b', 'a to b', or nothing. */

@@ -3,8 +3,7 @@ import { catalogue } from './catalogue.ts';
 
 const byRegion = (region: number): Readonly<Record<string, string>> => ({
   [`if97-region-${region}`]: `From the equation of region ${region} of the formulation; too long to print here.`,
-  [`if97-region-${region}-beyond-saturation`]:
-    `From the equation of region ${region}, continued a little beyond the saturation line to hold the phase.`,
+  [`if97-region-${region}-beyond-saturation`]: `From the equation of region ${region}, continued a little beyond the saturation line to hold the phase.`,
 });
 
 export const remarks: Readonly<Record<string, string>> = {

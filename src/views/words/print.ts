@@ -29,8 +29,13 @@ export type Role =
   | 'bores' // multiples of the pipe bore
   | 'number';
 
-/** An SI figure as text with its unit. */
-export type Print = (si: number, role: Role) => string;
+/** SI figures as text with their units. */
+export interface Print {
+  /** What was found or measured. */
+  readonly figure: (si: number, role: Role) => string;
+  /** What is set: a limit keeps no zeros that only say how it was rounded. */
+  readonly limit: (si: number, role: Role) => string;
+}
 
 const siUnits: Readonly<Record<Role, string>> = {
   bore: 'm',
@@ -60,5 +65,7 @@ const siUnits: Readonly<Record<Role, string>> = {
   number: '',
 };
 
-/** The figure as it is, in SI: where no meter says which units to show. */
-export const printSI: Print = (si, role) => `${si} ${siUnits[role]}`.trimEnd();
+const asItIs = (si: number, role: Role): string => `${si} ${siUnits[role]}`.trimEnd();
+
+/** The figures as they are, in SI: where no meter says which units to show. */
+export const printSI: Print = { figure: asItIs, limit: asItIs };

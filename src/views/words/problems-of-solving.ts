@@ -55,4 +55,12 @@ export const solvingProblems: ProblemWords = {
     cause: `Even a diameter ratio of ${d.figure('ratio', 'ratio')} makes less than this differential.`,
     next: 'Lower the differential, raise the flow or choose a smaller pipe.',
   }),
+  'bore-not-below-pipe': (d) => ({
+    cause: `The bore of ${d.figure('bore', 'bore')} is not smaller than the pipe bore of ${d.figure('pipe', 'bore')}.`,
+    next: 'Choose a smaller bore or a larger pipe.',
+  }),
+  'base-density-missing': (d) => ({
+    cause: `This fluid has no density at the base state, and ${d.place} is a volume flow there.`,
+    next: 'State the density at the base state, or write a mass flow or a volume flow at the upstream state.',
+  }),
 };
