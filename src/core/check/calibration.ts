@@ -1,4 +1,5 @@
 /** A calibrated meter is known where it was calibrated. */
+import { calibrationRange } from '../element/shared/calibration.ts';
 import type { Source } from '../quantity/source.ts';
 import { type Case, flowsOf } from './case.ts';
 import type { Finding } from './finding.ts';
@@ -8,8 +9,8 @@ const TABLE: Source = { clause: 'Calibration of this meter', seen: 'read' };
 /** Flows beyond the first or last point of the table; one row is a constant and says nothing of a range. */
 export function checkCalibration(subject: Case): readonly Finding[] {
   const rows = subject.input.element.calibration;
-  const [min, max] = [rows[0]?.reynolds, rows.at(-1)?.reynolds];
-  if (rows.length < 2 || min === undefined || max === undefined) return [];
+  if (rows.length < 2) return [];
+  const { min, max } = calibrationRange(rows);
   const flows = flowsOf(subject);
   const outside = flows.filter(({ reynolds }) => reynolds < min || reynolds > max);
   const common = {

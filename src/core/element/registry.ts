@@ -20,8 +20,9 @@ export const notOffered: readonly string[] = [
   'averaging-pitot',
 ];
 
-/** The element of a kind, or the problem `element-not-offered` or `element-unknown` at `element.kind`. */
-export const elementOf = (kind: string): Outcome<Element> => {
+/** The element of a kind. Problems at `element.kind`: field-missing, element-not-offered, element-unknown. */
+export const elementOf = (kind: string | undefined): Outcome<Element> => {
+  if (kind === undefined || kind === '') return fail('field-missing', 'element.kind');
   const element = elements.find((one) => one.kind === kind);
   if (element !== undefined) return ok(element);
   const code = notOffered.includes(kind) ? 'element-not-offered' : 'element-unknown';

@@ -28,8 +28,14 @@ export type Root =
     };
 
 const MOST_EVALUATIONS = 200; // bisection alone needs about 60
-/** Two steps in a row whose relative sizes multiply to less than this leave an error below one part in 1e15. */
-const SETTLED = 1e-15;
+/**
+ * The error left after a step is the product of the errors of the points it was drawn through, each about the relative
+ * size of the step taken from it, times the curvature that those points left unseen. For functions as straight as the
+ * meter equations that is a hundredth or less, so that below this product nothing is left that a double could hold.
+ */
+const SETTLED = 1e-13;
+/** A step this small, relative to x, is rounding. */
+const NOISE = 4 * Number.EPSILON;
 
 /** Finds the root, to the last few bits of a double. Throws a defect when f answers with no number. */
 export function root({ f, lower, upper, start, slope }: Search): Root {
@@ -45,13 +51,14 @@ export function root({ f, lower, upper, start, slope }: Search): Root {
     return y;
   };
   let x = start;
-  let before = 1; // relative size of the step that led here
+  let sizes: number[] = []; // relative sizes of the steps from the points in `past`, newest first
   while (evaluations < MOST_EVALUATIONS) {
     const y = at(x);
     if (y === 0) return { found: true, x, evaluations };
     past.unshift({ x, y });
     past.length = Math.min(past.length, 3);
     let next = x + step(past, slope);
+    if (Math.abs(next - x) <= NOISE * Math.abs(x)) return { found: true, x: next, evaluations };
     if (!(next > a && next < b)) {
       const end = y < 0 ? b : a;
       const unseen = y < 0 ? b === upper : a === lower;
@@ -62,11 +69,12 @@ export function root({ f, lower, upper, start, slope }: Search): Root {
       }
       next = a + (b - a) / 2;
       past.length = 1; // the curve bent away: interpolate afresh from here
-      before = 1;
+      sizes = [];
     }
     const size = Math.abs(next - x) / Math.abs(next || 1);
-    if (size * before <= SETTLED || size <= Number.EPSILON) return { found: true, x: next, evaluations };
-    before = size;
+    sizes = [size, ...sizes].slice(0, 3);
+    const left = sizes.reduce((product, one) => product * one, 1);
+    if (sizes.length > 1 && left <= SETTLED) return { found: true, x: next, evaluations };
     x = next;
   }
   return { found: false, side: 'unsettled', lower: a, upper: b, evaluations };

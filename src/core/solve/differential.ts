@@ -8,6 +8,7 @@ import type { MassFlow, PressureDifference } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import {
   expansibilityOf,
+  exponentOf,
   heldAt,
   heldDischarge,
   idealFlow,
@@ -48,41 +49,46 @@ export function differentialFrom(
   }
   const most = Math.min(Math.max(MOST_EXPANSION, spanned / state.pressure), STILL_RISING);
   const epsilonAt = expansibilityOf(primary, geometry.ratio, state);
-  const { found, evaluations } = expansionFrom(a3, most, epsilonAt);
+  const found = expansionFrom(a3, most, typicalFall(geometry.ratio) / exponentOf(state), epsilonAt);
   if (!found.found) return fail('differential-too-large', field, { pressure: state.pressure, share: most });
   const x = found.x;
   return ok({
     ...common,
     differential: (x * state.pressure) as PressureDifference,
-    epsilon: coefficientOfExpansion(a3, x),
-    evaluations,
+    epsilon: Math.sqrt(a3 / x), // at the root x eps2 = A3, so that eps needs no further evaluation
+    evaluations: found.evaluations,
   });
 }
 
-/** At the root x eps2 = A3 holds to the last bit, so eps needs no further evaluation. */
-const coefficientOfExpansion = (a3: number, x: number): number => Math.sqrt(a3 / x);
-
 /**
- * Solves x eps(x)2 = a for x. eps falls almost in a straight line from 1, eps = 1 - k x, so that one value at x = a
- * gives k and k a first guess: the series of the root of x (1 - k x)2 = a.
+ * Solves x eps(x)2 = a for x. eps falls almost in a straight line from 1: with eps = 1 - k x the slope k hardly moves, so
+ * that x and the root of the cubic x (1 - k(x) x)2 = a differ by a function that rises with slope 1 and is nearly straight.
  */
-function expansionFrom(
-  a: number,
-  most: number,
-  epsilonAt: (x: number) => number,
-): { found: Root; evaluations: number } {
-  const probe = Math.min(a, most);
-  const k = (1 - epsilonAt(probe)) / probe;
-  const ka = k * probe;
-  const guess = probe * (1 + ka * (2 + ka * (7 + ka * (30 + ka * 143)))); // Lagrange's inversion of x (1 - k x)2 = a
-  const start = Math.min(guess, most);
-  const line = 1 - k * start;
-  const found = root({
-    f: (x) => x * epsilonAt(x) ** 2 - a,
+function expansionFrom(a: number, most: number, fall: number, epsilonAt: (x: number) => number): Root {
+  const cubicAt = (x: number) => cubicRoot(a, (1 - epsilonAt(x)) / x);
+  return root({
+    f: (x) => x - cubicAt(x),
     lower: 0,
     upper: most,
-    start,
-    slope: line * (3 * line - 2), // of x (1 - k x)2
+    start: Math.min(cubicRoot(a, fall), most),
+    slope: 1,
   });
-  return { found, evaluations: found.evaluations + 1 };
+}
+
+/** eps falls by about this over kappa for each unit of x: a guess between orifice plates and nozzles of that ratio. */
+const typicalFall = (ratio: number): number => 0.55 + (0.7 * ratio ** 4) / (1 - ratio ** 4);
+const MOST_STEPS = 30;
+
+/** The smaller root of z (1 - k z)2 = a, or the place of its maximum where a lies above it. */
+function cubicRoot(a: number, k: number): number {
+  const peak = 1 / (3 * k);
+  if (!(a < (4 / 9) * peak)) return peak;
+  let z = Math.min(a, peak);
+  for (let count = 0; count < MOST_STEPS; count += 1) {
+    const line = 1 - k * z;
+    const step = (a - z * line ** 2) / (line * (line - 2 * k * z));
+    z += step;
+    if (Math.abs(step) <= 2 * Number.EPSILON * z) break;
+  }
+  return z;
 }

@@ -38,7 +38,7 @@ export const heldDischarge = (primary: Primary, geometry: Geometry): Held => {
 
 /** Expansibility factor against x; 1 for a liquid. */
 export const expansibilityOf = (primary: Primary, ratio: number, state: FluidState): Expansibility =>
-  state.expands ? primary.expansibility(ratio, expect(state.isentropicExponent)) : () => 1;
+  state.expands ? primary.expansibility(ratio, exponentOf(state)) : () => 1;
 
 /** Pipe Reynolds number of a mass flow: 4 q_m/(pi mu D), ISO 5167-1:2003, 3.3.2. */
 export const reynoldsOf = (massFlow: number, viscosity: number, pipe: number): number =>
@@ -54,10 +54,10 @@ export const geometryOf = (pipe: Length, bore: number): Geometry => ({
   ratio: bore / pipe,
 });
 
-const expect = (exponent: number | undefined): number => {
-  if (exponent === undefined)
-    throw new Error('solve: expected an isentropic exponent for a fluid that expands, got none');
-  return exponent;
+/** The exponent of a fluid that expands; state.ts never leaves it out. */
+export const exponentOf = ({ isentropicExponent }: FluidState): number => {
+  if (isentropicExponent !== undefined) return isentropicExponent;
+  throw new Error('solve: expected an isentropic exponent for a fluid that expands, got none');
 };
 
 export const heldAt = (held: Held, reynolds: number) => (reynolds < held.floor ? { heldAt: held.floor } : {});

@@ -1,0 +1,69 @@
+/** Pipe sizes by name: how they are written in the project, their nominal bore and how a search finds them. */
+import type { Source } from '../quantity/source.ts';
+import { PIPE_SIZE_ROWS, PIPE_SIZE_SOURCES, type PipeSizeRow } from './pipe-sizes.table.ts';
+
+export interface PipeSize {
+  /** As the project keeps it in pipe.size: 'DN 100, 40'. */
+  readonly name: string;
+  readonly dn: number;
+  readonly nps: string; // '1 1/2'
+  readonly schedule: string;
+  readonly outside: string; // mm, decimal text
+  readonly wall: string; // mm, decimal text
+  /** Outside diameter less two walls, mm, exact decimal text. */
+  readonly bore: string;
+  readonly source: Source;
+}
+
+/** Decimal text of millimetres as whole hundredths; the table has two decimals at most. */
+const hundredths = (text: string): number => {
+  const [whole = '0', fraction = ''] = text.split('.');
+  return Number(whole) * 100 + Number(fraction.padEnd(2, '0'));
+};
+
+const decimalText = (count: number): string => {
+  const fraction = String(count % 100)
+    .padStart(2, '0')
+    .replace(/0+$/, '');
+  const whole = String(Math.floor(count / 100));
+  return fraction === '' ? whole : `${whole}.${fraction}`;
+};
+
+const QUARTERS = ['', '1/4', '1/2', '3/4'] as const;
+
+const inches = (nps: number): string => {
+  const whole = Math.floor(nps);
+  const part = QUARTERS[(nps - whole) * 4] ?? '';
+  return [whole === 0 ? '' : String(whole), part].filter(Boolean).join(' ');
+};
+
+const pipeSize = ([nps, dn, schedule, outside, wall]: PipeSizeRow): PipeSize => ({
+  name: `DN ${dn}, ${schedule}`,
+  dn,
+  nps: inches(nps),
+  schedule,
+  outside,
+  wall,
+  bore: decimalText(hundredths(outside) - 2 * hundredths(wall)),
+  source: /^\d+S$/.test(schedule) ? PIPE_SIZE_SOURCES.stainless : PIPE_SIZE_SOURCES.plain,
+});
+
+/** Every size of the table, smallest first. */
+export const PIPE_SIZES: readonly PipeSize[] = PIPE_SIZE_ROWS.map(pipeSize);
+
+/**
+ * Sizes that a query finds: each of its words must be the DN, the NPS or the schedule of the size, or begin it
+ * ('100 40', 'DN100', '4" 40S', '1 1/2 80'). An empty query finds all.
+ */
+export const searchPipeSizes = (query: string): readonly PipeSize[] => {
+  const words = query
+    .toUpperCase()
+    .replace(/\b(DN|NPS|SCH|SCHEDULE|IN)\b\.?/g, ' ')
+    .replace(/DN(?=\d)/g, '')
+    .split(/[\s,"″]+/)
+    .filter(Boolean);
+  return PIPE_SIZES.filter((size) => {
+    const keys = [String(size.dn), size.schedule, ...size.nps.split(' ')];
+    return words.every((word) => keys.some((key) => key.startsWith(word)));
+  });
+};

@@ -1,0 +1,94 @@
+/** The only runner of the reference vectors: every case of every file, at its printed precision, none skipped. */
+import { readFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { describe, expect, test } from 'vitest';
+import { compareAll, vectorFiles } from './vectors/measure.ts';
+
+/** Figures that their source prints otherwise than its own formula gives; each must still miss, or the entry goes. */
+interface Miss {
+  readonly file: string;
+  readonly name: string;
+  readonly field: string;
+  readonly reason: string;
+}
+const misses = JSON.parse(readFileSync(join(import.meta.dirname, 'vectors/known-misses.json'), 'utf8')) as Miss[];
+
+const files = vectorFiles();
+
+describe.each(files)('$path', ({ path, file }) => {
+  const known = misses.filter((miss) => miss.file === path);
+  const compared = compareAll({ path, file });
+
+  test('names its source, its columns and the reason of each tolerance', () => {
+    expect(file.source).toMatch(/\S/);
+    expect(['published', 'independent', 'unseen']).toContain(file.origin);
+    for (const { why, rel, abs } of Object.values(file.tolerance)) {
+      expect(why).toMatch(/\S/);
+      expect(rel ?? abs, why).toBeGreaterThanOrEqual(0);
+    }
+    for (const name of Object.keys(file.cases[0]?.expect ?? {})) expect(Object.keys(file.about)).toContain(name);
+  });
+
+  test(`${compared.length} figures`, () => {
+    const isKnown = (name: string, field: string) => known.some((miss) => miss.name === name && miss.field === field);
+    const wrong = compared.filter(({ name, field, share }) => share <= 1 === isKnown(name, field));
+    expect(wrong.map(({ name, field, expected, got }) => `${name}: ${field} expected ${expected}, got ${got}`)).toEqual(
+      [],
+    );
+  });
+});
+
+test('no vector has been lost', () => {
+  const counts = Object.fromEntries(files.map(({ path, file }) => [path, file.cases.length]));
+  expect(counts).toMatchInlineSnapshot(`
+    {
+      "handbook/cengel-cimbala.json": 1,
+      "handbook/coulson-richardson.json": 1,
+      "handbook/crane-bore.json": 1,
+      "handbook/crane-flow-coefficient.json": 1,
+      "handbook/crane-flow.json": 2,
+      "handbook/crane-loss.json": 1,
+      "handbook/entrance-question-venturi.json": 1,
+      "handbook/fox-mcdonald.json": 1,
+      "handbook/geankoplis.json": 1,
+      "handbook/inclined-oil-venturi.json": 1,
+      "handbook/petrol-venturi-coefficient.json": 1,
+      "handbook/petrol-venturi-flow.json": 1,
+      "handbook/white.json": 3,
+      "iapws/boundary.json": 2,
+      "iapws/region1.json": 3,
+      "iapws/region2.json": 3,
+      "iapws/region3-roots-at-critical.json": 4,
+      "iapws/region3-roots-near-critical.json": 8,
+      "iapws/region3-roots.json": 40,
+      "iapws/region3.json": 3,
+      "iapws/region5.json": 3,
+      "iapws/saturation.json": 6,
+      "iapws/states.json": 200,
+      "iapws/viscosity.json": 11,
+      "iapws/vpt-borders.json": 12,
+      "iapws/vpt.json": 52,
+      "iso5167/flange-data-sheet.json": 1,
+      "iso5167/fluids-coefficient.json": 78,
+      "iso5167/fluids-expansibility.json": 40,
+      "iso5167/fluids-flow.json": 40,
+      "iso5167/fluids-jet-loss.json": 12,
+      "iso5167/fluids-venturi-loss.json": 12,
+      "iso5167/isa-1932-coefficient.json": 179,
+      "iso5167/long-radius-coefficient.json": 223,
+      "iso5167/reader-harris-gallagher.json": 4,
+      "iso5167/tr-11583-expansibility.json": 1,
+      "iso5167/venturi-nozzle-coefficient.json": 28,
+      "units/nist-sp811.json": 34,
+      "units/pint.json": 130,
+    }
+  `);
+});
+
+test('every known miss names a case that exists, and says why', () => {
+  for (const miss of misses) {
+    const found = files.find(({ path }) => path === miss.file)?.file.cases.find(({ name }) => name === miss.name);
+    expect(found?.expect, JSON.stringify(miss)).toHaveProperty(miss.field);
+    expect(miss.reason).toMatch(/\S/);
+  }
+});
