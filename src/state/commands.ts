@@ -3,7 +3,7 @@
  * a new version of the program. app carries them out and reports through the store (keeping, notice, projects).
  */
 export interface Commands {
-  /** A new project with one empty meter; the one at hand stays in the list. */
+  /** A new, empty project; the one at hand stays in the list. */
   newProject(): Promise<void>;
   openFile(): Promise<void>;
   openDropped(file: File): Promise<void>;

@@ -4,12 +4,11 @@
  */
 import { temporal, type ZundoOptions } from 'zundo';
 import { createStore } from 'zustand/vanilla';
-import { encode } from '../core/document/codec.ts';
+import { emptyProject, encode } from '../core/document/codec.ts';
 import { type Core, createDerive } from './derive.ts';
 import { editing, type Hands } from './editing.ts';
 import { following } from './following.ts';
 import { listing } from './listing.ts';
-import { newProject } from './meters.ts';
 import { createSteps, type Steps } from './steps.ts';
 import type { Workbench, WorkbenchActions, WorkbenchState, WorkbenchStore } from './workbench.ts';
 
@@ -19,7 +18,7 @@ type Standing = Pick<WorkbenchActions, 'setKeeping' | 'setNotice' | 'dismissNoti
 
 export const HISTORY_LIMIT = 200;
 
-/** A workbench with a new project; `core` solves it. */
+/** A workbench with an empty project; `core` solves it. */
 export function createWorkbench(core: Core): WorkbenchStore {
   const steps = createSteps();
   const newKey = createKeys();
@@ -66,11 +65,11 @@ const remembering = (steps: Steps): ZundoOptions<Workbench, Trace> => ({
 });
 
 function initial(core: Core, newKey: () => string): WorkbenchState {
-  const project = newProject();
+  const project = emptyProject();
   return {
     project,
     keys: project.meters.map(newKey),
-    selected: 0,
+    selected: -1,
     results: createDerive(core)(project),
     lastSolved: {},
     opened: { project, source: encode(project) },

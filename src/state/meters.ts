@@ -1,5 +1,5 @@
-/** New meters and projects, and the tags they get. */
-import type { MeterText, Project } from '../core/document/project.ts';
+/** New meters, and the tags they get. */
+import type { MeterText } from '../core/document/project.ts';
 
 /** The meter as an object; what stands in the list in a meter's place counts as an empty one. */
 const asMeter = (meter: unknown): MeterText =>
@@ -34,9 +34,4 @@ export function copyOf(meter: unknown, meters: readonly unknown[]): MeterText {
   let tag = stem;
   for (let count = 2; taken.has(tag); count += 1) tag = `${stem} ${count}`;
   return { ...asMeter(meter), tag };
-}
-
-/** A new project with one meter to fill in. */
-export function newProject(): Project {
-  return { format: 'headwright', version: 1, meters: [newMeter([])] };
 }

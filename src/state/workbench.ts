@@ -9,6 +9,7 @@ import type { Results, Solved } from '../core/result/record.ts';
 /** Where the project stands: not yet read, being kept, kept, or why not. */
 export type Keeping =
   | { readonly state: 'reading' }
+  | { readonly state: 'new' } // empty so far: there is nothing to keep
   | { readonly state: 'pending' }
   | { readonly state: 'kept'; readonly at: string } // local time, '14:02'
   | { readonly state: 'memory'; readonly cause: string } // nothing is kept, and why (code of words)

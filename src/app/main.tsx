@@ -1,0 +1,44 @@
+/** Puts the program together: the core under the workbench, the workbench on the desk, the screen on the page. */
+import { lazy } from 'react';
+import { createRoot } from 'react-dom/client';
+import { run, solveMeter } from '../core/run.ts';
+import { flushWhenHidden } from '../persist/autosave.ts';
+import { createWorkbench } from '../state/create.ts';
+import { Root } from '../views/screen/Root.tsx';
+import { createDesk, type Desk } from './desk.ts';
+import { registerOffline } from './offline.ts';
+import { createOrders } from './orders.ts';
+import { start } from './shelf.ts';
+import { openStorage } from './storage.ts';
+import { newId, tab } from './tab.ts';
+
+const Sheets = lazy(async () => ({ default: (await import('../views/sheet/Sheets.tsx')).Sheets }));
+
+const store = createWorkbench({ run, solveMeter });
+let desk: Desk | undefined;
+let newVersion: (() => void) | undefined;
+
+const port = await openStorage({
+  onBlocked: () => store.getState().setNotice({ code: 'close-other-tabs', detail: {}, kind: 'problem' }),
+  onWanted: async () => {
+    await desk?.autosave.flush('strict');
+    desk?.autosave.stop();
+    store.getState().setKeeping({ state: 'failed', cause: 'newer' });
+  },
+});
+desk = createDesk({ store, port, locks: navigator.locks, tab, newId });
+flushWhenHidden(document, desk.autosave);
+await start(desk);
+
+const root = document.getElementById('root');
+if (root === null) throw new Error('expected an element #root in the page, got none');
+const commands = createOrders({ desk, newVersion: () => newVersion });
+createRoot(root).render(<Root store={store} commands={commands} sheets={Sheets} />);
+
+registerOffline(
+  (apply) => {
+    newVersion = apply;
+    store.getState().setUpdate(true);
+  },
+  () => undefined, // working offline is what the page promises anyway
+);
