@@ -1,0 +1,65 @@
+/** The screen: header, list of meters, and the place the address names. */
+import { type ComponentType, Suspense, useState } from 'react';
+import type { Project } from '../../core/document/project.ts';
+import type { Results } from '../../core/result/record.ts';
+import type { Commands } from '../../state/commands.ts';
+import type { WorkbenchStore } from '../../state/workbench.ts';
+import { BindingProvider } from './binding.tsx';
+import { usePlace } from './place.ts';
+import { SheetPlace } from './SheetPlace.tsx';
+import { DialogHost } from './shell/DialogHost.tsx';
+import { DialogProvider } from './shell/dialogs.tsx';
+import { DropZone } from './shell/DropZone.tsx';
+import { Header } from './shell/Header.tsx';
+import { Hotkeys } from './shell/Hotkeys.tsx';
+import { MeterList } from './shell/MeterList.tsx';
+import { Messages } from './shell/Messages.tsx';
+import { Size } from './Size.tsx';
+import { startTheme } from './theme.ts';
+import './tokens.css';
+import styles from './Root.module.css';
+
+export type Paper = 'A4' | 'Letter';
+
+/** The printed sheets; app hands them in, the screen only gives them their place. */
+export type SheetsView = ComponentType<{ readonly project: Project; readonly results: Results; readonly paper: Paper }>;
+
+interface Props {
+  readonly store: WorkbenchStore;
+  readonly commands: Commands;
+  readonly sheets: SheetsView;
+}
+
+export function Root({ store, commands, sheets }: Props) {
+  useState(startTheme);
+  return (
+    <BindingProvider store={store} commands={commands}>
+      <DialogProvider>
+        <DropZone>
+          <Hotkeys />
+          <a className={styles.skip} href="#content">
+            To the content
+          </a>
+          <Header />
+          <Messages />
+          <Body sheets={sheets} />
+          <DialogHost />
+        </DropZone>
+      </DialogProvider>
+    </BindingProvider>
+  );
+}
+
+function Body({ sheets }: { readonly sheets: SheetsView }) {
+  const place = usePlace();
+  return (
+    <div className={styles.body}>
+      <MeterList />
+      <main className={styles.main} id="content" tabIndex={-1}>
+        <Suspense fallback={<p className={styles.wait}>One moment</p>}>
+          {place === 'size' ? <Size /> : <SheetPlace sheets={sheets} />}
+        </Suspense>
+      </main>
+    </div>
+  );
+}

@@ -1,0 +1,35 @@
+/** The sheets as they will be printed, with the choice of paper. */
+import { useState } from 'react';
+import { useCommands, useWorkbench } from './binding.tsx';
+import type { Paper, SheetsView } from './Root.tsx';
+import styles from './SheetPlace.module.css';
+
+const PAPERS: readonly Paper[] = ['A4', 'Letter'];
+
+export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) {
+  const project = useWorkbench((state) => state.project);
+  const results = useWorkbench((state) => state.results);
+  const [paper, setPaper] = useState<Paper>(project.display === 'US' ? 'Letter' : 'A4');
+  const commands = useCommands();
+  return (
+    <div className={styles.place}>
+      <div className={styles.bar}>
+        <fieldset>
+          <legend>Paper</legend>
+          {PAPERS.map((name) => (
+            <label key={name}>
+              <input type="radio" name="paper" checked={paper === name} onChange={() => setPaper(name)} />
+              {name}
+            </label>
+          ))}
+        </fieldset>
+        <button type="button" onClick={() => commands.print()}>
+          Print
+        </button>
+      </div>
+      <div className={styles.sheets}>
+        <Sheets project={project} results={results} paper={paper} />
+      </div>
+    </div>
+  );
+}

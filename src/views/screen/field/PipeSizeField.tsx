@@ -1,0 +1,59 @@
+/** Picks a pipe from the table of sizes and fills in its bore. The table is second-hand and says so. */
+import { useId, useState } from 'react';
+import { type PipeSize, searchPipeSizes } from '../../../core/document/pipe-sizes.ts';
+import { useWorkbench } from '../binding.tsx';
+import { useMeterText } from '../meter.ts';
+import styles from './box.module.css';
+import { Frame } from './Frame.tsx';
+import { PipeSizeList } from './PipeSizeList.tsx';
+import { usePicker } from './usePicker.ts';
+
+const SHOWN = 60; // more than anyone reads; the search narrows it
+
+export function PipeSizeField() {
+  const size = useMeterText('pipe.size');
+  const write = useWorkbench((state) => state.write);
+  const settle = useWorkbench((state) => state.settle);
+  const [query, setQuery] = useState<string>();
+  const listId = useId();
+  const found = query === undefined ? [] : searchPipeSizes(query === size ? '' : query).slice(0, SHOWN);
+
+  const pick = (chosen: PipeSize): void => {
+    write('pipe.size', chosen.name);
+    write('pipe.bore', `${chosen.bore} mm`);
+    settle();
+    setQuery(undefined);
+  };
+  const picker = usePicker(found, pick, (open) => setQuery(open ? size : undefined));
+  const id = 'field-pipe.size';
+
+  return (
+    <Frame id={id} label="Line size" note={size !== '' && <span>nominal wall, table second-hand°</span>}>
+      <div className={styles.box} data-anchor="true">
+        <input
+          id={id}
+          className={styles.input}
+          data-field="pipe.size"
+          type="text"
+          role="combobox"
+          autoComplete="off"
+          spellCheck={false}
+          placeholder="DN or NPS, schedule"
+          aria-expanded={query !== undefined}
+          aria-controls={listId}
+          aria-autocomplete="list"
+          aria-activedescendant={picker.active === undefined ? undefined : `${listId}-${picker.active}`}
+          value={query ?? size}
+          onChange={(event) => {
+            setQuery(event.target.value);
+            if (event.target.value === '') write('pipe.size', undefined);
+          }}
+          onClick={() => setQuery(query ?? size)}
+          onKeyDown={picker.onKeyDown}
+          onBlur={() => setQuery(undefined)}
+        />
+        {query !== undefined && <PipeSizeList id={listId} sizes={found} active={picker.active} pick={pick} />}
+      </div>
+    </Frame>
+  );
+}

@@ -1,0 +1,39 @@
+/** Words or a plain number, kept as typed. */
+import { Frame, problemId } from './Frame.tsx';
+import styles from './box.module.css';
+
+interface Props {
+  readonly path: string;
+  readonly label: string;
+  readonly text: string;
+  readonly problem?: string | undefined;
+  readonly decimal?: boolean;
+  readonly write: (text: string) => void;
+  readonly settle: () => void;
+}
+
+export function TextField({ path, label, text, problem, decimal = false, write, settle }: Props) {
+  const id = `field-${path}`;
+  const invalid = problem !== undefined && text !== '';
+  return (
+    <Frame id={id} label={label} problem={problem} waiting={text === ''}>
+      <div className={styles.box} data-invalid={invalid}>
+        <input
+          id={id}
+          className={styles.input}
+          data-field={path}
+          type="text"
+          inputMode={decimal ? 'decimal' : 'text'}
+          enterKeyHint="next"
+          autoComplete="off"
+          spellCheck={!decimal}
+          value={text}
+          aria-invalid={invalid}
+          aria-describedby={problem === undefined ? undefined : problemId(id)}
+          onChange={(event) => write(event.target.value)}
+          onBlur={settle}
+        />
+      </div>
+    </Frame>
+  );
+}

@@ -1,0 +1,58 @@
+/** What each quantity field measures, and the unit it starts with in either display. */
+import type { Display } from '../../../core/document/project.ts';
+import type { Measure } from '../../../core/quantity/units.ts';
+
+export interface QuantityKind {
+  /** In the order of preference: the first that knows a unit reads it. */
+  readonly measures: readonly Measure[];
+  readonly unit: Readonly<Record<Display, string>>;
+}
+
+const kind = (measures: readonly Measure[], si: string, us: string): QuantityKind => ({ measures, unit: { SI: si, US: us } });
+
+const pressure = kind(['gauge pressure', 'absolute pressure'], 'bar(g)', 'psi(g)');
+const absolute = kind(['absolute pressure'], 'kPa(a)', 'psi(a)');
+const temperature = kind(['temperature'], 'degC', 'degF');
+const diameter = kind(['length'], 'mm', 'in');
+const flow = kind(['mass flow', 'volume flow', 'base volume flow'], 't/h', 'lb/h');
+const density = kind(['density'], 'kg/m3', 'lb/ft3');
+const straight = kind(['bores', 'length'], 'D', 'D');
+const share = kind(['share'], '%', '%');
+
+export const QUANTITIES: Readonly<Record<string, QuantityKind>> = {
+  'upstream.pressure': pressure,
+  'upstream.temperature': temperature,
+  'fluid.density': density,
+  'fluid.viscosity': kind(['dynamic viscosity'], 'mPa.s', 'cP'),
+  'fluid.molarMass': kind(['molar mass'], 'kg/kmol', 'lb/lbmol'),
+  'fluid.vapourPressure': kind(['absolute pressure'], 'bar(a)', 'psi(a)'),
+  'fluid.baseDensity': density,
+  'pipe.bore': diameter,
+  'pipe.roughness': kind(['length'], 'um', 'uin'),
+  'pipe.measuredAt': temperature,
+  'element.bore': diameter,
+  'element.measuredAt': temperature,
+  'element.plateThickness': diameter,
+  'element.edgeThickness': diameter,
+  'duty.maximum': flow,
+  'duty.normal': flow,
+  'duty.minimum': flow,
+  differential: kind(['pressure difference'], 'mbar', 'inH2O'),
+  'installation.before': straight,
+  'installation.after': straight,
+  'uncertainty.bore': share,
+  'uncertainty.pipe': share,
+  'uncertainty.differential': kind(['share of span', 'share of reading'], '% of span', '% of span'),
+  'uncertainty.density': share,
+  'site.atmosphere': absolute,
+  'site.gravity': kind(['acceleration'], 'm/s2', 'm/s2'),
+  'base.pressure': absolute,
+  'base.temperature': temperature,
+};
+
+/** The kind of a field. A path without a row here is a mistake of ours. */
+export function quantityKind(path: string): QuantityKind {
+  const found = QUANTITIES[path];
+  if (found === undefined) throw new Error(`expected a quantity field, got ${path}`);
+  return found;
+}

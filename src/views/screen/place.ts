@@ -1,0 +1,18 @@
+/** The places of the program, as hash routes. */
+import { useSyncExternalStore } from 'react';
+
+export const PLACES = [
+  { id: 'size', label: 'Size' },
+  { id: 'sheet', label: 'Sheet' },
+] as const;
+
+export type PlaceId = (typeof PLACES)[number]['id'];
+
+const placeOf = (hash: string): PlaceId => PLACES.find((place) => hash === `#/${place.id}`)?.id ?? 'size';
+
+const subscribe = (changed: () => void): (() => void) => {
+  window.addEventListener('hashchange', changed);
+  return () => window.removeEventListener('hashchange', changed);
+};
+
+export const usePlace = (): PlaceId => useSyncExternalStore(subscribe, () => placeOf(window.location.hash));

@@ -1,0 +1,29 @@
+/** A modal dialog of the browser: it holds the focus, closes by Escape and gives the focus back. */
+import { type ReactNode, useEffect, useRef } from 'react';
+import styles from './Dialog.module.css';
+
+interface Props {
+  readonly title: string;
+  readonly close: () => void;
+  readonly children: ReactNode;
+}
+
+export function Dialog({ title, close, children }: Props) {
+  const ref = useRef<HTMLDialogElement>(null);
+  useEffect(() => {
+    const dialog = ref.current;
+    dialog?.showModal();
+    return () => dialog?.close();
+  }, []);
+  return (
+    <dialog ref={ref} className={styles.dialog} aria-labelledby="dialog-title" onClose={close}>
+      <header>
+        <h2 id="dialog-title">{title}</h2>
+        <button type="button" onClick={() => ref.current?.close()}>
+          Close
+        </button>
+      </header>
+      {children}
+    </dialog>
+  );
+}

@@ -1,0 +1,20 @@
+/** The list of keys. */
+import { KEYS } from './keys.table.ts';
+import styles from './Keys.module.css';
+
+export function Keys() {
+  return (
+    <dl className={styles.keys}>
+      {KEYS.map(({ keys, words }) => (
+        <div key={keys}>
+          <dt>
+            {keys.split(' ').map((key) => (
+              <kbd key={key}>{key}</kbd>
+            ))}
+          </dt>
+          <dd>{words}</dd>
+        </div>
+      ))}
+    </dl>
+  );
+}

@@ -1,0 +1,81 @@
+/** The element's own coefficients: rows of Reynolds number and C. One row is a constant. */
+import { useWorkbench } from '../binding.tsx';
+import { useProblem } from '../meter.ts';
+import { textAt, valueAt } from '../text.ts';
+import styles from './Calibration.module.css';
+
+const PATH = 'element.calibration';
+const COLUMNS = [
+  { key: 'reynolds', label: 'Re (pipe)' },
+  { key: 'coefficient', label: 'C' },
+] as const;
+
+export function Calibration() {
+  const meter = useWorkbench((state) => state.project.meters[state.selected]);
+  const write = useWorkbench((state) => state.write);
+  const settle = useWorkbench((state) => state.settle);
+  const problem = useProblem(PATH);
+  const list = valueAt(meter, PATH);
+  const count = Array.isArray(list) ? list.length : 0;
+  const rows = Array.from({ length: count + 1 }, (_, at) => at); // one more, to be filled
+  return (
+    <table className={styles.table}>
+      <caption>Calibration, replaces the coefficient of the standard</caption>
+      <thead>
+        <tr>
+          {COLUMNS.map(({ key, label }) => (
+            <th key={key} scope="col">
+              {label}
+            </th>
+          ))}
+          <td />
+        </tr>
+      </thead>
+      <tbody>
+        {rows.map((at) => (
+          <tr key={at}>
+            {COLUMNS.map(({ key, label }) => (
+              <td key={key}>
+                <CalibrationCell path={`${PATH}.${at}.${key}`} label={`${label}, row ${at + 1}`} text={textAt(meter, `${PATH}.${at}.${key}`)} write={write} settle={settle} />
+              </td>
+            ))}
+            <td>
+              {at < count && (
+                <button type="button" aria-label={`Remove row ${at + 1}`} onClick={() => write(`${PATH}.${at}`, undefined)}>
+                  ×
+                </button>
+              )}
+            </td>
+          </tr>
+        ))}
+      </tbody>
+      {problem && <caption className={styles.problem}>{problem}</caption>}
+    </table>
+  );
+}
+
+interface CellProps {
+  readonly path: string;
+  readonly label: string;
+  readonly text: string;
+  readonly write: (path: string, value: unknown) => void;
+  readonly settle: () => void;
+}
+
+function CalibrationCell({ path, label, text, write, settle }: CellProps) {
+  const problem = useProblem(path);
+  return (
+    <input
+      type="text"
+      inputMode="decimal"
+      autoComplete="off"
+      data-field={path}
+      aria-label={label}
+      aria-invalid={problem !== undefined && text !== ''}
+      title={problem}
+      value={text}
+      onChange={(event) => write(path, event.target.value)}
+      onBlur={settle}
+    />
+  );
+}

@@ -1,0 +1,20 @@
+/** The straight pipe that the table asks for: column A, and column B with its price. */
+import type { PresentedSizing } from '../../present/model.ts';
+
+interface Props {
+  readonly sizing: PresentedSizing;
+  readonly side: 'upstream' | 'downstream';
+}
+
+export function StraightNeed({ sizing, side }: Props) {
+  const rows = sizing.straight.filter((row) => row.side === side);
+  const row = side === 'upstream' ? rows.find(({ chosen }) => chosen) : (rows.find(({ chosen }) => chosen) ?? rows[0]);
+  if (row === undefined) return null;
+  return (
+    <span title={`${row.cited.clause}. Column B adds 0.5 % to the uncertainty of C.`}>
+      needs {row.full}
+      {row.reduced.includes('D') && `, or ${row.reduced} with 0.5 % more`}
+      {row.cited.mark}
+    </span>
+  );
+}
