@@ -53,7 +53,7 @@ export function createDesk(options: DeskOptions): Desk {
       desk.drafted = state.project;
       return { title: titleOf(state.project), text: textOf(state), formatVersion: state.project.version };
     },
-    report: (standing: Standing) => store.getState().setKeeping(standing),
+    report: (standing) => store.getState().setKeeping(shown(standing)),
     onKept: () => onKept(desk),
     onGone: () => store.getState().setNotice({ code: 'stored-gone', detail: {}, kind: 'problem' }),
   });
@@ -110,6 +110,9 @@ export function show(desk: Desk, sheet: Sheet, hold: Hold | undefined): void {
   if (hold !== undefined) desk.autosave.begin(sheet.id, sheet.revision);
   markCurrent(desk);
 }
+
+const shown = (standing: Standing): Keeping =>
+  standing.state === 'kept' ? { state: 'kept', at: timeOf(new Date(standing.at)) } : standing;
 
 function keepingOf(sheet: Sheet, port: Port, hold: Hold | undefined): Keeping {
   if (hold === undefined) return { state: 'elsewhere' };

@@ -4,10 +4,10 @@
  */
 import type { Durability, Port, Writing } from './port.ts';
 
-/** How the keeping stands, as the workbench shows it. */
+/** How the keeping stands; a cause is a code of words. */
 export type Standing =
   | { readonly state: 'pending' }
-  | { readonly state: 'kept'; readonly at: string }
+  | { readonly state: 'kept'; readonly at: number } // ms since 1970
   | { readonly state: 'memory'; readonly cause: string }
   | { readonly state: 'failed'; readonly cause: string }
   | { readonly state: 'elsewhere' };
@@ -161,14 +161,8 @@ async function tried(write: () => Promise<Writing>): Promise<Writing | { readonl
   }
 }
 
-function keptStanding({ transient }: Port): Standing {
-  if (transient !== undefined) return { state: 'memory', cause: transient };
-  const now = new Date();
-  return {
-    state: 'kept',
-    at: [now.getHours(), now.getMinutes()].map((part) => String(part).padStart(2, '0')).join(':'),
-  };
-}
+const keptStanding = ({ transient }: Port): Standing =>
+  transient === undefined ? { state: 'kept', at: Date.now() } : { state: 'memory', cause: transient };
 
 /** Code of why the storage failed: no-space, closed (by another tab or the browser), newer, or storage. */
 export function causeOf(fault: unknown): string {

@@ -67,7 +67,7 @@ describe('the start', () => {
     at().addMeter();
     expect(at().keeping).toEqual({ state: 'pending' });
     expect(await desk.autosave.flush()).toBe(true);
-    expect(at().keeping.state).toBe('kept');
+    expect(at().keeping).toEqual({ state: 'kept', at: expect.stringMatching(/^\d\d:\d\d$/) });
     expect(await keptText('id-1')).toBe(encode(at().project));
   });
 
