@@ -7,6 +7,7 @@ import { cited } from './cited.ts';
 import type { Context } from './context.ts';
 import type { DimensionRow } from './model.ts';
 import { spelled } from './numbers.ts';
+import { ofLimit } from './rounding.ts';
 
 type Dimension = Solved['dimensions'][number];
 
@@ -25,11 +26,11 @@ function dimensionText({ id, min, max, nominal, unit }: Dimension, length: Unit)
   const shown = (value: number): number => (unit === 'm' ? fromSI(value, length) : value);
   const ending = unit === 'm' ? `\u00a0${length.print}` : unit === 'deg' ? '°' : '';
   if (nominal !== undefined && min !== undefined && max !== undefined && even(min, nominal, max)) {
-    const play = spelled(shown(max - nominal), { significant: 2, trim: true }, true);
+    const play = spelled(shown(max - nominal), ofLimit({ significant: 2 }), true);
     const decimals = play.split('.')[1]?.length ?? 0; // as many for the value as for its tolerance
     return `${spelled(shown(nominal), { decimals }, true)} ± ${play}${ending}`;
   }
-  const print = (value: number): string => `${spelled(shown(value), { significant: 3, trim: true }, true)}${ending}`;
+  const print = (value: number): string => `${spelled(shown(value), ofLimit({ significant: 3 }), true)}${ending}`;
   const bounds = { ...(min === undefined ? {} : { min }), ...(max === undefined ? {} : { max }) };
   const text = boundsText(bounds, print) || (nominal === undefined ? '' : print(nominal));
   if (text === '') throw new Error(`expected a figure of the dimension ${id}, got none`);

@@ -48,12 +48,13 @@ interface Metal {
 
 function measured(at: Context, id: string, label: string, value: Value, metal: Metal | undefined): Row {
   const { material, measuredAt: written } = metal ?? {};
-  const temperature = at.given(written, ['temperature'], usualTemperature, 'temperature');
+  const temperature =
+    at.stated(written, ['temperature'], 'temperature')?.text ?? at.print.limit(usualTemperature, 'temperature');
   return {
     id,
     label: withMaterial(label, material === undefined ? undefined : materialLabel(material)),
     value,
-    note: material === undefined ? noGrowth : measuredAt(temperature.text),
+    note: material === undefined ? noGrowth : measuredAt(temperature),
   };
 }
 

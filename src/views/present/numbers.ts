@@ -19,8 +19,8 @@ export function show(si: number, unit: Unit | undefined, rounding: Rounding): Va
 export function spelled(value: number, { trim = false, ...rounding }: Rounding, typographic: boolean): string {
   if (!trim) return spell(value, { ...rounding, typographic });
   const kept = Number(spell(value, { ...rounding, typographic: false })); // rounded, its zeros forgotten
-  const { plainTo } = rounding;
-  return spell(kept, { typographic, plainFrom: 1e-5, ...(plainTo === undefined ? {} : { plainTo }) });
+  const { significant: _, decimals: __, ...notation } = rounding;
+  return spell(kept, { ...notation, typographic });
 }
 
 /** What the user wrote, digit for digit, with the sign and the unit as they are printed. */

@@ -9,6 +9,8 @@ export interface Rounding {
   readonly trim?: boolean;
   /** Largest figure without a power of ten; a million unless given. */
   readonly plainTo?: number;
+  /** Smallest figure without a power of ten; a thousandth unless given. */
+  readonly plainFrom?: number;
 }
 
 const rounding: Readonly<Record<Role, Rounding>> = {
@@ -49,7 +51,9 @@ export function roundingOf(role: Role, unit: string): Rounding {
 }
 
 /** A limit is set, not measured: 0.75, not 0.7500. */
-export const ofLimit = (rounding: Rounding): Rounding => ({ ...rounding, trim: true });
+export const ofLimit = (rounding: Rounding): Rounding => ({ ...rounding, trim: true, plainFrom: 1e-5 });
 
 /** Figures inside a working line: enough for a reader to repeat it and meet the result. */
-export const workingRounding: Rounding = { significant: 6 };
+export const workingRounding: Rounding = { significant: 6, trim: true };
+/** A ratio of pressures stands near 1, and the formula takes the rest of it: that needs more digits. */
+export const nearOne: Rounding = { significant: 12, trim: true };

@@ -70,16 +70,17 @@ export function displayUnits(meter: MeterText, display: Display): DisplayUnits {
     const [measure, si, us] = usual[role];
     return unit(display === 'US' ? us : si, measure);
   };
-  const duty = meter.duty ?? {};
-  const flow = own([duty.maximum, duty.normal, duty.minimum], flowMeasures);
+  const { maximum, normal, minimum } = meter.duty ?? {};
+  const flows = [maximum, normal, minimum].flatMap((text) => written(text, flowMeasures)?.unit ?? []);
+  const flow = flows.find((found) => belongs(found, display)) ?? standard(flowRole(flows[0]));
   const differential = own([meter.differential], ['pressure difference']) ?? standard('differential');
   const pressure = own([meter.upstream?.pressure], pressureMeasures);
   const roles = Object.keys(usual) as UnitRole[];
   const plain = Object.fromEntries(roles.map((role) => [role, standard(role)])) as Record<UnitRole, Unit>;
   return {
     ...plain,
-    ...(flow === undefined ? {} : { [flowRole(flow)]: flow }),
-    flow: flow ?? standard(flowRole(written(duty.maximum, flowMeasures)?.unit)),
+    [flowRole(flow)]: flow,
+    flow,
     differential,
     loss: differential,
     bore: own([meter.element?.bore, meter.pipe?.bore], ['length']) ?? plain.bore,

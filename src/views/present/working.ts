@@ -10,7 +10,7 @@ import { cited } from './cited.ts';
 import { parseFormula } from './formula.ts';
 import type { Row, Value, WorkingGroup, WorkingRow } from './model.ts';
 import { spelled } from './numbers.ts';
-import { workingRounding } from './rounding.ts';
+import { nearOne, workingRounding } from './rounding.ts';
 import { substitute } from './substitute.ts';
 import { unitText } from './unit-text.ts';
 
@@ -30,7 +30,7 @@ export function workingGroups(result: Solved): readonly WorkingGroup[] {
 
 export function workingRow({ id, symbol, formula, given, value, unit, source, remark }: Working): WorkingRow {
   const tree = formula === undefined ? undefined : parseFormula(formula);
-  const numbers = Object.fromEntries(given.map((item) => [item.symbol, figure(item.value, item.unit).number]));
+  const numbers = Object.fromEntries(given.map((item) => [item.symbol, givenFigure(item).number]));
   return {
     id,
     title: workingTitle(id),
@@ -43,17 +43,20 @@ export function workingRow({ id, symbol, formula, given, value, unit, source, re
   };
 }
 
-const givenRow = ({ symbol, value, unit, words }: Given): Row => ({
-  id: symbol,
-  label: quantityName(words),
-  symbol,
-  value: figure(value, unit),
+const givenRow = (item: Given): Row => ({
+  id: item.symbol,
+  label: quantityName(item.words),
+  symbol: item.symbol,
+  value: givenFigure(item),
 });
 
+const givenFigure = ({ value, unit, words }: Given): Value =>
+  figure(value, unit, words === 'pressure-ratio' ? nearOne : workingRounding);
+
 /** A figure of a formula in the formula's own unit, which is SI: no display changes it. */
-function figure(value: number, unit: string): Value {
-  const number = spelled(value, workingRounding, true);
-  const plain = spelled(value, workingRounding, false);
+function figure(value: number, unit: string, rounding = workingRounding): Value {
+  const number = spelled(value, rounding, true);
+  const plain = spelled(value, rounding, false);
   const print = unitText(unit);
   if (unit === '') return { number, unit: '', text: number, plain, si: value };
   return { number, unit: print, text: `${number}\u00a0${print}`, plain: `${plain} ${unit}`, si: value };

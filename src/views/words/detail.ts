@@ -22,6 +22,14 @@ export interface Sentences {
 }
 export type ProblemWords = Readonly<Record<string, (detail: Detail) => Sentences>>;
 
+/** How one kind of finding is worded. `figure` is the printed value, or 'a to b' where it stands for a range. */
+export interface FindingWords {
+  readonly role: Role;
+  readonly text: (figure: string, detail: Detail) => string;
+  /** Where the plain 'at least', 'at most', 'a to b' does not say it. */
+  readonly limit?: (bounds: string, detail: Detail) => string;
+}
+
 /** The details of `code`; one that is asked for and missing is a defect. */
 export function detailOf(
   code: string,

@@ -6,7 +6,7 @@ export const dimensionNames: Readonly<Record<string, string>> = {
   'bore-roundness': 'Bore, deviation of a diameter from the mean',
   'convergent-angle': 'Convergent angle',
   'convergent-length': 'Convergent length',
-  'convergent-roughness': 'Convergent and entrance, roughness Ra',
+  'convergent-roughness': 'Convergent and entrance, roughness',
   'divergent-angle': 'Divergent angle',
   'divergent-cut': 'Divergent, share that may be cut off',
   'divergent-length': 'Divergent length',
@@ -18,7 +18,7 @@ export const dimensionNames: Readonly<Record<string, string>> = {
   'ellipse-radial': 'Ellipse, radial half axis',
   'entrance-length': 'Entrance cylinder length',
   'face-bore': 'Inlet face, inner diameter',
-  'face-roughness': 'Upstream face, roughness Ra',
+  'face-roughness': 'Upstream face, roughness',
   'face-slope': 'Upstream face, slope',
   'flange-thickness': 'Flange thickness of the nozzle',
   'pipe-roundness': 'Pipe bore, deviation of a diameter from the mean',
@@ -48,7 +48,7 @@ export const dimensionNames: Readonly<Record<string, string>> = {
   'tapping-width-service': 'Corner tapping width, clean fluid',
   'throat-clearance': 'Throat outside to pipe wall',
   'throat-length': 'Throat length',
-  'throat-roughness': 'Throat, roughness Ra',
+  'throat-roughness': 'Throat, roughness',
   'throat-wall': 'Throat wall thickness',
 };
 

@@ -1,6 +1,5 @@
 /** Findings on fluid and flow. `{where}` stands for the flow at which it was found. */
-import type { Detail } from './detail.ts';
-import type { FindingWords } from './findings.ts';
+import type { Detail, FindingWords } from './detail.ts';
 
 const held = (detail: Detail): string =>
   detail.has('heldAt') ? `; the coefficient was held at that of ${detail.figure('heldAt', 'reynolds')}` : '';

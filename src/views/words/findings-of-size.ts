@@ -1,5 +1,5 @@
 /** Findings on pipe, element and plate. `{where}` stands for the flow at which it was found. */
-import type { FindingWords } from './findings.ts';
+import type { FindingWords } from './detail.ts';
 import { fittingLabel } from './fittings.ts';
 import { noteText } from './notes.ts';
 

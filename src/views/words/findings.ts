@@ -1,18 +1,10 @@
 /** Every finding as a line: the figure that was compared, where, and the limit it was held against. */
 import type { Finding } from '../../core/check/finding.ts';
-import { type Detail, detailOf } from './detail.ts';
+import { detailOf, type FindingWords } from './detail.ts';
 import { checksOfFlow } from './findings-of-flow.ts';
 import { checksOfSize } from './findings-of-size.ts';
-import type { Print, Role } from './print.ts';
+import type { Print } from './print.ts';
 import { dutyLabels } from './verdicts.ts';
-
-/** How one kind of finding is worded. `figure` is the printed value, or 'a to b' where it stands for a range. */
-export interface FindingWords {
-  readonly role: Role;
-  readonly text: (figure: string, detail: Detail) => string;
-  /** Where the plain 'at least', 'at most', 'a to b' does not say it. */
-  readonly limit?: (bounds: string, detail: Detail) => string;
-}
 
 export const findingWords: Readonly<Record<string, FindingWords>> = { ...checksOfSize, ...checksOfFlow };
 

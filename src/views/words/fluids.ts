@@ -14,10 +14,10 @@ export const phaseChoices: readonly Choice[] = [
   { value: 'vapour', label: 'Vapour' },
 ];
 
-/** Name of the fluid of a meter; water is named by its phase. */
+/** Name of the fluid of a meter; water is named by its phase. A kind this version does not know stands as written. */
 export function fluidLabel(kind: string, phase?: Phase): string {
   if (kind === 'water') return phase === 'vapour' ? 'Steam' : 'Water';
-  if (kind === 'stated') return phase === 'gas' ? 'Gas, properties stated' : 'Liquid, properties stated';
+  if (kind === 'stated') return 'Stated fluid';
   return kind;
 }
 

@@ -33,6 +33,7 @@ export const remarks: Readonly<Record<string, string>> = {
     'Pipe bore or bore take the largest uncertainty that the standard allows; differential or density are left out, so ' +
     'the true figure is larger.',
   'straight-perpendicular-high-reynolds': 'Longer at high Reynolds numbers',
+  'straight-from-throat-tapping': 'Counted from the plane of the throat tappings',
   'straight-perpendicular-conditioner': 'A flow conditioner is advised',
 };
 

@@ -23,6 +23,10 @@ export const inputProblems: ProblemWords = {
     cause: `'${d.text('written')}' is no choice for ${d.place}.`,
     next: `Choose ${d.list('choices')}.`,
   }),
+  'figure-implausible': (d) => ({
+    cause: `No meter has ${d.text('written')} for ${d.place}.`,
+    next: 'Check the power of ten and the unit.',
+  }),
   'calibration-order': (d) => ({
     cause: `${d.place} '${d.text('written')}' does not lie above the row before.`,
     next: 'Put the rows in order of rising Reynolds number, each once.',

@@ -31,8 +31,8 @@ export const solvingProblems: ProblemWords = {
   }),
   'differential-too-large': (d) => ({
     cause:
-      `This flow needs a differential beyond the part of the upstream pressure ${d.figure('pressure', 'pressure')} ` +
-      'for which the expansibility factor is known.',
+      `This flow needs a differential of more than ${d.limit('percent', 'percent')} of the upstream pressure of ` +
+      `${d.figure('pressure', 'pressure')}, beyond what the expansibility factor is known for.`,
     next: 'Choose a larger bore or a smaller flow.',
   }),
   'flow-unsettled': (d) => ({

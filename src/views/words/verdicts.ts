@@ -1,7 +1,6 @@
 /** Verdicts, duty points and the unknown in words. */
 import type { Finding } from '../../core/check/finding.ts';
 import type { DutyName, Unknown } from '../../core/document/project.ts';
-import type { Choice } from './elements.ts';
 
 export type Verdict = Finding['verdict'];
 
@@ -29,13 +28,6 @@ export const dutyLabels: Readonly<Record<DutyName, string>> = {
   normal: 'normal',
   minimum: 'minimum',
 };
-
-/** The question that a meter answers, in the order of the list. */
-export const unknownChoices: readonly (Choice & { readonly value: Unknown })[] = [
-  { value: 'bore', label: 'Bore' },
-  { value: 'differential', label: 'Differential pressure' },
-  { value: 'flow', label: 'Flow' },
-];
 
 /** What an unknown was found from, beside the shaded field. */
 export const foundFrom: Readonly<Record<Unknown, string>> = {
