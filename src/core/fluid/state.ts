@@ -85,7 +85,8 @@ function amount(
   required: boolean,
   atmosphere: AbsolutePressure,
 ): Amount | undefined {
-  const quantity = form.quantity(name, measures, required);
+  const absolute = !measures.includes('gauge pressure');
+  const quantity = absolute ? form.positive(name, measures, required) : form.quantity(name, measures, required);
   if (quantity === undefined) return undefined;
   const gauge = quantity.measure === 'gauge pressure';
   const { measure, si } = gauge ? { measure: 'absolute pressure' as const, si: quantity.si + atmosphere } : quantity;

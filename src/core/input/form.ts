@@ -24,6 +24,13 @@ export interface Form {
   report(code: string, field: string, detail?: Problem['detail']): undefined;
 }
 
+/**
+ * No figure of a meter, in SI units, is smaller or larger than this. Beyond it products of several figures would leave
+ * the range of a double.
+ */
+export const LEAST_FIGURE = 1e-12;
+export const MOST_FIGURE = 1e12;
+
 /** Opens a form over a document group; fields are dotted paths below it. */
 export function openForm(group: object): Form {
   const problems: Problem[] = [];
@@ -47,12 +54,16 @@ export function openForm(group: object): Form {
       const text = written(field, required);
       if (text === undefined) return undefined;
       if (typeof text !== 'string') return report('text-expected', field, { written: typeof text });
-      return take(readQuantity(text, measures, field));
+      const quantity = take(readQuantity(text, measures, field));
+      if (quantity === undefined || Math.abs(quantity.si) <= MOST_FIGURE) return quantity;
+      return report('figure-implausible', field, { written: text, least: LEAST_FIGURE, most: MOST_FIGURE });
     },
     positive(field, measures, required = false) {
       const quantity = form.quantity(field, measures, required);
-      if (quantity === undefined || quantity.si > 0) return quantity;
-      return report('not-positive', field, { written: `${quantity.number} ${quantity.unit.symbol}` });
+      if (quantity === undefined || quantity.si >= LEAST_FIGURE) return quantity;
+      const written = `${quantity.number} ${quantity.unit.symbol}`;
+      if (quantity.si <= 0) return report('not-positive', field, { written });
+      return report('figure-implausible', field, { written, least: LEAST_FIGURE, most: MOST_FIGURE });
     },
     choice(field, choices, required = false) {
       const word = written(field, required);

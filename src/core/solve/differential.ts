@@ -50,7 +50,7 @@ export function differentialFrom(
   const most = Math.min(Math.max(MOST_EXPANSION, spanned / state.pressure), STILL_RISING);
   const epsilonAt = expansibilityOf(primary, geometry.ratio, state);
   const found = expansionFrom(a3, most, typicalFall(geometry.ratio) / exponentOf(state), epsilonAt);
-  if (!found.found) return fail('differential-too-large', field, { pressure: state.pressure, share: most });
+  if (!found.found) return fail('differential-too-large', field, { pressure: state.pressure, percent: 100 * most });
   const x = found.x;
   return ok({
     ...common,
