@@ -1,4 +1,5 @@
 /** Words of the curve of flow against differential. */
+import { range } from './findings.ts';
 
 export const belowReynolds = 'below the Reynolds numbers of the standard';
 export const aboveReynolds = 'above the Reynolds numbers of the standard';
@@ -11,4 +12,5 @@ export function chartSummary(duty: readonly string[], outside: readonly string[]
 }
 
 export const dutyAt = (flow: string, differential: string): string => `${flow} at ${differential}`;
-export const outsideRange = (from: string, to: string, label: string): string => `From ${from} to ${to} it is ${label}`;
+export const outsideRange = (from: string, to: string, label: string): string =>
+  `From ${range(from, to)} it is ${label}`;

@@ -3,7 +3,7 @@
 const labels: Readonly<Record<string, string>> = {
   tag: 'Tag',
   service: 'Service',
-  find: 'Find',
+  find: 'Quantity to find',
   fluid: 'Fluid',
   'fluid.kind': 'Fluid',
   'fluid.phase': 'Phase',
@@ -63,6 +63,9 @@ const labels: Readonly<Record<string, string>> = {
   traverses: 'Surveys',
 };
 
+/** Fields inside a row of a list. */
+const inRow: Readonly<Record<string, string>> = { reynolds: 'Reynolds number', coefficient: 'coefficient' };
+
 /** A path without the meter it stands in and with its row numbers apart. */
 const own = (path: string): string => path.replace(/^meters(\.\d+\.|\[\d+\]\.)/, '');
 
@@ -74,7 +77,7 @@ export function fieldLabel(path: string): string {
   const row = /^(.+?)[.[](\d+)\]?(?:\.(.+))?$/.exec(plain);
   if (row === null) return plain === '' ? 'Meter' : plain;
   const [, list = '', place = '0', rest] = row;
-  return `${labels[list] ?? list}, row ${Number(place) + 1}${rest === undefined ? '' : `, ${rest}`}`;
+  return `${labels[list] ?? list}, row ${Number(place) + 1}${rest === undefined ? '' : `, ${inRow[rest] ?? rest}`}`;
 }
 
 /** The field as it stands inside a sentence: 'the upstream pressure', 'the tappings'. */

@@ -11,7 +11,7 @@ export const numberProblems: ProblemWords = {
     next: 'Write digits with one decimal mark, then the unit.',
   }),
   'number-grouping': (d) => ({
-    cause: `In '${d.text('written')}' the groups of ${d.place} are not of three digits, or the file has groups at all.`,
+    cause: `The digits of ${d.place} in '${d.text('written')}' are grouped in a way that can be misread.`,
     next: 'Write the number without groups and with one decimal mark.',
   }),
   'number-too-large': (d) => ({

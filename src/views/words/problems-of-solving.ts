@@ -7,9 +7,9 @@ export const solvingProblems: ProblemWords = {
       `${d.figure('pressure', 'pressure')} and ${d.figure('temperature', 'temperature')} lie outside the ` +
       'formulation of water and steam.',
     next:
-      `It holds from ${d.figure('lowestTemperature', 'temperature')} to ` +
-      `${d.figure('highestTemperature', 'temperature')}, and at this temperature up to ` +
-      `${d.figure('highestPressure', 'pressure')}: check ${d.place}.`,
+      `It holds from ${d.limit('lowestTemperature', 'temperature')} to ` +
+      `${d.limit('highestTemperature', 'temperature')}, and at this temperature up to ` +
+      `${d.limit('highestPressure', 'pressure')}: check ${d.place}.`,
   }),
   'phase-impossible': (d) => ({
     cause:
@@ -25,7 +25,7 @@ export const solvingProblems: ProblemWords = {
   }),
   'differential-exceeds-pressure': (d) => ({
     cause:
-      `The differential of ${d.figure('differential', 'differential')} is as large as the upstream pressure of ` +
+      `The differential of ${d.figure('differential', 'differential')} is not below the upstream pressure of ` +
       `${d.figure('pressure', 'pressure')}.`,
     next: 'Lower the differential or the flow, or check the upstream pressure.',
   }),
@@ -48,11 +48,11 @@ export const solvingProblems: ProblemWords = {
     next: 'Check flow, differential and fluid.',
   }),
   'bore-too-large': (d) => ({
-    cause: `Even a diameter ratio of ${d.figure('ratio', 'ratio')} makes more than this differential.`,
+    cause: `Even a diameter ratio of ${d.limit('ratio', 'ratio')} makes more than this differential.`,
     next: 'Raise the differential, lower the flow or choose a larger pipe.',
   }),
   'bore-too-small': (d) => ({
-    cause: `Even a diameter ratio of ${d.figure('ratio', 'ratio')} makes less than this differential.`,
+    cause: `Even a diameter ratio of ${d.limit('ratio', 'ratio')} makes less than this differential.`,
     next: 'Lower the differential, raise the flow or choose a smaller pipe.',
   }),
   'bore-not-below-pipe': (d) => ({
