@@ -19,7 +19,7 @@ export function Along({ selected }: { readonly selected: SelectedMeter }) {
   return (
     <div className={styles.along}>
       <MeterHead index={selected.index} />
-      <div className={styles.drawing} data-stale={stale} ref={frame}>
+      <div className={styles.drawing} data-stale={stale && sizing !== undefined} ref={frame}>
         {sizing ? width > 0 && <Drawn sizing={sizing} width={width} /> : <Blank />}
         {sizing && stale && <p className={styles.stale}>last good result</p>}
       </div>

@@ -4,7 +4,8 @@ import type { Project } from '../../core/document/project.ts';
 import type { Results } from '../../core/result/record.ts';
 import type { Commands } from '../../state/commands.ts';
 import type { WorkbenchStore } from '../../state/workbench.ts';
-import { BindingProvider } from './binding.tsx';
+import { BindingProvider, useWorkbench } from './binding.tsx';
+import { Boundary } from './Boundary.tsx';
 import { usePlace } from './place.ts';
 import { SheetPlace } from './SheetPlace.tsx';
 import { DialogHost } from './shell/DialogHost.tsx';
@@ -52,12 +53,15 @@ export function Root({ store, commands, sheets }: Props) {
 
 function Body({ sheets }: { readonly sheets: SheetsView }) {
   const place = usePlace();
+  const project = useWorkbench((state) => state.project);
   return (
     <div className={styles.body}>
-      <MeterList />
+      <Boundary of={project}>
+        <MeterList />
+      </Boundary>
       <main className={styles.main} id="content" tabIndex={-1}>
         <Suspense fallback={<p className={styles.wait}>One moment</p>}>
-          {place === 'size' ? <Size /> : <SheetPlace sheets={sheets} />}
+          <Boundary of={project}>{place === 'size' ? <Size /> : <SheetPlace sheets={sheets} />}</Boundary>
         </Suspense>
       </main>
     </div>

@@ -1,6 +1,7 @@
 /** Sizing one meter: the answer, the pipe with the form along it, and what follows from it. */
 import type { KeyboardEvent } from 'react';
 import { Answer } from './Answer.tsx';
+import { Boundary } from './Boundary.tsx';
 import { EmptyProject } from './EmptyProject.tsx';
 import { focusNext } from './focus.ts';
 import { type SelectedMeter, useSelectedMeter } from './meter.ts';
@@ -29,7 +30,7 @@ export function Size() {
     <div className={styles.size} onKeyDown={onEnter}>
       <Answer selected={selected} />
       <Along key={selected.key} selected={selected} />
-      {selected.sizing && <Found selected={selected} />}
+      <Boundary of={selected.sizing}>{selected.sizing && <Found selected={selected} />}</Boundary>
     </div>
   );
 }

@@ -1,8 +1,9 @@
 /** Binds the screen to the store and the commands that app hands in. */
-import { createContext, type ReactNode, use } from 'react';
+import { createContext, type ReactNode, use, useEffect } from 'react';
 import { useStore } from 'zustand';
 import type { Commands } from '../../state/commands.ts';
 import type { Workbench, WorkbenchStore } from '../../state/workbench.ts';
+import { rememberOrigins } from './presented.ts';
 
 interface Binding {
   readonly store: WorkbenchStore;
@@ -12,6 +13,11 @@ interface Binding {
 const BindingContext = createContext<Binding | undefined>(undefined);
 
 export function BindingProvider({ children, ...binding }: Binding & { readonly children: ReactNode }) {
+  const { store } = binding;
+  useEffect(() => {
+    rememberOrigins(store.getState());
+    return store.subscribe(rememberOrigins);
+  }, [store]);
   return <BindingContext value={binding}>{children}</BindingContext>;
 }
 

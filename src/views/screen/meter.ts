@@ -1,10 +1,10 @@
 /** The selected meter as the panels need it: its text, its result, and the last good result while it cannot be solved. */
 import { useDeferredValue } from 'react';
 import type { MeterText, Project } from '../../core/document/project.ts';
-import type { MeterResult, Solved } from '../../core/result/record.ts';
+import type { MeterResult } from '../../core/result/record.ts';
 import type { PresentedMeter, PresentedSizing } from '../present/model.ts';
 import { useWorkbench } from './binding.tsx';
-import { isSizing, presented } from './presented.ts';
+import { isSizing, presented, presentedEarlier } from './presented.ts';
 import { textAt } from './text.ts';
 
 export interface SelectedMeter {
@@ -16,7 +16,6 @@ export interface SelectedMeter {
   readonly now: PresentedMeter | PresentedSizing;
   /** What the panels show: the result as it stands, or the last good one. Absent before the first. */
   readonly sizing: PresentedSizing | undefined;
-  readonly solved: Solved | undefined;
   /** True while `sizing` belongs to an earlier input. */
   readonly stale: boolean;
 }
@@ -33,10 +32,9 @@ export function useSelectedMeter(): SelectedMeter | undefined {
   const key = keys[index];
   if (meter === undefined || result === undefined || key === undefined) return undefined;
   const now = presented(meter, project, result);
-  const solved = result.status === 'solved' ? result : lastSolved[key];
-  const then = solved === undefined ? undefined : presented(meter, project, solved);
-  const sizing = then !== undefined && isSizing(then) ? then : undefined;
-  return { index, key, meter, project, result, now, sizing, solved, stale: result.status !== 'solved' };
+  const last = lastSolved[key];
+  const sizing = isSizing(now) ? now : last && presentedEarlier(project, last);
+  return { index, key, meter, project, result, now, sizing, stale: !isSizing(now) };
 }
 
 /** A part of the result that may be drawn a moment later than the figures. */
@@ -54,3 +52,7 @@ export const useProblem = (path: string): string | undefined =>
     if (meter === undefined || result === undefined || result.status === 'solved') return undefined;
     return presented(meter, state.project, result).problems.find((problem) => problem.field === path)?.sentence;
   });
+
+/** True until the selected meter has been solved once: an empty field is then no fault yet. */
+export const useUntried = (): boolean =>
+  useWorkbench(({ keys, selected, lastSolved }) => lastSolved[keys[selected] ?? ''] === undefined);

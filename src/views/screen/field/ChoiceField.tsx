@@ -2,7 +2,7 @@
 import { fieldLabel } from '../../words/fields.ts';
 import type { Choice } from '../../words/elements.ts';
 import { useWorkbench } from '../binding.tsx';
-import { useMeterText, useProblem } from '../meter.ts';
+import { useMeterText, useProblem, useUntried } from '../meter.ts';
 import styles from './box.module.css';
 import { Frame, problemId } from './Frame.tsx';
 
@@ -19,17 +19,18 @@ export function ChoiceField({ path, label = fieldLabel(path), choices, open }: P
   const problem = useProblem(path);
   const write = useWorkbench((state) => state.write);
   const settle = useWorkbench((state) => state.settle);
+  const waiting = useUntried() && text === '';
   const id = `field-${path}`;
   const foreign = text !== '' && !choices.some((choice) => choice.value === text);
   return (
-    <Frame id={id} label={label} problem={problem} waiting={text === ''}>
-      <div className={styles.box} data-invalid={problem !== undefined && text !== ''}>
+    <Frame id={id} label={label} problem={problem} waiting={waiting}>
+      <div className={styles.box} data-invalid={problem !== undefined && !waiting}>
         <select
           id={id}
           className={styles.select}
           data-field={path}
           value={text}
-          aria-invalid={problem !== undefined && text !== ''}
+          aria-invalid={problem !== undefined && !waiting}
           aria-describedby={problem === undefined ? undefined : problemId(id)}
           onChange={(event) => {
             write(path, event.target.value);

@@ -7,7 +7,7 @@ export interface FrameProps {
   readonly label: string;
   readonly echo?: string | undefined;
   readonly problem?: string | undefined;
-  /** Nothing is wrong yet: the field only waits to be filled. */
+  /** Nothing is wrong yet, the field only waits to be filled: the sentence is kept for those who hear the page. */
   readonly waiting?: boolean;
   readonly note?: ReactNode;
   readonly aside?: ReactNode;
@@ -29,7 +29,7 @@ export function Frame({ id, label, echo, problem, waiting = false, note, aside, 
       {children}
       {(echo || note) && (
         <div className={styles.note} id={noteId(id)}>
-          {echo && <span>read as {echo}</span>}
+          {echo && <span>{echo}</span>}
           {note}
         </div>
       )}

@@ -1,6 +1,6 @@
 /** A number with its unit. The text stays as typed; the unit at the right converts it exactly. */
 import { fieldLabel } from '../../words/fields.ts';
-import { useMeterText, useProblem } from '../meter.ts';
+import { useMeterText, useProblem, useUntried } from '../meter.ts';
 import { useWorkbench } from '../binding.tsx';
 import styles from './box.module.css';
 import { Frame, noteId, problemId } from './Frame.tsx';
@@ -35,7 +35,7 @@ export function QuantityBox({ path, label = fieldLabel(path), text, problem, wri
   const settle = useWorkbench((state) => state.settle);
   const { shown, unit, echo, kind, type, chooseUnit, ...field } = useQuantity(path, text, display, write);
   const id = `field-${path}`;
-  const waiting = text === '';
+  const waiting = useUntried() && text === '';
   const described = [echo || note ? noteId(id) : '', problem ? problemId(id) : ''].filter(Boolean).join(' ');
   return (
     <Frame id={id} label={label} echo={echo} problem={problem} waiting={waiting} note={note} aside={aside}>
@@ -49,6 +49,7 @@ export function QuantityBox({ path, label = fieldLabel(path), text, problem, wri
           enterKeyHint="next"
           autoComplete="off"
           spellCheck={false}
+          placeholder={waiting && problem !== undefined ? 'needed' : undefined}
           value={shown}
           aria-invalid={problem !== undefined && !waiting}
           aria-describedby={described === '' ? undefined : described}
@@ -63,7 +64,7 @@ export function QuantityBox({ path, label = fieldLabel(path), text, problem, wri
         />
         <select
           className={styles.unit}
-          aria-label={`${label}, unit`}
+          aria-label={`${fieldLabel(path)}, unit`}
           title={unit.words}
           value={unit.symbol}
           onChange={(event) => chooseUnit(event.target.value)}

@@ -1,4 +1,5 @@
 /** Words or a plain number, kept as typed. */
+import { useUntried } from '../meter.ts';
 import { Frame, problemId } from './Frame.tsx';
 import styles from './box.module.css';
 
@@ -14,9 +15,10 @@ interface Props {
 
 export function TextField({ path, label, text, problem, decimal = false, write, settle }: Props) {
   const id = `field-${path}`;
-  const invalid = problem !== undefined && text !== '';
+  const waiting = useUntried() && text === '';
+  const invalid = problem !== undefined && !waiting;
   return (
-    <Frame id={id} label={label} problem={problem} waiting={text === ''}>
+    <Frame id={id} label={label} problem={problem} waiting={waiting}>
       <div className={styles.box} data-invalid={invalid}>
         <input
           id={id}

@@ -21,7 +21,7 @@ export function UnknownToggle({ unknown, label, pressed }: Props) {
       data-unknown={unknown}
       onClick={() => turnTo(unknown, store.getState())}
     >
-      {pressed ? 'found' : 'find'}
+      find
     </button>
   );
 }

@@ -15,5 +15,5 @@ function words(read: Quantity): string {
 /** '' where the text is spelled as it was typed, or cannot be read. */
 export function echoOf(typed: string, file: string, measures: readonly Measure[]): string {
   const read = readQuantity(file, measures, '');
-  return !read.ok || typed.trim() === read.value.number ? '' : words(read.value);
+  return !read.ok || typed.trim() === read.value.number ? '' : `read as ${words(read.value)}`;
 }

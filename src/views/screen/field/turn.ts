@@ -3,7 +3,8 @@
  * question has all it needs.
  */
 import type { Display, Unknown } from '../../../core/document/project.ts';
-import { convert, type Unit, unitOf } from '../../../core/quantity/units.ts';
+import { spell } from '../../../core/quantity/digits.ts';
+import { fromSI, type Unit, unitOf } from '../../../core/quantity/units.ts';
 import type { Solved } from '../../../core/result/record.ts';
 import type { Workbench } from '../../../state/workbench.ts';
 import { show } from '../../present/numbers.ts';
@@ -38,7 +39,10 @@ function figure(unknown: Unknown, solved: Solved, measure: Unit['measure'] | und
   return { si: point.massFlow_kg_s, unit: 'kg/s' };
 }
 
-/** Text of the found figure for its own field, twelve digits at most; undefined where the result has none. */
+/** Enough for the new question to answer with the old one, and few enough to read. */
+const DIGITS = { significant: 8, typographic: false } as const;
+
+/** Text of the found figure for its own field; undefined where the result has none. */
 export function foundText(unknown: Unknown, solved: Solved, written: string, display: Display): string | undefined {
   const { measures, unit: first } = quantityKind(FIELD_OF[unknown]);
   const usual = unitOf(first[display], measures);
@@ -47,7 +51,8 @@ export function foundText(unknown: Unknown, solved: Solved, written: string, dis
   const from = found && unitOf(found.unit, measures);
   if (found === undefined || from === undefined) return undefined;
   const target = to?.measure === from.measure ? to : usual?.measure === from.measure ? usual : from;
-  return `${convert(String(found.si), from, target)} ${target.symbol}`;
+  const number = Number(spell(fromSI(found.si, target), DIGITS)); // and no zeros behind it
+  return `${number} ${target.symbol}`;
 }
 
 /** Makes `unknown` the question of the selected meter, as one step of undo for each field it writes. */

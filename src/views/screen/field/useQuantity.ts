@@ -15,6 +15,8 @@ import { split } from './split.ts';
 interface Draft {
   readonly typed: string;
   readonly written: string;
+  /** The unit was changed and the number kept. */
+  readonly relabelled?: boolean;
 }
 
 export interface QuantityBinding {
@@ -30,6 +32,8 @@ export interface QuantityBinding {
   /** As settle, but only where a unit alone was typed. */
   leave(): void;
 }
+
+const RELABELLED = 'number kept, only the unit changed: no factor leads from one to the other';
 
 const hasDigit = (text: string): boolean => /\d/.test(text);
 
@@ -63,17 +67,18 @@ export function useQuantity(path: string, text: string, display: Display, write:
   const chooseUnit = (symbol: string): void => {
     const next = unitOf(symbol, kind.measures);
     setChosen(next);
-    setDraft(undefined);
-    if (next === undefined || parts.unit === undefined) return;
+    if (next === undefined || parts.unit === undefined) return setDraft(undefined);
     const converted = readTyped(symbol, kind.measures, path, written);
-    // What no factor converts (gauge to absolute, mass to volume) keeps its number under the new unit.
-    write(converted.ok ? converted.value.file : `${parts.number} ${symbol}`);
+    // What no factor converts (gauge to absolute, mass to volume) keeps its number under the new unit, and says so.
+    const file = converted.ok ? converted.value.file : `${parts.number} ${symbol}`;
+    setDraft(converted.ok ? undefined : { typed: parts.number, written: file, relabelled: true });
+    write(file);
   };
 
   return {
     shown: live?.typed ?? parts.number,
     unit,
-    echo: live === undefined ? '' : echoOf(live.typed, text, kind.measures),
+    echo: live === undefined ? '' : live.relabelled ? RELABELLED : echoOf(live.typed, text, kind.measures),
     kind,
     type: enter,
     chooseUnit,

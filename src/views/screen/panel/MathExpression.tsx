@@ -1,5 +1,5 @@
 /** A formula as MathML, drawn by the browser and read aloud by it. */
-import { createElement, Fragment, type ReactNode } from 'react';
+import { createElement, type ReactNode } from 'react';
 import type { Expression } from '../../present/formula.ts';
 import styles from './MathExpression.module.css';
 
@@ -53,12 +53,27 @@ function of(expression: Expression): ReactNode {
 /** A fraction and an exponent hold their content together, so its outer parentheses are not drawn. */
 const bare = (expression: Expression): ReactNode => row(of(expression.type === 'group' ? expression.of : expression));
 
+/** The terms of a sum from left to right, so that a long line may break between them. */
+function terms(expression: Expression): readonly ReactNode[] {
+  if (expression.type !== 'sum') return [of(expression)];
+  const sign = createElement('mo', { form: 'infix' }, expression.sign === '+' ? '+' : '\u2212');
+  return [...terms(expression.left), row(sign, of(expression.right))];
+}
+
+const math = (key: string, content: ReactNode): ReactNode => createElement('math', { key, displaystyle: 'true' }, content);
+
 interface Props {
   readonly symbol: Expression;
   readonly equals?: Expression | undefined;
 }
 
 export function MathExpression({ symbol, equals }: Props) {
-  const right = equals === undefined ? undefined : createElement(Fragment, null, operator('='), of(equals));
-  return createElement('math', { display: 'block', className: styles.math }, row(of(symbol), right));
+  const list = equals === undefined ? [] : terms(equals);
+  const start = list.length === 0 ? of(symbol) : row(of(symbol), operator('='));
+  return (
+    <div className={styles.math}>
+      {math('symbol', start)}
+      {list.map((term, at) => math(String(at), term))}
+    </div>
+  );
 }

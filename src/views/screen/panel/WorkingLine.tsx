@@ -41,7 +41,7 @@ function Opened({ row }: { readonly row: WorkingRow }) {
           {row.given.map(({ id, symbol, label, value }) => (
             <div key={id}>
               <dt>
-                {symbol && <i>{symbol.replace('_', '\u2009')}</i>} {label}
+                {symbol && <Symbol name={symbol} />} {label}
               </dt>
               <dd>{value.text}</dd>
             </div>
@@ -54,5 +54,16 @@ function Opened({ row }: { readonly row: WorkingRow }) {
         {row.cited.mark}
       </p>
     </div>
+  );
+}
+
+/** A symbol of the formula notation: what follows the underscore stands below the line. */
+function Symbol({ name }: { readonly name: string }) {
+  const [base, below] = name.split('_');
+  return (
+    <i>
+      {base}
+      {below && <sub>{below}</sub>}
+    </i>
   );
 }

@@ -13,6 +13,7 @@ export function Dialog({ title, close, children }: Props) {
   useEffect(() => {
     const dialog = ref.current;
     dialog?.showModal();
+    dialog?.querySelector<HTMLElement>('[data-first]')?.focus(); // else the browser takes the button Close
     return () => dialog?.close();
   }, []);
   return (

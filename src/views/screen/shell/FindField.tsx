@@ -25,8 +25,7 @@ export function FindField() {
       <input
         className={styles.query}
         type="search"
-        // biome-ignore lint/a11y/noAutofocus: the dialog was opened to type here
-        autoFocus
+        data-first
         aria-label="Name of the field"
         value={query}
         onChange={(event) => setQuery(event.target.value)}

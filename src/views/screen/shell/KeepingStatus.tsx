@@ -8,6 +8,8 @@ function words(keeping: Keeping): string {
   switch (keeping.state) {
     case 'reading':
       return 'Reading what is kept here';
+    case 'new':
+      return 'Not kept yet: nothing is typed';
     case 'pending':
       return 'Keeping';
     case 'kept':

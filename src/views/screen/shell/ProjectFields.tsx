@@ -1,5 +1,6 @@
 /** What holds for the whole project: the title block, the site and the base state. */
 import { fieldLabel } from '../../words/fields.ts';
+import { problemSentence } from '../../words/problems.ts';
 import { useWorkbench } from '../binding.tsx';
 import { QuantityBox } from '../field/QuantityField.tsx';
 import { TextField } from '../field/TextField.tsx';
@@ -19,11 +20,14 @@ const USUAL: Readonly<Record<(typeof QUANTITIES)[number], string>> = {
 
 export function ProjectFields() {
   const project = useWorkbench((state) => state.project);
-  const refused = useWorkbench((state) => state.results.results.flatMap((result) => (result.status === 'refused' ? result.problems : [])));
+  const results = useWorkbench((state) => state.results.results);
   const write = useWorkbench((state) => state.writeProject);
   const settle = useWorkbench((state) => state.settle);
-  const problemAt = (path: string): string | undefined =>
-    refused.some(({ field }) => field === path) ? 'This cannot be read. Write a number and its unit.' : undefined;
+  const refused = results.flatMap((result) => (result.status === 'refused' ? result.problems : []));
+  const problemAt = (path: string): string | undefined => {
+    const problem = refused.find(({ field }) => field === path);
+    return problem && problemSentence(problem);
+  };
   return (
     <div className={styles.fields}>
       {TITLE_BLOCK.map((path) => (

@@ -21,10 +21,10 @@ export function Downstream() {
       <QuantityField path="installation.before" label="Straight before" note={sizing && <StraightNeed sizing={sizing} side="upstream" />} />
       <QuantityField path="installation.after" label="Straight after" note={sizing && <StraightNeed sizing={sizing} side="downstream" />} />
       <Fold title="Uncertainty of the inputs">
-        <QuantityField path="uncertainty.bore" label="Bore" />
-        <QuantityField path="uncertainty.pipe" label="Pipe bore" />
-        <QuantityField path="uncertainty.differential" label="Differential" />
-        <QuantityField path="uncertainty.density" label="Density" />
+        <QuantityField path="uncertainty.bore" label="Bore, ±" />
+        <QuantityField path="uncertainty.pipe" label="Pipe bore, ±" />
+        <QuantityField path="uncertainty.differential" label="Differential, ±" />
+        <QuantityField path="uncertainty.density" label="Density, ±" />
       </Fold>
     </Station>
   );

@@ -31,7 +31,7 @@ export function Element() {
           <QuantityField path="element.edgeThickness" label="Edge, e" />
         </>
       )}
-      <Fold title="Calibration, bore temperature">
+      <Fold title="Calibration and more">
         <QuantityField path="element.measuredAt" label={`${capital(opening)} measured at`} />
         <Calibration />
       </Fold>

@@ -20,7 +20,7 @@ export function Upstream() {
       <QuantityField path="upstream.pressure" label="Pressure" />
       <QuantityField path="upstream.temperature" label="Temperature" />
       <ChoiceField path="pipe.material" label="Material" choices={materialChoices} open="not stated" />
-      <Fold title="Roughness, phase, bore temperature">
+      <Fold title="Roughness and more">
         <QuantityField path="pipe.roughness" label="Roughness Ra" />
         {kind === 'water' && <ChoiceField path="fluid.phase" choices={phaseChoices} open="by its state" />}
         <QuantityField path="pipe.measuredAt" label="Bore measured at" />
