@@ -3,7 +3,7 @@ import { Area, CartesianGrid, ComposedChart, Line, ReferenceArea, ReferenceDot, 
 import type { Chart } from '../present/model.ts';
 import styles from './chart.module.css';
 import { DutyLabel, OutsideLabel } from './Labels.tsx';
-import { extremes, plotRows, ticksTo } from './series.ts';
+import { axisText, extremes, plotRows, ticksTo } from './series.ts';
 
 interface PlotProps {
   readonly chart: Chart;
@@ -16,14 +16,22 @@ interface PlotProps {
 }
 
 const margin = { top: 22, right: 26, bottom: 18, left: 6 };
-const axis = { type: 'number', tickLine: false, stroke: 'var(--chart-ink)', tickMargin: 6 } as const;
+const axis = {
+  type: 'number',
+  tickLine: false,
+  stroke: 'var(--chart-ink)',
+  tickMargin: 6,
+  tickFormatter: axisText,
+} as const;
 const still = { dot: false, activeDot: false, isAnimationActive: false } as const;
+const glyph = 7.5; // px, a digit of an axis
 
 export function Plot({ chart, width, height, narrow, hatch }: PlotProps) {
   const most = extremes(chart);
   const x = ticksTo(most.differential, narrow ? 4 : 6).filter((tick) => tick <= most.differential);
   const y = ticksTo(most.flow, 4);
   const [right, top] = [most.differential > 0 ? most.differential : 1, y.at(-1) ?? 1];
+  const axisWidth = 20 + glyph * Math.max(3, ...y.map((tick) => axisText(tick).length));
   const across = {
     value: `Δp / ${chart.differentialUnit}`,
     position: 'insideBottomRight',
@@ -54,7 +62,7 @@ export function Plot({ chart, width, height, narrow, hatch }: PlotProps) {
         plotRight={narrow ? null : width - margin.right}
       />
       <XAxis {...axis} dataKey="differential" domain={[0, right]} ticks={[...x]} label={across} />
-      <YAxis {...axis} width={48} domain={[0, top]} ticks={[...y]} label={up} />
+      <YAxis {...axis} width={axisWidth} domain={[0, top]} ticks={[...y]} label={up} />
       <Curve />
       <Duty points={chart.duty} />
     </ComposedChart>

@@ -42,5 +42,11 @@ export function extremes(chart: Chart): { readonly differential: number; readonl
   return { differential: Math.max(0, ...differentials), flow: Math.max(0, ...flows) };
 }
 
+/** A figure of an axis; five digits and more in groups of three, with a narrow no-break space. */
+export const axisText = (value: number): string => {
+  const text = String(value);
+  return value < 10000 ? text : text.replace(/\B(?=(\d{3})+$)/g, '\u202f');
+};
+
 /** A value with as many digits as a table of readings needs. */
 export const plain = (value: number): string => String(Number(value.toPrecision(4)));

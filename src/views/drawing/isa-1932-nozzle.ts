@@ -46,6 +46,7 @@ function measures(shape: Shape, rows: readonly DimensionRow[], reach: Reach, pri
   const along = (from: number, to: number, row: number, text: string | undefined): readonly Measure[] =>
     text === undefined ? [] : [{ kind: 'length', from: at(from, below), to: at(to, below), row, text }];
   const behind = figureOf(rows, 'tapping-downstream');
+  const lower = shape.ratio < 0.45; // room for the notes beside the face, below it otherwise
   const place = downstreamPlace(shape);
   const top = radii(shape.pipe).flange;
   return [
@@ -56,8 +57,17 @@ function measures(shape: Shape, rows: readonly DimensionRow[], reach: Reach, pri
     ...along(0, throatTo, -2, whole),
     ...(first === undefined
       ? []
-      : [{ kind: 'note', at: at(0, contour.start.y * 0.98), shift: at(-9, -2), text: `R ${first}` } as const]),
-    ...(second === undefined ? [] : [{ kind: 'note', at: edge, shift: at(-12, -6), text: `R ${second}` } as const]),
+      : [
+          {
+            kind: 'note',
+            at: at(0, contour.start.y * 0.98),
+            shift: at(-9, lower ? 3 : -4.2),
+            text: `R ${first}`,
+          } as const,
+        ]),
+    ...(second === undefined
+      ? []
+      : [{ kind: 'note', at: edge, shift: at(-12, lower ? -1.5 : -8), text: `R ${second}` } as const]),
     { kind: 'diameter', x: reach.from * 0.75, radius: bore, edge: reach.from * 0.75, text: `Ø ${printed.pipe}` },
     { kind: 'diameter', x: 1.15 * shape.pipe, radius: shape.bore / 2, edge: throatTo, text: `Ø ${printed.bore}` },
   ];

@@ -132,7 +132,7 @@ function section(shape: Shape, rows: readonly DimensionRow[], reach: Reach): Sec
       { x: upstreamHole, inner: D / 2, outer: wall, width: holeWidth(D) },
       { x: tapping, inner: d / 2, outer: radiusAt(shell, tapping), width: Math.min(0.1 * d, 0.01) }, // 5.4.2
     ],
-    edge: at(0.5 * (throatFrom + throatTo), d / 2),
+    edge: at(throatFrom + 0.85 * d, d / 2),
     outside: flange,
   };
 }
@@ -156,12 +156,12 @@ function measures(shape: Shape, rows: readonly DimensionRow[], _: Reach, printed
   const radiusNote = (x: number, y: number, text: string | undefined): readonly Measure[] =>
     text === undefined || cornersOf(shape)[0] === 0
       ? []
-      : [{ kind: 'note', at: at(x, y), shift: at(3, -8), text: `R ${text}` }];
+      : [{ kind: 'note', at: at(x, y), shift: at(3.5, 6.5), text: `R ${text}` }];
   return [
     ...length(-shape.tappingUpstream, 0, wall, 1, figureOf(rows, 'tapping-upstream')),
     ...length(0, throatFrom, -R, -1, figureOf(rows, 'convergent-length')),
     ...length(throatFrom, tapping, r, 1, figureOf(rows, 'tapping-throat')),
-    ...length(throatFrom, throatTo, -r, -1, figureOf(rows, 'throat-length')),
+    ...length(throatFrom, throatTo, -r, -2, figureOf(rows, 'throat-length')),
     ...length(throatTo, exit, -r, -1, figureOf(rows, 'divergent-length')),
     ...angle(cone(throatFrom, r, convergent, -1), 0.35 * throatFrom, convergent, figureOf(rows, 'convergent-angle')),
     ...angle(
@@ -170,7 +170,7 @@ function measures(shape: Shape, rows: readonly DimensionRow[], _: Reach, printed
       divergent,
       figureOf(rows, 'divergent-angle'),
     ),
-    ...radiusNote(0, -R, figureOf(rows, 'radius-entrance')),
+    ...radiusNote(0, R, figureOf(rows, 'radius-entrance')),
     { kind: 'diameter', x: -0.86 * shape.pipe, radius: R, edge: -0.86 * shape.pipe, text: `Ø ${printed.pipe}` },
     { kind: 'diameter', x: 0.5 * (tapping + throatTo), radius: r, edge: tapping, text: `Ø ${printed.bore}` },
   ];

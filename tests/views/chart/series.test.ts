@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { extremes, plotRows, ticksTo } from '../../../src/views/chart/series.ts';
+import { axisText, extremes, plotRows, ticksTo } from '../../../src/views/chart/series.ts';
 import { chart } from './chart.ts';
 
 describe('rows of the plot', () => {
@@ -33,6 +33,17 @@ describe('axes', () => {
     expect(ticksTo(250, 6)).toEqual([0, 50, 100, 150, 200, 250]);
     expect(ticksTo(0.3, 4)).toEqual([0, 0.1, 0.2, 0.3]);
     expect(ticksTo(0, 4)).toEqual([0, 1]);
+  });
+
+  it('group five digits and more in threes', () => {
+    expect([0, 2.5, 9500, 15000, 150000, 1200000].map(axisText)).toEqual([
+      '0',
+      '2.5',
+      '9500',
+      '15\u202f000',
+      '150\u202f000',
+      '1\u202f200\u202f000',
+    ]);
   });
 
   it('hold every value, with few ticks, for any range', () => {
