@@ -43,5 +43,3 @@ export function FlowChart({ chart, labels, width, height, print = false }: FlowC
     </figure>
   );
 }
-
-export default FlowChart;
