@@ -31,9 +31,15 @@ export const largest = (flows: readonly Flow[], figure: (flow: Flow) => number):
   return rest.reduce((most, flow) => (figure(flow) > figure(most) ? flow : most), first);
 };
 
+/** Rounding of a quotient such as d/D; a figure written on its limit is inside. */
+const ROUNDING = 1e-12;
+
 /** Inside or outside of bounds; the bounds themselves are inside. */
-export const within = (value: number, { min, max }: { readonly min?: number; readonly max?: number }): Verdict =>
-  (min !== undefined && value < min) || (max !== undefined && value > max) ? 'outside' : 'inside';
+export const within = (value: number, { min, max }: { readonly min?: number; readonly max?: number }): Verdict => {
+  const low = min !== undefined && value < min - ROUNDING * Math.abs(min);
+  const high = max !== undefined && value > max + ROUNDING * Math.abs(max);
+  return low || high ? 'outside' : 'inside';
+};
 
 /** The bounds of a limit, without what else it carries. */
 export const boundsOf = ({ min, max }: Limit): { readonly min?: number; readonly max?: number } => ({

@@ -31,58 +31,74 @@ export interface Form {
 export const LEAST_FIGURE = 1e-12;
 export const MOST_FIGURE = 1e12;
 
+/** What every reader of a form stands on. */
+interface Desk {
+  readonly report: Form['report'];
+  /** What stands in a field; undefined when it is empty, which is a problem where it is required. */
+  written(field: string, required: boolean): unknown;
+  /** The value of an outcome; its problems are kept. */
+  take<Value>(outcome: Outcome<Value>): Value | undefined;
+}
+
 /** Opens a form over a document group; fields are dotted paths below it. */
 export function openForm(group: object): Form {
   const problems: Problem[] = [];
   const report: Form['report'] = (code, field, detail = {}) => void problems.push({ code, field, detail });
-  const written = (field: string, required: boolean): unknown => {
-    const value = at(group, field);
-    const empty = value === undefined || (typeof value === 'string' && value.trim() === '');
-    if (empty && required) report('field-missing', field);
-    return empty ? undefined : value;
-  };
-  const take = <Value>(outcome: Outcome<Value>): Value | undefined => {
-    if (outcome.ok) return outcome.value;
-    problems.push(...outcome.problems);
-    return undefined;
-  };
-  const form: Form = {
-    group,
-    problems,
+  const desk: Desk = {
     report,
-    quantity(field, measures, required = false) {
-      const text = written(field, required);
-      if (text === undefined) return undefined;
-      if (typeof text !== 'string') return report('text-expected', field, { written: typeof text });
-      const quantity = take(readQuantity(text, measures, field));
-      if (quantity === undefined || Math.abs(quantity.si) <= MOST_FIGURE) return quantity;
-      return report('figure-implausible', field, { written: text, least: LEAST_FIGURE, most: MOST_FIGURE });
+    written(field, required) {
+      const value = at(group, field);
+      const empty = value === undefined || (typeof value === 'string' && value.trim() === '');
+      if (empty && required) report('field-missing', field);
+      return empty ? undefined : value;
     },
-    positive(field, measures, required = false) {
-      const quantity = form.quantity(field, measures, required);
-      if (quantity === undefined || quantity.si >= LEAST_FIGURE) return quantity;
-      const written = `${quantity.number} ${quantity.unit.symbol}`;
-      if (quantity.si <= 0) return report('not-positive', field, { written });
-      return report('figure-implausible', field, { written, least: LEAST_FIGURE, most: MOST_FIGURE });
+    take(outcome) {
+      if (outcome.ok) return outcome.value;
+      problems.push(...outcome.problems);
+      return undefined;
     },
+  };
+  return { group, problems, report, ...quantityReaders(desk), ...wordReaders(desk) };
+}
+
+function quantityReaders({ report, written, take }: Desk): Pick<Form, 'quantity' | 'positive'> {
+  const implausible = (field: string, text: string) =>
+    report('figure-implausible', field, { written: text, least: LEAST_FIGURE, most: MOST_FIGURE });
+  const quantity: Form['quantity'] = (field, measures, required = false) => {
+    const text = written(field, required);
+    if (text === undefined) return undefined;
+    if (typeof text !== 'string') return report('text-expected', field, { written: typeof text });
+    const read = take(readQuantity(text, measures, field));
+    return read === undefined || Math.abs(read.si) <= MOST_FIGURE ? read : implausible(field, text);
+  };
+  const positive: Form['positive'] = (field, measures, required = false) => {
+    const read = quantity(field, measures, required);
+    if (read === undefined || read.si >= LEAST_FIGURE) return read;
+    const text = `${read.number} ${read.unit.symbol}`;
+    return read.si <= 0 ? report('not-positive', field, { written: text }) : implausible(field, text);
+  };
+  return { quantity, positive };
+}
+
+function wordReaders({ report, written, take }: Desk): Pick<Form, 'choice' | 'word' | 'number'> {
+  const word = (field: string, required = false): string | undefined => {
+    const text = written(field, required);
+    if (text === undefined || typeof text === 'string') return text;
+    return report('text-expected', field, { written: typeof text });
+  };
+  return {
+    word,
     choice(field, choices, required = false) {
-      const word = written(field, required);
-      if (word === undefined) return undefined;
-      const choice = choices.find((candidate) => candidate === word);
-      return choice ?? report('choice-unknown', field, { written: String(word), choices: choices.join(', ') });
-    },
-    word(field) {
-      const word = written(field, false);
-      return word === undefined || typeof word === 'string'
-        ? word
-        : report('text-expected', field, { written: typeof word });
+      const text = word(field, required);
+      if (text === undefined) return undefined;
+      const choice = choices.find((candidate) => candidate === text);
+      return choice ?? report('choice-unknown', field, { written: text, choices: choices.join(', ') });
     },
     number(field, required = false) {
       const value = written(field, required);
       return value === undefined ? undefined : take(readNumber(value, field));
     },
   };
-  return form;
 }
 
 /** The value at a dotted path; only own keys are followed. */

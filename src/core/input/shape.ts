@@ -4,7 +4,7 @@
  */
 import * as v from 'valibot';
 import type { MeterText } from '../document/project.ts';
-import type { Outcome, Problem } from '../quantity/outcome.ts';
+import { fail, type Outcome, type Problem } from '../quantity/outcome.ts';
 
 const text = v.optional(v.string());
 const number = v.optional(v.union([v.string(), v.number()]));
@@ -35,6 +35,7 @@ const Meter = v.looseObject({
 
 /** The meter as written, when every key has its type. Problems: text-expected, number-expected, group-expected, list-expected. */
 export function meterShape(meter: unknown): Outcome<MeterText> {
+  if (Array.isArray(meter)) return fail('group-expected', '', { written: 'a list' });
   const parsed = v.safeParse(Meter, meter);
   if (parsed.success) return { ok: true, value: meter as MeterText };
   const [first, ...rest] = parsed.issues.map(problemOf);

@@ -27,6 +27,11 @@ export type Root =
       readonly evaluations: number;
     };
 
+interface Point {
+  readonly x: number;
+  readonly y: number;
+}
+
 const MOST_EVALUATIONS = 200; // bisection alone needs about 60
 /**
  * The error left after a step is the product of the errors of the points it was drawn through, each about the relative
@@ -36,75 +41,74 @@ const MOST_EVALUATIONS = 200; // bisection alone needs about 60
 const SETTLED = 1e-13;
 /** A step this small, relative to x, is rounding. */
 const NOISE = 4 * Number.EPSILON;
-
-/** The newest three points, newest first; `known` says how many there are. One record, so that a search makes no litter. */
-interface Trail {
-  known: number;
-  x2: number;
-  y2: number;
-  x1: number;
-  y1: number;
-  x0: number;
-  y0: number;
-}
+/** Slopes of neighbouring steps that differ by more than this factor do not belong to one straight piece. */
+const STRAIGHT = 2;
 
 /** Finds the root, to the last few bits of a double. Throws a defect when f answers with no number. */
-export function root({ f, lower, upper, start, slope }: Search): Root {
-  let [a, b] = [lower, upper]; // f(a) < 0 < f(b), once they have been evaluated
+export function root(search: Search): Root {
+  const { lower, upper, slope } = search;
+  let below: number | undefined; // the largest x at which f has been found negative
+  let above: number | undefined; // the smallest x at which it has not
   let evaluations = 0;
-  const trail: Trail = { known: 0, x2: 0, y2: 0, x1: 0, y1: 0, x0: 0, y0: 0 };
-  let [size1, size0] = [1, 1]; // relative sizes of the steps before the next one; 1 where there was none
-  let x = start;
-  while (evaluations < MOST_EVALUATIONS) {
-    const y = valueAt(f, x);
+  const evaluate = (x: number): Point => {
+    const y = search.f(x);
     evaluations += 1;
-    if (y === 0) return { found: true, x, evaluations };
-    if (y < 0) a = x;
-    else b = x;
-    follow(trail, x, y);
-    let next = x + step(trail, slope);
-    if (Math.abs(next - x) <= NOISE * Math.abs(x)) return { found: true, x: next, evaluations };
-    if (!(next > a && next < b)) {
-      const end = y < 0 ? b : a;
-      if (y < 0 ? b === upper : a === lower) {
-        const edge = valueAt(f, end);
-        evaluations += 1;
-        if (edge === 0) return { found: true, x: end, evaluations };
-        if (edge < 0 === y < 0) return { found: false, side: y < 0 ? 'above' : 'below', lower, upper, evaluations };
-      }
-      next = a + (b - a) / 2;
-      trail.known = 1; // the curve bent away: interpolate afresh from here
-      [size1, size0] = [1, 1];
+    if (!Number.isFinite(y)) throw new Error(`root: expected a number at ${x}, got ${y}`);
+    if (y < 0) below = x;
+    else above = x;
+    return { x, y };
+  };
+  const found = (x: number): Root => ({ found: true, x, evaluations });
+  let x = search.start;
+  let past: Point[] = []; // newest first
+  let sizes: number[] = []; // relative sizes of the steps from them
+  while (evaluations < MOST_EVALUATIONS) {
+    const point = evaluate(x);
+    if (point.y === 0) return found(x);
+    past = [point, ...past].slice(0, 3);
+    const next = x + step(past, slope);
+    sizes = [Math.abs(next - x) / Math.abs(next || 1), ...sizes].slice(0, 3);
+    const straight = isStraight(past, slope);
+    if (straight && isSettled(sizes)) return found(next);
+    if (straight && next > (below ?? lower) && next < (above ?? upper)) {
+      x = next;
+      continue;
     }
-    const size = Math.abs(next - x) / Math.abs(next || 1);
-    if (size1 !== 1 && size * size1 * size0 <= SETTLED) return { found: true, x: next, evaluations };
-    [size0, size1] = [size1, size];
-    x = next;
+    const side = point.y < 0 ? 'above' : 'below'; // where the root lies from here
+    const end = side === 'above' ? upper : lower;
+    if ((side === 'above' ? above : below) === undefined && (x === end || evaluate(end).y < 0 === point.y < 0))
+      return { found: false, side, lower, upper, evaluations };
+    const [a, b] = [below ?? lower, above ?? upper];
+    if (b - a <= NOISE * Math.abs(b)) return found(b);
+    x = a + (b - a) / 2;
+    past = [];
+    sizes = [];
   }
-  return { found: false, side: 'unsettled', lower: a, upper: b, evaluations };
+  return { found: false, side: 'unsettled', lower: below ?? lower, upper: above ?? upper, evaluations };
 }
 
-function valueAt(f: (x: number) => number, x: number): number {
-  const y = f(x);
-  if (Number.isFinite(y)) return y;
-  throw new Error(`root: expected a number at ${x}, got ${y}`);
-}
-
-function follow(trail: Trail, x: number, y: number): void {
-  trail.x0 = trail.x1;
-  trail.y0 = trail.y1;
-  trail.x1 = trail.x2;
-  trail.y1 = trail.y2;
-  trail.x2 = x;
-  trail.y2 = y;
-  trail.known = Math.min(trail.known + 1, 3);
-}
+const isSettled = (sizes: readonly number[]): boolean => {
+  const left = sizes.reduce((product, size) => product * size, 1);
+  return (sizes[0] ?? 1) <= NOISE || (sizes.length > 1 && left <= SETTLED);
+};
 
 /** The step from the newest point: Newton, secant or inverse quadratic, by how many points there are. */
-function step({ known, x2, y2, x1, y1, x0, y0 }: Trail, slope: number): number {
-  if (known < 2 || y2 === y1) return -y2 / slope;
-  const r = (x2 - x1) / (y2 - y1);
-  if (known < 3 || y1 === y0 || y2 === y0) return -y2 * r;
-  const q = (x1 - x0) / (y1 - y0);
-  return -y2 * (r - (y1 * (r - q)) / (y2 - y0)); // Newton's form of the inverse parabola, at y = 0
+function step([p2, p1, p0]: readonly Point[], slope: number): number {
+  if (p2 === undefined) return 0;
+  if (p1 === undefined || p2.y === p1.y) return -p2.y / slope;
+  const r = run(p2, p1);
+  if (p0 === undefined || p1.y === p0.y || p2.y === p0.y) return -p2.y * r;
+  const q = run(p1, p0);
+  return -p2.y * (r - (p1.y * (r - q)) / (p2.y - p0.y)); // Newton's form of the inverse parabola, at y = 0
 }
+
+/** Whether the newest two slopes agree: a small step on a curve that has just bent says nothing of the root. */
+function isStraight([p2, p1, p0]: readonly Point[], slope: number): boolean {
+  if (p2 === undefined || p1 === undefined) return true;
+  const newest = run(p2, p1);
+  const before = p0 === undefined ? 1 / slope : run(p1, p0);
+  return newest > before / STRAIGHT && newest < before * STRAIGHT;
+}
+
+/** Inverse slope between two points. */
+const run = (one: Point, other: Point): number => (one.x - other.x) / (one.y - other.y);

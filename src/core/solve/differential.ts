@@ -79,16 +79,20 @@ function expansionFrom(a: number, most: number, fall: number, epsilonAt: (x: num
 const typicalFall = (ratio: number): number => 0.55 + (0.7 * ratio ** 4) / (1 - ratio ** 4);
 const MOST_STEPS = 30;
 
-/** The smaller root of z (1 - k z)2 = a, or the place of its maximum where a lies above it. */
+/**
+ * The smaller root z of z (1 - k z)2 = a, or the place of its maximum where a lies above it. The first terms of the
+ * series of z, all positive, start below the root; from there Newton's steps only rise, until rounding stops them.
+ */
 function cubicRoot(a: number, k: number): number {
   const peak = 1 / (3 * k);
   if (!(a < (4 / 9) * peak)) return peak;
-  let z = Math.min(a, peak);
+  const ka = k * a;
+  let z = a * (1 + ka * (2 + 7 * ka));
   for (let count = 0; count < MOST_STEPS; count += 1) {
     const line = 1 - k * z;
-    const step = (a - z * line ** 2) / (line * (line - 2 * k * z));
+    const step = (a - z * line * line) / (line * (line - 2 * k * z));
     z += step;
-    if (Math.abs(step) <= 2 * Number.EPSILON * z) break;
+    if (!(step > 2 * Number.EPSILON * z)) break;
   }
   return z;
 }

@@ -6,7 +6,7 @@ import { type Asked, resultsOf } from './results.ts';
 import { serialise } from './serialise.ts';
 
 export interface Answer {
-  /** 0 every meter solved, 1 at least one refused, 2 the text is no project. */
+  /** 0 every meter solved, 1 at least one meter refused, 2 the text is no project. Traverses do not count. */
   readonly exit: 0 | 1 | 2;
   readonly output: string;
   readonly error: string;
@@ -17,6 +17,6 @@ export function solveText(text: string, asked: Asked = {}): Answer {
   const project = decode(text);
   if (!project.ok) return { exit: 2, output: '', error: problemSentence(project.problems[0]) };
   const results = run(project.value);
-  const refused = results.results.some(({ status }) => status === 'refused') || results.traverses.length > 0;
+  const refused = results.results.some(({ status }) => status === 'refused');
   return { exit: refused ? 1 : 0, output: serialise(resultsOf(project.value, results, asked)), error: '' };
 }

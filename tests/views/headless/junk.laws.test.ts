@@ -97,7 +97,7 @@ it('whatever stands in a meter, it is solved or refused in words, alone', () => 
         expect(code).toMatch(/^[a-z-]+$/);
         expect(field).toBeTypeOf('string');
         expect(message).toMatch(/^\S.+[.)] \S.+\.$/s);
-        expect(message).not.toMatch(/undefined|NaN|Infinity/);
+        expect(message).not.toMatch(/undefined|NaN|Infinity|\[object/);
       }
     }),
     { numRuns: 500 },
