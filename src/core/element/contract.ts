@@ -75,6 +75,13 @@ export interface Dimension {
   readonly source: Source;
 }
 
+/** A section whose pressure is that of one of the tappings. */
+export interface Section {
+  readonly station: string;
+  readonly position: number;
+  readonly level: 'upstream' | 'throat';
+}
+
 /** An element whose own fields are settled (tappings, convergent, ...). */
 export interface Primary {
   readonly kind: string;
@@ -99,6 +106,8 @@ export interface Primary {
   readonly dimensions: (at: Geometry) => readonly Dimension[];
   /** Distance of the two tappings from the upstream face (or tapping planes), for drawing and head lines, m. */
   readonly tappings: (at: Geometry) => { readonly upstream: number; readonly downstream: number };
+  /** Further sections at which the heads are known, m from the upstream face; a Venturi tube has them. */
+  readonly sections?: (at: Geometry) => readonly Section[];
   /** Distance downstream within which the pressure recovers, in pipe bores. */
   readonly recovery: number;
   readonly working: {

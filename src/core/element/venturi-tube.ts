@@ -223,6 +223,11 @@ const primary = (convergent: Convergent): Primary => {
       upstream: 0.5 * D,
       downstream: coneLength(D, d, convergentAngle) + 0.5 * d,
     }),
+    sections: ({ pipe: D, bore: d }) => [
+      { station: 'convergent', position: 0, level: 'upstream' },
+      { station: 'throat-inlet', position: coneLength(D, d, convergentAngle), level: 'throat' }, // 5.2.3
+      { station: 'throat-outlet', position: coneLength(D, d, convergentAngle) + d, level: 'throat' }, // 5.2.4
+    ],
     recovery: 9, // the end of the longest divergent of 7 degrees, rounded up
     working: {
       coefficient: (_, reynolds) => coefficientWorking(convergent, reynolds),

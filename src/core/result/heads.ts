@@ -27,10 +27,17 @@ export function headsOf(meter: Meter, operation: Operation, gravity: Acceleratio
   });
   const upstream = -tappings.upstream / geometry.pipe;
   const downstream = tappings.downstream / geometry.pipe;
-  return [
+  const level = { upstream: loss, throat };
+  const sections = (primary.sections?.(geometry) ?? []).map((section) =>
+    point(section.station, section.position / geometry.pipe, level[section.level], loss + velocity),
+  );
+  const face: HeadPoint = { ...point('face', 0, loss, loss + velocity), computed: false };
+  const points = [
     point('inlet', upstream - INLET, loss, loss + velocity),
     point('tapping-upstream', upstream, loss, loss + velocity),
+    ...(sections.length === 0 && tappings.upstream > 0 ? [face] : sections),
     point('tapping-downstream', downstream, throat, loss + velocity),
     point('recovered', primary.recovery, 0, velocity),
   ];
+  return points.sort((one, other) => one.position_D - other.position_D);
 }
