@@ -67,3 +67,6 @@ export const searchPipeSizes = (query: string): readonly PipeSize[] => {
     return words.every((word) => keys.some((key) => key.startsWith(word)));
   });
 };
+
+/** The size of a name as the project keeps it; undefined for a name that is not in the table. */
+export const pipeSizeNamed = (name: string): PipeSize | undefined => PIPE_SIZES.find((size) => size.name === name);

@@ -1,6 +1,7 @@
 /** The pipe, and the form lying along it: under each station of the drawing the inputs that belong there. */
 import { PipeDrawing } from '../drawing/pipe.tsx';
 import type { PresentedSizing } from '../present/model.ts';
+import styles from './Along.module.css';
 import { useCommands, useWorkbenchStore } from './binding.tsx';
 import { drawingLabels } from './drawing-labels.ts';
 import { pullTo } from './field/turn.ts';
@@ -11,7 +12,6 @@ import { Element } from './station/Element.tsx';
 import { Flow } from './station/Flow.tsx';
 import { Upstream } from './station/Upstream.tsx';
 import { useWidth } from './useWidth.ts';
-import styles from './Along.module.css';
 
 export function Along({ selected }: { readonly selected: SelectedMeter }) {
   const { sizing, stale } = selected;

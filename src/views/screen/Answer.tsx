@@ -1,9 +1,9 @@
 /** The answer as one sentence. It stays in sight on a phone and is read out once the typing rests. */
 import type { PresentedSizing, Segment } from '../present/model.ts';
+import styles from './Answer.module.css';
 import type { SelectedMeter } from './meter.ts';
 import { ProblemList } from './ProblemList.tsx';
 import { useRested } from './useRested.ts';
-import styles from './Answer.module.css';
 
 const LOUD_PAUSE = 1200; // ms without a change before the sentence is read out
 
@@ -11,10 +11,17 @@ const plain = (segments: readonly Segment[]): string => segments.map(({ text }) 
 
 export function Answer({ selected }: { readonly selected: SelectedMeter }) {
   const { sizing, stale, now } = selected;
-  const spoken = useRested(stale ? `Not solved. ${now.problems[0]?.sentence ?? ''}` : sizing ? plain(sizing.answer) : '', LOUD_PAUSE);
+  const spoken = useRested(
+    stale ? `Not solved. ${now.problems[0]?.sentence ?? ''}` : sizing ? plain(sizing.answer) : '',
+    LOUD_PAUSE,
+  );
   return (
     <header className={styles.answer} data-stale={stale}>
-      {sizing ? <Sentence sizing={sizing} stale={stale} /> : <h1 className={styles.sentence}>{now.tag} waits for its figures.</h1>}
+      {sizing ? (
+        <Sentence sizing={sizing} stale={stale} />
+      ) : (
+        <h1 className={styles.sentence}>{now.tag} waits for its figures.</h1>
+      )}
       {stale && <ProblemList selected={selected} />}
       <p className={styles.spoken} aria-live="polite">
         {spoken}

@@ -8,7 +8,10 @@ export function EmptyProject() {
   return (
     <div className={styles.empty}>
       <h1>Which bore, which differential, which flow?</h1>
-      <p>State two of them, the pipe and the fluid. The third is found as you type, with its limits, its uncertainty and its working.</p>
+      <p>
+        State two of them, the pipe and the fluid. The third is found as you type, with its limits, its uncertainty and
+        its working.
+      </p>
       <div className={styles.ways}>
         <button type="button" className={styles.first} onClick={() => addMeter()}>
           Size a meter
@@ -20,7 +23,9 @@ export function EmptyProject() {
           Open a file
         </button>
       </div>
-      <p className={styles.small}>A project file can also be dropped anywhere on this window. Everything stays in this browser.</p>
+      <p className={styles.small}>
+        A project file can also be dropped anywhere on this window. Everything stays in this browser.
+      </p>
     </div>
   );
 }

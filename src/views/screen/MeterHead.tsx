@@ -1,7 +1,7 @@
 /** The name of the meter, and what can be done with it as a whole. */
 import { useWorkbench } from './binding.tsx';
-import { textAt } from './text.ts';
 import styles from './MeterHead.module.css';
+import { textAt } from './text.ts';
 
 const FIELDS = [
   { path: 'tag', label: 'Tag', size: 12 },

@@ -2,8 +2,8 @@
 import { fieldLabel } from '../words/fields.ts';
 import { focusField } from './focus.ts';
 import type { SelectedMeter } from './meter.ts';
-import { textAt } from './text.ts';
 import styles from './ProblemList.module.css';
+import { textAt } from './text.ts';
 
 export function ProblemList({ selected }: { readonly selected: SelectedMeter }) {
   const { problems } = selected.now;

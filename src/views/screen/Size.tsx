@@ -1,11 +1,11 @@
 /** Sizing one meter: the answer, the pipe with the form along it, and what follows from it. */
 import type { KeyboardEvent } from 'react';
+import { Along } from './Along.tsx';
 import { Answer } from './Answer.tsx';
 import { Boundary } from './Boundary.tsx';
 import { EmptyProject } from './EmptyProject.tsx';
 import { focusNext } from './focus.ts';
 import { type SelectedMeter, useSelectedMeter } from './meter.ts';
-import { Along } from './Along.tsx';
 import { Checks } from './panel/Checks.tsx';
 import { Curve } from './panel/Curve.tsx';
 import { DutyTable } from './panel/DutyTable.tsx';

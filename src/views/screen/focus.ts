@@ -5,7 +5,8 @@ const all = (): HTMLElement[] => [...document.querySelectorAll<HTMLElement>(FIEL
 
 /** A field inside a fold cannot take the focus before the fold is open. */
 function reveal(field: HTMLElement): void {
-  for (let fold = field.closest('details'); fold !== null; fold = fold.parentElement?.closest('details') ?? null) fold.open = true;
+  for (let fold = field.closest('details'); fold !== null; fold = fold.parentElement?.closest('details') ?? null)
+    fold.open = true;
 }
 
 function enter(field: HTMLElement): void {
@@ -26,9 +27,9 @@ export function focusField(path: string): boolean {
 }
 
 /** The field after the one at hand, in the order of the data; folded ones are passed over. */
-export function focusNext(from: Element): void {
+export function focusNext(from: HTMLElement): void {
   const shown = all().filter((field) => field.checkVisibility());
-  const next = shown[shown.findIndex((field) => field === from) + 1];
+  const next = shown[shown.indexOf(from) + 1];
   if (next !== undefined) enter(next);
 }
 
@@ -42,6 +43,9 @@ export interface FieldEntry {
 export const fieldEntries = (): readonly FieldEntry[] =>
   all().map((field) => ({
     path: field.dataset.field ?? '',
-    label: field instanceof HTMLInputElement || field instanceof HTMLSelectElement ? (field.labels?.[0]?.textContent ?? field.ariaLabel ?? '') : '',
+    label:
+      field instanceof HTMLInputElement || field instanceof HTMLSelectElement
+        ? (field.labels?.[0]?.textContent ?? field.ariaLabel ?? '')
+        : '',
     place: field.closest('section')?.querySelector('h2')?.lastChild?.textContent ?? '',
   }));

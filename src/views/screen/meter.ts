@@ -38,7 +38,7 @@ export function useSelectedMeter(): SelectedMeter | undefined {
 }
 
 /** A part of the result that may be drawn a moment later than the figures. */
-export const useLater = <Part,>(part: Part): Part => useDeferredValue(part);
+export const useLater = <Part>(part: Part): Part => useDeferredValue(part);
 
 /** The text of one field of the selected meter. */
 export const useMeterText = (path: string): string =>

@@ -43,4 +43,5 @@ export function presentedEarlier(project: Project, solved: Solved): PresentedSiz
   return earlier !== undefined && isSizing(earlier) ? earlier : undefined;
 }
 
-export const isSizing = (meter: PresentedMeter | PresentedSizing): meter is PresentedSizing => meter.status === 'solved';
+export const isSizing = (meter: PresentedMeter | PresentedSizing): meter is PresentedSizing =>
+  meter.status === 'solved';

@@ -1,6 +1,7 @@
 /** One of a list. A value that is not in the list is kept and shown as it is written. */
-import { fieldLabel } from '../../words/fields.ts';
+
 import type { Choice } from '../../words/elements.ts';
+import { fieldLabel } from '../../words/fields.ts';
 import { useWorkbench } from '../binding.tsx';
 import { useMeterText, useProblem, useUntried } from '../meter.ts';
 import styles from './box.module.css';

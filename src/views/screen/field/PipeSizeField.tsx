@@ -1,6 +1,6 @@
 /** Picks a pipe from the table of sizes and fills in its bore. The table is second-hand and says so. */
 import { useId, useState } from 'react';
-import { type PipeSize, searchPipeSizes } from '../../../core/document/pipe-sizes.ts';
+import { type PipeSize, pipeSizeNamed, searchPipeSizes } from '../../../core/document/pipe-sizes.ts';
 import { useWorkbench } from '../binding.tsx';
 import { useMeterText } from '../meter.ts';
 import styles from './box.module.css';
@@ -28,7 +28,7 @@ export function PipeSizeField() {
   const id = 'field-pipe.size';
 
   return (
-    <Frame id={id} label="Line size" note={size !== '' && <span>nominal wall, table second-hand°</span>}>
+    <Frame id={id} label="Line size" note={size !== '' && <SizeNote size={size} />}>
       <div className={styles.box} data-anchor="true">
         <input
           id={id}
@@ -56,4 +56,13 @@ export function PipeSizeField() {
       </div>
     </Frame>
   );
+}
+
+/** Whether the bore below is still that of the size, and where the table comes from. */
+function SizeNote({ size }: { readonly size: string }) {
+  const bore = useMeterText('pipe.bore');
+  const known = pipeSizeNamed(size);
+  if (known === undefined) return <span>not in the table of sizes</span>;
+  if (bore !== `${known.bore} mm`) return <span>the bore below is not the {known.bore} mm of this size</span>;
+  return <span title={`${known.source.clause}: check against your copy`}>nominal wall, table second-hand°</span>;
 }

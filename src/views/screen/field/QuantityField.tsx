@@ -1,12 +1,13 @@
 /** A number with its unit. The text stays as typed; the unit at the right converts it exactly. */
+
+import type { ReactNode } from 'react';
 import { fieldLabel } from '../../words/fields.ts';
-import { useMeterText, useProblem, useUntried } from '../meter.ts';
 import { useWorkbench } from '../binding.tsx';
+import { useMeterText, useProblem, useUntried } from '../meter.ts';
 import styles from './box.module.css';
 import { Frame, noteId, problemId } from './Frame.tsx';
 import { unitMenu } from './split.ts';
 import { useQuantity } from './useQuantity.ts';
-import type { ReactNode } from 'react';
 
 export interface QuantityFieldProps {
   readonly path: string;

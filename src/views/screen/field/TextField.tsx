@@ -1,7 +1,7 @@
 /** Words or a plain number, kept as typed. */
 import { useUntried } from '../meter.ts';
-import { Frame, problemId } from './Frame.tsx';
 import styles from './box.module.css';
+import { Frame, problemId } from './Frame.tsx';
 
 interface Props {
   readonly path: string;

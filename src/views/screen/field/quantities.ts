@@ -8,7 +8,10 @@ export interface QuantityKind {
   readonly unit: Readonly<Record<Display, string>>;
 }
 
-const kind = (measures: readonly Measure[], si: string, us: string): QuantityKind => ({ measures, unit: { SI: si, US: us } });
+const kind = (measures: readonly Measure[], si: string, us: string): QuantityKind => ({
+  measures,
+  unit: { SI: si, US: us },
+});
 
 const pressure = kind(['gauge pressure', 'absolute pressure'], 'bar(g)', 'psi(g)');
 const absolute = kind(['absolute pressure'], 'kPa(a)', 'psi(a)');

@@ -6,13 +6,18 @@ interface Picker {
   readonly onKeyDown: (event: KeyboardEvent) => void;
 }
 
-export function usePicker<Item>(items: readonly Item[], pick: (item: Item) => void, open: (open: boolean) => void): Picker {
+export function usePicker<Item>(
+  items: readonly Item[],
+  pick: (item: Item) => void,
+  open: (open: boolean) => void,
+): Picker {
   const [wanted, setActive] = useState<number>();
   const active = wanted === undefined || wanted >= items.length ? undefined : wanted;
 
   const step = (by: 1 | -1): void => {
-    if (items.length === 0) return open(true);
-    setActive(active === undefined ? (by === 1 ? 0 : items.length - 1) : (active + by + items.length) % items.length);
+    if (items.length === 0) open(true);
+    else
+      setActive(active === undefined ? (by === 1 ? 0 : items.length - 1) : (active + by + items.length) % items.length);
   };
 
   const onKeyDown = (event: KeyboardEvent): void => {

@@ -8,8 +8,8 @@ import { useState } from 'react';
 import type { Display } from '../../../core/document/project.ts';
 import { type Previous, readTyped } from '../../../core/quantity/typed.ts';
 import { type Unit, unitOf } from '../../../core/quantity/units.ts';
-import { type QuantityKind, quantityKind } from './quantities.ts';
 import { echoOf } from './echo.ts';
+import { type QuantityKind, quantityKind } from './quantities.ts';
 import { split } from './split.ts';
 
 interface Draft {
@@ -43,7 +43,12 @@ function firstUnit(kind: QuantityKind, display: Display): Unit {
   return unit;
 }
 
-export function useQuantity(path: string, text: string, display: Display, write: (text: string) => void): QuantityBinding {
+export function useQuantity(
+  path: string,
+  text: string,
+  display: Display,
+  write: (text: string) => void,
+): QuantityBinding {
   const kind = quantityKind(path);
   const [draft, setDraft] = useState<Draft>();
   const [chosen, setChosen] = useState<Unit>();
@@ -56,7 +61,10 @@ export function useQuantity(path: string, text: string, display: Display, write:
   const enter = (typed: string): void => {
     // A unit alone converts the number that stood there before its first letter was typed.
     const previous = live !== undefined && last !== undefined ? last : written;
-    const read = typed.trim() === '' ? undefined : readTyped(typed, kind.measures, path, { ...previous, unit: hasDigit(typed) ? unit : previous.unit });
+    const read =
+      typed.trim() === ''
+        ? undefined
+        : readTyped(typed, kind.measures, path, { ...previous, unit: hasDigit(typed) ? unit : previous.unit });
     const file = read === undefined ? '' : read.ok ? read.value.file : typed;
     if (read?.ok && hasDigit(typed)) setLast(split(file, kind.measures) as Previous);
     else if (live === undefined) setLast(written);
@@ -67,11 +75,12 @@ export function useQuantity(path: string, text: string, display: Display, write:
   const chooseUnit = (symbol: string): void => {
     const next = unitOf(symbol, kind.measures);
     setChosen(next);
-    if (next === undefined || parts.unit === undefined) return setDraft(undefined);
+    setDraft(undefined);
+    if (next === undefined || parts.unit === undefined) return;
     const converted = readTyped(symbol, kind.measures, path, written);
     // What no factor converts (gauge to absolute, mass to volume) keeps its number under the new unit, and says so.
     const file = converted.ok ? converted.value.file : `${parts.number} ${symbol}`;
-    setDraft(converted.ok ? undefined : { typed: parts.number, written: file, relabelled: true });
+    if (!converted.ok) setDraft({ typed: parts.number, written: file, relabelled: true });
     write(file);
   };
 

@@ -1,7 +1,7 @@
 /** The checks, under the assumption of Bernoulli's equation that each guards. */
 import type { CheckGroup, CheckRow } from '../../present/model.ts';
-import { VerdictMark } from '../VerdictMark.tsx';
 import { verdictWords } from '../../words/verdicts.ts';
+import { VerdictMark } from '../VerdictMark.tsx';
 import styles from './Checks.module.css';
 import { Panel } from './Panel.tsx';
 
@@ -24,7 +24,9 @@ export function Checks({ groups, stale }: { readonly groups: readonly CheckGroup
           </section>
         ))}
       </div>
-      <p className={styles.legend}>° seen second-hand or from memory: check against your copy. † practice, not a standard.</p>
+      <p className={styles.legend}>
+        ° seen second-hand or from memory: check against your copy. † practice, not a standard.
+      </p>
     </Panel>
   );
 }

@@ -1,7 +1,7 @@
 /** Copies a table and says whether it worked. */
 import { useState } from 'react';
-import { type Cell, copyCells } from './clipboard.ts';
 import styles from './CopyTable.module.css';
+import { type Cell, copyCells } from './clipboard.ts';
 
 const WORDS = { ready: 'Copy table', done: 'Copied', refused: 'The browser refused to copy' } as const;
 

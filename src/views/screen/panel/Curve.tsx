@@ -27,7 +27,9 @@ export function Curve({ sizing, stale }: { readonly sizing: PresentedSizing; rea
   return (
     <Panel id="curve" title="Flow against differential" stale={stale}>
       <div className={styles.frame} ref={frame}>
-        <Suspense fallback={null}>{width > 0 && <FlowChart chart={chart} labels={LABELS} width={width} height={HEIGHT} />}</Suspense>
+        <Suspense fallback={null}>
+          {width > 0 && <FlowChart chart={chart} labels={LABELS} width={width} height={HEIGHT} />}
+        </Suspense>
       </div>
     </Panel>
   );

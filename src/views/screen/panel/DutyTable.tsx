@@ -28,7 +28,10 @@ function cellsOf(rows: readonly DutyRow[]): readonly (readonly Cell[])[] {
   const heads = COLUMNS.map(({ id, label }) => words([label, unitOf(rows, id)].filter(Boolean).join(' / ')));
   const figure = (id: DutyColumn, { plain }: Value): Cell =>
     unitOf(rows, id) === '' ? number(plain) : number(plain.split(' ')[0] ?? plain);
-  const line = (row: DutyRow): readonly Cell[] => [words(row.label), ...COLUMNS.map(({ id }) => figure(id, row.cells[id]))];
+  const line = (row: DutyRow): readonly Cell[] => [
+    words(row.label),
+    ...COLUMNS.map(({ id }) => figure(id, row.cells[id])),
+  ];
   return [[words('Duty'), ...heads], ...rows.map(line)];
 }
 
@@ -55,7 +58,11 @@ export function DutyTable({ sizing, stale }: { readonly sizing: PresentedSizing;
                 <th scope="row">{row.label}</th>
                 {COLUMNS.map(({ id, label, working }) => (
                   <td key={id}>
-                    <button type="button" title={`${label}: open its working`} onClick={() => openWorking(row.name, working)}>
+                    <button
+                      type="button"
+                      title={`${label}: open its working`}
+                      onClick={() => openWorking(row.name, working)}
+                    >
                       {unitOf(duty, id) === '' ? row.cells[id].text : row.cells[id].number}
                     </button>
                   </td>

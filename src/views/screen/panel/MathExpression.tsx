@@ -42,7 +42,11 @@ function of(expression: Expression): ReactNode {
     case 'quotient':
       return element('mfrac', bare(expression.left), bare(expression.right));
     case 'power':
-      return element('msup', isTerm(expression.base) ? of(expression.base) : row(of(expression.base)), bare(expression.exponent));
+      return element(
+        'msup',
+        isTerm(expression.base) ? of(expression.base) : row(of(expression.base)),
+        bare(expression.exponent),
+      );
     case 'call':
       return call(expression.name, expression.arguments);
     case 'group':
@@ -60,7 +64,8 @@ function terms(expression: Expression): readonly ReactNode[] {
   return [...terms(expression.left), row(sign, of(expression.right))];
 }
 
-const math = (key: string, content: ReactNode): ReactNode => createElement('math', { key, displaystyle: 'true' }, content);
+const math = (key: string, content: ReactNode): ReactNode =>
+  createElement('math', { key, displaystyle: 'true' }, content);
 
 interface Props {
   readonly symbol: Expression;
@@ -71,7 +76,11 @@ export function MathExpression({ symbol, equals }: Props) {
   const list = equals === undefined ? [] : terms(equals);
   const start = list.length === 0 ? of(symbol) : row(of(symbol), operator('='));
   return (
-    <div className={styles.math}>
+    // A line too wide for the page scrolls, also by the keys.
+    <div
+      className={styles.math}
+      {...(list.length === 0 ? {} : { tabIndex: 0, role: 'group', 'aria-label': 'Equation' })}
+    >
       {math('symbol', start)}
       {list.map((term, at) => math(String(at), term))}
     </div>

@@ -7,7 +7,9 @@ import { WorkingLine } from './WorkingLine.tsx';
 export function Working({ sizing, stale }: { readonly sizing: PresentedSizing; readonly stale: boolean }) {
   return (
     <Panel id="working" title="Working" stale={stale}>
-      <p className={styles.lead}>Each line opens into its equation, the numbers put in, and the clause it comes from.</p>
+      <p className={styles.lead}>
+        Each line opens into its equation, the numbers put in, and the clause it comes from.
+      </p>
       <div className={styles.groups}>
         {sizing.working.map((group) => (
           <Group key={group.id} group={group} open={group.id === 'meter' || group.id === 'maximum'} />

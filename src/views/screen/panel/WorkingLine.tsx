@@ -41,7 +41,7 @@ function Opened({ row }: { readonly row: WorkingRow }) {
           {row.given.map(({ id, symbol, label, value }) => (
             <div key={id}>
               <dt>
-                {symbol && <Symbol name={symbol} />} {label}
+                {symbol && <GivenSymbol name={symbol} />} {label}
               </dt>
               <dd>{value.text}</dd>
             </div>
@@ -58,7 +58,7 @@ function Opened({ row }: { readonly row: WorkingRow }) {
 }
 
 /** A symbol of the formula notation: what follows the underscore stands below the line. */
-function Symbol({ name }: { readonly name: string }) {
+function GivenSymbol({ name }: { readonly name: string }) {
   const [base, below] = name.split('_');
   return (
     <i>

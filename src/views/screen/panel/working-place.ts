@@ -5,7 +5,8 @@ export const workingId = (group: string, line: string): string => `working-${gro
 export function openWorking(group: string, line: string): void {
   const target = document.getElementById(workingId(group, line)) ?? document.getElementById(workingId('meter', line));
   if (target === null) return;
-  for (let fold = target.closest('details'); fold !== null; fold = fold.parentElement?.closest('details') ?? null) fold.open = true;
+  for (let fold = target.closest('details'); fold !== null; fold = fold.parentElement?.closest('details') ?? null)
+    fold.open = true;
   target.scrollIntoView({ block: 'center' });
   target.querySelector<HTMLElement>('summary')?.focus();
 }

@@ -2,8 +2,8 @@
 import { Dialog } from './Dialog.tsx';
 import { useDialogs } from './dialogs.tsx';
 import { FindField } from './FindField.tsx';
-import { Keys } from './Keys.tsx';
 import { KeptProjects } from './KeptProjects.tsx';
+import { Keys } from './Keys.tsx';
 import { ProjectFields } from './ProjectFields.tsx';
 
 const DIALOGS = {

@@ -27,7 +27,12 @@ function ProjectName() {
   const revision = useWorkbench((state) => textAt(state.project, 'revision'));
   const { show } = useDialogs();
   return (
-    <button type="button" className={styles.project} title="Title, revision, site and base state" onClick={() => show('project')}>
+    <button
+      type="button"
+      className={styles.project}
+      title="Title, revision, site and base state"
+      onClick={() => show('project')}
+    >
       {title || 'Untitled project'}
       {revision && ` · revision ${revision}`}
     </button>

@@ -52,7 +52,11 @@ function Kept({ project: { id, title, savedAt, condition, current } }: { readonl
           </button>
         )}
         {!current && (
-          <button type="button" aria-label={`Remove ${title || 'Untitled'}`} onClick={() => void commands.removeKept(id)}>
+          <button
+            type="button"
+            aria-label={`Remove ${title || 'Untitled'}`}
+            onClick={() => void commands.removeKept(id)}
+          >
             Remove
           </button>
         )}

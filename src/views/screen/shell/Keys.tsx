@@ -1,6 +1,7 @@
 /** The list of keys. */
-import { KEYS } from './keys.table.ts';
+
 import styles from './Keys.module.css';
+import { KEYS } from './keys.table.ts';
 
 export function Keys() {
   return (

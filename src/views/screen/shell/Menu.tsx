@@ -36,7 +36,14 @@ function Orders() {
     ['Keys', () => show('keys')],
   ];
   return orders.map(([words, order]) => (
-    <button key={words} type="button" className={styles.order} popoverTarget={ID} popoverTargetAction="hide" onClick={order}>
+    <button
+      key={words}
+      type="button"
+      className={styles.order}
+      popoverTarget={ID}
+      popoverTargetAction="hide"
+      onClick={order}
+    >
       {words}
     </button>
   ));

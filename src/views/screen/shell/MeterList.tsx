@@ -22,7 +22,9 @@ export function MeterList() {
         {meters.map((meter, index) => {
           const result = results[index];
           return (
-            result && <MeterItem key={keys[index]} meter={meter} result={result} index={index} current={index === selected} />
+            result && (
+              <MeterItem key={keys[index]} meter={meter} result={result} index={index} current={index === selected} />
+            )
           );
         })}
       </ul>
@@ -74,7 +76,12 @@ function MeterStrip() {
   };
   if (project.meters.length === 0) return null;
   return (
-    <select className={styles.strip} aria-label="Meter" value={selected} onChange={(event) => select(Number(event.target.value))}>
+    <select
+      className={styles.strip}
+      aria-label="Meter"
+      value={selected}
+      onChange={(event) => select(Number(event.target.value))}
+    >
       {project.meters.map((meter, index) => (
         // biome-ignore lint/suspicious/noArrayIndexKey: an option is its place in the list
         <option key={index} value={index}>

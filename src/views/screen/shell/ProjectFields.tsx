@@ -31,7 +31,14 @@ export function ProjectFields() {
   return (
     <div className={styles.fields}>
       {TITLE_BLOCK.map((path) => (
-        <TextField key={path} path={path} label={fieldLabel(path)} text={textAt(project, path)} write={(text) => write(path, text)} settle={settle} />
+        <TextField
+          key={path}
+          path={path}
+          label={fieldLabel(path)}
+          text={textAt(project, path)}
+          write={(text) => write(path, text)}
+          settle={settle}
+        />
       ))}
       {QUANTITIES.map((path) => {
         const text = textAt(project, path);

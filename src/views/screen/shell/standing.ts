@@ -17,17 +17,19 @@ export const causeWords = (cause: string): string => CAUSES[cause] ?? REFUSED;
 
 type Words = (detail: Notice['detail']) => string;
 
-const named = (detail: Notice['detail']): string => detail['name'] || 'The file';
-const titled = (detail: Notice['detail']): string => detail['title'] || 'The project';
+const named = (detail: Notice['detail']): string => detail.name || 'The file';
+const titled = (detail: Notice['detail']): string => detail.title || 'The project';
 
 const NOTICES: Readonly<Record<string, Words>> = {
   'close-other-tabs': () => 'Other tabs hold an older version of Headwright. Close them to keep work here.',
   'not-kept': () => 'What you last wrote is not kept yet, so it stays in view. Save it to a file first.',
   'both-changed': () => 'The project changed in two tabs. This tab went on as a copy of its own.',
   'stored-gone': (d) => `${titled(d)} is no longer in this browser.`,
-  'stored-damaged': (d) => `${titled(d)} cannot be read as it was kept. Its last sound version is under Projects in this browser.`,
+  'stored-damaged': (d) =>
+    `${titled(d)} cannot be read as it was kept. Its last sound version is under Projects in this browser.`,
   'stored-newer': (d) => `${titled(d)} was written by a newer version of Headwright and is left as it is.`,
-  'no-earlier-version': (d) => `No earlier version of ${titled(d)} is kept here. Save its text to a file and mend it there.`,
+  'no-earlier-version': (d) =>
+    `No earlier version of ${titled(d)} is kept here. Save its text to a file and mend it there.`,
   'held-elsewhere': (d) => `${titled(d)} is open in another tab. Close it there first.`,
   'open-cancelled': () => 'Nothing was opened.',
   'file-opened': (d) => `${named(d)} is open. It is kept as a project of its own in this browser.`,
@@ -49,5 +51,5 @@ export function noticeWords({ code, detail }: Notice): string {
   if (words !== undefined) return words(detail);
   if (code.startsWith('storage-')) return `Keeping failed: ${causeWords(code.slice('storage-'.length))}`;
   const sentence = problemSentence({ code, field: '', detail });
-  return detail['name'] ? `${detail['name']}: ${sentence}` : sentence;
+  return detail.name ? `${detail.name}: ${sentence}` : sentence;
 }

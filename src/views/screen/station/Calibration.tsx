@@ -36,12 +36,22 @@ export function Calibration() {
           <tr key={at}>
             {COLUMNS.map(({ key, label }) => (
               <td key={key}>
-                <CalibrationCell path={`${PATH}.${at}.${key}`} label={`${label}, row ${at + 1}`} text={textAt(meter, `${PATH}.${at}.${key}`)} write={write} settle={settle} />
+                <CalibrationCell
+                  path={`${PATH}.${at}.${key}`}
+                  label={`${label}, row ${at + 1}`}
+                  text={textAt(meter, `${PATH}.${at}.${key}`)}
+                  write={write}
+                  settle={settle}
+                />
               </td>
             ))}
             <td>
               {at < count && (
-                <button type="button" aria-label={`Remove row ${at + 1}`} onClick={() => write(`${PATH}.${at}`, undefined)}>
+                <button
+                  type="button"
+                  aria-label={`Remove row ${at + 1}`}
+                  onClick={() => write(`${PATH}.${at}`, undefined)}
+                >
                   ×
                 </button>
               )}

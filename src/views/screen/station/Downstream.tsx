@@ -1,6 +1,7 @@
 /** Station 4: what is lost for good, the straight pipe around the element, and how sure the inputs are. */
-import { fittingChoices } from '../../words/fittings.ts';
+
 import type { PresentedSizing } from '../../present/model.ts';
+import { fittingChoices } from '../../words/fittings.ts';
 import { ChoiceField } from '../field/ChoiceField.tsx';
 import { FoundField } from '../field/FoundField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
@@ -16,10 +17,23 @@ export function Downstream() {
   const sizing = selected?.sizing;
   return (
     <Station number={4} title="Downstream">
-      <FoundField label="Permanent loss" path="loss" value={sizing?.loss} stale={sizing !== undefined && selected?.stale === true} />
+      <FoundField
+        label="Permanent loss"
+        path="loss"
+        value={sizing?.loss}
+        stale={sizing !== undefined && selected?.stale === true}
+      />
       <ChoiceField path="installation.fitting" label="Fitting before" choices={fittingsOf(sizing)} open="not stated" />
-      <QuantityField path="installation.before" label="Straight before" note={sizing && <StraightNeed sizing={sizing} side="upstream" />} />
-      <QuantityField path="installation.after" label="Straight after" note={sizing && <StraightNeed sizing={sizing} side="downstream" />} />
+      <QuantityField
+        path="installation.before"
+        label="Straight before"
+        note={sizing && <StraightNeed sizing={sizing} side="upstream" />}
+      />
+      <QuantityField
+        path="installation.after"
+        label="Straight after"
+        note={sizing && <StraightNeed sizing={sizing} side="downstream" />}
+      />
       <Fold title="Uncertainty of the inputs">
         <QuantityField path="uncertainty.bore" label="Bore, ±" />
         <QuantityField path="uncertainty.pipe" label="Pipe bore, ±" />

@@ -2,7 +2,15 @@
 import type { ReactNode } from 'react';
 import styles from './Fold.module.css';
 
-export function Fold({ title, count, children }: { readonly title: string; readonly count?: string; readonly children: ReactNode }) {
+export function Fold({
+  title,
+  count,
+  children,
+}: {
+  readonly title: string;
+  readonly count?: string;
+  readonly children: ReactNode;
+}) {
   return (
     <details className={styles.fold}>
       <summary>

@@ -18,7 +18,11 @@ export function Unknown({ unknown, label, name }: Props) {
   const found = unknownOf(useMeterText('find')) === unknown;
   const path = FIELD_OF[unknown];
   const aside = <UnknownToggle unknown={unknown} label={name} pressed={found} />;
-  return found ? <Found unknown={unknown} label={label} path={path} aside={aside} /> : <QuantityField path={path} label={label} aside={aside} />;
+  return found ? (
+    <Found unknown={unknown} label={label} path={path} aside={aside} />
+  ) : (
+    <QuantityField path={path} label={label} aside={aside} />
+  );
 }
 
 interface FoundProps {
