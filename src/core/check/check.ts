@@ -7,6 +7,7 @@ import { checkLimits } from './limits.ts';
 import { checkPhase } from './phase.ts';
 import { checkPlate } from './plate.ts';
 import { checkPractice } from './practice.ts';
+import { checkSteady } from './steady.ts';
 
 export const ASSUMPTIONS: readonly Assumption[] = [
   'steady',
@@ -20,6 +21,7 @@ export const ASSUMPTIONS: readonly Assumption[] = [
 /** All findings; `straight` are those of straight.ts, which the uncertainty needed earlier. */
 export function check(subject: Case, budgets: Budgets, straight: readonly Finding[]): readonly Finding[] {
   const findings = [
+    ...checkSteady(subject),
     ...checkLimits(subject),
     ...checkCalibration(subject),
     ...straight,

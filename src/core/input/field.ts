@@ -1,5 +1,5 @@
 /**
- * What a field is: its name in the document and how its text is read. Elements and fluids declare their own fields
+ * What a field of an element is: its name in the document and how its text is read. Elements declare their own fields
  * with it, so that input can read them without knowing who they belong to.
  */
 import type { Measure } from '../quantity/units.ts';

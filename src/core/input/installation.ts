@@ -1,5 +1,5 @@
 /** The straight pipe before and after the element, in pipe bores: written as '30 D' or as a length. */
-import type { Length } from '../quantity/kinds.ts';
+import type { Length, Ratio } from '../quantity/kinds.ts';
 import type { Form } from './form.ts';
 
 export interface Installation {
@@ -7,6 +7,8 @@ export interface Installation {
   readonly fitting?: string;
   readonly before?: number; // pipe bores
   readonly after?: number;
+  /** Root-mean-square fluctuation of the differential over its mean. */
+  readonly fluctuation?: Ratio;
 }
 
 /** Reads the group `installation`; a length is divided by the pipe's bore as measured. */
@@ -19,5 +21,13 @@ export function readInstallation(form: Form, pipe: Length | undefined): Installa
     return pipe === undefined ? {} : { [name]: length.si / pipe };
   };
   const fitting = form.word('installation.fitting');
-  return { ...bores('before'), ...bores('after'), ...(fitting === undefined ? {} : { fitting }) };
+  const fluctuation = form.quantity('installation.fluctuation', ['share']);
+  if (fluctuation && fluctuation.si < 0)
+    form.report('negative', 'installation.fluctuation', { written: fluctuation.number });
+  return {
+    ...bores('before'),
+    ...bores('after'),
+    ...(fitting === undefined ? {} : { fitting }),
+    ...(fluctuation === undefined ? {} : { fluctuation: fluctuation.si as Ratio }),
+  };
 }

@@ -30,7 +30,7 @@ const Meter = v.looseObject({
   differential: text,
   find: text,
   uncertainty: v.optional(v.looseObject({ bore: text, pipe: text, differential: text, density: text })),
-  installation: v.optional(v.looseObject({ fitting: text, before: text, after: text })),
+  installation: v.optional(v.looseObject({ fitting: text, before: text, after: text, fluctuation: text })),
 });
 
 /** The meter as written, when every key has its type. Problems: text-expected, number-expected, group-expected, list-expected. */

@@ -47,6 +47,7 @@ const labels: Readonly<Record<string, string>> = {
   'installation.fitting': 'Nearest fitting upstream',
   'installation.before': 'Straight pipe before',
   'installation.after': 'Straight pipe after',
+  'installation.fluctuation': 'Fluctuation of the differential',
   title: 'Title',
   revision: 'Revision',
   preparedBy: 'Prepared by',

@@ -15,6 +15,11 @@ const saturation = (word: string, side: string): FindingWords => ({
 const vapour: Pick<FindingWords, 'limit'> = { limit: (bounds) => `${bounds}, the vapour pressure` };
 
 export const checksOfFlow: Readonly<Record<string, FindingWords>> = {
+  fluctuation: {
+    role: 'percent',
+    text: (figure, detail) =>
+      `The differential fluctuates by ${figure} of its mean; its root reads ${detail.figure('high', 'uncertainty')} high`,
+  },
   'reynolds-pipe': {
     role: 'reynolds',
     text: (figure, detail) => `Pipe Reynolds number ${figure}{where}${held(detail)}`,

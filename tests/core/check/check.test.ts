@@ -98,6 +98,17 @@ describe('straight pipe, ISO 5167-2:2003, Table 3', () => {
   });
 });
 
+describe('steady', () => {
+  const at = (fluctuation: string) =>
+    solved({ ...water, installation: { fluctuation } }).checks.find(({ id }) => id === 'fluctuation');
+  test('10 % of fluctuation is the limit and reads 0.125 % high, ISO/TR 3313', () => {
+    expect(at('10 %')).toMatchObject({ verdict: 'inside', assumption: 'steady' });
+    expect(at('10 %')?.detail?.high).toBeCloseTo(0.126, 3);
+    expect(at('10.1 %')?.verdict).toBe('outside');
+  });
+  test('nothing is said where nothing is stated', () => expect(verdict(water, 'fluctuation')).toBeUndefined());
+});
+
 describe('one phase', () => {
   const hot = (temperature: string, differential: string) => ({
     ...water,

@@ -53,6 +53,7 @@ export interface InstallationText {
   fitting?: string; // nearest fitting upstream
   before?: string;
   after?: string;
+  fluctuation?: string; // rms of the differential against its mean, as '4 %'
   [key: string]: unknown;
 }
 
