@@ -27,9 +27,19 @@ export type Root =
       readonly evaluations: number;
     };
 
-interface Point {
-  readonly x: number;
-  readonly y: number;
+/** The newest points and the sizes of the newest steps, relative to x. One record: a search leaves no litter behind. */
+interface Trail {
+  points: number; // how many of the three are known
+  x2: number; // the newest
+  y2: number;
+  x1: number;
+  y1: number;
+  x0: number;
+  y0: number;
+  steps: number; // how many of the three sizes are known; 1 stands for each other
+  size2: number; // the newest
+  size1: number;
+  size0: number;
 }
 
 const MOST_EVALUATIONS = 200; // bisection alone needs about 60
@@ -45,70 +55,90 @@ const NOISE = 4 * Number.EPSILON;
 const STRAIGHT = 2;
 
 /** Finds the root, to the last few bits of a double. Throws a defect when f answers with no number. */
-export function root(search: Search): Root {
-  const { lower, upper, slope } = search;
+export function root({ f, lower, upper, start, slope }: Search): Root {
   let below: number | undefined; // the largest x at which f has been found negative
   let above: number | undefined; // the smallest x at which it has not
   let evaluations = 0;
-  const evaluate = (x: number): Point => {
-    const y = search.f(x);
+  let x = start;
+  const trail: Trail = { points: 0, x2: 0, y2: 0, x1: 0, y1: 0, x0: 0, y0: 0, steps: 0, size2: 1, size1: 1, size0: 1 };
+  while (evaluations < MOST_EVALUATIONS) {
+    const y = valueAt(f, x);
     evaluations += 1;
-    if (!Number.isFinite(y)) throw new Error(`root: expected a number at ${x}, got ${y}`);
+    if (y === 0) return { found: true, x, evaluations };
     if (y < 0) below = x;
     else above = x;
-    return { x, y };
-  };
-  const found = (x: number): Root => ({ found: true, x, evaluations });
-  let x = search.start;
-  let past: Point[] = []; // newest first
-  let sizes: number[] = []; // relative sizes of the steps from them
-  while (evaluations < MOST_EVALUATIONS) {
-    const point = evaluate(x);
-    if (point.y === 0) return found(x);
-    past = [point, ...past].slice(0, 3);
-    const next = x + step(past, slope);
-    sizes = [Math.abs(next - x) / Math.abs(next || 1), ...sizes].slice(0, 3);
-    const straight = isStraight(past, slope);
-    if (straight && isSettled(sizes)) return found(next);
+    addPoint(trail, x, y);
+    const next = x + step(trail, slope);
+    addSize(trail, Math.abs(next - x) / Math.abs(next || 1));
+    const straight = isStraight(trail, slope);
+    if (straight && isSettled(trail)) return { found: true, x: next, evaluations };
     if (straight && next > (below ?? lower) && next < (above ?? upper)) {
       x = next;
       continue;
     }
-    const side = point.y < 0 ? 'above' : 'below'; // where the root lies from here
+    const side = y < 0 ? 'above' : 'below'; // where the root lies from here
     const end = side === 'above' ? upper : lower;
-    if ((side === 'above' ? above : below) === undefined && (x === end || evaluate(end).y < 0 === point.y < 0))
-      return { found: false, side, lower, upper, evaluations };
+    if ((side === 'above' ? above : below) === undefined) {
+      const negative = x === end ? y < 0 : valueAt(f, end) < 0;
+      if (x !== end) evaluations += 1;
+      if (negative === y < 0) return { found: false, side, lower, upper, evaluations };
+      if (negative) below = end;
+      else above = end;
+    }
     const [a, b] = [below ?? lower, above ?? upper];
-    if (b - a <= NOISE * Math.abs(b)) return found(b);
+    if (b - a <= NOISE * Math.abs(b)) return { found: true, x: b, evaluations };
     x = a + (b - a) / 2;
-    past = [];
-    sizes = [];
+    forget(trail);
   }
   return { found: false, side: 'unsettled', lower: below ?? lower, upper: above ?? upper, evaluations };
 }
 
-const isSettled = (sizes: readonly number[]): boolean => {
-  const left = sizes.reduce((product, size) => product * size, 1);
-  return (sizes[0] ?? 1) <= NOISE || (sizes.length > 1 && left <= SETTLED);
-};
+function valueAt(f: (x: number) => number, x: number): number {
+  const y = f(x);
+  if (Number.isFinite(y)) return y;
+  throw new Error(`root: expected a number at ${x}, got ${y}`);
+}
+
+function addPoint(trail: Trail, x: number, y: number): void {
+  trail.x0 = trail.x1;
+  trail.y0 = trail.y1;
+  trail.x1 = trail.x2;
+  trail.y1 = trail.y2;
+  trail.x2 = x;
+  trail.y2 = y;
+  if (trail.points < 3) trail.points += 1;
+}
+
+function addSize(trail: Trail, size: number): void {
+  trail.size0 = trail.size1;
+  trail.size1 = trail.size2;
+  trail.size2 = size;
+  if (trail.steps < 3) trail.steps += 1;
+}
+
+function forget(trail: Trail): void {
+  trail.points = 0;
+  trail.steps = 0;
+  trail.size2 = 1;
+  trail.size1 = 1;
+}
+
+const isSettled = ({ steps, size2, size1, size0 }: Trail): boolean =>
+  size2 <= NOISE || (steps > 1 && size2 * size1 * size0 <= SETTLED);
 
 /** The step from the newest point: Newton, secant or inverse quadratic, by how many points there are. */
-function step([p2, p1, p0]: readonly Point[], slope: number): number {
-  if (p2 === undefined) return 0;
-  if (p1 === undefined || p2.y === p1.y) return -p2.y / slope;
-  const r = run(p2, p1);
-  if (p0 === undefined || p1.y === p0.y || p2.y === p0.y) return -p2.y * r;
-  const q = run(p1, p0);
-  return -p2.y * (r - (p1.y * (r - q)) / (p2.y - p0.y)); // Newton's form of the inverse parabola, at y = 0
+function step({ points, x2, y2, x1, y1, x0, y0 }: Trail, slope: number): number {
+  if (points < 2 || y2 === y1) return -y2 / slope;
+  const r = (x2 - x1) / (y2 - y1);
+  if (points < 3 || y1 === y0 || y2 === y0) return -y2 * r;
+  const q = (x1 - x0) / (y1 - y0);
+  return -y2 * (r - (y1 * (r - q)) / (y2 - y0)); // Newton's form of the inverse parabola, at y = 0
 }
 
 /** Whether the newest two slopes agree: a small step on a curve that has just bent says nothing of the root. */
-function isStraight([p2, p1, p0]: readonly Point[], slope: number): boolean {
-  if (p2 === undefined || p1 === undefined) return true;
-  const newest = run(p2, p1);
-  const before = p0 === undefined ? 1 / slope : run(p1, p0);
+function isStraight({ points, x2, y2, x1, y1, x0, y0 }: Trail, slope: number): boolean {
+  if (points < 2) return true;
+  const newest = (x2 - x1) / (y2 - y1); // inverse slopes
+  const before = points < 3 ? 1 / slope : (x1 - x0) / (y1 - y0);
   return newest > before / STRAIGHT && newest < before * STRAIGHT;
 }
-
-/** Inverse slope between two points. */
-const run = (one: Point, other: Point): number => (one.x - other.x) / (one.y - other.y);

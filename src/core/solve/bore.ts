@@ -7,7 +7,7 @@ import type { FluidState } from '../fluid/contract.ts';
 import { root } from '../numeric/root.ts';
 import type { Length, MassFlow, PressureDifference } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
-import { expansibilityOf, geometryOf, heldAt, heldDischarge, type Operation, reynoldsOf } from './equation.ts';
+import { expansibilityOf, geometryOf, heldDischarge, type Operation, reynoldsOf, withHeld } from './equation.ts';
 
 export interface Bore {
   readonly geometry: Geometry; // at the line temperature
@@ -65,14 +65,7 @@ export function boreFrom(
     });
   }
   const { geometry, held, coefficient, epsilon } = factors(ratioOf(found.x));
-  const operation = {
-    massFlow,
-    differential,
-    coefficient,
-    epsilon,
-    reynolds,
-    ...heldAt(held, reynolds),
-    evaluations: found.evaluations,
-  };
+  const { evaluations } = found;
+  const operation = withHeld(held, { massFlow, differential, coefficient, epsilon, reynolds, evaluations });
   return ok({ geometry, operation });
 }

@@ -9,12 +9,12 @@ import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import {
   expansibilityOf,
   exponentOf,
-  heldAt,
   heldDischarge,
   idealFlow,
   type Meter,
   type Operation,
   reynoldsOf,
+  withHeld,
 } from './equation.ts';
 
 /** p2/p1 >= 0.75: ISO 5167-2:2022, 5.3.2.2, and its sister clauses. */
@@ -38,26 +38,23 @@ export function differentialFrom(
   const coefficient = held.at(reynolds);
   const unit = coefficient * idealFlow(geometry, 1, state.density); // q_m at 1 Pa without expansion
   const a3 = (massFlow / unit) ** 2 / state.pressure; // Annex A, A3 over p1: x eps2
-  const common = { massFlow, coefficient, reynolds, ...heldAt(held, reynolds) };
+  const answer = (x: number, epsilon: number, evaluations: number): Outcome<Operation> => {
+    const differential = (x * state.pressure) as PressureDifference;
+    return ok(withHeld(held, { massFlow, differential, coefficient, epsilon, reynolds, evaluations }));
+  };
   if (!state.expands) {
     if (a3 >= 1)
       return fail('differential-exceeds-pressure', field, {
         differential: a3 * state.pressure,
         pressure: state.pressure,
       });
-    return ok({ ...common, differential: (a3 * state.pressure) as PressureDifference, epsilon: 1, evaluations: 0 });
+    return answer(a3, 1, 0);
   }
   const most = Math.min(Math.max(MOST_EXPANSION, spanned / state.pressure), STILL_RISING);
   const epsilonAt = expansibilityOf(primary, geometry.ratio, state);
   const found = expansionFrom(a3, most, typicalFall(geometry.ratio) / exponentOf(state), epsilonAt);
   if (!found.found) return fail('differential-too-large', field, { pressure: state.pressure, percent: 100 * most });
-  const x = found.x;
-  return ok({
-    ...common,
-    differential: (x * state.pressure) as PressureDifference,
-    epsilon: Math.sqrt(a3 / x), // at the root x eps2 = A3, so that eps needs no further evaluation
-    evaluations: found.evaluations,
-  });
+  return answer(found.x, Math.sqrt(a3 / found.x), found.evaluations); // at the root x eps2 = A3: eps is known
 }
 
 /**

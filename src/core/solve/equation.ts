@@ -60,4 +60,6 @@ export const exponentOf = ({ isentropicExponent }: FluidState): number => {
   throw new Error('solve: expected an isentropic exponent for a fluid that expands, got none');
 };
 
-export const heldAt = (held: Held, reynolds: number) => (reynolds < held.floor ? { heldAt: held.floor } : {});
+/** The operation, with the Reynolds number at which C was held where it was. A plain record is far quicker than a spread. */
+export const withHeld = (held: Held, operation: Operation): Operation =>
+  operation.reynolds < held.floor ? { ...operation, heldAt: held.floor } : operation;

@@ -7,12 +7,12 @@ import type { MassFlow, PressureDifference } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import {
   expansibilityOf,
-  heldAt,
   heldDischarge,
   idealFlow,
   type Meter,
   type Operation,
   reynoldsOf,
+  withHeld,
 } from './equation.ts';
 
 const LEAST_COEFFICIENT = 1e-3;
@@ -38,14 +38,8 @@ export function flowFrom(differential: PressureDifference, { primary, geometry, 
     slope: 1,
   });
   if (!found.found) return fail('flow-unsettled', 'differential', { lower: found.lower, upper: found.upper });
-  const coefficient = found.x;
-  return ok({
-    massFlow: (coefficient * ideal) as MassFlow,
-    differential,
-    coefficient,
-    epsilon,
-    reynolds: a1 * coefficient,
-    ...heldAt(held, a1 * coefficient),
-    evaluations: found.evaluations,
-  });
+  const { x: coefficient, evaluations } = found;
+  const massFlow = (coefficient * ideal) as MassFlow;
+  const reynolds = a1 * coefficient;
+  return ok(withHeld(held, { massFlow, differential, coefficient, epsilon, reynolds, evaluations }));
 }
