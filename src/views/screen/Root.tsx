@@ -1,13 +1,11 @@
 /** The screen: header, list of meters, and the place the address names. */
-import { type ComponentType, Suspense, useState } from 'react';
-import type { Project } from '../../core/document/project.ts';
-import type { Results } from '../../core/result/record.ts';
+import { Suspense, useState } from 'react';
 import type { Commands } from '../../state/commands.ts';
 import type { WorkbenchStore } from '../../state/workbench.ts';
 import { Boundary } from './Boundary.tsx';
 import { BindingProvider, useWorkbench } from './binding.tsx';
 import { usePlace } from './place.ts';
-import { SheetPlace } from './SheetPlace.tsx';
+import { SheetPlace, type SheetsView } from './SheetPlace.tsx';
 import { Size } from './Size.tsx';
 import { DialogHost } from './shell/DialogHost.tsx';
 import { DropZone } from './shell/DropZone.tsx';
@@ -19,11 +17,6 @@ import { MeterList } from './shell/MeterList.tsx';
 import { startTheme } from './theme.ts';
 import './tokens.css';
 import styles from './Root.module.css';
-
-export type Paper = 'A4' | 'Letter';
-
-/** The printed sheets; app hands them in, the screen only gives them their place. */
-export type SheetsView = ComponentType<{ readonly project: Project; readonly results: Results; readonly paper: Paper }>;
 
 interface Props {
   readonly store: WorkbenchStore;

@@ -1,8 +1,14 @@
 /** The sheets as they will be printed, with the choice of paper. */
-import { useState } from 'react';
+import { type ComponentType, useState } from 'react';
+import type { Project } from '../../core/document/project.ts';
+import type { Results } from '../../core/result/record.ts';
 import { useCommands, useWorkbench } from './binding.tsx';
-import type { Paper, SheetsView } from './Root.tsx';
 import styles from './SheetPlace.module.css';
+
+export type Paper = 'A4' | 'Letter';
+
+/** The printed sheets; app hands them in, the screen only gives them their place. */
+export type SheetsView = ComponentType<{ readonly project: Project; readonly results: Results; readonly paper: Paper }>;
 
 const PAPERS: readonly Paper[] = ['A4', 'Letter'];
 

@@ -32,10 +32,10 @@ function Opened({ row }: { readonly row: WorkingRow }) {
     <div className={styles.opened}>
       {row.formula && <MathExpression symbol={row.symbol} equals={row.formula} />}
       {row.substituted && <MathExpression symbol={row.symbol} equals={row.substituted} />}
-      <p className={styles.result}>
+      <div className={styles.result}>
         <MathExpression symbol={row.symbol} />
         <b>= {row.value.text}</b>
-      </p>
+      </div>
       {row.given.length > 0 && (
         <dl className={styles.given}>
           {row.given.map(({ id, symbol, label, value }) => (
