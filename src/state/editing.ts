@@ -4,7 +4,7 @@ import { writeAt } from './edit.ts';
 import type { Steps } from './steps.ts';
 import type { Workbench, WorkbenchActions } from './workbench.ts';
 
-type Editing = Pick<WorkbenchActions, 'write' | 'writeProject' | 'setDisplay' | 'settle'>;
+type Editing = Pick<WorkbenchActions, 'write' | 'writeAll' | 'writeProject' | 'setDisplay' | 'settle'>;
 
 /** What carries an edit through: the store, the steps of undo, and how to take the last step back out of history. */
 export interface Hands {
@@ -26,6 +26,14 @@ export function editing(hands: Hands): Editing {
       if (selected < 0) return;
       const next = withValue(project, selected, path, value);
       edit(hands, `${keys[selected]} ${path}`, next);
+    },
+    writeAll: (values) => {
+      const { project, selected } = hands.get();
+      if (selected < 0) return;
+      hands.steps.end();
+      const next = values.reduce((made, [path, value]) => withValue(made, selected, path, value), project);
+      edit(hands, 'several', next);
+      hands.steps.end();
     },
     writeProject,
     setDisplay: (display) => {

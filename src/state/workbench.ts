@@ -54,6 +54,8 @@ export interface WorkbenchState {
 export interface WorkbenchActions {
   /** Writes one value of the selected meter; `path` has dots ('upstream.pressure'); undefined or '' removes the key. Edits of one field in a row are one step of undo. */
   write(path: string, value: unknown): void;
+  /** Writes several values of the selected meter as one step of undo that stands by itself. */
+  writeAll(values: readonly (readonly [path: string, value: unknown])[]): void;
   /** Ends the current step of undo (on blur or Enter). */
   settle(): void;
   writeProject(path: string, value: unknown): void; // title, revision, site.atmosphere, ...

@@ -81,6 +81,21 @@ describe('undo', () => {
     expect(at().canRedo).toBe(false);
   });
 
+  test('several values written together are one step that stands by itself', () => {
+    at().write('pipe.bore', '1');
+    at().writeAll([
+      ['pipe.bore', '2 mm'],
+      ['find', 'flow'],
+    ]);
+    at().write('pipe.bore', '3 mm');
+    at().undo();
+    expect(at().project.meters[0]).toMatchObject({ pipe: { bore: '2 mm' }, find: 'flow' });
+    at().undo();
+    expect(at().project.meters[0]).toMatchObject({ pipe: { bore: '1' } });
+    at().undo();
+    expect(at().project).toBe(project);
+  });
+
   test('settling, selecting and undoing end the step', () => {
     at().write('service', 'a');
     at().settle();

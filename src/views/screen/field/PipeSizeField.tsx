@@ -13,15 +13,16 @@ const SHOWN = 60; // more than anyone reads; the search narrows it
 export function PipeSizeField() {
   const size = useMeterText('pipe.size');
   const write = useWorkbench((state) => state.write);
-  const settle = useWorkbench((state) => state.settle);
+  const writeAll = useWorkbench((state) => state.writeAll);
   const [query, setQuery] = useState<string>();
   const listId = useId();
   const found = query === undefined ? [] : searchPipeSizes(query === size ? '' : query).slice(0, SHOWN);
 
   const pick = (chosen: PipeSize): void => {
-    write('pipe.size', chosen.name);
-    write('pipe.bore', `${chosen.bore} mm`);
-    settle();
+    writeAll([
+      ['pipe.size', chosen.name],
+      ['pipe.bore', `${chosen.bore} mm`],
+    ]);
     setQuery(undefined);
   };
   const picker = usePicker(found, pick, (open) => setQuery(open ? size : undefined));

@@ -55,8 +55,8 @@ export function foundText(unknown: Unknown, solved: Solved, written: string, dis
   return `${number} ${target.symbol}`;
 }
 
-/** Makes `unknown` the question of the selected meter, as one step of undo for each field it writes. */
-export function turnTo(unknown: Unknown, { project, results, selected, write, settle }: Workbench): void {
+/** Makes `unknown` the question of the selected meter, as one step of undo. */
+export function turnTo(unknown: Unknown, { project, results, selected, writeAll }: Workbench): void {
   const meter = project.meters[selected];
   const result = results.results[selected];
   const formerly = unknownOf(meter?.find);
@@ -64,9 +64,7 @@ export function turnTo(unknown: Unknown, { project, results, selected, write, se
   const path = FIELD_OF[formerly];
   const text =
     result?.status === 'solved' ? foundText(formerly, result, textAt(meter, path), project.display ?? 'SI') : undefined;
-  if (text !== undefined) write(path, text);
-  write('find', unknown);
-  settle();
+  writeAll([...(text === undefined ? [] : [[path, text] as const]), ['find', unknown]]);
 }
 
 /**

@@ -34,11 +34,12 @@ export function Downstream() {
         label="Straight after"
         note={sizing && <StraightNeed sizing={sizing} side="downstream" />}
       />
-      <Fold title="Uncertainty of the inputs">
+      <Fold title="How sure, how steady">
         <QuantityField path="uncertainty.bore" label="Bore, ±" />
         <QuantityField path="uncertainty.pipe" label="Pipe bore, ±" />
         <QuantityField path="uncertainty.differential" label="Differential, ±" />
         <QuantityField path="uncertainty.density" label="Density, ±" />
+        <QuantityField path="installation.fluctuation" label="Fluctuation, rms" />
       </Fold>
     </Station>
   );
