@@ -3,7 +3,7 @@ import type { Solved } from '../../core/result/record.ts';
 import { sectionWords } from '../words/sheet.ts';
 import { figuresOf } from './answer.ts';
 import type { Context } from './context.ts';
-import type { PresentedSizing, Value } from './model.ts';
+import type { DimensionRow, PresentedSizing, Value } from './model.ts';
 
 export interface SectionText {
   readonly caption: string;
@@ -17,7 +17,8 @@ export interface SectionText {
   readonly bore: string;
 }
 
-const usualTemperature = 293.15; // K; 20 degC, the default of the file format
+/** The rows of the element that settle a dimension of the standard. */
+const settled: readonly string[] = ['plate-thickness', 'plate-thickness-edge'];
 
 export function sectionText(at: Context, result: Solved, sizing: PresentedSizing): SectionText {
   const { flow, scale, edge } = sectionWords;
@@ -26,7 +27,7 @@ export function sectionText(at: Context, result: Solved, sizing: PresentedSizing
   const inUnit = (value: Value): string => (value.unit === unit ? value.number : at.value(value.si, 'bore').number);
   const pipe = at.given(at.meter.pipe?.bore, ['length'], result.pipeAsMeasured_m, 'bore');
   return {
-    caption: sectionWords.caption(unit, temperatureOf(at)),
+    caption: sectionWords.caption(unit, measuredText(sizing)),
     title: sectionWords.title(sizing.element),
     description: sizing.answer.map(({ text }) => text).join(''),
     flow,
@@ -37,14 +38,18 @@ export function sectionText(at: Context, result: Solved, sizing: PresentedSizing
   };
 }
 
-/** Where the diameters were measured: 'at 20 °C', or each part apart. */
-function temperatureOf(at: Context): string {
-  const { pipe, element } = at.meter;
-  const of = (metal: { material?: string; measuredAt?: string } | undefined): string =>
-    metal?.material === undefined
-      ? sectionWords.asMeasured
-      : at.given(metal.measuredAt, ['temperature'], usualTemperature, 'temperature').text;
-  const [first, second] = [of(pipe), of(element)];
-  if (first !== second) return sectionWords.apartAt(first, second);
-  return first === sectionWords.asMeasured ? first : sectionWords.bothAt(first);
+/** The dimensions as they are drawn: what the user has settled instead of the range that the standard leaves. */
+export function drawnDimensions(at: Context, { dimensions, metal }: PresentedSizing): readonly DimensionRow[] {
+  const unit = at.units.bore;
+  return dimensions.map((dimension) => {
+    const own = settled.includes(dimension.id) ? metal.find(({ id }) => id === dimension.id)?.value : undefined;
+    if (own === undefined) return dimension;
+    return { ...dimension, text: own.unit === unit.print ? own.text : at.value(own.si, 'bore').text, nominal: own.si };
+  });
+}
+
+/** How the diameters were measured, once where pipe and element agree. */
+function measuredText({ pipe, metal }: PresentedSizing): string {
+  const [first = '', second = ''] = [pipe, metal].map((rows) => rows.find(({ note }) => note !== undefined)?.note);
+  return first === second ? sectionWords.both(first) : sectionWords.apart(first, second);
 }

@@ -1,101 +1,92 @@
-/** The tables of a sheet: fluid, pipe, element, the flows, and what makes their uncertainty. */
-import type { DutyName, Project } from '../../core/document/project.ts';
-import type { Solved } from '../../core/result/record.ts';
+/** The tables of a sheet: what makes the uncertainty, the checks, dimensions and straight pipe. */
+import type { UncertaintyText } from '../../core/document/project.ts';
 import * as words from '../words/sheet.ts';
-import type { Context } from './context.ts';
-import type { DutyColumn, DutyRow, PresentedSizing } from './model.ts';
-import { type KeyOf, type SheetRow, sheetRow } from './sources.ts';
-
-export interface DutyTable {
-  readonly columns: readonly {
-    readonly id: DutyColumn;
-    readonly label: string;
-    readonly symbol: string;
-    readonly unit: string; // '' where the rows have none or different ones
-    readonly key: string;
-  }[];
-  readonly rows: readonly { readonly name: DutyName; readonly label: string; readonly cells: readonly string[] }[];
-}
+import type { Assumption, DutyRow, PresentedSizing, Verdict } from './model.ts';
+import type { KeyOf } from './sources.ts';
 
 export interface TermTable {
-  readonly flows: readonly string[];
+  readonly terms: readonly string[];
   readonly rows: readonly { readonly label: string; readonly cells: readonly string[] }[];
 }
 
-const columns = Object.keys(words.dutyHeads) as DutyColumn[];
-const standardAtmosphere = 101_325; // Pa; the default of the file format
-
-/** The fluid and its state; a gauge pressure is followed by the absolute one and the atmosphere it stands on. */
-export function fluidRows(
-  at: Context,
-  { site, base }: Project,
-  result: Solved,
-  { fluid, state }: PresentedSizing,
-  keyOf: KeyOf,
-): readonly SheetRow[] {
-  const rows = state.map((row) => sheetRow(row, keyOf));
-  const [pressure, ...others] = rows;
-  const atmosphere = at.given(site?.atmosphere, ['absolute pressure'], standardAtmosphere, 'pressure').text;
-  const absolute = at.value(result.state.pressure_Pa, 'pressure').text;
-  const name = fluid.phase === fluid.name.toLowerCase() ? fluid.name : `${fluid.name}, ${fluid.phase}`;
-  const pressures = pressure === undefined ? [] : [pressure];
-  const below: readonly SheetRow[] = pressure?.text.endsWith('(g)')
-    ? [{ id: 'absolute', label: words.absolutePressure, text: absolute, key: '', note: words.atAtmosphere(atmosphere) }]
-    : [];
-  const stated = (text: unknown, measure: 'absolute pressure' | 'temperature', si: number): string =>
-    at.given(text, [measure], si, measure === 'temperature' ? 'temperature' : 'pressure').text;
-  const atBase = words.atBase(
-    stated(base?.pressure, 'absolute pressure', standardAtmosphere),
-    stated(base?.temperature, 'temperature', 288.15),
-  );
-  return [
-    { id: 'fluid', label: words.fluidRow, text: name, key: '' },
-    ...pressures,
-    ...below,
-    ...others.map((row) => (row.id === 'baseDensity' ? { ...row, note: atBase } : row)),
-  ];
+export interface CheckBlock {
+  readonly assumption: Assumption;
+  readonly title: string;
+  readonly verdict: Verdict;
+  readonly rows: readonly {
+    readonly key: string;
+    readonly text: string;
+    readonly limit: string;
+    readonly source: string;
+    readonly verdict: Verdict;
+    readonly verdictWord: string;
+  }[];
 }
 
-export const pipeSheetRows = ({ pipe }: PresentedSizing, keyOf: KeyOf): readonly SheetRow[] =>
-  pipe.map((row) => sheetRow(row, keyOf));
-
-export function elementRows(at: Context, result: Solved, { metal }: PresentedSizing, keyOf: KeyOf): readonly SheetRow[] {
-  const span = at.given(at.meter.differential, ['pressure difference'], result.span_Pa, 'differential');
-  return [
-    ...metal.map((row) => sheetRow(row, keyOf)),
-    { id: 'span', label: words.spanRow, text: span.text, key: '' },
-  ];
+export interface FigureRow {
+  readonly id: string;
+  readonly label: string;
+  readonly symbol?: string;
+  readonly cells: readonly string[];
+  readonly key: string; // number of the source
+  readonly note?: string;
+  readonly chosen: boolean;
 }
 
-/** The flows with one unit a column; the sources are those of the working at maximum flow. */
-export function dutyTable({ duty, working }: PresentedSizing, keyOf: KeyOf): DutyTable {
-  const lines = working.find(({ id }) => id === 'maximum')?.rows ?? [];
-  const heads = columns.map((id) => {
-    const line = lines.find((row) => row.id === words.dutyWorking[id]);
-    return { id, ...words.dutyHeads[id], unit: unitOf(duty, id), key: keyOf(line?.cited) };
-  });
-  const cell = (row: DutyRow, { id, unit }: (typeof heads)[number]): string =>
-    id === 'uncertainty' ? `±${row.cells[id].text}` : unit === '' ? row.cells[id].text : row.cells[id].number;
+/**
+ * What the user stated of each term, then a row a flow: the terms in the order of the first flow, and the whole. What
+ * was not stated, and a term that is nothing at a flow, has a dash.
+ */
+export function termTable({ duty }: PresentedSizing, written: UncertaintyText | undefined): TermTable {
+  const terms = new Map(duty.flatMap((row) => row.terms.map(({ id, label }) => [id, label] as const)));
+  const cell = (row: DutyRow, id: string): string => row.terms.find((term) => term.id === id)?.value.text ?? words.dash;
+  const stated = (id: string): string => {
+    const text = written?.[id];
+    return typeof text === 'string' && text !== '' ? text.replace(/ (?=%)/, '\u00a0') : words.dash;
+  };
   return {
-    columns: heads.map((head) => (head.id === 'uncertainty' ? { ...head, unit: '95 %' } : head)),
-    rows: duty.map((row) => ({ name: row.name, label: row.label, cells: heads.map((head) => cell(row, head)) })),
+    terms: [...terms.values(), words.whole],
+    rows: [
+      { label: words.stated, cells: [...[...terms.keys()].map(stated), words.dash] },
+      ...duty.map((row) => ({
+        label: words.flowAt(row.name),
+        cells: [...[...terms.keys()].map((id) => cell(row, id)), row.cells.uncertainty.text],
+      })),
+    ],
   };
 }
 
-/** The one unit of a column; '' where its rows have none or are written in different ones. */
-function unitOf(rows: readonly DutyRow[], column: DutyColumn): string {
-  const [first, ...more] = new Set(rows.map((row) => row.cells[column].unit));
-  return first === undefined || more.length > 0 ? '' : first;
-}
+export const checkBlocks = ({ checks }: PresentedSizing, keyOf: KeyOf): readonly CheckBlock[] =>
+  checks.map(({ assumption, title, verdict, rows }) => ({
+    assumption,
+    title,
+    verdict,
+    rows: rows.map(({ key, text, limit, cited, verdict: own, verdictWord }) => ({
+      key,
+      text,
+      limit,
+      source: keyOf(cited),
+      verdict: own,
+      verdictWord,
+    })),
+  }));
 
-/** Terms in the order of the first flow; a term that is nothing at a flow has a dash. */
-export function termTable({ duty }: PresentedSizing): TermTable {
-  const labels = [...new Set(duty.flatMap(({ terms }) => terms.map(({ label }) => label)))];
-  const cells = (label: string): readonly string[] =>
-    duty.map(({ terms }) => terms.find((term) => term.label === label)?.value.text ?? '–');
-  const whole = { label: words.total, cells: duty.map((row) => row.cells.uncertainty.text) };
-  return {
-    flows: duty.map(({ name }) => words.flowAt(name)),
-    rows: [...labels.map((label) => ({ label, cells: cells(label) })), whole],
-  };
-}
+export const dimensionFigures = ({ dimensions }: PresentedSizing, keyOf: KeyOf): readonly FigureRow[] =>
+  dimensions.map(({ id, label, symbol, text, cited }) => ({
+    id,
+    label,
+    ...(symbol === undefined ? {} : { symbol }),
+    cells: [text],
+    key: keyOf(cited),
+    chosen: false,
+  }));
+
+export const straightFigures = ({ straight }: PresentedSizing, keyOf: KeyOf): readonly FigureRow[] =>
+  straight.map(({ fitting, side, label, full, reduced, chosen, cited, note }) => ({
+    id: `${side} ${fitting}`,
+    label,
+    cells: [full, reduced],
+    key: keyOf(cited),
+    ...(note === undefined ? {} : { note }),
+    chosen,
+  }));

@@ -2,14 +2,24 @@
 import type { MeterText, Project } from '../../core/document/project.ts';
 import type { MeterResult, Results, Solved } from '../../core/result/record.ts';
 import { cautions } from '../words/cautions.ts';
+import { openingWord } from '../words/elements.ts';
 import { fieldLabel } from '../words/fields.ts';
 import { computedWith, notCurrent } from '../words/sheet.ts';
 import { contextOf } from './context.ts';
 import { inputsHash } from './hash.ts';
 import { presentMeter } from './meter.ts';
-import type { PresentedMeter, PresentedSizing } from './model.ts';
-import { type SectionText, sectionText } from './sheet-section.ts';
-import { type DutyTable, dutyTable, elementRows, fluidRows, pipeSheetRows, type TermTable, termTable } from './sheet-tables.ts';
+import type { DimensionRow, PresentedMeter, PresentedSizing } from './model.ts';
+import { type DutyTable, dutyTable, elementRows, fluidRows, pipeSheetRows, spanText } from './sheet-figures.ts';
+import { drawnDimensions, type SectionText, sectionText } from './sheet-section.ts';
+import {
+  type CheckBlock,
+  checkBlocks,
+  dimensionFigures,
+  type FigureRow,
+  straightFigures,
+  type TermTable,
+  termTable,
+} from './sheet-tables.ts';
 import { numbering, type SheetRow, type SourceLine } from './sources.ts';
 import { version } from './version.ts';
 
@@ -52,11 +62,17 @@ export interface SizingSheet {
   readonly meter: PresentedSizing;
   readonly answer: string;
   readonly section: SectionText;
+  readonly drawn: readonly DimensionRow[];
   readonly fluid: readonly SheetRow[];
   readonly pipe: readonly SheetRow[];
   readonly element: readonly SheetRow[];
+  readonly span: string; // 'span of the differential 250 mbar'
+  readonly opening: string; // 'bore' or 'throat'
   readonly duty: DutyTable;
   readonly terms: TermTable;
+  readonly checks: readonly CheckBlock[];
+  readonly dimensions: readonly FigureRow[];
+  readonly straight: readonly FigureRow[];
   readonly sources: readonly SourceLine[];
 }
 
@@ -112,11 +128,17 @@ function sizingSheet(
     meter: presented,
     answer: presented.answer.map(({ text }) => text).join(''),
     section: sectionText(at, result, presented),
+    drawn: drawnDimensions(at, presented),
     fluid: fluidRows(at, project, result, presented, sources.keyOf),
-    element: elementRows(at, result, presented, sources.keyOf),
+    element: elementRows(presented, sources.keyOf),
+    span: spanText(at, result),
     pipe: pipeSheetRows(presented, sources.keyOf),
+    opening: openingWord(result.element),
     duty: dutyTable(presented, sources.keyOf),
-    terms: termTable(presented),
+    terms: termTable(presented, meter.uncertainty),
+    checks: checkBlocks(presented, sources.keyOf),
+    dimensions: dimensionFigures(presented, sources.keyOf),
+    straight: straightFigures(presented, sources.keyOf),
     sources: sources.list(),
   };
 }

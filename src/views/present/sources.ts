@@ -25,18 +25,18 @@ export interface Numbering {
 }
 
 export function numbering(): Numbering {
-  const clauses: string[] = [];
-  const marks: string[] = [];
-  const keyAt = (place: number): string => `[${place + 1}]${marks[place] ?? ''}`;
+  const sources: { readonly clause: string; readonly marks: Set<string> }[] = [];
+  const number = (place: number): string => `[${place + 1}]`;
   return {
     keyOf: (cited) => {
       if (cited === undefined) return '';
-      const known = clauses.indexOf(cited.clause);
-      if (known >= 0) return keyAt(known);
-      marks.push(cited.mark);
-      return keyAt(clauses.push(cited.clause) - 1);
+      const known = sources.findIndex(({ clause }) => clause === cited.clause);
+      const place = known < 0 ? sources.push({ clause: cited.clause, marks: new Set() }) - 1 : known;
+      sources[place]?.marks.add(cited.mark);
+      return `${number(place)}${cited.mark}`;
     },
-    list: () => clauses.map((clause, place) => ({ key: keyAt(place), clause })),
+    list: () =>
+      sources.map(({ clause, marks }, place) => ({ key: number(place), clause: `${clause}${[...marks].join('')}` })),
   };
 }
 

@@ -3,7 +3,8 @@ import type { DutyName } from '../../core/document/project.ts';
 
 export const sheetWords = {
   documentType: 'Sizing sheet',
-  checksSheet: 'Checks, tolerances and sources',
+  checksSheet: 'Checks and sources',
+  dimensionsSheet: 'Dimensions and pipework',
   workingSheet: 'Working',
   drawing: 'Section',
   fluid: 'Fluid upstream',
@@ -14,10 +15,11 @@ export const sheetWords = {
   verdicts: 'Checks by assumption',
   checks: 'Checks',
   terms: 'Uncertainty of the flow by its terms, 95 %',
-  dimensions: 'Dimensions and tolerances at the line temperature',
+  dimensions: 'Dimensions and tolerances',
   straight: 'Straight pipe',
   sources: 'Sources',
   cautions: 'Cautions',
+  workingHead: (tag: string): string => `${tag}: figure and equation`,
   problems: 'Not solved',
   refused: 'This meter has no result. What stands in the way:',
   inputs: 'Inputs as written',
@@ -42,7 +44,7 @@ export const titleBlock = {
   status: 'Status',
 } as const;
 
-export const sheetOf = (sheet: number, sheets: number): string => `${sheet} of ${sheets}`;
+export const sheetOf = ({ sheet, of }: { readonly sheet: number; readonly of: number }): string => `${sheet} of ${of}`;
 
 /** Heads of the columns at each flow, with the symbol that stands in a formula. */
 export const dutyHeads = {
@@ -69,31 +71,29 @@ export const dutyWorking = {
 } as const;
 
 export const flowAt = (name: DutyName): string => `${name} flow`;
-export const total = 'Flow';
+export const whole = 'Whole';
 export const fluidRow = 'Fluid';
-export const absolutePressure = 'Pressure upstream, absolute';
-export const atAtmosphere = (pressure: string): string => `atmosphere ${pressure}`;
+export const absolutePressure = 'the same, absolute';
+export const atAtmosphere = (pressure: string): string => `over ${pressure}`;
 export const atBase = (pressure: string, temperature: string): string => `${pressure}, ${temperature}`;
-export const spanRow = 'Differential of the span';
+export const spanOf = (differential: string): string => `span of the differential ${differential}`;
 export const standardRow = 'Standard';
 export const kindRow = 'Kind';
 
 export const computedWith = (version: string, inputs: string): string =>
   `computed with Headwright ${version}, inputs ${inputs}`;
 export const notCurrent = 'Not current: the inputs have changed since these figures were computed. Do not use.';
-export const unitsNote = (length: string): string =>
-  `Bar(g) and psi(g) are above the stated atmosphere, (a) is absolute. Dimensions in ${length}. Figures in brackets name a source.`;
+export const unitsNote =
+  '(a) absolute, (g) above the stated atmosphere. [n] names a source, listed with the checks. Uncertainties: expanded, 95 %.';
 
 export const sectionWords = {
   title: (element: string): string => `Section of the ${element.charAt(0).toLowerCase()}${element.slice(1)}`,
   flow: 'flow',
   scale: 'scale',
   edge: 'edge',
-  caption: (unit: string, temperature: string): string =>
-    `dimensions in ${unit}; diameters as measured, ${temperature}`,
-  asMeasured: 'no thermal growth',
-  bothAt: (temperature: string): string => `at ${temperature}`,
-  apartAt: (pipe: string, opening: string): string => `pipe at ${pipe}, element at ${opening}`,
+  caption: (unit: string, measured: string): string => `dimensions in ${unit === 'in' ? 'inches' : unit}; ${measured}`,
+  both: (note: string): string => `diameters: ${note}`,
+  apart: (pipe: string, element: string): string => `pipe: ${pipe}; element: ${element}`,
 } as const;
 
 export const checkHeads = {
@@ -101,10 +101,10 @@ export const checkHeads = {
   check: 'Check',
   limit: 'Limit',
   verdict: 'Verdict',
-  clause: 'Source',
+  source: 'Source',
 };
-export const straightHeads = { fitting: 'Fitting', full: 'Needed', reduced: 'Adds 0.5 %', side: 'Side' };
-export const sides = { upstream: 'before', downstream: 'after' } as const;
+/** The full length, and the shorter one that adds half a percent to the uncertainty of the coefficient. */
+export const straightHeads = { fitting: 'Nearest fitting', full: 'full', reduced: '+0.5 % on C' };
 
 export const chartWords = {
   title: 'Flow against differential',
@@ -116,5 +116,29 @@ export const chartWords = {
   band: 'Band: expanded uncertainty, 95 %.',
 } as const;
 
+/** State of all checks, at the head of a sheet. */
+export const checksAre = (verdict: string): string => `Checks: ${verdict}`;
 /** '3 checks' */
 export const checkCount = (count: number): string => (count === 1 ? '1 check' : `${count} checks`);
+/** A finding that is not inside, in one sentence. */
+export const exceptionText = (text: string, limit: string): string =>
+  limit === '' ? `${text}.` : `${text}; limit: ${limit}.`;
+export const moreExceptions = (count: number): string => `${count} more, listed with the checks.`;
+
+/** What is written by hand when the part is received and fitted. */
+export const inspection = {
+  title: 'Inspection, to be filled in',
+  bore: (opening: string): string => `${opening === 'throat' ? 'Throat' : 'Bore'}, four diameters and their mean`,
+  pipe: 'Pipe bore, four diameters and their mean',
+  others: [
+    'Temperature and instrument',
+    'Edge and faces examined',
+    'Flatness or profile',
+    'Centred after fitting, upstream side marked',
+    'By, date',
+  ],
+} as const;
+
+export const stated = 'as stated';
+export const atCoverage = ', 95 %';
+export const dash = '–';

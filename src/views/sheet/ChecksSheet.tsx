@@ -1,0 +1,100 @@
+/** Every check with its limit, the terms of the uncertainty, and the sources that the sheets of this meter name. */
+import type { SizingSheet } from '../present/sheet.ts';
+import type { CheckBlock, TermTable } from '../present/sheet-tables.ts';
+import type { SourceLine } from '../present/sources.ts';
+import { checkHeads, checksAre, sheetWords } from '../words/sheet.ts';
+import { Block } from './Block.tsx';
+import styles from './content.module.css';
+import { Notes } from './Notes.tsx';
+import { Page, type Place } from './Page.tsx';
+import tables from './table.module.css';
+
+export function ChecksSheet({ sheet, place }: { readonly sheet: SizingSheet; readonly place: Place }) {
+  const { head, meter, checks, terms, sources } = sheet;
+  return (
+    <Page head={head} type={sheetWords.checksSheet} verdict={checksAre(meter.verdict.words)} place={place}>
+      <Checks blocks={checks} />
+      <Terms table={terms} />
+      <Sources lines={sources} />
+      <Notes lines={meter.notes} />
+    </Page>
+  );
+}
+
+function Checks({ blocks }: { readonly blocks: readonly CheckBlock[] }) {
+  return (
+    <Block title={sheetWords.checks}>
+      <table className={`${tables.table} ${tables.checks}`}>
+        <thead>
+          <tr>
+            {Object.values(checkHeads).map((head) => (
+              <th key={head} scope="col">
+                {head}
+              </th>
+            ))}
+          </tr>
+        </thead>
+        {blocks.map(({ assumption, title, rows }) => (
+          <tbody key={assumption}>
+            {rows.map(({ key, text, limit, source, verdict, verdictWord }, at) => (
+              <tr key={key}>
+                {at === 0 && (
+                  <th scope="rowgroup" rowSpan={rows.length}>
+                    {title}
+                  </th>
+                )}
+                <td>{text}</td>
+                <td>{limit}</td>
+                <td className={verdict === 'inside' ? undefined : tables.loud}>{verdictWord}</td>
+                <td>{source}</td>
+              </tr>
+            ))}
+          </tbody>
+        ))}
+      </table>
+    </Block>
+  );
+}
+
+function Terms({ table: { terms, rows } }: { readonly table: TermTable }) {
+  return (
+    <Block title={sheetWords.terms}>
+      <table className={tables.table}>
+        <thead>
+          <tr>
+            <td />
+            {terms.map((term) => (
+              <th key={term} scope="col">
+                {term}
+              </th>
+            ))}
+          </tr>
+        </thead>
+        <tbody>
+          {rows.map(({ label, cells }) => (
+            <tr key={label}>
+              <th scope="row">{label}</th>
+              {cells.map((cell, at) => (
+                <td key={terms[at]}>{cell}</td>
+              ))}
+            </tr>
+          ))}
+        </tbody>
+      </table>
+    </Block>
+  );
+}
+
+function Sources({ lines }: { readonly lines: readonly SourceLine[] }) {
+  return (
+    <Block title={sheetWords.sources}>
+      <ol className={styles.sources}>
+        {lines.map(({ key, clause }) => (
+          <li key={key}>
+            {key} {clause}
+          </li>
+        ))}
+      </ol>
+    </Block>
+  );
+}
