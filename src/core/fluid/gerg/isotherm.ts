@@ -1,0 +1,96 @@
+/**
+ * GERG-2008 along one isotherm of one mixture: the powers of temperature are formed once, and a pressure costs a
+ * polynomial for each shape of exponential.
+ * Standard: ISO 20765-2:2015 (GERG-2008). Symbols: δ = ρ/ρ_r, τ = T_r/T; SI, densities in mol/m3.
+ */
+import { type Mixture, R } from './mixture.ts';
+import { highestPower, type Shape, shapes, slotPlace, slotPower } from './terms.ts';
+
+/** A mixture at one temperature. */
+export interface Isotherm {
+  readonly mixture: Mixture;
+  readonly T: number; // K
+  readonly tau: number;
+  readonly RT: number; // J/mol
+  /** Σ n τ^t of each shape and power of δ. */
+  readonly coefficients: Float64Array;
+}
+
+export const isothermOf = (mixture: Mixture, T: number): Isotherm => {
+  const tau = mixture.Tr / T;
+  return { mixture, T, tau, RT: R * T, coefficients: coefficientsOf(mixture, tau, 0) };
+};
+
+/** Coefficients of α_r (order 0), of τ ∂α_r/∂τ (order 1) or of τ² ∂²α_r/∂τ² (order 2). */
+export function coefficientsOf({ slots, factors }: Mixture, tau: number, order: 0 | 1 | 2): Float64Array {
+  const logarithm = Math.log(tau);
+  const coefficients = new Float64Array(shapes.length * highestPower);
+  let t = 0;
+  let power = 1;
+  for (let k = 0; k < slots.length; k++) {
+    const slot = slots[k] as number;
+    const own = slotPower[slot] as number;
+    if (own !== t) {
+      t = own;
+      power = Math.exp(t * logarithm);
+    }
+    const lowered = order === 0 ? 1 : order === 1 ? t : t * (t - 1);
+    const place = slotPlace[slot] as number;
+    coefficients[place] = (coefficients[place] as number) + (factors[k] as number) * lowered * power;
+  }
+  return coefficients;
+}
+
+/** α, δ ∂α/∂δ and δ² ∂²α/∂δ² of a table of coefficients at δ. */
+export interface Expanded {
+  readonly a: number;
+  readonly a1: number;
+  readonly a2: number;
+}
+
+/** Sums a table of coefficients: for each shape exp(h) Σ A_d δ^d with u = δ h' and v = δ² h''. */
+export function expand(used: Int32Array, coefficients: Float64Array, delta: number): Expanded {
+  let [a, a1, a2] = [0, 0, 0];
+  for (let k = 0; k < used.length; k++) {
+    const number = used[k] as number;
+    const { order, eta, epsilon, beta, gamma } = shapes[number] as Shape;
+    let [P, P1, P2] = [0, 0, 0]; // Σ A_d δ^d, Σ d A_d δ^d, Σ d (d-1) A_d δ^d
+    for (let column = number * highestPower + highestPower - 1; column >= number * highestPower; column--) {
+      P2 = P2 * delta + P1;
+      P1 = P1 * delta + P;
+      P = P * delta + (coefficients[column] as number);
+    }
+    P2 = 2 * delta * delta * (P2 * delta + P1); // the table starts at δ^1: one more step with a coefficient 0
+    P1 = delta * (P1 * delta + P);
+    P *= delta;
+    let [h, u, v] = [0, 0, 0];
+    if (order > 0) {
+      h = -raised(delta, order);
+      u = order * h;
+      v = (order - 1) * u;
+    } else {
+      const away = delta - epsilon;
+      h = -eta * away * away - beta * (delta - gamma);
+      u = -delta * (2 * eta * away + beta);
+      v = -2 * eta * delta * delta;
+    }
+    const g = h === 0 ? 1 : Math.exp(h);
+    a += g * P;
+    a1 += g * (P1 + u * P);
+    a2 += g * (P2 + 2 * u * P1 + (u * u + v) * P);
+  }
+  return { a, a1, a2 };
+}
+
+function raised(delta: number, order: number): number {
+  let power = delta;
+  for (let k = 1; k < order; k++) power *= delta;
+  return power;
+}
+
+/** Pressure and its slope with the molar density: p = ρ R T (1 + α_01), ∂p/∂ρ = R T (1 + 2 α_01 + α_02). Pa, J/mol. */
+export function pressureAt(isotherm: Isotherm, rho: number): { readonly p: number; readonly slope: number } {
+  const { mixture, RT, coefficients } = isotherm;
+  const { a1, a2 } = expand(mixture.shapes, coefficients, rho / mixture.rhoR);
+  return { p: rho * RT * (1 + a1), slope: RT * (1 + 2 * a1 + a2) };
+}
