@@ -8,6 +8,16 @@ import type { Working } from '../quantity/working.ts';
 
 export type Phase = 'liquid' | 'vapour' | 'supercritical' | 'gas';
 
+/** A limit of the fluid's own formulation that the state leaves. Checks turn it into a finding with the same id. */
+export interface Caution {
+  readonly id: string;
+  readonly verdict: 'caution' | 'outside';
+  readonly value: number;
+  readonly unit: string;
+  readonly limit: { readonly min?: number; readonly max?: number };
+  readonly source: Source;
+}
+
 export interface FluidState {
   readonly pressure: AbsolutePressure;
   readonly temperature: Temperature;
@@ -27,6 +37,12 @@ export interface FluidState {
   readonly saturationTemperature?: Temperature;
   /** Density at the project's base state; absent where the fluid has none there (steam). */
   readonly baseDensity?: Density;
+  /** Mass fraction of vapour where both phases stand side by side; the density is that of the mixture. */
+  readonly quality?: number;
+  /** Figures that the user put in place of the model's, by the names of `sources`. */
+  readonly overridden?: readonly (keyof FluidState['sources'])[];
+  /** Where the model answers outside its range or on a custom of the trade; each becomes a finding. */
+  readonly cautions?: readonly Caution[];
   /** True where the phase was settled by the user against the state or within tolerance of saturation. */
   readonly phaseForced?: boolean;
   /** The formulation of each figure. */

@@ -1,7 +1,7 @@
 /** What a fluid model is: a kind of the document's fluid, its own fields, and the state it makes of what they say. */
 import type { AbsolutePressure, Temperature } from '../quantity/kinds.ts';
 import type { Measure } from '../quantity/measure.ts';
-import type { Outcome } from '../quantity/outcome.ts';
+import { fail, gather, type Outcome, ok } from '../quantity/outcome.ts';
 import type { FluidState } from './contract.ts';
 
 /** A field of the model in the document's fluid. A quantity may be stated in each of its measures. */
@@ -13,7 +13,26 @@ export type FluidField =
       readonly required: boolean;
     }
   | { readonly name: string; readonly type: 'choice'; readonly choices: readonly string[]; readonly required: boolean }
-  | { readonly name: string; readonly type: 'number'; readonly required: boolean };
+  | { readonly name: string; readonly type: 'number'; readonly required: boolean }
+  /** A share from 0 to 1, as '30 %' or as a plain number. */
+  | { readonly name: string; readonly type: 'share'; readonly required: boolean }
+  /** One of a long list of names, in any case and with blanks or hyphens; `names` holds every spelling and its key. */
+  | {
+      readonly name: string;
+      readonly type: 'name';
+      readonly names: ReadonlyMap<string, string>;
+      readonly required: false;
+    }
+  /** A list of rows, each with a quantity in every column. */
+  | {
+      readonly name: string;
+      readonly type: 'rows';
+      readonly columns: readonly { readonly name: string; readonly measures: readonly [Measure, ...Measure[]] }[];
+      readonly required: boolean;
+    };
+
+/** One row of a list, by column. */
+export type Row = Readonly<Record<string, Amount>>;
 
 /** A quantity as read: SI, above zero, a pressure always absolute. */
 export interface Amount {
@@ -26,6 +45,7 @@ export interface Parsed {
   readonly quantities: Readonly<Partial<Record<string, Amount>>>;
   readonly numbers: Readonly<Partial<Record<string, number>>>;
   readonly choices: Readonly<Partial<Record<string, string>>>;
+  readonly rows: Readonly<Partial<Record<string, readonly Row[]>>>;
 }
 
 export interface State {
@@ -36,16 +56,31 @@ export interface State {
 /** The state at the upstream tapping, the project's base state, and where a problem with either is to be shown. */
 export interface Conditions extends State {
   readonly base: State;
-  readonly paths: {
-    readonly pressure: string;
-    readonly temperature: string;
-    /** Path of one of the model's own fields. */
-    readonly own: (name: string) => string;
-  };
+  readonly paths: Paths;
+}
+
+export interface Paths {
+  readonly pressure: string;
+  readonly temperature: string;
+  /** Path of one of the model's own fields. */
+  readonly own: (name: string) => string;
 }
 
 export interface FluidModel {
   readonly kind: string;
   readonly fields: readonly FluidField[];
+  /**
+   * Finds pressure and temperature where the fluid itself ties one to the other and one or none was given. A model
+   * without it needs both.
+   */
+  readonly complete?: (parsed: Parsed, known: Partial<State>, paths: Paths) => Outcome<State>;
   readonly state: (parsed: Parsed, conditions: Conditions) => Outcome<FluidState>;
+}
+
+/** Pressure and temperature where both must be given. Problem field-missing for each that is not. */
+export function bothOf({ pressure, temperature }: Partial<State>, paths: Paths): Outcome<State> {
+  if (pressure !== undefined && temperature !== undefined) return ok({ pressure, temperature });
+  const missing = (value: number | undefined, path: string) =>
+    value === undefined ? fail('field-missing', path) : ok(value);
+  return gather(missing(pressure, paths.pressure), missing(temperature, paths.temperature));
 }

@@ -40,7 +40,8 @@ export interface MeterInput {
   readonly tag: string;
   readonly find: Unknown;
   readonly fluid: FluidText;
-  readonly upstream: { readonly pressure: AbsolutePressure; readonly temperature: Temperature };
+  /** What was written; some fluids find one from the other. The fluid's state has both. */
+  readonly upstream: { readonly pressure?: AbsolutePressure; readonly temperature?: Temperature };
   readonly pipe: MetalInput & { readonly roughness?: Length };
   readonly element: Partial<MetalInput> & {
     readonly measuredAt: Temperature;
@@ -68,7 +69,7 @@ export function readMeter(
   const form = openForm(meter);
   const find = form.choice('find', UNKNOWNS, true);
   const pressure = readPressure(form, site);
-  const temperature = form.positive('upstream.temperature', ['temperature'], true);
+  const temperature = form.positive('upstream.temperature', ['temperature']);
   const pipe = readMetal(form, 'pipe', materials, true);
   const element = readMetal(form, 'element', materials, find !== 'bore');
   const roughness = form.positive('pipe.roughness', ['length']);
@@ -81,7 +82,7 @@ export function readMeter(
     find === 'differential' ? undefined : form.positive('differential', ['pressure difference'], find !== undefined);
   const uncertainty = readUncertainty(form);
   const installation = readInstallation(form, pipe?.bore);
-  if (form.problems.length > 0 || !(find && pressure && temperature && pipe?.bore && element)) {
+  if (form.problems.length > 0 || !(find && pipe?.bore && element)) {
     return { ok: false, problems: form.problems as [Problem, ...Problem[]] };
   }
   return {
@@ -90,7 +91,7 @@ export function readMeter(
       tag: meter.tag ?? '',
       find,
       fluid: meter.fluid ?? {},
-      upstream: { pressure, temperature: temperature.si as Temperature },
+      upstream: { ...given('pressure', pressure), ...given('temperature', temperature?.si as Temperature | undefined) },
       pipe: { ...pipe, bore: pipe.bore, ...given('roughness', roughness?.si as Length | undefined) },
       element: {
         ...(find === 'bore' ? without(element, 'bore') : element),
@@ -110,7 +111,7 @@ export function readMeter(
 
 /** Absolute as written, or gauge above the site's atmosphere. */
 function readPressure(form: Form, site: Site): AbsolutePressure | undefined {
-  const pressure = form.quantity('upstream.pressure', ['absolute pressure', 'gauge pressure'], true);
+  const pressure = form.quantity('upstream.pressure', ['absolute pressure', 'gauge pressure']);
   if (pressure === undefined) return undefined;
   const absolute = pressure.unit.measure === 'gauge pressure' ? pressure.si + site.atmosphere : pressure.si;
   if (absolute > 0) return absolute as AbsolutePressure;

@@ -57,7 +57,7 @@ export function assemble(parts: Parts): Solved {
     dimensions: primary.dimensions(geometry),
     tappings: { upstream_m: tappings.upstream, downstream_m: tappings.downstream },
     straightLengths: straight.lengths,
-    working: [...state.working, ...metalWorking(input, solution.boreAsMeasured)],
+    working: [...state.working, ...metalWorking(input, solution.boreAsMeasured, state.temperature)],
     unread: UNREAD.filter((key) => written[key] !== undefined),
   } as const satisfies Omit<Solved, 'sources'>;
   return { ...solved, sources: sourcesOf(solved, parts.budgets) };

@@ -23,16 +23,14 @@ const moved = (length: Length, metal: Metal, from: Temperature, to: Temperature)
 };
 
 /** Pipe and bore at the line temperature. Problem bore-not-below-pipe: no element has a bore as wide as its pipe. */
-export function hotGeometry(bore: Length, input: MeterInput): Outcome<Geometry> {
-  const line = input.upstream.temperature;
+export function hotGeometry(bore: Length, input: MeterInput, line: Temperature): Outcome<Geometry> {
   const geometry = geometryOf(atLine(input.pipe.bore, input.pipe, line), atLine(bore, input.element, line));
   if (geometry.ratio < 1) return ok(geometry);
   return fail('bore-not-below-pipe', 'element.bore', { bore, pipe: input.pipe.bore });
 }
 
 /** How pipe and bore grew; a metal without a material has no line here. */
-export function metalWorking(input: MeterInput, bore: Length): readonly Working[] {
-  const line = input.upstream.temperature;
+export function metalWorking(input: MeterInput, bore: Length, line: Temperature): readonly Working[] {
   const rows = [
     { symbol: 'D', words: 'pipe-bore', length: input.pipe.bore, metal: input.pipe },
     { symbol: 'd', words: 'element-bore', length: bore, metal: input.element },

@@ -47,7 +47,7 @@ interface First {
 function solveUnknown(input: MeterInput, primary: Primary, state: FluidState): Outcome<First> {
   if (input.find === 'bore') return findBore(input, primary, state);
   const bore = known(input.element.bore, 'element.bore');
-  const geometry = hotGeometry(bore, input);
+  const geometry = hotGeometry(bore, input, state.temperature);
   if (!geometry.ok) return geometry;
   const meter: Meter = { primary, geometry: geometry.value, state };
   const maximum =
@@ -60,7 +60,7 @@ function solveUnknown(input: MeterInput, primary: Primary, state: FluidState): O
 function findBore(input: MeterInput, primary: Primary, state: FluidState): Outcome<First> {
   const massFlow = massFlowOf(known(input.duty.maximum, 'duty.maximum'), state, 'duty.maximum');
   if (!massFlow.ok) return massFlow;
-  const line = input.upstream.temperature;
+  const line = state.temperature;
   const pipe = atLine(input.pipe.bore, input.pipe, line);
   const found = boreFrom(massFlow.value, known(input.differential, 'differential'), pipe, primary, state);
   if (!found.ok) return found;
