@@ -2,6 +2,7 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { subjects as element } from './subjects/element.ts';
+import { subjects as gasViscosity } from './subjects/gas-viscosity.ts';
 import { subjects as solve } from './subjects/solve.ts';
 import { subjects as units } from './subjects/units.ts';
 import { subjects as water } from './subjects/water.ts';
@@ -46,6 +47,7 @@ const ROUNDING = 4 * Number.EPSILON;
 
 const subjects: Readonly<Record<string, (given: Given) => Record<string, number>>> = {
   ...element,
+  ...gasViscosity,
   ...solve,
   ...units,
   ...water,
