@@ -2,6 +2,7 @@
 import type { MeterText, Project } from '../../core/document/project.ts';
 import type { MeterResult, PointRecord, Refused, Results, Solved } from '../../core/result/record.ts';
 import { contextOf } from '../present/context.ts';
+import { inputsHash } from '../present/hash.ts';
 import { findingText } from '../words/findings.ts';
 import type { Print } from '../words/print.ts';
 import { type Problem, problemSentence } from '../words/problems.ts';
@@ -19,8 +20,9 @@ export function resultsOf(project: Project, results: Results, asked: Asked): obj
     format: 'headwright-results',
     version: 1,
     results: results.results.map((result, index) => {
-      const { print } = contextOf(project.meters[index] ?? none, project);
-      return meterOf(result, print, asked);
+      const meter = project.meters[index] ?? none;
+      const { print } = contextOf(meter, project);
+      return { ...meterOf(result, print, asked), inputs: inputsHash(meter, project) };
     }),
     traverses: results.traverses.map((traverse) => refusedOf(traverse, contextOf(none, project).print)),
   };

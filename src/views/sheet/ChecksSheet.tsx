@@ -6,7 +6,8 @@ import { checkHeads, checksAre, sheetWords } from '../words/sheet.ts';
 import { Block } from './Block.tsx';
 import styles from './content.module.css';
 import { Notes } from './Notes.tsx';
-import { Page, type Place } from './Page.tsx';
+import { Page } from './Page.tsx';
+import type { Place } from './paper.ts';
 import tables from './table.module.css';
 
 export function ChecksSheet({ sheet, place }: { readonly sheet: SizingSheet; readonly place: Place }) {

@@ -4,7 +4,8 @@ import { checksAre, inspection, sheetWords, straightHeads } from '../words/sheet
 import { Block } from './Block.tsx';
 import styles from './content.module.css';
 import { Figures } from './Figures.tsx';
-import { Page, type Place } from './Page.tsx';
+import { Page } from './Page.tsx';
+import type { Place } from './paper.ts';
 import tables from './table.module.css';
 
 export function DimensionsSheet({ sheet, place }: { readonly sheet: SizingSheet; readonly place: Place }) {

@@ -3,13 +3,8 @@ import { type ReactNode, use } from 'react';
 import type { SheetHead } from '../present/sheet.ts';
 import { sheetOf } from '../words/sheet.ts';
 import styles from './Page.module.css';
-import { SheetContext } from './paper.ts';
+import { type Place, SheetContext } from './paper.ts';
 import { TitleBlock } from './TitleBlock.tsx';
-
-export interface Place {
-  readonly sheet: number;
-  readonly of: number;
-}
 
 interface PageProps {
   readonly place: Place;

@@ -7,7 +7,8 @@ import { Block } from './Block.tsx';
 import styles from './content.module.css';
 import { DutyTable } from './DutyTable.tsx';
 import { Notes } from './Notes.tsx';
-import { Page, type Place } from './Page.tsx';
+import { Page } from './Page.tsx';
+import type { Place } from './paper.ts';
 import { Rows } from './Rows.tsx';
 import { Standing } from './Standing.tsx';
 

@@ -2,8 +2,7 @@
 import { use } from 'react';
 import type { SheetHead } from '../present/sheet.ts';
 import { sheetOf, titleBlock as words } from '../words/sheet.ts';
-import type { Place } from './Page.tsx';
-import { SheetContext } from './paper.ts';
+import { type Place, SheetContext } from './paper.ts';
 import styles from './TitleBlock.module.css';
 
 interface TitleBlockProps {

@@ -3,7 +3,8 @@ import type { WorkingGroup, WorkingRow } from '../present/model.ts';
 import type { SizingSheet } from '../present/sheet.ts';
 import { checkHeads, checksAre, sheetWords } from '../words/sheet.ts';
 import { Formula } from './Formula.tsx';
-import { Page, type Place } from './Page.tsx';
+import { Page } from './Page.tsx';
+import type { Place } from './paper.ts';
 import styles from './working.module.css';
 
 export function WorkingSheet({

@@ -1,7 +1,13 @@
-/** The paper of the sheets and the day they are printed, for every page. */
+/** The paper of the sheets, the day they are printed, and the place of each, for every page. */
 import { createContext } from 'react';
 
 export type Paper = 'A4' | 'Letter';
+
+/** Where a page stands among the sheets of its meter, from 1. */
+export interface Place {
+  readonly sheet: number;
+  readonly of: number;
+}
 
 export const SheetContext = createContext<{ readonly paper: Paper; readonly printedOn: string }>({
   paper: 'A4',

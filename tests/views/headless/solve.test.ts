@@ -46,6 +46,7 @@ describe('exit and output', () => {
         message: expect.stringMatching(/^The differential pressure .+\. .+\.$/),
       },
       problems: [expect.objectContaining({ code: 'unit-missing' })],
+      inputs: expect.stringMatching(/^[0-9a-f]{12}$/),
     });
   });
   it.each([
@@ -82,6 +83,7 @@ describe('the results', () => {
     'points',
     'checks',
     'unread',
+    'inputs',
   ];
   it.each(meters.map((meter) => [meter.tag ?? '', meter] as const))(
     '%s: keys in order, every leaf sound',
