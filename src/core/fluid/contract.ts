@@ -18,6 +18,12 @@ export interface Caution {
   readonly source: Source;
 }
 
+/** Expanded relative uncertainty of a figure at 95 %, as its formulation states it. */
+export interface StatedUncertainty {
+  readonly share: number; // 0.001 is 0.1 %
+  readonly source: Source;
+}
+
 export interface FluidState {
   readonly pressure: AbsolutePressure;
   readonly temperature: Temperature;
@@ -45,6 +51,12 @@ export interface FluidState {
   readonly cautions?: readonly Caution[];
   /** True where the phase was settled by the user against the state or within tolerance of saturation. */
   readonly phaseForced?: boolean;
+  /** Uncertainties that the formulations state, where they state one. */
+  readonly uncertainties?: {
+    readonly density?: StatedUncertainty;
+    readonly viscosity?: StatedUncertainty;
+    readonly speedOfSound?: StatedUncertainty;
+  };
   /** The formulation of each figure. */
   readonly sources: {
     readonly density: Source;

@@ -29,7 +29,17 @@ export type FluidField =
       readonly type: 'rows';
       readonly columns: readonly { readonly name: string; readonly measures: readonly [Measure, ...Measure[]] }[];
       readonly required: boolean;
-    };
+    }
+  /** A group of names with a share of 1 each, as '94 %' or as a plain number; which names it knows the model says. */
+  | { readonly name: string; readonly type: 'fractions'; readonly required: boolean }
+  /** True or false; absent is false. */
+  | { readonly name: string; readonly type: 'flag' };
+
+/** One line of a group of shares. */
+export interface Fraction {
+  readonly name: string;
+  readonly value: number;
+}
 
 /** One row of a list, by column. */
 export type Row = Readonly<Record<string, Amount>>;
@@ -46,6 +56,8 @@ export interface Parsed {
   readonly numbers: Readonly<Partial<Record<string, number>>>;
   readonly choices: Readonly<Partial<Record<string, string>>>;
   readonly rows: Readonly<Partial<Record<string, readonly Row[]>>>;
+  readonly fractions: Readonly<Partial<Record<string, readonly Fraction[]>>>;
+  readonly flags: Readonly<Partial<Record<string, boolean>>>;
 }
 
 export interface State {

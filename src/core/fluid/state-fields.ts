@@ -1,10 +1,10 @@
 /** Reads the fields of a fluid model from the document, and answers with all that is wrong in them at once. */
-import { at, type Form, openForm } from '../input/form.ts';
+import { at, type Form, openForm, readNumber } from '../input/form.ts';
 import type { AbsolutePressure } from '../quantity/kinds.ts';
 import type { Measure } from '../quantity/measure.ts';
 import { type Outcome, ok, type Problem } from '../quantity/outcome.ts';
 import { readQuantity } from '../quantity/text.ts';
-import type { Amount, FluidField, Parsed, Row } from './model.ts';
+import type { Amount, FluidField, Fraction, Parsed, Row } from './model.ts';
 
 /** A list longer than this is no table of a fluid. */
 const MOST_ROWS = 500;
@@ -67,6 +67,38 @@ const readRows: Reader<'rows', readonly Row[]> = (form, { name, columns, require
   });
 };
 
+/** A group of names, each with a share; an empty share counts as not written. Any name is taken here. */
+const readFractions: Reader<'fractions', readonly Fraction[]> = (form, { name, required }) => {
+  const written = at(form.group, name);
+  if (written === undefined) return required ? form.report('field-missing', name) : undefined;
+  if (typeof written !== 'object' || written === null || Array.isArray(written))
+    return form.report('group-expected', name, { written: Array.isArray(written) ? 'a list' : typeof written });
+  const entries = Object.entries(written).filter(([, share]) => share !== '' && share !== undefined);
+  if (entries.length === 0) return required ? form.report('field-missing', name) : undefined;
+  if (entries.length > MOST_ROWS)
+    return form.report('table-too-long', name, { count: entries.length, most: MOST_ROWS });
+  return entries.flatMap(([own, share]) => {
+    const read = fraction(share, `${name}.${own.slice(0, 40)}`);
+    if (read.ok) return [{ name: own, value: read.value }];
+    form.problems.push(...read.problems);
+    return [];
+  });
+};
+
+/** '94 %' or a plain number, of any size and sign. */
+function fraction(written: unknown, path: string): Outcome<number> {
+  if (typeof written !== 'string' || !/%\s*$|ppm\s*$/.test(written)) return readNumber(written, path);
+  const share = readQuantity(written, ['share'], path);
+  return share.ok ? ok(share.value.si) : share;
+}
+
+const readFlag: Reader<'flag', boolean> = (form, { name }) => {
+  const written = at(form.group, name);
+  if (typeof written === 'boolean') return written;
+  const word = form.choice(name, ['true', 'false']);
+  return word === undefined ? undefined : word === 'true';
+};
+
 /** Reads every field of a model. `path` is where the fluid stands in the document. */
 export function parseFields(
   fluid: object,
@@ -79,16 +111,21 @@ export function parseFields(
   const numbers: Record<string, number> = {};
   const choices: Record<string, string> = {};
   const rows: Record<string, readonly Row[]> = {};
+  const fractions: Record<string, readonly Fraction[]> = {};
+  const flags: Record<string, boolean> = {};
   for (const field of fields) {
     if (field.type === 'quantity') put(quantities, field.name, readAmount(form, field, atmosphere));
     else if (field.type === 'number') put(numbers, field.name, form.number(field.name, field.required));
     else if (field.type === 'share') put(numbers, field.name, readShare(form, field, atmosphere));
     else if (field.type === 'name') put(choices, field.name, readName(form, field, atmosphere));
     else if (field.type === 'rows') put(rows, field.name, readRows(form, field, atmosphere));
+    else if (field.type === 'fractions') put(fractions, field.name, readFractions(form, field, atmosphere));
+    else if (field.type === 'flag') put(flags, field.name, readFlag(form, field, atmosphere));
     else put(choices, field.name, form.choice(field.name, field.choices, field.required));
   }
   const [first, ...rest] = form.problems.map((problem): Problem => ({ ...problem, field: `${path}.${problem.field}` }));
-  return first === undefined ? ok({ quantities, numbers, choices, rows }) : { ok: false, problems: [first, ...rest] };
+  const parsed = { quantities, numbers, choices, rows, fractions, flags };
+  return first === undefined ? ok(parsed) : { ok: false, problems: [first, ...rest] };
 }
 
 function put<Value>(into: Record<string, Value>, name: string, value: Value | undefined): void {
