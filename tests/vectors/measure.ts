@@ -2,6 +2,7 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { subjects as element } from './subjects/element.ts';
+import { subjects as gas } from './subjects/gas.ts';
 import { subjects as gasViscosity } from './subjects/gas-viscosity.ts';
 import { subjects as solve } from './subjects/solve.ts';
 import { subjects as units } from './subjects/units.ts';
@@ -11,6 +12,8 @@ type Given = Record<string, number | string>;
 interface Tolerance {
   readonly rel?: number;
   readonly abs?: number;
+  /** Half a unit of this significant digit of the expected figure. */
+  readonly digits?: number;
   readonly why: string;
 }
 export interface VectorFile {
@@ -47,6 +50,7 @@ const ROUNDING = 4 * Number.EPSILON;
 
 const subjects: Readonly<Record<string, (given: Given) => Record<string, number>>> = {
   ...element,
+  ...gas,
   ...gasViscosity,
   ...solve,
   ...units,
@@ -69,6 +73,10 @@ export function vectorFiles(): readonly { readonly path: string; readonly file: 
   );
 }
 
+/** Half a unit of the last of so many significant digits. */
+const halfUnit = (size: number, digits?: number): number =>
+  digits === undefined || size === 0 ? 0 : 0.5 * 10 ** (Math.floor(Math.log10(size)) + 1 - digits);
+
 /** Every expected figure of every case of one file, compared. */
 export function compareAll({ path, file }: { readonly path: string; readonly file: VectorFile }): Compared[] {
   const subject = subjects[file.subject];
@@ -80,7 +88,9 @@ export function compareAll({ path, file }: { readonly path: string; readonly fil
       const tolerance = file.tolerance[field];
       if (got === undefined || tolerance === undefined)
         throw new Error(`${path}, ${name}: expected an answer and a tolerance for ${field}`);
-      const allowed = (tolerance.abs ?? 0) + (tolerance.rel ?? 0) * Math.abs(expected) + ROUNDING * Math.abs(expected);
+      const size = Math.abs(expected);
+      const allowed =
+        (tolerance.abs ?? 0) + ((tolerance.rel ?? 0) + ROUNDING) * size + halfUnit(size, tolerance.digits);
       const error = Math.abs(got - expected);
       return {
         path,

@@ -19,10 +19,12 @@ const most = (values: readonly number[]): number => values.reduce((one, other) =
 
 /** A tolerance as `5e-9` or `±5e-7`; several fields of one file may differ. */
 const tolerances = ({ tolerance }: VectorFile): string => {
-  const texts = Object.values(tolerance).map(({ rel, abs }) =>
-    [...(abs === undefined ? [] : [`±${abs}`]), ...(rel === undefined ? [] : [rel === 0 ? 'exact' : `${rel}`])].join(
-      ' + ',
-    ),
+  const texts = Object.values(tolerance).map(({ rel, abs, digits }) =>
+    [
+      ...(digits === undefined ? [] : [`${digits} digits`]),
+      ...(abs === undefined ? [] : [`±${abs}`]),
+      ...(rel === undefined ? [] : [rel === 0 ? 'exact' : `${rel}`]),
+    ].join(' + '),
   );
   return [...new Set(texts)].join(', ');
 };
@@ -52,7 +54,7 @@ const row = (entry: { readonly path: string; readonly file: VectorFile }): strin
   const compared = all.filter((one) => !isMiss(one));
   const { file } = entry;
   const left = all.length - compared.length;
-  const figures = `${compared.length}${left > 0 ? ` (and ${left} misprint)` : ''}`;
+  const figures = `${compared.length}${left > 0 ? ` (and ${left} known to miss)` : ''}`;
   const relative = roundedUp(most(compared.map((one) => one.relative)));
   const cells = [file.source, file.subject.replaceAll('-', ' '), ORIGINS[file.origin], figures, tolerances(file)];
   return `| ${[...cells, shareOf(compared), relative].join(' | ')} |`;
