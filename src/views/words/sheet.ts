@@ -1,12 +1,12 @@
 /** Words of the printed sheet. */
 import type { DutyName } from '../../core/document/project.ts';
+import { noGrowth } from './rows.ts';
 
 export const sheetWords = {
   documentType: 'Sizing sheet',
   checksSheet: 'Checks and sources',
   dimensionsSheet: 'Dimensions and pipework',
   workingSheet: 'Working',
-  drawing: 'Section',
   fluid: 'Fluid upstream',
   pipe: 'Pipe',
   element: 'Element',
@@ -18,7 +18,6 @@ export const sheetWords = {
   dimensions: 'Dimensions and tolerances',
   straight: 'Straight pipe',
   sources: 'Sources',
-  cautions: 'Cautions',
   workingHead: (tag: string): string => `${tag}: figure and equation`,
   problems: 'Not solved',
   refused: 'This meter has no result. What stands in the way:',
@@ -36,7 +35,6 @@ export const titleBlock = {
   prepared: 'Prepared',
   checked: 'Checked',
   approved: 'Approved',
-  name: 'Name',
   date: 'Date',
   signature: 'Signature',
   issued: 'Date of issue',
@@ -77,8 +75,6 @@ export const absolutePressure = 'the same, absolute';
 export const atAtmosphere = (pressure: string): string => `over ${pressure}`;
 export const atBase = (pressure: string, temperature: string): string => `${pressure}, ${temperature}`;
 export const spanOf = (differential: string): string => `span of the differential ${differential}`;
-export const standardRow = 'Standard';
-export const kindRow = 'Kind';
 
 export const computedWith = (version: string, inputs: string): string =>
   `computed with Headwright ${version}, inputs ${inputs}`;
@@ -86,14 +82,16 @@ export const notCurrent = 'Not current: the inputs have changed since these figu
 export const unitsNote =
   '(a) absolute, (g) above the stated atmosphere. [n] names a source, listed with the checks. Uncertainties: expanded, 95 %.';
 
+const measured = (note: string): string => (note === noGrowth ? 'as given, no thermal growth' : note);
+
 export const sectionWords = {
   title: (element: string): string => `Section of the ${element.charAt(0).toLowerCase()}${element.slice(1)}`,
   flow: 'flow',
   scale: 'scale',
   edge: 'edge',
   caption: (unit: string, measured: string): string => `dimensions in ${unit === 'in' ? 'inches' : unit}; ${measured}`,
-  both: (note: string): string => `diameters: ${note}`,
-  apart: (pipe: string, element: string): string => `pipe: ${pipe}; element: ${element}`,
+  both: (note: string): string => `diameters ${measured(note)}`,
+  apart: (pipe: string, element: string): string => `pipe bore ${measured(pipe)}, element ${measured(element)}`,
 } as const;
 
 export const checkHeads = {
