@@ -4,6 +4,7 @@
  */
 import type { DynamicViscosity, Temperature } from '../../quantity/kinds.ts';
 import type { Source } from '../../quantity/source.ts';
+import type { Caution } from '../contract.ts';
 import { critical } from '../cubic/critical.table.ts';
 import { components } from '../gerg/components.table.ts';
 import { rows } from './components.table.ts';
@@ -86,4 +87,11 @@ const TRACE = 0.01;
 function overlap(shares: readonly Share[]): ViscosityBasis['temperatures'] {
   const counted = shares.filter(({ x }) => x >= TRACE).map(({ gas }) => gas);
   return [Math.max(...counted.map(({ lowest }) => lowest)), Math.min(...counted.map(({ highest }) => highest))];
+}
+
+/** The caution that a temperature outside the correlations asks for. */
+export function viscosityCautions({ temperatures, source }: ViscosityBasis, T: Temperature): readonly Caution[] {
+  const [min, max] = temperatures;
+  if (T >= min && T <= max) return [];
+  return [{ id: 'viscosity-range-temperature', verdict: 'caution', value: T, unit: 'K', limit: { min, max }, source }];
 }
