@@ -1,9 +1,11 @@
 /** Puts every vector to the core and says how far it is off. The gate and the accuracy table share this function. */
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
+import { subjects as air } from './subjects/air.ts';
 import { subjects as element } from './subjects/element.ts';
 import { subjects as gas } from './subjects/gas.ts';
 import { subjects as gasViscosity } from './subjects/gas-viscosity.ts';
+import { subjects as liquid } from './subjects/liquid.ts';
 import { subjects as solve } from './subjects/solve.ts';
 import { subjects as units } from './subjects/units.ts';
 import { subjects as water } from './subjects/water.ts';
@@ -49,9 +51,11 @@ const NOT_SOURCES = ['generate', 'subjects'];
 const ROUNDING = 4 * Number.EPSILON;
 
 const subjects: Readonly<Record<string, (given: Given) => Record<string, number>>> = {
+  ...air,
   ...element,
   ...gas,
   ...gasViscosity,
+  ...liquid,
   ...solve,
   ...units,
   ...water,

@@ -3,6 +3,7 @@ import type { Budgets } from '../uncertainty/duty.ts';
 import { checkCalibration } from './calibration.ts';
 import type { Case } from './case.ts';
 import type { Assumption, Finding } from './finding.ts';
+import { checkFluid } from './fluid.ts';
 import { checkLimits } from './limits.ts';
 import { checkPhase } from './phase.ts';
 import { checkPlate } from './plate.ts';
@@ -25,6 +26,7 @@ export function check(subject: Case, budgets: Budgets, straight: readonly Findin
     ...checkLimits(subject),
     ...checkCalibration(subject),
     ...straight,
+    ...checkFluid(subject),
     ...checkPhase(subject),
     ...checkPlate(subject),
     ...checkPractice(subject, budgets),

@@ -61,6 +61,7 @@ function checkBoiling(subject: Case): Finding[] {
 function checkSaturation({ solution }: Case): Finding[] {
   const { state } = solution.meter;
   if (state.saturationTemperature === undefined || state.phase === 'supercritical') return [];
+  if (state.quality !== undefined) return []; // on the line by its nature; fluid.ts says so
   const liquid = state.phase === 'liquid';
   const distance = liquid
     ? state.saturationTemperature - state.temperature

@@ -16,7 +16,7 @@ export type FluidField =
   | { readonly name: string; readonly type: 'number'; readonly required: boolean }
   /** A share from 0 to 1, as '30 %' or as a plain number. */
   | { readonly name: string; readonly type: 'share'; readonly required: boolean }
-  /** One of a long list of names, in any case and with blanks or hyphens; `names` holds every spelling and its key. */
+  /** One of a long list of names; `names` holds the key of every spelling, under its plain name. */
   | {
       readonly name: string;
       readonly type: 'name';
@@ -96,3 +96,6 @@ export function bothOf({ pressure, temperature }: Partial<State>, paths: Paths):
     value === undefined ? fail('field-missing', path) : ok(value);
   return gather(missing(pressure, paths.pressure), missing(temperature, paths.temperature));
 }
+
+/** A name as people write it: case, blanks, commas and hyphens do not count. */
+export const plainName = (text: string): string => text.toLowerCase().replace(/[^a-z0-9]+/g, '');

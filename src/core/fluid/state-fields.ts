@@ -4,7 +4,7 @@ import type { AbsolutePressure } from '../quantity/kinds.ts';
 import type { Measure } from '../quantity/measure.ts';
 import { type Outcome, ok, type Problem } from '../quantity/outcome.ts';
 import { readQuantity } from '../quantity/text.ts';
-import type { Amount, FluidField, Fraction, Parsed, Row } from './model.ts';
+import { type Amount, type FluidField, type Fraction, type Parsed, plainName, type Row } from './model.ts';
 
 /** A list longer than this is no table of a fluid. */
 const MOST_ROWS = 500;
@@ -32,9 +32,6 @@ const readShare: Reader<'share', number> = (form, { name, required }) => {
 
 const shareOf = (form: Form, name: string, share: number, written: string): number | undefined =>
   share >= 0 && share <= 1 ? share : form.report('share-out-of-range', name, { written });
-
-/** A name as people write it: case, blanks, commas and hyphens do not count. */
-export const plainName = (text: string): string => text.toLowerCase().replace(/[^a-z0-9]+/g, '');
 
 const readName: Reader<'name', string> = (form, { name, names }) => {
   const text = form.word(name);

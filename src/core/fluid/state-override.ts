@@ -55,16 +55,19 @@ export function override(state: FluidState, parsed: Parsed, field: string): Outc
     ...(figures.density === undefined ? [] : ['compressibility', 'speedOfSound']),
     ...(figures.isentropicExponent === undefined ? [] : ['speedOfSound']),
   ];
-  const kept = Object.fromEntries(
-    Object.entries(state).filter(([key]) => !stale.includes(key)),
-  ) as unknown as FluidState;
   return ok({
-    ...kept,
+    ...without(state, stale),
     ...(figures as Partial<FluidState>),
     overridden: names,
+    ...(state.uncertainties === undefined ? {} : { uncertainties: without(state.uncertainties, [...names, ...stale]) }),
     sources: { ...state.sources, ...Object.fromEntries(names.map((name) => [name, byUser])) },
     working: workingOf(state.working, figures, stale),
   });
+}
+
+/** A record without some of its optional keys. */
+function without<Group extends object>(group: Group, keys: readonly string[]): Group {
+  return Object.fromEntries(Object.entries(group).filter(([key]) => !keys.includes(key))) as Group;
 }
 
 function figuresOf({ quantities, numbers }: Parsed, density: Density): Figures {

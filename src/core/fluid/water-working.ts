@@ -42,6 +42,17 @@ export function waterSources(
   };
 }
 
+/** Largest uncertainties of each region and phase, from memory of the releases' figures. */
+export function waterUncertainties(region: Region, expands: boolean): NonNullable<FluidState['uncertainties']> {
+  const density = region === 3 ? 0.002 : expands ? 0.001 : 0.0002; // R7-97(2012), 11 and its figures
+  const of = (share: number, clause: string) => ({ share, source: { clause, seen: 'memory' } }) as const;
+  return {
+    density: of(density, 'IAPWS R7-97(2012), estimates of uncertainty'),
+    viscosity: of(expands ? 0.02 : 0.01, 'IAPWS R12-08, estimates of uncertainty'),
+    speedOfSound: of(0.002, 'IAPWS R7-97(2012), estimates of uncertainty'),
+  };
+}
+
 const named = (symbol: string, value: number, unit: string, words: string): Given => ({ symbol, value, unit, words });
 
 /** The working of each figure. `heldBeyond`: the phase is held beyond the saturation line. */

@@ -22,8 +22,10 @@ import { R, type WaterProperties } from './if97/properties.ts';
 import type { Side } from './if97/region3.ts';
 import { criticalTemperature } from './if97/saturation.ts';
 import { highestTemperature as highestTemperatureOfViscosity, viscosity } from './if97/viscosity.ts';
-import type { Conditions, FluidModel } from './model.ts';
-import { waterSources, waterWorking } from './water-working.ts';
+import type { Conditions, FluidModel, Parsed } from './model.ts';
+import { saturatedState } from './saturated.ts';
+import { waterSources, waterUncertainties, waterWorking } from './water-working.ts';
+import { wetSteam } from './wet-steam.ts';
 
 const molarMass = 0.018015257 as MolarMass; // kg/mol; IAPWS R7-97(2012), section 2: R_m = 8.31451 J/(mol.K) by R
 
@@ -108,6 +110,7 @@ function stateFrom(conditions: Conditions, place: Place, forced: boolean, proper
     phase: supercritical(p, T) ? 'supercritical' : place.side,
     expands: place.side === 'vapour',
     ...(forced ? { phaseForced: true } : {}),
+    uncertainties: waterUncertainties(place.region, place.side === 'vapour'),
     sources: waterSources(place.region, extrapolated, figures, base?.source),
     working: waterWorking(place.region, heldBeyond, extrapolated, figures, conditions.base),
   };
@@ -129,8 +132,23 @@ export function waterDensity(p: AbsolutePressure, T: Temperature): Density | und
   return outsideBy(p, T) === undefined ? densityAt(p, T, placeOf(p, T)) : undefined;
 }
 
+/** Water, steam, or wet steam of a stated quality. Problems: those of waterState. */
+function stateOfWater({ choices, numbers }: Parsed, conditions: Conditions): Outcome<FluidState> {
+  const { quality } = numbers;
+  if (quality === undefined) return waterState(conditions, choices.phase as Side | undefined);
+  const vapour = waterState(conditions, 'vapour');
+  if (!vapour.ok) return vapour;
+  const { pressure, temperature } = conditions;
+  const liquid = densityAt(pressure, temperature, sideOf(pressure, temperature, 'liquid'));
+  return liquid === undefined ? impossible(conditions, 'liquid') : ok(wetSteam(vapour.value, liquid, quality));
+}
+
 export const water: FluidModel = {
   kind: 'water',
-  fields: [{ name: 'phase', type: 'choice', choices: ['liquid', 'vapour'], required: false }],
-  state: (parsed, conditions) => waterState(conditions, parsed.choices.phase as Side | undefined),
+  fields: [
+    { name: 'phase', type: 'choice', choices: ['liquid', 'vapour'], required: false },
+    { name: 'quality', type: 'share', required: false },
+  ],
+  complete: saturatedState,
+  state: stateOfWater,
 };

@@ -70,6 +70,8 @@ function stateRecord(state: FluidState): StateRecord {
     vapourPressure_Pa: state.vapourPressure,
     saturationTemperature_K: state.saturationTemperature,
     baseDensity_kg_m3: state.baseDensity,
+    quality: state.quality,
+    overridden: state.overridden,
   };
   const known = Object.entries(optional).filter(([, value]) => value !== undefined);
   return {

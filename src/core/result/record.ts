@@ -19,6 +19,10 @@ export interface StateRecord {
   readonly vapourPressure_Pa?: number;
   readonly saturationTemperature_K?: number;
   readonly baseDensity_kg_m3?: number;
+  /** Mass fraction of vapour in wet steam. */
+  readonly quality?: number;
+  /** Figures that the user put in place of the model's. */
+  readonly overridden?: readonly string[];
   readonly pressure_Pa: number; // absolute, upstream tapping
   readonly temperature_K: number;
 }
