@@ -1,5 +1,7 @@
 /** Labels of the document's fields by path, and how a sentence names each. */
 
+import { componentLabel } from './components.ts';
+
 const labels: Readonly<Record<string, string>> = {
   tag: 'Tag',
   service: 'Service',
@@ -14,6 +16,29 @@ const labels: Readonly<Record<string, string>> = {
   'fluid.compressibility': 'Compressibility factor',
   'fluid.vapourPressure': 'Vapour pressure',
   'fluid.baseDensity': 'Density at the base state',
+  'fluid.quality': 'Quality of the steam',
+  'fluid.composition': 'Composition',
+  'fluid.basis': 'Fractions',
+  'fluid.normalise': 'Bring the sum to 100 %',
+  'fluid.name': 'Name of the fluid',
+  'fluid.relativeHumidity': 'Relative humidity',
+  'fluid.dewPoint': 'Dew point',
+  'fluid.wetBulb': 'Wet-bulb temperature',
+  'fluid.baseBasis': 'Base volume counts',
+  'fluid.concentration': 'Concentration',
+  'fluid.concentrationBasis': 'Concentration counts',
+  'fluid.table': 'Table of the liquid',
+  'fluid.viscosityRule': 'Viscosity between the rows',
+  'fluid.densityAt15': 'Density at 15 °C',
+  'fluid.densityAt60F': 'Density at 60 °F',
+  'fluid.apiGravity': 'API gravity',
+  'fluid.viscosities': 'Viscosities of the oil',
+  'fluid.bulkModulus': 'Bulk modulus',
+  'fluid.override': 'Figures in place of the model’s',
+  'fluid.override.density': 'Density in place of the model’s',
+  'fluid.override.viscosity': 'Viscosity in place of the model’s',
+  'fluid.override.isentropicExponent': 'Isentropic exponent in place of the model’s',
+  'fluid.override.vapourPressure': 'Vapour pressure in place of the model’s',
   upstream: 'Upstream state',
   'upstream.pressure': 'Upstream pressure',
   'upstream.temperature': 'Temperature',
@@ -65,7 +90,13 @@ const labels: Readonly<Record<string, string>> = {
 };
 
 /** Fields inside a row of a list. */
-const inRow: Readonly<Record<string, string>> = { reynolds: 'Reynolds number', coefficient: 'coefficient' };
+const inRow: Readonly<Record<string, string>> = {
+  reynolds: 'Reynolds number',
+  coefficient: 'coefficient',
+  temperature: 'temperature',
+  density: 'density',
+  viscosity: 'viscosity',
+};
 
 /** A path without the meter it stands in and with its row numbers apart. */
 const own = (path: string): string => path.replace(/^meters(\.\d+\.|\[\d+\]\.)/, '');
@@ -75,11 +106,15 @@ export function fieldLabel(path: string): string {
   const plain = own(path);
   const known = labels[plain];
   if (known !== undefined) return known;
+  const component = /^fluid\.composition\.(.+)$/.exec(plain)?.[1];
+  if (component !== undefined) return `Share of ${componentLabel(component).replace(/^[A-Z](?=[a-z])/, lowered)}`;
   const row = /^(.+?)[.[](\d+)\]?(?:\.(.+))?$/.exec(plain);
   if (row === null) return plain === '' ? 'Meter' : plain;
   const [, list = '', place = '0', rest] = row;
   return `${labels[list] ?? list}, row ${Number(place) + 1}${rest === undefined ? '' : `, ${inRow[rest] ?? rest}`}`;
 }
+
+const lowered = (letter: string): string => letter.toLowerCase();
 
 /** The field as it stands inside a sentence: 'the upstream pressure', 'the tappings'. */
 export function fieldPlace(path: string): string {

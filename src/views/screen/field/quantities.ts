@@ -20,16 +20,26 @@ const diameter = kind(['length'], 'mm', 'in');
 const flow = kind(['mass flow', 'volume flow', 'base volume flow'], 't/h', 'lb/h');
 const density = kind(['density'], 'kg/m3', 'lb/ft3');
 const straight = kind(['bores', 'length'], 'D', 'D');
+const viscosity = kind(['dynamic viscosity', 'kinematic viscosity'], 'mPa.s', 'cP');
+const boiling = kind(['absolute pressure', 'gauge pressure'], 'bar(a)', 'psi(a)');
 const share = kind(['share'], '%', '%');
 
 export const QUANTITIES: Readonly<Record<string, QuantityKind>> = {
   'upstream.pressure': pressure,
   'upstream.temperature': temperature,
   'fluid.density': density,
-  'fluid.viscosity': kind(['dynamic viscosity'], 'mPa.s', 'cP'),
+  'fluid.viscosity': viscosity,
   'fluid.molarMass': kind(['molar mass'], 'kg/kmol', 'lb/lbmol'),
-  'fluid.vapourPressure': kind(['absolute pressure'], 'bar(a)', 'psi(a)'),
+  'fluid.vapourPressure': boiling,
   'fluid.baseDensity': density,
+  'fluid.dewPoint': temperature,
+  'fluid.wetBulb': temperature,
+  'fluid.densityAt15': density,
+  'fluid.densityAt60F': density,
+  'fluid.bulkModulus': kind(['pressure difference'], 'MPa', 'psi'),
+  'fluid.override.density': density,
+  'fluid.override.viscosity': viscosity,
+  'fluid.override.vapourPressure': boiling,
   'pipe.bore': diameter,
   'pipe.roughness': kind(['length'], 'um', 'uin'),
   'pipe.measuredAt': temperature,
