@@ -6,7 +6,7 @@ import type { DynamicViscosity, Temperature } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import { type AirFigures, airSources, airWorking, type BaseAir, type BaseBasis } from './air-working.ts';
 import type { Caution, FluidState, StatedUncertainty } from './contract.ts';
-import { evaluated, gasCautions, gasUncertainty } from './gas-range.ts';
+import { gasCautions, gasUncertainty, outsideBy, refusedOutside } from './gas-range.ts';
 import { gasViscosity, schemeOf, viscosityBasis, viscosityCautions } from './gas-viscosity/viscosity.ts';
 import { gasDensity } from './gerg/density.ts';
 import { isothermOf } from './gerg/isotherm.ts';
@@ -24,8 +24,7 @@ export function airState(
   basis: BaseBasis = 'wet',
 ): Outcome<FluidState> {
   const { pressure: p, temperature: T, paths } = conditions;
-  const outside = outsideBy(p, T);
-  if (outside !== undefined) return outOfRange(conditions, outside);
+  if (outsideBy(p, T) !== undefined) return refusedOutside(conditions);
   const vapour = moisture === undefined ? ok(undefined) : vapourIn(moisture, conditions);
   if (!vapour.ok) return vapour;
   const xv = vapour.value?.fraction ?? 0;
@@ -36,21 +35,6 @@ export function airState(
   if (!(sound.isochoricHeatCapacity > 0 && sound.speedOfSoundSquared > 0))
     return fail('gas-beyond-equation', paths.temperature, detail);
   return ok(stateFrom(conditions, vapour.value, found, sound, basis));
-}
-
-function outsideBy(p: number, T: number): 'pressure' | 'temperature' | undefined {
-  if (!(T >= evaluated.temperature.min && T <= evaluated.temperature.max)) return 'temperature';
-  return p > 0 && p <= evaluated.pressure.max ? undefined : 'pressure';
-}
-
-function outOfRange({ pressure, temperature, paths }: Conditions, outside: 'temperature' | 'pressure') {
-  return fail('gas-out-of-range', paths[outside], {
-    pressure,
-    temperature,
-    lowestTemperature: evaluated.temperature.min,
-    highestTemperature: evaluated.temperature.max,
-    highestPressure: evaluated.pressure.max,
-  });
 }
 
 /** Air as a mixture of gases at the state; undefined where that has no gas. */
@@ -148,7 +132,7 @@ function uncertaintiesOf(
 function cautionsOf(xv: number, vapour: Vapour | undefined, at: State, rho: number): readonly Caution[] {
   const { pressure: p, temperature: T } = at;
   return [
-    ...gasCautions(airFractions(xv), p, T, false).filter(({ id }) => id !== 'water-dew-point'), // settled by the moisture
+    ...gasCautions(airFractions(xv), p, T, 'gas').filter(({ id }) => id !== 'water-dew-point'), // settled by the moisture
     ...viscosityCautions(viscosityBasis(airFractions(xv), T, rho), T),
     ...(vapour === undefined ? [] : moistureCautions(vapour, at)),
   ];

@@ -3,12 +3,14 @@
  * Standard: ISO 20765-2:2015 (GERG-2008), range of validity. SI.
  */
 import type { Temperature } from '../quantity/kinds.ts';
+import { fail, type Outcome } from '../quantity/outcome.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Caution, StatedUncertainty } from './contract.ts';
 import { critical } from './cubic/critical.table.ts';
 import { splits, trialSum } from './cubic/stability.ts';
 import { componentNames } from './gerg/mixture.ts';
 import { criticalTemperature, saturationPressure } from './if97/saturation.ts';
+import type { Conditions } from './model.ts';
 
 export const GERG: Source = { clause: 'ISO 20765-2:2015 (GERG-2008)', seen: 'second-hand' };
 
@@ -25,16 +27,32 @@ const waterTest: Source = { clause: 'x p of the water against IAPWS R7-97(2012),
 /** Beyond these the equation is not evaluated at all (practice). K, Pa. */
 export const evaluated = { temperature: { min: 20, max: 3000 }, pressure: { max: 200e6 } } as const;
 
+export function outsideBy(p: number, T: number): 'pressure' | 'temperature' | undefined {
+  if (!(T >= evaluated.temperature.min && T <= evaluated.temperature.max)) return 'temperature';
+  return p > 0 && p <= evaluated.pressure.max ? undefined : 'pressure';
+}
+
+/** The refusal of a state beyond those bounds. */
+export function refusedOutside({ pressure, temperature, paths }: Conditions): Outcome<never> {
+  return fail('gas-out-of-range', paths[outsideBy(pressure, temperature) ?? 'temperature'], {
+    pressure,
+    temperature,
+    lowestTemperature: evaluated.temperature.min,
+    highestTemperature: evaluated.temperature.max,
+    highestPressure: evaluated.pressure.max,
+  });
+}
+
 const waterPlace = componentNames.indexOf('water');
 const triplePoint = 273.16 as Temperature; // K
 
 /** The components of the phase test; water is left out of it, as k_ij = 0 is poor for it. */
 const cubicComponents = critical.map(([, Tc, pc, omega]) => ({ Tc, pc: pc * 1e6, omega }));
 
-/** Does a second phase form, by the cubic equation? Its sum is above 1 then. */
-export function phaseSum(x: readonly number[], p: number, T: number): number {
+/** Does a second phase form beside a gas or a liquid, by the cubic equation? Its sum is above 1 then. */
+export function phaseSum(x: readonly number[], p: number, T: number, phase: 'gas' | 'liquid' = 'gas'): number {
   const dry = x.map((xi, i) => (i === waterPlace ? 0 : xi));
-  return trialSum(cubicComponents, dry, T, p);
+  return trialSum(cubicComponents, dry, T, p, phase);
 }
 
 /**
@@ -58,14 +76,24 @@ export function condenses(x: readonly number[], p: number, T: number): boolean {
   return (water !== undefined && water.at > water.saturated) || splits(phaseSum(x, p, T));
 }
 
+/** A mixture that was called a gas and is a liquid at its pressure and temperature. */
+export const liquidCaution = (p: number): Caution => ({
+  id: 'fluid-liquid',
+  verdict: 'caution',
+  value: p,
+  unit: 'Pa',
+  limit: {},
+  source: GERG,
+});
+
 /** Everything about a gas that a user must know beside its figures. */
-export function gasCautions(x: readonly number[], p: number, T: number, liquid: boolean): readonly Caution[] {
+export function gasCautions(x: readonly number[], p: number, T: number, phase: 'gas' | 'liquid'): readonly Caution[] {
   const water = waterPressures(x, p, T);
-  const sum = phaseSum(x, p, T);
+  const sum = phaseSum(x, p, T, phase);
   return [
     rangeCaution('fluid-range-temperature', T, 'K', normal.temperature, extended.temperature),
     rangeCaution('fluid-range-pressure', p, 'Pa', normal.pressure, extended.pressure),
-    splits(sum) && !liquid
+    splits(sum)
       ? ({
           id: 'fluid-two-phase',
           verdict: 'caution',
@@ -75,7 +103,7 @@ export function gasCautions(x: readonly number[], p: number, T: number, liquid: 
           source: cubicTest,
         } as const)
       : undefined,
-    water !== undefined && water.at > water.saturated && !liquid
+    water !== undefined && water.at > water.saturated && phase === 'gas'
       ? ({
           id: 'water-dew-point',
           verdict: 'caution',

@@ -6,8 +6,17 @@ import type { AbsolutePressure, Density, MolarMass, Temperature } from '../quant
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import { type Basis, compositionOf } from './composition.ts';
 import type { FluidState } from './contract.ts';
-import { condenses, evaluated, gasCautions, gasUncertainty } from './gas-range.ts';
-import { gasViscosity, viscosityBasis } from './gas-viscosity/viscosity.ts';
+import { splits } from './cubic/stability.ts';
+import {
+  condenses,
+  gasCautions,
+  gasUncertainty,
+  liquidCaution,
+  outsideBy,
+  phaseSum,
+  refusedOutside,
+} from './gas-range.ts';
+import { gasViscosity, viscosityBasis, viscosityCautions } from './gas-viscosity/viscosity.ts';
 import { type BaseGas, type GasFigures, gasSources, gasWorking } from './gas-working.ts';
 import { gasDensity, liquidDensity } from './gerg/density.ts';
 import { type Isotherm, isothermOf } from './gerg/isotherm.ts';
@@ -15,40 +24,43 @@ import { type Mixture, mixtureOf, R } from './gerg/mixture.ts';
 import { type GasProperties, propertiesAt } from './gerg/properties.ts';
 import type { Conditions, FluidModel, Parsed, State } from './model.ts';
 
-/** The side of a phase boundary that the user asks for; a gas where nothing is said. */
+/** The phase of a mixture, found or asked for. */
 export type GasPhase = 'gas' | 'liquid';
 
 /**
  * State of a gas of composition `x`, in the order of componentNames, sum 1.
  * Problems: gas-out-of-range, gas-density-none, gas-beyond-equation.
  */
-export function gasState(x: readonly number[], conditions: Conditions, phase: GasPhase = 'gas'): Outcome<FluidState> {
+export function gasState(x: readonly number[], conditions: Conditions, asked?: GasPhase): Outcome<FluidState> {
   const { pressure: p, temperature: T } = conditions;
-  const outside = outsideBy(p, T);
-  if (outside !== undefined) return outOfRange(conditions, outside);
+  if (outsideBy(p, T) !== undefined) return refusedOutside(conditions);
   const mixture = mixtureOf(x);
   const isotherm = isothermOf(mixture, T);
-  const rho = phase === 'liquid' ? liquidDensity(isotherm, p) : gasDensity(isotherm, p);
-  const detail = { pressure: p, temperature: T, phase };
-  if (rho === undefined) return fail('gas-density-none', conditions.paths.pressure, detail);
-  const properties = propertiesAt(isotherm, rho);
+  const root = rootOf(isotherm, p, asked);
+  const detail = { pressure: p, temperature: T, phase: asked ?? 'gas' };
+  if (root === undefined) return fail('gas-density-none', conditions.paths.pressure, detail);
+  const properties = propertiesAt(isotherm, root.rho);
   if (!isReal(properties)) return fail('gas-beyond-equation', conditions.paths.temperature, detail);
-  return ok(stateFrom(isotherm, rho, properties, conditions, phase));
+  return ok(stateFrom(isotherm, root, properties, conditions));
 }
 
-const outsideBy = (p: number, T: number): 'pressure' | 'temperature' | undefined => {
-  if (!(T >= evaluated.temperature.min && T <= evaluated.temperature.max)) return 'temperature';
-  return p > 0 && p <= evaluated.pressure.max ? undefined : 'pressure';
-};
+/** A molar density, mol/m3, and whose it is. */
+interface MolarRoot {
+  readonly rho: number;
+  readonly phase: GasPhase;
+  /** True where a liquid was found and nobody had asked for one. */
+  readonly unasked: boolean;
+}
 
-function outOfRange({ pressure, temperature, paths }: Conditions, outside: 'temperature' | 'pressure') {
-  return fail('gas-out-of-range', paths[outside], {
-    pressure,
-    temperature,
-    lowestTemperature: evaluated.temperature.min,
-    highestTemperature: evaluated.temperature.max,
-    highestPressure: evaluated.pressure.max,
-  });
+/** The root asked for; else that of the gas, and where there is none that of a liquid which does not split. */
+function rootOf(isotherm: Isotherm, p: number, asked?: GasPhase): MolarRoot | undefined {
+  const gasRoot = asked === 'liquid' ? undefined : gasDensity(isotherm, p);
+  if (gasRoot !== undefined) return { rho: gasRoot, phase: 'gas', unasked: false };
+  const rho = asked === 'gas' ? undefined : liquidDensity(isotherm, p);
+  if (rho === undefined) return undefined;
+  const unasked = asked === undefined;
+  if (unasked && splits(phaseSum(isotherm.mixture.x, p, isotherm.T, 'liquid'))) return undefined;
+  return { rho, phase: 'liquid', unasked };
 }
 
 /** Far outside its range the equation may answer with heat capacities that no substance has. */
@@ -57,10 +69,9 @@ const isReal = ({ isochoricHeatCapacity, speedOfSoundSquared, compressibility }:
 
 function stateFrom(
   { mixture, T, RT }: Isotherm,
-  rho: number,
+  { rho, phase, unasked }: MolarRoot,
   properties: GasProperties,
   { pressure: p, base }: Conditions,
-  phase: GasPhase,
 ): FluidState {
   const { x } = mixture;
   const temperature = T as Temperature;
@@ -77,7 +88,11 @@ function stateFrom(
   const atBase = baseOf(mixture, base);
   const basis = viscosityBasis(x, temperature, rho);
   const known = gasUncertainty(x, p, T);
-  const cautions = gasCautions(x, p, T, phase === 'liquid');
+  const cautions = [
+    ...(unasked ? [liquidCaution(p)] : []),
+    ...gasCautions(x, p, T, phase),
+    ...viscosityCautions(basis, temperature),
+  ];
   return {
     ...figures,
     phase,

@@ -37,6 +37,27 @@ export const checksOfFlow: Readonly<Record<string, FindingWords>> = {
   },
   subcooling: saturation('Subcooling', 'below boiling at'),
   superheat: saturation('Superheat', 'above condensing at'),
+  'fluid-range-temperature': {
+    role: 'temperature',
+    text: (figure) => `Temperature ${figure} against the range of the equation of state`,
+  },
+  'fluid-range-pressure': {
+    role: 'pressure',
+    text: (figure) => `Pressure ${figure} against the range of the equation of state`,
+  },
+  'fluid-two-phase': {
+    role: 'number',
+    text: (figure) => `A second phase may form: the sum of its trial phase is ${figure}`,
+  },
+  'fluid-liquid': {
+    role: 'pressure',
+    text: (figure) => `At ${figure} and its temperature this mixture is a liquid, not a gas`,
+  },
+  'water-dew-point': {
+    role: 'pressure',
+    text: (figure) => `Water may condense: its partial pressure is ${figure}`,
+    limit: (bounds) => `${bounds}, its saturation pressure`,
+  },
   velocity: { role: 'velocity', text: (figure) => `Pipe velocity ${figure}{where}` },
   span: { role: 'differential', text: (figure) => `Differential of the span ${figure}` },
   turndown: {

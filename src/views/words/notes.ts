@@ -1,5 +1,6 @@
 /** Remarks on a working line and notes of the tables of straight lengths: what a formula or a figure cannot say. */
 import { catalogue } from './catalogue.ts';
+import { liquidRemarks } from './notes-of-liquids.ts';
 
 const byRegion = (region: number): Readonly<Record<string, string>> => ({
   [`if97-region-${region}`]: `From the equation of region ${region} of the formulation; too long to print here.`,
@@ -13,9 +14,15 @@ export const remarks: Readonly<Record<string, string>> = {
   ...byRegion(5),
   'if97-region-4': 'From the saturation equation of the formulation.',
   'if97-at-base': 'From the formulation at the base state of the project.',
+  'gerg-density': 'From the equation of state at pressure and temperature; too long to print here.',
+  'gerg-speed-of-sound': 'From the equation of state; too long to print here.',
+  'gas-base-ideal': 'Something would condense at the base state: the density of the ideal gas is the custom.',
+  'viscosity-by-scheme': 'From the viscosities of the dilute gases, mixed, and the effect of density.',
+  'viscosity-by-reference': 'From the reference correlation of this gas; too long to print here.',
   'viscosity-by-release': 'From the correlation of the release; too long to print here.',
   'viscosity-extrapolated': 'From the correlation of the release, continued above its range: take it with care.',
   stated: 'Stated by the user.',
+  ...liquidRemarks,
   'expansion-held': 'The temperature lies outside the table of expansion; its nearest value is held.',
   'expansibility-isentropic': 'Written here with τ as the ratio of the pressures.',
   'venturi-loss-curve': 'The share is read from a curve of the standard.',

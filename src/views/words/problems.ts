@@ -4,7 +4,9 @@ import { capital, detailOf, type ProblemWords, type Sentences } from './detail.t
 import { fieldPlace } from './fields.ts';
 import { type Print, printSI } from './print.ts';
 import { fileProblems } from './problems-of-files.ts';
+import { gasProblems } from './problems-of-gases.ts';
 import { inputProblems } from './problems-of-input.ts';
+import { liquidProblems } from './problems-of-liquids.ts';
 import { numberProblems } from './problems-of-numbers.ts';
 import { solvingProblems } from './problems-of-solving.ts';
 
@@ -13,6 +15,8 @@ export type Problem = Refused['problem'];
 export const problemWords: ProblemWords = {
   ...numberProblems,
   ...inputProblems,
+  ...gasProblems,
+  ...liquidProblems,
   ...solvingProblems,
   ...fileProblems,
 };

@@ -1,6 +1,7 @@
 /** A fluid whose figures are stated, and the reading of any fluid from the document. */
 import { describe, expect, it } from 'vitest';
 import type { FluidText } from '../../../src/core/document/project.ts';
+import { notOffered } from '../../../src/core/fluid/registry.ts';
 import { stateOf } from '../../../src/core/fluid/state.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
 
@@ -107,7 +108,7 @@ describe('the fluid of the document', () => {
     expect(problems({ kind: '' })).toEqual(['field-missing fluid.kind']);
     expect(problems({ kind: 7 })).toEqual(['text-expected fluid.kind']);
     expect(problems({ kind: 'treacle' })).toEqual(['fluid-unknown fluid.kind']);
-    for (const kind of ['gas', 'air', 'liquid']) expect(problems({ kind })).toEqual(['fluid-not-offered fluid.kind']);
+    for (const kind of notOffered) expect(problems({ kind })).toEqual(['fluid-not-offered fluid.kind']);
   });
 
   it('is refused with every trouble at once, at its place', () => {

@@ -11,6 +11,9 @@ const mostSteps = 200; // 4 are usual; bisection alone needs 50
 /** Ends of the search, derived: below it Z would be above e^7, above it no equation of the set means anything. */
 const lowestFactor = Math.exp(-7); // of p/(R T)
 const highestReduced = 8;
+/** Below this reduced density no root lies beyond an unstable part (derived: liquids end above it); points to look for one. */
+const loopless = 0.5;
+const loopPoints = 40;
 /** The liquid root is sought from here downwards; liquids near their triple point stay below. */
 const liquidStart = 3;
 
@@ -32,12 +35,22 @@ export function gasDensity(isotherm: Isotherm, p: number, near?: number): number
     if (stable && at < p) low = y;
     else high = y;
     const newton = stable ? (Math.log(p / at) * at) / (rho * slope) : Number.NaN;
-    if (stable && Math.abs(newton) < settled) return rho * (1 + newton);
+    if (stable && Math.abs(newton) < settled) return firstStable(isotherm, rho * (1 + newton));
     if (high - low < collapsed) return undefined;
     const next = y + Math.max(-longestStep, Math.min(longestStep, newton));
     y = next > low && next < high ? next : (low + high) / 2;
   }
   return undefined;
+}
+
+/** A root is that of the gas where no density below it is unstable; beyond an unstable part it is the liquid's. */
+function firstStable(isotherm: Isotherm, rho: number): number | undefined {
+  if (rho < loopless * isotherm.mixture.rhoR) return rho;
+  for (let k = 1; k < loopPoints; k++) {
+    const { slope } = pressureAt(isotherm, (rho * k) / loopPoints);
+    if (!(slope > 0)) return undefined;
+  }
+  return rho;
 }
 
 /**
