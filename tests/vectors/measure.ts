@@ -6,6 +6,7 @@ import { subjects as element } from './subjects/element.ts';
 import { subjects as gas } from './subjects/gas.ts';
 import { subjects as gasViscosity } from './subjects/gas-viscosity.ts';
 import { subjects as liquid } from './subjects/liquid.ts';
+import { subjects as otherGas } from './subjects/other-gas.ts';
 import { subjects as solve } from './subjects/solve.ts';
 import { subjects as units } from './subjects/units.ts';
 import { subjects as water } from './subjects/water.ts';
@@ -56,6 +57,7 @@ const subjects: Readonly<Record<string, (given: Given) => Record<string, number>
   ...gas,
   ...gasViscosity,
   ...liquid,
+  ...otherGas,
   ...solve,
   ...units,
   ...water,

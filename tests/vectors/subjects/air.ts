@@ -5,8 +5,8 @@ import { gaugeWaterDensity, mercuryDensity } from '../../../src/core/fluid/gauge
 import { gasDensity } from '../../../src/core/fluid/gerg/density.ts';
 import { isothermOf } from '../../../src/core/fluid/gerg/isotherm.ts';
 import { componentNames, mixtureOf } from '../../../src/core/fluid/gerg/mixture.ts';
-import { molarMassOfDryAir } from '../../../src/core/fluid/moist-air/cipm.ts';
 import { R } from '../../../src/core/fluid/moist-air/cipm.table.ts';
+import { molarMassOfDryAir } from '../../../src/core/fluid/moist-air/cipm.ts';
 import type { Moisture } from '../../../src/core/fluid/moist-air/moisture.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
 

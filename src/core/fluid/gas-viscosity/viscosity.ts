@@ -4,7 +4,7 @@
  */
 import type { DynamicViscosity, Temperature } from '../../quantity/kinds.ts';
 import type { Source } from '../../quantity/source.ts';
-import type { Caution } from '../contract.ts';
+import type { Caution, StatedUncertainty } from '../contract.ts';
 import { critical } from '../cubic/critical.table.ts';
 import { components } from '../gerg/components.table.ts';
 import { rows } from './components.table.ts';
@@ -29,6 +29,9 @@ const scheme: Source = {
 /** Gases that the scheme meets within 3 %, up to a density like that of natural gas at 12 MPa (found against vectors). */
 const light = ['methane', 'nitrogen', 'oxygen', 'argon', 'hydrogen', 'helium', 'carbon-monoxide'];
 const lightUncertainty = { share: 0.7, reducedDensity: 0.65, within: 0.03, beyond: 0.1 };
+
+/** What the scheme is good for with any gas. */
+export const schemeUncertainty: StatedUncertainty = { share: lightUncertainty.beyond, source: scheme };
 
 /** What the scheme asks of each component, in the order of GERG-2008. */
 const gases: readonly ViscousGas[] = components.map(({ name, M }, at) => {
@@ -90,7 +93,10 @@ function overlap(shares: readonly Share[]): ViscosityBasis['temperatures'] {
 }
 
 /** The caution that a temperature outside the correlations asks for. */
-export function viscosityCautions({ temperatures, source }: ViscosityBasis, T: Temperature): readonly Caution[] {
+export function viscosityCautions(
+  { temperatures, source }: Pick<ViscosityBasis, 'temperatures' | 'source'>,
+  T: Temperature,
+): readonly Caution[] {
   const [min, max] = temperatures;
   if (T >= min && T <= max) return [];
   return [{ id: 'viscosity-range-temperature', verdict: 'caution', value: T, unit: 'K', limit: { min, max }, source }];
