@@ -29,6 +29,13 @@ const places = new Map(
 /** Place of a component in the order of componentNames; undefined for a name that is none. */
 export const componentPlace = (name: string): number | undefined => places.get(plain(name));
 
+/** Components of the same first letter, or the commonest. */
+function nearest(name: string): string {
+  const letter = plain(name).charAt(0);
+  const alike = componentNames.filter((candidate) => plain(candidate).startsWith(letter));
+  return (letter === '' || alike.length === 0 ? componentNames : alike).slice(0, 4).join(', ');
+}
+
 /**
  * Mole fractions in the order of componentNames, sum 1. The order in which they were written does not matter.
  * @param normalise brings any sum to 1, on the user's request
@@ -45,14 +52,16 @@ export function compositionOf(
   const problems: Problem[] = [];
   const seen = new Map<number, string>();
   for (const { name, value } of written) {
+    const own = name.slice(0, 40);
     const report = (code: string, detail: Problem['detail']) =>
-      problems.push({ code, field: `${path}.${name.slice(0, 40)}`, detail: { written: name.slice(0, 40), ...detail } });
+      problems.push({ code, field: `${path}.${own}`, detail });
     const place = componentPlace(name);
-    if (place === undefined) report('component-unknown', { known: componentNames.join(', ') });
-    else if (seen.has(place)) report('component-twice', { other: seen.get(place) ?? '' });
-    else if (!(value >= 0)) report('fraction-negative', { value });
+    const before = place === undefined ? undefined : seen.get(place);
+    if (place === undefined) report('component-unknown', { written: own, nearest: nearest(own) });
+    else if (before !== undefined) report('component-twice', { written: own, other: before });
+    else if (!(value >= 0)) report('fraction-negative', { written: own, value });
     else amounts[place] = value;
-    if (place !== undefined) seen.set(place, name.slice(0, 40));
+    if (place !== undefined) seen.set(place, own);
   }
   const sum = amounts.reduce((total, value) => total + value, 0);
   const off = normalise ? !(sum > 0) : !(Math.abs(sum - 1) <= SUM_TOLERANCE);

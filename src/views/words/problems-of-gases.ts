@@ -4,11 +4,11 @@ import type { ProblemWords } from './detail.ts';
 export const gasProblems: ProblemWords = {
   'component-unknown': (d) => ({
     cause: `'${d.text('written')}' is no component of a gas mixture here.`,
-    next: `Name one of ${d.text('known')}.`,
+    next: `Choose a component of the list, such as ${d.list('nearest')}.`,
   }),
   'component-twice': (d) => ({
     cause: `'${d.text('written')}' stands in the composition already, as '${d.text('other')}'.`,
-    next: 'Add the two shares and leave one line out.',
+    next: 'Leave one of the two lines out, and add its share to the other.',
   }),
   'fraction-negative': (d) => ({
     cause: `The share of '${d.text('written')}' is negative.`,
@@ -16,12 +16,12 @@ export const gasProblems: ProblemWords = {
   }),
   'composition-sum': (d) => ({
     cause: `The shares of the composition add up to ${d.figure('sum', 'number')}, not to 1.`,
-    next: 'Correct them, write % behind each if they are percentages, or let them be brought to 1.',
+    next: 'Check each, write % behind percentages, or let them be brought to 1.',
   }),
   'gas-out-of-range': (d) => ({
     cause: `No gas is computed at ${d.figure('pressure', 'pressure')} and ${d.figure('temperature', 'temperature')}.`,
     next:
-      `Stay from ${d.limit('lowestTemperature', 'temperature')} to ${d.limit('highestTemperature', 'temperature')} ` +
+      `Check the state: it holds from ${d.limit('lowestTemperature', 'temperature')} to ${d.limit('highestTemperature', 'temperature')} ` +
       `and up to ${d.limit('highestPressure', 'pressure')}.`,
   }),
   'gas-density-none': (d) => ({
@@ -31,7 +31,7 @@ export const gasProblems: ProblemWords = {
     next:
       d.text('phase') === 'liquid'
         ? 'Check pressure and temperature, or let it be a gas.'
-        : 'It is liquid or in two phases there: check pressure and temperature, or state that it is a liquid.',
+        : 'Check pressure, temperature and composition: it is liquid or in two phases there.',
   }),
   'gas-beyond-equation': (d) => ({
     cause:

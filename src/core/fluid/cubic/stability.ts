@@ -42,7 +42,7 @@ export const splits = (sum: number): boolean => sum > 1 + margin;
 
 /** ln K of Wilson's estimate, p_i = p_c exp(5.373 (1 + ω)(1 - T_c/T)) (practice, as in Michelsen 1982). */
 const wilson = ({ Tc, pc, omega }: CubicComponent, T: number, p: number): number =>
-  Math.log(pc / p) + 5.373 * (1 + omega) * (1 - Tc / T);
+  Math.log(pc / p) + 5.373 * (1 + omega) * (1 - Tc / T); // Wilson, as in Michelsen 1982
 
 /** Successive substitution ln W_i = d_i - ln φ_i(W); the sum of W where it settles away from the feed, else 1. */
 function trialFrom(state: CubicState, lnZ: Float64Array, d: Float64Array, start: Float64Array): number {
