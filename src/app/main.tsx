@@ -5,6 +5,8 @@ import { run, solveMeter } from '../core/run.ts';
 import { flushWhenHidden } from '../persist/autosave.ts';
 import { createWorkbench } from '../state/create.ts';
 import { Root } from '../views/screen/Root.tsx';
+import type { SheetsView } from '../views/screen/SheetPlace.tsx';
+import { dayOf } from './clock.ts';
 import { createDesk, type Desk } from './desk.ts';
 import { registerOffline } from './offline.ts';
 import { createOrders } from './orders.ts';
@@ -12,7 +14,9 @@ import { start } from './shelf.ts';
 import { openStorage } from './storage.ts';
 import { newId, tab } from './tab.ts';
 
-const Sheets = lazy(async () => ({ default: (await import('../views/sheet/Sheets.tsx')).Sheets }));
+const Paper = lazy(async () => ({ default: (await import('../views/sheet/Sheets.tsx')).Sheets }));
+/** The sheets carry the day they are printed; only the app knows the clock. */
+const Sheets: SheetsView = (props) => <Paper {...props} printedOn={dayOf(new Date())} />;
 
 const store = createWorkbench({ run, solveMeter });
 let desk: Desk | undefined;

@@ -107,6 +107,23 @@ describe('physics', () => {
     );
   });
 
+  test('a wider bore passes more, also far below the limits where these change with the ratio', () => {
+    const at = (ratio: number) =>
+      flowOf(
+        solved({
+          fluid: { kind: 'stated', density: '1000 kg/m3', viscosity: '5 mPa.s' },
+          upstream: { pressure: '5 bar(a)', temperature: '20 degC' },
+          pipe: { bore: '50 mm' },
+          element: { kind: 'isa-1932-nozzle', bore: asText(0.05 * ratio, 'm') },
+          differential: '1 mbar',
+          find: 'flow',
+        }),
+      );
+    const ratios = Array.from({ length: 60 }, (_, step) => 0.41 + step * 0.001);
+    for (const [index, ratio] of ratios.entries())
+      if (index > 0) expect(at(ratio)).toBeGreaterThan(at(ratios[index - 1] ?? 0));
+  });
+
   test('the permanent loss lies between nothing and the differential, and the terms make the sum', () => {
     fc.assert(
       fc.property(anyMeter, (meter) => {

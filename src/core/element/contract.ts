@@ -90,7 +90,7 @@ export interface Primary {
   readonly standard: string; // 'ISO 5167-2:2022'
   /** Dimensions that the solver may search, as a diameter ratio. */
   readonly ratioRange: { readonly min: number; readonly max: number };
-  /** Share of the lower Reynolds limit below which C is held (see methods of solve); absolute number. */
+  /** Pipe Reynolds number below which C is held, about a tenth of the lower limit; continuous in the ratio. */
   readonly reynoldsFloor: (at: Geometry) => number;
   /** First guess of C for the solver: ISO 5167-1:2003, Annex A (0.606 for orifice plates, 1 for the others). */
   readonly guess: number;

@@ -94,7 +94,7 @@ const primary: Primary = {
   name: 'isa-1932-nozzle',
   standard: 'ISO 5167-3:2022',
   ratioRange: { min: 0.15, max: 0.85 },
-  reynoldsFloor: ({ ratio }) => 0.1 * leastReynolds(ratio),
+  reynoldsFloor: () => 7e3, // a tenth of the higher limit for every ratio, so that a wider bore never passes less
   guess: 1, // ISO 5167-1:2003, Annex A
   discharge,
   expansibility: nozzleExpansibility,

@@ -19,6 +19,11 @@ const iso2003 = cite('ISO 5167-2:2003');
 const inch = 0.0254; // m; 1 in exactly
 const smallPipe = 0.07112; // m; below it the small-pipe term applies, Formula (4)
 
+/** Constants of Formula (4), apart from beta and Re_D. */
+const mega03 = 1e6 ** 0.3; // Formula (4)
+const mega07 = 1e6 ** 0.7; // Formula (4)
+const a08 = 19000 ** 0.8; // Formula (4)
+
 type Tappings = 'corner' | 'flange' | 'D-D/2';
 const choices: readonly Tappings[] = ['corner', 'flange', 'D-D/2'];
 
@@ -33,13 +38,19 @@ const distances: Record<Tappings, (D: number) => readonly [L1: number, L2: numbe
 const terms = (tappings: Tappings, at: Geometry) => {
   const [L1, L2] = distances[tappings](at.pipe);
   const b = at.ratio;
-  const b4 = b ** 4;
+  const b2 = b * b; // products, since a power costs as much as all the rest
+  const b4 = b2 * b2;
+  const tenth = b ** 0.1; // b^0.7, b^0.8 and b^1.3 are products of it
+  const tenth3 = tenth * tenth * tenth;
   const M2 = (2 * L2) / (1 - b); // M'2 of Formula (4)
   return {
-    limiting: 0.5961 + 0.0261 * b ** 2 - 0.216 * b ** 8, // Formula (4), C at Re = infinity, corner tappings
+    limiting: 0.5961 + 0.0261 * b2 - 0.216 * b4 * b4, // Formula (4), C at Re = infinity, corner tappings
     upstream: ((0.043 + 0.08 * Math.exp(-10 * L1) - 0.123 * Math.exp(-7 * L1)) * b4) / (1 - b4), // Formula (4)
-    downstream: -0.031 * (M2 - 0.8 * M2 ** 1.1) * b ** 1.3, // Formula (4)
+    downstream: M2 === 0 ? 0 : -0.031 * (M2 - 0.8 * M2 ** 1.1) * b * tenth3, // Formula (4), b^1.3
     small: at.pipe < smallPipe ? 0.011 * (0.75 - b) * (2.8 - at.pipe / inch) : 0, // Formula (4), D < 71.12 mm
+    turbulent: 0.000521 * mega07 * tenth3 * tenth3 * tenth, // Formula (4), of 0.000521 (1e6 b/Re)^0.7
+    slope: b * b2 * Math.sqrt(b) * mega03, // Formula (4), of b^3.5 (1e6/Re)^0.3
+    a: a08 * tenth3 * tenth3 * tenth * tenth, // Formula (4), of A = (19000 b/Re)^0.8
   };
 };
 
@@ -48,15 +59,12 @@ const terms = (tappings: Tappings, at: Geometry) => {
  * whole power of y, so one power serves them all.
  */
 const discharge = (tappings: Tappings, at: Geometry): Discharge => {
-  const b = at.ratio;
-  const { limiting, upstream, downstream, small } = terms(tappings, at);
-  const a = (19000 * b) ** 0.8; // A = a y^8
-  const s = b ** 3.5 * 1e6 ** 0.3; // b^3.5 (1e6/Re)^0.3 = s y^3
+  const { limiting, upstream, downstream, small, turbulent, slope, a } = terms(tappings, at);
   const c0 = limiting + upstream + downstream + small;
-  const c3 = 0.0188 * s; // Formula (4)
-  const c7 = 0.000521 * (1e6 * b) ** 0.7; // Formula (4), 0.000521 (1e6 b/Re)^0.7
+  const c3 = 0.0188 * slope; // Formula (4)
+  const c7 = turbulent; // Formula (4)
   const c8 = -0.11 * upstream * a; // Formula (4), factor 1 - 0.11 A of the upstream tapping term
-  const c11 = 0.0063 * a * s; // Formula (4), 0.0063 A b^3.5 (1e6/Re)^0.3
+  const c11 = 0.0063 * a * slope; // Formula (4), 0.0063 A b^3.5 (1e6/Re)^0.3
   return (reynolds) => {
     const y = reynolds ** -0.1;
     const y3 = y * y * y;

@@ -1,7 +1,4 @@
 /** The one rounding rule: how every view spells a number. */
-import type { Decimal } from 'decimal.js';
-import { Exact } from './exact.ts';
-
 export interface Spelling {
   /** Significant digits, trailing zeros kept; the notation follows `plainFrom` and `plainTo`. */
   readonly significant?: number;
@@ -24,6 +21,12 @@ const SUPERSCRIPTS: Readonly<Record<string, string>> = Object.fromEntries(
   [...'0123456789-'].map((character, at) => [character, [...'⁰¹²³⁴⁵⁶⁷⁸⁹⁻'][at] ?? '']),
 );
 
+/** A number as its shortest decimal: 0.digits times ten to `point`, without sign. */
+interface Digits {
+  readonly digits: string; // no zero in front or behind; empty for zero
+  readonly point: number;
+}
+
 /**
  * Spells a number, rounded half away from zero on its shortest decimal: 2.675 to two decimals is 2.68. Neither
  * `significant` nor `decimals` gives every digit of the shortest decimal. Zero has no significant digits and is `0`.
@@ -35,25 +38,56 @@ export function spell(value: number, spelling: Spelling): string {
   if (significant !== undefined && decimals !== undefined) {
     throw new Error('expected significant digits or decimals, got both');
   }
-  const shortest = new Exact(value);
-  if (decimals !== undefined) return dressed(shortest.toFixed(decimals), 0, spelling);
-  const rounded = significant === undefined ? shortest : shortest.toSignificantDigits(significant);
-  const size = rounded.abs();
-  if (size.isZero() || (size.gte(plainFrom) && size.lte(plainTo)))
-    return dressed(plain(rounded, significant), 0, spelling);
-  const mantissa = rounded.times(new Exact(10).pow(-rounded.e));
-  return dressed(plain(mantissa, significant), rounded.e, spelling);
+  const negative = value < 0;
+  const shortest = shortestOf(value);
+  if (decimals !== undefined) {
+    const fixed = plain(rounded(shortest, shortest.point + decimals), decimals);
+    return dressed(negative, fixed, 0, spelling);
+  }
+  const kept = significant === undefined ? shortest : rounded(shortest, significant);
+  if (kept.digits === '') return dressed(negative, '0', 0, spelling);
+  const size = Number(`0.${kept.digits}e${kept.point}`);
+  const power = size >= plainFrom && size <= plainTo ? 0 : kept.point - 1;
+  const shown = { digits: kept.digits, point: kept.point - power };
+  const behind = (significant ?? kept.digits.length) - shown.point;
+  return dressed(negative, plain(shown, Math.max(0, behind)), power, spelling);
 }
 
-/** Plain digits with the zeros that the significant digits ask for; none for zero itself. */
-function plain(rounded: Decimal, significant: number | undefined): string {
-  if (significant === undefined || rounded.isZero()) return rounded.toFixed();
-  return rounded.toFixed(Math.max(0, significant - 1 - rounded.e));
+/** The shortest decimal that reads back as the value. */
+function shortestOf(value: number): Digits {
+  if (value === 0) return { digits: '', point: 0 };
+  const [mantissa = '', exponent = ''] = Math.abs(value).toExponential().split('e');
+  return { digits: mantissa.replace('.', ''), point: Number(exponent) + 1 };
 }
 
-function dressed(digits: string, power: number, { typographic, grouping = true, mark = '.' }: Spelling): string {
-  const negative = digits.startsWith('-') && /[1-9]/.test(digits);
-  const [whole = '', fraction = ''] = digits.replace('-', '').split('.');
+/** The first `count` digits, half away from zero; a carry moves the point. */
+function rounded({ digits, point }: Digits, count: number): Digits {
+  if (digits.length <= count) return { digits, point };
+  const up = count >= 0 && (digits[count] ?? '') >= '5';
+  const kept = [...digits.slice(0, Math.max(0, count))];
+  if (!up) return trimmed(kept.join(''), point);
+  while (kept.at(-1) === '9') kept.pop();
+  const last = kept.pop();
+  if (last === undefined) return { digits: '1', point: point + 1 };
+  return { digits: kept.join('') + (Number(last) + 1), point };
+}
+
+function trimmed(digits: string, point: number): Digits {
+  const kept = digits.replace(/0+$/, '');
+  return { digits: kept, point: kept === '' ? 0 : point };
+}
+
+/** Plain digits with `decimals` places behind the mark. */
+function plain({ digits, point }: Digits, decimals: number): string {
+  const whole = point > 0 ? digits.slice(0, point).padEnd(point, '0') : '0';
+  const fraction = point > 0 ? digits.slice(point) : digits === '' ? '' : '0'.repeat(-point) + digits;
+  return decimals === 0 ? whole : `${whole}.${fraction.padEnd(decimals, '0')}`;
+}
+
+function dressed(below: boolean, digits: string, power: number, spelling: Spelling): string {
+  const { typographic, grouping = true, mark = '.' } = spelling;
+  const negative = below && /[1-9]/.test(digits);
+  const [whole = '', fraction = ''] = digits.split('.');
   if (!typographic) return (negative ? '-' : '') + joined(whole, fraction, '.') + (power === 0 ? '' : `e${power}`);
   const sign = negative ? '\u2212' : '';
   const body = grouping

@@ -30,8 +30,12 @@ export function asWritten({ number, unit, si }: Quantity): Value {
 
 function printed(number: string, plain: string, unit: Unit | undefined, si: number): Value {
   if (unit === undefined) return { number, unit: '', text: number, plain, si };
-  const gap = unit.symbol === 'deg' ? '' : NO_BREAK; // a plane angle carries its sign without a space
-  return { number, unit: unit.print, text: `${number}${gap}${unit.print}`, plain: `${plain} ${unit.symbol}`, si };
+  return { number, unit: unit.print, text: withUnit(number, unit), plain: `${plain} ${unit.symbol}`, si };
+}
+
+function withUnit(number: string, unit: Unit | undefined): string {
+  if (unit === undefined) return number;
+  return `${number}${unit.symbol === 'deg' ? '' : NO_BREAK}${unit.print}`; // a plane angle carries its sign without a space
 }
 
 /** Figures of one meter by role: the unit of the display and the one rounding rule. */
@@ -45,20 +49,24 @@ export interface Printer {
 const plainRoles: readonly Role[] = ['reynolds', 'ratio', 'coefficient', 'factor', 'number'];
 
 export function printer(units: DisplayUnits): Printer {
-  const rounded = (si: number, role: Role, rule: (rounding: Rounding) => Rounding): Value => {
-    if (isPlain(role)) return show(si, undefined, rule(roundingOf(role, '')));
-    const unit = units[role];
-    const rounding = rule(roundingOf(role, unit.symbol));
-    if (role !== 'percent' && role !== 'uncertainty') return show(si, unit, rounding);
-    return { ...show(si / 100, unit, rounding), si };
+  const unitOf = (role: Role): Unit | undefined => (isPlain(role) ? undefined : units[role]);
+  const shareOf = (si: number, role: Role): number => (role === 'percent' || role === 'uncertainty' ? si / 100 : si);
+  const value = (si: number, role: Role): Value => {
+    const unit = unitOf(role);
+    return { ...show(shareOf(si, role), unit, roundingOf(role, unit?.symbol ?? '')), si };
   };
-  const value = (si: number, role: Role): Value => rounded(si, role, (rounding) => rounding);
+  const text = (si: number, role: Role, rule: (rounding: Rounding) => Rounding): string => {
+    const unit = unitOf(role);
+    const number = shareOf(si, role);
+    const rounding = rule(roundingOf(role, unit?.symbol ?? ''));
+    return withUnit(spelled(unit === undefined ? number : fromSI(number, unit), rounding, true), unit);
+  };
   return {
     units,
     value,
     print: {
-      figure: (si, role) => value(si, role).text,
-      limit: (si, role) => rounded(si, role, ofLimit).text,
+      figure: (si, role) => text(si, role, (rounding) => rounding),
+      limit: (si, role) => text(si, role, ofLimit),
     },
   };
 }

@@ -4,6 +4,7 @@ import type { Commands } from '../../state/commands.ts';
 import type { WorkbenchStore } from '../../state/workbench.ts';
 import { Boundary } from './Boundary.tsx';
 import { BindingProvider, useWorkbench } from './binding.tsx';
+import { PaperOfSize } from './PaperOfSize.tsx';
 import { usePlace } from './place.ts';
 import { SheetPlace, type SheetsView } from './SheetPlace.tsx';
 import { Size } from './Size.tsx';
@@ -54,7 +55,10 @@ function Body({ sheets }: { readonly sheets: SheetsView }) {
       </Boundary>
       <main className={styles.main} id="content" tabIndex={-1}>
         <Suspense fallback={<p className={styles.wait}>One moment</p>}>
-          <Boundary of={project}>{place === 'size' ? <Size /> : <SheetPlace sheets={sheets} />}</Boundary>
+          <Boundary key={place} of={project}>
+            {place === 'size' ? <Size /> : <SheetPlace sheets={sheets} />}
+          </Boundary>
+          {place === 'size' && <PaperOfSize sheets={sheets} />}
         </Suspense>
       </main>
     </div>

@@ -1,4 +1,4 @@
-/** The sheets as they will be printed, with the choice of paper. */
+/** The sheets as they will be printed, with the choice of paper, of meters and of sheets. */
 import { type ComponentType, useState } from 'react';
 import type { Project } from '../../core/document/project.ts';
 import type { Results } from '../../core/result/record.ts';
@@ -6,26 +6,56 @@ import { useCommands, useWorkbench } from './binding.tsx';
 import styles from './SheetPlace.module.css';
 
 export type Paper = 'A4' | 'Letter';
+export type SheetKind = 'sizing' | 'checks' | 'dimensions' | 'working';
 
 /** The printed sheets; app hands them in, the screen only gives them their place. */
-export type SheetsView = ComponentType<{ readonly project: Project; readonly results: Results; readonly paper: Paper }>;
+export type SheetsView = ComponentType<{
+  readonly project: Project;
+  readonly results: Results;
+  readonly paper: Paper;
+  readonly only?: number;
+  readonly include?: readonly SheetKind[];
+  readonly paperOnly?: boolean;
+}>;
 
 const PAPERS: readonly Paper[] = ['A4', 'Letter'];
+const SHEETS: readonly { readonly kind: SheetKind; readonly label: string }[] = [
+  { kind: 'sizing', label: 'Sizing' },
+  { kind: 'checks', label: 'Checks and sources' },
+  { kind: 'dimensions', label: 'Tolerances and inspection' },
+  { kind: 'working', label: 'Working' },
+];
+
+/** The paper that goes with the units of a project. */
+export const paperFor = ({ display }: Project): Paper => (display === 'US' ? 'Letter' : 'A4');
 
 export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) {
   const project = useWorkbench((state) => state.project);
   const results = useWorkbench((state) => state.results);
-  const [paper, setPaper] = useState<Paper>(project.display === 'US' ? 'Letter' : 'A4');
+  const selected = useWorkbench((state) => state.selected);
+  const [paper, setPaper] = useState<Paper>(paperFor(project));
+  const [alone, setAlone] = useState(false);
+  const [include, setInclude] = useState<readonly SheetKind[]>(['sizing', 'checks', 'dimensions']);
   const commands = useCommands();
+  const toggle = (kind: SheetKind) =>
+    setInclude(include.includes(kind) ? include.filter((one) => one !== kind) : [...include, kind]);
   return (
     <div className={styles.place}>
       <div className={styles.bar}>
+        <Choices legend="Paper" name="paper" choices={PAPERS} chosen={paper} choose={setPaper} />
+        <Choices
+          legend="Meters"
+          name="meters"
+          choices={['all', 'this one']}
+          chosen={alone ? 'this one' : 'all'}
+          choose={(choice) => setAlone(choice === 'this one')}
+        />
         <fieldset>
-          <legend>Paper</legend>
-          {PAPERS.map((name) => (
-            <label key={name}>
-              <input type="radio" name="paper" checked={paper === name} onChange={() => setPaper(name)} />
-              {name}
+          <legend>Sheets</legend>
+          {SHEETS.map(({ kind, label }) => (
+            <label key={kind}>
+              <input type="checkbox" checked={include.includes(kind)} onChange={() => toggle(kind)} />
+              {label}
             </label>
           ))}
         </fieldset>
@@ -34,8 +64,36 @@ export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) 
         </button>
       </div>
       <div className={styles.sheets}>
-        <Sheets project={project} results={results} paper={paper} />
+        <Sheets
+          project={project}
+          results={results}
+          paper={paper}
+          include={include}
+          {...(alone && selected >= 0 ? { only: selected } : {})}
+        />
       </div>
     </div>
+  );
+}
+
+interface ChoicesProps<Choice extends string> {
+  readonly legend: string;
+  readonly name: string;
+  readonly choices: readonly Choice[];
+  readonly chosen: Choice;
+  readonly choose: (choice: Choice) => void;
+}
+
+function Choices<Choice extends string>({ legend, name, choices, chosen, choose }: ChoicesProps<Choice>) {
+  return (
+    <fieldset>
+      <legend>{legend}</legend>
+      {choices.map((choice) => (
+        <label key={choice}>
+          <input type="radio" name={name} checked={chosen === choice} onChange={() => choose(choice)} />
+          {choice}
+        </label>
+      ))}
+    </fieldset>
   );
 }

@@ -1,11 +1,11 @@
-/** A text once it has not changed for a while, so that typing is not read out letter by letter. */
+/** A value once it has not changed for a while: text that is not read out letter by letter, paper that is not drawn anew. */
 import { useEffect, useState } from 'react';
 
-export function useRested(text: string, pause: number): string {
-  const [rested, setRested] = useState('');
+export function useRested<Value>(value: Value, pause: number): Value | undefined {
+  const [rested, setRested] = useState<Value>();
   useEffect(() => {
-    const timer = setTimeout(() => setRested(text), pause);
+    const timer = setTimeout(() => setRested(() => value), pause);
     return () => clearTimeout(timer);
-  }, [text, pause]);
+  }, [value, pause]);
   return rested;
 }

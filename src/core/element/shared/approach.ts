@@ -6,5 +6,6 @@
  */
 export const approachFactor = (ratio: number): number => {
   if (!(ratio >= 0 && ratio < 1)) throw new RangeError(`approach factor: expected 0 <= beta < 1, got ${ratio}`);
-  return 1 / Math.sqrt(1 - ratio ** 4);
+  const square = ratio * ratio;
+  return 1 / Math.sqrt(1 - square * square); // ISO 5167-1, Formula (1)
 };
