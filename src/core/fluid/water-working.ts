@@ -49,7 +49,7 @@ export function waterUncertainties(region: Region, expands: boolean): NonNullabl
   return {
     density: of(density, 'IAPWS R7-97(2012), estimates of uncertainty'),
     viscosity: of(expands ? 0.02 : 0.01, 'IAPWS R12-08, estimates of uncertainty'),
-    speedOfSound: of(0.002, 'IAPWS R7-97(2012), estimates of uncertainty'),
+    speedOfSound: of(0.002, 'IAPWS R7-97(2012), estimates of uncertainty'), // up to 0.2 % in region 3
   };
 }
 

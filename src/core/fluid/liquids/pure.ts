@@ -67,7 +67,7 @@ export function pureLiquid(name: string): Liquid | undefined {
       below: 0, // it freezes
       above: 0, // the critical point
       source: table('2-32'),
-      share: 0.01,
+      share: 0.01, // usual bound of the table
       remark: 'liquid-saturated-density',
     },
     viscosity: { ...along(viscosity, '2-313', 'liquid-viscosity-curve', furthestBeyond), share: 0.05 },

@@ -45,13 +45,13 @@ export function secondaryFluid(name: string, share: number | undefined, path: st
   const density: Property = {
     ...range,
     at: (T) => polynomial(row.density, mean, x, celsius(T)),
-    share: 0.002,
+    share: 0.002, // own estimate against the tables
     remark: 'liquid-mixture-density',
   };
   const viscosity: Property = {
     ...range,
     at: (T) => 1e-3 * Math.exp(polynomial(row.viscosity, mean, x, celsius(T))), // ln of mPa.s
-    share: 0.04,
+    share: 0.04, // own estimate against the tables
     remark: 'liquid-mixture-viscosity',
   };
   return ok({
