@@ -5,6 +5,7 @@
 import { mkdirSync, writeFileSync } from 'node:fs';
 import { cpus } from 'node:os';
 import { join } from 'node:path';
+import { gas } from './gas.ts';
 import { checksum } from './pairs.ts';
 import { type Line, table } from './report.ts';
 import { screen } from './screen.ts';
@@ -17,6 +18,7 @@ const parts: Readonly<Record<string, () => Line[] | Promise<Line[]>>> = {
   solving: () => solving(orificeCases()),
   whole: () => whole(root, ownFlow(orificeCases())),
   water,
+  gas,
   screen: () => screen(root),
 };
 

@@ -4,7 +4,7 @@
  * Standard: ISO 20765-2:2015 (GERG-2008). Symbols: δ = ρ/ρ_r, τ = T_r/T; SI, densities in mol/m3.
  */
 import { type Mixture, R } from './mixture.ts';
-import { highestPower, type Shape, shapes, slotPlace, slotPower } from './terms.ts';
+import { figuresPerShape, highestPower, shapeCount, shapeFigures, shapeTop, slotPlace, slotPower } from './terms.ts';
 
 /** A mixture at one temperature. */
 export interface Isotherm {
@@ -24,7 +24,7 @@ export const isothermOf = (mixture: Mixture, T: number): Isotherm => {
 /** Coefficients of α_r (order 0), of τ ∂α_r/∂τ (order 1) or of τ² ∂²α_r/∂τ² (order 2). */
 export function coefficientsOf({ slots, factors }: Mixture, tau: number, order: 0 | 1 | 2): Float64Array {
   const logarithm = Math.log(tau);
-  const coefficients = new Float64Array(shapes.length * highestPower);
+  const coefficients = new Float64Array(shapeCount * highestPower);
   let t = 0;
   let power = 1;
   for (let k = 0; k < slots.length; k++) {
@@ -34,9 +34,9 @@ export function coefficientsOf({ slots, factors }: Mixture, tau: number, order: 
       t = own;
       power = Math.exp(t * logarithm);
     }
-    const lowered = order === 0 ? 1 : order === 1 ? t : t * (t - 1);
+    const lowered = order === 0 ? power : order === 1 ? t * power : t * (t - 1) * power;
     const place = slotPlace[slot] as number;
-    coefficients[place] = (coefficients[place] as number) + (factors[k] as number) * lowered * power;
+    coefficients[place] = (coefficients[place] as number) + (factors[k] as number) * lowered;
   }
   return coefficients;
 }
@@ -50,27 +50,37 @@ export interface Expanded {
 
 /** Sums a table of coefficients: for each shape exp(h) Σ A_d δ^d with u = δ h' and v = δ² h''. */
 export function expand(used: Int32Array, coefficients: Float64Array, delta: number): Expanded {
-  let [a, a1, a2] = [0, 0, 0];
+  let a = 0;
+  let a1 = 0;
+  let a2 = 0;
   for (let k = 0; k < used.length; k++) {
-    const number = used[k] as number;
-    const { order, eta, epsilon, beta, gamma } = shapes[number] as Shape;
-    let [P, P1, P2] = [0, 0, 0]; // Σ A_d δ^d, Σ d A_d δ^d, Σ d (d-1) A_d δ^d
-    for (let column = number * highestPower + highestPower - 1; column >= number * highestPower; column--) {
+    const shape = used[k] as number;
+    const first = shape * highestPower; // the table starts at δ^1
+    let P = 0; // Σ A_d δ^(d-1), then its two derivatives
+    let P1 = 0;
+    let P2 = 0;
+    for (let column = first + (shapeTop[shape] as number) - 1; column >= first; column--) {
       P2 = P2 * delta + P1;
       P1 = P1 * delta + P;
       P = P * delta + (coefficients[column] as number);
     }
-    P2 = 2 * delta * delta * (P2 * delta + P1); // the table starts at δ^1: one more step with a coefficient 0
-    P1 = delta * (P1 * delta + P);
-    P *= delta;
-    let [h, u, v] = [0, 0, 0];
+    P2 = 2 * delta * delta * (P2 * delta + P1); // Σ d (d-1) A_d δ^d
+    P1 = delta * (P1 * delta + P); // Σ d A_d δ^d
+    P *= delta; // Σ A_d δ^d
+    const figures = shape * figuresPerShape;
+    const order = shapeFigures[figures] as number;
+    let h = 0;
+    let u = 0;
+    let v = 0;
     if (order > 0) {
       h = -raised(delta, order);
       u = order * h;
       v = (order - 1) * u;
     } else {
-      const away = delta - epsilon;
-      h = -eta * away * away - beta * (delta - gamma);
+      const eta = shapeFigures[figures + 1] as number;
+      const away = delta - (shapeFigures[figures + 2] as number);
+      const beta = shapeFigures[figures + 3] as number;
+      h = -eta * away * away - beta * (delta - (shapeFigures[figures + 4] as number));
       u = -delta * (2 * eta * away + beta);
       v = -2 * eta * delta * delta;
     }

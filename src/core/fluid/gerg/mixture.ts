@@ -4,7 +4,7 @@
  */
 import { components } from './components.table.ts';
 import { reducing } from './reducing.table.ts';
-import { departures, pureShares, type Share, slotCount, slotShape } from './terms.ts';
+import { departures, pureShares, type Share, shapeCount, slotCount, slotShape } from './terms.ts';
 
 /** Molar gas constant of the equation, J/(mol.K). Source: Kunz and Wagner 2012; the later exact value is not for it. */
 export const R = 8.314472;
@@ -49,7 +49,9 @@ for (const [i, j, betaV, gammaV, betaT, gammaT] of reducing) {
 
 /** The mixture of a composition; `x` in the order of componentNames, sum 1. */
 export function mixtureOf(x: readonly number[]): Mixture {
-  let [Tr, volume, molarMass] = [0, 0, 0];
+  let Tr = 0;
+  let volume = 0;
+  let molarMass = 0;
   for (let i = 0; i < size; i++) {
     const xi = x[i] as number;
     if (xi === 0) continue;
@@ -75,17 +77,19 @@ function termsOf(x: readonly number[]): Pick<Mixture, 'slots' | 'factors' | 'sha
   for (const { i, j, F, share } of departures) addTo(sums, share, (x[i] as number) * (x[j] as number) * F);
   const slots = new Int32Array(slotCount);
   const factors = new Float64Array(slotCount);
+  const shapes = new Int32Array(shapeCount);
   let used = 0;
-  let shapeBits = 0;
+  let present = 0; // a bit for each shape
   for (let slot = 0; slot < slotCount; slot++) {
     const factor = sums[slot] as number;
     if (factor === 0) continue;
     slots[used] = slot;
     factors[used++] = factor;
-    shapeBits |= 1 << (slotShape[slot] as number);
+    present |= 1 << (slotShape[slot] as number);
   }
-  const shapes = Int32Array.from({ length: 32 }, (_, shape) => shape).filter((shape) => shapeBits & (1 << shape));
-  return { slots: slots.subarray(0, used), factors: factors.subarray(0, used), shapes };
+  let usedShapes = 0;
+  for (let shape = 0; shape < shapeCount; shape++) if (present & (1 << shape)) shapes[usedShapes++] = shape;
+  return { slots: slots.subarray(0, used), factors: factors.subarray(0, used), shapes: shapes.subarray(0, usedShapes) };
 }
 
 function addTo(sums: Float64Array, { slots, factors }: Share, weight: number): void {

@@ -7,7 +7,7 @@ import { functions, pairs } from './departure.table.ts';
 import { pureTerms } from './pure.table.ts';
 
 /** The exponential factor of a term: exp(-δ^order), or exp(-eta (δ-epsilon)^2 - beta (δ-gamma)); 1 where all are 0. */
-export interface Shape {
+interface Shape {
   readonly order: number;
   readonly eta: number;
   readonly epsilon: number;
@@ -55,7 +55,13 @@ const allRows = [...pureRows.flat(), ...departureRows.flatMap(({ rows }) => rows
 const shapeKey = ({ order, eta, epsilon, beta, gamma }: Shape): string => [order, eta, epsilon, beta, gamma].join(' ');
 const shapesByKey = new Map(allRows.map(([, , , shape]) => [shapeKey(shape), shape]));
 
-export const shapes: readonly Shape[] = [...shapesByKey.values()];
+const shapes: readonly Shape[] = [...shapesByKey.values()];
+export const shapeCount = shapes.length;
+/** The figures of every shape, one row each: order, eta, epsilon, beta, gamma. */
+export const shapeFigures = Float64Array.from(
+  shapes.flatMap(({ order, eta, epsilon, beta, gamma }) => [order, eta, epsilon, beta, gamma]),
+);
+export const figuresPerShape = 5;
 const shapeNumbers = new Map([...shapesByKey.keys()].map((key, number) => [key, number]));
 
 function slotOf([, d, t, shape]: Row): Slot {
@@ -75,6 +81,11 @@ function shareOf(rows: readonly Row[]): Share {
     factors: Float64Array.from(rows, ([n]) => n),
   };
 }
+
+/** Highest power of δ that each shape has. */
+export const shapeTop = Int32Array.from(shapes, (_, number) =>
+  slots.reduce((top, { shape, d }) => (shape === number ? Math.max(top, d) : top), 0),
+);
 
 export const slotCount = slots.length;
 /** Power of τ of each slot. */
