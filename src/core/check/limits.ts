@@ -1,25 +1,36 @@
 /** The standard's own limits of use: sizes, diameter ratio, Reynolds number, p2/p1, pipe roughness. */
-import type { LimitId } from '../element/contract.ts';
+import type { Limit, LimitId } from '../element/contract.ts';
 import { boundsOf, type Case, type Flow, flowsOf, largest, limitOf, within } from './case.ts';
-import type { Assumption, Finding } from './finding.ts';
+import type { Finding } from './finding.ts';
 
 export function checkLimits(subject: Case): readonly Finding[] {
-  const { geometry } = subject.solution.meter;
+  const { geometry, primary } = subject.solution.meter;
+  const limits = primary.limits(geometry, 0); // of sizes, which depend on no flow
   return [
-    ...size(subject, 'pipe-bore', 'range-and-span', geometry.pipe, 'm'),
-    ...size(subject, 'element-bore', 'range-and-span', geometry.bore, 'm'),
-    ...size(subject, 'diameter-ratio', 'range-and-span', geometry.ratio, '1'),
+    ...size(limits, 'pipe-bore', geometry.pipe, 'm'),
+    ...size(limits, 'element-bore', geometry.bore, 'm'),
+    ...size(limits, 'diameter-ratio', geometry.ratio, '1'),
     ...checkReynolds(subject),
     ...checkPressureRatio(subject),
     ...checkRoughness(subject),
   ];
 }
 
-function size(subject: Case, id: LimitId, assumption: Assumption, value: number, unit: string): Finding[] {
-  const limit = limitOf(subject, id, 0);
+function size(limits: readonly Limit[], id: LimitId, value: number, unit: string): Finding[] {
+  const limit = limits.find((one) => one.id === id);
   if (limit === undefined) return [];
   const bounds = boundsOf(limit);
-  return [{ id, assumption, verdict: within(value, bounds), value, unit, limit: bounds, source: limit.source }];
+  return [
+    {
+      id,
+      assumption: 'range-and-span',
+      verdict: within(value, bounds),
+      value,
+      unit,
+      limit: bounds,
+      source: limit.source,
+    },
+  ];
 }
 
 /** One finding when every flow is inside, from the lowest to the highest; else one for each flow that is not. */

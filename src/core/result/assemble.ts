@@ -3,9 +3,11 @@ import type { Finding } from '../check/finding.ts';
 import type { Straightness } from '../check/straight.ts';
 import type { DutyName, MeterText } from '../document/project.ts';
 import type { FluidState } from '../fluid/contract.ts';
+import { relativeDensity } from '../fluid/relative-density.ts';
 import type { MeterInput } from '../input/meter.ts';
 import type { Site } from '../input/site.ts';
 import type { Seen, Source } from '../quantity/source.ts';
+import type { Working } from '../quantity/working.ts';
 import type { Operation } from '../solve/equation.ts';
 import { metalWorking } from '../solve/metal.ts';
 import type { Solution } from '../solve/solve.ts';
@@ -13,6 +15,7 @@ import type { Budgets } from '../uncertainty/duty.ts';
 import type { Budget } from '../uncertainty/iso5167.ts';
 import { curveOf, reynoldsLimits } from './curve.ts';
 import { headsOf } from './heads.ts';
+import { withLate } from './late.ts';
 import type { PointRecord, Solved, StateRecord } from './record.ts';
 import { type Direction, pointWorking, velocityOf } from './working.ts';
 
@@ -34,44 +37,60 @@ export function assemble(parts: Parts): Solved {
   const { meter, duty, span } = solution;
   const { geometry, primary, state } = meter;
   const maximum = duty.maximum as Operation;
-  const points = pointsOf(parts);
   const tappings = primary.tappings(geometry);
-  const solved = {
+  const relative = relativeOf(state, input, site);
+  const figures = {
     tag: input.tag,
     status: 'solved',
     find: input.find,
     element: primary.name,
     standard: primary.standard,
-    state: stateRecord(state),
+    state: stateRecord(state, relative),
     bore_m: geometry.bore,
     pipe_m: geometry.pipe,
     diameterRatio: geometry.ratio,
     boreAsMeasured_m: solution.boreAsMeasured,
     pipeAsMeasured_m: solution.pipeAsMeasured,
-    points,
+    points: pointsOf(parts),
     span_Pa: span,
     checks,
-    curve: curveOf(meter, span, input.uncertainty, straight.parts),
-    reynoldsLimits: reynoldsLimits(meter),
-    heads: headsOf(meter, maximum, site.gravity),
-    dimensions: primary.dimensions(geometry),
-    tappings: { upstream_m: tappings.upstream, downstream_m: tappings.downstream },
     straightLengths: straight.lengths,
-    working: [...state.working, ...metalWorking(input, solution.boreAsMeasured, state.temperature)],
+    tappings: { upstream_m: tappings.upstream, downstream_m: tappings.downstream },
     unread: UNREAD.filter((key) => written[key] !== undefined),
-  } as const satisfies Omit<Solved, 'sources'>;
-  return { ...solved, sources: sourcesOf(solved, parts.budgets) };
+  } as const;
+  const solved: Solved = withLate<typeof figures, Late>(figures, {
+    curve: () => curveOf(meter, span, input.uncertainty, straight.parts),
+    reynoldsLimits: () => reynoldsLimits(meter),
+    heads: () => headsOf(meter, maximum, site.gravity),
+    dimensions: () => primary.dimensions(geometry),
+    working: () => [...state.working, ...relative, ...metalWorking(input, solution.boreAsMeasured, state.temperature)],
+    sources: () => sourcesOf(solved, parts.budgets),
+  });
+  return solved;
 }
 
-function stateRecord(state: FluidState): StateRecord {
+/** What only screen and paper ask for. */
+type Late = Pick<Solved, 'curve' | 'reynoldsLimits' | 'heads' | 'dimensions' | 'working' | 'sources'>;
+
+/** The relative density as a working line, for a gas whose base volume counts the whole of it: none for air. */
+function relativeOf({ phase, baseDensity }: FluidState, { fluid }: MeterInput, { base }: Site): readonly Working[] {
+  if (phase !== 'gas' || baseDensity === undefined || fluid.kind === 'air') return [];
+  const line = relativeDensity(baseDensity, base);
+  return line === undefined ? [] : [line];
+}
+
+function stateRecord(state: FluidState, [relative]: readonly Working[]): StateRecord {
   const optional = {
     isentropicExponent: state.isentropicExponent,
     compressibility: state.compressibility,
     vapourPressure_Pa: state.vapourPressure,
     saturationTemperature_K: state.saturationTemperature,
     baseDensity_kg_m3: state.baseDensity,
+    molarMass_kg_mol: state.molarMass,
+    relativeDensity: relative?.value,
     quality: state.quality,
     overridden: state.overridden,
+    uncertainty_percent: percentsOf(state.uncertainties),
   };
   const known = Object.entries(optional).filter(([, value]) => value !== undefined);
   return {
@@ -82,6 +101,12 @@ function stateRecord(state: FluidState): StateRecord {
     pressure_Pa: state.pressure,
     temperature_K: state.temperature,
   };
+}
+
+/** Uncertainties that the formulations state, by the names of the figures, in per cent; undefined where none does. */
+function percentsOf(stated: FluidState['uncertainties']): Readonly<Record<string, number>> | undefined {
+  const known = Object.entries(stated ?? {}).map(([name, { share }]) => [name, 100 * share] as const);
+  return known.length === 0 ? undefined : Object.fromEntries(known);
 }
 
 function pointsOf(parts: Parts): Partial<Record<DutyName, PointRecord>> {
@@ -97,7 +122,7 @@ function pointOf({ input, solution }: Parts, name: DutyName, operation: Operatio
   const { state, geometry, primary } = solution.meter;
   const { massFlow, differential, coefficient, epsilon, reynolds } = operation;
   const direction: Direction = name === 'maximum' && input.find === 'flow' ? 'flow' : 'differential';
-  return {
+  const figures = {
     massFlow_kg_s: massFlow,
     volumeFlow_m3_s: massFlow / state.density,
     ...(state.baseDensity === undefined ? {} : { baseVolumeFlow_m3_s: massFlow / state.baseDensity }),
@@ -113,14 +138,16 @@ function pointOf({ input, solution }: Parts, name: DutyName, operation: Operatio
       terms: budget.terms.map(({ name: term, percentOfFlow }) => ({ name: term, percentOfFlow })),
       parts: budget.coefficientParts.map(({ id, percent }) => ({ name: id, percentOfC: percent })),
     },
-    working: pointWorking(solution.meter, operation, direction, budget),
   };
+  return withLate<typeof figures, Pick<PointRecord, 'working'>>(figures, {
+    working: () => pointWorking(solution.meter, operation, direction, budget),
+  });
 }
 
 const WORST: readonly Seen[] = ['memory', 'second-hand', 'practice', 'derived', 'read'];
 
 /** Every source once, the least certain first. */
-function sourcesOf(solved: Omit<Solved, 'sources'>, budgets: Budgets): readonly Source[] {
+function sourcesOf(solved: Solved, budgets: Budgets): readonly Source[] {
   const working = [...solved.working, ...Object.values(solved.points).flatMap((point) => point.working)];
   const parts = Object.values(budgets).flatMap((budget) => budget.coefficientParts);
   const all = [...working, ...solved.checks, ...parts].map(({ source }) => source);

@@ -19,10 +19,15 @@ export interface StateRecord {
   readonly vapourPressure_Pa?: number;
   readonly saturationTemperature_K?: number;
   readonly baseDensity_kg_m3?: number;
+  readonly molarMass_kg_mol?: number;
+  /** Density at the base state over that of dry air there. */
+  readonly relativeDensity?: number;
   /** Mass fraction of vapour in wet steam. */
   readonly quality?: number;
   /** Figures that the user put in place of the model's. */
   readonly overridden?: readonly string[];
+  /** Expanded, 95 %, as the formulation of the figure states it, by the name of the figure. */
+  readonly uncertainty_percent?: Readonly<Record<string, number>>;
   readonly pressure_Pa: number; // absolute, upstream tapping
   readonly temperature_K: number;
 }
