@@ -37,6 +37,8 @@ export interface FluidState {
   readonly compressibility?: number; // p/(rho R T)
   readonly molarMass?: MolarMass;
   readonly speedOfSound?: number; // m/s
+  /** Fall of temperature with pressure at constant enthalpy, negative where a gas warms as it expands. */
+  readonly jouleThomson?: number; // K/Pa
   /** Pressure at which the liquid boils at its temperature; absent where it has none or none is known. */
   readonly vapourPressure?: AbsolutePressure;
   /** Saturation temperature at the pressure, below the critical pressure. */

@@ -4,6 +4,7 @@
  */
 import type { AbsolutePressure, Density, MolarMass, Temperature } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
+import { spellings } from './composition.table.ts';
 import { type Basis, compositionOf } from './composition.ts';
 import type { FluidState } from './contract.ts';
 import { splits } from './cubic/stability.ts';
@@ -20,9 +21,10 @@ import { gasViscosity, viscosityBasis, viscosityCautions } from './gas-viscosity
 import { type BaseGas, type GasFigures, gasSources, gasWorking } from './gas-working.ts';
 import { gasDensity, liquidDensity } from './gerg/density.ts';
 import { type Isotherm, isothermOf } from './gerg/isotherm.ts';
-import { type Mixture, mixtureOf, R } from './gerg/mixture.ts';
+import { componentNames, type Mixture, mixtureOf, R } from './gerg/mixture.ts';
 import { type GasProperties, propertiesAt } from './gerg/properties.ts';
-import type { Conditions, FluidModel, Parsed, State } from './model.ts';
+import { type Conditions, type FluidModel, type Parsed, plainName, type State } from './model.ts';
+import { otherGasNames, otherGasState } from './other-gas.ts';
 
 /** The phase of a mixture, found or asked for. */
 export type GasPhase = 'gas' | 'liquid';
@@ -87,14 +89,15 @@ function stateFrom(
   };
   const atBase = baseOf(mixture, base);
   const basis = viscosityBasis(x, temperature, rho);
-  const known = gasUncertainty(x, p, T);
   const cautions = [
     ...(unasked ? [liquidCaution(p)] : []),
     ...gasCautions(x, p, T, phase),
     ...viscosityCautions(basis, temperature),
   ];
+  const known = cautions.length > 0 ? undefined : gasUncertainty(x, p, T); // what is in doubt has no figure
   return {
     ...figures,
+    jouleThomson: properties.jouleThomson,
     phase,
     expands: phase === 'gas',
     baseDensity: atBase.density,
@@ -130,18 +133,46 @@ export function gasDensityAt(mixture: Mixture, p: AbsolutePressure, T: Temperatu
   return rho === undefined ? undefined : ((rho * mixture.molarMass) as Density);
 }
 
-function parsedState(parsed: Parsed, conditions: Conditions): Outcome<FluidState> {
-  const { fractions, flags, choices } = parsed;
+/** Pure gases by their names: those of the equation, and those beside it. */
+const named: ReadonlyMap<string, string> = new Map([
+  ...otherGasNames,
+  ...componentNames.flatMap((name) =>
+    [name, ...(spellings[name] ?? [])].map((form) => [plainName(form), name] as const),
+  ),
+]);
+
+/** Problems beside those of the composition and the state: field-missing, gas-named-twice. */
+function parsedState({ fractions, flags, choices }: Parsed, conditions: Conditions): Outcome<FluidState> {
+  const { own } = conditions.paths;
+  const { composition } = fractions;
+  const { name } = choices;
+  const phase = choices.phase as GasPhase | undefined;
+  if (name !== undefined && composition !== undefined) return fail('gas-named-twice', own('name'), { written: name });
+  if (name !== undefined) return pureState(name, conditions, phase);
+  if (composition === undefined) return fail('field-missing', own('composition'));
   const basis = (choices.basis ?? 'mole') as Basis;
-  const path = conditions.paths.own('composition');
-  const x = compositionOf(fractions.composition ?? [], basis, flags.normalise === true, path);
-  return x.ok ? gasState(x.value, conditions, choices.phase as GasPhase | undefined) : x;
+  const x = compositionOf(composition, basis, flags.normalise === true, own('composition'));
+  return x.ok ? gasState(x.value, conditions, phase) : x;
+}
+
+function pureState(name: string, conditions: Conditions, phase?: GasPhase): Outcome<FluidState> {
+  const place = componentNames.indexOf(name);
+  if (place >= 0)
+    return gasState(
+      componentNames.map((_, i) => (i === place ? 1 : 0)),
+      conditions,
+      phase,
+    );
+  if (phase !== 'liquid') return otherGasState(name, conditions);
+  const { pressure, temperature, paths } = conditions;
+  return fail('gas-density-none', paths.own('phase'), { pressure, temperature, phase });
 }
 
 export const gas: FluidModel = {
   kind: 'gas',
   fields: [
-    { name: 'composition', type: 'fractions', required: true },
+    { name: 'composition', type: 'fractions', required: false },
+    { name: 'name', type: 'name', names: named, required: false },
     { name: 'basis', type: 'choice', choices: ['mole', 'mass'], required: false },
     { name: 'normalise', type: 'flag' },
     { name: 'phase', type: 'choice', choices: ['gas', 'liquid'], required: false },
