@@ -23,10 +23,11 @@ export default defineConfig({
     browserName: 'chromium',
     headless: true,
     launchOptions: launchOptions(),
-    trace: 'retain-on-failure',
+    trace: { mode: 'retain-on-failure', snapshots: false, screenshots: false, sources: false },
     video: 'off',
     locale: 'en-GB',
     timezoneId: 'UTC',
+    actionTimeout: 15_000,
   },
   webServer: {
     command: `npx vite preview --strictPort --port ${port}`,

@@ -1,0 +1,97 @@
+/** Nothing that an automated check of accessibility finds, in every state and in both themes. */
+import AxeBuilder from '@axe-core/playwright';
+import type { Page } from '@playwright/test';
+import { answer, exampleText, field, open, openExample, openProject, panel, press } from './hand.ts';
+import { expect, test } from './watched.ts';
+
+const differential = (page: Page) => field(page, 'Flow to be measured', 'Differential');
+
+/** Opens the folds of the form and a line of the working; all lines are alike. */
+async function openFolds(page: Page): Promise<void> {
+  for (const fold of await page.locator('form details').all()) await fold.evaluate((node) => node.setAttribute('open', ''));
+  await panel(page, 'Working').getByText('Discharge coefficient').first().click();
+}
+
+const menu = (page: Page): Promise<void> => page.getByRole('button', { name: 'Menu' }).click();
+
+const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
+  'the empty project': open,
+  'a new meter': async (page) => {
+    await open(page);
+    await press(page, 'Size a meter');
+  },
+  'a solved meter, its folds open': async (page) => {
+    await openExample(page);
+    await openFolds(page);
+    await expect(panel(page, 'Flow against differential').locator('svg').first()).toBeVisible();
+  },
+  'a stale result': async (page) => {
+    await openExample(page);
+    await differential(page).fill('250 mbra');
+    await expect(page.getByText(/^Last good result\./)).toBeVisible();
+  },
+  'a refused meter': async (page) => {
+    const project = JSON.parse(await exampleText());
+    project.meters[0].differential = 'plenty';
+    await openProject(page, project);
+  },
+  'a list of pipe sizes': async (page) => {
+    await openExample(page);
+    await page.getByLabel('Line size', { exact: true }).click();
+    await expect(page.getByRole('listbox')).toBeVisible();
+  },
+  'the sheets': async (page) => {
+    await openExample(page);
+    await page.getByRole('link', { name: 'Sheet' }).click();
+    await expect(page.getByRole('region', { name: /FE-4101, Sizing sheet/ })).toBeVisible();
+  },
+  'the menu': async (page) => {
+    await openExample(page);
+    await menu(page);
+  },
+  'the dialogs, a notice': async (page) => {
+    await openExample(page);
+    await press(page, 'Delete');
+    for (const name of ['Keys', 'Projects in this browser', 'Title block, site, base state']) {
+      await menu(page);
+      await page.getByRole('button', { name, exact: true }).click();
+      await expect(page.getByRole('dialog')).toBeVisible();
+      expect(await violations(page)).toEqual([]);
+      await page.keyboard.press('Escape');
+    }
+    await page.keyboard.press('/');
+  },
+};
+
+/** The browser's own parts of a page cannot be checked, everything else is. */
+async function violations(page: Page): Promise<readonly string[]> {
+  const found = await new AxeBuilder({ page }).analyze();
+  return found.violations.flatMap(({ id, nodes }) => nodes.map(({ target, failureSummary }) => `${id} ${target.join(' ')}: ${failureSummary?.split('\n')[1]?.trim()}`));
+}
+
+for (const theme of ['light', 'dark'] as const) {
+  test.describe(theme, () => {
+    test.use({ colorScheme: theme });
+    for (const [name, reach] of Object.entries(states)) {
+      test(`nothing is found on ${name}`, async ({ page }) => {
+        await reach(page);
+        expect(await violations(page)).toEqual([]);
+      });
+    }
+  });
+}
+
+test('the two themes are not one', async ({ page }) => {
+  const paper = (): Promise<string> => page.evaluate(() => getComputedStyle(document.body).backgroundColor);
+  await page.emulateMedia({ colorScheme: 'light' });
+  await openExample(page);
+  const light = await paper();
+  await page.emulateMedia({ colorScheme: 'dark' });
+  expect(await paper()).not.toBe(light);
+  await menu(page);
+  await page.getByRole('radio', { name: 'Light' }).check();
+  expect(await paper()).toBe(light);
+  await page.reload();
+  await expect(answer(page)).toBeVisible();
+  expect(await paper()).toBe(light);
+});

@@ -1,0 +1,94 @@
+/** A meter from nothing to its answer, and the question turned round. */
+import type { Page } from '@playwright/test';
+import { answer, exampleText, field, fill, open, openExample, panel, press, save, type Station } from './hand.ts';
+import { type Figures, solveHeadless } from './headless.ts';
+import { expect, test } from './watched.ts';
+
+/** The first meter of the example, field by field as it stands on the screen. */
+const typed: readonly (readonly [Station, label: string, text: string])[] = [
+  ['Upstream pipe and fluid', 'Pressure', '7'],
+  ['Upstream pipe and fluid', 'Temperature', '85'],
+  ['Upstream pipe and fluid', 'Bore measured at', '20'],
+  ['Flow to be measured', 'Maximum', '60'],
+  ['Flow to be measured', 'Normal', '40'],
+  ['Flow to be measured', 'Minimum', '12'],
+  ['Flow to be measured', 'Differential', '250'],
+  ['Element', 'Plate, E', '4'],
+  ['Element', 'Edge, e', '1.5'],
+  ['Element', 'Bore measured at', '20'],
+  ['Downstream', 'Straight before', '45'],
+  ['Downstream', 'Straight after', '8'],
+  ['Downstream', 'Bore, ±', '0.07'],
+  ['Downstream', 'Pipe bore, ±', '0.4'],
+  ['Downstream', 'Differential, ±', '0.1'],
+  ['Downstream', 'Density, ±', '0.2'],
+];
+
+async function fillIn(page: Page): Promise<void> {
+  await page.getByLabel('Tag', { exact: true }).fill('FE-1101');
+  await page.getByLabel('Service', { exact: true }).fill('Feed water to boiler 1');
+  await field(page, 'Upstream pipe and fluid', 'Line size').fill('DN 100 40');
+  await page.getByRole('option', { name: /DN 100 .* 40 102\.26 mm/ }).click();
+  for (const [station, label, text] of typed) await fill(page, station, label, text);
+  await field(page, 'Upstream pipe and fluid', 'Material').selectOption('carbon-steel');
+  await field(page, 'Element', 'Material').selectOption('stainless-316');
+  await field(page, 'Downstream', 'Fitting before').selectOption('single-bend');
+}
+
+/** Every figure of the table at each flow is the one the command line finds, in the same digits. */
+async function expectDuty(page: Page, figures: Figures): Promise<void> {
+  const table = panel(page, 'At each flow').getByRole('table');
+  for (const [name, row] of Object.entries(figures.duty)) {
+    const cells = await table.getByRole('row', { name: new RegExp(`^${name}`) }).getByRole('cell').allInnerTexts();
+    const values = Object.values(row);
+    expect(cells).toHaveLength(values.length);
+    values.forEach(({ number, text }, at) => expect([number, text, `±${text}`]).toContain(cells[at]));
+  }
+}
+
+test('a meter is sized from nothing, and its figures are those of the command line', async ({ page }, info) => {
+  await open(page);
+  await press(page, 'Size a meter');
+  await expect(answer(page)).toContainText('waits for its figures');
+  await fillIn(page);
+  await expect(answer(page)).toContainText('reads 250 mbar at 60 t/h');
+  const text = String(await save(page));
+  const [expected] = JSON.parse(await exampleText()).meters;
+  const [written] = JSON.parse(text).meters;
+  const { bore: _, ...element } = expected.element; // the unknown
+  expect(written).toEqual({ ...expected, element });
+  const [figures] = solveHeadless(text, info);
+  if (figures === undefined) throw new Error('expected a solved meter, got none');
+  await expect(answer(page)).toContainText(`${figures.bore.text} bore`);
+  await expectDuty(page, figures);
+});
+
+test('every meter of the example shows the figures of the command line', async ({ page }, info) => {
+  await openExample(page);
+  for (const figures of solveHeadless(await exampleText(), info)) {
+    await page.getByRole('navigation', { name: 'Meters' }).getByRole('button', { name: figures.tag }).click();
+    await expect(page.getByLabel('Tag', { exact: true })).toHaveValue(figures.tag);
+    await expectDuty(page, figures);
+  }
+});
+
+test('the unknown turns round with one click, and what was found goes along', async ({ page }) => {
+  await openExample(page);
+  const [bore, differential, flow] = [
+    field(page, 'Element', 'Bore'),
+    field(page, 'Flow to be measured', 'Differential'),
+    field(page, 'Flow to be measured', 'Maximum'),
+  ];
+  const found = (await bore.innerText()).replace(/\s*mm$/, '');
+  await press(page, 'Find the differential');
+  await expect(page.getByRole('button', { name: 'Find the differential' })).toHaveAttribute('aria-pressed', 'true');
+  expect(Number(await bore.inputValue()).toFixed(2)).toBe(found);
+  await expect(differential).toHaveText(/^250\.0\s*mbar$/);
+  await press(page, 'Find the maximum flow');
+  expect(Number(await differential.inputValue())).toBeCloseTo(250, 4);
+  await expect(flow).toHaveText(/^60\.00\s*t\/h$/);
+  await expect(answer(page)).toContainText('passes 60.00 t/h');
+  await press(page, 'Find the bore');
+  expect(Number(await flow.inputValue())).toBeCloseTo(60, 4);
+  await expect(bore).toHaveText(new RegExp(`^${found}\\s*mm$`));
+});
