@@ -17,6 +17,28 @@ export interface FluidText {
   compressibility?: string | number;
   vapourPressure?: string;
   baseDensity?: string;
+  quality?: string | number; // of wet steam, '95 %' or 0.95
+  name?: string; // of a liquid
+  concentration?: string | number; // of a mixture with water, '30 %' or 0.3
+  table?: LiquidRow[];
+  override?: FluidOverride;
+  [key: string]: unknown;
+}
+
+/** A row of a liquid's own table. */
+export interface LiquidRow {
+  temperature?: string;
+  density?: string;
+  viscosity?: string;
+  [key: string]: unknown;
+}
+
+/** Single figures that the user puts in place of the model's. */
+export interface FluidOverride {
+  density?: string;
+  viscosity?: string;
+  isentropicExponent?: string | number;
+  vapourPressure?: string;
   [key: string]: unknown;
 }
 

@@ -46,6 +46,6 @@ const ofSolutes = solutes.flatMap(({ name, formula }) => {
 
 /** Every spelling, by its plain name. */
 export const liquidNames: ReadonlyMap<string, string> = new Map([
-  ...[...others, ...ofSolutes].map(([spelling, key]) => [plainName(spelling), key] as const),
   ...Object.values(liquidFamilies).flatMap((keys) => keys.map((key) => [plainName(key), key] as const)),
+  ...[...others, ...ofSolutes].map(([spelling, key]) => [plainName(spelling), key] as const),
 ]);
