@@ -70,6 +70,7 @@ function stateFrom(
   const cautions = cautionsOf(xv, vapour, conditions, density / molarMass);
   return {
     ...figures,
+    jouleThomson: sound.jouleThomson,
     phase: 'gas',
     expands: true,
     ...(atBase === undefined ? {} : { baseDensity: atBase.density }),

@@ -1,11 +1,12 @@
 /** The fluids offered. A new one is its own file and one line here. */
+import { air } from './air.ts';
 import { gas } from './gas.ts';
 import { liquid } from './liquid.ts';
 import type { FluidModel } from './model.ts';
 import { stated } from './stated.ts';
 import { water } from './water.ts';
 
-export const fluids: readonly FluidModel[] = [water, gas, liquid, stated];
+export const fluids: readonly FluidModel[] = [water, gas, air, liquid, stated];
 
 /** Kinds that the project file knows and this version does not offer. */
-export const notOffered: readonly string[] = ['air'];
+export const notOffered: readonly string[] = [];

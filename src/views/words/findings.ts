@@ -1,12 +1,19 @@
 /** Every finding as a line: the figure that was compared, where, and the limit it was held against. */
 import type { Finding } from '../../core/check/finding.ts';
 import { detailOf, type FindingWords } from './detail.ts';
+import { checksOfAir } from './findings-of-air.ts';
 import { checksOfFlow } from './findings-of-flow.ts';
+import { checksOfLiquids } from './findings-of-liquids.ts';
 import { checksOfSize } from './findings-of-size.ts';
 import type { Print } from './print.ts';
 import { dutyLabels } from './verdicts.ts';
 
-export const findingWords: Readonly<Record<string, FindingWords>> = { ...checksOfSize, ...checksOfFlow };
+export const findingWords: Readonly<Record<string, FindingWords>> = {
+  ...checksOfSize,
+  ...checksOfFlow,
+  ...checksOfLiquids,
+  ...checksOfAir,
+};
 
 /** The line of a finding and its limit, figures printed by `print`. A code without words is a defect. */
 export function findingText(finding: Finding, print: Print): { readonly text: string; readonly limit: string } {

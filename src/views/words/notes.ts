@@ -1,5 +1,6 @@
 /** Remarks on a working line and notes of the tables of straight lengths: what a formula or a figure cannot say. */
 import { catalogue } from './catalogue.ts';
+import { airRemarks } from './notes-of-air.ts';
 import { liquidRemarks } from './notes-of-liquids.ts';
 
 const byRegion = (region: number): Readonly<Record<string, string>> => ({
@@ -23,6 +24,7 @@ export const remarks: Readonly<Record<string, string>> = {
   'viscosity-extrapolated': 'From the correlation of the release, continued above its range: take it with care.',
   stated: 'Stated by the user.',
   ...liquidRemarks,
+  ...airRemarks,
   'expansion-held': 'The temperature lies outside the table of expansion; its nearest value is held.',
   'expansibility-isentropic': 'Written here with τ as the ratio of the pressures.',
   'venturi-loss-curve': 'The share is read from a curve of the standard.',

@@ -3,8 +3,8 @@ import type { ProblemWords } from './detail.ts';
 
 export const liquidProblems: ProblemWords = {
   'fluid-name-unknown': (d) => ({
-    cause: `'${d.text('written')}' is no liquid of the list.`,
-    next: `Choose a name such as ${d.list('nearest')}, or state a table.`,
+    cause: `'${d.text('written')}' is not among the fluids that are known by name.`,
+    next: `Choose a name such as ${d.list('nearest')}, or state the figures of the fluid.`,
   }),
   'share-out-of-range': (d) => ({
     cause: `${d.place} '${d.text('written')}' is no share of a whole.`,

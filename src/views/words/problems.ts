@@ -3,6 +3,7 @@ import type { Refused } from '../../core/result/record.ts';
 import { capital, detailOf, type ProblemWords, type Sentences } from './detail.ts';
 import { fieldPlace } from './fields.ts';
 import { type Print, printSI } from './print.ts';
+import { airProblems } from './problems-of-air.ts';
 import { fileProblems } from './problems-of-files.ts';
 import { gasProblems } from './problems-of-gases.ts';
 import { inputProblems } from './problems-of-input.ts';
@@ -16,6 +17,7 @@ export const problemWords: ProblemWords = {
   ...numberProblems,
   ...inputProblems,
   ...gasProblems,
+  ...airProblems,
   ...liquidProblems,
   ...solvingProblems,
   ...fileProblems,

@@ -38,5 +38,9 @@ export function pureGas(component: CubicComponent, heatCapacity: number, p: numb
   const spread = Math.log((v + (1 + root2) * b) / (v + (1 - root2) * b));
   const cv = heatCapacity - R + ((T * aTT) / (2 * root2 * b)) * spread; // c_v = c_p° - R + ∫ T ∂2p/∂T2 dv
   const cp = cv - (T * pT ** 2) / pv; // c_p - c_v = -T (∂p/∂T)² / (∂p/∂v)
-  return { molarVolume: v, compressibility: Z, isentropicExponent: (-v / p) * (cp / cv) * pv }; // κ = -(v/p) (c_p/c_v) ∂p/∂v
+  return {
+    molarVolume: v,
+    compressibility: Z,
+    isentropicExponent: (-v / p) * (cp / cv) * pv, // κ = -(v/p) (c_p/c_v) ∂p/∂v
+  };
 }

@@ -53,6 +53,7 @@ export const references = {
     second('Laesecke and Muzny, J. Phys. Chem. Ref. Data 46 (2017) 013107'),
   ),
   hydrogen: row(hydrogen, [20, 1000], 42, 0.04, second('Muzny, Huber and Kazakov, J. Chem. Eng. Data 58 (2013) 969')),
+  // 2.5 %: Friend, Ingham and Ely 1991, from memory
   ethane: row(ethane, [100, 625], 22, 0.025, second('Friend, Ingham and Ely, J. Phys. Chem. Ref. Data 20 (1991) 275')),
   propane: row(propane, [90, 650], 17, 0.03, second('Vogel and others, J. Phys. Chem. Ref. Data 27 (1998) 947')),
   water: row(steam, [273.15, highestTemperature], 56, 0.02, second('IAPWS R12-08, Eq. 10 to 12 with μ2 = 1')),

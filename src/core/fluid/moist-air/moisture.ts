@@ -52,7 +52,11 @@ type Of<By extends Moisture['by']> = Extract<Moisture, { readonly by: By }>;
 function byHumidity(moisture: Of<'relativeHumidity'>, conditions: Conditions): Outcome<Vapour> {
   const { pressure: p, temperature: T, paths } = conditions;
   if (!(T >= humidRange.min && T <= humidRange.max))
-    return fail('humidity-out-of-range', paths.own(moisture.by), { temperature: T, ...named(humidRange) });
+    return fail('humidity-out-of-range', paths.own(moisture.by), {
+      temperature: T,
+      lowest: humidRange.min,
+      highest: humidRange.max,
+    });
   const saturated = saturatedAt(T, p, false, T);
   return below(moisture, saturated, moisture.h * shareOf(saturated, p), conditions); // x_v = h f p_s / p
 }
@@ -107,8 +111,6 @@ function below(
   const detail = { fraction, most: MOST_VAPOUR, vapourPressure: fraction * pressure, pressure };
   return fail('vapour-exceeds-pressure', paths.own(moisture.by), detail);
 }
-
-const named = ({ min, max }: { readonly min: number; readonly max: number }) => ({ lowest: min, highest: max });
 
 /** Where the moisture was found beyond what its formulas are known for. */
 export function moistureCautions({ moisture }: Vapour, { pressure: p, temperature: T }: State): readonly Caution[] {
