@@ -63,8 +63,9 @@ function solvedMeter(at: Context, result: Solved): PresentedSizing {
     under: underOf(at, result),
     found: foundOf(at, result),
     loss: at.value(maximumOf(result).permanentLoss_Pa, 'loss'),
-    fluid: { name: fluidLabel(kind, result.state.phase), phase: phaseWord(result.state.phase) },
+    fluid: { name: fluidLabel(kind, result.state.phase, textOf(at.meter.fluid?.name)), phase: phaseWord(result.state.phase) },
     state: stateRows(at, result),
+    overridable: kind !== 'stated', // those are stated as it is
     pipe: pipeRows(at, result),
     metal: metalRows(at, result),
     duty,

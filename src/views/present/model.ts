@@ -193,6 +193,8 @@ export interface PresentedSizing extends PresentedMeter {
   /** Name and phase of the fluid: 'Water', 'liquid'. */
   readonly fluid: { readonly name: string; readonly phase: string };
   readonly state: readonly Row[];
+  /** Whether single figures of the state can be put in place of those found. */
+  readonly overridable: boolean;
   readonly pipe: readonly Row[];
   readonly metal: readonly Row[]; // the element: bore, ratio, plate
   readonly duty: readonly DutyRow[];

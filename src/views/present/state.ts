@@ -1,5 +1,6 @@
 /** The fluid upstream: pressure and temperature as written, the properties as found. */
 import type { Solved } from '../../core/result/record.ts';
+import { overrideWords } from '../words/fluid-forms.ts';
 import type { Role } from '../words/print.ts';
 import { stateLabels } from '../words/rows.ts';
 import { cited } from './cited.ts';
@@ -19,7 +20,21 @@ const symbols: Readonly<Record<Id, string>> = {
   vapourPressure: 'p_v',
   saturationTemperature: 'T_s',
   baseDensity: 'ρ_b',
+  molarMass: 'M',
+  relativeDensity: 'd',
+  quality: 'x',
 };
+
+/** A figure that the user put in place of the model's says so; another says how sure its formulation is. */
+function noteOn(
+  id: string,
+  { overridden, uncertainty_percent: known }: Solved['state'],
+  at: Context,
+): string | undefined {
+  if (overridden?.includes(id)) return overrideWords.note;
+  const percent = known?.[id];
+  return percent === undefined ? undefined : `±\u202f${at.value(percent, 'uncertainty').text}`;
+}
 
 export function stateRows(at: Context, result: Solved): readonly Row[] {
   const { state, working } = result;
@@ -29,12 +44,14 @@ export function stateRows(at: Context, result: Solved): readonly Row[] {
   const found = (id: Id, si: number | undefined, role: Role): readonly Row[] => {
     if (si === undefined) return [];
     const line = working.find((one) => one.id === id);
-    const row = given(id, at.value(si, role));
+    const note = noteOn(id, state, at);
+    const row: Row = { ...given(id, at.value(si, role)), ...(note === undefined ? {} : { note }) };
     return [line === undefined ? row : { ...row, cited: cited(line.source), working: id }];
   };
   return [
     given('pressure', at.given(upstream?.pressure, pressureMeasures, state.pressure_Pa, 'pressure')),
     given('temperature', at.given(upstream?.temperature, ['temperature'], state.temperature_K, 'temperature')),
+    ...found('quality', state.quality === undefined ? undefined : 100 * state.quality, 'percent'),
     ...found('density', state.density_kg_m3, 'density'),
     ...found('viscosity', state.viscosity_Pa_s, 'viscosity'),
     ...(liquid ? [] : found('isentropicExponent', state.isentropicExponent, 'number')),
@@ -42,5 +59,7 @@ export function stateRows(at: Context, result: Solved): readonly Row[] {
     ...(liquid ? found('vapourPressure', state.vapourPressure_Pa, 'pressure') : []),
     ...found('saturationTemperature', state.saturationTemperature_K, 'temperature'),
     ...found('baseDensity', state.baseDensity_kg_m3, 'density'),
+    ...(state.phase === 'gas' ? found('molarMass', state.molarMass_kg_mol, 'molarMass') : []),
+    ...found('relativeDensity', state.relativeDensity, 'factor'),
   ];
 }

@@ -8,12 +8,12 @@ export const compositionWords = {
   unit: 'Unit of the shares',
   add: 'Add a component',
   remove: (name: string): string => `Remove ${name}`,
+  rename: (name: string): string => `Component, now ${name}`,
   shareOf: (name: string): string => `Share of ${name}`,
   count: (count: number, sum: string): string => `${count === 1 ? '1 component' : `${count} components`}, ${sum}`,
   sum: 'Sum',
   missing: (amount: string): string => `${amount} missing`,
   above: (amount: string): string => `${amount} above a whole`,
-  normalise: 'Bring the sum to 100 %',
   preset: 'Start from a typical gas',
   presetChoice: 'Choose',
   presetNote: 'Typical figures, not those of any supply: the analysis of your gas replaces them.',
@@ -25,12 +25,13 @@ export const pasteWords = {
   tableHint: (columns: string): string => `Columns: ${columns}. Units may stand in a header or in the cells.`,
   box: 'Pasted text',
   preview: 'What is read',
-  asWritten: 'As written',
+  standsFor: (written: string): string => `${written} stands for`,
   take: (count: number): string => `Take ${lines(count)}`,
   leave: 'Leave it',
   leaveOut: 'leave out',
   shareUnit: 'Shares without a unit are',
-  unknown: (count: number): string => `${lines(count)} with a name that is not known. Say which component it is, or leave it out.`,
+  unknown: (count: number): string =>
+    `${lines(count)} with a name that is not known. Say which component it is, or leave it out.`,
   twice: (name: string): string => `${name} stands twice: say which component this is, or leave it out.`,
   unread: (texts: readonly string[]): string => `Not read: ${texts.join(' · ')}`,
   basis: (basis: 'mole' | 'mass'): string => `The header says ${basis} fractions; so they are taken.`,
@@ -41,7 +42,6 @@ export const tableWords = {
   row: (label: string, at: number): string => `${label}, row ${at + 1}`,
   remove: (at: number): string => `Remove row ${at + 1}`,
   unit: (label: string): string => `${label}, unit`,
-  own: 'Figures of the liquid',
   viscosities: 'Viscosities of the oil',
 } as const;
 
@@ -58,8 +58,10 @@ export const choiceWords = {
   dry: 'dry air',
   oilDensity: 'Density given',
   ownTable: 'Own table of figures',
+  mixture: 'A mixture, by its composition',
+  gas: 'Gas',
+  liquid: 'Liquid',
   chooseLiquid: 'Choose a liquid',
-  ownFamily: 'Your own figures',
 } as const;
 
 export const overrideWords = {

@@ -1,12 +1,14 @@
 /** Names of the fluid models and phases, and the choices that each model asks for. */
 import type { Solved } from '../../core/result/record.ts';
 import type { Choice } from './elements.ts';
+import { gasLabel } from './gases.ts';
 import { liquidNamed } from './liquids.ts';
 
 /** The fluids that can be chosen, in the order of the list. */
 export const fluidChoices: readonly Choice[] = [
   { value: 'water', label: 'Water or steam' },
   { value: 'gas', label: 'Gas or gas mixture' },
+  { value: 'air', label: 'Air, dry or moist' },
   { value: 'liquid', label: 'Another liquid' },
   { value: 'stated', label: 'Stated density and viscosity' },
 ];
@@ -64,7 +66,7 @@ export function fluidLabel(kind: string, phase?: Phase, name = ''): string {
   if (kind === 'water') return phase === 'vapour' ? 'Steam' : 'Water';
   if (kind === 'stated') return 'Stated fluid';
   if (kind === 'air') return 'Air';
-  if (kind === 'gas') return name === '' ? 'Gas mixture' : sentenceCase(name);
+  if (kind === 'gas') return name === '' ? 'Gas mixture' : gasLabel(name);
   if (kind === 'liquid') return name === '' ? 'Liquid by table' : (liquidNamed(name)?.label ?? sentenceCase(name));
   return kind;
 }

@@ -11,6 +11,9 @@ export const stateLabels = {
   vapourPressure: 'Vapour pressure',
   saturationTemperature: 'Saturation temperature',
   baseDensity: 'Density at the base state',
+  molarMass: 'Molar mass',
+  relativeDensity: 'Relative density',
+  quality: 'Quality, vapour by mass',
 } as const;
 
 export const withMaterial = (label: string, material: string | undefined): string =>

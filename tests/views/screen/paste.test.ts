@@ -4,11 +4,7 @@ import { componentNames } from '../../../src/core/fluid/gerg/mixture.ts';
 import { liquidFamilies } from '../../../src/core/fluid/liquids/names.ts';
 import { unitOf } from '../../../src/core/quantity/units.ts';
 import { isTable, rowsOf } from '../../../src/views/screen/fluid/paste.ts';
-import {
-  compositionFrom,
-  pastedComposition,
-  repeated,
-} from '../../../src/views/screen/fluid/paste-composition.ts';
+import { compositionFrom, pastedComposition, repeated } from '../../../src/views/screen/fluid/paste-composition.ts';
 import { pastedTable } from '../../../src/views/screen/fluid/paste-table.ts';
 import { componentOf, components } from '../../../src/views/words/components.ts';
 import { liquidGroups } from '../../../src/views/words/liquids.ts';
@@ -68,7 +64,10 @@ describe('a pasted composition', () => {
     expect(pastedComposition('CH4\t0.94\nN2\t0.06').unit).toBe('1');
     const mixed = pastedComposition('CH4\t0.99988\nH2S\t120 ppm');
     expect(compositionFrom(mixed, mixed.unit, {})).toEqual({ methane: '0.99988', 'hydrogen-sulfide': '120 ppm' });
-    expect(compositionFrom(pastedComposition('CH4\t94\t%\nN2\t6\t%'), '1', {})).toEqual({ methane: '94 %', nitrogen: '6 %' });
+    expect(compositionFrom(pastedComposition('CH4\t94\t%\nN2\t6\t%'), '1', {})).toEqual({
+      methane: '94 %',
+      nitrogen: '6 %',
+    });
   });
 
   it('passes a running number and takes the name from where it stands', () => {

@@ -28,14 +28,17 @@ interface QuantityBoxProps extends QuantityFieldProps {
   readonly text: string;
   readonly problem: string | undefined;
   readonly write: (text: string) => void;
+  /** Where it stands, for a field that the page may show twice. */
+  readonly place?: string;
 }
 
 /** The same for any part of the project. */
-export function QuantityBox({ path, label = fieldLabel(path), text, problem, write, note, aside }: QuantityBoxProps) {
+export function QuantityBox({ path, label = fieldLabel(path), place = 'field', ...rest }: QuantityBoxProps) {
+  const { text, problem, write, note, aside } = rest;
   const display = useWorkbench((state) => state.project.display ?? 'SI');
   const settle = useWorkbench((state) => state.settle);
   const { shown, unit, echo, kind, type, chooseUnit, ...field } = useQuantity(path, text, display, write);
-  const id = `field-${path}`;
+  const id = `${place}-${path}`;
   const waiting = useUntried() && text === '';
   const described = [echo || note ? noteId(id) : '', problem ? problemId(id) : ''].filter(Boolean).join(' ');
   return (

@@ -8,13 +8,17 @@ import { OneOf } from './OneOf.tsx';
 import { ShareField } from './ShareField.tsx';
 
 const HUMIDITY = 'fluid.relativeHumidity';
-const WAYS = [HUMIDITY, 'fluid.dewPoint', 'fluid.wetBulb'] as const;
+const DEW_POINT = 'fluid.dewPoint';
+const WET_BULB = 'fluid.wetBulb';
 
 export function AirFields() {
-  const moist = WAYS.map(useMeterText).some((text) => text !== '');
+  const humidity = useMeterText(HUMIDITY);
+  const dewPoint = useMeterText(DEW_POINT);
+  const wetBulb = useMeterText(WET_BULB);
+  const moist = `${humidity}${dewPoint}${wetBulb}` !== '';
   return (
     <>
-      <OneOf id="moisture" label={choiceWords.moisture} paths={WAYS} none={choiceWords.dry}>
+      <OneOf id="moisture" label={choiceWords.moisture} paths={[HUMIDITY, DEW_POINT, WET_BULB]} none={choiceWords.dry}>
         {(path) =>
           path === HUMIDITY ? <ShareField key={path} path={path} /> : <QuantityField key={path} path={path} />
         }

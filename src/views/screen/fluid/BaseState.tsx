@@ -1,6 +1,12 @@
 /** The base state that volumes are counted at: said where a flow needs it, and chosen from those in use. */
 import { asPrinted } from '../../present/base.ts';
-import { baseStateChoices, baseStateNamed, baseStateOf, baseStateWords as words, usualBase } from '../../words/base-states.ts';
+import {
+  baseStateChoices,
+  baseStateNamed,
+  baseStateOf,
+  baseStateWords as words,
+  usualBase,
+} from '../../words/base-states.ts';
 import { useWorkbench } from '../binding.tsx';
 import box from '../field/box.module.css';
 import { Frame } from '../field/Frame.tsx';
@@ -19,12 +25,13 @@ function useBase() {
 export function BaseStateSelect({ id, note }: { readonly id: string; readonly note?: string }) {
   const write = useWorkbench((state) => state.writeProject);
   const settle = useWorkbench((state) => state.settle);
+  const base = useWorkbench((state) => state.project.base);
   const named = baseStateNamed(useBase());
   const choose = (value: string): void => {
     const chosen = baseStateOf(value);
     if (chosen === undefined) return;
     settle();
-    write('base', { pressure: chosen.pressure, temperature: chosen.temperature });
+    write('base', { ...base, pressure: chosen.pressure, temperature: chosen.temperature });
     settle();
   };
   return (
@@ -60,5 +67,13 @@ export function BaseState() {
 function BaseFigure({ path }: { readonly path: string }) {
   const text = useWorkbench((state) => textAt(state.project, path));
   const write = useWorkbench((state) => state.writeProject);
-  return <QuantityBox path={path} text={text} problem={useProblem(path)} write={(next) => write(path, next)} />;
+  return (
+    <QuantityBox
+      path={path}
+      place="station"
+      text={text}
+      problem={useProblem(path)}
+      write={(next) => write(path, next)}
+    />
+  );
 }

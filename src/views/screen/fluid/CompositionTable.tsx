@@ -5,7 +5,16 @@ import { compositionWords as words } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
 import { Cell } from './Cell.tsx';
 import { ComponentSelect } from './ComponentSelect.tsx';
-import { type Composition, type Entry, entriesOf, inUnit, renamed, tableUnit, withShare, without } from './composition.ts';
+import {
+  type Composition,
+  type Entry,
+  entriesOf,
+  inUnit,
+  renamed,
+  tableUnit,
+  withShare,
+  without,
+} from './composition.ts';
 import styles from './inputs.module.css';
 import { ShareUnitSelect } from './ShareUnitSelect.tsx';
 import { fileShare, type ShareUnit, shownShare } from './share.ts';

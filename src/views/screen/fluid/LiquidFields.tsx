@@ -1,5 +1,4 @@
 /** A liquid by its name, or by the user's own table of figures. */
-import { choiceWords } from '../../words/fluid-forms.ts';
 import { concentrationChoices, viscosityRuleChoices } from '../../words/fluids.ts';
 import { liquidNamed } from '../../words/liquids.ts';
 import { ChoiceField } from '../field/ChoiceField.tsx';

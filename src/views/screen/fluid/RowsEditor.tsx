@@ -30,15 +30,14 @@ export function RowsEditor({ path, columns }: Props) {
   const chooseUnit = (column: TableColumn, unit: Unit): void => {
     setChosen({ ...chosen, [column.name]: unit });
     writeAll(
-      rows.map((row, at) => [
-        `${path}.${at}.${column.name}`,
-        convertedCell(textAt(row, column.name), column, unit),
-      ]),
+      rows.map((row, at) => [`${path}.${at}.${column.name}`, convertedCell(textAt(row, column.name), column, unit)]),
     );
   };
 
   if (pasted !== undefined)
-    return <TablePaste text={pasted} close={() => setPasted(undefined)} {...{ path, columns, units }} took={setChosen} />;
+    return (
+      <TablePaste text={pasted} close={() => setPasted(undefined)} {...{ path, columns, units }} took={setChosen} />
+    );
   return (
     <>
       <RowsTable {...{ path, columns, units, chooseUnit }} paste={setPasted} />

@@ -2,7 +2,11 @@
 import { quantityKind } from '../field/quantities.ts';
 import type { TableColumn } from './rows.ts';
 
-const temperature: TableColumn = { name: 'temperature', label: 'Temperature', kind: quantityKind('upstream.temperature') };
+const temperature: TableColumn = {
+  name: 'temperature',
+  label: 'Temperature',
+  kind: quantityKind('upstream.temperature'),
+};
 const density: TableColumn = { name: 'density', label: 'Density', kind: quantityKind('fluid.density') };
 const viscosity: TableColumn = { name: 'viscosity', label: 'Viscosity', kind: quantityKind('fluid.viscosity') };
 

@@ -22,7 +22,11 @@ export interface PastedTable {
 const hasFigure = (row: Rows[number]): boolean => /^[+\-\u2212]?[\d.,]*\d/.test(row.find((cell) => cell !== '') ?? '');
 
 /** @param usual the unit of a column where the text says none */
-export function pastedTable(text: string, columns: readonly Column[], usual: Readonly<Record<string, Unit>>): PastedTable {
+export function pastedTable(
+  text: string,
+  columns: readonly Column[],
+  usual: Readonly<Record<string, Unit>>,
+): PastedTable {
   const rows = rowsOf(text);
   const first = Math.max(0, rows.findIndex(hasFigure));
   const heads = rows.slice(0, first).map((cells) => cells.map((cell) => unitIn(cell, columns)));

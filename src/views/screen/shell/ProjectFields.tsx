@@ -4,6 +4,7 @@ import { problemSentence } from '../../words/problems.ts';
 import { useWorkbench } from '../binding.tsx';
 import { QuantityBox } from '../field/QuantityField.tsx';
 import { TextField } from '../field/TextField.tsx';
+import { BaseStateSelect } from '../fluid/BaseState.tsx';
 import { textAt } from '../text.ts';
 import styles from './ProjectFields.module.css';
 
@@ -40,6 +41,7 @@ export function ProjectFields() {
           settle={settle}
         />
       ))}
+      <BaseStateSelect id="project-base" />
       {QUANTITIES.map((path) => {
         const text = textAt(project, path);
         return (

@@ -1,0 +1,20 @@
+/** Pressure and temperature upstream; on the saturation line one of them is found from the other. */
+import { saturationWords } from '../../words/fluid-forms.ts';
+import { QuantityField } from '../field/QuantityField.tsx';
+import { useMeterText } from '../meter.ts';
+
+export function StateFields() {
+  const kind = useMeterText('fluid.kind');
+  const phase = useMeterText('fluid.phase');
+  const quality = useMeterText('fluid.quality');
+  const pressure = useMeterText('upstream.pressure');
+  const temperature = useMeterText('upstream.temperature');
+  const onLine = kind === 'water' && `${phase}${quality}` !== '' && `${pressure}${temperature}` !== '';
+  const note = (text: string) => (onLine && text === '' ? <span>{saturationWords.onLine}</span> : undefined);
+  return (
+    <>
+      <QuantityField path="upstream.pressure" label="Pressure" note={note(pressure)} />
+      <QuantityField path="upstream.temperature" label="Temperature" note={note(temperature)} />
+    </>
+  );
+}
