@@ -9,6 +9,8 @@ import { sublimationPressure } from '../../../src/core/fluid/moist-air/saturatio
 import { stateOf } from '../../../src/core/fluid/state.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
 import type { Outcome } from '../../../src/core/quantity/outcome.ts';
+import { evaluate } from '../../../src/views/present/evaluate.ts';
+import { parseFormula } from '../../../src/views/present/formula.ts';
 import { seeded } from './seeded.ts';
 
 const kelvin = (T: number) => as<'temperature'>(T);
@@ -130,6 +132,23 @@ describe('moist air', () => {
     expect(cautionIds({ wetBulb: '25 degC' }, at(5e5, 300))).toEqual(['psychrometer-pressure']);
     expect(cautionIds({}, at(1e5, 500))).toEqual(['fluid-range-temperature']);
     expect(solved({}, at(1e5, 500)).uncertainties).not.toHaveProperty('density');
+  });
+});
+
+describe('the working of air', () => {
+  it.each([
+    ['dry', {}, room],
+    ['humid', { relativeHumidity: '60 %' }, room],
+    ['humid, its dry air counted', { relativeHumidity: '60 %', baseBasis: 'dry' }, room],
+    ['by dew point, under pressure', { dewPoint: '5 degC' }, at(8e5, 300)],
+    ['by wet bulb, warm', { wetBulb: '35 degC' }, at(1e5, 330)],
+  ] as const)('%s: each formula with its numbers gives the figure it explains', (_, fluid, state) => {
+    const formulas = solved(fluid, state).working.filter(({ formula }) => formula !== undefined);
+    expect(formulas.length).toBeGreaterThanOrEqual(3);
+    for (const { id, formula = '', given, value } of formulas) {
+      const values = Object.fromEntries(given.map((item) => [item.symbol, item.value]));
+      expect(evaluate(parseFormula(formula), values) / value, id).toBeCloseTo(1, 12);
+    }
   });
 });
 

@@ -7,6 +7,8 @@ import { otherGases } from '../../../src/core/fluid/other-gas.table.ts';
 import { otherGasState } from '../../../src/core/fluid/other-gas.ts';
 import { stateOf } from '../../../src/core/fluid/state.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
+import { evaluate } from '../../../src/views/present/evaluate.ts';
+import { parseFormula } from '../../../src/views/present/formula.ts';
 import { seeded } from './seeded.ts';
 
 const at = (p: number, T: number) => ({ pressure: as<'absolute pressure'>(p), temperature: as<'temperature'>(T) });
@@ -79,6 +81,15 @@ describe('the cubic equation', () => {
     const dense = solved('ammonia', at(16e6, 440)).cautions?.map(({ id, verdict }) => `${id} ${verdict}`);
     expect(dense).toEqual(['fluid-range-density outside']);
     expect(solved('ammonia')).not.toHaveProperty('cautions');
+  });
+
+  it('explains its figures by formulas that give them', () => {
+    const formulas = solved('ammonia').working.filter(({ formula }) => formula !== undefined);
+    expect(formulas.map(({ id }) => id)).toEqual(['density', 'speedOfSound', 'baseDensity']);
+    for (const { id, formula = '', given, value } of formulas) {
+      const values = Object.fromEntries(given.map((item) => [item.symbol, item.value]));
+      expect(evaluate(parseFormula(formula), values) / value, id).toBeCloseTo(1, 12);
+    }
   });
 
   it('takes the ideal gas at a base state where the gas would be a liquid', () => {

@@ -18,7 +18,11 @@ export interface FluidText {
   vapourPressure?: string;
   baseDensity?: string;
   quality?: string | number; // of wet steam, '95 %' or 0.95
-  name?: string; // of a liquid
+  name?: string; // of a liquid or of a pure gas
+  relativeHumidity?: string | number; // of air, '60 %' or 0.6; or one of the two that follow
+  dewPoint?: string; // of air, at its own pressure
+  wetBulb?: string;
+  baseBasis?: string; // 'wet' | 'dry': what a base volume of moist air counts
   concentration?: string | number; // of a mixture with water, '30 %' or 0.3
   table?: LiquidRow[];
   override?: FluidOverride;
