@@ -38,9 +38,15 @@ export function readQuantity(text: string, measures: readonly Measure[], field: 
     return fail(code, field, { written: quoted(trimmed) });
   }
   const spelling = rest.trim();
-  if (spelling === '') return fail('unit-missing', field, { written: number, expected: measures.join(', ') });
+  if (spelling === '') return withoutUnit(number, measures, field);
   const unit = readUnit(spelling, measures, field);
   return unit.ok ? quantity(number, unit.value, field) : unit;
+}
+
+/** A number alone: one that nothing can hold says so first, a unit would not mend it. */
+function withoutUnit(number: string, measures: readonly Measure[], field: string): Outcome<never> {
+  if (!Number.isFinite(Number(number))) return fail('number-too-large', field, { written: quoted(number) });
+  return fail('unit-missing', field, { written: number, expected: measures.join(', ') });
 }
 
 /** A text that does not begin with a number: a unit alone, or nothing that can be read. */

@@ -62,6 +62,7 @@ describe('file text that is refused', () => {
     ['   ', 'number-empty'],
     ['mm', 'number-empty'],
     ['12.5', 'unit-missing'],
+    ['1e999', 'number-too-large'], // no unit would mend it
     ['12,5 mm', 'number-grouping'],
     ['1 234 mm', 'number-grouping'],
     ['1\u00a0234 mm', 'number-grouping'],
