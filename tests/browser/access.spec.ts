@@ -8,7 +8,8 @@ const differential = (page: Page) => field(page, 'Flow to be measured', 'Differe
 
 /** Opens the folds of the form and a line of the working; all lines are alike. */
 async function openFolds(page: Page): Promise<void> {
-  for (const fold of await page.locator('form details').all()) await fold.evaluate((node) => node.setAttribute('open', ''));
+  for (const fold of await page.locator('form details').all())
+    await fold.evaluate((node) => node.setAttribute('open', ''));
   await panel(page, 'Working').getByText('Discharge coefficient').first().click();
 }
 
@@ -66,7 +67,9 @@ const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
 /** The browser's own parts of a page cannot be checked, everything else is. */
 async function violations(page: Page): Promise<readonly string[]> {
   const found = await new AxeBuilder({ page }).analyze();
-  return found.violations.flatMap(({ id, nodes }) => nodes.map(({ target, failureSummary }) => `${id} ${target.join(' ')}: ${failureSummary?.split('\n')[1]?.trim()}`));
+  return found.violations.flatMap(({ id, nodes }) =>
+    nodes.map(({ target, failureSummary }) => `${id} ${target.join(' ')}: ${failureSummary?.split('\n')[1]?.trim()}`),
+  );
 }
 
 for (const theme of ['light', 'dark'] as const) {

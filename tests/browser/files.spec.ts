@@ -7,11 +7,16 @@ const plain = { format: 'headwright', version: 1, meters: [{ tag: 'FE-9', find: 
 
 const files: Readonly<Record<string, () => Promise<string> | string>> = {
   'the example': exampleText,
-  'odd spacing and no last line end': () => '{"format":"headwright",\t"version":1,\n\n  "meters" : [ {"tag":"FE-9" } ]}',
+  'odd spacing and no last line end': () =>
+    '{"format":"headwright",\t"version":1,\n\n  "meters" : [ {"tag":"FE-9" } ]}',
   'lines ended as on another system': async () => (await exampleText()).replaceAll('\n', '\r\n'),
   'a byte order mark': () => `\ufeff${JSON.stringify(plain)}`,
   'keys nobody knows, at every level': () =>
-    JSON.stringify({ later: [1, { a: null }], ...plain, meters: [{ ...plain.meters[0], note: { b: [true] } }] }, null, 4),
+    JSON.stringify(
+      { later: [1, { a: null }], ...plain, meters: [{ ...plain.meters[0], note: { b: [true] } }] },
+      null,
+      4,
+    ),
   'escapes and numbers as they were written': () =>
     '{"format":"headwright","version":1,"title":"\\u00e9\\ud83d\\ude00\\/","x":1.50e0,"meters":[]}\n',
   'keys in another order': () => '{"meters":[{"tag":"FE-9"}],"version":1,"format":"headwright"}',
@@ -66,7 +71,11 @@ test('a file that is dropped is opened', async ({ page }) => {
 });
 
 const refused: readonly (readonly [name: string, content: string | Uint8Array, says: RegExp])[] = [
-  ['a newer version', JSON.stringify({ ...plain, version: 2 }), /has version 2 of the format, and this program reads up to 1/],
+  [
+    'a newer version',
+    JSON.stringify({ ...plain, version: 2 }),
+    /has version 2 of the format, and this program reads up to 1/,
+  ],
   ['another format', '{"format":"other","version":1,"meters":[]}', /is no project/],
   ['no JSON', 'tag,bore\nFE-1,62.5\n', /is not JSON/],
   ['JSON cut short', '{"format":"headwright","version":1,"me', /is not JSON/],
@@ -110,12 +119,15 @@ test('a file with a handle is saved to its own place', async ({ page, context })
       const folder = await navigator.storage.getDirectory();
       return (await (await folder.getFileHandle('disk.headwright.json')).getFile()).text();
     });
-  await page.evaluate(async (text) => {
-    const folder = await navigator.storage.getDirectory();
-    const stream = await (await folder.getFileHandle('disk.headwright.json', { create: true })).createWritable();
-    await stream.write(text);
-    await stream.close();
-  }, await exampleText());
+  await page.evaluate(
+    async (text) => {
+      const folder = await navigator.storage.getDirectory();
+      const stream = await (await folder.getFileHandle('disk.headwright.json', { create: true })).createWritable();
+      await stream.write(text);
+      await stream.close();
+    },
+    await exampleText(),
+  );
   await page.keyboard.press('Control+o');
   await expect(answer(page)).toContainText('mm bore reads');
   await field(page, 'Flow to be measured', 'Differential').fill('300');

@@ -26,7 +26,7 @@ export function solveHeadless(text: string, info: TestInfo): readonly Figures[] 
   const file = info.outputPath('asked.headwright.json');
   writeFileSync(file, text);
   const run = spawnSync(process.execPath, ['src/app/headwright.mjs', 'solve', file], { cwd: root, encoding: 'utf8' });
-  if (run.status !== 0 && run.status !== 1) throw new Error(`expected results, got exit ${run.status}: ${run.stderr}`);
+  if (run.stdout === '') throw new Error(`expected results, got exit ${run.status}: ${run.stderr}`);
   const project: Project = JSON.parse(text);
   const results: readonly (Solved | { readonly status: 'refused' })[] = JSON.parse(run.stdout).results;
   return results.flatMap((result, index) =>
@@ -38,15 +38,18 @@ function figuresOf(meter: MeterText, project: Project, solved: Solved): Figures 
   const at = contextOf(meter, project);
   const { boreAsMeasured_m: bore } = solved;
   const { density_kg_m3, viscosity_Pa_s } = solved.state;
-  const duty = Object.entries(solved.points).map(([name, point]) => [name, dutyOf(at, solved, name as DutyName, point)]);
+  const duty = Object.entries(solved.points).map(([name, point]) => [
+    name,
+    dutyOf(at, solved, name as DutyName, point),
+  ]);
   return {
     tag: solved.tag,
     solved,
     bore: solved.find === 'bore' ? at.value(bore, 'bore') : at.given(meter.element?.bore, ['length'], bore, 'bore'),
     pipe: at.given(meter.pipe?.bore, ['length'], solved.pipeAsMeasured_m, 'bore'),
     ratio: at.value(solved.diameterRatio, 'ratio'),
-    density: at.given(meter.fluid?.density, ['density'], density_kg_m3, 'density'),
-    viscosity: at.given(meter.fluid?.viscosity, ['dynamic viscosity'], viscosity_Pa_s, 'viscosity'),
+    density: at.value(density_kg_m3, 'density'),
+    viscosity: at.value(viscosity_Pa_s, 'viscosity'),
     duty: Object.fromEntries(duty),
   };
 }

@@ -19,8 +19,19 @@ test('markup in names stands there literally', async ({ page }) => {
   const [first = '', second = ''] = payloads;
   project.title = first;
   project.revision = second;
-  project.meters = payloads.map((text) => ({ ...meter, tag: text, service: text, pipe: { ...meter.pipe, size: text } }));
-  project.meters.push({ ...meter, tag: 'x', fluid: { kind: first }, element: { kind: second, tappings: first }, differential: second });
+  project.meters = payloads.map((text) => ({
+    ...meter,
+    tag: text,
+    service: text,
+    pipe: { ...meter.pipe, size: text },
+  }));
+  project.meters.push({
+    ...meter,
+    tag: 'x',
+    fluid: { kind: first },
+    element: { kind: second, tappings: first },
+    differential: second,
+  });
   await openProject(page, project);
   await expect(page.getByRole('banner')).toContainText(first);
   for (const text of payloads) {
@@ -31,7 +42,10 @@ test('markup in names stands there literally', async ({ page }) => {
   await meters(page).getByRole('button', { name: /^x/ }).click();
   await expect(page.getByRole('main')).toContainText(second);
   await page.getByRole('link', { name: 'Sheet' }).click();
-  for (const text of payloads) await expect(page.getByRole('main').getByRole('heading', { level: 2 }).filter({ hasText: text }).first()).toBeVisible();
+  for (const text of payloads)
+    await expect(
+      page.getByRole('main').getByRole('heading', { level: 2 }).filter({ hasText: text }).first(),
+    ).toBeVisible();
   expect(await page.title()).toContain('Headwright');
   expect(await page.locator('main script, main img, main a, main b b').count()).toBe(0);
   expect(await page.evaluate(() => document.querySelector('[onerror], [onload]'))).toBeNull();
@@ -55,10 +69,14 @@ test('words that a spreadsheet would take for a formula are guarded, numbers are
     const read = async (type: string): Promise<string> => (await (await item?.getType(type))?.text()) ?? '';
     return [await read('text/plain'), await read('text/html')] as const;
   });
-  const rows = tabs.trimEnd().split(/\r?\n/).map((row) => row.split('\t'));
+  const rows = tabs
+    .trimEnd()
+    .split(/\r?\n/)
+    .map((row) => row.split('\t'));
   expect(rows).toHaveLength(4);
   expect(new Set(rows.map((row) => row.length)).size).toBe(1);
-  for (const row of rows.slice(1)) for (const cell of row.slice(1)) expect(cell).toMatch(/^[-+]?\d+(\.\d+)?(e[-+]?\d+)?$/i);
+  for (const row of rows.slice(1))
+    for (const cell of row.slice(1)) expect(cell).toMatch(/^[-+]?\d+(\.\d+)?(e[-+]?\d+)?$/i);
   for (const cell of [...(rows[0] ?? []), ...rows.map(([head = '']) => head)]) expect(cell).not.toMatch(/^[=+\-@]/);
   const shown = await panel(page, 'At each flow').getByRole('row').nth(1).getByRole('cell').allInnerTexts();
   expect(shown.map((text) => Number.parseFloat(text)).slice(0, 2)).toEqual(rows[1]?.slice(1, 3).map(Number));

@@ -14,8 +14,35 @@ function random(seed: number): (most: number) => number {
   };
 }
 
-const texts = ['1', '250 mbar', '-3', '', 'abc', '12,5 kPa', '1e999', '60 t/h', '\u2212', '7 bar', 'mm', '0.5', '1.2.3', '\ud83d\ude00'];
-const orders = ['Duplicate', 'Move up', 'Move down', 'Delete', 'Find the bore', 'Find the differential', 'Find the maximum flow', 'Undo', 'Redo', 'Add a meter', 'Take it back'];
+const texts = [
+  '1',
+  '250 mbar',
+  '-3',
+  '',
+  'abc',
+  '12,5 kPa',
+  '1e999',
+  '60 t/h',
+  '\u2212',
+  '7 bar',
+  'mm',
+  '0.5',
+  '1.2.3',
+  '\ud83d\ude00',
+];
+const orders = [
+  'Duplicate',
+  'Move up',
+  'Move down',
+  'Delete',
+  'Find the bore',
+  'Find the differential',
+  'Find the maximum flow',
+  'Undo',
+  'Redo',
+  'Add a meter',
+  'Take it back',
+];
 const keys = ['Control+z', 'Control+y', 'Alt+ArrowUp', 'Alt+ArrowDown', '[', ']', 'Escape', 'Tab', 'Enter'];
 
 /** One action on the page as it stands; done within it, since three hundred of them go through. */
@@ -52,7 +79,7 @@ for (const seed of [1, 2, 3]) {
     test.slow();
     await openExample(page);
     const next = random(seed);
-    const one = <Item,>(list: readonly Item[]): Item => list[next(list.length)] as Item;
+    const one = <Item>(list: readonly Item[]): Item => list[next(list.length)] as Item;
     const undo = page.getByRole('button', { name: 'Undo', exact: true });
     for (let step = 0; step < 100; step += 1) {
       const kind = next(8);

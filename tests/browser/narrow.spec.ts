@@ -15,7 +15,8 @@ const typed: readonly (readonly [Station, label: string, text: string])[] = [
 const overflow = (page: Page): Promise<readonly string[]> =>
   page.evaluate(() => {
     const scrolls = (node: Element | null): boolean =>
-      node !== null && (/auto|scroll|hidden|clip/.test(getComputedStyle(node).overflowX) || scrolls(node.parentElement));
+      node !== null &&
+      (/auto|scroll|hidden|clip/.test(getComputedStyle(node).overflowX) || scrolls(node.parentElement));
     const wide = [...document.querySelectorAll('body *')].filter(
       (node) => node.getBoundingClientRect().right > window.innerWidth + 1 && node.checkVisibility() && !scrolls(node),
     );
@@ -32,7 +33,8 @@ for (const width of [390, 320]) {
       expect(await overflow(page)).toEqual([]);
       await press(page, 'Open the example');
       await expect(answer(page)).toContainText('reads');
-      for (const fold of await page.locator('details').all()) await fold.evaluate((node) => node.setAttribute('open', ''));
+      for (const fold of await page.locator('details').all())
+        await fold.evaluate((node) => node.setAttribute('open', ''));
       expect(await overflow(page)).toEqual([]);
       await field(page, 'Flow to be measured', 'Differential').fill('250 mbra');
       expect(await overflow(page)).toEqual([]);

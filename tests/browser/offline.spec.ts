@@ -16,7 +16,12 @@ test('a reload without a network finds the work and sizes it anew', async ({ pag
   await expect(answer(page)).toContainText('reads 300 mbar');
   await expect(panel(page, 'Flow against differential').locator('svg').first()).toBeVisible();
   await page.getByRole('link', { name: 'Sheet' }).click();
-  await expect(page.getByRole('region', { name: /FE-1101, Sizing sheet/ }).locator('svg').first()).toBeVisible();
+  await expect(
+    page
+      .getByRole('region', { name: /FE-1101, Sizing sheet/ })
+      .locator('svg')
+      .first(),
+  ).toBeVisible();
 });
 
 test('a place of the program opens by its address without a network', async ({ page, context }) => {

@@ -49,7 +49,9 @@ function expectFigures(sheet: string, { tag, bore, pipe, ratio, density, viscosi
 }
 
 for (const paper of ['A4', 'Letter'] as const) {
-  test(`the example on ${paper}: every figure is that of the command line, every page is numbered`, async ({ page }, info) => {
+  test(`the example on ${paper}: every figure is that of the command line, every page is numbered`, async ({
+    page,
+  }, info) => {
     await openExample(page);
     const { pages, about } = await print(page, paper, info);
     const found = solveHeadless(await exampleText(), info);

@@ -16,17 +16,38 @@ const duty = 'Flow to be measured';
 const cases: readonly Case[] = [
   { name: 'an unknown unit', at: [duty, 'Differential'], typed: '250 mbra', says: /unit 'mbra'.*not known.*mbar/ },
   { name: 'a unit of another quantity', at: [upstream, 'Temperature'], typed: '85 kg/s', says: /'kg\/s'.*measures/ },
-  { name: 'a pressure without its reference', at: [upstream, 'Pressure'], typed: '7 bar', says: /does not say from where/ },
+  {
+    name: 'a pressure without its reference',
+    at: [upstream, 'Pressure'],
+    typed: '7 bar',
+    says: /does not say from where/,
+  },
   { name: 'a differential with a reference', at: [duty, 'Differential'], typed: '1 bar(g)', says: /is a difference/ },
   { name: 'letters', at: [duty, 'Maximum'], typed: 'lots', says: /'lots'.*is no number/ },
   { name: 'two decimal marks', at: [upstream, 'Pipe bore'], typed: '1.2.3', says: /1\.2\.3/ },
   { name: 'groups that are no threes', at: [duty, 'Maximum'], typed: '1 23 4', says: /grouped|is no number/ },
   { name: 'a negative bore', at: [upstream, 'Pipe bore'], typed: '-102.26', says: /not above zero|below zero/ },
   { name: 'a power of ten without end', at: [duty, 'Maximum'], typed: '1e999', says: /larger than any number/ },
-  { name: 'a temperature that water does not have', at: [upstream, 'Temperature'], typed: '2500', says: /outside the formulation/ },
-  { name: 'a differential above the pressure', at: [duty, 'Differential'], typed: '9 bar', says: /not below the upstream pressure/ },
+  {
+    name: 'a temperature that water does not have',
+    at: [upstream, 'Temperature'],
+    typed: '2500',
+    says: /outside the formulation/,
+  },
+  {
+    name: 'a differential above the pressure',
+    at: [duty, 'Differential'],
+    typed: '9 bar',
+    says: /not below the upstream pressure/,
+  },
   { name: 'an empty required field', at: [upstream, 'Temperature'], typed: '', says: /not given\. Fill it in/ },
-  { name: 'a bore larger than the pipe', find: 'Find the differential', at: ['Element', 'Bore'], typed: '150', says: /not smaller than the pipe bore/ },
+  {
+    name: 'a bore larger than the pipe',
+    find: 'Find the differential',
+    at: ['Element', 'Bore'],
+    typed: '150',
+    says: /not smaller than the pipe bore/,
+  },
   { name: 'a share of nothing', at: ['Downstream', 'Differential, ±'], typed: '0.1 %', says: /of what it is a share/ },
 ];
 
@@ -47,7 +68,9 @@ for (const { name, at, typed, says, find } of cases) {
     await expect(panel(page, 'At each flow').getByText('last good result')).toBeVisible();
     await expect(panel(page, 'Checks').getByText('last good result')).toBeVisible();
     expect(await panel(page, 'At each flow').getByRole('table').innerText()).toBe(rows);
-    await expect(page.getByRole('navigation', { name: 'Meters' }).getByRole('button', { name: 'FE-1101' })).toContainText('not solved');
+    await expect(
+      page.getByRole('navigation', { name: 'Meters' }).getByRole('button', { name: 'FE-1101' }),
+    ).toContainText('not solved');
     await input.blur();
     await expect(input).toHaveValue(typed);
     await input.fill(`${written} ${unit}`);

@@ -35,9 +35,13 @@ test('the range below the limit is hatched and named on the curve, and the check
   await expect(curve.locator('svg [fill^="url(#"]').first()).toBeVisible();
   await expect(curve.locator('figcaption')).toContainText(new RegExp(`From\\s0\\sto\\s[\\d.]+\\smbar it is ${words}`));
   await expect(curve.getByRole('row', { name: /outside$/ }).first()).toBeAttached();
-  const check = panel(page, 'Checks').getByRole('listitem').filter({ hasText: /Pipe Reynolds number.*at minimum flow/ });
+  const check = panel(page, 'Checks')
+    .getByRole('listitem')
+    .filter({ hasText: /Pipe Reynolds number.*at minimum flow/ });
   await expect(check).toContainText('outside');
-  await expect(page.getByRole('navigation', { name: 'Meters' }).getByRole('button', { name: 'FE-7' })).toContainText('outside');
+  await expect(page.getByRole('navigation', { name: 'Meters' }).getByRole('button', { name: 'FE-7' })).toContainText(
+    'outside',
+  );
 });
 
 test('the hatched range ends where the Reynolds number reaches the limit', async ({ page }) => {

@@ -38,7 +38,10 @@ const changed = (change: object): string => {
 const differential = (page: Page) => page.locator('[data-field="differential"]');
 const sheet = async (page: Page): Promise<void> => {
   await page.getByRole('link', { name: 'Sheet' }).click();
-  await page.getByRole('region', { name: /Sizing sheet/ }).first().waitFor();
+  await page
+    .getByRole('region', { name: /Sizing sheet/ })
+    .first()
+    .waitFor();
 };
 
 const themes: readonly Theme[] = ['light', 'dark'];
@@ -46,7 +49,12 @@ const themes: readonly Theme[] = ['light', 'dark'];
 const shots: readonly Shot[] = [
   { name: 'readme', window: true },
   ...themes.flatMap((theme) =>
-    [1440, 1024, 390].map((width) => ({ name: `size-${width}-${theme}`, width, theme, ...(width === 390 ? { height: 844 } : {}) })),
+    [1440, 1024, 390].map((width) => ({
+      name: `size-${width}-${theme}`,
+      width,
+      theme,
+      ...(width === 390 ? { height: 844 } : {}),
+    })),
   ),
   { name: 'size-1920-light', width: 1920 },
   { name: 'size-320-light', width: 320, height: 640 },
@@ -56,12 +64,18 @@ const shots: readonly Shot[] = [
   { name: 'stale-light', then: (page) => differential(page).fill('250 mbra') },
   { name: 'stale-dark', theme: 'dark', then: (page) => differential(page).fill('250 mbra') },
   { name: 'refused-light', project: changed({ differential: 'plenty' }) },
-  { name: 'outside-light', project: changed({ fluid: { kind: 'stated', density: '900 kg/m3', viscosity: '20 mPa.s' } }) },
+  {
+    name: 'outside-light',
+    project: changed({ fluid: { kind: 'stated', density: '900 kg/m3', viscosity: '20 mPa.s' } }),
+  },
   { name: 'empty-light', window: true, project: '' },
   { name: 'empty-dark', window: true, theme: 'dark', project: '' },
   { name: 'empty-390', window: true, width: 390, height: 844, project: '' },
   { name: 'new-meter-light', project: '', then: (page) => page.getByRole('button', { name: 'Size a meter' }).click() },
-  { name: 'working-light', then: (page) => page.locator('#working summary', { hasText: 'Discharge coefficient' }).first().click() },
+  {
+    name: 'working-light',
+    then: (page) => page.locator('#working summary', { hasText: 'Discharge coefficient' }).first().click(),
+  },
   { name: 'menu-light', window: true, then: (page) => page.getByRole('button', { name: 'Menu' }).click() },
   { name: 'keys-light', window: true, then: (page) => page.keyboard.press('?') },
   { name: 'us-units-light', project: JSON.stringify({ ...JSON.parse(example), display: 'US' }) },

@@ -1,6 +1,6 @@
 /** A meter from nothing to its answer, and the question turned round. */
 import type { Page } from '@playwright/test';
-import { answer, exampleText, field, fill, open, openExample, panel, press, save, type Station } from './hand.ts';
+import { answer, exampleText, field, fill, open, openExample, panel, press, type Station, save } from './hand.ts';
 import { type Figures, solveHeadless } from './headless.ts';
 import { expect, test } from './watched.ts';
 
@@ -39,7 +39,10 @@ async function fillIn(page: Page): Promise<void> {
 async function expectDuty(page: Page, figures: Figures): Promise<void> {
   const table = panel(page, 'At each flow').getByRole('table');
   for (const [name, row] of Object.entries(figures.duty)) {
-    const cells = await table.getByRole('row', { name: new RegExp(`^${name}`) }).getByRole('cell').allInnerTexts();
+    const cells = await table
+      .getByRole('row', { name: new RegExp(`^${name}`) })
+      .getByRole('cell')
+      .allInnerTexts();
     const values = Object.values(row);
     expect(cells).toHaveLength(values.length);
     values.forEach(({ number, text }, at) => expect([number, text, `±${text}`]).toContain(cells[at]));

@@ -23,7 +23,10 @@ for (const locale of ['en-GB', 'de-DE', 'fr-FR', 'sv-SE']) {
       expect(await stored('1.25e4 Pa')).toBe('1.25e4 Pa');
       await field(page, upstream, 'Pipe bore').fill('1 234,5 mm');
       await field(page, upstream, 'Temperature').fill('\u22123.2 °C');
-      expect(await savedMeter(page)).toMatchObject({ pipe: { bore: '1234.5 mm' }, upstream: { temperature: '-3.2 degC' } });
+      expect(await savedMeter(page)).toMatchObject({
+        pipe: { bore: '1234.5 mm' },
+        upstream: { temperature: '-3.2 degC' },
+      });
     });
 
     test('a unit alone converts what stood there', async ({ page }) => {

@@ -2,7 +2,7 @@
  * The test of every spec here. It fails on whatever the page says in its console, on an error nobody caught, on a
  * breach of the content security policy, and on a request to another origin; service worker and all tabs included.
  */
-import { test as base, type BrowserContext, expect } from '@playwright/test';
+import { type BrowserContext, test as base, expect } from '@playwright/test';
 
 /** Fills the list it returns as long as the context lives. */
 export async function listen(context: BrowserContext, home: string): Promise<readonly string[]> {
