@@ -1,5 +1,6 @@
 /** What the chart draws: the curve split into what stands inside the Reynolds limits and what does not, axes, labels. */
 import type { Chart, ChartPoint } from '../present/model.ts';
+import { spelled } from '../present/numbers.ts';
 
 /** One row for the plot; a series without a value at a point is absent there. */
 export interface PlotRow {
@@ -32,7 +33,7 @@ export function ticksTo(most: number, count: number): readonly number[] {
   if (!(most > 0)) return [0, 1];
   const step = firstStep(most, count);
   const last = Math.ceil(most / step - 1e-9);
-  return Array.from({ length: last + 1 }, (_, index) => Number((index * step).toPrecision(12)));
+  return Array.from({ length: last + 1 }, (_, index) => index * step);
 }
 
 /** Largest value on each axis, duty points and band included. */
@@ -42,11 +43,8 @@ export function extremes(chart: Chart): { readonly differential: number; readonl
   return { differential: Math.max(0, ...differentials), flow: Math.max(0, ...flows) };
 }
 
-/** A figure of an axis; five digits and more in groups of three, with a narrow no-break space. */
-export const axisText = (value: number): string => {
-  const text = String(value);
-  return value < 10000 ? text : text.replace(/\B(?=(\d{3})+$)/g, '\u202f');
-};
+/** A figure of an axis, the rounding of its step left out. */
+export const axisText = (value: number): string => spelled(value, { significant: 6, trim: true, plainTo: 1e9 }, true);
 
 /** A value with as many digits as a table of readings needs. */
-export const plain = (value: number): string => String(Number(value.toPrecision(4)));
+export const plain = (value: number): string => spelled(value, { significant: 4, trim: true }, false);
