@@ -44,6 +44,10 @@ test('no vector has been lost', () => {
     {
       "aga8/appendix-b.json": 29,
       "aga8/binaries.json": 270,
+      "aga8/detail-binaries.json": 270,
+      "aga8/detail-example.json": 1,
+      "aga8/detail-w.json": 40,
+      "aga8/detail-z.json": 40,
       "aga8/example.json": 1,
       "aga8/iso20765-2.json": 24,
       "aga8/phase-grid.json": 117,

@@ -16,6 +16,8 @@ export interface Caution {
   readonly unit: string;
   readonly limit: { readonly min?: number; readonly max?: number };
   readonly source: Source;
+  /** What the sentence needs beside value and limit. */
+  readonly detail?: Readonly<Record<string, string | number>>;
 }
 
 /** Expanded relative uncertainty of a figure at 95 %, as its formulation states it. */

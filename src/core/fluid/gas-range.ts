@@ -86,13 +86,24 @@ export const liquidCaution = (p: number): Caution => ({
   source: GERG,
 });
 
-/** Everything about a gas that a user must know beside its figures. */
+/** Everything about a gas by GERG-2008 that a user must know beside its figures. */
 export function gasCautions(x: readonly number[], p: number, T: number, phase: 'gas' | 'liquid'): readonly Caution[] {
-  const water = waterPressures(x, p, T);
-  const sum = phaseSum(x, p, T, phase);
+  return [...gergCautions(x, p, T), ...phaseCautions(x, p, T, phase)];
+}
+
+/** In what a state leaves the range of GERG-2008. */
+export function gergCautions(_: readonly number[], p: number, T: number): readonly Caution[] {
   return [
     rangeCaution('fluid-range-temperature', T, 'K', normal.temperature, extended.temperature),
     rangeCaution('fluid-range-pressure', p, 'Pa', normal.pressure, extended.pressure),
+  ].filter((caution) => caution !== undefined);
+}
+
+/** A second phase beside the one claimed, and water that condenses. */
+export function phaseCautions(x: readonly number[], p: number, T: number, phase: 'gas' | 'liquid'): readonly Caution[] {
+  const water = waterPressures(x, p, T);
+  const sum = phaseSum(x, p, T, phase);
+  return [
     splits(sum)
       ? ({
           id: 'fluid-two-phase',

@@ -3,9 +3,8 @@ import type { Density, DynamicViscosity } from '../quantity/kinds.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Given, Working } from '../quantity/working.ts';
 import type { FluidState } from './contract.ts';
-import { GERG } from './gas-range.ts';
+import type { GasEquation } from './gas-equation.ts';
 import type { ViscosityBasis } from './gas-viscosity/viscosity.ts';
-import { R } from './gerg/mixture.ts';
 import type { State } from './model.ts';
 
 /** The figures of a state that have a source and a working. */
@@ -21,30 +20,36 @@ export interface BaseGas {
   readonly ideal: boolean;
 }
 
-const realGas: Source = { clause: 'Z = p M / (ρ R T) with the density of GERG-2008', seen: 'derived' };
-const exponent: Source = { clause: 'κ = w² ρ / p with density and speed of sound of GERG-2008', seen: 'derived' };
-const realBase: Source = { clause: `${GERG.clause} at the base state`, seen: GERG.seen };
+const realGas: Source = { clause: 'Z = p M / (ρ R T) with the density of the equation of state', seen: 'derived' };
+const exponent: Source = {
+  clause: 'κ = w² ρ / p with density and speed of sound of the equation of state',
+  seen: 'derived',
+};
+const realBase = ({ clause, seen }: Source): Source => ({ clause: `${clause} at the base state`, seen });
 const idealBase: Source = {
   clause: 'ideal gas at the base state (Z_b = 1): the mixture would condense there',
   seen: 'practice',
 };
 
 /** The formulation of each figure that the state has. */
-export function gasSources(viscosity: Source, { ideal }: BaseGas): FluidState['sources'] {
-  return { density: GERG, viscosity, isentropicExponent: exponent, baseDensity: ideal ? idealBase : realBase };
+export function gasSources({ source }: GasEquation, viscosity: Source, { ideal }: BaseGas): FluidState['sources'] {
+  const baseDensity = ideal ? idealBase : realBase(source);
+  return { density: source, viscosity, isentropicExponent: exponent, baseDensity };
 }
 
 const named = (symbol: string, value: number, unit: string, words: string): Given => ({ symbol, value, unit, words });
-const gasConstant = named('R', R, 'J/(mol.K)', 'molar-gas-constant');
 
-/** The working of each figure. */
+/** The working of each figure; `R` is the gas constant of the equation, J/(mol.K). */
 export function gasWorking(
+  { source }: GasEquation,
+  R: number,
   figures: GasFigures,
   basis: ViscosityBasis,
   atBase: BaseGas,
   base: State,
 ): readonly Working[] {
   const { density, viscosity, speedOfSound, molarMass } = figures;
+  const gasConstant = named('R', R, 'J/(mol.K)', 'molar-gas-constant');
   const p = named('p_1', figures.pressure, 'Pa(a)', 'pressure-upstream');
   const T = named('T_1', figures.temperature, 'K', 'temperature-upstream');
   const M = named('M', molarMass, 'kg/mol', 'molar-mass');
@@ -57,7 +62,7 @@ export function gasWorking(
       given: [p, T, M],
       value: density,
       unit: 'kg/m3',
-      source: GERG,
+      source,
       remark: 'gerg-density',
     },
     { id: 'viscosity', symbol: 'μ_1', given: [rho, T], value: viscosity, unit: 'Pa.s', source: basis.source, remark },
@@ -67,7 +72,7 @@ export function gasWorking(
       given: [rho, T],
       value: speedOfSound,
       unit: 'm/s',
-      source: GERG,
+      source,
       remark: 'gerg-speed-of-sound',
     },
     {
@@ -88,11 +93,17 @@ export function gasWorking(
       unit: '',
       source: realGas,
     },
-    baseWorking(atBase, base, M),
+    baseWorking(atBase, base, M, gasConstant, source),
   ];
 }
 
-function baseWorking({ density, compressibility, ideal }: BaseGas, base: State, M: Given): Working {
+function baseWorking(
+  { density, compressibility, ideal }: BaseGas,
+  base: State,
+  M: Given,
+  gasConstant: Given,
+  equation: Source,
+): Working {
   const given = [
     named('p_b', base.pressure, 'Pa(a)', 'pressure-base'),
     M,
@@ -107,7 +118,7 @@ function baseWorking({ density, compressibility, ideal }: BaseGas, base: State, 
     given,
     value: density,
     unit: 'kg/m3',
-    source: ideal ? idealBase : realBase,
+    source: ideal ? idealBase : realBase(equation),
     ...(ideal ? { remark: 'gas-base-ideal' } : {}),
   };
 }

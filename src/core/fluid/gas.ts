@@ -1,6 +1,6 @@
 /**
  * A gas or gas mixture of known composition: density, speed of sound and isentropic exponent by one equation of state.
- * Standard: ISO 20765-2:2015 (GERG-2008), 21 components. Symbols: those of the standard; SI.
+ * Standard: ISO 20765-2:2015 (GERG-2008), 21 components, or AGA Report No. 8, Part 1 (DETAIL). Symbols: theirs; SI.
  */
 import type { AbsolutePressure, Density, MolarMass, Temperature } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
@@ -8,20 +8,13 @@ import { spellings } from './composition.table.ts';
 import { type Basis, compositionOf } from './composition.ts';
 import type { FluidState } from './contract.ts';
 import { splits } from './cubic/stability.ts';
-import {
-  condenses,
-  gasCautions,
-  gasUncertainty,
-  liquidCaution,
-  outsideBy,
-  phaseSum,
-  refusedOutside,
-} from './gas-range.ts';
+import { type EquationName, equationNames, type GasEquation, gasEquations } from './gas-equation.ts';
+import { condenses, liquidCaution, outsideBy, phaseCautions, phaseSum, refusedOutside } from './gas-range.ts';
 import { gasViscosity, viscosityBasis, viscosityCautions } from './gas-viscosity/viscosity.ts';
 import { type BaseGas, type GasFigures, gasSources, gasWorking } from './gas-working.ts';
 import { gasDensity, liquidDensity } from './gerg/density.ts';
 import { type Isotherm, isothermOf } from './gerg/isotherm.ts';
-import { componentNames, type Mixture, mixtureOf, R } from './gerg/mixture.ts';
+import { componentNames, type Mixture } from './gerg/mixture.ts';
 import { type GasProperties, propertiesAt } from './gerg/properties.ts';
 import { type Conditions, type FluidModel, type Parsed, plainName, type State } from './model.ts';
 import { otherGasNames, otherGasState } from './other-gas.ts';
@@ -29,21 +22,29 @@ import { otherGasNames, otherGasState } from './other-gas.ts';
 /** The phase of a mixture, found or asked for. */
 export type GasPhase = 'gas' | 'liquid';
 
+/** What the user settles beside composition and state; the equation is GERG-2008 where nothing is said. */
+interface Asked {
+  readonly phase?: GasPhase;
+  readonly equation?: EquationName;
+}
+
 /**
  * State of a gas of composition `x`, in the order of componentNames, sum 1.
  * Problems: gas-out-of-range, gas-density-none, gas-beyond-equation.
  */
-export function gasState(x: readonly number[], conditions: Conditions, asked?: GasPhase): Outcome<FluidState> {
+export function gasState(x: readonly number[], conditions: Conditions, how: Asked = {}): Outcome<FluidState> {
   const { pressure: p, temperature: T } = conditions;
+  const { phase: asked, equation: name = 'gerg-2008' } = how;
+  const equation = gasEquations[name];
   if (outsideBy(p, T) !== undefined) return refusedOutside(conditions);
-  const mixture = mixtureOf(x);
+  const mixture = equation.mixtureOf(x);
   const isotherm = isothermOf(mixture, T);
   const root = rootOf(isotherm, p, asked);
   const detail = { pressure: p, temperature: T, phase: asked ?? 'gas' };
   if (root === undefined) return fail('gas-density-none', conditions.paths.pressure, detail);
   const properties = propertiesAt(isotherm, root.rho);
   if (!isReal(properties)) return fail('gas-beyond-equation', conditions.paths.temperature, detail);
-  return ok(stateFrom(isotherm, root, properties, conditions));
+  return ok(stateFrom(equation, isotherm, root, properties, conditions));
 }
 
 /** A molar density, mol/m3, and whose it is. */
@@ -70,6 +71,7 @@ const isReal = ({ isochoricHeatCapacity, speedOfSoundSquared, compressibility }:
   isochoricHeatCapacity > 0 && speedOfSoundSquared > 0 && compressibility > 0 && Number.isFinite(speedOfSoundSquared);
 
 function stateFrom(
+  equation: GasEquation,
   { mixture, T, RT }: Isotherm,
   { rho, phase, unasked }: MolarRoot,
   properties: GasProperties,
@@ -89,12 +91,9 @@ function stateFrom(
   };
   const atBase = baseOf(mixture, base);
   const basis = viscosityBasis(x, temperature, rho);
-  const cautions = [
-    ...(unasked ? [liquidCaution(p)] : []),
-    ...gasCautions(x, p, T, phase),
-    ...viscosityCautions(basis, temperature),
-  ];
-  const known = cautions.length > 0 ? undefined : gasUncertainty(x, p, T); // what is in doubt has no figure
+  const doubts = [...(unasked ? [liquidCaution(p)] : []), ...phaseCautions(x, p, T, phase)];
+  const cautions = [...doubts, ...equation.cautions(x, p, T), ...viscosityCautions(basis, temperature)];
+  const known = doubts.length > 0 ? undefined : equation.uncertainty(x, p, T); // what is in doubt has no figure
   return {
     ...figures,
     jouleThomson: properties.jouleThomson,
@@ -106,14 +105,14 @@ function stateFrom(
       ...(known === undefined ? {} : { density: known, speedOfSound: known }),
       viscosity: { share: basis.uncertainty, source: basis.source },
     },
-    sources: gasSources(basis.source, atBase),
-    working: gasWorking(figures, basis, atBase, base),
+    sources: gasSources(equation, basis.source, atBase),
+    working: gasWorking(equation, mixture.R, figures, basis, atBase, base),
   };
 }
 
 /** ρ_b = p_b M / (Z_b R T_b), with Z_b = 1 where the gas would not be one gas at the base state. */
 function baseOf(mixture: Mixture, { pressure: p, temperature: T }: State): BaseGas {
-  const RT = R * T;
+  const RT = mixture.R * T;
   const whole = outsideBy(p, T) === undefined && !condenses(mixture.x, p, T);
   const rho = whole ? gasDensity(isothermOf(mixture, T), p) : undefined;
   const molar = rho ?? p / RT;
@@ -147,25 +146,27 @@ function parsedState({ fractions, flags, choices }: Parsed, conditions: Conditio
   const { composition } = fractions;
   const { name } = choices;
   const phase = choices.phase as GasPhase | undefined;
+  const equation = choices.equation as EquationName | undefined;
+  const asked: Asked = { ...(phase === undefined ? {} : { phase }), ...(equation === undefined ? {} : { equation }) };
   if (name !== undefined && composition !== undefined) return fail('gas-named-twice', own('name'), { written: name });
-  if (name !== undefined) return pureState(name, conditions, phase);
+  if (name !== undefined) return pureState(name, conditions, asked);
   if (composition === undefined) return fail('field-missing', own('composition'));
   const basis = (choices.basis ?? 'mole') as Basis;
   const x = compositionOf(composition, basis, flags.normalise === true, own('composition'));
-  return x.ok ? gasState(x.value, conditions, phase) : x;
+  return x.ok ? gasState(x.value, conditions, asked) : x;
 }
 
-function pureState(name: string, conditions: Conditions, phase?: GasPhase): Outcome<FluidState> {
+function pureState(name: string, conditions: Conditions, asked: Asked): Outcome<FluidState> {
   const place = componentNames.indexOf(name);
   if (place >= 0)
     return gasState(
       componentNames.map((_, i) => (i === place ? 1 : 0)),
       conditions,
-      phase,
+      asked,
     );
-  if (phase !== 'liquid') return otherGasState(name, conditions);
+  if (asked.phase !== 'liquid') return otherGasState(name, conditions);
   const { pressure, temperature, paths } = conditions;
-  return fail('gas-density-none', paths.own('phase'), { pressure, temperature, phase });
+  return fail('gas-density-none', paths.own('phase'), { pressure, temperature, phase: asked.phase });
 }
 
 export const gas: FluidModel = {
@@ -175,6 +176,7 @@ export const gas: FluidModel = {
     { name: 'name', type: 'name', names: named, required: false },
     { name: 'basis', type: 'choice', choices: ['mole', 'mass'], required: false },
     { name: 'normalise', type: 'flag' },
+    { name: 'equation', type: 'choice', choices: equationNames, required: false },
     { name: 'phase', type: 'choice', choices: ['gas', 'liquid'], required: false },
   ],
   state: parsedState,

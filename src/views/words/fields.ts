@@ -18,6 +18,7 @@ const labels: Readonly<Record<string, string>> = {
   'fluid.baseDensity': 'Density at the base state',
   'fluid.quality': 'Quality of the steam',
   'fluid.composition': 'Composition',
+  'fluid.equation': 'Equation of state',
   'fluid.basis': 'Fractions',
   'fluid.normalise': 'Bring the sum to 100 %',
   'fluid.name': 'Name of the fluid',

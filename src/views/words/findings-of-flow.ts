@@ -45,6 +45,10 @@ export const checksOfFlow: Readonly<Record<string, FindingWords>> = {
     role: 'pressure',
     text: (figure) => `Pressure ${figure} against the range of the equation of state`,
   },
+  'detail-composition': {
+    role: 'percent',
+    text: (figure, detail) => `Share of ${detail.text('components')} ${figure}, against gas of pipeline quality`,
+  },
   'fluid-two-phase': {
     role: 'number',
     text: (figure) => `A second phase may form: the sum of its trial phase is ${figure}`,

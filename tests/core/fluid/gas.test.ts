@@ -233,6 +233,53 @@ describe('the state of a gas', () => {
   });
 });
 
+describe('the other equation', () => {
+  const detail = { equation: 'aga8-detail' };
+
+  it('agrees with GERG-2008 on gas of pipeline quality and names itself', () => {
+    for (const [p, T] of [
+      [1e5, 270],
+      [3e6, 280],
+      [8e6, 300],
+      [12e6, 330],
+    ] as const) {
+      const [one, other] = [solved(p, T, natural), solved(p, T, natural, detail)];
+      // Both claim 0.1 % (AGA Report No. 8, Parts 1 and 2).
+      expect(Math.abs(one.density / other.density - 1), `${p} Pa`).toBeLessThan(1e-3);
+      expect(Math.abs((one.speedOfSound ?? 0) / (other.speedOfSound ?? 1) - 1), `${p} Pa`).toBeLessThan(2e-3);
+      expect(other.sources.density.clause).toContain('DETAIL');
+      expect(other.sources.baseDensity?.clause).toContain('DETAIL');
+      expect(other.cautions).toBeUndefined();
+    }
+    expect(solved(5e6, 300, natural, { equation: 'gerg-2008' })).toEqual(solved(5e6, 300, natural));
+    expect(problems(natural, { equation: 'guess' })).toEqual(['choice-unknown fluid.equation']);
+  });
+
+  it('tells where a gas leaves pipeline quality', () => {
+    const cautions = (p: number, T: number, composition: Composition) =>
+      (solved(p, T, composition, detail).cautions ?? []).map(({ id, detail: more }) =>
+        `${id} ${more?.components ?? ''}`.trim(),
+      );
+    expect(cautions(1e6, 300, { methane: 0.69, ethane: 0.11, nitrogen: 0.2 })).toEqual([
+      'detail-composition methane',
+      'detail-composition ethane',
+    ]);
+    expect(cautions(13e6, 345, natural)).toEqual(['fluid-range-temperature', 'fluid-range-pressure']);
+    expect(solved(13e6, 345, natural, detail).uncertainties?.density).toBeUndefined();
+    expect(Object.keys(findingWords)).toContain('detail-composition');
+  });
+
+  it('answers random states with numbers or a reason', () => {
+    const random = seeded(8);
+    for (let k = 0; k < 1000; k++) {
+      const x = randomFractions(random);
+      const composition = Object.fromEntries(componentNames.map((name, i) => [name, x[i] ?? 0] as const));
+      const [p, T] = [10 ** (2 + 6 * random()), 60 + 700 * random()];
+      expect(faultOf(at(p, T, composition, detail), new Set(), new Set()), `${p} Pa, ${T} K, ${x}`).toBeUndefined();
+    }
+  });
+});
+
 describe('the cautions', () => {
   const ids = (p: number, T: number, composition: Composition) =>
     (solved(p, T, composition).cautions ?? []).map(({ id, verdict }) => `${id} ${verdict}`);
@@ -360,10 +407,9 @@ function faultOf(state: ReturnType<typeof at>, codes: Set<string>, ids: Set<stri
   }
   const { jouleThomson = Number.NaN, cautions = [], ...others } = state.value;
   for (const { id } of cautions) ids.add(id);
-  const figures = [...Object.values(others), ...cautions.map(({ value }) => value)].filter(
-    (f) => typeof f === 'number',
-  );
+  const figures = Object.values(others).filter((value) => typeof value === 'number');
   if (figures.length < 8 || !Number.isFinite(jouleThomson)) return 'a figure is missing';
+  if (!cautions.every(({ value }) => Number.isFinite(value) && value >= 0)) return 'a caution has no figure';
   return figures.every((value) => Number.isFinite(value) && value > 0) ? undefined : 'a figure is no figure';
 }
 

@@ -1,11 +1,12 @@
 /** What the vectors of gas mixtures put to the test; units as the sources print them. */
 import { compositionOf } from '../../../src/core/fluid/composition.ts';
 import { splits } from '../../../src/core/fluid/cubic/stability.ts';
+import { detailMixtureOf } from '../../../src/core/fluid/detail/mixture.ts';
 import { phaseSum } from '../../../src/core/fluid/gas-range.ts';
 import { gasDensity, liquidDensity } from '../../../src/core/fluid/gerg/density.ts';
 import { energiesAt } from '../../../src/core/fluid/gerg/energy.ts';
 import { type Isotherm, isothermOf, pressureAt } from '../../../src/core/fluid/gerg/isotherm.ts';
-import { mixtureOf } from '../../../src/core/fluid/gerg/mixture.ts';
+import { type Mixture, mixtureOf } from '../../../src/core/fluid/gerg/mixture.ts';
 import { propertiesAt } from '../../../src/core/fluid/gerg/properties.ts';
 
 type Given = Record<string, number | string>;
@@ -28,7 +29,10 @@ function fractions(given: Given): readonly number[] {
   return read.value;
 }
 
-const isotherm = (given: Given): Isotherm => isothermOf(mixtureOf(fractions(given)), figure(given, 'T'));
+type Equation = (x: readonly number[]) => Mixture;
+
+const isotherm = (given: Given, equation: Equation): Isotherm =>
+  isothermOf(equation(fractions(given)), figure(given, 'T'));
 
 /** The gas root, and where p and T have none the liquid one: the sources print both kinds. */
 function densityAt(along: Isotherm, p: number): number {
@@ -50,38 +54,47 @@ function printed(along: Isotherm, rho: number): Record<string, number> {
   };
 }
 
-function atPressure(given: Given): Record<string, number> {
-  const along = isotherm(given);
-  const p = 'P' in given ? figure(given, 'P') * 1e3 : figure(given, 'p') * 1e6;
-  return printed(along, densityAt(along, p));
-}
-
-function example(given: Given): Record<string, number> {
-  const along = isotherm(given);
-  const rho = densityAt(along, figure(given, 'P0') * 1e3);
-  const found = propertiesAt(along, rho);
-  const energies = energiesAt(along, rho);
-  const step = 1e-3 * rho;
-  const slope = (steps: number): number => pressureAt(along, rho + steps * step).slope;
-  return {
-    M: along.mixture.molarMass * 1e3,
-    D: rho / 1e3,
-    P: found.pressure / 1e3,
-    Z: found.compressibility,
-    dPdD: found.slope,
-    d2PdD2: (1e3 * (8 * (slope(1) - slope(-1)) - slope(2) + slope(-2))) / (12 * step), // five-point difference
-    dPdT: found.thermal / 1e3,
-    U: energies.internalEnergy,
-    H: energies.enthalpy,
-    S: energies.entropy,
-    G: energies.gibbsEnergy,
-    Cv: found.isochoricHeatCapacity,
-    Cp: found.isobaricHeatCapacity,
-    W: Math.sqrt(found.speedOfSoundSquared),
-    JT: found.jouleThomson * 1e3,
-    Kappa: found.isentropicExponent,
+const atPressure =
+  (equation: Equation): Subject =>
+  (given) => {
+    const along = isotherm(given, equation);
+    const p = 'P' in given ? figure(given, 'P') * 1e3 : figure(given, 'p') * 1e6;
+    return printed(along, densityAt(along, p));
   };
-}
+
+const atDensity =
+  (equation: Equation): Subject =>
+  (given) =>
+    printed(isotherm(given, equation), figure(given, 'rho') * 1e3);
+
+const example =
+  (equation: Equation): Subject =>
+  (given) => {
+    const along = isotherm(given, equation);
+    const rho = densityAt(along, figure(given, 'P0') * 1e3);
+    const found = propertiesAt(along, rho);
+    const energies = energiesAt(along, rho);
+    const step = 1e-3 * rho;
+    const slope = (steps: number): number => pressureAt(along, rho + steps * step).slope;
+    return {
+      M: along.mixture.molarMass * 1e3,
+      D: rho / 1e3,
+      P: found.pressure / 1e3,
+      Z: found.compressibility,
+      dPdD: found.slope,
+      d2PdD2: (1e3 * (8 * (slope(1) - slope(-1)) - slope(2) + slope(-2))) / (12 * step), // five-point difference
+      dPdT: found.thermal / 1e3,
+      U: energies.internalEnergy,
+      H: energies.enthalpy,
+      S: energies.entropy,
+      G: energies.gibbsEnergy,
+      Cv: found.isochoricHeatCapacity,
+      Cp: found.isobaricHeatCapacity,
+      W: Math.sqrt(found.speedOfSoundSquared),
+      JT: found.jouleThomson * 1e3,
+      Kappa: found.isentropicExponent,
+    };
+  };
 
 const poundForce = 6894.757293168361; // Pa, 1 lbf/in2
 
@@ -91,8 +104,11 @@ function phases(given: Given): Record<string, number> {
 }
 
 export const subjects: Record<string, Subject> = {
-  'gerg-example': example,
-  'gerg-at-pressure': atPressure,
-  'gerg-at-density': (given) => printed(isotherm(given), figure(given, 'rho') * 1e3),
+  'gerg-example': example(mixtureOf),
+  'gerg-at-pressure': atPressure(mixtureOf),
+  'gerg-at-density': atDensity(mixtureOf),
+  'detail-example': example(detailMixtureOf),
+  'detail-at-pressure': atPressure(detailMixtureOf),
+  'detail-at-density': atDensity(detailMixtureOf),
   'gas-phases': phases,
 };

@@ -5,7 +5,7 @@
  */
 import { components } from './components.table.ts';
 import { coefficientsOf, expand, type Isotherm } from './isotherm.ts';
-import { R } from './mixture.ts';
+import type { Mixture } from './mixture.ts';
 import { idealR } from './properties.ts';
 
 export interface GasEnergies {
@@ -16,15 +16,16 @@ export interface GasEnergies {
 }
 
 const zeroT = 298.15; // K, zero point of the ideal gas (Kunz and Wagner 2012)
-const zeroDensity = 101325 / (R * zeroT); // mol/m3
+const zeroPressure = 101325; // Pa
 
 /** Energies at the molar density `rho`, mol/m3, on an isotherm. */
 export function energiesAt(isotherm: Isotherm, rho: number): GasEnergies {
   const { mixture, T, tau, RT, coefficients } = isotherm;
+  const { R } = mixture;
   const delta = rho / mixture.rhoR;
-  const { a: a00, a1: a01 } = expand(mixture.shapes, coefficients, delta);
-  const { a: a10 } = expand(mixture.shapes, coefficientsOf(mixture, tau, 1), delta);
-  const ideal = idealPart(mixture.x, T, rho);
+  const { a: a00, a1: a01 } = expand(mixture, coefficients, delta);
+  const { a: a10 } = expand(mixture, coefficientsOf(mixture, tau, 1), delta);
+  const ideal = idealPart(mixture, T, rho);
   const internalEnergy = RT * (ideal.slope + a10); // u = R T (α°_10 + α_10)
   const enthalpy = internalEnergy + RT * (1 + a01); // h = u + p/ρ
   const entropy = R * (ideal.slope + a10 - ideal.value - a00); // s = R (α°_10 + α_10 - α° - α)
@@ -32,8 +33,9 @@ export function energiesAt(isotherm: Isotherm, rho: number): GasEnergies {
 }
 
 /** α° and τ ∂α°/∂τ of a mixture. The fitted constants carry R*, hence the scale. */
-function idealPart(x: readonly number[], T: number, rho: number): { readonly value: number; readonly slope: number } {
+function idealPart({ x, R }: Mixture, T: number, rho: number): { readonly value: number; readonly slope: number } {
   const scale = idealR / R;
+  const zeroDensity = zeroPressure / (R * zeroT); // mol/m3
   let [value, slope] = [0, 0];
   components.forEach(({ n: [n1 = 0, n2 = 0, n3 = 0, ...factors], theta }, i) => {
     const xi = x[i] ?? 0;

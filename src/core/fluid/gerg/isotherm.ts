@@ -3,8 +3,8 @@
  * polynomial for each shape of exponential.
  * Standard: ISO 20765-2:2015 (GERG-2008). Symbols: δ = ρ/ρ_r, τ = T_r/T; SI, densities in mol/m3.
  */
-import { type Mixture, R } from './mixture.ts';
-import { figuresPerShape, highestPower, shapeCount, shapeFigures, shapeTop, slotPlace, slotPower } from './terms.ts';
+import type { Mixture } from './mixture.ts';
+import { figuresPerShape, type Gathered } from './slots.ts';
 
 /** A mixture at one temperature. */
 export interface Isotherm {
@@ -18,24 +18,24 @@ export interface Isotherm {
 
 export const isothermOf = (mixture: Mixture, T: number): Isotherm => {
   const tau = mixture.Tr / T;
-  return { mixture, T, tau, RT: R * T, coefficients: coefficientsOf(mixture, tau, 0) };
+  return { mixture, T, tau, RT: mixture.R * T, coefficients: coefficientsOf(mixture, tau, 0) };
 };
 
 /** Coefficients of α_r (order 0), of τ ∂α_r/∂τ (order 1) or of τ² ∂²α_r/∂τ² (order 2). */
-export function coefficientsOf({ slots, factors }: Mixture, tau: number, order: 0 | 1 | 2): Float64Array {
+export function coefficientsOf({ set, slots, factors }: Mixture, tau: number, order: 0 | 1 | 2): Float64Array {
   const logarithm = Math.log(tau);
-  const coefficients = new Float64Array(shapeCount * highestPower);
+  const coefficients = new Float64Array(set.top.length * set.columns);
   let t = 0;
   let power = 1;
   for (let k = 0; k < slots.length; k++) {
     const slot = slots[k] as number;
-    const own = slotPower[slot] as number;
+    const own = set.power[slot] as number;
     if (own !== t) {
       t = own;
       power = Math.exp(t * logarithm);
     }
     const lowered = order === 0 ? power : order === 1 ? t * power : t * (t - 1) * power;
-    const place = slotPlace[slot] as number;
+    const place = set.place[slot] as number;
     coefficients[place] = (coefficients[place] as number) + (factors[k] as number) * lowered;
   }
   return coefficients;
@@ -49,17 +49,18 @@ export interface Expanded {
 }
 
 /** Sums a table of coefficients: for each shape exp(h) Σ A_d δ^d with u = δ h' and v = δ² h''. */
-export function expand(used: Int32Array, coefficients: Float64Array, delta: number): Expanded {
+export function expand({ set, shapes }: Gathered, coefficients: Float64Array, delta: number): Expanded {
+  const { columns, figures, top } = set;
   let a = 0;
   let a1 = 0;
   let a2 = 0;
-  for (let k = 0; k < used.length; k++) {
-    const shape = used[k] as number;
-    const first = shape * highestPower; // the table starts at δ^1
+  for (let k = 0; k < shapes.length; k++) {
+    const shape = shapes[k] as number;
+    const first = shape * columns; // the table starts at δ^1
     let P = 0; // Σ A_d δ^(d-1), then its two derivatives
     let P1 = 0;
     let P2 = 0;
-    for (let column = first + (shapeTop[shape] as number) - 1; column >= first; column--) {
+    for (let column = first + (top[shape] as number) - 1; column >= first; column--) {
       P2 = P2 * delta + P1;
       P1 = P1 * delta + P;
       P = P * delta + (coefficients[column] as number);
@@ -67,8 +68,8 @@ export function expand(used: Int32Array, coefficients: Float64Array, delta: numb
     P2 = 2 * delta * delta * (P2 * delta + P1); // Σ d (d-1) A_d δ^d
     P1 = delta * (P1 * delta + P); // Σ d A_d δ^d
     P *= delta; // Σ A_d δ^d
-    const figures = shape * figuresPerShape;
-    const order = shapeFigures[figures] as number;
+    const own = shape * figuresPerShape;
+    const order = figures[own] as number;
     let h = 0;
     let u = 0;
     let v = 0;
@@ -77,10 +78,10 @@ export function expand(used: Int32Array, coefficients: Float64Array, delta: numb
       u = order * h;
       v = (order - 1) * u;
     } else {
-      const eta = shapeFigures[figures + 1] as number;
-      const away = delta - (shapeFigures[figures + 2] as number);
-      const beta = shapeFigures[figures + 3] as number;
-      h = -eta * away * away - beta * (delta - (shapeFigures[figures + 4] as number));
+      const eta = figures[own + 1] as number;
+      const away = delta - (figures[own + 2] as number);
+      const beta = figures[own + 3] as number;
+      h = -eta * away * away - beta * (delta - (figures[own + 4] as number));
       u = -delta * (2 * eta * away + beta);
       v = -2 * eta * delta * delta;
     }
@@ -101,6 +102,6 @@ function raised(delta: number, order: number): number {
 /** Pressure and its slope with the molar density: p = ρ R T (1 + α_01), ∂p/∂ρ = R T (1 + 2 α_01 + α_02). Pa, J/mol. */
 export function pressureAt(isotherm: Isotherm, rho: number): { readonly p: number; readonly slope: number } {
   const { mixture, RT, coefficients } = isotherm;
-  const { a1, a2 } = expand(mixture.shapes, coefficients, rho / mixture.rhoR);
+  const { a1, a2 } = expand(mixture, coefficients, rho / mixture.rhoR);
   return { p: rho * RT * (1 + a1), slope: RT * (1 + 2 * a1 + a2) };
 }

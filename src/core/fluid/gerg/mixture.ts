@@ -4,7 +4,8 @@
  */
 import { components } from './components.table.ts';
 import { reducing } from './reducing.table.ts';
-import { departures, pureShares, type Share, shapeCount, slotCount, slotShape } from './terms.ts';
+import { type Gathered, gathered } from './slots.ts';
+import { departures, gergSlots, pureShares, type Share } from './terms.ts';
 
 /** Molar gas constant of the equation, J/(mol.K). Source: Kunz and Wagner 2012; the later exact value is not for it. */
 export const R = 8.314472;
@@ -15,17 +16,13 @@ export const componentNames: readonly string[] = components.map(({ name }) => na
 export const molarMasses: readonly number[] = components.map(({ M }) => M / 1000);
 
 /** A mixture: everything that does not depend on temperature and density. */
-export interface Mixture {
+export interface Mixture extends Gathered {
   /** Mole fractions in the order of componentNames; they sum to 1. */
   readonly x: readonly number[];
   readonly molarMass: number; // kg/mol
+  readonly R: number; // molar gas constant of the equation, J/(mol.K)
   readonly Tr: number; // reducing temperature, K
   readonly rhoR: number; // reducing density, mol/m3
-  /** Slots in use, in rising order, and the factor of each. */
-  readonly slots: Int32Array;
-  readonly factors: Float64Array;
-  /** Shapes in use. */
-  readonly shapes: Int32Array;
 }
 
 const size = components.length;
@@ -67,29 +64,15 @@ export function mixtureOf(x: readonly number[]): Mixture {
       Tr += ((pairConstants[at + 2] as number) * both) / ((pairConstants[at + 3] as number) * xi + xj);
     }
   }
-  return { x, molarMass, Tr, rhoR: 1 / volume, ...termsOf(x) };
+  return { x, molarMass, R, Tr, rhoR: 1 / volume, ...termsOf(x) };
 }
 
 /** α_r = Σ x_i α_r,i + Σ x_i x_j F_ij α_r,ij, as factors of the slots. */
-function termsOf(x: readonly number[]): Pick<Mixture, 'slots' | 'factors' | 'shapes'> {
-  const sums = new Float64Array(slotCount);
+function termsOf(x: readonly number[]): Gathered {
+  const sums = new Float64Array(gergSlots.count);
   for (let i = 0; i < size; i++) addTo(sums, pureShares[i] as Share, x[i] as number);
   for (const { i, j, F, share } of departures) addTo(sums, share, (x[i] as number) * (x[j] as number) * F);
-  const slots = new Int32Array(slotCount);
-  const factors = new Float64Array(slotCount);
-  const shapes = new Int32Array(shapeCount);
-  let used = 0;
-  let present = 0; // a bit for each shape
-  for (let slot = 0; slot < slotCount; slot++) {
-    const factor = sums[slot] as number;
-    if (factor === 0) continue;
-    slots[used] = slot;
-    factors[used++] = factor;
-    present |= 1 << (slotShape[slot] as number);
-  }
-  let usedShapes = 0;
-  for (let shape = 0; shape < shapeCount; shape++) if (present & (1 << shape)) shapes[usedShapes++] = shape;
-  return { slots: slots.subarray(0, used), factors: factors.subarray(0, used), shapes: shapes.subarray(0, usedShapes) };
+  return gathered(gergSlots, sums);
 }
 
 function addTo(sums: Float64Array, { slots, factors }: Share, weight: number): void {

@@ -4,7 +4,7 @@
  */
 import { components } from './components.table.ts';
 import { coefficientsOf, expand, type Isotherm } from './isotherm.ts';
-import { type Mixture, R } from './mixture.ts';
+import type { Mixture } from './mixture.ts';
 
 /** Gas constant that the ideal parts were fitted with, J/(mol.K). Source: Kunz and Wagner 2012. */
 export const idealR = 8.31451;
@@ -24,10 +24,11 @@ export interface GasProperties {
 /** All properties at the molar density `rho`, mol/m3, on an isotherm. */
 export function propertiesAt(isotherm: Isotherm, rho: number): GasProperties {
   const { mixture, T, tau, RT, coefficients } = isotherm;
+  const { R } = mixture;
   const delta = rho / mixture.rhoR;
-  const { a1: a01, a2: a02 } = expand(mixture.shapes, coefficients, delta);
-  const { a1: a11 } = expand(mixture.shapes, coefficientsOf(mixture, tau, 1), delta);
-  const { a: a20 } = expand(mixture.shapes, coefficientsOf(mixture, tau, 2), delta);
+  const { a1: a01, a2: a02 } = expand(mixture, coefficients, delta);
+  const { a1: a11 } = expand(mixture, coefficientsOf(mixture, tau, 1), delta);
+  const { a: a20 } = expand(mixture, coefficientsOf(mixture, tau, 2), delta);
   const Z = 1 + a01;
   const pressure = rho * RT * Z; // p = ρ R T (1 + α_01)
   const slope = RT * (1 + 2 * a01 + a02); // ∂p/∂ρ
