@@ -8,6 +8,7 @@ const payloads = [
   '"><svg onload=document.title="x">',
   "javascript:document.title='x'",
   '</title></style></textarea><b>bold</b>',
+  // biome-ignore lint/suspicious/noTemplateCurlyInString: a payload
   '{{7*7}}${7*7}&lt;i&gt;',
   '\u202etxet desrever',
   '<a href="https://example.invalid/">go</a>',

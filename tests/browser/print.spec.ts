@@ -65,7 +65,7 @@ for (const paper of ['A4', 'Letter'] as const) {
       expect(text).toContain('Tern Island works');
       expect(text).not.toContain('Undo'); // nothing of the screen
     });
-    found.forEach((figures, at) => expectFigures(pages[at * sheets.length] ?? '', figures));
+    for (const [at, figures] of found.entries()) expectFigures(pages[at * sheets.length] ?? '', figures);
   });
 }
 

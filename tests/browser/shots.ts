@@ -26,7 +26,7 @@ interface Shot {
   /** Index of the meter at hand. */
   readonly meter?: number;
   readonly project?: string;
-  readonly then?: (page: Page) => Promise<unknown>;
+  readonly act?: (page: Page) => Promise<unknown>;
 }
 
 /** The example with its first meter changed. */
@@ -61,8 +61,8 @@ const shots: readonly Shot[] = [
   { name: 'size-390-window', width: 390, height: 844, window: true },
   { name: 'steam-light', meter: 1 },
   { name: 'sea-water-light', meter: 2 },
-  { name: 'stale-light', then: (page) => differential(page).fill('250 mbra') },
-  { name: 'stale-dark', theme: 'dark', then: (page) => differential(page).fill('250 mbra') },
+  { name: 'stale-light', act: (page) => differential(page).fill('250 mbra') },
+  { name: 'stale-dark', theme: 'dark', act: (page) => differential(page).fill('250 mbra') },
   { name: 'refused-light', project: changed({ differential: 'plenty' }) },
   {
     name: 'outside-light',
@@ -71,17 +71,17 @@ const shots: readonly Shot[] = [
   { name: 'empty-light', window: true, project: '' },
   { name: 'empty-dark', window: true, theme: 'dark', project: '' },
   { name: 'empty-390', window: true, width: 390, height: 844, project: '' },
-  { name: 'new-meter-light', project: '', then: (page) => page.getByRole('button', { name: 'Size a meter' }).click() },
+  { name: 'new-meter-light', project: '', act: (page) => page.getByRole('button', { name: 'Size a meter' }).click() },
   {
     name: 'working-light',
-    then: (page) => page.locator('#working summary', { hasText: 'Discharge coefficient' }).first().click(),
+    act: (page) => page.locator('#working summary', { hasText: 'Discharge coefficient' }).first().click(),
   },
-  { name: 'menu-light', window: true, then: (page) => page.getByRole('button', { name: 'Menu' }).click() },
-  { name: 'keys-light', window: true, then: (page) => page.keyboard.press('?') },
+  { name: 'menu-light', window: true, act: (page) => page.getByRole('button', { name: 'Menu' }).click() },
+  { name: 'keys-light', window: true, act: (page) => page.keyboard.press('?') },
   { name: 'us-units-light', project: JSON.stringify({ ...JSON.parse(example), display: 'US' }) },
-  { name: 'sheet-light', then: sheet },
-  { name: 'sheet-dark', window: true, theme: 'dark', then: sheet },
-  { name: 'sheet-390', window: true, width: 390, height: 844, then: sheet },
+  { name: 'sheet-light', act: sheet },
+  { name: 'sheet-dark', window: true, theme: 'dark', act: sheet },
+  { name: 'sheet-390', window: true, width: 390, height: 844, act: sheet },
 ];
 
 /** The project of a shot, dropped on the window as a user would. */
@@ -103,7 +103,7 @@ async function open(browser: Browser, address: string, shot: Shot): Promise<Page
   await page.getByRole('main').waitFor();
   if (project !== '') await put(page, project);
   for (let step = 0; step < meter; step += 1) await page.keyboard.press(']');
-  await shot.then?.(page);
+  await shot.act?.(page);
   await page.waitForTimeout(400); // the curve may come a moment after the figures
   return page;
 }
@@ -116,7 +116,7 @@ async function take(browser: Browser, address: string, shot: Shot): Promise<void
 
 /** The pages of the PDF, 110 dots to the inch. */
 async function print(browser: Browser, address: string, paper: 'A4' | 'Letter'): Promise<void> {
-  const page = await open(browser, address, { name: paper, then: sheet });
+  const page = await open(browser, address, { name: paper, act: sheet });
   await page.getByRole('radio', { name: paper }).check();
   const path = `${folder}sheet-${paper}.pdf`;
   await page.pdf({ path, preferCSSPageSize: true, printBackground: true });

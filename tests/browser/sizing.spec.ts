@@ -45,7 +45,7 @@ async function expectDuty(page: Page, figures: Figures): Promise<void> {
       .allInnerTexts();
     const values = Object.values(row);
     expect(cells).toHaveLength(values.length);
-    values.forEach(({ number, text }, at) => expect([number, text, `±${text}`]).toContain(cells[at]));
+    for (const [at, { number, text }] of values.entries()) expect([number, text, `±${text}`]).toContain(cells[at]);
   }
 }
 
