@@ -9,6 +9,7 @@ import { stateOf } from './fluid/state.ts';
 import { readMeter } from './input/meter.ts';
 import { meterShape } from './input/shape.ts';
 import { readSite } from './input/site.ts';
+import { readUpstream } from './input/upstream.ts';
 import { gather, type Outcome, ok } from './quantity/outcome.ts';
 import { assemble } from './result/assemble.ts';
 import type { MeterResult, Results, Solved } from './result/record.ts';
@@ -39,11 +40,12 @@ function size(meter: MeterText, project: Surroundings): Outcome<Solved> {
   const shape = meterShape(meter); // 2 is this a meter at all
   if (!site.ok || !shape.ok) return gather(site, shape);
   const element = elementOf(shape.value.element?.kind); // 3 the element, and which fields are its own
-  const input = readMeter(shape.value, site.value, element.ok ? element.value.fields : [], materialKeys); // 4 quantities
-  if (!element.ok || !input.ok) return gather(element, input);
-  const { fluid, upstream, element: metal, uncertainty } = input.value;
-  const state = stateOf(fluid, upstream, site.value.base, site.value.atmosphere); // 5 the fluid's state
-  if (!state.ok) return state;
+  const input = readMeter(shape.value, element.ok ? element.value.fields : [], materialKeys); // 4 texts to quantities
+  const upstream = readUpstream(shape.value, site.value);
+  const { base, atmosphere } = site.value;
+  const state = upstream.ok ? stateOf(shape.value.fluid ?? {}, upstream.value, base, atmosphere) : upstream; // 5 the fluid
+  if (!element.ok || !input.ok || !state.ok) return gather(element, input, state);
+  const { element: metal, uncertainty } = input.value;
   const primary = settled(element.value, metal.own, metal.calibration); // 6 the element with its fields settled
   const solution = solve(input.value, primary, state.value); // 7 the unknown, then every duty point
   if (!solution.ok) return solution;

@@ -3,10 +3,10 @@ import type { Source } from '../quantity/source.ts';
 import { type Case, flowsOf, largest } from './case.ts';
 import type { Finding } from './finding.ts';
 
-const JET: Source = { clause: 'one-dimensional jet behind ISO 5167-2:2003, Eq (7)', seen: 'derived' };
-const MARGIN: Source = { clause: 'cavitation index (p1 - dp - pv)/dp; 0.5 is custom', seen: 'practice' };
-const SATURATION: Source = { clause: 'IAPWS R7-97(2012), Eq (31); 5 K is custom', seen: 'practice' };
-/** Below it the jet is close to boiling; where C itself may shift is lower, near 0.2. */
+const JET: Source = { clause: 'jet model of ISO 5167-2:2003, Eq (7)', seen: 'derived' };
+const MARGIN: Source = { clause: 'cavitation index; least value by custom', seen: 'practice' };
+const SATURATION: Source = { clause: 'saturation line; least distance by custom', seen: 'practice' };
+/** Of (p1 - dp - pv)/dp. Below it the jet is close to boiling; where C itself may shift is lower, near 0.2. */
 const LEAST_MARGIN = 0.5;
 /** Superheat or subcooling that a line's swings of pressure and temperature may eat up. */
 const LEAST_DISTANCE = 5; // K

@@ -4,10 +4,8 @@ import type { Source } from '../quantity/source.ts';
 import { type Case, flowsOf, largest, within } from './case.ts';
 import type { Finding } from './finding.ts';
 
-const BENDING: Source = {
-  clause: "ISO/TR 9464; E/D' >= sqrt(dp (0.681 - 0.651 beta)/yield), support taken as D",
-  seen: 'memory',
-};
+/** E/D' >= sqrt(dp (0.681 - 0.651 beta)/yield strength); the support is taken as D. */
+const BENDING: Source = { clause: 'ISO/TR 9464, plate against yielding', seen: 'memory' };
 
 export function checkPlate(subject: Case): readonly Finding[] {
   return [

@@ -4,7 +4,6 @@
  */
 import type { DutyName, FluidText, MeterText, Unknown } from '../document/project.ts';
 import type {
-  AbsolutePressure,
   BaseVolumeFlow,
   Length,
   MassFlow,
@@ -17,7 +16,6 @@ import type { Quantity } from '../quantity/text.ts';
 import type { Field } from './field.ts';
 import { type Form, openForm } from './form.ts';
 import { type Installation, readInstallation } from './installation.ts';
-import type { Site } from './site.ts';
 import { readUncertainty, type StatedUncertainty } from './uncertainty.ts';
 
 export type FlowInput =
@@ -40,8 +38,6 @@ export interface MeterInput {
   readonly tag: string;
   readonly find: Unknown;
   readonly fluid: FluidText;
-  /** What was written; some fluids find one from the other. The fluid's state has both. */
-  readonly upstream: { readonly pressure?: AbsolutePressure; readonly temperature?: Temperature };
   readonly pipe: MetalInput & { readonly roughness?: Length };
   readonly element: Partial<MetalInput> & {
     readonly measuredAt: Temperature;
@@ -62,14 +58,11 @@ const UNKNOWNS: readonly Unknown[] = ['bore', 'differential', 'flow'];
 /** Reads a meter whose shape is checked; `materials` are the keys thermal growth is known for. */
 export function readMeter(
   meter: MeterText,
-  site: Site,
   fields: readonly Field[],
   materials: readonly string[],
 ): Outcome<MeterInput> {
   const form = openForm(meter);
   const find = form.choice('find', UNKNOWNS, true);
-  const pressure = readPressure(form, site);
-  const temperature = form.positive('upstream.temperature', ['temperature']);
   const pipe = readMetal(form, 'pipe', materials, true);
   const element = readMetal(form, 'element', materials, find !== 'bore');
   const roughness = form.positive('pipe.roughness', ['length']);
@@ -91,7 +84,6 @@ export function readMeter(
       tag: meter.tag ?? '',
       find,
       fluid: meter.fluid ?? {},
-      upstream: { ...given('pressure', pressure), ...given('temperature', temperature?.si as Temperature | undefined) },
       pipe: { ...pipe, bore: pipe.bore, ...given('roughness', roughness?.si as Length | undefined) },
       element: {
         ...(find === 'bore' ? without(element, 'bore') : element),
@@ -107,18 +99,6 @@ export function readMeter(
       installation,
     },
   };
-}
-
-/** Absolute as written, or gauge above the site's atmosphere. */
-function readPressure(form: Form, site: Site): AbsolutePressure | undefined {
-  const pressure = form.quantity('upstream.pressure', ['absolute pressure', 'gauge pressure']);
-  if (pressure === undefined) return undefined;
-  const absolute = pressure.unit.measure === 'gauge pressure' ? pressure.si + site.atmosphere : pressure.si;
-  if (absolute > 0) return absolute as AbsolutePressure;
-  return form.report('not-above-vacuum', 'upstream.pressure', {
-    written: `${pressure.number} ${pressure.unit.symbol}`,
-    absolute,
-  });
 }
 
 function readMetal(form: Form, group: 'pipe' | 'element', materials: readonly string[], boreRequired: boolean) {

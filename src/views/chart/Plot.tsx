@@ -91,7 +91,7 @@ interface OutsideProps {
 
 function Outside({ ranges, right, top, hatch, plotRight }: OutsideProps) {
   return ranges.map((range) => {
-    const low = range.to < right / 2;
+    const low = range.from === 0; // below the limits, from the axis on; else above them
     const words = plotRight === null ? '' : <OutsideLabel words={range.label} low={low} plotRight={plotRight} />;
     return (
       <ReferenceArea
