@@ -37,6 +37,8 @@ export interface Row {
   /** Id of the working line that opens from this row. */
   readonly working?: string;
   readonly note?: string;
+  /** True where the user put the figure in place of the one that would be found. */
+  readonly own?: boolean;
 }
 
 /** A piece of a sentence; `found` is the part that was computed, `given` a figure the user set. */

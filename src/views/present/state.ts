@@ -25,15 +25,10 @@ const symbols: Readonly<Record<Id, string>> = {
   quality: 'x',
 };
 
-/** A figure that the user put in place of the model's says so; another says how sure its formulation is. */
-function noteOn(
-  id: string,
-  { overridden, uncertainty_percent: known }: Solved['state'],
-  at: Context,
-): string | undefined {
-  if (overridden?.includes(id)) return overrideWords.note;
+/** How sure the formulation of a figure is, where it says so. */
+function noteOn(id: string, { uncertainty_percent: known }: Solved['state'], at: Context): Pick<Row, 'note'> {
   const percent = known?.[id];
-  return percent === undefined ? undefined : `±\u202f${at.value(percent, 'uncertainty').text}`;
+  return percent === undefined ? {} : { note: `±\u202f${at.value(percent, 'uncertainty').text}` };
 }
 
 export function stateRows(at: Context, result: Solved): readonly Row[] {
@@ -43,10 +38,13 @@ export function stateRows(at: Context, result: Solved): readonly Row[] {
   const given = (id: Id, value: Row['value']): Row => ({ id, label: stateLabels[id], symbol: symbols[id], value });
   const found = (id: Id, si: number | undefined, role: Role): readonly Row[] => {
     if (si === undefined) return [];
+    const row = { ...given(id, at.value(si, role)), ...noteOn(id, state, at) };
     const line = working.find((one) => one.id === id);
-    const note = noteOn(id, state, at);
-    const row: Row = { ...given(id, at.value(si, role)), ...(note === undefined ? {} : { note }) };
-    return [line === undefined ? row : { ...row, cited: cited(line.source), working: id }];
+    if (line === undefined) return [row];
+    const own = state.overridden?.includes(id);
+    return [
+      own ? { ...row, working: id, own, note: overrideWords.note } : { ...row, working: id, cited: cited(line.source) },
+    ];
   };
   return [
     given('pressure', at.given(upstream?.pressure, pressureMeasures, state.pressure_Pa, 'pressure')),

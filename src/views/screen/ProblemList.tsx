@@ -3,11 +3,11 @@ import { fieldLabel } from '../words/fields.ts';
 import { focusField } from './focus.ts';
 import type { SelectedMeter } from './meter.ts';
 import styles from './ProblemList.module.css';
-import { textAt } from './text.ts';
+import { valueAt } from './text.ts';
 
 export function ProblemList({ selected }: { readonly selected: SelectedMeter }) {
   const { problems } = selected.now;
-  const empty = problems.filter(({ field }) => textAt(selected.meter, field) === '');
+  const empty = problems.filter(({ field }) => isEmpty(valueAt(selected.meter, field)));
   const wrong = problems.filter((problem) => !empty.includes(problem));
   return (
     <div className={styles.list}>
@@ -30,6 +30,8 @@ export function ProblemList({ selected }: { readonly selected: SelectedMeter }) 
     </div>
   );
 }
+
+const isEmpty = (written: unknown): boolean => written === undefined || written === '';
 
 const Way = ({ field }: { readonly field: string }) => (
   <button type="button" className={styles.way} onClick={() => focusField(field)}>

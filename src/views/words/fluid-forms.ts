@@ -14,9 +14,9 @@ export const compositionWords = {
   sum: 'Sum',
   missing: (amount: string): string => `${amount} missing`,
   above: (amount: string): string => `${amount} above a whole`,
-  preset: 'Start from a typical gas',
+  preset: 'Typical gas',
   presetChoice: 'Choose',
-  presetNote: 'Typical figures, not those of any supply: the analysis of your gas replaces them.',
+  presetNote: 'Typical figures; the analysis of your gas replaces them.',
 } as const;
 
 export const pasteWords = {
@@ -48,6 +48,7 @@ export const tableWords = {
 export const saturationWords = {
   fold: 'Saturated or wet steam',
   phase: 'Phase',
+  side: 'Gas or liquid, by hand',
   quality: 'Quality (vapour by mass)',
   onLine: 'on the saturation line',
   hint: 'With a phase or a quality, pressure alone or temperature alone is enough: leave the other empty.',
@@ -57,8 +58,9 @@ export const choiceWords = {
   moisture: 'Moisture',
   dry: 'dry air',
   oilDensity: 'Density given',
-  ownTable: 'Own table of figures',
-  mixture: 'A mixture, by its composition',
+  ownTable: 'Own table',
+  ownFigures: 'Vapour pressure and other own figures',
+  mixture: 'Mixture',
   gas: 'Gas',
   liquid: 'Liquid',
   chooseLiquid: 'Choose a liquid',

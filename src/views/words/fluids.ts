@@ -19,32 +19,35 @@ export const phaseChoices: readonly Choice[] = [
   { value: 'vapour', label: 'Vapour' },
 ];
 
+/** A list of which the first stands where nothing is written. */
+type UsualFirst = readonly [Choice, ...Choice[]];
+
 /** Which side of a phase border is meant where a gas has two densities. */
-export const gasPhaseChoices: readonly Choice[] = [
+export const gasPhaseChoices: UsualFirst = [
   { value: 'gas', label: 'Gas' },
   { value: 'liquid', label: 'Liquid' },
 ];
 
 /** What the fractions of a composition count. */
-export const basisChoices: readonly Choice[] = [
-  { value: 'mole', label: 'Mole fractions' },
-  { value: 'mass', label: 'Mass fractions' },
+export const basisChoices: UsualFirst = [
+  { value: 'mole', label: 'By mole' },
+  { value: 'mass', label: 'By mass' },
 ];
 
 /** What the share of what is dissolved counts. */
-export const concentrationChoices: readonly Choice[] = [
+export const concentrationChoices: UsualFirst = [
   { value: 'mass', label: 'By mass' },
   { value: 'volume', label: 'By volume' },
 ];
 
 /** What a base volume of moist air counts. */
-export const baseBasisChoices: readonly Choice[] = [
+export const baseBasisChoices: UsualFirst = [
   { value: 'wet', label: 'The moist air' },
   { value: 'dry', label: 'The dry air in it' },
 ];
 
 /** How the viscosity is drawn between the rows of a table. */
-export const viscosityRuleChoices: readonly Choice[] = [
+export const viscosityRuleChoices: UsualFirst = [
   { value: 'andrade', label: 'ln μ straight in 1/T' },
   { value: 'walther', label: 'Walther line, ASTM D341' },
 ];

@@ -1,11 +1,11 @@
 /** Air, dry or moist. */
 import { choiceWords } from '../../words/fluid-forms.ts';
 import { baseBasisChoices } from '../../words/fluids.ts';
-import { ChoiceField } from '../field/ChoiceField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
 import { useMeterText } from '../meter.ts';
 import { OneOf } from './OneOf.tsx';
 import { ShareField } from './ShareField.tsx';
+import { UsualChoice } from './UsualChoice.tsx';
 
 const HUMIDITY = 'fluid.relativeHumidity';
 const DEW_POINT = 'fluid.dewPoint';
@@ -23,7 +23,7 @@ export function AirFields() {
           path === HUMIDITY ? <ShareField key={path} path={path} /> : <QuantityField key={path} path={path} />
         }
       </OneOf>
-      {moist && <ChoiceField path="fluid.baseBasis" choices={baseBasisChoices} open="the moist air" />}
+      {moist && <UsualChoice path="fluid.baseBasis" choices={baseBasisChoices} />}
     </>
   );
 }

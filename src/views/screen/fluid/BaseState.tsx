@@ -4,8 +4,8 @@ import {
   baseStateChoices,
   baseStateNamed,
   baseStateOf,
-  baseStateWords as words,
   usualBase,
+  baseStateWords as words,
 } from '../../words/base-states.ts';
 import { useWorkbench } from '../binding.tsx';
 import box from '../field/box.module.css';

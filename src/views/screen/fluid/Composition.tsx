@@ -1,7 +1,7 @@
 /** The composition of a gas: a table of components, the sum while it is typed, typical gases and a paste to start from. */
 import { useState } from 'react';
 import { compositionSum } from '../../present/composition.ts';
-import { compositionWords as words, pasteWords } from '../../words/fluid-forms.ts';
+import { pasteWords, compositionWords as words } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
 import { Fold } from '../station/Fold.tsx';
 import { valueAt } from '../text.ts';

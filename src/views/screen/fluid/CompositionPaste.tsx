@@ -5,8 +5,8 @@ import { pasteWords as words } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
 import { PastedShares } from './PastedShares.tsx';
 import { PastePanel } from './PastePanel.tsx';
-import { type Choices, chosenName, compositionFrom, pastedComposition } from './paste-composition.ts';
 import styles from './paste.module.css';
+import { type Choices, chosenName, compositionFrom, pastedComposition } from './paste-composition.ts';
 import { Sum } from './Sum.tsx';
 import type { ShareUnit } from './share.ts';
 

@@ -12,8 +12,8 @@ import {
   inUnit,
   renamed,
   tableUnit,
-  withShare,
   without,
+  withShare,
 } from './composition.ts';
 import styles from './inputs.module.css';
 import { ShareUnitSelect } from './ShareUnitSelect.tsx';

@@ -1,10 +1,10 @@
 /** What a kind of fluid asks for beside its pressure and temperature. */
 import { useMeterText } from '../meter.ts';
+import { AirFields } from './AirFields.tsx';
 import { GasFields } from './GasFields.tsx';
 import { LiquidFields } from './LiquidFields.tsx';
 import { StatedFields } from './StatedFields.tsx';
 import { WaterFields } from './WaterFields.tsx';
-import { AirFields } from './AirFields.tsx';
 
 const FIELDS: Readonly<Record<string, () => React.ReactNode>> = {
   water: WaterFields,

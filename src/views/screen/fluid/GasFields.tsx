@@ -1,12 +1,14 @@
 /** A gas by its composition, or one gas by its name. */
+import { saturationWords as words } from '../../words/fluid-forms.ts';
 import { basisChoices, gasPhaseChoices } from '../../words/fluids.ts';
 import { useWorkbench } from '../binding.tsx';
-import { ChoiceField } from '../field/ChoiceField.tsx';
 import { useMeterText } from '../meter.ts';
+import { Fold } from '../station/Fold.tsx';
 import { valueAt } from '../text.ts';
 import { CheckField } from './CheckField.tsx';
 import { Composition } from './Composition.tsx';
 import { GasName } from './GasName.tsx';
+import { UsualChoice } from './UsualChoice.tsx';
 
 export function GasFields() {
   const phase = useMeterText('fluid.phase');
@@ -19,12 +21,14 @@ export function GasFields() {
       <GasName />
       {(name === '' || composed) && (
         <>
-          <ChoiceField path="fluid.basis" choices={basisChoices} open="Mole fractions, as usual" />
+          <UsualChoice path="fluid.basis" choices={basisChoices} />
           <Composition />
           <CheckField path="fluid.normalise" />
         </>
       )}
-      {phase !== '' && <ChoiceField path="fluid.phase" choices={gasPhaseChoices} open="Gas, as usual" />}
+      <Fold title={words.side} open={phase !== ''}>
+        <UsualChoice path="fluid.phase" label={words.phase} choices={gasPhaseChoices} />
+      </Fold>
     </>
   );
 }

@@ -1,7 +1,7 @@
 /** A liquid by its name, or by the user's own table of figures. */
+import { choiceWords } from '../../words/fluid-forms.ts';
 import { concentrationChoices, viscosityRuleChoices } from '../../words/fluids.ts';
 import { liquidNamed } from '../../words/liquids.ts';
-import { ChoiceField } from '../field/ChoiceField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
 import { useMeterText } from '../meter.ts';
 import { Fold } from '../station/Fold.tsx';
@@ -10,6 +10,7 @@ import { LIQUID_TABLE } from './liquid-columns.ts';
 import { PetroleumFields } from './PetroleumFields.tsx';
 import { RowsEditor } from './RowsEditor.tsx';
 import { ShareField } from './ShareField.tsx';
+import { UsualChoice } from './UsualChoice.tsx';
 
 export function LiquidFields() {
   const name = useMeterText('fluid.name');
@@ -22,14 +23,12 @@ export function LiquidFields() {
       <LiquidName own={own} />
       {dissolved && <ShareField path="fluid.concentration" />}
       {needs === 'concentration-and-basis' && (
-        <ChoiceField path="fluid.concentrationBasis" choices={concentrationChoices} open="By mass" />
+        <UsualChoice path="fluid.concentrationBasis" choices={concentrationChoices} />
       )}
       {needs === 'petroleum' && <PetroleumFields />}
       {own.chosen && <RowsEditor path="fluid.table" columns={LIQUID_TABLE} />}
-      {own.chosen && (
-        <ChoiceField path="fluid.viscosityRule" choices={viscosityRuleChoices} open="ln μ straight in 1/T" />
-      )}
-      <Fold title="Vapour pressure, bulk modulus">
+      {own.chosen && <UsualChoice path="fluid.viscosityRule" choices={viscosityRuleChoices} />}
+      <Fold title={choiceWords.ownFigures}>
         {needs !== 'petroleum' && <QuantityField path="fluid.viscosity" label="Viscosity" />}
         <QuantityField path="fluid.vapourPressure" />
         <QuantityField path="fluid.bulkModulus" />

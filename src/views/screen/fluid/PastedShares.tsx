@@ -2,8 +2,8 @@
 import { componentLabel } from '../../words/components.ts';
 import { pasteWords as words } from '../../words/fluid-forms.ts';
 import { ComponentSelect } from './ComponentSelect.tsx';
-import { type Choices, chosenName, type PastedComposition, repeated } from './paste-composition.ts';
 import styles from './paste.module.css';
+import { type Choices, chosenName, type PastedComposition, repeated } from './paste-composition.ts';
 import { ShareUnitSelect } from './ShareUnitSelect.tsx';
 import { type ShareUnit, shareText } from './share.ts';
 
@@ -31,7 +31,7 @@ export function PastedShares({ read: { shares }, unit, chooseUnit, choices, choo
             // The lines of a text have no other name than their place.
             // biome-ignore lint/suspicious/noArrayIndexKey: they never move
             <tr key={at}>
-              <td>{share.written}</td>
+              <td className={styles.written}>{share.written}</td>
               <td>
                 <ComponentSelect
                   label={words.standsFor(share.written)}

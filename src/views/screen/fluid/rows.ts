@@ -1,8 +1,8 @@
 /** Rows of quantities as a table of inputs: the unit of a column, and each cell in it. */
 import { readTyped } from '../../../core/quantity/typed.ts';
 import { convert, type Unit } from '../../../core/quantity/units.ts';
-import { split } from '../field/split.ts';
 import type { QuantityKind } from '../field/quantities.ts';
+import { split } from '../field/split.ts';
 import { textAt } from '../text.ts';
 
 export interface TableColumn {

@@ -14,7 +14,7 @@ interface Props {
   readonly children?: ReactNode;
 }
 
-export function Figure({ row: { label, value, working, cited, note }, aside, children }: Props) {
+export function Figure({ row: { label, value, working, cited, note, own = false }, aside, children }: Props) {
   return (
     <div>
       <dt>{label}</dt>
@@ -26,12 +26,13 @@ export function Figure({ row: { label, value, working, cited, note }, aside, chi
             {value.text}
           </button>
         )}
-        {cited?.mark}
       </dd>
       {(cited !== undefined || note !== undefined || aside !== undefined) && (
         <dd className={styles.source}>
-          {note && <b>{note}</b>}
-          {cited && <span>{cited.clause}</span>}
+          <span>
+            {note && <span className={own ? styles.own : styles.note}>{note}</span>}
+            {cited && `${cited.clause}${cited.mark}`}
+          </span>
           {aside}
         </dd>
       )}

@@ -1,7 +1,7 @@
 /** Station 2: the flows to be measured and the differential they shall make. */
 import { QuantityField } from '../field/QuantityField.tsx';
-import { split } from '../field/split.ts';
 import { quantityKind } from '../field/quantities.ts';
+import { split } from '../field/split.ts';
 import { BaseState } from '../fluid/BaseState.tsx';
 import { useMeterText } from '../meter.ts';
 import { Station } from './Station.tsx';
