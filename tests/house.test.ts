@@ -103,6 +103,12 @@ describe('the import rule', () => {
       'src/core/fluid/b.ts',
       "import '../input/field.ts';",
     ],
+    [
+      'a folder of the same start as the file that may',
+      'fluid-models-are-strangers-to-the-form',
+      'src/core/fluid/stated/b.ts',
+      "import '../../input/field.ts';",
+    ],
     ['react outside its rooms', 'package-react', 'src/views/present/b.ts', "import 'react';"],
     ['recharts outside its room', 'package-recharts', 'src/views/screen/b.ts', "import 'recharts';"],
     ['decimals past the edge', 'package-decimal-js', 'src/core/solve/b.ts', "import 'decimal.js';"],

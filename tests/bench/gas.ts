@@ -2,15 +2,16 @@
  * State of an eleven-component gas: cold (composition and temperature new), warm (pressure new), against one evaluation
  * of the pressure, and the gathered terms against the equation summed term by term.
  */
-import { gasState } from '../../src/core/fluid/gas.ts';
-import { components } from '../../src/core/fluid/gerg/components.table.ts';
-import { gasDensity } from '../../src/core/fluid/gerg/density.ts';
+import { gasState } from '../../src/core/fluid/gas/gas.ts';
 import { functions, pairs } from '../../src/core/fluid/gerg/departure.table.ts';
-import { isothermOf, pressureAt } from '../../src/core/fluid/gerg/isotherm.ts';
-import { componentNames, mixtureOf, R } from '../../src/core/fluid/gerg/mixture.ts';
-import { propertiesAt } from '../../src/core/fluid/gerg/properties.ts';
+import { mixtureOf, R } from '../../src/core/fluid/gerg/mixture.ts';
 import { pureTerms } from '../../src/core/fluid/gerg/pure.table.ts';
 import { reducing } from '../../src/core/fluid/gerg/reducing.table.ts';
+import { components } from '../../src/core/fluid/helmholtz/components.table.ts';
+import { componentNames } from '../../src/core/fluid/helmholtz/components.ts';
+import { gasDensity } from '../../src/core/fluid/helmholtz/density.ts';
+import { isothermOf, pressureAt } from '../../src/core/fluid/helmholtz/isotherm.ts';
+import { propertiesAt } from '../../src/core/fluid/helmholtz/properties.ts';
 import type { AbsolutePressure, Temperature } from '../../src/core/quantity/kinds.ts';
 import { generator } from '../laws/random.ts';
 import { compare, inTurn } from './pairs.ts';

@@ -1,7 +1,7 @@
 /** Density and viscosity of water by its state, against one power. */
 
 import { viscosity } from '../../src/core/fluid/if97/viscosity.ts';
-import { waterDensity } from '../../src/core/fluid/water.ts';
+import { waterDensity } from '../../src/core/fluid/water/water.ts';
 import type { AbsolutePressure, Temperature } from '../../src/core/quantity/kinds.ts';
 import { generator } from '../laws/random.ts';
 import { compare, inTurn } from './pairs.ts';

@@ -1,10 +1,10 @@
 /** The fluids offered. A new one is its own file and one line here. */
-import { air } from './air.ts';
-import { gas } from './gas.ts';
-import { liquid } from './liquid.ts';
+import { air } from './air/air.ts';
+import { gas } from './gas/gas.ts';
+import { liquid } from './liquid/liquid.ts';
 import type { FluidModel } from './model.ts';
-import { stated } from './stated.ts';
-import { water } from './water.ts';
+import { stated } from './stated/stated.ts';
+import { water } from './water/water.ts';
 
 export const fluids: readonly FluidModel[] = [water, gas, air, liquid, stated];
 

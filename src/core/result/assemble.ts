@@ -2,8 +2,8 @@
 import type { Finding } from '../check/finding.ts';
 import type { Straightness } from '../check/straight.ts';
 import type { DutyName, MeterText } from '../document/project.ts';
+import { relativeDensity } from '../fluid/air/relative-density.ts';
 import type { FluidState } from '../fluid/contract.ts';
-import { relativeDensity } from '../fluid/relative-density.ts';
 import type { MeterInput } from '../input/meter.ts';
 import type { Site } from '../input/site.ts';
 import type { Seen, Source } from '../quantity/source.ts';

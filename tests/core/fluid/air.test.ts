@@ -1,11 +1,11 @@
 /** Air: its limits, what its moisture may say, what is refused, and random states in and beyond its range. */
 import { describe, expect, it } from 'vitest';
 import type { FluidText } from '../../../src/core/document/project.ts';
-import { airState } from '../../../src/core/fluid/air.ts';
+import { airState } from '../../../src/core/fluid/air/air.ts';
+import { airDensity } from '../../../src/core/fluid/air/mixture.ts';
+import { sublimationPressure } from '../../../src/core/fluid/air/saturation.ts';
 import type { FluidState } from '../../../src/core/fluid/contract.ts';
 import { saturationPressure } from '../../../src/core/fluid/if97/saturation.ts';
-import { airDensity } from '../../../src/core/fluid/moist-air/mixture.ts';
-import { sublimationPressure } from '../../../src/core/fluid/moist-air/saturation.ts';
 import { stateOf } from '../../../src/core/fluid/state.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
 import type { Outcome } from '../../../src/core/quantity/outcome.ts';

@@ -7,7 +7,7 @@ import {
   viscosityBasis,
   viscosityCautions,
 } from '../../../src/core/fluid/gas-viscosity/viscosity.ts';
-import { components } from '../../../src/core/fluid/gerg/components.table.ts';
+import { components } from '../../../src/core/fluid/helmholtz/components.table.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
 import { seeded } from './seeded.ts';
 

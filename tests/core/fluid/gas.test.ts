@@ -2,11 +2,12 @@
 import { describe, expect, it } from 'vitest';
 import { gasPresets } from '../../../src/core/document/gas-presets.table.ts';
 import { splits } from '../../../src/core/fluid/cubic/stability.ts';
-import { gasDensityAt } from '../../../src/core/fluid/gas.ts';
-import { phaseSum } from '../../../src/core/fluid/gas-range.ts';
-import { gasDensity, liquidDensity } from '../../../src/core/fluid/gerg/density.ts';
-import { isothermOf, pressureAt } from '../../../src/core/fluid/gerg/isotherm.ts';
-import { componentNames, mixtureOf, R } from '../../../src/core/fluid/gerg/mixture.ts';
+import { gasDensityAt } from '../../../src/core/fluid/gas/gas.ts';
+import { phaseSum } from '../../../src/core/fluid/gas/range.ts';
+import { mixtureOf, R } from '../../../src/core/fluid/gerg/mixture.ts';
+import { componentNames } from '../../../src/core/fluid/helmholtz/components.ts';
+import { gasDensity, liquidDensity } from '../../../src/core/fluid/helmholtz/density.ts';
+import { isothermOf, pressureAt } from '../../../src/core/fluid/helmholtz/isotherm.ts';
 import { saturationPressure } from '../../../src/core/fluid/if97/saturation.ts';
 import { stateOf } from '../../../src/core/fluid/state.ts';
 import { as } from '../../../src/core/quantity/brand.ts';

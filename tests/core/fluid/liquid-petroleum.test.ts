@@ -1,7 +1,7 @@
 /** Petroleum by its density, held against the tables of the edition before, which has other constants and no shift. */
 import { describe, expect, it } from 'vitest';
-import { groups } from '../../../src/core/fluid/liquids/petroleum.table.ts';
-import { compressionFactor, expansionFactor, onIpts68, thermal } from '../../../src/core/fluid/petroleum.ts';
+import { groups } from '../../../src/core/fluid/liquid/petroleum.table.ts';
+import { compressionFactor, expansionFactor, onIpts68, thermal } from '../../../src/core/fluid/liquid/petroleum.ts';
 import { atmosphere, cautions, liquid, problems, solved } from './liquid-sample.ts';
 
 const bar = 1e5;

@@ -1,6 +1,6 @@
 /** Liquids by name. Their figures are judged by the vectors of tests/vectors/liquids as well. */
 import { describe, expect, it } from 'vitest';
-import { liquidFamilies, liquidNames } from '../../../src/core/fluid/liquids/names.ts';
+import { liquidFamilies, liquidNames } from '../../../src/core/fluid/liquid/names.ts';
 import { evaluate } from '../../../src/views/present/evaluate.ts';
 import { parseFormula } from '../../../src/views/present/formula.ts';
 import { remarks } from '../../../src/views/words/notes.ts';

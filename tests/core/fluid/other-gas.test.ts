@@ -1,10 +1,10 @@
 /** Gases by the cubic equation: their names, limits, refusals, and the error that they show. */
 import { describe, expect, it } from 'vitest';
 import type { FluidText } from '../../../src/core/document/project.ts';
-import { gasState } from '../../../src/core/fluid/gas.ts';
-import { componentNames } from '../../../src/core/fluid/gerg/mixture.ts';
-import { otherGases } from '../../../src/core/fluid/other-gas.table.ts';
-import { otherGasState } from '../../../src/core/fluid/other-gas.ts';
+import { gasState } from '../../../src/core/fluid/gas/gas.ts';
+import { otherGases } from '../../../src/core/fluid/gas/other-gas.table.ts';
+import { otherGasState } from '../../../src/core/fluid/gas/other-gas.ts';
+import { componentNames } from '../../../src/core/fluid/helmholtz/components.ts';
 import { stateOf } from '../../../src/core/fluid/state.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
 import { evaluate } from '../../../src/views/present/evaluate.ts';

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { relativeDensity } from '../../../src/core/fluid/relative-density.ts';
+import { relativeDensity } from '../../../src/core/fluid/air/relative-density.ts';
 import type { AbsolutePressure, Density, Temperature } from '../../../src/core/quantity/kinds.ts';
 
 /** ISO 6976:1995, Table 1 and note: dry air at 101.325 kPa, kg/m3; its molar mass was 1e-4 below that of CIPM-2007. */

@@ -7,7 +7,7 @@ import { placeOf, type Region } from '../../../src/core/fluid/if97/place.ts';
 import { densityOfRegion3, pressureOfRegion3 } from '../../../src/core/fluid/if97/region3.ts';
 import { saturationPressure, saturationTemperature } from '../../../src/core/fluid/if97/saturation.ts';
 import { stateOf } from '../../../src/core/fluid/state.ts';
-import { waterDensity } from '../../../src/core/fluid/water.ts';
+import { waterDensity } from '../../../src/core/fluid/water/water.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
 import type { AbsolutePressure, Temperature } from '../../../src/core/quantity/kinds.ts';
 import { subregionOf, volumeIn } from './referee/region3-backward.ts';

@@ -1,7 +1,7 @@
 /** What the vectors of gas viscosity put to the test: T in K, rho in mol/dm3, viscosity in uPa.s. */
 import { references } from '../../../src/core/fluid/gas-viscosity/pure.ts';
 import { schemeOf } from '../../../src/core/fluid/gas-viscosity/viscosity.ts';
-import { components } from '../../../src/core/fluid/gerg/components.table.ts';
+import { components } from '../../../src/core/fluid/helmholtz/components.table.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
 
 type Given = Record<string, number | string>;

@@ -1,13 +1,15 @@
 /** What the vectors of gas mixtures put to the test; units as the sources print them. */
-import { compositionOf } from '../../../src/core/fluid/composition.ts';
+
 import { splits } from '../../../src/core/fluid/cubic/stability.ts';
 import { detailMixtureOf } from '../../../src/core/fluid/detail/mixture.ts';
-import { phaseSum } from '../../../src/core/fluid/gas-range.ts';
-import { gasDensity, liquidDensity } from '../../../src/core/fluid/gerg/density.ts';
-import { energiesAt } from '../../../src/core/fluid/gerg/energy.ts';
-import { type Isotherm, isothermOf, pressureAt } from '../../../src/core/fluid/gerg/isotherm.ts';
-import { type Mixture, mixtureOf } from '../../../src/core/fluid/gerg/mixture.ts';
-import { propertiesAt } from '../../../src/core/fluid/gerg/properties.ts';
+import { compositionOf } from '../../../src/core/fluid/gas/composition.ts';
+import { phaseSum } from '../../../src/core/fluid/gas/range.ts';
+import { mixtureOf } from '../../../src/core/fluid/gerg/mixture.ts';
+import { gasDensity, liquidDensity } from '../../../src/core/fluid/helmholtz/density.ts';
+import { type Isotherm, isothermOf, pressureAt } from '../../../src/core/fluid/helmholtz/isotherm.ts';
+import type { Mixture } from '../../../src/core/fluid/helmholtz/mixture.ts';
+import { propertiesAt } from '../../../src/core/fluid/helmholtz/properties.ts';
+import { energiesAt } from './gas-energy.ts';
 
 type Given = Record<string, number | string>;
 type Subject = (given: Given) => Record<string, number>;

@@ -1,6 +1,6 @@
 /** What the vectors of liquids put to the test: t in degC, concentration in per cent, viscosity in mPa.s. */
 import type { FluidText } from '../../../src/core/document/project.ts';
-import { glycols } from '../../../src/core/fluid/liquids/inhibited-glycol.table.ts';
+import { glycols } from '../../../src/core/fluid/liquid/inhibited-glycol.table.ts';
 import { stateOf } from '../../../src/core/fluid/state.ts';
 import { interpolate } from '../../../src/core/numeric/interpolate.ts';
 import { as } from '../../../src/core/quantity/brand.ts';

@@ -1,5 +1,5 @@
 /** What the vectors of gases by the cubic equation put to the test: T in K, p in MPa; each figure under all its names. */
-import { otherGasState } from '../../../src/core/fluid/other-gas.ts';
+import { otherGasState } from '../../../src/core/fluid/gas/other-gas.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
 
 type Given = Record<string, number | string>;

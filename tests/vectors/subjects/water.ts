@@ -8,7 +8,7 @@ import { densityOfRegion3, pressureOfRegion3, region3 } from '../../../src/core/
 import { region5 } from '../../../src/core/fluid/if97/region5.ts';
 import { saturationPressure, saturationTemperature } from '../../../src/core/fluid/if97/saturation.ts';
 import { viscosity } from '../../../src/core/fluid/if97/viscosity.ts';
-import { waterState } from '../../../src/core/fluid/water.ts';
+import { waterState } from '../../../src/core/fluid/water/water.ts';
 import type { AbsolutePressure, Density, Temperature } from '../../../src/core/quantity/kinds.ts';
 import {
   borderTemperature as backwardBorder,

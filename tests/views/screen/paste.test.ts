@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import { spellings } from '../../../src/core/fluid/composition.table.ts';
-import { componentNames } from '../../../src/core/fluid/gerg/mixture.ts';
-import { liquidFamilies } from '../../../src/core/fluid/liquids/names.ts';
+import { spellings } from '../../../src/core/fluid/gas/composition.table.ts';
+import { componentNames } from '../../../src/core/fluid/helmholtz/components.ts';
+import { liquidFamilies } from '../../../src/core/fluid/liquid/names.ts';
 import { unitOf } from '../../../src/core/quantity/units.ts';
 import { isTable, rowsOf } from '../../../src/views/screen/fluid/paste.ts';
 import { compositionFrom, pastedComposition, repeated } from '../../../src/views/screen/fluid/paste-composition.ts';

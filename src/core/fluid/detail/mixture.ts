@@ -3,8 +3,8 @@
  * same form as those of GERG-2008, so that one isotherm serves both.
  * Standard: AGA Report No. 8, Part 1:2017 (DETAIL); ISO 12213-2:2006. Symbols: those of the report; SI.
  */
-import type { Mixture } from '../gerg/mixture.ts';
-import { gathered, plain, slotSet, type Term } from '../gerg/slots.ts';
+import type { Mixture } from '../helmholtz/mixture.ts';
+import { gathered, plain, slotSet, type Term } from '../helmholtz/slots.ts';
 import * as binary from './binary.table.ts';
 import { components } from './components.table.ts';
 import { type DetailTerm, terms } from './terms.table.ts';

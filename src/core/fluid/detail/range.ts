@@ -4,7 +4,7 @@
  */
 import type { Source } from '../../quantity/source.ts';
 import type { Caution, StatedUncertainty } from '../contract.ts';
-import { componentNames } from '../gerg/mixture.ts';
+import { componentNames } from '../helmholtz/components.ts';
 import { limits } from './limits.table.ts';
 
 export const DETAIL: Source = { clause: 'AGA Report No. 8, Part 1 (DETAIL), ISO 12213-2', seen: 'second-hand' };

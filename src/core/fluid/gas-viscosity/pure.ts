@@ -4,7 +4,7 @@
  */
 import { as } from '../../quantity/brand.ts';
 import type { Source } from '../../quantity/source.ts';
-import { components } from '../gerg/components.table.ts';
+import { components } from '../helmholtz/components.table.ts';
 import { highestTemperature, viscosity as waterViscosity } from '../if97/viscosity.ts';
 import { air, argon, nitrogen, oxygen } from './pure.table.ts';
 import { type Correlation, carbonDioxide, ethane, hydrogen, propane, simpleFluid } from './reference.ts';

@@ -6,7 +6,7 @@ import type { DynamicViscosity, Temperature } from '../../quantity/kinds.ts';
 import type { Source } from '../../quantity/source.ts';
 import type { Caution, StatedUncertainty } from '../contract.ts';
 import { critical } from '../cubic/critical.table.ts';
-import { components } from '../gerg/components.table.ts';
+import { components } from '../helmholtz/components.table.ts';
 import { rows } from './components.table.ts';
 import { referenceOf } from './pure.ts';
 import { reducedDensity, type Share, schemeViscosity, type ViscousGas } from './scheme.ts';

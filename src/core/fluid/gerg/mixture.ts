@@ -2,28 +2,15 @@
  * What GERG-2008 makes of a composition alone: molar mass, reducing temperature and density, factors of the terms.
  * Standard: ISO 20765-2:2015 (GERG-2008). Symbols: x mole fraction, r reducing; SI.
  */
-import { components } from './components.table.ts';
+import { components } from '../helmholtz/components.table.ts';
+import { molarMasses } from '../helmholtz/components.ts';
+import type { Mixture } from '../helmholtz/mixture.ts';
+import { type Gathered, gathered } from '../helmholtz/slots.ts';
 import { reducing } from './reducing.table.ts';
-import { type Gathered, gathered } from './slots.ts';
 import { departures, gergSlots, pureShares, type Share } from './terms.ts';
 
 /** Molar gas constant of the equation, J/(mol.K). Source: Kunz and Wagner 2012; the later exact value is not for it. */
 export const R = 8.314472;
-
-/** Names of the components, in the order in which every composition is listed. */
-export const componentNames: readonly string[] = components.map(({ name }) => name);
-/** Molar masses in the same order, kg/mol. */
-export const molarMasses: readonly number[] = components.map(({ M }) => M / 1000);
-
-/** A mixture: everything that does not depend on temperature and density. */
-export interface Mixture extends Gathered {
-  /** Mole fractions in the order of componentNames; they sum to 1. */
-  readonly x: readonly number[];
-  readonly molarMass: number; // kg/mol
-  readonly R: number; // molar gas constant of the equation, J/(mol.K)
-  readonly Tr: number; // reducing temperature, K
-  readonly rhoR: number; // reducing density, mol/m3
-}
 
 const size = components.length;
 const criticalTemperature = Float64Array.from(components, ({ Tc }) => Tc);

@@ -2,9 +2,10 @@
  * Every term of the residual Helmholtz function of GERG-2008: what a component and what a departure function adds.
  * Standard: ISO 20765-2:2015 (GERG-2008). Symbols: δ reduced density, τ inverse reduced temperature.
  */
+
+import { plain, slotSet, type Term } from '../helmholtz/slots.ts';
 import { functions, pairs } from './departure.table.ts';
 import { pureTerms } from './pure.table.ts';
-import { plain, slotSet, type Term } from './slots.ts';
 
 /** Factors that a component or a departure function adds to the slots. */
 export interface Share {

@@ -1,0 +1,32 @@
+/** The equations of state that a gas may be computed with, each with its source, range and uncertainty. */
+import type { Source } from '../../quantity/source.ts';
+import type { Caution, StatedUncertainty } from '../contract.ts';
+import { detailMixtureOf } from '../detail/mixture.ts';
+import { DETAIL, detailCautions, detailUncertainty } from '../detail/range.ts';
+import { mixtureOf } from '../gerg/mixture.ts';
+import type { Mixture } from '../helmholtz/mixture.ts';
+import { GERG, gasUncertainty, gergCautions } from './range.ts';
+
+/** An equation of state of a gas mixture. */
+export interface GasEquation {
+  readonly source: Source;
+  /** The mixture of mole fractions in the order of componentNames. */
+  readonly mixtureOf: (x: readonly number[]) => Mixture;
+  /** In what a state leaves the range of the equation; Pa, K. */
+  readonly cautions: (x: readonly number[], p: number, T: number) => readonly Caution[];
+  /** Uncertainty of density and speed of sound where one is stated; Pa, K. */
+  readonly uncertainty: (x: readonly number[], p: number, T: number) => StatedUncertainty | undefined;
+}
+
+export const gasEquations = {
+  'gerg-2008': { source: GERG, mixtureOf, cautions: gergCautions, uncertainty: gasUncertainty },
+  'aga8-detail': {
+    source: DETAIL,
+    mixtureOf: detailMixtureOf,
+    cautions: detailCautions,
+    uncertainty: detailUncertainty,
+  },
+} as const satisfies Readonly<Record<string, GasEquation>>;
+
+export type EquationName = keyof typeof gasEquations;
+export const equationNames = Object.keys(gasEquations) as readonly EquationName[];

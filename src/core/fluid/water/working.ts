@@ -1,0 +1,147 @@
+/** Where the figures of water and steam come from, and their working. */
+import type { Source } from '../../quantity/source.ts';
+import type { Given, Working } from '../../quantity/working.ts';
+import type { FluidState } from '../contract.ts';
+import type { Region } from '../if97/place.ts';
+import { R } from '../if97/properties.ts';
+import type { State } from '../model.ts';
+
+/** The figures of a state that have a source and a working. */
+export type Figures = Pick<
+  FluidState,
+  'pressure' | 'temperature' | 'density' | 'viscosity' | 'vapourPressure' | 'baseDensity'
+> &
+  Readonly<Record<'isentropicExponent' | 'compressibility' | 'speedOfSound', number>>;
+
+const equationOf = { 1: 'Eq. 7', 2: 'Eq. 15', 3: 'Eq. 28', 5: 'Eq. 32' } as const satisfies Record<Region, string>;
+const relationsOf = { 1: 'Table 3', 2: 'Table 12', 3: 'Table 31', 5: 'Table 39' } as const satisfies Record<
+  Region,
+  string
+>;
+
+const read = (clause: string): Source => ({ clause, seen: 'second-hand' });
+const densityBy = (region: Region) => read(`IAPWS R7-97(2012), region ${region}, ${equationOf[region]}`);
+const relation = (region: Region) => read(`IAPWS R7-97(2012), region ${region}, ${relationsOf[region]}`);
+const viscosityBy = (extrapolated: boolean) =>
+  read(`IAPWS R12-08, Eq. 10 to 12 with μ2 = 1${extrapolated ? ', extrapolated above 1173.15 K' : ''}`);
+const saturation = read('IAPWS R7-97(2012), region 4, Eq. 30');
+
+/** The formulation of each figure that the state has. */
+export function waterSources(
+  region: Region,
+  extrapolated: boolean,
+  figures: Figures,
+  base?: Source,
+): FluidState['sources'] {
+  return {
+    density: densityBy(region),
+    viscosity: viscosityBy(extrapolated),
+    isentropicExponent: relation(region),
+    ...(figures.vapourPressure === undefined ? {} : { vapourPressure: saturation }),
+    ...(base === undefined ? {} : { baseDensity: base }),
+  };
+}
+
+/** Largest uncertainties of each region and phase, from memory of the releases' figures. */
+export function waterUncertainties(region: Region, expands: boolean): NonNullable<FluidState['uncertainties']> {
+  const density = region === 3 ? 0.002 : expands ? 0.001 : 0.0002; // R7-97(2012), 11 and its figures
+  const of = (share: number, clause: string) => ({ share, source: { clause, seen: 'memory' } }) as const;
+  return {
+    density: of(density, 'IAPWS R7-97(2012), estimates of uncertainty'),
+    viscosity: of(expands ? 0.02 : 0.01, 'IAPWS R12-08, estimates of uncertainty'),
+    speedOfSound: of(0.002, 'IAPWS R7-97(2012), estimates of uncertainty'), // up to 0.2 % in region 3
+  };
+}
+
+const named = (symbol: string, value: number, unit: string, words: string): Given => ({ symbol, value, unit, words });
+
+/** The working of each figure. `heldBeyond`: the phase is held beyond the saturation line. */
+export function waterWorking(
+  region: Region,
+  heldBeyond: boolean,
+  extrapolated: boolean,
+  figures: Figures,
+  base: State,
+): readonly Working[] {
+  const working = [
+    ...byRegion(region, heldBeyond, figures),
+    viscosityWorking(extrapolated, figures),
+    ...ratios(region, figures),
+    vapourPressureWorking(figures),
+    baseDensityWorking(figures, base),
+  ];
+  return working.filter((entry) => entry !== undefined);
+}
+
+const pressureAt1 = ({ pressure }: Figures) => named('p_1', pressure, 'Pa(a)', 'pressure-upstream');
+const temperatureAt1 = ({ temperature }: Figures) => named('T_1', temperature, 'K', 'temperature-upstream');
+const densityAt1 = ({ density }: Figures) => named('ρ_1', density, 'kg/m3', 'density');
+
+/** What comes from the region's equation: too long for a formula. */
+function byRegion(region: Region, heldBeyond: boolean, figures: Figures): readonly Working[] {
+  const { density, speedOfSound } = figures;
+  const given = [pressureAt1(figures), temperatureAt1(figures)];
+  const remark = `if97-region-${region}${heldBeyond ? '-beyond-saturation' : ''}`;
+  return [
+    { id: 'density', symbol: 'ρ_1', given, value: density, unit: 'kg/m3', source: densityBy(region), remark },
+    { id: 'speedOfSound', symbol: 'w', given, value: speedOfSound, unit: 'm/s', source: relation(region), remark },
+  ];
+}
+
+function viscosityWorking(extrapolated: boolean, figures: Figures): Working {
+  const given = [densityAt1(figures), temperatureAt1(figures)];
+  const remark = extrapolated ? 'viscosity-extrapolated' : 'viscosity-by-release';
+  const source = viscosityBy(extrapolated);
+  return { id: 'viscosity', symbol: 'μ_1', given, value: figures.viscosity, unit: 'Pa.s', source, remark };
+}
+
+function ratios(region: Region, figures: Figures): readonly Working[] {
+  const w = named('w', figures.speedOfSound, 'm/s', 'speed-of-sound');
+  const gas = named('R', R, 'J/(kg.K)', 'specific-gas-constant');
+  const [p, T, rho] = [pressureAt1(figures), temperatureAt1(figures), densityAt1(figures)];
+  return [
+    {
+      id: 'isentropicExponent',
+      symbol: 'κ',
+      formula: 'w^2 * ρ_1 / p_1',
+      given: [w, rho, p],
+      value: figures.isentropicExponent,
+      unit: '',
+      source: relation(region),
+    },
+    {
+      id: 'compressibility',
+      symbol: 'Z',
+      formula: 'p_1 / (ρ_1 * R * T_1)',
+      given: [p, rho, gas, T],
+      value: figures.compressibility,
+      unit: '',
+      source: read('IAPWS R7-97(2012), Eq. 1'),
+    },
+  ];
+}
+
+function vapourPressureWorking(figures: Figures): Working | undefined {
+  const { vapourPressure: value } = figures;
+  if (value === undefined) return undefined;
+  const given = [temperatureAt1(figures)];
+  return {
+    id: 'vapourPressure',
+    symbol: 'p_v',
+    given,
+    value,
+    unit: 'Pa(a)',
+    source: saturation,
+    remark: 'if97-region-4',
+  };
+}
+
+function baseDensityWorking({ baseDensity: value }: Figures, base: State): Working | undefined {
+  if (value === undefined) return undefined;
+  const given = [
+    named('p_b', base.pressure, 'Pa(a)', 'pressure-base'),
+    named('T_b', base.temperature, 'K', 'temperature-base'),
+  ];
+  const source = read('IAPWS R7-97(2012)');
+  return { id: 'baseDensity', symbol: 'ρ_b', given, value, unit: 'kg/m3', source, remark: 'if97-at-base' };
+}
