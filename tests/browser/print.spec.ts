@@ -55,7 +55,7 @@ for (const paper of ['A4', 'Letter'] as const) {
     await openExample(page);
     const { pages, about } = await print(page, paper, info);
     const found = solveHeadless(await exampleText(), info);
-    expect(found).toHaveLength(3);
+    expect(found).toHaveLength(5);
     expect(about).toMatch(new RegExp(`Page size:\\s+${sizes[paper]}`));
     expect(pages).toHaveLength(found.length * sheets.length);
     pages.forEach((text, at) => {
