@@ -2,7 +2,8 @@
  * Which kinds may stand for which. Compiled by tsc alone, never run: each line under `@ts-expect-error` must not compile,
  * and the compiler reports the line when it does.
  */
-import { as, kindOf } from '../../src/core/quantity/brand.ts';
+import type { Form } from '../../src/core/input/form.ts';
+import { as } from '../../src/core/quantity/brand.ts';
 import type {
   AbsolutePressure,
   Acceleration,
@@ -39,7 +40,9 @@ declare const velocity: Velocity;
 declare const acceleration: Acceleration;
 declare const molarMass: MolarMass;
 declare const ratio: Ratio;
-declare const quantity: Quantity;
+declare const pressure: Quantity<'gauge pressure' | 'absolute pressure'>;
+declare const share: Quantity<'share of span'>;
+declare const form: Form;
 
 declare function takesAbsolute(value: AbsolutePressure): void;
 declare function takesGauge(value: GaugePressure): void;
@@ -146,12 +149,21 @@ takesAbsolute(gauge + absolute);
 // @ts-expect-error temperatures subtracted are a number until branded
 takesTemperatureDifference(temperature - temperature);
 
-// A quantity read from text takes the kind of the measure it is asked for, or is absent.
-const read = kindOf(quantity, 'gauge pressure');
-if (read !== undefined) takesGauge(read);
+// A quantity read from text takes the kind of the measure that was asked for, or is absent.
+const read = form.positive('field', ['gauge pressure']);
+if (read !== undefined) takesGauge(read.si);
 // @ts-expect-error it may be absent
-takesGauge(read);
+takesGauge(read?.si);
 // @ts-expect-error the kind follows the measure asked for
-if (read !== undefined) takesAbsolute(read);
+if (read !== undefined) takesAbsolute(read.si);
 // @ts-expect-error a measure that does not exist
-kindOf(quantity, 'pressure');
+form.positive('field', ['pressure']);
+
+// Of several measures the quantity says which it is.
+if (pressure.measure === 'gauge pressure') takesGauge(pressure.si);
+else takesAbsolute(pressure.si);
+// @ts-expect-error it may be the other of the two
+takesGauge(pressure.si);
+takesRatio(share.si);
+// @ts-expect-error a share is no length
+takesLength(share.si);

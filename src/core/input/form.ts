@@ -7,14 +7,17 @@ import { fail, type Outcome, type Problem } from '../quantity/outcome.ts';
 import { type Quantity, readQuantity } from '../quantity/text.ts';
 import type { Measure } from '../quantity/units.ts';
 
+/** A quantity of one of the measures asked for, or undefined where none could be read. */
+type Read<Name extends Measure> = Quantity<Name> | undefined;
+
 export interface Form {
   /** The group being read. */
   readonly group: object;
   readonly problems: Problem[];
   /** A quantity; undefined when the field is empty or cannot be read. */
-  quantity(field: string, measures: readonly Measure[], required?: boolean): Quantity | undefined;
+  quantity<Name extends Measure>(field: string, measures: readonly Name[], required?: boolean): Read<Name>;
   /** A quantity that must be above zero. */
-  positive(field: string, measures: readonly Measure[], required?: boolean): Quantity | undefined;
+  positive<Name extends Measure>(field: string, measures: readonly Name[], required?: boolean): Read<Name>;
   /** One of a list of words. */
   choice<Choice extends string>(field: string, choices: readonly Choice[], required?: boolean): Choice | undefined;
   /** A word whose list only its reader knows. */
@@ -24,12 +27,16 @@ export interface Form {
   report(code: string, field: string, detail?: Problem['detail']): undefined;
 }
 
-/**
- * No figure of a meter, in SI units, is smaller or larger than this. Beyond it products of several figures would leave
- * the range of a double.
- */
+/** No figure of a meter, in SI units, is smaller: products of several figures would leave the range of a double. */
 export const LEAST_FIGURE = 1e-12;
+/** No figure of a meter, in SI units, is larger, for the same reason. */
 export const MOST_FIGURE = 1e12;
+
+/** The outcome of a form that cannot be used: all its problems. One without a problem is a defect. */
+export function failed({ problems: [first, ...rest] }: Form): Outcome<never> {
+  if (first === undefined) throw new Error('input: expected a problem in a form that cannot be used, got none');
+  return { ok: false, problems: [first, ...rest] };
+}
 
 /** What every reader of a form stands on. */
 interface Desk {
@@ -64,14 +71,14 @@ export function openForm(group: object): Form {
 function quantityReaders({ report, written, take }: Desk): Pick<Form, 'quantity' | 'positive'> {
   const implausible = (field: string, text: string) =>
     report('figure-implausible', field, { written: text, least: LEAST_FIGURE, most: MOST_FIGURE });
-  const quantity: Form['quantity'] = (field, measures, required = false) => {
+  const quantity = <Name extends Measure>(field: string, measures: readonly Name[], required = false): Read<Name> => {
     const text = written(field, required);
     if (text === undefined) return undefined;
     if (typeof text !== 'string') return report('text-expected', field, { written: typeof text });
     const read = take(readQuantity(text, measures, field));
     return read === undefined || Math.abs(read.si) <= MOST_FIGURE ? read : implausible(field, text);
   };
-  const positive: Form['positive'] = (field, measures, required = false) => {
+  const positive = <Name extends Measure>(field: string, measures: readonly Name[], required = false): Read<Name> => {
     const read = quantity(field, measures, required);
     if (read === undefined || read.si >= LEAST_FIGURE) return read;
     const text = `${read.number} ${read.unit.symbol}`;

@@ -17,7 +17,7 @@ export function readInstallation(form: Form, pipe: Length | undefined): Installa
     const length = form.quantity(`installation.${name}`, ['bores', 'length']);
     if (length === undefined) return {};
     if (length.si < 0) return form.report('negative', `installation.${name}`, { written: length.number }) ?? {};
-    if (length.unit.measure === 'bores') return { [name]: length.si };
+    if (length.measure === 'bores') return { [name]: length.si };
     return pipe === undefined ? {} : { [name]: length.si / pipe };
   };
   const fitting = form.word('installation.fitting');
@@ -28,6 +28,6 @@ export function readInstallation(form: Form, pipe: Length | undefined): Installa
     ...bores('before'),
     ...bores('after'),
     ...(fitting === undefined ? {} : { fitting }),
-    ...(fluctuation === undefined ? {} : { fluctuation: fluctuation.si as Ratio }),
+    ...(fluctuation === undefined ? {} : { fluctuation: fluctuation.si }),
   };
 }

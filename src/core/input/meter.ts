@@ -3,6 +3,7 @@
  * The element's own fields are declared by the element and handed in by run.ts.
  */
 import type { DutyName, FluidText, MeterText, Unknown } from '../document/project.ts';
+import { as } from '../quantity/brand.ts';
 import type {
   BaseVolumeFlow,
   Length,
@@ -11,10 +12,10 @@ import type {
   Temperature,
   VolumeFlow,
 } from '../quantity/kinds.ts';
-import type { Outcome, Problem } from '../quantity/outcome.ts';
+import { type Outcome, ok } from '../quantity/outcome.ts';
 import type { Quantity } from '../quantity/text.ts';
 import type { Field } from './field.ts';
-import { type Form, openForm } from './form.ts';
+import { type Form, failed, openForm } from './form.ts';
 import { type Installation, readInstallation } from './installation.ts';
 import { readUncertainty, type StatedUncertainty } from './uncertainty.ts';
 
@@ -52,7 +53,7 @@ export interface MeterInput {
   readonly installation: Installation;
 }
 
-const MEASURED_AT = 293.15 as Temperature; // 20 degC, the file contract's default
+const MEASURED_AT = as<'temperature'>(293.15); // K, 20 degC, the file contract's default
 const UNKNOWNS: readonly Unknown[] = ['bore', 'differential', 'flow'];
 
 /** Reads a meter whose shape is checked; `materials` are the keys thermal growth is known for. */
@@ -74,31 +75,25 @@ export function readMeter(
   const differential =
     find === 'differential' ? undefined : form.positive('differential', ['pressure difference'], find !== undefined);
   const uncertainty = readUncertainty(form);
-  const installation = readInstallation(form, pipe?.bore);
-  if (form.problems.length > 0 || !(find && pipe?.bore && element)) {
-    return { ok: false, problems: form.problems as [Problem, ...Problem[]] };
-  }
-  return {
-    ok: true,
-    value: {
-      tag: meter.tag ?? '',
-      find,
-      fluid: meter.fluid ?? {},
-      pipe: { ...pipe, bore: pipe.bore, ...given('roughness', roughness?.si as Length | undefined) },
-      element: {
-        ...(find === 'bore' ? without(element, 'bore') : element),
-        measuredAt: element.measuredAt,
-        own,
-        calibration,
-        ...given('plateThickness', plate?.si as Length | undefined),
-        ...given('edgeThickness', edge?.si as Length | undefined),
-      },
-      duty,
-      ...given('differential', differential?.si as PressureDifference | undefined),
-      uncertainty,
-      installation,
+  const installation = readInstallation(form, pipe.bore);
+  if (form.problems.length > 0 || !(find && pipe.bore)) return failed(form);
+  return ok({
+    tag: meter.tag ?? '',
+    find,
+    fluid: meter.fluid ?? {},
+    pipe: { ...pipe, bore: pipe.bore, ...given('roughness', roughness?.si) },
+    element: {
+      ...element,
+      own,
+      calibration,
+      ...given('plateThickness', plate?.si),
+      ...given('edgeThickness', edge?.si),
     },
-  };
+    duty,
+    ...given('differential', differential?.si),
+    uncertainty,
+    installation,
+  });
 }
 
 function readMetal(form: Form, group: 'pipe' | 'element', materials: readonly string[], boreRequired: boolean) {
@@ -106,9 +101,9 @@ function readMetal(form: Form, group: 'pipe' | 'element', materials: readonly st
   const material = form.choice(`${group}.material`, materials);
   const measuredAt = form.positive(`${group}.measuredAt`, ['temperature']);
   return {
-    ...given('bore', bore?.si as Length | undefined),
+    ...given('bore', bore?.si),
     ...given('material', material),
-    measuredAt: (measuredAt?.si ?? MEASURED_AT) as Temperature,
+    measuredAt: measuredAt?.si ?? MEASURED_AT,
   };
 }
 
@@ -157,18 +152,13 @@ function readDuty(form: Form, find: Unknown | undefined): Partial<Record<DutyNam
   return Object.fromEntries(flows);
 }
 
-function flowOf({ si, unit }: Quantity): FlowInput {
-  if (unit.measure === 'volume flow') return { basis: 'volume', value: si as VolumeFlow };
-  if (unit.measure === 'base volume flow') return { basis: 'base', value: si as BaseVolumeFlow };
-  return { basis: 'mass', value: si as MassFlow };
+function flowOf(flow: Quantity<'mass flow' | 'volume flow' | 'base volume flow'>): FlowInput {
+  if (flow.measure === 'volume flow') return { basis: 'volume', value: flow.si };
+  if (flow.measure === 'base volume flow') return { basis: 'base', value: flow.si };
+  return { basis: 'mass', value: flow.si };
 }
 
 /** A key that is absent when it has no value. */
 function given<Key extends string, Value>(key: Key, value: Value | undefined): { readonly [K in Key]?: Value } {
   return (value === undefined ? {} : { [key]: value }) as { readonly [K in Key]?: Value };
-}
-
-function without<Group extends object, Key extends keyof Group>(group: Group, key: Key): Omit<Group, Key> {
-  const { [key]: _, ...rest } = group;
-  return rest;
 }

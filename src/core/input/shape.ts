@@ -38,8 +38,8 @@ export function meterShape(meter: unknown): Outcome<MeterText> {
   if (Array.isArray(meter)) return fail('group-expected', '', { written: 'a list' });
   const parsed = v.safeParse(Meter, meter);
   if (parsed.success) return { ok: true, value: meter as MeterText };
-  const [first, ...rest] = parsed.issues.map(problemOf);
-  return { ok: false, problems: [first as Problem, ...rest] };
+  const [first, ...rest] = parsed.issues;
+  return { ok: false, problems: [problemOf(first), ...rest.map(problemOf)] };
 }
 
 const EXPECTED: Readonly<Record<string, string>> = {

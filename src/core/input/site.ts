@@ -1,8 +1,8 @@
 /** The project's site and base state, read once for all meters. Defaults as the file contract gives them. */
 import type { Project } from '../document/project.ts';
 import type { AbsolutePressure, Acceleration, Temperature } from '../quantity/kinds.ts';
-import type { Outcome, Problem } from '../quantity/outcome.ts';
-import { openForm } from './form.ts';
+import { type Outcome, ok } from '../quantity/outcome.ts';
+import { failed, openForm } from './form.ts';
 
 export interface Site {
   readonly atmosphere: AbsolutePressure;
@@ -10,6 +10,7 @@ export interface Site {
   readonly base: { readonly pressure: AbsolutePressure; readonly temperature: Temperature };
 }
 
+/** The site and base state of a project that states none. */
 export const SITE_DEFAULTS = {
   atmosphere: '101.325 kPa(a)',
   gravity: '9.80665 m/s2',
@@ -27,15 +28,7 @@ export function readSite(project: Pick<Project, 'site' | 'base'>): Outcome<Site>
   const gravity = form.positive('site.gravity', ['acceleration'], true);
   const pressure = form.positive('base.pressure', ['absolute pressure'], true);
   const temperature = form.positive('base.temperature', ['temperature'], true);
-  if (!(atmosphere && gravity && pressure && temperature)) {
-    return { ok: false, problems: form.problems as [Problem, ...Problem[]] };
-  }
-  return {
-    ok: true,
-    value: {
-      atmosphere: atmosphere.si as AbsolutePressure,
-      gravity: gravity.si as Acceleration,
-      base: { pressure: pressure.si as AbsolutePressure, temperature: temperature.si as Temperature },
-    },
-  };
+  if (!(atmosphere && gravity && pressure && temperature)) return failed(form);
+  const base = { pressure: pressure.si, temperature: temperature.si };
+  return ok({ atmosphere: atmosphere.si, gravity: gravity.si, base });
 }

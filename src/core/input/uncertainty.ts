@@ -22,7 +22,7 @@ export function readUncertainty(form: Form): StatedUncertainty {
     const value = form.quantity(`uncertainty.${name}`, ['share']);
     if (value === undefined) return {};
     if (value.si < 0) return form.report('negative', `uncertainty.${name}`, { written: `${value.number} %` }) ?? {};
-    return { [name]: value.si as Ratio };
+    return { [name]: value.si };
   };
   const differential = readDifferential(form);
   return { ...share('bore'), ...share('pipe'), ...share('density'), ...(differential ? { differential } : {}) };
@@ -33,14 +33,15 @@ function readDifferential(form: Form): DifferentialUncertainty | undefined {
   const text = at(form.group, field);
   if (typeof text !== 'string' || text.trim() === '') return undefined;
   const [, figure, of] = BASIS.exec(text.trim()) ?? [];
-  const read = readQuantity(figure ?? text, figure === undefined ? ['share', 'pressure difference'] : ['share'], field);
+  const measures = figure === undefined ? (['share', 'pressure difference'] as const) : (['share'] as const);
+  const read = readQuantity<'share' | 'pressure difference'>(figure ?? text, measures, field);
   if (!read.ok) {
     form.problems.push(...read.problems);
     return undefined;
   }
-  if (read.value.si < 0) return form.report('negative', field, { written: text });
-  if (read.value.unit.measure === 'pressure difference')
-    return { of: 'pressure', value: read.value.si as PressureDifference };
+  const { value } = read;
+  if (value.si < 0) return form.report('negative', field, { written: text });
+  if (value.measure === 'pressure difference') return { of: 'pressure', value: value.si };
   if (of !== 'span' && of !== 'reading') return form.report('share-basis-missing', field, { written: text });
-  return { of, share: read.value.si as Ratio };
+  return { of, share: value.si };
 }

@@ -15,8 +15,10 @@ export type Outcome<Value> =
   | { readonly ok: true; readonly value: Value }
   | { readonly ok: false; readonly problems: readonly [Problem, ...Problem[]] };
 
+/** An outcome that succeeded. */
 export const ok = <Value>(value: Value): Outcome<Value> => ({ ok: true, value });
 
+/** An outcome that failed with one problem. */
 export const fail = (code: string, field: string, detail: Problem['detail'] = {}): Outcome<never> => ({
   ok: false,
   problems: [{ code, field, detail }],
