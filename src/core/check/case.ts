@@ -2,6 +2,7 @@
 import type { DutyName } from '../document/project.ts';
 import type { Limit, LimitId } from '../element/contract.ts';
 import type { MeterInput } from '../input/meter.ts';
+import { type Bounds, isInside } from '../numeric/bounds.ts';
 import type { Operation } from '../solve/equation.ts';
 import type { Solution } from '../solve/solve.ts';
 import type { Verdict } from './finding.ts';
@@ -31,18 +32,14 @@ export const largest = (flows: readonly Flow[], figure: (flow: Flow) => number):
   return rest.reduce((most, flow) => (figure(flow) > figure(most) ? flow : most), first);
 };
 
-/** Rounding of a quotient such as d/D; a figure written on its limit is inside. */
-const ROUNDING = 1e-12;
-
 /** Inside or outside of bounds; the bounds themselves are inside. */
-export const within = (value: number, { min, max }: { readonly min?: number; readonly max?: number }): Verdict => {
-  const low = min !== undefined && value < min - ROUNDING * Math.abs(min);
-  const high = max !== undefined && value > max + ROUNDING * Math.abs(max);
-  return low || high ? 'outside' : 'inside';
-};
+export const within = (value: number, bounds: Bounds): Verdict => (isInside(value, bounds) ? 'inside' : 'outside');
+
+/** Superheat or subcooling that a line's swings of pressure and temperature may eat up: nearer, it is on the line. */
+export const NEAR_SATURATION = 5; // K, custom
 
 /** The bounds of a limit, without what else it carries. */
-export const boundsOf = ({ min, max }: Limit): { readonly min?: number; readonly max?: number } => ({
+export const boundsOf = ({ min, max }: Limit): Bounds => ({
   ...(min === undefined ? {} : { min }),
   ...(max === undefined ? {} : { max }),
 });

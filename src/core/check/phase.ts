@@ -1,6 +1,6 @@
 /** One phase: boiling of a liquid behind and in the jet, condensation of a vapour, a phase settled by the user. */
 import type { Source } from '../quantity/source.ts';
-import { type Case, flowsOf, largest } from './case.ts';
+import { type Case, flowsOf, largest, NEAR_SATURATION } from './case.ts';
 import type { Finding } from './finding.ts';
 
 const JET: Source = { clause: 'jet model of ISO 5167-2:2003, Eq (7)', seen: 'derived' };
@@ -8,9 +8,8 @@ const MARGIN: Source = { clause: 'cavitation index; least value by custom', seen
 const SATURATION: Source = { clause: 'saturation line; least distance by custom', seen: 'practice' };
 /** Of (p1 - dp - pv)/dp. Below it the jet is close to boiling; where C itself may shift is lower, near 0.2. */
 const LEAST_MARGIN = 0.5;
-/** Superheat or subcooling that a line's swings of pressure and temperature may eat up. */
-const LEAST_DISTANCE = 5; // K
 
+/** Where the state nears or leaves its one phase, for a fluid whose saturation line is known. */
 export function checkPhase(subject: Case): readonly Finding[] {
   return [...checkBoiling(subject), ...checkSaturation(subject)];
 }
@@ -66,7 +65,7 @@ function checkSaturation({ solution }: Case): Finding[] {
   const distance = liquid
     ? state.saturationTemperature - state.temperature
     : state.temperature - state.saturationTemperature;
-  const near = distance < LEAST_DISTANCE;
+  const near = distance < NEAR_SATURATION;
   return [
     {
       id: liquid ? 'subcooling' : 'superheat',
@@ -74,7 +73,7 @@ function checkSaturation({ solution }: Case): Finding[] {
       verdict: near || state.phaseForced === true ? 'caution' : 'inside',
       value: distance,
       unit: 'K',
-      limit: { min: LEAST_DISTANCE },
+      limit: { min: NEAR_SATURATION },
       source: SATURATION,
       detail: { saturation: state.saturationTemperature, forced: state.phaseForced === true ? 'yes' : 'no' },
     },
