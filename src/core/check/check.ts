@@ -10,6 +10,7 @@ import { checkPlate } from './plate.ts';
 import { checkPractice } from './practice.ts';
 import { checkSteady } from './steady.ts';
 
+/** The assumptions of Bernoulli's equation, in the order in which the findings stand. */
 export const ASSUMPTIONS: readonly Assumption[] = [
   'steady',
   'incompressible',

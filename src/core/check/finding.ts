@@ -13,7 +13,7 @@ export type Assumption =
   | 'range-and-span';
 
 export interface Finding {
-  /** Code, see codes.ts; the same id may stand once for each duty point. */
+  /** Code, its sentence stands in views/words/findings.ts; the same id may stand once for each duty point. */
   readonly id: string;
   readonly assumption: Assumption;
   readonly verdict: Verdict;

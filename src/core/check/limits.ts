@@ -3,6 +3,7 @@ import type { Limit, LimitId } from '../element/contract.ts';
 import { boundsOf, type Case, type Flow, flowsOf, largest, limitOf, within } from './case.ts';
 import type { Finding } from './finding.ts';
 
+/** One finding for each limit that the element's standard sets and the meter states a figure for. */
 export function checkLimits(subject: Case): readonly Finding[] {
   const { geometry, primary } = subject.solution.meter;
   const limits = primary.limits(geometry, 0); // of sizes, which depend on no flow

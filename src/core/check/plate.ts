@@ -7,6 +7,7 @@ import type { Finding } from './finding.ts';
 /** E/D' >= sqrt(dp (0.681 - 0.651 beta)/yield strength); the support is taken as D. */
 const BENDING: Source = { clause: 'ISO/TR 9464, plate against yielding', seen: 'memory' };
 
+/** Findings for what is stated of the plate: nothing of it is asked of other elements. */
 export function checkPlate(subject: Case): readonly Finding[] {
   return [
     ...thickness(subject, 'plate-thickness', subject.input.element.plateThickness),

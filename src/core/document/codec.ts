@@ -6,7 +6,9 @@ import * as v from 'valibot';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import type { Project } from './project.ts';
 
+/** How a project file names its format. */
 export const FORMAT = 'headwright';
+/** The version this program writes, and the newest it reads. */
 export const VERSION = 1;
 /** No project comes near this; more is another kind of file. */
 export const MOST_CHARACTERS = 20_000_000;

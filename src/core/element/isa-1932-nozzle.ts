@@ -114,4 +114,5 @@ const primary: Primary = {
   },
 };
 
+/** The ISA 1932 nozzle has no field of its own. */
 export const isa1932Nozzle: Element = { kind: primary.kind, fields: [], primary: () => primary };

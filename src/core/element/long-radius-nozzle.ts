@@ -110,4 +110,5 @@ const primary: Primary = {
   },
 };
 
+/** The long-radius nozzle has no field of its own: its ratio settles the profile. */
 export const longRadiusNozzle: Element = { kind: primary.kind, fields: [], primary: () => primary };

@@ -7,6 +7,7 @@ import { orificePlate } from './orifice-plate.ts';
 import { venturiNozzle } from './venturi-nozzle.ts';
 import { venturiTube } from './venturi-tube.ts';
 
+/** The elements in the order in which they are offered. */
 export const elements: readonly Element[] = [orificePlate, isa1932Nozzle, longRadiusNozzle, venturiNozzle, venturiTube];
 
 /** Kinds that the file format names and this version does not compute. */

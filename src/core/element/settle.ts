@@ -2,6 +2,7 @@
 import type { Element, Primary } from './contract.ts';
 import { type CalibrationPoint, calibrated } from './shared/calibration.ts';
 
+/** The element as solve uses it; `own` are its fields as parsed, `calibration` the points of the meter, none or more. */
 export function settled(
   element: Element,
   own: Readonly<Record<string, string | number>>,

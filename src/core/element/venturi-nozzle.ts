@@ -99,4 +99,5 @@ const primary: Primary = {
   },
 };
 
+/** The Venturi nozzle has no field of its own. */
 export const venturiNozzle: Element = { kind: primary.kind, fields: [], primary: () => primary };

@@ -240,6 +240,7 @@ const primary = (convergent: Convergent): Primary => {
 
 const isConvergent = (text: string | number | undefined): text is Convergent => choices.some((one) => one === text);
 
+/** The Venturi tube; its own field is how the convergent was made. */
 export const venturiTube: Element = {
   kind: 'venturi-tube',
   fields: [{ name: 'convergent', type: 'choice', choices, required: true }],

@@ -2,6 +2,7 @@
 import type { Problem } from '../quantity/outcome.ts';
 import type { Refused } from './record.ts';
 
+/** The refusal of a meter, with every problem found. */
 export const refused = (tag: string, problems: readonly [Problem, ...Problem[]]): Refused => ({
   tag,
   status: 'refused',

@@ -15,9 +15,9 @@ export const jetLossShare = (ratio: number, coefficient: number): number => {
 };
 
 /**
- * Venturi tubes and Venturi nozzles with a divergent of at most 15 degrees: the curves of Annex C over beta for bores of
- * 65 mm and 500 mm, linear in beta and D between them and held outside; raised at low Reynolds numbers, 1.75 times at
- * Re_D <= 1e5 down to 1 at 6e5, linear in ln Re_D between the two. Pipe bore in m.
+ * Venturi tubes and Venturi nozzles with a divergent of at most 15 degrees: the curves of ISO 5167-4:2003, Annex C,
+ * over beta for bores of 65 mm and 500 mm, linear in beta and D between them and held outside; raised at low Reynolds
+ * numbers, 1.75 times at Re_D <= 1e5 down to 1 at 6e5, linear in ln Re_D between the two. Pipe bore in m.
  */
 export const venturiLossShare = (ratio: number, pipe: number, reynolds: number): number => {
   const { ratios, small, large, low, high, smallBore, largeBore, raise } = venturiLoss;
