@@ -1,17 +1,19 @@
 /** Custom of the trade, not a standard: pipe velocity, size of the span, turndown against the span. */
+import type { FluidState } from '../fluid/contract.ts';
 import type { Source } from '../quantity/source.ts';
+import { velocityOf } from '../solve/equation.ts';
 import type { Budgets } from '../uncertainty/duty.ts';
-import { type Case, flowsOf, largest } from './case.ts';
+import { type Case, flowsOf, largest, NEAR_SATURATION } from './case.ts';
 import type { Finding, Verdict } from './finding.ts';
 
 const CUSTOM: Source = { clause: 'custom of the trade', seen: 'practice' };
 /** Usual highest pipe velocities, m/s: liquids, gases, steam near saturation, superheated steam. */
 const VELOCITY = { liquid: 5, gas: 30, saturated: 40, superheated: 60 };
-const NEAR_SATURATION = 5; // K
 const SPAN = { min: 2500, max: 50000 }; // Pa
 /** A differential below a sixteenth of the span is less than a quarter of the flow. */
 const LEAST_SHARE = 6.25; // %
 
+/** Pipe velocity and span against the usual ones; the turndown, where there is more than one flow. */
 export function checkPractice(subject: Case, budgets: Budgets): readonly Finding[] {
   return [checkVelocity(subject), checkSpan(subject), ...checkTurndown(subject, budgets)];
 }
@@ -21,13 +23,17 @@ const caution = (bad: boolean): Verdict => (bad ? 'caution' : 'inside');
 function checkVelocity(subject: Case): Finding {
   const { state, geometry } = subject.solution.meter;
   const flow = largest(flowsOf(subject), ({ massFlow }) => massFlow);
-  const value = flow.massFlow / (state.density * (Math.PI / 4) * geometry.pipe ** 2); // continuity
-  const superheat = state.temperature - (state.saturationTemperature ?? 0);
-  const steam = superheat < NEAR_SATURATION ? VELOCITY.saturated : VELOCITY.superheated;
-  const byPhase = { liquid: VELOCITY.liquid, gas: VELOCITY.gas, vapour: steam, supercritical: VELOCITY.superheated };
-  const max = byPhase[state.phase];
+  const value = velocityOf(flow.massFlow, state.density, geometry.pipe);
+  const max = usualVelocity(state);
   const common = { id: 'velocity', assumption: 'range-and-span', verdict: caution(value > max) } as const;
   return { ...common, value, unit: 'm/s', limit: { max }, source: CUSTOM, at: flow.name };
+}
+
+/** Usual highest velocity of the phase; a vapour above the critical pressure has no line to be near. */
+function usualVelocity({ phase, temperature, saturationTemperature }: FluidState): number {
+  if (phase === 'liquid' || phase === 'gas') return VELOCITY[phase];
+  const near = saturationTemperature !== undefined && temperature - saturationTemperature < NEAR_SATURATION;
+  return phase === 'vapour' && near ? VELOCITY.saturated : VELOCITY.superheated;
 }
 
 function checkSpan({ solution }: Case): Finding {

@@ -18,8 +18,7 @@ export interface Straightness {
 /** Judges the installation. Problem choice-unknown: the element's table has no such fitting. */
 export function straightness(input: MeterInput, solution: Solution): Outcome<Straightness> {
   const { primary, geometry } = solution.meter;
-  const reynolds = solution.duty.maximum?.reynolds ?? 0;
-  const lengths = primary.straightLengths(geometry.ratio, reynolds);
+  const lengths = primary.straightLengths(geometry.ratio, solution.duty.maximum.reynolds);
   const { fitting, before, after } = input.installation;
   const upstream = lengths.find((length) => length.side === 'upstream' && length.fitting === fitting);
   if (fitting !== undefined && upstream === undefined) {

@@ -19,7 +19,7 @@ export interface Geometry {
 export interface Condition {
   readonly reynolds: number; // Re_D
   readonly expansion: number; // x = dp/p1
-  readonly isentropicExponent: number; // kappa; ignored when `expands` is false
+  readonly isentropicExponent?: number; // kappa; absent where the fluid does not expand
   readonly expands: boolean;
 }
 

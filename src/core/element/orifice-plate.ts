@@ -4,11 +4,12 @@
  * Symbols: clause 3 of the standard, SI.
  * Departs: 6.2: tabled lengths and roughness are interpolated in β, because the tables leave it open.
  */
+import { inch } from '../quantity/constants.ts';
 import type { Given, Working } from '../quantity/working.ts';
 import type { Condition, Dimension, Discharge, Element, Geometry, Limit, Part, Primary } from './contract.ts';
 import { cite } from './shared/cite.ts';
 import { dimensionsOf, within } from './shared/dimension.ts';
-import { orificeExpansibility, orificeExpansibilityWorking } from './shared/expansibility.ts';
+import { exponentOf, orificeExpansibility, orificeExpansibilityWorking } from './shared/expansibility.ts';
 import { jetLossShare, jetLossWorking } from './shared/loss.ts';
 import { orificeRoughness } from './shared/roughness.ts';
 import { straightLengths } from './shared/straight.ts';
@@ -141,7 +142,7 @@ const coefficientUncertainty = ({ ratio, pipe }: Geometry, flow: Condition): rea
 
 const expansibilityUncertainty = (flow: Condition): Part => ({
   id: 'base',
-  percent: flow.expands ? (3.5 * flow.expansion) / flow.isentropicExponent : 0, // 5.3.3.2
+  percent: flow.expands ? (3.5 * flow.expansion) / exponentOf(flow) : 0, // 5.3.3.2
   source: iso2003('5.3.3.2', 'memory'),
 });
 
@@ -229,6 +230,7 @@ const primary = (tappings: Tappings): Primary => ({
 
 const isTappings = (text: string | number | undefined): text is Tappings => choices.some((choice) => choice === text);
 
+/** The orifice plate; its own field is the kind of tappings. */
 export const orificePlate: Element = {
   kind: 'orifice-plate',
   fields: [{ name: 'tappings', type: 'choice', choices, required: true }],

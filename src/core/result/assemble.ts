@@ -8,7 +8,7 @@ import type { MeterInput } from '../input/meter.ts';
 import type { Site } from '../input/site.ts';
 import type { Seen, Source } from '../quantity/source.ts';
 import type { Working } from '../quantity/working.ts';
-import type { Operation } from '../solve/equation.ts';
+import { type Operation, velocityOf } from '../solve/equation.ts';
 import { metalWorking } from '../solve/metal.ts';
 import type { Solution } from '../solve/solve.ts';
 import type { Budgets } from '../uncertainty/duty.ts';
@@ -17,7 +17,7 @@ import { curveOf, reynoldsLimits } from './curve.ts';
 import { headsOf } from './heads.ts';
 import { withLate } from './late.ts';
 import type { PointRecord, Solved, StateRecord } from './record.ts';
-import { type Direction, pointWorking, velocityOf } from './working.ts';
+import { type Direction, pointWorking } from './working.ts';
 
 export interface Parts {
   readonly written: MeterText;
@@ -32,11 +32,11 @@ export interface Parts {
 /** Keys of a meter that are kept for later versions and not evaluated by this one. */
 const UNREAD = ['instrument', 'readings', 'log'] as const;
 
+/** The record of a solved meter; what only screen and paper ask for is worked out when they do. */
 export function assemble(parts: Parts): Solved {
   const { written, input, site, solution, straight, checks } = parts;
   const { meter, duty, span } = solution;
   const { geometry, primary, state } = meter;
-  const maximum = duty.maximum as Operation;
   const tappings = primary.tappings(geometry);
   const relative = relativeOf(state, input, site);
   const figures = {
@@ -61,7 +61,7 @@ export function assemble(parts: Parts): Solved {
   const solved: Solved = withLate<typeof figures, Late>(figures, {
     curve: () => curveOf(meter, span, input.uncertainty, straight.parts),
     reynoldsLimits: () => reynoldsLimits(meter),
-    heads: () => headsOf(meter, maximum, site.gravity),
+    heads: () => headsOf(meter, duty.maximum, site.gravity),
     dimensions: () => primary.dimensions(geometry),
     working: () => [...state.working, ...relative, ...metalWorking(input, solution.boreAsMeasured, state.temperature)],
     sources: () => sourcesOf(solved, parts.budgets),

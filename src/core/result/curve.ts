@@ -2,7 +2,7 @@
 
 import type { Part } from '../element/contract.ts';
 import type { StatedUncertainty } from '../input/uncertainty.ts';
-import type { PressureDifference } from '../quantity/kinds.ts';
+import { as } from '../quantity/brand.ts';
 import type { Meter } from '../solve/equation.ts';
 import { flowFrom } from '../solve/flow.ts';
 import { flowUncertainty } from '../uncertainty/iso5167.ts';
@@ -15,7 +15,7 @@ export function curveOf(meter: Meter, span: number, stated: StatedUncertainty, e
   const points: CurvePoint[] = [];
   const { min = 0, max = Number.POSITIVE_INFINITY } = reynoldsLimits(meter);
   for (let step = 1; step <= STEPS; step += 1) {
-    const differential = (span * (step / STEPS) ** 2) as PressureDifference;
+    const differential = as<'pressure difference'>(span * (step / STEPS) ** 2);
     const flow = flowFrom(differential, meter);
     if (!flow.ok) continue; // only a differential as large as the pressure itself, which the span never is
     const { massFlow, reynolds } = flow.value;

@@ -4,13 +4,13 @@
  * the standard's own loss formula, ISO 5167-2:2003, Eq (7).
  */
 import type { Acceleration } from '../quantity/kinds.ts';
-import type { Meter, Operation } from '../solve/equation.ts';
+import { type Meter, type Operation, velocityOf } from '../solve/equation.ts';
 import type { HeadPoint } from './record.ts';
-import { velocityOf } from './working.ts';
 
 /** Straight pipe shown before the upstream tapping, in pipe bores. */
 const INLET = 3;
 
+/** The heads from before the upstream tapping to where the pressure has recovered, in the direction of the flow. */
 export function headsOf(meter: Meter, operation: Operation, gravity: Acceleration): HeadPoint[] {
   const { primary, geometry, state } = meter;
   const head = (pressure: number) => pressure / (state.density * gravity); // p/(rho g)

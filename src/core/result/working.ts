@@ -3,8 +3,8 @@
 import { approachFactor } from '../element/shared/approach.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Given, Working } from '../quantity/working.ts';
-import type { Meter, Operation } from '../solve/equation.ts';
-import { type Budget, EQUATION } from '../uncertainty/iso5167.ts';
+import { type Meter, type Operation, velocityOf } from '../solve/equation.ts';
+import { type Budget, EQUATION, type Term, type TermName } from '../uncertainty/iso5167.ts';
 
 const iso = (clause: string, seen: Source['seen'] = 'read'): Source => ({ clause: `ISO 5167-1:2022, ${clause}`, seen });
 const given = (symbol: string, value: number, unit: string, words: string): Given => ({ symbol, value, unit, words });
@@ -12,6 +12,7 @@ const given = (symbol: string, value: number, unit: string, words: string): Give
 /** Whether the flow was found from the differential, or the differential from the flow. */
 export type Direction = 'flow' | 'differential';
 
+/** The lines of one flow, in SI; a line that the fluid or the direction does not need is left out. */
 export function pointWorking(meter: Meter, operation: Operation, direction: Direction, budget: Budget): Working[] {
   const { primary, geometry, state } = meter;
   const { reynolds, coefficient, differential } = operation;
@@ -136,12 +137,8 @@ const velocityWorking = ({ geometry: { pipe }, state }: Meter, { massFlow }: Ope
   source: { clause: 'continuity', seen: 'derived' },
 });
 
-/** Mean velocity in a circular section: continuity. */
-export const velocityOf = (massFlow: number, density: number, bore: number): number =>
-  (4 * massFlow) / (Math.PI * density * bore ** 2); // continuity
-
 const uncertaintyWorking = (budget: Budget, ratio: number): Working => {
-  const percent = (name: string) => budget.terms.find((term) => term.name === name)?.percent ?? 0;
+  const percent = (name: TermName) => termOf(budget, name).percent;
   return {
     id: 'uncertainty',
     symbol: 'U_q',
@@ -162,6 +159,13 @@ const uncertaintyWorking = (budget: Budget, ratio: number): Working => {
     ...(budget.terms.some(({ stated }) => !stated) ? { remark: unstatedRemark(budget) } : {}),
   };
 };
+
+/** One term of a budget; a budget has all of them. */
+function termOf({ terms }: Budget, name: TermName): Term {
+  const term = terms.find((one) => one.name === name);
+  if (term === undefined) throw new Error(`result: expected the term ${name} in the budget, got none`);
+  return term;
+}
 
 /** Which terms the user left to the standard's allowance, and which are left out. */
 function unstatedRemark(budget: Budget): string {

@@ -18,6 +18,9 @@ export interface Bore {
 const invariantOf = (ratio: number): number => ratio ** 2 / Math.sqrt(1 - ratio ** 4); // Annex A
 const ratioOf = (x: number): number => (x ** 2 / (1 + x ** 2)) ** 0.25; // Annex A
 
+/** d of a pipe of bore D. */
+const boreOf = (ratio: number, pipe: Length): Length => (ratio * pipe) as Length; // d = beta D
+
 const FIRST_EPSILON = 0.97; // Annex A, first guess for a gas
 
 /**
@@ -39,7 +42,7 @@ export function boreFrom(
   const reynolds = reynoldsOf(massFlow, state.viscosity, pipe);
   const a2 = massFlow / ((Math.PI / 4) * pipe ** 2 * Math.sqrt(2 * differential * state.density)); // Annex A, A2
   const factors = (ratio: number) => {
-    const geometry = geometryOf(pipe, ratio * pipe);
+    const geometry = geometryOf(pipe, boreOf(ratio, pipe));
     const held = heldDischarge(primary, geometry);
     return { geometry, held, coefficient: held.at(reynolds), epsilon: expansibilityOf(primary, ratio, state)(x) };
   };

@@ -3,12 +3,13 @@
  * dp eps2 = A3. In a gas dp eps2 rises to a maximum beyond the standard's range and falls again, so that only the
  * rising part up to a quarter of p1 (or what the user already spans) is searched.
  */
+import { exponentOf } from '../element/shared/expansibility.ts';
 import { type Root, root } from '../numeric/root.ts';
-import type { MassFlow, PressureDifference } from '../quantity/kinds.ts';
+import { as } from '../quantity/brand.ts';
+import type { MassFlow } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import {
   expansibilityOf,
-  exponentOf,
   heldDischarge,
   idealFlow,
   type Meter,
@@ -39,7 +40,7 @@ export function differentialFrom(
   const unit = coefficient * idealFlow(geometry, 1, state.density); // q_m at 1 Pa without expansion
   const a3 = (massFlow / unit) ** 2 / state.pressure; // Annex A, A3 over p1: x eps2
   const answer = (x: number, epsilon: number, evaluations: number): Outcome<Operation> => {
-    const differential = (x * state.pressure) as PressureDifference;
+    const differential = as<'pressure difference'>(x * state.pressure);
     return ok(withHeld(held, { massFlow, differential, coefficient, epsilon, reynolds, evaluations }));
   };
   if (!state.expands) {

@@ -1,8 +1,9 @@
 /** The flow equation of ISO 5167-1 and what all three unknowns share. */
 import type { Discharge, Expansibility, Geometry, Primary } from '../element/contract.ts';
 import { approachFactor } from '../element/shared/approach.ts';
+import { exponentOf } from '../element/shared/expansibility.ts';
 import type { FluidState } from '../fluid/contract.ts';
-import type { Length, MassFlow, PressureDifference } from '../quantity/kinds.ts';
+import type { Length, MassFlow, PressureDifference, Velocity } from '../quantity/kinds.ts';
 
 /** A meter with everything known but the flow and the differential. */
 export interface Meter {
@@ -24,12 +25,13 @@ export interface Operation {
   readonly evaluations: number;
 }
 
-/** The bore equation's other name for C: never evaluated below the element's floor. */
+/** The discharge coefficient, never evaluated below the floor of the element. */
 export interface Held {
   readonly floor: number;
   readonly at: Discharge;
 }
 
+/** C of an element of one geometry; below the Reynolds number of its floor it keeps the value it has there. */
 export const heldDischarge = (primary: Primary, geometry: Geometry): Held => {
   const floor = primary.reynoldsFloor(geometry);
   const discharge = primary.discharge(geometry);
@@ -48,17 +50,12 @@ export const reynoldsOf = (massFlow: number, viscosity: number, pipe: number): n
 export const idealFlow = (geometry: Geometry, differential: number, density: number): number =>
   approachFactor(geometry.ratio) * (Math.PI / 4) * geometry.bore ** 2 * Math.sqrt(2 * differential * density); // Formula (1)
 
-export const geometryOf = (pipe: Length, bore: number): Geometry => ({
-  pipe,
-  bore: bore as Length,
-  ratio: bore / pipe,
-});
+/** Mean velocity in a circular section, m/s, of a mass flow in kg/s at a density in kg/m3; `bore` in m. Continuity. */
+export const velocityOf = (massFlow: number, density: number, bore: number): Velocity =>
+  ((4 * massFlow) / (Math.PI * density * bore ** 2)) as Velocity; // continuity
 
-/** The exponent of a fluid that expands; state.ts never leaves it out. */
-export const exponentOf = ({ isentropicExponent }: FluidState): number => {
-  if (isentropicExponent !== undefined) return isentropicExponent;
-  throw new Error('solve: expected an isentropic exponent for a fluid that expands, got none');
-};
+/** Pipe and bore at one temperature, m, with their ratio. */
+export const geometryOf = (pipe: Length, bore: Length): Geometry => ({ pipe, bore, ratio: bore / pipe });
 
 /** The operation, with the Reynolds number at which C was held where it was. A plain record is far quicker than a spread. */
 export const withHeld = (held: Held, operation: Operation): Operation =>

@@ -3,7 +3,8 @@
  * side rises and whose right side hardly moves, so that one root exists and three evaluations find it.
  */
 import { root } from '../numeric/root.ts';
-import type { MassFlow, PressureDifference } from '../quantity/kinds.ts';
+import { as } from '../quantity/brand.ts';
+import type { PressureDifference } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import {
   expansibilityOf,
@@ -39,7 +40,7 @@ export function flowFrom(differential: PressureDifference, { primary, geometry, 
   });
   if (!found.found) return fail('flow-unsettled', 'differential', { lower: found.lower, upper: found.upper });
   const { x: coefficient, evaluations } = found;
-  const massFlow = (coefficient * ideal) as MassFlow;
+  const massFlow = as<'mass flow'>(coefficient * ideal);
   const reynolds = a1 * coefficient;
   return ok(withHeld(held, { massFlow, differential, coefficient, epsilon, reynolds, evaluations }));
 }

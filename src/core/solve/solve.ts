@@ -12,11 +12,14 @@ import type { Meter, Operation } from './equation.ts';
 import { flowFrom } from './flow.ts';
 import { asMeasured, atLine, hotGeometry } from './metal.ts';
 
+/** The flows of a meter; the maximum is always there, given or found. */
+type Duty = Partial<Record<DutyName, Operation>> & Record<'maximum', Operation>;
+
 export interface Solution {
   readonly meter: Meter;
   readonly boreAsMeasured: Length;
   readonly pipeAsMeasured: Length;
-  readonly duty: Readonly<Partial<Record<DutyName, Operation>>>;
+  readonly duty: Readonly<Duty>;
   /** The differential of the span: what was set, or that of the maximum flow. */
   readonly span: PressureDifference;
 }
@@ -27,7 +30,7 @@ export function solve(input: MeterInput, primary: Primary, state: FluidState): O
   if (!first.ok) return first;
   const { meter, boreAsMeasured, maximum } = first.value;
   const span = input.differential ?? maximum.differential;
-  const duty: Partial<Record<DutyName, Operation>> = { maximum };
+  const duty: Duty = { maximum };
   for (const name of ['normal', 'minimum'] as const) {
     const flow = input.duty[name];
     if (flow === undefined) continue;

@@ -3,13 +3,16 @@
  * are summed before the squares. What the user does not state takes the standard's allowance (pipe, bore) or is left out.
  */
 import type { Condition, Part } from '../element/contract.ts';
+import { exponentOf } from '../element/shared/expansibility.ts';
 import type { StatedUncertainty } from '../input/uncertainty.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Meter, Operation } from '../solve/equation.ts';
 
+/** The equation of the budget. */
 export const EQUATION: Source = { clause: 'ISO 5167-1:2003, 8.2.2.1, Eq (3)', seen: 'memory' };
-/** Largest uncertainties the standard itself leaves for D and d, used where none is stated: 0.4 % and 0.1 %. */
+/** Largest uncertainty the standard itself leaves for D, used where none is stated. */
 export const PIPE_ALLOWANCE = 0.4; // %, ISO 5167-1:2003, 8.2.2.2
+/** The same for d. */
 export const BORE_ALLOWANCE = 0.1; // %, ISO 5167-1:2003, 8.2.2.3
 
 export type TermName = 'C' | 'epsilon' | 'pipe' | 'bore' | 'differential' | 'density';
@@ -31,12 +34,11 @@ export interface Budget {
 }
 
 /** Conditions of one operation for limits and uncertainties. */
-export const conditionOf = ({ state }: Meter, operation: Operation): Condition => ({
-  reynolds: operation.reynolds,
-  expansion: operation.differential / state.pressure,
-  isentropicExponent: state.isentropicExponent ?? 1,
-  expands: state.expands,
-});
+export const conditionOf = ({ state }: Meter, { reynolds, differential }: Operation): Condition => {
+  const expansion = differential / state.pressure;
+  if (!state.expands) return { reynolds, expansion, expands: false };
+  return { reynolds, expansion, expands: true, isentropicExponent: exponentOf(state) };
+};
 
 /** Uncertainty of the flow of one operation; `extra` are further additive parts of C (straight lengths). */
 export function flowUncertainty(

@@ -67,3 +67,11 @@ describe('uncertainty of the expansibility, percent', () => {
     }
   });
 });
+
+it('a fluid that expands without an isentropic exponent is a defect, not a guess', () => {
+  const bare = { reynolds: 1e6, expansion: 0.02 };
+  const plate = primary('orifice-plate.flange');
+  const at = geometry(0.2, 0.6);
+  expect(plate.expansibilityUncertainty(at, { ...bare, expands: false }).percent).toBe(0);
+  expect(() => plate.expansibilityUncertainty(at, { ...bare, expands: true })).toThrow('isentropic exponent');
+});

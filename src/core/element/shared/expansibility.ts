@@ -35,6 +35,12 @@ export const nozzleExpansibility = (ratio: number, isentropicExponent: number): 
   };
 };
 
+/** The exponent of a fluid that expands; one without it is a defect of the fluid's model. */
+export const exponentOf = ({ isentropicExponent }: { readonly isentropicExponent?: number }): number => {
+  if (isentropicExponent !== undefined) return isentropicExponent;
+  throw new Error('expansibility: expected an isentropic exponent for a fluid that expands, got none');
+};
+
 /** The working of the orifice form. */
 export const orificeExpansibilityWorking = (ratio: number, kappa: number, x: number, source: Source): Working => ({
   id: 'epsilon',
