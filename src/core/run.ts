@@ -14,18 +14,17 @@ import { gather, type Outcome, ok } from './quantity/outcome.ts';
 import { assemble } from './result/assemble.ts';
 import type { MeterResult, Results, Solved } from './result/record.ts';
 import { refused, tagOf } from './result/refuse.ts';
+import { solveTraverse } from './run/traverse.ts';
 import { solve } from './solve/solve.ts';
 import { dutyUncertainty } from './uncertainty/duty.ts';
 
 type Surroundings = Pick<Project, 'site' | 'base'>;
 
-/** Every meter of a project, each on its own; traverses are refused until this version computes them. */
+/** Every meter and every traverse of a project, each on its own. */
 export function run(project: Project): Results {
   return {
     results: project.meters.map((meter, index) => solveMeter(meter, index, project)),
-    traverses: (project.traverses ?? []).map((traverse, index) =>
-      refused(tagOf(traverse, index), [{ code: 'traverse-not-offered', field: `traverses.${index}`, detail: {} }]),
-    ),
+    traverses: (project.traverses ?? []).map((traverse, index) => solveTraverse(traverse, index, project)),
   };
 }
 

@@ -8,7 +8,9 @@ export type {
   InstallationText,
   MeterText,
   PipeText,
+  ProbeText,
   ProjectV1 as Project,
+  TraverseText,
   UncertaintyText,
   Unknown,
 } from './v/1.ts';

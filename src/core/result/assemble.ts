@@ -79,7 +79,8 @@ function relativeOf({ phase, baseDensity }: FluidState, { fluid }: MeterInput, {
   return line === undefined ? [] : [line];
 }
 
-function stateRecord(state: FluidState, [relative]: readonly Working[]): StateRecord {
+/** The state as views read it; `relative` is the working of its relative density, where it has one. */
+export function stateRecord(state: FluidState, [relative]: readonly Working[]): StateRecord {
   const optional = {
     isentropicExponent: state.isentropicExponent,
     compressibility: state.compressibility,
@@ -150,7 +151,11 @@ const WORST: readonly Seen[] = ['memory', 'second-hand', 'practice', 'derived', 
 function sourcesOf(solved: Solved, budgets: Budgets): readonly Source[] {
   const working = [...solved.working, ...Object.values(solved.points).flatMap((point) => point.working)];
   const parts = Object.values(budgets).flatMap((budget) => budget.coefficientParts);
-  const all = [...working, ...solved.checks, ...parts].map(({ source }) => source);
+  return sourcesOnce([...working, ...solved.checks, ...parts].map(({ source }) => source));
+}
+
+/** Each source once, the least certain first. */
+export function sourcesOnce(all: readonly Source[]): readonly Source[] {
   const once = [...new Map(all.map((source) => [`${source.seen} ${source.clause}`, source])).values()];
   return once.sort((one, other) => WORST.indexOf(one.seen) - WORST.indexOf(other.seen));
 }

@@ -9,6 +9,7 @@ import type { Phase } from '../fluid/contract.ts';
 import type { Problem } from '../quantity/outcome.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Working } from '../quantity/working.ts';
+import type { TraverseFigures } from './traverse-record.ts';
 
 export interface StateRecord {
   readonly density_kg_m3: number;
@@ -123,8 +124,16 @@ export interface Refused {
 
 export type MeterResult = Solved | Refused;
 
+/** A traverse with its plan; its velocities as far as it is read, its flow once it is read to the end. */
+export interface SolvedTraverse extends TraverseFigures {
+  readonly tag: string;
+  readonly status: 'solved';
+  readonly state: StateRecord;
+}
+
+export type TraverseResult = SolvedTraverse | Refused;
+
 export interface Results {
   readonly results: readonly MeterResult[];
-  /** Traverses the document holds, refused until this version computes them. */
-  readonly traverses: readonly Refused[];
+  readonly traverses: readonly TraverseResult[];
 }

@@ -3,15 +3,11 @@ import type { MeterText, Project } from '../../core/document/project.ts';
 import type { MeterResult, PointRecord, Refused, Results, Solved } from '../../core/result/record.ts';
 import { contextOf } from '../present/context.ts';
 import { inputsHash } from '../present/hash.ts';
-import { findingText } from '../words/findings.ts';
 import type { Print } from '../words/print.ts';
 import { type Problem, problemSentence } from '../words/problems.ts';
 import { dutyNames } from '../words/verdicts.ts';
-
-export interface Asked {
-  /** Whether the working of every figure is written too. */
-  readonly working?: boolean;
-}
+import { type Asked, checkOf } from './checks.ts';
+import { traverseOf, unitsLike } from './traverses.ts';
 
 /** The whole output; its keys keep this order. */
 export function resultsOf(project: Project, results: Results, asked: Asked): object {
@@ -24,7 +20,10 @@ export function resultsOf(project: Project, results: Results, asked: Asked): obj
       const { print } = contextOf(meter, project);
       return { ...meterOf(result, print, asked), inputs: inputsHash(meter, project) };
     }),
-    traverses: results.traverses.map((traverse) => refusedOf(traverse, contextOf(none, project).print)),
+    traverses: results.traverses.map((traverse, index) => {
+      const { print } = contextOf(unitsLike(project.traverses?.[index]), project);
+      return traverse.status === 'refused' ? refusedOf(traverse, print) : traverseOf(traverse, print, asked);
+    }),
   };
 }
 
@@ -57,23 +56,6 @@ function solvedOf(result: Solved, print: Print, { working = false }: Asked): obj
 
 function pointOf({ working, ...figures }: PointRecord, asked: boolean): object {
   return asked ? { ...figures, working } : figures;
-}
-
-function checkOf(finding: Solved['checks'][number], print: Print): object {
-  const { id, assumption, verdict, value, unit, limit, source, at } = finding;
-  const { text, limit: bounds } = findingText(finding, print);
-  return {
-    id,
-    assumption,
-    verdict,
-    value,
-    unit,
-    limit,
-    source: source.clause,
-    seen: source.seen,
-    ...(at === undefined ? {} : { at }),
-    message: bounds === '' ? `${text}.` : `${text}; limit: ${bounds}.`,
-  };
 }
 
 function refusedOf({ tag, status, problem, problems }: Refused, print: Print): object {

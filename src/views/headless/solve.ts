@@ -2,7 +2,8 @@
 import { decode } from '../../core/document/codec.ts';
 import { run } from '../../core/run.ts';
 import { problemSentence } from '../words/problems.ts';
-import { type Asked, resultsOf } from './results.ts';
+import type { Asked } from './checks.ts';
+import { resultsOf } from './results.ts';
 import { serialise } from './serialise.ts';
 
 export interface Answer {

@@ -1,6 +1,7 @@
 /** Labels of the document's fields by path, and how a sentence names each. */
 
 import { componentLabel } from './components.ts';
+import { readingLabel, traverseLabels } from './fields-of-traverse.ts';
 
 const labels: Readonly<Record<string, string>> = {
   tag: 'Tag',
@@ -88,6 +89,7 @@ const labels: Readonly<Record<string, string>> = {
   log: 'Log',
   meters: 'Meters',
   traverses: 'Surveys',
+  ...traverseLabels,
 };
 
 /** Fields inside a row of a list. */
@@ -97,6 +99,7 @@ const inRow: Readonly<Record<string, string>> = {
   temperature: 'temperature',
   density: 'density',
   viscosity: 'viscosity',
+  velocity: 'velocity',
 };
 
 /** A path without the meter it stands in and with its row numbers apart. */
@@ -105,7 +108,7 @@ const own = (path: string): string => path.replace(/^meters(\.\d+\.|\[\d+\]\.)/,
 /** Label of a field; a row of a list is numbered from 1, a field this version does not know stands as written. */
 export function fieldLabel(path: string): string {
   const plain = own(path);
-  const known = labels[plain];
+  const known = labels[plain] ?? readingLabel(plain);
   if (known !== undefined) return known;
   const component = /^fluid\.composition\.(.+)$/.exec(plain)?.[1];
   if (component !== undefined) return `Share of ${componentLabel(component).replace(/^[A-Z](?=[a-z])/, lowered)}`;

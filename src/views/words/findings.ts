@@ -5,6 +5,7 @@ import { checksOfAir } from './findings-of-air.ts';
 import { checksOfFlow } from './findings-of-flow.ts';
 import { checksOfLiquids } from './findings-of-liquids.ts';
 import { checksOfSize } from './findings-of-size.ts';
+import { checksOfTraverse } from './findings-of-traverse.ts';
 import type { Print } from './print.ts';
 import { dutyLabels } from './verdicts.ts';
 
@@ -13,6 +14,7 @@ export const findingWords: Readonly<Record<string, FindingWords>> = {
   ...checksOfFlow,
   ...checksOfLiquids,
   ...checksOfAir,
+  ...checksOfTraverse,
 };
 
 /** The line of a finding and its limit, figures printed by `print`. A code without words is a defect. */

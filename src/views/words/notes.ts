@@ -23,6 +23,7 @@ export const remarks: Readonly<Record<string, string>> = {
   'viscosity-by-release': 'From the correlation of the release; too long to print here.',
   'viscosity-extrapolated': 'From the correlation of the release, continued above its range: take it with care.',
   stated: 'Stated by the user.',
+  'traverse-strongest': 'Written here for the strongest reading, before any correction; every point follows in the same way.',
   ...liquidRemarks,
   ...airRemarks,
   'expansion-held': 'The temperature lies outside the table of expansion; its nearest value is held.',

@@ -47,10 +47,6 @@ export const inputProblems: ProblemWords = {
     cause: `This version keeps the fluid '${d.text('written')}' in the file and does not compute it.`,
     next: `Choose ${d.list('offered')}.`,
   }),
-  'traverse-not-offered': () => ({
-    cause: 'This version keeps surveys in the file and does not compute them.',
-    next: 'Open the file with a version that does; nothing in it is lost.',
-  }),
   'isentropic-exponent-implausible': (d) => ({
     cause: `No gas has an isentropic exponent of ${d.figure('value', 'number')}.`,
     next: `Write one from ${d.limit('min', 'number')} to ${d.limit('max', 'number')}, or none for a liquid.`,

@@ -10,6 +10,7 @@ import { inputProblems } from './problems-of-input.ts';
 import { liquidProblems } from './problems-of-liquids.ts';
 import { numberProblems } from './problems-of-numbers.ts';
 import { solvingProblems } from './problems-of-solving.ts';
+import { traverseProblems } from './problems-of-traverse.ts';
 
 export type Problem = Refused['problem'];
 
@@ -20,6 +21,7 @@ export const problemWords: ProblemWords = {
   ...airProblems,
   ...liquidProblems,
   ...solvingProblems,
+  ...traverseProblems,
   ...fileProblems,
 };
 

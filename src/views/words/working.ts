@@ -29,6 +29,8 @@ export const workingTitles: Readonly<Record<string, string>> = {
   'volume-flow': 'Volume flow at the upstream state',
   'base-volume-flow': 'Volume flow at the base state',
   velocity: 'Mean velocity in the pipe',
+  'traverse-velocity': 'Velocity at the strongest reading',
+  'traverse-mean': 'Mean velocity in the section',
   loss: 'Permanent pressure loss',
   uncertainty: 'Uncertainty of the flow, 95 %',
 };

@@ -107,6 +107,75 @@ export interface MeterText {
   [key: string]: unknown;
 }
 
+/** A row of a probe's calibration. */
+export interface ProbeRow {
+  velocity?: string;
+  coefficient?: string | number;
+  [key: string]: unknown;
+}
+
+export interface ProbeText {
+  kind?: string; // 'pitot-static' | 's-type'
+  coefficient?: string | number;
+  calibration?: ProbeRow[]; // it replaces the coefficient
+  head?: string; // diameters
+  stem?: string;
+  hole?: string;
+  alignment?: string; // angle from the axis of the duct
+  [key: string]: unknown;
+}
+
+/** A survey of the velocities in a section of a duct or pipe. */
+export interface TraverseText {
+  tag?: string;
+  service?: string;
+  section?: {
+    shape?: string;
+    diameter?: string;
+    width?: string;
+    height?: string;
+    ports?: string;
+    [key: string]: unknown;
+  };
+  rule?: string; // 'log-linear' | 'log-tchebycheff' | 'equal-area' | 'single-point'
+  lines?: string | number;
+  pointsPerLine?: string | number;
+  wallRule?: string; // 'leave' | 'move' | 'merge'
+  profile?: {
+    kind?: string; // of a single point: 'laminar' | 'power' | 'stated'
+    at?: string; // 'centre' | 'mean-velocity'
+    exponent?: string | number;
+    meanOverCentre?: string | number;
+    [key: string]: unknown;
+  };
+  port?: string; // its length, from the outer end to the inside of the wall
+  straight?: { before?: string; after?: string; [key: string]: unknown };
+  probe?: ProbeText;
+  fluid?: FluidText;
+  state?: { pressure?: string; temperature?: string; [key: string]: unknown };
+  manometer?: {
+    liquid?: string | { density?: string; [key: string]: unknown };
+    temperature?: string;
+    angle?: string; // of the tube from the horizontal
+    [key: string]: unknown;
+  };
+  /** One list for each line; an empty text is a point that is not read yet. */
+  readings?: string[][];
+  /** A second probe at one point, in the order of time. */
+  reference?: string[];
+  nullAngle?: string;
+  corrections?: { blockage?: string; turbulence?: string; wall?: string | number; [key: string]: unknown };
+  uncertainty?: {
+    reading?: string;
+    coefficient?: string;
+    density?: string;
+    area?: string;
+    points?: string;
+    [key: string]: unknown;
+  };
+  [key: string]: unknown;
+}
+
 export interface ProjectV1 {
   format: 'headwright';
   version: 1;
@@ -119,6 +188,7 @@ export interface ProjectV1 {
   display?: Display;
   /** Anything may stand in the list: what is no meter is refused where it stands, the others are solved. */
   meters: MeterText[];
-  traverses?: unknown[];
+  /** As in the list of meters, anything may stand here. */
+  traverses?: TraverseText[];
   [key: string]: unknown;
 }

@@ -1,0 +1,131 @@
+/** Puts a surveyed traverse together into the record that every view reads. */
+import type { Finding } from '../check/finding.ts';
+import type { TraverseText } from '../document/project.ts';
+import type { TraverseInput } from '../input/traverse.ts';
+import type { Section } from '../input/traverse-section.ts';
+import type { Source } from '../quantity/source.ts';
+import { biasOnPowerLaw } from '../traverse/bias.ts';
+import type { Quality } from '../traverse/quality.ts';
+import { suggestionsFor } from '../traverse/suggest.ts';
+import type { Survey, SurveyLine, SurveyPoint } from '../traverse/survey.ts';
+import type { TraverseBudget } from '../uncertainty/traverse.ts';
+import { sourcesOnce, stateRecord } from './assemble.ts';
+import type { SolvedTraverse } from './record.ts';
+import type {
+  QualityRecord,
+  TraverseFigures,
+  TraverseFlowRecord,
+  TraverseLineRecord,
+  TraversePointRecord,
+  TraverseUncertaintyRecord,
+} from './traverse-record.ts';
+import { traverseWorking } from './traverse-working.ts';
+
+export interface TraverseParts {
+  readonly written: TraverseText;
+  readonly input: TraverseInput;
+  readonly survey: Survey;
+  readonly quality: Quality | undefined;
+  readonly budget: TraverseBudget | undefined;
+  readonly checks: readonly Finding[];
+}
+
+const POWER_LAW = 7; // u ~ y^(1/7)
+
+export function assembleTraverse(parts: TraverseParts): SolvedTraverse {
+  const { written, input, survey, quality, budget, checks } = parts;
+  const { plan, flow } = survey;
+  const suggestions = suggestionsFor(input.section, input.straight);
+  const working = [...survey.state.working, ...traverseWorking(input, survey)];
+  return {
+    tag: input.tag,
+    status: 'solved',
+    ...(written.service === undefined ? {} : { service: written.service }),
+    rule: input.rule,
+    section: sectionRecord(input.section),
+    area_m2: plan.area,
+    hydraulicDiameter_m: plan.hydraulicDiameter,
+    port_m: input.port,
+    state: stateRecord(survey.state, []),
+    lines: linesOf(survey.lines),
+    points: plan.lines.reduce((sum, { points }) => sum + points.length, 0),
+    measured: survey.measured.length,
+    suggestions,
+    ...(flow === undefined ? {} : { flow: flowRecord(flow) }),
+    ...(quality === undefined ? {} : { quality: qualityRecord(quality, input, survey) }),
+    ...(budget === undefined ? {} : { uncertainty: uncertaintyRecord(budget) }),
+    checks,
+    working,
+    sources: sourcesOnce(sourcesOf(survey, [...working, ...checks, ...suggestions])),
+  };
+}
+
+function sectionRecord(section: Section): TraverseFigures['section'] {
+  if (section.shape === 'circular') return { shape: section.shape, diameter_m: section.diameter };
+  const { shape, width, height, ports } = section;
+  return { shape, width_m: width, height_m: height, ports };
+}
+
+function linesOf(lines: readonly SurveyLine[]): readonly TraverseLineRecord[] {
+  let before = 0;
+  return lines.map(({ angle, across, points, mean }) => {
+    const first = before;
+    before += points.length;
+    return {
+      ...(angle === undefined ? {} : { angle_rad: angle }),
+      ...(across === undefined ? {} : { across_m: across }),
+      points: points.map((point, at) => pointRecord(point, first + at + 1)),
+      ...(mean === undefined ? {} : { meanVelocity_m_s: mean }),
+    };
+  });
+}
+
+function pointRecord(point: SurveyPoint, number: number): TraversePointRecord {
+  const { position, depth, weight, moved, differential, velocity } = point;
+  return {
+    number,
+    position_m: position,
+    depth_m: depth,
+    weight,
+    moved,
+    ...(differential === undefined ? {} : { differential_Pa: differential }),
+    ...(velocity === undefined ? {} : { velocity_m_s: velocity }),
+  };
+}
+
+function flowRecord(flow: NonNullable<Survey['flow']>): TraverseFlowRecord {
+  return {
+    meanVelocity_m_s: flow.meanVelocity,
+    volumeFlow_m3_s: flow.volumeFlow,
+    massFlow_kg_s: flow.massFlow,
+    ...(flow.baseVolumeFlow === undefined ? {} : { baseVolumeFlow_m3_s: flow.baseVolumeFlow }),
+    reynolds: flow.reynolds,
+  };
+}
+
+function qualityRecord(quality: Quality, { rule }: TraverseInput, { plan }: Survey): QualityRecord {
+  const optional = {
+    scatter_percent: quality.scatterPercent,
+    lines_percent: quality.linesPercent,
+    drift_percent: quality.driftPercent,
+    differentialAveraging_percent: quality.differentialAveragingPercent,
+    ruleOnPowerLaw_percent: rule === 'single-point' ? undefined : 100 * biasOnPowerLaw(plan.layout, POWER_LAW),
+  };
+  return {
+    ...Object.fromEntries(Object.entries(optional).filter(([, value]) => value !== undefined)),
+    strongReadings_percent: quality.strongPercent,
+    reversedReadings: quality.reversed,
+    stillReadings: quality.still,
+  };
+}
+
+const uncertaintyRecord = ({ expandedPercent, terms }: TraverseBudget): TraverseUncertaintyRecord => ({
+  expanded_percent: expandedPercent,
+  terms,
+});
+
+const sourcesOf = ({ plan }: Survey, parts: readonly { readonly source: Source }[]): readonly Source[] => [
+  plan.source,
+  ...(plan.wall === undefined ? [] : [plan.wall.source]),
+  ...parts.map(({ source }) => source),
+];

@@ -1,0 +1,51 @@
+/** A traverse as the file contract writes it. Velocities are listed once every point is read; until then by point. */
+import type { MeterText, TraverseText } from '../../core/document/project.ts';
+import type { SolvedTraverse } from '../../core/result/record.ts';
+import type { Print } from '../words/print.ts';
+import { type Asked, checkOf } from './checks.ts';
+
+export function traverseOf(result: SolvedTraverse, print: Print, { working = false }: Asked): object {
+  const { lines, flow, quality, uncertainty, checks } = result;
+  const { reynolds, ...flows } = flow ?? {};
+  const complete = result.measured === result.points;
+  return {
+    tag: result.tag,
+    status: result.status,
+    rule: result.rule,
+    area_m2: result.area_m2,
+    state: result.state,
+    positions_m: lines.map(({ points }) => points.map(({ position_m }) => position_m)),
+    depths_m: lines.map(({ points }) => points.map(({ depth_m }) => depth_m)),
+    weights: lines.map(({ points }) => points.map(({ weight }) => weight)),
+    ...(complete
+      ? { velocities_m_s: lines.map(({ points }) => points.flatMap(({ velocity_m_s = [] }) => velocity_m_s)) }
+      : {}),
+    ...flows,
+    ...(reynolds === undefined ? {} : { reynolds }),
+    points: result.points,
+    measured: result.measured,
+    ...(complete ? {} : { read: readOf(result) }),
+    ...(quality === undefined ? {} : { quality }),
+    ...(uncertainty === undefined ? {} : { uncertainty }),
+    suggestions: result.suggestions.map(({ source, ...one }) => ({ ...one, source: source.clause, seen: source.seen })),
+    checks: checks.map((finding) => checkOf(finding, print)),
+    ...(working ? { working: result.working } : {}),
+  };
+}
+
+/** A meter whose units are those of the traverse: differentials as they were read, pascal before anything is. */
+export function unitsLike(traverse: TraverseText | undefined): MeterText {
+  if (typeof traverse !== 'object' || traverse === null) return {};
+  const { readings, state } = traverse;
+  const lines = Array.isArray(readings) ? readings.flat() : [];
+  const differential = lines.find((reading) => typeof reading === 'string' && reading.trim() !== '') ?? '0 Pa';
+  return typeof state === 'object' && state !== null ? { differential, upstream: state } : { differential };
+}
+
+/** The points that are read so far, where not all of them are. */
+const readOf = ({ lines }: SolvedTraverse): object[] =>
+  lines.flatMap(({ points }, line) =>
+    points.flatMap(({ number, differential_Pa, velocity_m_s }) =>
+      velocity_m_s === undefined ? [] : [{ line: line + 1, number, differential_Pa, velocity_m_s }],
+    ),
+  );
