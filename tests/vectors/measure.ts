@@ -8,6 +8,7 @@ import { subjects as gasViscosity } from './subjects/gas-viscosity.ts';
 import { subjects as liquid } from './subjects/liquid.ts';
 import { subjects as otherGas } from './subjects/other-gas.ts';
 import { subjects as solve } from './subjects/solve.ts';
+import { subjects as traverse } from './subjects/traverse.ts';
 import { subjects as units } from './subjects/units.ts';
 import { subjects as water } from './subjects/water.ts';
 
@@ -59,6 +60,7 @@ const subjects: Readonly<Record<string, (given: Given) => Record<string, number>
   ...liquid,
   ...otherGas,
   ...solve,
+  ...traverse,
   ...units,
   ...water,
 };
