@@ -17,7 +17,6 @@ import { orificeLengths } from './shared/straight-orifice.table.ts';
 
 const iso = cite('ISO 5167-2:2022');
 const iso2003 = cite('ISO 5167-2:2003');
-const inch = 0.0254; // m; 1 in exactly
 const smallPipe = 0.07112; // m; below it the small-pipe term applies, Formula (4)
 
 /** Constants of Formula (4), apart from beta and Re_D. */

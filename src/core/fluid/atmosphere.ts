@@ -3,6 +3,7 @@
  * height. Suggestions only: the weather moves the pressure by 3 %, the ground gravity by up to 0.02 %.
  * Standard: ISO 2533:1975 (ICAO Doc 7488) to 47 km; GRS 80 (Moritz, J. Geodesy 74 (2000) 128). Symbols: theirs; SI.
  */
+import { standardGravity as g0, standardAtmosphere as seaLevel } from '../quantity/constants.ts';
 import type {
   AbsolutePressure,
   Acceleration,
@@ -27,7 +28,7 @@ interface Layer {
   readonly lapse: number; // K/m
 }
 
-/** Layers from -5 km to 47 km of geopotential altitude; pressure is 101325 Pa at 0. ISO 2533:1975, Table 4. */
+/** Layers from -5 km to 47 km of geopotential altitude; pressure is that of the standard atmosphere at 0. ISO 2533:1975, Table 4. */
 const layers: readonly Layer[] = [
   { H: -5000, T: 320.65, lapse: -0.0065 }, // Table 4
   { H: 11000, T: 216.65, lapse: 0 },
@@ -35,7 +36,6 @@ const layers: readonly Layer[] = [
   { H: 32000, T: 228.65, lapse: 0.0028 }, // Table 4
 ];
 const highest = 47000; // m
-const g0 = 9.80665; // m/s2, standard gravity
 const R = 287.05287; // J/(kg.K), ISO 2533:1975, 2.1
 const radius = 6356766; // m, ISO 2533:1975, 2.3
 
@@ -61,7 +61,7 @@ export function standardAtmosphere(z: number, field: string): Outcome<StandardAi
 
 /** Through the layers from sea level, up or down. ISO 2533:1975, 2.5. */
 function climb(H: number): { readonly pressure: number; readonly temperature: number } {
-  let pressure = 101325; // Pa at H = 0
+  let pressure: number = seaLevel; // at H = 0
   let [from, temperature] = [0, 288.15]; // m, K at H = 0
   for (const [at, { lapse }] of layers.entries()) {
     const to = Math.min(H, layers[at + 1]?.H ?? highest);

@@ -1,5 +1,6 @@
 /** The figures of a sheet: fluid, pipe and element as rows, and the table of the flows. */
 import type { DutyName, Project } from '../../core/document/project.ts';
+import { standardAtmosphere } from '../../core/quantity/constants.ts';
 import type { Solved } from '../../core/result/record.ts';
 import * as words from '../words/sheet.ts';
 import type { Context } from './context.ts';
@@ -18,7 +19,6 @@ export interface DutyTable {
 }
 
 const columns = Object.keys(words.dutyHeads) as DutyColumn[];
-const standardAtmosphere = 101_325; // Pa; the default of the file format
 
 /** The fluid and its state; a gauge pressure is followed by the absolute one and the atmosphere it stands on. */
 export function fluidRows(

@@ -1,11 +1,12 @@
 /** Thermal growth of pipe and element between the temperature they were measured at and the line temperature. */
+import { celsius, kelvin } from '../../quantity/constants.ts';
 import type { Length, Temperature } from '../../quantity/kinds.ts';
 import type { Source } from '../../quantity/source.ts';
 import type { Given, Working } from '../../quantity/working.ts';
 import { along } from './bracket.ts';
 import { type Material, materials } from './materials.table.ts';
 
-const reference = 293.15; // K; the mean coefficients count from 20 degC
+const reference = kelvin(20); // K; the mean coefficients count from 20 degC
 
 /** The keys that the file may write. */
 export const materialKeys: readonly string[] = materials.map(({ key }) => key);
@@ -15,11 +16,11 @@ export const materialOf = (key: string): Material | undefined => materials.find(
 
 /** Mean expansion from 20 degC to `temperature`, 1/K; linear between the figures of the table, held outside. */
 export const meanExpansion = (material: Material, temperature: Temperature): number =>
-  along(material.celsius, material.expansion, temperature - 273.15) * 1e-6;
+  along(material.celsius, material.expansion, celsius(temperature)) * 1e-6;
 
 /** Whether the table reaches `temperature`; it counts from 20 degC, so that and its nearest figure are always reached. */
 export const expansionKnown = (material: Material, temperature: Temperature): boolean => {
-  const at = temperature - 273.15;
+  const at = celsius(temperature);
   const [first, last] = [material.celsius[0] as number, material.celsius[material.celsius.length - 1] as number];
   return at >= Math.min(first, 20) && at <= Math.max(last, 20);
 };

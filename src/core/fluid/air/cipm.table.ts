@@ -2,7 +2,9 @@
  * Constants of the formula for the density of moist air. Source: Picard, Davis, Glaeser and Fujii, Metrologia 45 (2008)
  * 149 (CIPM-2007), Appendix A.1; seen in several open copies that agree. R and molar masses as used there.
  */
-export const R = 8.314472; // J/(mol.K)
+import { molarGasConstant } from '../../quantity/constants.ts';
+
+export const R = molarGasConstant.codata2002; // J/(mol.K)
 export const waterMolarMass = 18.01528e-3; // kg/mol
 export const dryMolarMass = { atReference: 28.96546e-3, perFraction: 12.011e-3, reference: 4e-4 } as const; // kg/mol
 /** Saturation pressure exp(A T2 + B T + C + D/T), Pa. */

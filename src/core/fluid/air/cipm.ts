@@ -3,6 +3,7 @@
  * Standard: CIPM-2007 (Metrologia 45 (2008) 149), Eq. 1 to 3 and Appendix A.1: 600 hPa to 1100 hPa, 15 degC to 27 degC.
  * Symbols: those of the paper; SI, t in degC, mole fraction of carbon dioxide 0.0004.
  */
+import { celsius } from '../../quantity/constants.ts';
 import type { AbsolutePressure, Density, Temperature } from '../../quantity/kinds.ts';
 import type { StatedUncertainty } from '../contract.ts';
 import { dryMolarMass, enhancement, R, saturation, virial, waterMolarMass } from './cipm.table.ts';
@@ -20,8 +21,6 @@ export const stated: StatedUncertainty = {
 export const holds = (p: number, T: number): boolean =>
   p >= range.pressure.min && p <= range.pressure.max && T >= range.temperature.min && T <= range.temperature.max;
 
-const zero = 273.15; // K, 0 degC
-
 /** Saturation pressure of water vapour over liquid water, Pa. CIPM-2007, Eq. A1.1. */
 export function saturationPressure(T: Temperature): AbsolutePressure {
   const { A, B, C, D } = saturation;
@@ -30,12 +29,12 @@ export function saturationPressure(T: Temperature): AbsolutePressure {
 
 /** Enhancement factor: what the air adds to the vapour that stands over water. CIPM-2007, Eq. A1.2. */
 export const enhancementFactor = (p: AbsolutePressure, T: Temperature): number =>
-  enhancement.alpha + enhancement.beta * p + enhancement.gamma * (T - zero) ** 2; // Eq. A1.2
+  enhancement.alpha + enhancement.beta * p + enhancement.gamma * celsius(T) ** 2; // Eq. A1.2
 
 /** Compressibility factor at a mole fraction of water vapour. CIPM-2007, Eq. A1.4. */
 export function compressibility(p: AbsolutePressure, T: Temperature, xv: number): number {
   const { a0, a1, a2, b0, b1, c0, c1, d, e } = virial;
-  const t = T - zero;
+  const t = celsius(T);
   const second = a0 + a1 * t + a2 * t ** 2 + (b0 + b1 * t) * xv + (c0 + c1 * t) * xv ** 2;
   return 1 - (p / T) * second + (p / T) ** 2 * (d + e * xv ** 2); // Eq. A1.4
 }

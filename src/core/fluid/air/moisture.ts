@@ -3,6 +3,7 @@
  * the air itself. Standard: CIPM-2007, Eq. 3 and A1.3 (x_v = h f p_s / p); WMO-No. 8, Annex 4.B (psychrometer).
  * Symbols: h relative humidity, t_d dew point, t_w wet bulb, f enhancement factor, p_s saturation pressure; SI.
  */
+import { zeroCelsius as freezing } from '../../quantity/constants.ts';
 import type { AbsolutePressure, Temperature } from '../../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../../quantity/outcome.ts';
 import type { Source } from '../../quantity/source.ts';
@@ -31,7 +32,6 @@ export interface Vapour {
 /** Temperatures at which air can be said to be so and so humid, K. WMO-No. 8: from -50 degC, over liquid water. */
 const humidRange = { min: 223.15, max: criticalTemperature };
 const lowestDewPoint = enhancementRange.temperature.min; // K, 173.15
-const freezing = 273.15; // K
 
 export const psychrometerSource: Source = { clause: 'WMO-No. 8, Annex 4.B, aspirated psychrometer', seen: 'memory' };
 /** Where that coefficient was found, Pa: about atmospheric pressure (practice). */

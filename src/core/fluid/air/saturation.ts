@@ -3,6 +3,7 @@
  * Standard: IAPWS R7-97(2012), Eq. 30 (liquid water), IAPWS R14-08(2011), Eq. 6 (ice), CIPM-2007 (its range, and water
  * below its freezing point). Symbols: p in Pa, T in K, t in degC, e saturation pressure of pure water.
  */
+import { zeroCelsius as zero } from '../../quantity/constants.ts';
 import type { AbsolutePressure, Temperature } from '../../quantity/kinds.ts';
 import type { Source } from '../../quantity/source.ts';
 import { saturationPressure as overLiquid } from '../if97/saturation.ts';
@@ -24,8 +25,6 @@ const cipmF = second('CIPM-2007, Metrologia 45 (2008) 149, Eq. A1.2');
 const if97 = second('IAPWS R7-97(2012), Eq. 30');
 const ice = second('IAPWS R14-08(2011), Eq. 6');
 const hardy: Source = { clause: 'Hardy 1998 (ITS-90), after Greenspan, J. Res. NBS 80A (1976) 41', seen: 'memory' };
-
-const zero = 273.15; // K, 0 degC
 
 /** Where the enhancement factor is known. Greenspan 1976: -100 degC to 100 degC, to 2 MPa. K and Pa. */
 export const enhancementRange = { temperature: { min: 173.15, max: 373.15 }, pressure: { max: 2e6 } } as const;

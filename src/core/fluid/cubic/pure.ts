@@ -2,10 +2,10 @@
  * One gas by the cubic equation of Peng and Robinson: density, heat capacities, speed of sound.
  * Standard: none; Peng and Robinson, Ind. Eng. Chem. Fundam. 15 (1976) 59. Symbols: those of the paper; SI, molar.
  */
+import { molarGasConstant } from '../../quantity/constants.ts';
 import { type CubicComponent, cubicPhase, cubicState } from './peng-robinson.ts';
 
-/** Molar gas constant, J/(mol.K). Source: SI Brochure, 9th edition, N_A k, exact. */
-export const R = 8.31446261815324; // exact
+const R = molarGasConstant.exact;
 
 export interface PureGas {
   readonly molarVolume: number; // m3/mol

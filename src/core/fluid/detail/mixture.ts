@@ -3,14 +3,14 @@
  * same form as those of GERG-2008, so that one isotherm serves both.
  * Standard: AGA Report No. 8, Part 1:2017 (DETAIL); ISO 12213-2:2006. Symbols: those of the report; SI.
  */
+import { molarGasConstant } from '../../quantity/constants.ts';
 import type { Mixture } from '../helmholtz/mixture.ts';
 import { gathered, plain, slotSet, type Term } from '../helmholtz/slots.ts';
 import * as binary from './binary.table.ts';
 import { components } from './components.table.ts';
 import { type DetailTerm, terms } from './terms.table.ts';
 
-/** Molar gas constant of the equation, J/(mol.K). Source: AGA Report No. 8, Part 1; the later exact value is not for it. */
-export const R = 8.31451;
+const R = molarGasConstant.codata1986; // J/(mol.K), that of the equation: AGA Report No. 8, Part 1
 
 const size = components.length;
 const lastVirial = 18; // terms 1 to 18 make the second virial coefficient

@@ -3,6 +3,7 @@
  * ethane, propane. Standard: none; the papers named in pure.table.ts. Symbols: those of the papers; T in K, molar
  * density rho in mol/dm3, answers in uPa.s.
  */
+import { molarGasConstant } from '../../quantity/constants.ts';
 import {
   ethane as c2h6,
   propane as c3h8,
@@ -44,7 +45,7 @@ export const carbonDioxide: Correlation = (T, rho) => {
   const lower = a0 + a1 * T6 + a2 * Math.exp(a3 * T3) + (a4 + a5 * T3) / Math.exp(T3) + a6 * Math.sqrt(T);
   const eta0 = (1005.5 * Math.sqrt(T)) / lower; // dilute gas
   const [Tt, rhot, M] = [216.592, 1178.53, 0.0440098]; // K, kg/m3 and kg/mol: triple point of the liquid
-  const etat = (rhot ** (2 / 3) * Math.sqrt(8.314472 * Tt)) / (M ** (1 / 6) * 84446887.43579945); // Pa.s
+  const etat = (rhot ** (2 / 3) * Math.sqrt(molarGasConstant.codata2002 * Tt)) / (M ** (1 / 6) * 84446887.43579945); // Pa.s
   const [Tr, rr] = [T / Tt, (rho * 1e3 * M) / rhot];
   const residual = etat * (co2.c1 * Tr * rr ** 3 + (rr ** 2 + rr ** co2.gamma) / (Tr - co2.c2)); // residual
   return eta0 * (1 + initialSlope(co2.sigma, T / co2.epsilon) * rho) + 1e6 * residual;

@@ -3,6 +3,7 @@
  * smooth, and the mixture of dilute gases alone at no density.
  * Standard: none; Wilke, J. Chem. Phys. 18 (1950) 517, and Dean and Stiel, AIChE J. 11 (1965) 526. Symbols: theirs.
  */
+import { standardAtmosphere } from '../../quantity/constants.ts';
 import type { DynamicViscosity, Temperature } from '../../quantity/kinds.ts';
 
 /** What the scheme asks of one gas. The dilute gas is C1 T^C2 / (1 + C3/T + C4/T2) Pa.s between two temperatures. */
@@ -49,7 +50,6 @@ function mixed(shares: readonly Share[], T: number): number {
   }, 0);
 }
 
-const atmosphere = 0.101325; // MPa, standard atmosphere
 const cP = 1e-3; // Pa.s
 
 /** What the density adds, with the pseudocritical rules of the same paper. Dean and Stiel 1965. */
@@ -57,7 +57,7 @@ function denseResidual(shares: readonly Share[], rho: number): number {
   const rr = reducedDensity(shares, rho);
   const Tc = average(shares, ({ Tc }) => Tc);
   const M = average(shares, ({ M }) => M);
-  const pc = average(shares, ({ pc }) => pc) / atmosphere;
+  const pc = average(shares, ({ pc }) => pc) / (standardAtmosphere / 1e6); // MPa in atmospheres
   const xi = Tc ** (1 / 6) / (Math.sqrt(M) * pc ** (2 / 3));
   return (10.8e-5 * cP * (Math.exp(1.439 * rr) - Math.exp(-1.111 * rr ** 1.858))) / xi; // 10.8e-5 cP
 }

@@ -2,17 +2,20 @@
  * Gases that GERG-2008 does not hold, each alone, by the cubic equation of Peng and Robinson, its error shown.
  * Standard: none; Peng and Robinson, Ind. Eng. Chem. Fundam. 15 (1976) 59. Symbols: p, T, ρ, κ, w; SI.
  */
+import { molarGasConstant } from '../../quantity/constants.ts';
 import type { AbsolutePressure, Density, MolarMass, Temperature } from '../../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../../quantity/outcome.ts';
 import type { Source } from '../../quantity/source.ts';
 import type { Caution, FluidState, StatedUncertainty } from '../contract.ts';
-import { pureGas, R } from '../cubic/pure.ts';
+import { pureGas } from '../cubic/pure.ts';
 import { schemeViscosity, type ViscousGas } from '../gas-viscosity/scheme.ts';
 import { schemeUncertainty, viscosityCautions } from '../gas-viscosity/viscosity.ts';
 import { type Conditions, plainName, type State } from '../model.ts';
 import { type OtherGas, otherGases } from './other-gas.table.ts';
 import { cubic, type OtherFigures, otherSources, otherWorking } from './other-working.ts';
 import type { BaseGas } from './working.ts';
+
+const R = molarGasConstant.exact;
 
 /** Every spelling of the gases, under its plain name, and the key it stands for. */
 export const otherGasNames: ReadonlyMap<string, string> = new Map(

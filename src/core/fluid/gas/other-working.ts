@@ -1,8 +1,8 @@
 /** Where the figures of a gas by the cubic equation come from, and their working. */
+import { molarGasConstant } from '../../quantity/constants.ts';
 import type { Source } from '../../quantity/source.ts';
 import type { Given, Working } from '../../quantity/working.ts';
 import type { FluidState } from '../contract.ts';
-import { R } from '../cubic/pure.ts';
 import { schemeUncertainty } from '../gas-viscosity/viscosity.ts';
 import type { State } from '../model.ts';
 import type { BaseGas, GasFigures } from './working.ts';
@@ -28,7 +28,7 @@ export function otherSources({ ideal }: BaseGas): FluidState['sources'] {
 }
 
 const named = (symbol: string, value: number, unit: string, words: string): Given => ({ symbol, value, unit, words });
-const gasConstant = named('R', R, 'J/(mol.K)', 'molar-gas-constant');
+const gasConstant = named('R', molarGasConstant.exact, 'J/(mol.K)', 'molar-gas-constant');
 
 /** The working of each figure. */
 export function otherWorking(figures: OtherFigures, atBase: BaseGas, base: State): readonly Working[] {

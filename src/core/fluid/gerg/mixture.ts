@@ -2,6 +2,7 @@
  * What GERG-2008 makes of a composition alone: molar mass, reducing temperature and density, factors of the terms.
  * Standard: ISO 20765-2:2015 (GERG-2008). Symbols: x mole fraction, r reducing; SI.
  */
+import { molarGasConstant } from '../../quantity/constants.ts';
 import { components } from '../helmholtz/components.table.ts';
 import { molarMasses } from '../helmholtz/components.ts';
 import type { Mixture } from '../helmholtz/mixture.ts';
@@ -10,7 +11,7 @@ import { reducing } from './reducing.table.ts';
 import { departures, gergSlots, pureShares, type Share } from './terms.ts';
 
 /** Molar gas constant of the equation, J/(mol.K). Source: Kunz and Wagner 2012; the later exact value is not for it. */
-export const R = 8.314472;
+export const R = molarGasConstant.codata2002;
 
 const size = components.length;
 const criticalTemperature = Float64Array.from(components, ({ Tc }) => Tc);

@@ -2,12 +2,13 @@
  * Properties of a mixture at density and temperature, the ideal gas always that of GERG-2008.
  * Standard: ISO 20765-2:2015 (GERG-2008). Symbols: α_ij = δ^i τ^j ∂^(i+j)α/∂δ^i∂τ^j of the residual part; SI, molar.
  */
+import { molarGasConstant } from '../../quantity/constants.ts';
 import { components } from './components.table.ts';
 import { coefficientsOf, expand, type Isotherm } from './isotherm.ts';
 import type { Mixture } from './mixture.ts';
 
 /** Gas constant that the ideal parts were fitted with, J/(mol.K). Source: Kunz and Wagner 2012. */
-export const idealR = 8.31451;
+export const idealR = molarGasConstant.codata1986;
 
 /** Everything that follows from density and temperature. */
 export interface GasProperties {

@@ -51,13 +51,5 @@ export interface Liquid {
 /** Practice: a smooth formulation may be continued this far beyond its range, with a finding. */
 export const furthestBeyond = 10; // K
 
-/** The pressure that liquids are measured at where nothing else is said, Pa. */
-export const atmospheric = 101325;
-
-export const celsius = (T: number): number => T - 273.15; // degC, exact
-
-/** A range in degC as one in K. */
-export const kelvin = (t: number): number => t + 273.15; // K, exact
-
 /** Density by the linear bulk modulus: ρ = ρ_s (1 + (p - p_s)/K). Custom of the trade. */
 export const compressed = (rho: number, p: number, ps: number, K: number): number => rho * (1 + (p - ps) / K);

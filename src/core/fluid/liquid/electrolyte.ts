@@ -3,10 +3,11 @@
  * Standard: none; Laliberté and Cooper 2004 (density), Laliberté 2007 and 2009 (viscosity). Symbols: those of the papers;
  * t in degC, w mass fractions, viscosity inside in mPa.s.
  */
+import { celsius, kelvin } from '../../quantity/constants.ts';
 import { type Outcome, ok } from '../../quantity/outcome.ts';
 import type { Source } from '../../quantity/source.ts';
 import { aqueousModulus, concentrationWithin, waterBound } from './aqueous.ts';
-import { celsius, furthestBeyond, kelvin, type Liquid, type Property } from './contract.ts';
+import { furthestBeyond, type Liquid, type Property } from './contract.ts';
 import { solutes } from './electrolyte.table.ts';
 
 const densityBy: Source = { clause: 'Laliberté and Cooper, J. Chem. Eng. Data 49 (2004) 1141', seen: 'second-hand' };

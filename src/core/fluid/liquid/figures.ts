@@ -1,8 +1,9 @@
 /** The figures of a settled liquid at its state: density under pressure, viscosity, vapour pressure, base density. */
+import { standardAtmosphere as atmospheric } from '../../quantity/constants.ts';
 import type { AbsolutePressure, Density, DynamicViscosity } from '../../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../../quantity/outcome.ts';
 import type { Conditions, Parsed, State } from '../model.ts';
-import { atmospheric, compressed, type Liquid, type Property } from './contract.ts';
+import { compressed, type Liquid, type Property } from './contract.ts';
 import type { LiquidFigures } from './working.ts';
 
 /** Practice: this far below its vapour pressure a liquid may still be said to be one, for the doubt in both figures. */

@@ -4,10 +4,11 @@
  */
 
 import { interpolate, type Point } from '../../numeric/interpolate.ts';
+import { celsius, kelvin } from '../../quantity/constants.ts';
 import { fail, type Outcome, ok } from '../../quantity/outcome.ts';
 import type { Source } from '../../quantity/source.ts';
 import { aqueousModulus, concentrationWithin, waterBound } from './aqueous.ts';
-import { celsius, kelvin, type Liquid, type Property } from './contract.ts';
+import type { Liquid, Property } from './contract.ts';
 import { glycols } from './inhibited-glycol.table.ts';
 
 const source: Source = {

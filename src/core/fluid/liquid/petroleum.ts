@@ -3,11 +3,17 @@
  * Standard: API MPMS Chapter 11.1-2004 (ASTM D1250-04, IP 200/04), 11.1.6; ASTM D341 for viscosity. Symbols: those of the
  * standard; temperatures in degF, pressure in psi above the atmosphere, SI at the outside.
  */
+import {
+  standardAtmosphere as atmospheric,
+  celsius,
+  kelvin,
+  poundPerSquareInch as psi,
+} from '../../quantity/constants.ts';
 import { fail, type Outcome, ok } from '../../quantity/outcome.ts';
 import type { Source } from '../../quantity/source.ts';
 import type { Working } from '../../quantity/working.ts';
 import type { Parsed } from '../model.ts';
-import { atmospheric, celsius, furthestBeyond, type Liquid, type Property } from './contract.ts';
+import { furthestBeyond, type Liquid, type Property } from './contract.ts';
 import { baseTemperature68, delta60, groups, shift, waterDensity60 } from './petroleum.table.ts';
 import { orderedRows, waltherPoints } from './table.ts';
 import { walther } from './walther.ts';
@@ -22,11 +28,10 @@ export const products = ['crude-oil', 'refined-product', 'lubricating-oil'] as c
 export type Product = (typeof products)[number];
 
 const fahrenheit = (T: number): number => celsius(T) * 1.8 + 32; // degF, exact
-const kelvinOf = (t: number): number => (t - 32) / 1.8 + 273.15; // K, exact
+const kelvinOf = (t: number): number => kelvin((t - 32) / 1.8); // K, exact
 const range = { min: kelvinOf(-58), max: kelvinOf(302) }; // 11.1.3, -58 degF to 302 degF
-const psi = 6894.757293168; // Pa; exact definition of the inch and the pound, NIST SP 811
 const highestPressure = atmospheric + 1500 * psi; // 11.1.3, 1500 psig
-const fifteen = 288.15; // K, the metric base temperature
+const fifteen = kelvin(15); // K, the metric base temperature
 /** Oils are drawn along the line of D341 this far beyond the stated points (practice), with a finding. */
 const furthestAlong = 60; // K
 

@@ -3,10 +3,11 @@
  * Standard: none; Melinder, Properties of Secondary Working Fluids for Indirect Systems, IIR 2010. Symbols: those of the
  * source; x in mass per cent, t in degC, SI at the outside.
  */
+import { celsius, kelvin } from '../../quantity/constants.ts';
 import { type Outcome, ok } from '../../quantity/outcome.ts';
 import type { Source } from '../../quantity/source.ts';
 import { aqueousModulus, concentrationWithin, waterBound } from './aqueous.ts';
-import { celsius, furthestBeyond, kelvin, type Liquid, type Property } from './contract.ts';
+import { furthestBeyond, type Liquid, type Property } from './contract.ts';
 import { exponents, mixtures } from './secondary.table.ts';
 
 const source: Source = {

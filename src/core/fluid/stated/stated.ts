@@ -2,6 +2,7 @@
  * A fluid whose figures the user states. With an isentropic exponent it is a gas, without one a liquid.
  * Standard: none; symbols of ISO 5167-1, clause 4; SI.
  */
+import { molarGasConstant } from '../../quantity/constants.ts';
 import type {
   AbsolutePressure,
   Density,
@@ -12,7 +13,7 @@ import type {
 import { fail, type Outcome, ok } from '../../quantity/outcome.ts';
 import type { FluidState } from '../contract.ts';
 import type { Conditions, FluidModel, Parsed } from '../model.ts';
-import { molarGasConstant, type StatedFigures, statedSources, statedWorking } from './working.ts';
+import { type StatedFigures, statedSources, statedWorking } from './working.ts';
 
 /** What an isentropic exponent can be (practice): gases near their critical point leave 1 to 2 on either side. */
 const exponentBounds = { min: 0.5, max: 10 } as const;
@@ -58,7 +59,7 @@ function figuresOf(parsed: Parsed, conditions: Conditions, exponent?: number, fa
   const M = parsed.quantities.molarMass?.si as MolarMass | undefined;
   const pv = parsed.quantities.vapourPressure?.si as AbsolutePressure | undefined;
   const statedBase = parsed.quantities.baseDensity?.si as Density | undefined;
-  const R = molarGasConstant;
+  const R = molarGasConstant.exact;
   const gas = exponent !== undefined;
   const Z = factor ?? (gas && M !== undefined ? (p * M) / (rho * R * T) : undefined); // Z = p M / (ρ R T)
   const followingBase = gas && M !== undefined ? (base.pressure * M) / (R * base.temperature) : undefined; // Z_b = 1

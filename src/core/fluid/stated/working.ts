@@ -1,4 +1,5 @@
 /** The figures of a stated fluid, where they come from, and their working. */
+import { molarGasConstant } from '../../quantity/constants.ts';
 import type {
   AbsolutePressure,
   Density,
@@ -10,9 +11,6 @@ import type { Source } from '../../quantity/source.ts';
 import type { Given, Working } from '../../quantity/working.ts';
 import type { FluidState } from '../contract.ts';
 import type { State } from '../model.ts';
-
-/** Molar gas constant, J/(mol.K). Source: SI Brochure, 9th edition, N_A k, exact. */
-export const molarGasConstant = 8.31446261815324; // J/(mol.K), exact
 
 /** Every figure of a stated fluid, those that were stated and those that follow. */
 export interface StatedFigures {
@@ -73,7 +71,7 @@ const named = (symbol: string, value: number, unit: string, words: string): Give
 const densityAt1 = (density: number) => named('ρ_1', density, 'kg/m3', 'density');
 const pressureAt1 = (pressure: number) => named('p_1', pressure, 'Pa(a)', 'pressure-upstream');
 const molarMassOf = (M: number) => named('M', M, 'kg/mol', 'molar-mass');
-const gasConstant = named('R', molarGasConstant, 'J/(mol.K)', 'molar-gas-constant');
+const gasConstant = named('R', molarGasConstant.exact, 'J/(mol.K)', 'molar-gas-constant');
 
 function viscosityWorking({ viscosity, kinematicViscosity: nu, density }: StatedFigures): Working {
   if (nu === undefined) return byHand('viscosity', 'μ_1', viscosity, 'Pa.s');
