@@ -41,6 +41,7 @@ export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) 
     setInclude(include.includes(kind) ? include.filter((one) => one !== kind) : [...include, kind]);
   return (
     <div className={styles.place}>
+      <h1 className={styles.title}>Sheets</h1>
       <div className={styles.bar}>
         <Choices legend="Paper" name="paper" choices={PAPERS} chosen={paper} choose={setPaper} />
         <Choices
