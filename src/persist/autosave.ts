@@ -31,6 +31,8 @@ export interface Autosave {
   changed(): void;
   /** Writes what is not yet kept, at once; whether all is kept then. */
   flush(durability?: Durability): Promise<boolean>;
+  /** Lays what is not yet kept beside the project, within the call: the page may be gone at once. */
+  leave(): void;
   /** What is being kept, and as which revision. */
   at(): { readonly id: string; readonly revision: number } | undefined;
 }
@@ -72,6 +74,11 @@ export function createAutosave(options: AutosaveOptions): Autosave {
       if (course.failures === 0) rest(course);
     },
     flush: (durability = 'relaxed') => flush(course, durability),
+    leave: () => {
+      const { target, changes, kept } = course;
+      if (target !== undefined && changes !== kept)
+        options.port.leave({ id: target.id, ...options.draft() }, target.revision);
+    },
     at: () => (course.target === undefined ? undefined : { ...course.target }),
   };
 }
@@ -144,10 +151,15 @@ function failed(course: Course, fault: unknown): false {
   return false;
 }
 
-/** Flushes when the page is hidden, the last moment a browser promises; gives back how to end that. */
-export function flushWhenHidden(page: Document, autosave: Pick<Autosave, 'flush'>): () => void {
+/**
+ * Leaves and flushes when the page is hidden, the last moment a browser promises; gives back how to end that. The flush
+ * asks and waits for answers, which a page that is closed does not get.
+ */
+export function flushWhenHidden(page: Document, autosave: Pick<Autosave, 'flush' | 'leave'>): () => void {
   const hidden = (): void => {
-    if (page.visibilityState === 'hidden') void autosave.flush();
+    if (page.visibilityState !== 'hidden') return;
+    autosave.leave();
+    void autosave.flush();
   };
   page.addEventListener('visibilitychange', hidden);
   return () => page.removeEventListener('visibilitychange', hidden);

@@ -1,5 +1,6 @@
 /** The port in the browser's database. A write is kept when its transaction is complete, not before. */
 import { type DBSchema, type IDBPDatabase, type IDBPTransaction, openDB } from 'idb';
+import { hashOf } from './hash.ts';
 import type { Draft, Durability, KeptRecord, Port, Writing } from './port.ts';
 import {
   entryOf,
@@ -43,10 +44,14 @@ export async function openDatabase(options: DatabaseOptions = {}): Promise<Port>
       const [ids, stored] = await Promise.all([transaction.store.getAllKeys(), transaction.store.getAll()]);
       return newestFirst(await Promise.all(ids.map((id, index) => entryOf(stored[index], id))));
     },
-    read: async (id) => readingOf(await (await connect()).get('projects', id)),
+    read: async (id) => readingOf(await takeUp(await connect(), id, now())),
     write: async (draft, expected, durability) => {
-      const record = await unnumbered(draft, durability, now());
+      const record = unnumbered(draft, durability, now());
       return write(await connect(), record, expected, durability, now());
+    },
+    leave: (draft, expected) => {
+      const last = { ...unnumbered(draft, 'relaxed', now()), revision: expected + 1 };
+      layBeside(connect.current(), last);
     },
     versions: async (id) => {
       const stored = await (await connect()).getAll('versions', allOf(id));
@@ -71,9 +76,20 @@ export async function openDatabase(options: DatabaseOptions = {}): Promise<Port>
   };
 }
 
+interface Connect {
+  (): Promise<IDBPDatabase<Shelves>>;
+  /** The connection if it is open now. */
+  current(): IDBPDatabase<Shelves> | undefined;
+}
+
 /** One connection, opened again after the browser has ended it. */
-function createConnect({ onBlocked, onWanted }: DatabaseOptions): () => Promise<IDBPDatabase<Shelves>> {
+function createConnect({ onBlocked, onWanted }: DatabaseOptions): Connect {
   let connection: Promise<IDBPDatabase<Shelves>> | undefined;
+  let current: IDBPDatabase<Shelves> | undefined;
+  const ended = (): void => {
+    connection = undefined;
+    current = undefined;
+  };
   const open = (): Promise<IDBPDatabase<Shelves>> =>
     openDB<Shelves>(DATABASE, DATABASE_VERSION, {
       upgrade: (database) => {
@@ -85,20 +101,23 @@ function createConnect({ onBlocked, onWanted }: DatabaseOptions): () => Promise<
         const database = event.target as IDBDatabase;
         void (onWanted?.() ?? Promise.resolve()).finally(() => {
           database.close();
-          connection = undefined;
+          ended();
         });
       },
-      terminated: () => {
-        connection = undefined;
-      },
+      terminated: ended,
     });
-  return () => {
-    connection ??= open().catch((cause: unknown) => {
+  const keep = (database: IDBPDatabase<Shelves>): IDBPDatabase<Shelves> => {
+    current = database;
+    return database;
+  };
+  const connect = (): Promise<IDBPDatabase<Shelves>> => {
+    connection ??= open().then(keep, (cause: unknown) => {
       connection = undefined;
       throw cause;
     });
     return connection;
   };
+  return Object.assign(connect, { current: () => current });
 }
 
 const allOf = (id: string): IDBKeyRange => IDBKeyRange.bound([id, 0], [id, Number.POSITIVE_INFINITY]);
@@ -128,9 +147,46 @@ async function replace(
   const stored: unknown = await projects.get(record.id);
   const verdict = verdictOn(stored, record satisfies Draft, expected);
   if (!verdict.ok) return verdict;
+  await transaction.objectStore('versions').delete([record.id, verdict.revision]); // a last word, now written itself
   if (isRecord(stored)) await setAside(transaction, stored, now);
   await projects.put({ ...record, revision: verdict.revision });
   return verdict;
+}
+
+/**
+ * The last word of a page, among the versions under the revision it would have become. Committed without an answer: of
+ * a page that is being closed, a browser finishes only what is already asked for.
+ */
+function layBeside(database: IDBPDatabase<Shelves> | undefined, last: KeptRecord): void {
+  try {
+    const transaction = database?.transaction('versions', 'readwrite');
+    if (transaction === undefined) return;
+    const put = transaction.store.put(last);
+    transaction.commit();
+    Promise.all([put, transaction.done]).catch(() => undefined);
+  } catch {
+    // The connection is closing; the usual write says so if the page lives on.
+  }
+}
+
+/** What is stored, after a last word that follows on it has taken its place. */
+async function takeUp(database: IDBPDatabase<Shelves>, id: string, now: number): Promise<unknown> {
+  const transaction = database.transaction(['projects', 'versions'], 'readwrite');
+  const [found] = await settled(transaction, [replaceByLast(transaction, id, now)]);
+  await transaction.done;
+  return found;
+}
+
+async function replaceByLast(transaction: Both, id: string, now: number): Promise<unknown> {
+  const [projects, versions] = [transaction.objectStore('projects'), transaction.objectStore('versions')];
+  const stored: unknown = await projects.get(id);
+  if (!isRecord(stored)) return stored;
+  const last: unknown = await versions.get([id, stored.revision + 1]);
+  if (!isRecord(last) || hashOf(last.text) !== last.hash || !verdictOn(stored, last, stored.revision).ok) return stored;
+  await versions.delete([id, last.revision]);
+  await setAside(transaction, stored, now);
+  await projects.put(last);
+  return last;
 }
 
 async function setAside(transaction: Both, stored: KeptRecord, now: number): Promise<void> {

@@ -25,7 +25,7 @@ export function createMemory(cause: string, now: () => number = Date.now): Port 
     list: async () => newestFirst(await Promise.all([...projects].map(([id, stored]) => entryOf(stored, id)))),
     read: async (id) => readingOf(projects.get(id)),
     write: async (draft, expected, durability) => {
-      const record = await unnumbered(draft, durability, now());
+      const record = unnumbered(draft, durability, now());
       const stored = projects.get(draft.id);
       const verdict = verdictOn(stored, draft, expected);
       if (!verdict.ok) return verdict;
@@ -33,6 +33,7 @@ export function createMemory(cause: string, now: () => number = Date.now): Port 
       projects.set(draft.id, { ...record, revision: verdict.revision });
       return verdict;
     },
+    leave: () => undefined, // nothing outlives the page
     versions: async (id) => soundOnes(versions.get(id) ?? []),
     remove: async (id) => {
       projects.delete(id);

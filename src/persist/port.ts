@@ -47,6 +47,11 @@ export interface Port {
   read(id: string): Promise<Reading>;
   /** Writes if the stored revision is `expected` (0: there is none yet), in one transaction that has completed. */
   write(draft: Draft, expected: number, durability: Durability): Promise<Writing>;
+  /**
+   * Lays `draft` beside the project in one step that waits for nothing, for a page that may be gone at once. `read`
+   * takes it up if nobody has written since `expected`.
+   */
+  leave(draft: Draft, expected: number): void;
   /** Earlier versions, the newest first, at most ten; damaged ones are left out. */
   versions(id: string): Promise<readonly KeptRecord[]>;
   /** Removes the project with its versions, all or nothing. */

@@ -38,17 +38,13 @@ export async function soundOnes(stored: readonly unknown[]): Promise<readonly Ke
   return stored.filter((one, index): one is KeptRecord => sound[index] === true && isRecord(one));
 }
 
-/** Everything of a record but its revision, which only the transaction knows. Hashing cannot wait inside one. */
-export const unnumbered = async (
-  draft: Draft,
-  durability: Durability,
-  savedAt: number,
-): Promise<Omit<KeptRecord, 'revision'>> => ({
+/** Everything of a record but its revision, which only the transaction knows. */
+export const unnumbered = (draft: Draft, durability: Durability, savedAt: number): Omit<KeptRecord, 'revision'> => ({
   id: draft.id,
   title: draft.title,
   text: draft.text,
   formatVersion: draft.formatVersion,
-  hash: await hashOf(draft.text),
+  hash: hashOf(draft.text),
   savedAt,
   explicit: durability === 'strict',
 });

@@ -189,15 +189,32 @@ describe('autosave', () => {
     expect(told.at(-1)).toEqual({ state: 'memory', cause: 'no-database' });
   });
 
-  test('a page that is hidden keeps what it has at once', () => {
+  test('leaves what is not yet kept within the call, and nothing when all is kept', async () => {
+    const left: unknown[] = [];
+    port = { ...port, leave: ({ id, text: last }, expected) => left.push([id, last, expected]) };
+    autosave = createAutosave({ port, draft: () => ({ title: 'T', text, formatVersion: 1 }), report: () => undefined });
+    autosave.leave();
+    autosave.begin('a', 0);
+    type('kept');
+    expect(await autosave.flush()).toBe(true);
+    autosave.leave();
+    expect(left).toEqual([]);
+    type('last');
+    autosave.leave();
+    expect(left).toEqual([['a', 'last', 1]]);
+  });
+
+  test('a page that is hidden leaves and keeps what it has at once', () => {
     const page = Object.assign(new EventTarget(), { visibilityState: 'visible' });
     const flush = vi.fn(async () => true);
-    const end = flushWhenHidden(page as unknown as Document, { flush });
+    const leave = vi.fn();
+    const end = flushWhenHidden(page as unknown as Document, { flush, leave });
     page.dispatchEvent(new Event('visibilitychange'));
     expect(flush).toHaveBeenCalledTimes(0);
     page.visibilityState = 'hidden';
     page.dispatchEvent(new Event('visibilitychange'));
     expect(flush).toHaveBeenCalledTimes(1);
+    expect(leave).toHaveBeenCalledTimes(1);
     end();
     page.dispatchEvent(new Event('visibilitychange'));
     expect(flush).toHaveBeenCalledTimes(1);
