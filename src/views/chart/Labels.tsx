@@ -37,9 +37,21 @@ interface OutsideLabelProps {
   readonly viewBox?: Box;
 }
 
-/** Beside the range, where the curve is not: at the top of a low range, at the foot of a high one, with a leader. */
+const LETTER = 7; // px, more than these words take for each of theirs
+
+/**
+ * Beside the range, where the curve is not: at the top of a low range, at the foot of a high one, with a leader. Within
+ * a low range that leaves no room beside it.
+ */
 export function OutsideLabel({ words, low, plotRight, viewBox }: OutsideLabelProps) {
   const { x = 0, y = 0, width = 0, height = 0 } = viewBox ?? {};
+  if (low && x + width + 16 + words.length * LETTER > plotRight) {
+    return (
+      <text className={styles.outsideWords} x={x + 10} y={y + 18}>
+        {words}
+      </text>
+    );
+  }
   if (low) {
     return (
       <g>
