@@ -30,6 +30,7 @@ export type Root =
 /** The newest points and the sizes of the newest steps, relative to x. One record: a search leaves no litter behind. */
 interface Trail {
   points: number; // how many of the three are known
+  away: boolean; // halved at least once: the caller's slope, which holds near the start, proves nothing here
   x2: number; // the newest
   y2: number;
   x1: number;
@@ -60,7 +61,7 @@ export function root({ f, lower, upper, start, slope }: Search): Root {
   let above: number | undefined; // the smallest x at which it has not
   let evaluations = 0;
   let x = start;
-  const trail: Trail = { points: 0, x2: 0, y2: 0, x1: 0, y1: 0, x0: 0, y0: 0, steps: 0, size2: 1, size1: 1, size0: 1 };
+  const trail = newTrail();
   while (evaluations < MOST_EVALUATIONS) {
     const y = valueAt(f, x);
     evaluations += 1;
@@ -99,6 +100,21 @@ function valueAt(f: (x: number) => number, x: number): number {
   throw new Error(`root: expected a number at ${x}, got ${y}`);
 }
 
+const newTrail = (): Trail => ({
+  points: 0,
+  away: false,
+  x2: 0,
+  y2: 0,
+  x1: 0,
+  y1: 0,
+  x0: 0,
+  y0: 0,
+  steps: 0,
+  size2: 1,
+  size1: 1,
+  size0: 1,
+});
+
 function addPoint(trail: Trail, x: number, y: number): void {
   trail.x0 = trail.x1;
   trail.y0 = trail.y1;
@@ -118,13 +134,14 @@ function addSize(trail: Trail, size: number): void {
 
 function forget(trail: Trail): void {
   trail.points = 0;
+  trail.away = true;
   trail.steps = 0;
   trail.size2 = 1;
   trail.size1 = 1;
 }
 
-const isSettled = ({ steps, size2, size1, size0 }: Trail): boolean =>
-  size2 <= NOISE || (steps > 1 && size2 * size1 * size0 <= SETTLED);
+const isSettled = ({ points, away, steps, size2, size1, size0 }: Trail): boolean =>
+  (size2 <= NOISE && (points > 1 || !away)) || (steps > 1 && size2 * size1 * size0 <= SETTLED);
 
 /** The step from the newest point: Newton, secant or inverse quadratic, by how many points there are. */
 function step({ points, x2, y2, x1, y1, x0, y0 }: Trail, slope: number): number {

@@ -26,6 +26,12 @@ describe('a root inside the bracket', () => {
     );
   });
 
+  test('far from the start a small step by the slope given there does not end the search', () => {
+    const x = 0.05075155053481543; // the seventh power rises there by 1e-7 of the slope that is given
+    const found = root({ f: (t) => t ** 7 - x ** 7, lower: 0, upper: 100, start: 1, slope: 1 });
+    expect(Math.abs((found.found ? found.x : Number.NaN) / x - 1)).toBeLessThan(1e-11);
+  });
+
   test('no point outside the bracket is ever evaluated', () => {
     const seen: number[] = [];
     const f = (x: number) => {
