@@ -4,6 +4,7 @@
  */
 import Decimal from 'decimal.js';
 import { fail, type Outcome, type Problem } from '../quantity/outcome.ts';
+import { quoted } from '../quantity/spelling.ts';
 import { type Quantity, readQuantity } from '../quantity/text.ts';
 import type { Measure } from '../quantity/units.ts';
 
@@ -120,11 +121,16 @@ export function at(group: object, path: string): unknown {
 
 const NUMBER = /^[+-]?(\d+\.?\d*|\.\d+)([eE][+-]?\d{1,4})?$/;
 
-/** A plain number written as text with a point, or as a JSON number. Problems: number-unreadable, number-too-large. */
+/**
+ * A plain number written as text with a point, or as a JSON number.
+ * Problems: number-expected (neither of the two), number-unreadable, number-too-large.
+ */
 export function readNumber(value: unknown, field: string): Outcome<number> {
   if (typeof value === 'number' && Number.isFinite(value)) return { ok: true, value };
-  if (typeof value !== 'string' || !NUMBER.test(value.trim()))
-    return fail('number-unreadable', field, { written: String(value) });
+  if (typeof value !== 'string' && typeof value !== 'number')
+    return fail('number-expected', field, { written: Array.isArray(value) ? 'a list' : typeof value });
+  if (typeof value === 'number' || !NUMBER.test(value.trim()))
+    return fail('number-unreadable', field, { written: quoted(String(value)) });
   const number = new Decimal(value.trim()).toNumber();
   return Number.isFinite(number) ? { ok: true, value: number } : fail('number-too-large', field, { written: value });
 }

@@ -82,7 +82,7 @@ describe('wet steam', () => {
     expect(problems(water({ quality: 0.9, phase: 'liquid' }), 1e6)).toEqual(['quality-of-liquid fluid.quality']);
     expect(problems(water({ quality: '101 %' }), 1e6)).toEqual(['share-out-of-range fluid.quality']);
     expect(problems(water({ quality: -0.1 }), 1e6)).toEqual(['share-out-of-range fluid.quality']);
-    expect(problems(water({ quality: {} }), 1e6)).toEqual(['number-unreadable fluid.quality']);
+    expect(problems(water({ quality: {} }), 1e6)).toEqual(['number-expected fluid.quality']);
   });
   it('grows denser as it grows wetter, and its working gives its figures', () => {
     const states = [1, 0.99, 0.9, 0.7, 0.4, 0.1].map((quality) => solved(water({ quality }), 2e6));

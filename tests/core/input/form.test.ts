@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import { failed, openForm } from '../../../src/core/input/form.ts';
+import { failed, openForm, readNumber } from '../../../src/core/input/form.ts';
 
 test('a form that cannot be used answers with all its problems, in the order of reading', () => {
   const form = openForm({ bore: '0 mm' });
@@ -14,4 +14,15 @@ test('a form that cannot be used answers with all its problems, in the order of 
 
 test('one that says no reason is a defect', () => {
   expect(() => failed(openForm({}))).toThrow('expected a problem');
+});
+
+test.each([
+  [{}, 'number-expected', 'object'],
+  [['1'], 'number-expected', 'a list'],
+  [true, 'number-expected', 'boolean'],
+  ['1,3', 'number-unreadable', '1,3'],
+  ['', 'number-unreadable', ''],
+  ['1e9999', 'number-too-large', '1e9999'],
+])('%j is no plain number', (value, code, written) => {
+  expect(readNumber(value, 'field')).toEqual({ ok: false, problems: [{ code, field: 'field', detail: { written } }] });
 });
