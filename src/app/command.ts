@@ -1,6 +1,7 @@
 /**
  * The command line. `solve FILE` prints the results of a project file.
- * Exit: 0 every meter solved, 1 at least one refused, 2 the file is no project (or the command is unknown).
+ * Exit: 0 every meter solved, 1 at least one refused, 2 the file is no project (or the command is unknown), 70 the
+ * program itself failed (EX_SOFTWARE of sysexits.h).
  */
 import { readFileSync } from 'node:fs';
 import { resolve } from 'node:path';

@@ -76,6 +76,34 @@ it.each([[[]], [['solve']], [['solve', 'a.json', 'b.json']], [['dissolve', 'a.js
   },
 );
 
+describe('a fault of the program itself', () => {
+  /** Runs as a user does, with a fault planted before the program is loaded. */
+  const faulty = (fault: string) =>
+    spawnSync(
+      process.execPath,
+      ['--import', `data:text/javascript,${fault}`, join(root, 'src/app/headwright.mjs'), 'solve', example],
+      { cwd: folder, encoding: 'utf8' },
+    );
+
+  it.each([
+    ['while it solves', "Math.sqrt = () => { throw new Error('planted'); };"],
+    [
+      'after it has answered',
+      "const { write } = process.stdout; process.stdout.write = function (text) { setTimeout(() => { throw new Error('planted'); }); return write.call(this, text); };",
+    ],
+  ])('%s is told with its place and a sentence, and exits 70', (_name, fault) => {
+    expect(headwright('solve', example).status).toBe(0); // built, and sound without the fault
+    const { status, stderr } = faulty(fault);
+    expect(status).toBe(70);
+    expect(stderr).toMatch(/Error: planted\n\s+at /);
+    expect(stderr).toMatch(/^Headwright itself has failed; .+\.\n$/m);
+  });
+
+  it('prints no results that could be taken for an answer', () => {
+    expect(faulty("Math.sqrt = () => { throw new Error('planted'); };").stdout).toBe('');
+  });
+});
+
 it('stops quietly when its reader has read enough', () => {
   const project = JSON.parse(readFileSync(example, 'utf8')) as { meters: object[] };
   project.meters = Array.from({ length: 8 }, () => project.meters).flat(); // more than a pipe holds
