@@ -1,4 +1,5 @@
 /** The project's site and base state, read once for all meters. Defaults as the file contract gives them. */
+import { SITE_DEFAULTS } from '../document/defaults.ts';
 import type { Project } from '../document/project.ts';
 import type { AbsolutePressure, Acceleration, Temperature } from '../quantity/kinds.ts';
 import { type Outcome, ok } from '../quantity/outcome.ts';
@@ -9,14 +10,6 @@ export interface Site {
   readonly gravity: Acceleration;
   readonly base: { readonly pressure: AbsolutePressure; readonly temperature: Temperature };
 }
-
-/** The site and base state of a project that states none. */
-export const SITE_DEFAULTS = {
-  atmosphere: '101.325 kPa(a)',
-  gravity: '9.80665 m/s2',
-  basePressure: '101.325 kPa(a)',
-  baseTemperature: '15 degC',
-} as const;
 
 /** Reads site and base. Problems: those of quantity text, at site.atmosphere, site.gravity, base.pressure, base.temperature. */
 export function readSite(project: Pick<Project, 'site' | 'base'>): Outcome<Site> {

@@ -16,7 +16,7 @@ import type { Budget } from '../uncertainty/iso5167.ts';
 import { curveOf, reynoldsLimits } from './curve.ts';
 import { headsOf } from './heads.ts';
 import { withLate } from './late.ts';
-import type { PointRecord, Solved, StateRecord } from './record.ts';
+import type { PointRecord, SiteRecord, Solved, StateRecord } from './record.ts';
 import { type Direction, pointWorking } from './working.ts';
 
 export interface Parts {
@@ -45,6 +45,7 @@ export function assemble(parts: Parts): Solved {
     find: input.find,
     element: primary.name,
     standard: primary.standard,
+    site: siteRecord(site),
     state: stateRecord(state, relative),
     bore_m: geometry.bore,
     pipe_m: geometry.pipe,
@@ -71,6 +72,12 @@ export function assemble(parts: Parts): Solved {
 
 /** What only screen and paper ask for. */
 type Late = Pick<Solved, 'curve' | 'reynoldsLimits' | 'heads' | 'dimensions' | 'working' | 'sources'>;
+
+const siteRecord = ({ atmosphere, base }: Site): SiteRecord => ({
+  atmosphere_Pa: atmosphere,
+  basePressure_Pa: base.pressure,
+  baseTemperature_K: base.temperature,
+});
 
 /** The relative density as a working line, for a gas whose base volume counts the whole of it: none for air. */
 function relativeOf({ phase, baseDensity }: FluidState, { fluid }: MeterInput, { base }: Site): readonly Working[] {

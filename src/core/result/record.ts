@@ -33,6 +33,13 @@ export interface StateRecord {
   readonly temperature_K: number;
 }
 
+/** The site and the base state that the figures were computed with, stated or usual. */
+export interface SiteRecord {
+  readonly atmosphere_Pa: number;
+  readonly basePressure_Pa: number;
+  readonly baseTemperature_K: number;
+}
+
 export interface UncertaintyTerm {
   readonly name: 'C' | 'epsilon' | 'pipe' | 'bore' | 'differential' | 'density';
   readonly percentOfFlow: number;
@@ -89,6 +96,7 @@ export interface Solved {
   /** Code of the words of kind and variant, for example `orifice-plate.flange`. */
   readonly element: string;
   readonly standard: string;
+  readonly site: SiteRecord;
   readonly state: StateRecord;
   readonly bore_m: number;
   readonly pipe_m: number;

@@ -1,6 +1,5 @@
 /** The figures of a sheet: fluid, pipe and element as rows, and the table of the flows. */
 import type { DutyName, Project } from '../../core/document/project.ts';
-import { standardAtmosphere } from '../../core/quantity/constants.ts';
 import type { Solved } from '../../core/result/record.ts';
 import * as words from '../words/sheet.ts';
 import type { Context } from './context.ts';
@@ -30,7 +29,7 @@ export function fluidRows(
 ): readonly SheetRow[] {
   const rows = state.map((row) => sheetRow(row, keyOf));
   const [pressure, ...others] = rows;
-  const atmosphere = at.given(site?.atmosphere, ['absolute pressure'], standardAtmosphere, 'pressure').text;
+  const atmosphere = at.given(site?.atmosphere, ['absolute pressure'], result.site.atmosphere_Pa, 'pressure').text;
   const absolute = at.value(result.state.pressure_Pa, 'pressure').text;
   const name = fluid.phase === fluid.name.toLowerCase() ? fluid.name : `${fluid.name}, ${fluid.phase}`;
   const pressures = pressure === undefined ? [] : [pressure];
@@ -40,8 +39,8 @@ export function fluidRows(
   const stated = (text: unknown, measure: 'absolute pressure' | 'temperature', si: number): string =>
     at.given(text, [measure], si, measure === 'temperature' ? 'temperature' : 'pressure').text;
   const atBase = words.atBase(
-    stated(base?.pressure, 'absolute pressure', standardAtmosphere),
-    stated(base?.temperature, 'temperature', 288.15),
+    stated(base?.pressure, 'absolute pressure', result.site.basePressure_Pa),
+    stated(base?.temperature, 'temperature', result.site.baseTemperature_K),
   );
   return [
     { id: 'fluid', label: words.fluidRow, text: name, key: '' },

@@ -1,4 +1,5 @@
 /** Base states in use: where gas volumes are counted. Each with the texts that are written into the project. */
+import { SITE_DEFAULTS } from '../../core/document/defaults.ts';
 import type { Choice } from './elements.ts';
 
 export interface BaseState {
@@ -20,8 +21,11 @@ export const baseStateChoices: readonly Choice[] = states;
 /** The texts of a choice; undefined for one that is not in the list. */
 export const baseStateOf = (value: string): BaseState | undefined => states.find((state) => state.value === value);
 
-/** What stands where a project says nothing, as the file's definition has it. */
-export const usualBase: BaseState = { temperature: '15 degC', pressure: '101.325 kPa(a)' };
+/** What stands where a project says nothing. */
+export const usualBase: BaseState = {
+  temperature: SITE_DEFAULTS.baseTemperature,
+  pressure: SITE_DEFAULTS.basePressure,
+};
 
 /** The choice whose texts a project has; '' for a base state of its own. */
 export function baseStateNamed({ temperature, pressure }: BaseState): string {

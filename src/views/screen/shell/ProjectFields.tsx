@@ -1,4 +1,6 @@
 /** What holds for the whole project: the title block, the site and the base state. */
+import { SITE_DEFAULTS } from '../../../core/document/defaults.ts';
+import { asPrinted } from '../../present/base.ts';
 import { fieldLabel } from '../../words/fields.ts';
 import { problemSentence } from '../../words/problems.ts';
 import { useWorkbench } from '../binding.tsx';
@@ -11,12 +13,12 @@ import styles from './ProjectFields.module.css';
 const TITLE_BLOCK = ['title', 'revision', 'preparedBy', 'checkedBy'] as const;
 const QUANTITIES = ['site.atmosphere', 'site.gravity', 'base.pressure', 'base.temperature'] as const;
 
-/** What stands where nothing is written, as the file's definition has it. */
+/** What stands where nothing is written. */
 const USUAL: Readonly<Record<(typeof QUANTITIES)[number], string>> = {
-  'site.atmosphere': '101.325 kPa(a)',
-  'site.gravity': '9.80665 m/s²',
-  'base.pressure': '101.325 kPa(a)',
-  'base.temperature': '15 °C',
+  'site.atmosphere': SITE_DEFAULTS.atmosphere,
+  'site.gravity': SITE_DEFAULTS.gravity,
+  'base.pressure': SITE_DEFAULTS.basePressure,
+  'base.temperature': SITE_DEFAULTS.baseTemperature,
 };
 
 export function ProjectFields() {
@@ -51,7 +53,7 @@ export function ProjectFields() {
             text={text}
             problem={problemAt(path)}
             write={(next) => write(path, next)}
-            note={text === '' && <span>empty: {USUAL[path]}</span>}
+            note={text === '' && <span>empty: {asPrinted(USUAL[path])}</span>}
           />
         );
       })}
