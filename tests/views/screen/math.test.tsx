@@ -2,6 +2,7 @@ import { renderToStaticMarkup } from 'react-dom/server';
 import { describe, expect, it } from 'vitest';
 import { parseFormula } from '../../../src/views/present/formula.ts';
 import { MathExpression } from '../../../src/views/screen/panel/MathExpression.tsx';
+import { Formula } from '../../../src/views/sheet/Formula.tsx';
 
 const drawn = (symbol: string, formula?: string): string =>
   renderToStaticMarkup(
@@ -29,6 +30,18 @@ describe('formulas as MathML', () => {
     const markup = drawn('C', 'a + b - c');
     expect(markup.match(/<math/g)).toHaveLength(4);
     expect(markup).toContain('<mo form="infix">−</mo>');
+  });
+
+  it('keeps the parentheses of a power that is raised again', () => {
+    expect(drawn('x', '(β^2)^3')).toContain('<msup><mrow><mo>(</mo><msup>');
+  });
+
+  it('is the same on the screen and on the sheet', () => {
+    const [symbol, equals] = [parseFormula('C'), parseFormula('0.5961 + 0.0261*β^2 - 0.216*(β^2)^4/sqrt(1 - β^4)')];
+    const markup = [MathExpression, Formula].map((One) => renderToStaticMarkup(<One symbol={symbol} equals={equals} />));
+    const [screen, sheet] = markup.map((text) => text.match(/(?<=<math[^>]*>).+?(?=<\/math>)/g));
+    expect(screen).toHaveLength(4);
+    expect(sheet).toEqual(screen);
   });
 
   it('names a function and its arguments', () => {
