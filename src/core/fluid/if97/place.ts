@@ -7,8 +7,10 @@ import { borderPressure } from './boundary.ts';
 import type { Side } from './region3.ts';
 import { criticalPressure, criticalTemperature, saturationPressure, saturationTemperature } from './saturation.ts';
 
+/** Regions of the formulation; 4 is the saturation line. */
 export type Region = 1 | 2 | 3 | 5;
 
+/** Where a state lies: which equation holds, and whether it is liquid or vapour. */
 export interface Place {
   readonly region: Region;
   readonly side: Side;

@@ -7,6 +7,7 @@ import type { Density } from '../../quantity/kinds.ts';
 /** Specific gas constant of water, J/(kg.K). IAPWS R7-97(2012), Eq. 1. */
 export const R = 461.526;
 
+/** What a region answers; SI. */
 export interface WaterProperties {
   readonly density: Density;
   /** w2, m2/s2. Negative or infinite where the equation describes no stable state: the caller looks before the root. */

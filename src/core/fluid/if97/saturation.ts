@@ -5,6 +5,7 @@
 import type { AbsolutePressure, Temperature } from '../../quantity/kinds.ts';
 import { coefficients } from './saturation.table.ts';
 
+/** Critical point: the end of the line. */
 export const criticalTemperature = 647.096 as Temperature; // K, IAPWS R7-97(2012), Eq. 2
 export const criticalPressure = 22.064e6 as AbsolutePressure; // Pa, IAPWS R7-97(2012), Eq. 3
 
