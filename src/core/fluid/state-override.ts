@@ -2,11 +2,11 @@
 import { at } from '../input/form.ts';
 import type { AbsolutePressure, Density, DynamicViscosity } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
-import type { Source } from '../quantity/source.ts';
 import type { Working } from '../quantity/working.ts';
 import type { FluidState } from './contract.ts';
 import type { FluidField, Parsed } from './model.ts';
 import { parseFields } from './state-fields.ts';
+import { byUser, statedLine } from './working.ts';
 
 const fields: readonly FluidField[] = [
   { name: 'density', type: 'quantity', measures: ['density'], required: false },
@@ -18,7 +18,6 @@ const fields: readonly FluidField[] = [
 /** What an isentropic exponent can be (practice), as for a stated fluid. */
 const exponentBounds = { min: 0.5, max: 10 } as const;
 
-const byUser: Source = { clause: 'stated by the user', seen: 'practice' };
 const symbols = { density: 'ρ_1', viscosity: 'μ_1', isentropicExponent: 'κ', vapourPressure: 'p_v' } as const;
 const units = { density: 'kg/m3', viscosity: 'Pa.s', isentropicExponent: '', vapourPressure: 'Pa(a)' } as const;
 
@@ -90,16 +89,7 @@ function workingOf(working: readonly Working[], figures: Figures, stale: readonl
   const lines = new Map(
     Object.entries(figures).map(([id, value]) => {
       const name = id as Name;
-      const line: Working = {
-        id,
-        symbol: symbols[name],
-        given: [],
-        value,
-        unit: units[name],
-        source: byUser,
-        remark: 'override',
-      };
-      return [id, line] as const;
+      return [id, { ...statedLine(id, symbols[name], value, units[name]), remark: 'override' }] as const;
     }),
   );
   const kept = working.filter(({ id }) => !stale.includes(id)).map((line) => lines.get(line.id) ?? line);

@@ -18,6 +18,14 @@ export interface Given {
   readonly words: string; // code of the name of the quantity, see views/words
 }
 
+/** A value of a formula: `words` is the code of its name. */
+export const named = (symbol: string, value: number, unit: string, words: string): Given => ({
+  symbol,
+  value,
+  unit,
+  words,
+});
+
 export interface Working {
   /** Which reported figure this explains, for example `C`, `epsilon`, `differential`; unique within one point. */
   readonly id: string;

@@ -1,13 +1,12 @@
 /** The working of a traverse: the velocity at its strongest reading, and the flow from the mean of the velocities. */
 import type { TraverseInput } from '../input/traverse.ts';
 import type { Source } from '../quantity/source.ts';
-import type { Given, Working } from '../quantity/working.ts';
+import { type Given, named as given, type Working } from '../quantity/working.ts';
 import type { Flow, Measured, Survey } from '../traverse/survey.ts';
 import { indicatedVelocity, pointVelocity } from '../traverse/velocity.ts';
 
 const CLAUSE: Source = { clause: 'ISO 3966, clause 8', seen: 'derived' };
 const FLOW: Source = { clause: 'continuity', seen: 'derived' };
-const given = (symbol: string, value: number, unit: string, words: string): Given => ({ symbol, value, unit, words });
 
 /** Nothing before something is read, no flow before all of it is. */
 export function traverseWorking(input: TraverseInput, survey: Survey): readonly Working[] {

@@ -2,12 +2,11 @@
 
 import { approachFactor } from '../element/shared/approach.ts';
 import type { Source } from '../quantity/source.ts';
-import type { Given, Working } from '../quantity/working.ts';
+import { type Given, named as given, type Working } from '../quantity/working.ts';
 import { type Meter, type Operation, velocityOf } from '../solve/equation.ts';
 import { type Budget, EQUATION, type Term, type TermName } from '../uncertainty/iso5167.ts';
 
 const iso = (clause: string, seen: Source['seen'] = 'read'): Source => ({ clause: `ISO 5167-1:2022, ${clause}`, seen });
-const given = (symbol: string, value: number, unit: string, words: string): Given => ({ symbol, value, unit, words });
 
 /** Whether the flow was found from the differential, or the differential from the flow. */
 export type Direction = 'flow' | 'differential';

@@ -1,41 +1,16 @@
 /** The working of the water in air: what stands over water or ice, the mole fraction, the partial pressure. */
-import type { Given, Working } from '../../quantity/working.ts';
+import { type Given, named, type Working } from '../../quantity/working.ts';
 import { psychrometerSource, type Vapour } from './moisture.ts';
-
-export const named = (symbol: string, value: number, unit: string, words: string): Given => ({
-  symbol,
-  value,
-  unit,
-  words,
-});
+import type { Saturated } from './saturation.ts';
 
 /** Saturation pressure, enhancement factor, mole fraction and partial pressure of the vapour. */
 export function vapourWorking(vapour: Vapour, p: Given, T: Given): readonly Working[] {
   const { fraction, saturated } = vapour;
-  const { pressure, factor, sources, remark } = saturated;
   const read = reading(vapour, T);
-  const ps = named('p_s', pressure, 'Pa(a)', 'saturation-pressure');
-  const f = named('f', factor, '', 'enhancement-factor');
-  const xv = named('x_v', fraction, '', 'water-fraction');
+  const ps = named('p_s', saturated.pressure, 'Pa(a)', 'saturation-pressure');
+  const f = named('f', saturated.factor, '', 'enhancement-factor');
   return [
-    {
-      id: 'saturation-pressure',
-      symbol: 'p_s',
-      given: [read.at],
-      value: pressure,
-      unit: 'Pa(a)',
-      source: sources.pressure,
-      remark,
-    },
-    {
-      id: 'enhancement-factor',
-      symbol: 'f',
-      given: [read.at, p],
-      value: factor,
-      unit: '',
-      source: sources.factor,
-      remark: 'enhancement-factor',
-    },
+    ...saturationWorking(saturated, read.at, p),
     {
       id: 'water-fraction',
       symbol: 'x_v',
@@ -49,13 +24,35 @@ export function vapourWorking(vapour: Vapour, p: Given, T: Given): readonly Work
       id: 'vapour-partial-pressure',
       symbol: 'p_w',
       formula: 'x_v * p_1',
-      given: [xv, p],
+      given: [named('x_v', fraction, '', 'water-fraction'), p],
       value: fraction * p.value,
       unit: 'Pa(a)',
       source: { clause: 'partial pressure: mole fraction times pressure', seen: 'derived' },
     },
   ];
 }
+
+/** What stands over water or ice at the temperature `at`, and how the air raises it. */
+const saturationWorking = ({ pressure, factor, sources, remark }: Saturated, at: Given, p: Given): Working[] => [
+  {
+    id: 'saturation-pressure',
+    symbol: 'p_s',
+    given: [at],
+    value: pressure,
+    unit: 'Pa(a)',
+    source: sources.pressure,
+    remark,
+  },
+  {
+    id: 'enhancement-factor',
+    symbol: 'f',
+    given: [at, p],
+    value: factor,
+    unit: '',
+    source: sources.factor,
+    remark: 'enhancement-factor',
+  },
+];
 
 type Reading = Required<Pick<Working, 'formula' | 'given' | 'source'>> & { readonly at: Given };
 

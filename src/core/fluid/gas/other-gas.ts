@@ -12,8 +12,8 @@ import { schemeViscosity, type ViscousGas } from '../gas-viscosity/scheme.ts';
 import { schemeUncertainty, viscosityCautions } from '../gas-viscosity/viscosity.ts';
 import { type Conditions, plainName, type State } from '../model.ts';
 import { type OtherGas, otherGases } from './other-gas.table.ts';
-import { cubic, type OtherFigures, otherSources, otherWorking } from './other-working.ts';
-import type { BaseGas } from './working.ts';
+import { cubic, otherSources, otherWorking } from './other-working.ts';
+import type { BaseGas, GasFigures } from './working.ts';
 
 const R = molarGasConstant.exact;
 
@@ -84,7 +84,7 @@ const crowding = (gas: OtherGas, { density }: Pick<FluidState, 'density'>): numb
   (density / molarMass(gas)) * gas.Vc * 1e-6;
 
 /** Undefined where the gas would be a liquid. */
-function figuresOf(gas: OtherGas, p: AbsolutePressure, T: Temperature): OtherFigures | undefined {
+function figuresOf(gas: OtherGas, p: AbsolutePressure, T: Temperature): GasFigures | undefined {
   const heatCapacity = R * gas.a.reduceRight((sum, next) => sum * T + next, 0); // c_p°/R = Σ a_i T^i
   const found = pureGas({ Tc: gas.Tc, pc: gas.pc * 1e6, omega: gas.omega }, heatCapacity, p, T);
   if (found === undefined) return undefined;
@@ -113,8 +113,8 @@ const viscous = ({ M, C, viscous: [lowest, highest], Tc, pc, Vc }: OtherGas): Vi
   Vc,
 });
 
-function stateFrom(gas: OtherGas, figures: OtherFigures, { base }: Conditions): FluidState {
-  const atBase = baseOf(gas, base);
+function stateFrom(gas: OtherGas, figures: GasFigures, { base }: Conditions): FluidState {
+  const atBase = baseGas(gas, base);
   const cautions = cautionsOf(gas, figures);
   const density = uncertaintyOf(gas, figures);
   return {
@@ -129,12 +129,12 @@ function stateFrom(gas: OtherGas, figures: OtherFigures, { base }: Conditions): 
   };
 }
 
-function uncertaintyOf(gas: OtherGas, figures: OtherFigures): StatedUncertainty {
+function uncertaintyOf(gas: OtherGas, figures: GasFigures): StatedUncertainty {
   const more = alcohols.includes(gas.name) ? spread.alcohol : 0;
   return { share: spread.base + more + spread.slope * crowding(gas, figures), source: spreadSource };
 }
 
-function cautionsOf(gas: OtherGas, figures: OtherFigures): readonly Caution[] {
+function cautionsOf(gas: OtherGas, figures: GasFigures): readonly Caution[] {
   const value = crowding(gas, figures);
   const { source } = schemeUncertainty;
   const basis = { temperatures: gas.viscous, source };
@@ -148,7 +148,7 @@ function cautionsOf(gas: OtherGas, figures: OtherFigures): readonly Caution[] {
 }
 
 /** ρ_b = p_b M / (Z_b R T_b), with Z_b = 1 where the gas would be a liquid at the base state. */
-function baseOf(gas: OtherGas, { pressure: p, temperature: T }: State): BaseGas {
+function baseGas(gas: OtherGas, { pressure: p, temperature: T }: State): BaseGas {
   const ideal = ((p * molarMass(gas)) / (R * T)) as Density;
   const found = outsideBy(gas, p, T) === undefined ? figuresOf(gas, p, T) : undefined;
   if (found === undefined) return { density: ideal, compressibility: 1, ideal: true };

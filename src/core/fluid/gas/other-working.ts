@@ -5,11 +5,21 @@ import type { Given, Working } from '../../quantity/working.ts';
 import type { FluidState } from '../contract.ts';
 import { schemeUncertainty } from '../gas-viscosity/viscosity.ts';
 import type { State } from '../model.ts';
+import {
+  baseGasLine,
+  densityLine,
+  factor,
+  gasConstant,
+  type Molar,
+  molar,
+  p1,
+  rho1,
+  soundLine,
+  T1,
+} from '../working.ts';
 import type { BaseGas, GasFigures } from './working.ts';
 
-/** The figures of a state that have a source and a working. */
-export type OtherFigures = GasFigures;
-
+/** The equation of these gases. */
 export const cubic: Source = { clause: 'Peng and Robinson, Ind. Eng. Chem. Fundam. 15 (1976) 59', seen: 'memory' };
 const cubicExponent: Source = {
   clause: `${cubic.clause}, with c_p° of Poling, Prausnitz and O'Connell, 5th edition`,
@@ -27,23 +37,25 @@ export function otherSources({ ideal }: BaseGas): FluidState['sources'] {
   return { density: cubic, viscosity, isentropicExponent: cubicExponent, baseDensity: ideal ? idealBase : cubic };
 }
 
-const named = (symbol: string, value: number, unit: string, words: string): Given => ({ symbol, value, unit, words });
-const gasConstant = named('R', molarGasConstant.exact, 'J/(mol.K)', 'molar-gas-constant');
+const R = gasConstant(molarGasConstant.exact);
 
 /** The working of each figure. */
-export function otherWorking(figures: OtherFigures, atBase: BaseGas, base: State): readonly Working[] {
-  const p = named('p_1', figures.pressure, 'Pa(a)', 'pressure-upstream');
-  const T = named('T_1', figures.temperature, 'K', 'temperature-upstream');
-  const M = named('M', figures.molarMass, 'kg/mol', 'molar-mass');
-  const rho = named('ρ_1', figures.density, 'kg/m3', 'density');
-  return [...byCubic(figures, p, T, M, rho), viscosityWorking(figures, T, rho), baseWorking(atBase, base, M)];
+export function otherWorking(figures: GasFigures, found: BaseGas, base: State): readonly Working[] {
+  const at = { p: p1(figures.pressure), T: T1(figures.temperature), M: molar(figures.molarMass), R };
+  const rho = rho1(figures.density);
+  const source = found.ideal ? idealBase : cubic;
+  const atBase = baseGasLine(at.M, R, found.compressibility, base, found.density, source);
+  return [
+    ...byCubic(figures, at, rho),
+    viscosityWorking(figures, at.T, rho),
+    found.ideal ? { ...atBase, remark: 'gas-base-ideal' } : atBase,
+  ];
 }
 
 /** Density and isentropic exponent from the equation, the speed of sound that they mean. */
-function byCubic(figures: OtherFigures, p: Given, T: Given, M: Given, rho: Given): readonly Working[] {
+function byCubic(figures: GasFigures, at: Molar, rho: Given): readonly Working[] {
   const { density, isentropicExponent, compressibility, speedOfSound } = figures;
-  const Z = named('Z', compressibility, '', 'compressibility');
-  const read = { given: [p, T], unit: '' };
+  const read = { given: [at.p, at.T], unit: '' };
   return [
     {
       id: 'compressibility',
@@ -53,15 +65,7 @@ function byCubic(figures: OtherFigures, p: Given, T: Given, M: Given, rho: Given
       remark: 'cubic-compressibility',
       ...read,
     },
-    {
-      id: 'density',
-      symbol: 'ρ_1',
-      formula: 'p_1 * M / (Z * R * T_1)',
-      given: [p, M, Z, gasConstant, T],
-      value: density,
-      unit: 'kg/m3',
-      source: cubic,
-    },
+    densityLine(at, factor(compressibility), density, cubic),
     {
       id: 'isentropicExponent',
       symbol: 'κ',
@@ -70,40 +74,12 @@ function byCubic(figures: OtherFigures, p: Given, T: Given, M: Given, rho: Given
       remark: 'cubic-exponent',
       ...read,
     },
-    {
-      id: 'speedOfSound',
-      symbol: 'w',
-      formula: 'sqrt(κ * p_1 / ρ_1)',
-      given: [named('κ', isentropicExponent, '', 'isentropic-exponent'), p, rho],
-      value: speedOfSound,
-      unit: 'm/s',
-      source: soundSpeed,
-    },
+    soundLine(isentropicExponent, at.p, rho, speedOfSound, soundSpeed),
   ];
 }
 
-function viscosityWorking({ viscosity: value }: OtherFigures, T: Given, rho: Given): Working {
+function viscosityWorking({ viscosity: value }: GasFigures, T: Given, rho: Given): Working {
   const { source } = schemeUncertainty;
   const remark = 'viscosity-by-scheme';
   return { id: 'viscosity', symbol: 'μ_1', given: [rho, T], value, unit: 'Pa.s', source, remark };
-}
-
-function baseWorking({ density, compressibility, ideal }: BaseGas, base: State, M: Given): Working {
-  const given = [
-    named('p_b', base.pressure, 'Pa(a)', 'pressure-base'),
-    M,
-    named('Z_b', compressibility, '', 'compressibility-base'),
-    gasConstant,
-    named('T_b', base.temperature, 'K', 'temperature-base'),
-  ];
-  return {
-    id: 'baseDensity',
-    symbol: 'ρ_b',
-    formula: 'p_b * M / (Z_b * R * T_b)',
-    given,
-    value: density,
-    unit: 'kg/m3',
-    source: ideal ? idealBase : cubic,
-    ...(ideal ? { remark: 'gas-base-ideal' } : {}),
-  };
 }

@@ -5,6 +5,18 @@ import type { Given, Working } from '../../quantity/working.ts';
 import type { FluidState } from '../contract.ts';
 import type { ViscosityBasis } from '../gas-viscosity/viscosity.ts';
 import type { State } from '../model.ts';
+import {
+  baseGasLine,
+  exponentLine,
+  factorLine,
+  gasConstant,
+  type Molar,
+  molar,
+  p1,
+  rho1,
+  sound,
+  T1,
+} from '../working.ts';
 import type { GasEquation } from './equation.ts';
 
 /** The figures of a state that have a source and a working. */
@@ -25,19 +37,18 @@ const exponent: Source = {
   clause: 'κ = w² ρ / p with density and speed of sound of the equation of state',
   seen: 'derived',
 };
-const realBase = ({ clause, seen }: Source): Source => ({ clause: `${clause} at the base state`, seen });
 const idealBase: Source = {
   clause: 'ideal gas at the base state (Z_b = 1): the mixture would condense there',
   seen: 'practice',
 };
 
-/** The formulation of each figure that the state has. */
-export function gasSources({ source }: GasEquation, viscosity: Source, { ideal }: BaseGas): FluidState['sources'] {
-  const baseDensity = ideal ? idealBase : realBase(source);
-  return { density: source, viscosity, isentropicExponent: exponent, baseDensity };
-}
+const baseSource = ({ clause, seen }: Source, { ideal }: BaseGas): Source =>
+  ideal ? idealBase : { clause: `${clause} at the base state`, seen };
 
-const named = (symbol: string, value: number, unit: string, words: string): Given => ({ symbol, value, unit, words });
+/** The formulation of each figure that the state has. */
+export function gasSources({ source }: GasEquation, viscosity: Source, found: BaseGas): FluidState['sources'] {
+  return { density: source, viscosity, isentropicExponent: exponent, baseDensity: baseSource(source, found) };
+}
 
 /** The working of each figure; `R` is the gas constant of the equation, J/(mol.K). */
 export function gasWorking(
@@ -45,80 +56,54 @@ export function gasWorking(
   R: number,
   figures: GasFigures,
   basis: ViscosityBasis,
-  atBase: BaseGas,
+  found: BaseGas,
   base: State,
 ): readonly Working[] {
-  const { density, viscosity, speedOfSound, molarMass } = figures;
-  const gasConstant = named('R', R, 'J/(mol.K)', 'molar-gas-constant');
-  const p = named('p_1', figures.pressure, 'Pa(a)', 'pressure-upstream');
-  const T = named('T_1', figures.temperature, 'K', 'temperature-upstream');
-  const M = named('M', molarMass, 'kg/mol', 'molar-mass');
-  const rho = named('ρ_1', density, 'kg/m3', 'density');
-  const remark = `viscosity-by-${basis.method}`;
+  const at = {
+    p: p1(figures.pressure),
+    T: T1(figures.temperature),
+    M: molar(figures.molarMass),
+    R: gasConstant(R),
+  };
+  const rho = rho1(figures.density);
+  const w = sound(figures.speedOfSound);
+  const atBase = baseGasLine(at.M, at.R, found.compressibility, base, found.density, baseSource(source, found));
   return [
+    equationDensity(at, figures.density, source),
     {
-      id: 'density',
-      symbol: 'ρ_1',
-      given: [p, T, M],
-      value: density,
-      unit: 'kg/m3',
-      source,
-      remark: 'gerg-density',
+      id: 'viscosity',
+      symbol: 'μ_1',
+      given: [rho, at.T],
+      value: figures.viscosity,
+      unit: 'Pa.s',
+      source: basis.source,
+      remark: `viscosity-by-${basis.method}`,
     },
-    { id: 'viscosity', symbol: 'μ_1', given: [rho, T], value: viscosity, unit: 'Pa.s', source: basis.source, remark },
-    {
-      id: 'speedOfSound',
-      symbol: 'w',
-      given: [rho, T],
-      value: speedOfSound,
-      unit: 'm/s',
-      source,
-      remark: 'gerg-speed-of-sound',
-    },
-    {
-      id: 'isentropicExponent',
-      symbol: 'κ',
-      formula: 'w^2 * ρ_1 / p_1',
-      given: [named('w', speedOfSound, 'm/s', 'speed-of-sound'), rho, p],
-      value: figures.isentropicExponent,
-      unit: '',
-      source: exponent,
-    },
-    {
-      id: 'compressibility',
-      symbol: 'Z',
-      formula: 'p_1 * M / (ρ_1 * R * T_1)',
-      given: [p, M, rho, gasConstant, T],
-      value: figures.compressibility,
-      unit: '',
-      source: realGas,
-    },
-    baseWorking(atBase, base, M, gasConstant, source),
+    equationSound([rho, at.T], figures.speedOfSound, source),
+    exponentLine(w, rho, at.p, figures.isentropicExponent, exponent),
+    factorLine(at, rho, figures.compressibility, realGas),
+    found.ideal ? { ...atBase, remark: 'gas-base-ideal' } : atBase,
   ];
 }
 
-function baseWorking(
-  { density, compressibility, ideal }: BaseGas,
-  base: State,
-  M: Given,
-  gasConstant: Given,
-  equation: Source,
-): Working {
-  const given = [
-    named('p_b', base.pressure, 'Pa(a)', 'pressure-base'),
-    M,
-    named('Z_b', compressibility, '', 'compressibility-base'),
-    gasConstant,
-    named('T_b', base.temperature, 'K', 'temperature-base'),
-  ];
-  return {
-    id: 'baseDensity',
-    symbol: 'ρ_b',
-    formula: 'p_b * M / (Z_b * R * T_b)',
-    given,
-    value: density,
-    unit: 'kg/m3',
-    source: ideal ? idealBase : realBase(equation),
-    ...(ideal ? { remark: 'gas-base-ideal' } : {}),
-  };
-}
+/** Density by an equation of state, too long for a formula. */
+export const equationDensity = ({ p, T, M }: Molar, value: number, source: Source): Working => ({
+  id: 'density',
+  symbol: 'ρ_1',
+  given: [p, T, M],
+  value,
+  unit: 'kg/m3',
+  source,
+  remark: 'equation-density',
+});
+
+/** Speed of sound by an equation of state, too long for a formula. */
+export const equationSound = (given: readonly Given[], value: number, source: Source): Working => ({
+  id: 'speedOfSound',
+  symbol: 'w',
+  given,
+  value,
+  unit: 'm/s',
+  source,
+  remark: 'equation-speed-of-sound',
+});

@@ -1,9 +1,9 @@
 /** The figures of a liquid, where they come from, and their working. */
 import type { AbsolutePressure, Density, DynamicViscosity } from '../../quantity/kinds.ts';
-import type { Source } from '../../quantity/source.ts';
-import type { Given, Working } from '../../quantity/working.ts';
+import { type Given, named, type Working } from '../../quantity/working.ts';
 import type { FluidState } from '../contract.ts';
 import type { Conditions } from '../model.ts';
+import { atBase, baseLine, byUser, p1, statedLine, T1 } from '../working.ts';
 import type { Liquid, Property } from './contract.ts';
 
 /** Every figure of a liquid. */
@@ -23,8 +23,6 @@ export interface LiquidFigures {
   readonly baseDensity?: Density;
   readonly baseStated: boolean;
 }
-
-const byUser: Source = { clause: 'stated by the user', seen: 'practice' };
 
 /** The source of each figure that the state has. */
 export function liquidSources(liquid: Liquid, figures: LiquidFigures): FluidState['sources'] {
@@ -49,11 +47,9 @@ export function liquidUncertainties({ density, viscosity }: Liquid, { viscosityS
   };
 }
 
-const named = (symbol: string, value: number, unit: string, words: string): Given => ({ symbol, value, unit, words });
-
 /** The working of each figure. */
 export function liquidWorking(liquid: Liquid, figures: LiquidFigures, at: Conditions): readonly Working[] {
-  const T = named('T_1', at.temperature, 'K', 'temperature-upstream');
+  const T = T1(at.temperature);
   return [
     ...(liquid.working?.(at.temperature) ?? []),
     densityWorking(liquid, figures, at),
@@ -68,7 +64,7 @@ function densityWorking({ density, pressure }: Liquid, figures: LiquidFigures, a
   const line = { id: 'density', symbol: 'ρ_1', value: figures.density, unit: 'kg/m3' } as const;
   const rho = named('ρ_s', reference, 'kg/m3', 'density-reference');
   if (modulus !== undefined && from !== undefined) {
-    const p = named('p_1', at.pressure, 'Pa(a)', 'pressure-upstream');
+    const p = p1(at.pressure);
     const given = [
       rho,
       p,
@@ -81,33 +77,27 @@ function densityWorking({ density, pressure }: Liquid, figures: LiquidFigures, a
     const given = [rho, named(pressure.symbol, factor, '', pressure.words)];
     return { ...line, formula: `ρ_s * ${pressure.symbol}`, given, source: pressure.source, remark: density.remark };
   }
-  const given = [named('T_1', at.temperature, 'K', 'temperature-upstream')];
+  const given = [T1(at.temperature)];
   return { ...line, given, source: density.source, remark: density.remark };
 }
 
 function viscosityWorking({ viscosity }: Liquid, figures: LiquidFigures, T: Given): Working {
-  const line = { id: 'viscosity', symbol: 'μ_1', value: figures.viscosity, unit: 'Pa.s' } as const;
-  if (figures.viscosityStated || viscosity === undefined)
-    return { ...line, given: [], source: byUser, remark: 'stated' };
+  const line = statedLine('viscosity', 'μ_1', figures.viscosity, 'Pa.s');
+  if (figures.viscosityStated || viscosity === undefined) return line;
   return { ...line, given: [T], source: viscosity.source, remark: viscosity.remark };
 }
 
 function vapourWorking({ vapourPressure }: Liquid, figures: LiquidFigures, T: Given): readonly Working[] {
   const { vapourPressure: value, vapourStated } = figures;
   if (value === undefined) return [];
-  const line = { id: 'vapourPressure', symbol: 'p_v', value, unit: 'Pa(a)' } as const;
-  if (vapourStated || vapourPressure === undefined) return [{ ...line, given: [], source: byUser, remark: 'stated' }];
+  const line = statedLine('vapourPressure', 'p_v', value, 'Pa(a)');
+  if (vapourStated || vapourPressure === undefined) return [line];
   return [{ ...line, given: [T], source: vapourPressure.source, remark: vapourPressure.remark }];
 }
 
 function baseWorking({ density }: Liquid, figures: LiquidFigures, { base }: Conditions): readonly Working[] {
   const { baseDensity: value, baseStated } = figures;
   if (value === undefined) return [];
-  const line = { id: 'baseDensity', symbol: 'ρ_b', value, unit: 'kg/m3' } as const;
-  if (baseStated) return [{ ...line, given: [], source: byUser, remark: 'stated' }];
-  const given = [
-    named('p_b', base.pressure, 'Pa(a)', 'pressure-base'),
-    named('T_b', base.temperature, 'K', 'temperature-base'),
-  ];
-  return [{ ...line, given, source: density.source, remark: 'liquid-at-base' }];
+  if (baseStated) return [statedLine('baseDensity', 'ρ_b', value, 'kg/m3')];
+  return [{ ...baseLine(atBase(base), value, density.source), remark: 'liquid-at-base' }];
 }

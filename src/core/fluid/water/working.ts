@@ -1,10 +1,11 @@
 /** Where the figures of water and steam come from, and their working. */
 import type { Source } from '../../quantity/source.ts';
-import type { Given, Working } from '../../quantity/working.ts';
+import { named, type Working } from '../../quantity/working.ts';
 import type { FluidState } from '../contract.ts';
 import type { Region } from '../if97/place.ts';
 import { R } from '../if97/properties.ts';
 import type { State } from '../model.ts';
+import { atBase, baseLine, exponentLine, p1, rho1, sound, T1 } from '../working.ts';
 
 /** The figures of a state that have a source and a working. */
 export type Figures = Pick<
@@ -53,8 +54,6 @@ export function waterUncertainties(region: Region, expands: boolean): NonNullabl
   };
 }
 
-const named = (symbol: string, value: number, unit: string, words: string): Given => ({ symbol, value, unit, words });
-
 /** The working of each figure. `heldBeyond`: the phase is held beyond the saturation line. */
 export function waterWorking(
   region: Region,
@@ -73,14 +72,10 @@ export function waterWorking(
   return working.filter((entry) => entry !== undefined);
 }
 
-const pressureAt1 = ({ pressure }: Figures) => named('p_1', pressure, 'Pa(a)', 'pressure-upstream');
-const temperatureAt1 = ({ temperature }: Figures) => named('T_1', temperature, 'K', 'temperature-upstream');
-const densityAt1 = ({ density }: Figures) => named('ρ_1', density, 'kg/m3', 'density');
-
 /** What comes from the region's equation: too long for a formula. */
 function byRegion(region: Region, heldBeyond: boolean, figures: Figures): readonly Working[] {
   const { density, speedOfSound } = figures;
-  const given = [pressureAt1(figures), temperatureAt1(figures)];
+  const given = [p1(figures.pressure), T1(figures.temperature)];
   const remark = `if97-region-${region}${heldBeyond ? '-beyond-saturation' : ''}`;
   return [
     { id: 'density', symbol: 'ρ_1', given, value: density, unit: 'kg/m3', source: densityBy(region), remark },
@@ -89,26 +84,17 @@ function byRegion(region: Region, heldBeyond: boolean, figures: Figures): readon
 }
 
 function viscosityWorking(extrapolated: boolean, figures: Figures): Working {
-  const given = [densityAt1(figures), temperatureAt1(figures)];
+  const given = [rho1(figures.density), T1(figures.temperature)];
   const remark = extrapolated ? 'viscosity-extrapolated' : 'viscosity-by-release';
   const source = viscosityBy(extrapolated);
   return { id: 'viscosity', symbol: 'μ_1', given, value: figures.viscosity, unit: 'Pa.s', source, remark };
 }
 
 function ratios(region: Region, figures: Figures): readonly Working[] {
-  const w = named('w', figures.speedOfSound, 'm/s', 'speed-of-sound');
   const gas = named('R', R, 'J/(kg.K)', 'specific-gas-constant');
-  const [p, T, rho] = [pressureAt1(figures), temperatureAt1(figures), densityAt1(figures)];
+  const [p, T, rho] = [p1(figures.pressure), T1(figures.temperature), rho1(figures.density)];
   return [
-    {
-      id: 'isentropicExponent',
-      symbol: 'κ',
-      formula: 'w^2 * ρ_1 / p_1',
-      given: [w, rho, p],
-      value: figures.isentropicExponent,
-      unit: '',
-      source: relation(region),
-    },
+    exponentLine(sound(figures.speedOfSound), rho, p, figures.isentropicExponent, relation(region)),
     {
       id: 'compressibility',
       symbol: 'Z',
@@ -124,7 +110,7 @@ function ratios(region: Region, figures: Figures): readonly Working[] {
 function vapourPressureWorking(figures: Figures): Working | undefined {
   const { vapourPressure: value } = figures;
   if (value === undefined) return undefined;
-  const given = [temperatureAt1(figures)];
+  const given = [T1(figures.temperature)];
   return {
     id: 'vapourPressure',
     symbol: 'p_v',
@@ -138,10 +124,5 @@ function vapourPressureWorking(figures: Figures): Working | undefined {
 
 function baseDensityWorking({ baseDensity: value }: Figures, base: State): Working | undefined {
   if (value === undefined) return undefined;
-  const given = [
-    named('p_b', base.pressure, 'Pa(a)', 'pressure-base'),
-    named('T_b', base.temperature, 'K', 'temperature-base'),
-  ];
-  const source = read('IAPWS R7-97(2012)');
-  return { id: 'baseDensity', symbol: 'ρ_b', given, value, unit: 'kg/m3', source, remark: 'if97-at-base' };
+  return { ...baseLine(atBase(base), value, read('IAPWS R7-97(2012)')), remark: 'if97-at-base' };
 }
