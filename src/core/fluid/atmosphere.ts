@@ -14,6 +14,7 @@ import type {
 } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 
+/** The air of the standard atmosphere at one altitude. */
 export interface StandardAir {
   readonly temperature: Temperature;
   readonly pressure: AbsolutePressure;

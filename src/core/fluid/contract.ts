@@ -6,6 +6,7 @@ import type { AbsolutePressure, Density, DynamicViscosity, MolarMass, Temperatur
 import type { Source } from '../quantity/source.ts';
 import type { Working } from '../quantity/working.ts';
 
+/** A gas by composition or by statement is `gas`; water has a vapour, and above its critical point neither. */
 export type Phase = 'liquid' | 'vapour' | 'supercritical' | 'gas';
 
 /** A limit of the fluid's own formulation that the state leaves. Checks turn it into a finding with the same id. */
@@ -26,6 +27,7 @@ export interface StatedUncertainty {
   readonly source: Source;
 }
 
+/** Everything that the meter equations ask of a fluid, with where it comes from. */
 export interface FluidState {
   readonly pressure: AbsolutePressure;
   readonly temperature: Temperature;

@@ -60,6 +60,7 @@ export interface Parsed {
   readonly flags: Readonly<Partial<Record<string, boolean>>>;
 }
 
+/** A pressure and a temperature; SI. */
 export interface State {
   readonly pressure: AbsolutePressure;
   readonly temperature: Temperature;
@@ -71,6 +72,7 @@ export interface Conditions extends State {
   readonly paths: Paths;
 }
 
+/** Where in the document a problem with a figure is shown. */
 export interface Paths {
   readonly pressure: string;
   readonly temperature: string;
@@ -78,6 +80,7 @@ export interface Paths {
   readonly own: (name: string) => string;
 }
 
+/** One kind of fluid. */
 export interface FluidModel {
   readonly kind: string;
   readonly fields: readonly FluidField[];

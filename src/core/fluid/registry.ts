@@ -6,7 +6,5 @@ import type { FluidModel } from './model.ts';
 import { stated } from './stated/stated.ts';
 import { water } from './water/water.ts';
 
+/** In the order of a menu. */
 export const fluids: readonly FluidModel[] = [water, gas, air, liquid, stated];
-
-/** Kinds that the project file knows and this version does not offer. */
-export const notOffered: readonly string[] = [];

@@ -4,7 +4,7 @@ import type { AbsolutePressure } from '../quantity/kinds.ts';
 import { fail, gather, type Outcome } from '../quantity/outcome.ts';
 import type { FluidState } from './contract.ts';
 import { bothOf, type FluidModel, type Parsed, type Paths, type State } from './model.ts';
-import { fluids, notOffered } from './registry.ts';
+import { fluids } from './registry.ts';
 import { parseFields } from './state-fields.ts';
 import { override, readOverride } from './state-override.ts';
 
@@ -16,7 +16,7 @@ import { override, readOverride } from './state-override.ts';
  * @param atmosphere what a gauge pressure among the fluid's fields stands on
  * @param field path of the fluid in the document, for problems
  * @param stateField path of the group that holds the state, for problems with pressure and temperature
- * Problems: field-missing, fluid-unknown, fluid-not-offered, those of the fields, of the model and of override.
+ * Problems: field-missing, fluid-unknown, those of the fields, of the model and of override.
  */
 export function stateOf(
   fluid: FluidText,
@@ -55,8 +55,5 @@ function modelOf({ kind }: FluidText, field: string): Outcome<FluidModel> {
   const model = fluids.find((candidate) => candidate.kind === kind);
   if (model !== undefined) return { ok: true, value: model };
   const offered = fluids.map((candidate) => candidate.kind).join(', ');
-  return fail(notOffered.includes(kind) ? 'fluid-not-offered' : 'fluid-unknown', path, {
-    written: kind.slice(0, 40),
-    offered,
-  });
+  return fail('fluid-unknown', path, { written: kind.slice(0, 40), offered });
 }

@@ -43,10 +43,6 @@ export const inputProblems: ProblemWords = {
     cause: `'${d.text('written')}' is no kind of fluid.`,
     next: `Choose ${d.list('offered')}.`,
   }),
-  'fluid-not-offered': (d) => ({
-    cause: `This version keeps the fluid '${d.text('written')}' in the file and does not compute it.`,
-    next: `Choose ${d.list('offered')}.`,
-  }),
   'isentropic-exponent-implausible': (d) => ({
     cause: `No gas has an isentropic exponent of ${d.figure('value', 'number')}.`,
     next: `Write one from ${d.limit('min', 'number')} to ${d.limit('max', 'number')}, or none for a liquid.`,

@@ -2,7 +2,6 @@
 import { describe, expect, it } from 'vitest';
 import { gasPresets } from '../../../src/core/document/gas-presets.table.ts';
 import { splits } from '../../../src/core/fluid/cubic/stability.ts';
-import { gasDensityAt } from '../../../src/core/fluid/gas/gas.ts';
 import { phaseSum } from '../../../src/core/fluid/gas/range.ts';
 import { mixtureOf, R } from '../../../src/core/fluid/gerg/mixture.ts';
 import { componentNames } from '../../../src/core/fluid/helmholtz/components.ts';
@@ -125,7 +124,7 @@ describe('a composition', () => {
     expect(problems({ methane: 0.5, CH4: 0.5 })).toEqual(['component-twice fluid.composition.CH4']);
     expect(problems({ methane: 'much' })).toEqual(['number-unreadable fluid.composition.methane']);
     expect(problems({ methane: null, nitrogen: '3 bar' })).toEqual([
-      'number-unreadable fluid.composition.methane',
+      'number-expected fluid.composition.methane',
       'number-unreadable fluid.composition.nitrogen',
     ]);
     expect(problems(undefined)).toEqual(['field-missing fluid.composition']);
@@ -356,6 +355,7 @@ describe('the laws of a gas', () => {
 
   it('gives back its pressure, and no stable root of lower density was passed over', () => {
     const random = seeded(2008);
+    let found = 0;
     for (let k = 0; k < 1000; k++) {
       const x = randomFractions(random);
       const T = 230 + 190 * random();
@@ -363,6 +363,7 @@ describe('the laws of a gas', () => {
       const along = isothermOf(mixtureOf(x), T);
       const rho = gasDensity(along, p);
       if (rho === undefined) continue;
+      found++;
       const place = `${p} Pa, ${T} K, ${x}`;
       expect(Math.abs(pressureAt(along, rho).p / p - 1), place).toBeLessThan(1e-11);
       const lower = Array.from({ length: 60 }, (_, i) => pressureAt(along, (rho * (i + 0.5)) / 60.1));
@@ -371,12 +372,7 @@ describe('the laws of a gas', () => {
         place,
       ).toBe(true);
     }
-  });
-
-  it('is found as quickly by itself as inside a state', () => {
-    const x = mixtureOf(componentNames.map((name) => Number(natural[name] ?? 0)));
-    expect(gasDensityAt(x, Pa(5e6), K(300))).toBe(solved(5e6, 300, natural).density);
-    expect(gasDensityAt(x, Pa(5e6), K(10))).toBeUndefined();
+    expect(found).toBeGreaterThan(500); // of 1000 states
   });
 
   it('is told from a liquid near the vapour pressure of a pure substance', () => {

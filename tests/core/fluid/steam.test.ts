@@ -115,18 +115,21 @@ describe('wet steam', () => {
   });
   it('answers 5,000 random states with numbers or a reason', () => {
     const random = seeded(97);
+    let found = 0;
     for (let k = 0; k < 5000; k++) {
       const quality = 1.2 * random() - 0.1;
       const p = random() < 0.5 ? 10 ** (1 + 7 * random()) : undefined;
       const t = p === undefined || random() < 0.2 ? -50 + 500 * random() : undefined;
       const refused = problems(water({ quality }), p, t);
       if (refused.length > 0) continue;
+      found++;
       const figures = Object.values(solved(water({ quality }), p, t)).filter((value) => typeof value === 'number');
       expect(
         figures.every((value) => Number.isFinite(value) && value > 0),
         `${quality} ${p} ${t}`,
       ).toBe(true);
     }
+    expect(found).toBeGreaterThan(500); // of 5000 states
   });
 });
 

@@ -15,7 +15,7 @@ describe('the constants', () => {
     expect(standardAtmosphere).toBe(101325); // NIST SP 811, B.8
     expect(standardGravity).toBe(9.80665); // CGPM 1901
     expect(inch).toBe(0.0254); // International yard and pound, 1959
-    expect(poundPerSquareInch).toBe((0.45359237 * 9.80665) / 0.0254 ** 2); // 6894.757 Pa, NIST SP 811, B.8
+    expect(poundPerSquareInch).toBe((45359237 * 980665) / 64516e5); // 6894.757 Pa, NIST SP 811, B.8
     expect(zeroCelsius).toBe(273.15); // SI Brochure, 9th edition, 2.3.1
   });
 

@@ -2,7 +2,7 @@
  * Air, dry or moist: by the formula of metrology inside its range, as a mixture of gases elsewhere; its sound always as a
  * mixture. Standard: CIPM-2007 (Metrologia 45 (2008) 149); ISO 20765-2:2015 (GERG-2008). Symbols: theirs; SI.
  */
-import type { DynamicViscosity, Temperature } from '../../quantity/kinds.ts';
+import type { Density, DynamicViscosity, Temperature } from '../../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../../quantity/outcome.ts';
 import type { Caution, FluidState, StatedUncertainty } from '../contract.ts';
 import { gasCautions, gasUncertainty, outsideBy, refusedOutside } from '../gas/range.ts';
@@ -66,7 +66,7 @@ function stateFrom(
     molarMass,
     speedOfSound,
   };
-  const atBase = baseOf(xv, base, basis);
+  const atBase = baseAir(xv, base, basis);
   const cautions = cautionsOf(xv, vapour, conditions, density / molarMass);
   return {
     ...figures,
@@ -105,14 +105,14 @@ function viscosityOf(
 /** Expanded relative uncertainty of the viscosity with vapour: that of the scheme for light gases. */
 const WITH_VAPOUR = 0.03;
 
-function baseOf(xv: number, base: State, basis: BaseBasis): BaseAir | undefined {
+function baseAir(xv: number, base: State, basis: BaseBasis): BaseAir | undefined {
   if (outsideBy(base.pressure, base.temperature) !== undefined) return undefined;
   const whole = airDensity(base.pressure, base.temperature, xv);
   const found = basis === 'wet' ? whole : airDensity(base.pressure, base.temperature, 0);
   if (whole === undefined || found === undefined) return undefined;
   const water = massFraction(xv, whole.molarMass);
   const density = basis === 'wet' ? found.density : found.density / (1 - water); // q_m (1 - w) is the dry air
-  return { ...found, basis, water, density: density as BaseAir['density'] };
+  return { ...found, basis, water, density: density as Density };
 }
 
 function uncertaintiesOf(
@@ -154,6 +154,7 @@ function moistureOf({ numbers, quantities }: Parsed, { paths }: Conditions): Out
   return fail('moisture-twice', paths.own(second.by), { first: first.by, second: second.by });
 }
 
+/** Air, by whichever of three figures says how moist it is. */
 export const air: FluidModel = {
   kind: 'air',
   fields: [

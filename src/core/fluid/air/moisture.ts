@@ -3,6 +3,7 @@
  * the air itself. Standard: CIPM-2007, Eq. 3 and A1.3 (x_v = h f p_s / p); WMO-No. 8, Annex 4.B (psychrometer).
  * Symbols: h relative humidity, t_d dew point, t_w wet bulb, f enhancement factor, p_s saturation pressure; SI.
  */
+import { isInside } from '../../numeric/bounds.ts';
 import { zeroCelsius as freezing } from '../../quantity/constants.ts';
 import type { AbsolutePressure, Temperature } from '../../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../../quantity/outcome.ts';
@@ -33,6 +34,7 @@ export interface Vapour {
 const humidRange = { min: 223.15, max: criticalTemperature };
 const lowestDewPoint = enhancementRange.temperature.min; // K, 173.15
 
+/** Where the psychrometer coefficient comes from. */
 export const psychrometerSource: Source = { clause: 'WMO-No. 8, Annex 4.B, aspirated psychrometer', seen: 'memory' };
 /** Where that coefficient was found, Pa: about atmospheric pressure (practice). */
 export const psychrometerRange = { min: 60e3, max: 110e3 } as const;
@@ -117,9 +119,7 @@ export function moistureCautions({ moisture }: Vapour, { pressure: p, temperatur
   const at = moisture.by === 'relativeHumidity' ? T : moisture.temperature;
   const { temperature, pressure } = enhancementRange;
   const caution = (id: string, value: number, unit: string, limit: Caution['limit'], source: Source): Caution[] =>
-    value >= (limit.min ?? 0) && value <= (limit.max ?? Number.POSITIVE_INFINITY)
-      ? []
-      : [{ id, verdict: 'caution', value, unit, limit, source }];
+    isInside(value, limit) ? [] : [{ id, verdict: 'caution', value, unit, limit, source }];
   return [
     ...caution('enhancement-temperature', at, 'K', temperature, enhancementSource),
     ...caution('enhancement-pressure', p, 'Pa', pressure, enhancementSource),

@@ -28,6 +28,7 @@ const hardy: Source = { clause: 'Hardy 1998 (ITS-90), after Greenspan, J. Res. N
 
 /** Where the enhancement factor is known. Greenspan 1976: -100 degC to 100 degC, to 2 MPa. K and Pa. */
 export const enhancementRange = { temperature: { min: 173.15, max: 373.15 }, pressure: { max: 2e6 } } as const;
+/** Where that range comes from. */
 export const enhancementSource = hardy;
 
 /**

@@ -7,6 +7,7 @@ import { type CubicComponent, cubicPhase, cubicState } from './peng-robinson.ts'
 
 const R = molarGasConstant.exact;
 
+/** What the equation answers. */
 export interface PureGas {
   readonly molarVolume: number; // m3/mol
   readonly compressibility: number;

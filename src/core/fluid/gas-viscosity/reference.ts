@@ -14,6 +14,7 @@ import {
   type SimpleFluid,
 } from './pure.table.ts';
 
+/** Viscosity in uPa.s at T, K, and molar density, mol/dm3. */
 export type Correlation = (T: number, rho: number) => number;
 
 const sum = <Term>(terms: readonly Term[], of: (term: Term, at: number) => number): number =>

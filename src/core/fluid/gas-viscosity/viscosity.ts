@@ -2,6 +2,7 @@
  * Viscosity of a gas of known composition: the reference correlation where it is one pure gas or dry air, the scheme of
  * mixtures for the rest. Standard: none; the sources of pure.ts and scheme.ts. Symbols: T in K, rho in mol/m3.
  */
+import { isInside } from '../../numeric/bounds.ts';
 import type { DynamicViscosity, Temperature } from '../../quantity/kinds.ts';
 import type { Source } from '../../quantity/source.ts';
 import type { Caution, StatedUncertainty } from '../contract.ts';
@@ -98,6 +99,6 @@ export function viscosityCautions(
   T: Temperature,
 ): readonly Caution[] {
   const [min, max] = temperatures;
-  if (T >= min && T <= max) return [];
+  if (isInside(T, { min, max })) return [];
   return [{ id: 'viscosity-range-temperature', verdict: 'caution', value: T, unit: 'K', limit: { min, max }, source }];
 }

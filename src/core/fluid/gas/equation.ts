@@ -18,6 +18,7 @@ export interface GasEquation {
   readonly uncertainty: (x: readonly number[], p: number, T: number) => StatedUncertainty | undefined;
 }
 
+/** By the names of the file. */
 export const gasEquations = {
   'gerg-2008': { source: GERG, mixtureOf, cautions: gergCautions, uncertainty: gasUncertainty },
   'aga8-detail': {
@@ -28,5 +29,7 @@ export const gasEquations = {
   },
 } as const satisfies Readonly<Record<string, GasEquation>>;
 
+/** A name of an equation in the file. */
 export type EquationName = keyof typeof gasEquations;
+/** Those names, in the order they are offered. */
 export const equationNames = Object.keys(gasEquations) as readonly EquationName[];

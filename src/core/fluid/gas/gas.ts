@@ -2,7 +2,7 @@
  * A gas or gas mixture of known composition: density, speed of sound and isentropic exponent by one equation of state.
  * Standard: ISO 20765-2:2015 (GERG-2008), 21 components, or AGA Report No. 8, Part 1 (DETAIL). Symbols: theirs; SI.
  */
-import type { AbsolutePressure, Density, MolarMass, Temperature } from '../../quantity/kinds.ts';
+import type { Density, MolarMass, Temperature } from '../../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../../quantity/outcome.ts';
 import type { FluidState } from '../contract.ts';
 import { splits } from '../cubic/stability.ts';
@@ -90,7 +90,7 @@ function stateFrom(
     molarMass: mixture.molarMass as MolarMass,
     speedOfSound: Math.sqrt(properties.speedOfSoundSquared),
   };
-  const atBase = baseOf(mixture, base);
+  const atBase = baseGas(mixture, base);
   const basis = viscosityBasis(x, temperature, rho);
   const doubts = [...(unasked ? [liquidCaution(p)] : []), ...phaseCautions(x, p, T, phase)];
   const cautions = [...doubts, ...equation.cautions(x, p, T), ...viscosityCautions(basis, temperature)];
@@ -112,7 +112,7 @@ function stateFrom(
 }
 
 /** ρ_b = p_b M / (Z_b R T_b), with Z_b = 1 where the gas would not be one gas at the base state. */
-function baseOf(mixture: Mixture, { pressure: p, temperature: T }: State): BaseGas {
+function baseGas(mixture: Mixture, { pressure: p, temperature: T }: State): BaseGas {
   const RT = mixture.R * T;
   const whole = outsideBy(p, T) === undefined && !condenses(mixture.x, p, T);
   const rho = whole ? gasDensity(isothermOf(mixture, T), p) : undefined;
@@ -124,17 +124,8 @@ function baseOf(mixture: Mixture, { pressure: p, temperature: T }: State): BaseG
   };
 }
 
-/**
- * Density alone, kg/m3, for long series of states of one mixture; undefined where the gas has none.
- */
-export function gasDensityAt(mixture: Mixture, p: AbsolutePressure, T: Temperature): Density | undefined {
-  if (outsideBy(p, T) !== undefined) return undefined;
-  const rho = gasDensity(isothermOf(mixture, T), p);
-  return rho === undefined ? undefined : ((rho * mixture.molarMass) as Density);
-}
-
 /** Pure gases by their names: those of the equation, and those beside it. */
-const named: ReadonlyMap<string, string> = new Map([
+const pureNames: ReadonlyMap<string, string> = new Map([
   ...otherGasNames,
   ...componentNames.flatMap((name) =>
     [name, ...(spellings[name] ?? [])].map((form) => [plainName(form), name] as const),
@@ -170,11 +161,12 @@ function pureState(name: string, conditions: Conditions, asked: Asked): Outcome<
   return fail('gas-density-none', paths.own('phase'), { pressure, temperature, phase: asked.phase });
 }
 
+/** Gases by their composition or their name. */
 export const gas: FluidModel = {
   kind: 'gas',
   fields: [
     { name: 'composition', type: 'fractions', required: false },
-    { name: 'name', type: 'name', names: named, required: false },
+    { name: 'name', type: 'name', names: pureNames, required: false },
     { name: 'basis', type: 'choice', choices: ['mole', 'mass'], required: false },
     { name: 'normalise', type: 'flag' },
     { name: 'equation', type: 'choice', choices: equationNames, required: false },

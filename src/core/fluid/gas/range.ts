@@ -1,7 +1,9 @@
 /**
- * Where GERG-2008 holds and how well, and what may go wrong with a gas beside it: a second phase, condensing water.
+ * What every gas is asked whatever its equation: is it evaluated at all, would a second phase form, would water condense.
+ * And where GERG-2008 holds and how well; the range of DETAIL stands in detail/range.ts.
  * Standard: ISO 20765-2:2015 (GERG-2008), range of validity. SI.
  */
+import { type Bounds, isInside } from '../../numeric/bounds.ts';
 import type { Temperature } from '../../quantity/kinds.ts';
 import { fail, type Outcome } from '../../quantity/outcome.ts';
 import type { Source } from '../../quantity/source.ts';
@@ -12,6 +14,7 @@ import { componentNames } from '../helmholtz/components.ts';
 import { criticalTemperature, saturationPressure } from '../if97/saturation.ts';
 import type { Conditions } from '../model.ts';
 
+/** The equation that a gas is computed by where nothing else is said. */
 export const GERG: Source = { clause: 'ISO 20765-2:2015 (GERG-2008)', seen: 'second-hand' };
 
 const normal = { temperature: { min: 90, max: 450 }, pressure: { max: 35e6 } } as const; // K, Pa
@@ -24,9 +27,10 @@ const cubicTest: Source = {
 };
 const waterTest: Source = { clause: 'x p of the water against IAPWS R7-97(2012), Eq. 30', seen: 'derived' };
 
-/** Beyond these the equation is not evaluated at all (practice). K, Pa. */
-export const evaluated = { temperature: { min: 20, max: 3000 }, pressure: { max: 200e6 } } as const;
+/** Beyond these no equation is evaluated at all (practice). K, Pa. */
+const evaluated = { temperature: { min: 20, max: 3000 }, pressure: { max: 200e6 } } as const;
 
+/** Which of pressure, Pa, and temperature, K, is beyond those bounds; undefined where both are inside. */
 export function outsideBy(p: number, T: number): 'pressure' | 'temperature' | undefined {
   if (!(T >= evaluated.temperature.min && T <= evaluated.temperature.max)) return 'temperature';
   return p > 0 && p <= evaluated.pressure.max ? undefined : 'pressure';
@@ -60,11 +64,7 @@ export function phaseSum(x: readonly number[], p: number, T: number, phase: 'gas
  * Below the triple point its pressure is the limit: condensing is then told late, above it rather early (a gas under
  * pressure holds more water than x p says).
  */
-export function waterPressures(
-  x: readonly number[],
-  p: number,
-  T: number,
-): { at: number; saturated: number } | undefined {
+function waterPressures(x: readonly number[], p: number, T: number): { at: number; saturated: number } | undefined {
   const water = x[waterPlace] ?? 0;
   if (water === 0 || T > criticalTemperature) return undefined;
   return { at: water * p, saturated: saturationPressure(Math.max(T, triplePoint) as Temperature) };
@@ -127,13 +127,9 @@ export function phaseCautions(x: readonly number[], p: number, T: number, phase:
   ].filter((caution) => caution !== undefined);
 }
 
-type Limit = Caution['limit'];
-const within = (value: number, { min = 0, max = Number.POSITIVE_INFINITY }: Limit): boolean =>
-  value >= min && value <= max;
-
-function rangeCaution(id: string, value: number, unit: string, usual: Limit, wide: Limit): Caution | undefined {
-  if (within(value, usual)) return undefined;
-  const known = within(value, wide);
+function rangeCaution(id: string, value: number, unit: string, usual: Bounds, wide: Bounds): Caution | undefined {
+  if (isInside(value, usual)) return undefined;
+  const known = isInside(value, wide);
   return known
     ? { id, verdict: 'caution', value, unit, limit: usual, source: normalRange }
     : { id, verdict: 'outside', value, unit, limit: wide, source: extendedRange };
@@ -148,7 +144,7 @@ const poorly = ['hydrogen', 'water', 'hydrogen-sulfide'].map((name) => component
  * much hydrogen, water or hydrogen sulfide 1 %; none is known outside the normal range.
  */
 export function gasUncertainty(x: readonly number[], p: number, T: number): StatedUncertainty | undefined {
-  if (!within(T, normal.temperature) || !within(p, normal.pressure)) return undefined;
+  if (!isInside(T, normal.temperature) || !isInside(p, normal.pressure)) return undefined;
   const share = poorly.reduce((sum, place) => sum + (x[place] ?? 0), 0);
   const best = T >= 250 && (share <= POORLY_KNOWN || x.includes(1)); // a pure gas is known well
   return { share: best ? 0.001 : 0.01, source: { clause: `${GERG.clause}, uncertainty`, seen: 'memory' } };

@@ -38,6 +38,7 @@ const departureRows = Object.entries(functions).map(([name, { powers, bells }]) 
   ],
 }));
 
+/** Every term of the equation, each slot once. */
 export const gergSlots = slotSet([...pureRows.flat(), ...departureRows.flatMap(({ rows }) => rows)]);
 
 const shareOf = (rows: readonly Row[]): Share => ({
@@ -48,6 +49,7 @@ const shareOf = (rows: readonly Row[]): Share => ({
 /** What one mole of each component adds, in the order of components.table.ts. */
 export const pureShares: readonly Share[] = pureRows.map(shareOf);
 
+/** The pairs that have a departure function, in the order of departure.table.ts. */
 export const departures: readonly Departure[] = pairs.map(([i, j, F, name]) => {
   const found = departureRows.find((candidate) => candidate.name === name);
   if (found === undefined) throw new Error(`expected a departure function ${name}, got none`);

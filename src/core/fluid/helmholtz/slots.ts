@@ -41,6 +41,7 @@ export interface SlotSet {
 /** Figures of one shape in SlotSet.figures. */
 export const figuresPerShape = 5;
 
+/** The shape without an exponential. */
 export const plain: Shape = { order: 0, eta: 0, epsilon: 0, beta: 0, gamma: 0 };
 
 const shapeKey = ({ order, eta, epsilon, beta, gamma }: Shape): string => [order, eta, epsilon, beta, gamma].join(' ');

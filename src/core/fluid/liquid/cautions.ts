@@ -1,4 +1,5 @@
 /** Where the formulation of a liquid is continued beyond its range, or is known to be off. */
+import { isInside } from '../../numeric/bounds.ts';
 import type { Caution } from '../contract.ts';
 import type { State } from '../model.ts';
 import type { Liquid, Property } from './contract.ts';
@@ -27,7 +28,7 @@ const caution = (
 ): Caution => ({ id, verdict: 'caution', value, unit, limit, source });
 
 function beyondTemperature(id: string, property: Property | undefined, { temperature: T }: State): readonly Caution[] {
-  if (property === undefined || (T >= property.min && T <= property.max)) return [];
+  if (property === undefined || isInside(T, property)) return [];
   const { min, max, source } = property;
   return [caution(id, T, 'K', { min, max }, source)];
 }
@@ -40,6 +41,6 @@ function thinOil(viscosity: Property | undefined, figures: LiquidFigures): reado
 }
 
 function beyondPressure({ pressure }: Liquid, { factor }: LiquidFigures, at: State): readonly Caution[] {
-  if (pressure === undefined || factor === undefined || at.pressure <= pressure.max) return [];
+  if (pressure === undefined || factor === undefined || isInside(at.pressure, { max: pressure.max })) return [];
   return [caution('liquid-pressure-range', at.pressure, 'Pa', { max: pressure.max }, pressure.source)];
 }

@@ -28,6 +28,7 @@ export interface PressureFactor {
   readonly words: string;
 }
 
+/** A liquid, whatever its formulation. */
 export interface Liquid {
   readonly name: string;
   /** Density at the reference pressure, kg/m3. */

@@ -26,7 +26,7 @@ export function figuresOf(liquid: Liquid, parsed: Parsed, conditions: Conditions
   if (!density.ok) return density;
   const viscosity = viscosityAt(liquid, parsed, density.value.density, conditions);
   if (!viscosity.ok) return viscosity;
-  const baseDensity = parsed.quantities.baseDensity?.si ?? baseOf(liquid, modulus, base);
+  const baseDensity = parsed.quantities.baseDensity?.si ?? baseDensityOf(liquid, modulus, base);
   return ok({
     ...density.value,
     reference,
@@ -91,7 +91,11 @@ function viscosityAt(
 }
 
 /** Density at the project's base state; a liquid that boils there is taken under its own vapour pressure. */
-function baseOf(liquid: Liquid, modulus: number | undefined, { pressure, temperature: T }: State): number | undefined {
+function baseDensityOf(
+  liquid: Liquid,
+  modulus: number | undefined,
+  { pressure, temperature: T }: State,
+): number | undefined {
   const reference = reach(liquid.density, T);
   if (reference === undefined) return undefined;
   if (modulus === undefined) return reference * (liquid.pressure?.at(pressure, T) ?? 1);

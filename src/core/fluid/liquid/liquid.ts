@@ -73,6 +73,7 @@ const ruleOf = (rule: string | undefined): ViscosityRule => (rule === 'walther' 
 const withMass = (basis: 'mass' | 'volume', own: (name: string) => string): Outcome<never> | undefined =>
   basis === 'mass' ? undefined : fail('concentration-basis', own('concentrationBasis'));
 
+/** Liquids by name, table or petroleum density. */
 export const liquid: FluidModel = {
   kind: 'liquid',
   fields: [

@@ -24,6 +24,7 @@ const expansion: Source = { clause: 'API MPMS 11.1-2004, 11.1.6.1 (CTL)', seen: 
 const compression: Source = { clause: 'API MPMS 11.1-2004, 11.1.6.1 (CPL)', seen: 'second-hand' };
 const viscosityBy: Source = { clause: 'ASTM D341, line through the stated viscosities', seen: 'memory' };
 
+/** The kinds of oil that can be named. */
 export const products = ['crude-oil', 'refined-product', 'lubricating-oil'] as const;
 export type Product = (typeof products)[number];
 
@@ -93,11 +94,7 @@ function settle(product: Product, { quantities, numbers }: Parsed, own: (name: s
   if (found !== undefined && group !== undefined) return ok({ group, rho60: found });
   const least = product === 'lubricating-oil' ? 'lubricating' : 'crude';
   const { min, max } = groups.find((candidate) => candidate.group === least) as Group;
-  return fail('petroleum-density-out-of-range', own(name), {
-    density: Number.isFinite(rho) ? (rho as number) : 0,
-    min,
-    max,
-  });
+  return fail('petroleum-density-out-of-range', own(name), { min, max });
 }
 
 /** Density at 60 degF of one at 15 degC: each round is a thousand times nearer. Undefined outside every group. */

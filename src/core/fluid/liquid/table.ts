@@ -9,6 +9,7 @@ import type { Row } from '../model.ts';
 import { furthestBeyond, type Liquid } from './contract.ts';
 import { andrade, walther, waltherOf } from './walther.ts';
 
+/** How the viscosity runs between the rows: ln μ over 1/T, or the line of D341. */
 export type ViscosityRule = 'andrade' | 'walther';
 
 const byTable: Source = { clause: 'table stated by the user, between its rows', seen: 'practice' };

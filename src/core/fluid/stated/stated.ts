@@ -83,6 +83,7 @@ function viscosityOf(parsed: Parsed, rho: Density): Pick<StatedFigures, 'viscosi
   return { viscosity: (rho * given.si) as DynamicViscosity, kinematicViscosity: given.si as KinematicViscosity }; // μ = ρ ν
 }
 
+/** A fluid of the user's own figures. */
 export const stated: FluidModel = {
   kind: 'stated',
   fields: [

@@ -89,7 +89,7 @@ function stateFrom(conditions: Conditions, place: Place, forced: boolean, proper
   const { density, speedOfSoundSquared } = properties;
   const vapourPressure = vapourPressureAt(T);
   const saturationTemperature = boilingAt(p);
-  const base = place.side === 'liquid' ? baseOf(conditions) : undefined;
+  const base = place.side === 'liquid' ? baseWater(conditions) : undefined;
   const figures = {
     pressure: p,
     temperature: T,
@@ -117,7 +117,7 @@ function stateFrom(conditions: Conditions, place: Place, forced: boolean, proper
 }
 
 /** Density at the project's base state, where the formulation holds it and it is liquid there. */
-function baseOf({ base }: Conditions): { readonly density: Density; readonly source: Source } | undefined {
+function baseWater({ base }: Conditions): { readonly density: Density; readonly source: Source } | undefined {
   const { pressure, temperature } = base;
   if (outsideBy(pressure, temperature) !== undefined) return undefined;
   const place = placeOf(pressure, temperature);
@@ -143,6 +143,7 @@ function stateOfWater({ choices, numbers }: Parsed, conditions: Conditions): Out
   return liquid === undefined ? impossible(conditions, 'liquid') : ok(wetSteam(vapour.value, liquid, quality));
 }
 
+/** Water and steam, by state, named phase or quality. */
 export const water: FluidModel = {
   kind: 'water',
   fields: [
