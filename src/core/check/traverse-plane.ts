@@ -39,7 +39,8 @@ export const checkPlane = (subject: TraverseCase): readonly Finding[] => [
 function checkStraight({ rule, straight }: TraverseInput): readonly Finding[] {
   const lengths = rule === 'equal-area' ? EQUAL_AREA : VELOCITY_AREA;
   const judged = (value: number, { full, least, source }: Lengths): Omit<Finding, 'id'> => {
-    const verdict: Verdict = value >= full ? 'inside' : value >= least ? 'caution' : 'outside';
+    const reaches = (min: number): boolean => within(value, { min }) === 'inside';
+    const verdict: Verdict = reaches(full) ? 'inside' : reaches(least) ? 'caution' : 'outside';
     return { assumption: 'one-streamline', verdict, value, unit: 'D', limit: { min: full }, source, detail: { least } };
   };
   const { before, after } = straight;

@@ -10,7 +10,7 @@ const iso = (clause: string): Source => ({ clause: `ISO 3966, ${clause}`, seen: 
 const CUSTOM: Source = { clause: 'custom of the trade', seen: 'practice' };
 
 const MOST_HEAD = 0.02; // of the diameter
-const STEM = { full: 1, least: 2 }; // % of the area
+const STEM = { full: 1, most: 2 }; // % of the area
 const MOST_ANGLE = (3 * Math.PI) / 180; // rad
 const LEAST_REYNOLDS = 200; // of the total-pressure hole
 
@@ -45,9 +45,10 @@ function checkStem({ input: { probe }, survey: { plan } }: TraverseCase): readon
   if (probe.stem === undefined) return [];
   const deepest = Math.max(...plan.lines.flatMap(({ points }) => points.map(({ position }) => position)));
   const value = (100 * probe.stem * deepest) / plan.area; // frontal area over that of the duct
-  const verdict: Verdict = value <= STEM.full ? 'inside' : value <= STEM.least ? 'caution' : 'outside';
+  const below = (max: number): boolean => within(value, { max }) === 'inside';
+  const verdict: Verdict = below(STEM.full) ? 'inside' : below(STEM.most) ? 'caution' : 'outside';
   const common = { id: 'traverse-stem-blockage', assumption: 'one-streamline', verdict, unit: '%' } as const;
-  return [{ ...common, value, limit: { max: STEM.full }, source: CUSTOM, detail: { most: STEM.least } }];
+  return [{ ...common, value, limit: { max: STEM.full }, source: CUSTOM, detail: { most: STEM.most } }];
 }
 
 function checkWall({ survey: { plan } }: TraverseCase): readonly Finding[] {

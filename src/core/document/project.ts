@@ -8,7 +8,6 @@ export type {
   InstallationText,
   MeterText,
   PipeText,
-  ProbeText,
   ProjectV1 as Project,
   TraverseText,
   UncertaintyText,

@@ -4,7 +4,7 @@ import type { Density, Length, PressureDifference, Ratio, Temperature, Velocity 
 import { at, type Form } from './form.ts';
 import { readWithin } from './traverse-section.ts';
 
-export const PROBES = ['pitot-static', 's-type'] as const;
+const PROBES = ['pitot-static', 's-type'] as const;
 export type ProbeKind = (typeof PROBES)[number];
 
 export interface ProbePoint {

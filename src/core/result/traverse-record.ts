@@ -57,6 +57,7 @@ export interface TraverseUncertaintyRecord {
     readonly percentOfFlow: number;
     readonly stated: boolean;
   }[];
+  readonly source: Source;
 }
 
 export interface TraverseFlowRecord {

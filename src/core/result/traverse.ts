@@ -56,7 +56,9 @@ export function assembleTraverse(parts: TraverseParts): SolvedTraverse {
     ...(budget === undefined ? {} : { uncertainty: uncertaintyRecord(budget) }),
     checks,
     working,
-    sources: sourcesOnce(sourcesOf(survey, [...working, ...checks, ...suggestions])),
+    sources: sourcesOnce(
+      sourcesOf(survey, [...working, ...checks, ...suggestions, ...(budget === undefined ? [] : [budget])]),
+    ),
   };
 }
 
@@ -119,9 +121,10 @@ function qualityRecord(quality: Quality, { rule }: TraverseInput, { plan }: Surv
   };
 }
 
-const uncertaintyRecord = ({ expandedPercent, terms }: TraverseBudget): TraverseUncertaintyRecord => ({
+const uncertaintyRecord = ({ expandedPercent, terms, source }: TraverseBudget): TraverseUncertaintyRecord => ({
   expanded_percent: expandedPercent,
   terms,
+  source,
 });
 
 const sourcesOf = ({ plan }: Survey, parts: readonly { readonly source: Source }[]): readonly Source[] => [

@@ -61,7 +61,7 @@ export function planOf(input: TraverseInput): Outcome<Plan> {
 }
 
 /** Inside area of the section, m2. */
-export const areaOf = (section: Section): number =>
+const areaOf = (section: Section): number =>
   section.shape === 'circular' ? (Math.PI / 4) * section.diameter ** 2 : section.width * section.height;
 
 /** Inside length of a line, from wall to wall. */

@@ -1,5 +1,6 @@
 /** How many points a section asks for, by each practice that says so: a choice to begin with, never forced. */
 import { hydraulicDiameter, type Section } from '../input/traverse-section.ts';
+import { isInside } from '../numeric/bounds.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Rule } from './layout.ts';
 
@@ -58,7 +59,8 @@ function method1(section: Section, { before = 0, after = 0 }: Straight): readonl
   const circular = section.shape === 'circular';
   const tooSmall = circular ? De < SMALLEST.diameter : section.width * section.height < SMALLEST.area;
   if (tooSmall) return [];
-  const step = STEPS.find((one) => before >= one.before && after >= one.after) ?? STEPS[3];
+  const step =
+    STEPS.find((one) => isInside(before, { min: one.before }) && isInside(after, { min: one.after })) ?? STEPS[3];
   const ideal = step === STEPS[0] && De <= SMALL;
   const [lines, pointsPerLine] = circular ? [2, (ideal ? 8 : step.circular) / 2] : ideal ? [3, 3] : step.rectangular;
   return [{ practice: 'epa-method-1', rule: 'equal-area', lines, pointsPerLine, source: METHOD_1 }];
@@ -67,7 +69,7 @@ function method1(section: Section, { before = 0, after = 0 }: Straight): readonl
 function balancing(section: Section, { before = 0, after = 0 }: Straight): Suggestion {
   const practice = { practice: 'air-balancing', source: BALANCING } as const;
   if (section.shape === 'circular') {
-    const good = before >= GOOD.before && after >= GOOD.after;
+    const good = isInside(before, { min: GOOD.before }) && isInside(after, { min: GOOD.after });
     return { ...practice, rule: 'log-linear', lines: good ? 2 : 3, pointsPerLine: good ? 6 : 10 };
   }
   const points = (side: number): number => SIDES.find(({ below }) => side < below)?.points ?? LARGEST_SIDE_POINTS;

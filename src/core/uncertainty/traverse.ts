@@ -10,10 +10,10 @@ import { biasOnPowerLaw } from '../traverse/bias.ts';
 import type { Measured, Survey } from '../traverse/survey.ts';
 import { indicatedVelocity, pointVelocity } from '../traverse/velocity.ts';
 
-export const TRAVERSE_EQUATION: Source = { clause: 'ISO 3966, clause 13', seen: 'memory' };
+const EQUATION: Source = { clause: 'ISO 3966, clause 13', seen: 'memory' };
 const POWER_LAW = 7; // u ~ y^(1/7), the profile by which a rule is judged
 
-export type TraverseTermName = 'reading' | 'coefficient' | 'density' | 'area' | 'points';
+type TraverseTermName = 'reading' | 'coefficient' | 'density' | 'area' | 'points';
 
 export interface TraverseTerm {
   readonly name: TraverseTermName;
@@ -25,6 +25,7 @@ export interface TraverseTerm {
 export interface TraverseBudget {
   readonly expandedPercent: number;
   readonly terms: readonly TraverseTerm[];
+  readonly source: Source;
 }
 
 /** The budget of a complete survey in motion; undefined without a flow. */
@@ -44,7 +45,7 @@ export function traverseUncertainty(input: TraverseInput, survey: Survey): Trave
     },
   ];
   const squares = terms.reduce((sum, { percentOfFlow }) => sum + percentOfFlow ** 2, 0);
-  return { expandedPercent: Math.sqrt(squares), terms };
+  return { expandedPercent: Math.sqrt(squares), terms, source: EQUATION };
 }
 
 /** Sum of w v U/(2 Δp) over the mean; a reading below U counts as one of U, where the root still has a slope. */

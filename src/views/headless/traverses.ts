@@ -26,12 +26,22 @@ export function traverseOf(result: SolvedTraverse, print: Print, { working = fal
     measured: result.measured,
     ...(complete ? {} : { read: readOf(result) }),
     ...(quality === undefined ? {} : { quality }),
-    ...(uncertainty === undefined ? {} : { uncertainty }),
-    suggestions: result.suggestions.map(({ source, ...one }) => ({ ...one, source: source.clause, seen: source.seen })),
+    ...(uncertainty === undefined ? {} : { uncertainty: sourced(uncertainty) }),
+    suggestions: result.suggestions.map(sourced),
     checks: checks.map((finding) => checkOf(finding, print)),
     ...(working ? { working: result.working } : {}),
   };
 }
+
+/** A figure with its source in two words. */
+const sourced = <Figure extends { readonly source: SolvedTraverse['sources'][number] }>({
+  source,
+  ...figure
+}: Figure): object => ({
+  ...figure,
+  source: source.clause,
+  seen: source.seen,
+});
 
 /** A meter whose units are those of the traverse: differentials as they were read, pascal before anything is. */
 export function unitsLike(traverse: TraverseText | undefined): MeterText {
