@@ -22,18 +22,19 @@ const files: Readonly<Record<string, () => Promise<string> | string>> = {
   'keys in another order': () => '{"meters":[{"tag":"FE-9"}],"version":1,"format":"headwright"}',
 };
 
-for (const [name, textOf] of Object.entries(files)) {
-  test(`opened and saved again is the same file: ${name}`, async ({ page }) => {
-    const text = await textOf();
-    await open(page);
-    await openFile(page, 'given.headwright.json', text);
-    await expect(page.getByText('given.headwright.json is open.')).toBeVisible();
-    expect((await save(page)).equals(Buffer.from(text))).toBe(true);
-    await page.reload();
-    await expect(keeping(page)).toContainText('Kept in this browser');
-    expect((await save(page)).equals(Buffer.from(text))).toBe(true);
-  });
-}
+test('opened and saved again is the same file, byte for byte, also after a reload', async ({ page }) => {
+  await open(page);
+  for (const [name, textOf] of Object.entries(files))
+    await test.step(name, async () => {
+      const text = await textOf();
+      await openFile(page, `${name}.json`, text);
+      await expect(page.getByText(`${name}.json is open.`)).toBeVisible();
+      expect((await save(page)).equals(Buffer.from(text))).toBe(true);
+      await page.reload();
+      await expect(keeping(page)).toContainText('Kept in this browser');
+      expect((await save(page)).equals(Buffer.from(text))).toBe(true);
+    });
+});
 
 test('an edit leaves alone what it does not know, and undone it gives the file back', async ({ page }) => {
   const project = JSON.parse(await exampleText());

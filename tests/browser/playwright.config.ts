@@ -15,7 +15,8 @@ export default defineConfig({
   forbidOnly: inCI,
   retries: 0,
   workers: 2,
-  timeout: 90_000,
+  fullyParallel: true,
+  timeout: 60_000, // twice what the longest takes on two busy cores
   expect: { timeout: 15_000 },
   reporter: [['list']],
   use: {

@@ -9,7 +9,7 @@ for (const locale of ['en-GB', 'de-DE', 'fr-FR', 'sv-SE']) {
   test.describe(locale, () => {
     test.use({ locale });
 
-    test('odd spellings are read, said, and written in one way', async ({ page }) => {
+    test('odd spellings are read, said, and written in one way, a unit alone converts', async ({ page }) => {
       await openExample(page);
       const differential = field(page, duty, 'Differential');
       const stored = async (typed: string): Promise<unknown> => {
@@ -27,10 +27,6 @@ for (const locale of ['en-GB', 'de-DE', 'fr-FR', 'sv-SE']) {
         pipe: { bore: '1234.5 mm' },
         upstream: { temperature: '-3.2 degC' },
       });
-    });
-
-    test('a unit alone converts what stood there', async ({ page }) => {
-      await openExample(page);
       const bore = field(page, upstream, 'Pipe bore');
       await bore.fill('101.6 mm');
       await bore.fill('in');
@@ -38,16 +34,16 @@ for (const locale of ['en-GB', 'de-DE', 'fr-FR', 'sv-SE']) {
       expect(await savedMeter(page)).toMatchObject({ pipe: { bore: '4 in' } });
       await expect(bore).toHaveValue('4');
     });
-
-    test('entering and leaving every field changes nothing', async ({ page }) => {
-      await openExample(page);
-      const before = await savedMeter(page);
-      for (const input of await page.getByRole('main').locator('input[data-field]').all()) {
-        await input.focus();
-        await input.blur();
-      }
-      expect(await savedMeter(page)).toEqual(before);
-      await expect(page.getByRole('button', { name: 'Undo', exact: true })).toBeDisabled();
-    });
   });
 }
+
+test('entering and leaving every field changes nothing', async ({ page }) => {
+  await openExample(page);
+  const before = await savedMeter(page);
+  for (const input of await page.getByRole('main').locator('input[data-field]').all()) {
+    await input.focus();
+    await input.blur();
+  }
+  expect(await savedMeter(page)).toEqual(before);
+  await expect(page.getByRole('button', { name: 'Undo', exact: true })).toBeDisabled();
+});
