@@ -50,7 +50,8 @@ function size(meter: MeterText, project: Surroundings): Outcome<Solved> {
   if (!solution.ok) return solution;
   const straight = straightness(input.value, solution.value); // 8 straight pipe, which the uncertainty of C needs
   if (!straight.ok) return straight;
-  const budgets = dutyUncertainty(solution.value, uncertainty, straight.value.parts); // 9 uncertainty of each flow
+  const { parts: extra, open } = straight.value;
+  const budgets = dutyUncertainty(solution.value, uncertainty, extra, open); // 9 uncertainty of each flow
   const checks = check({ input: input.value, solution: solution.value }, budgets, straight.value.findings); // 10 checks
   const parts = { input: input.value, solution: solution.value, straight: straight.value, budgets, checks };
   return ok(assemble({ ...parts, written: shape.value, site: site.value })); // 11 the record

@@ -3,6 +3,7 @@ import type { Part, StraightLength } from '../element/contract.ts';
 import type { MeterInput } from '../input/meter.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import type { Solution } from '../solve/solve.ts';
+import type { Open } from '../uncertainty/iso5167.ts';
 import type { Finding } from './finding.ts';
 
 /** What a length between columns B and A adds to the uncertainty of C. */
@@ -13,6 +14,8 @@ export interface Straightness {
   /** Additional parts of the uncertainty of C. */
   readonly parts: readonly Part[];
   readonly lengths: readonly StraightLength[];
+  /** Shorter than any length of the table: what that does to C the standard does not say. */
+  readonly open: readonly Open[];
 }
 
 /** Judges the installation. Problem choice-unknown: the element's table has no such fitting. */
@@ -38,6 +41,7 @@ export function straightness(input: MeterInput, solution: Solution): Outcome<Str
       : findings,
     parts: reduced.map(({ source }) => ({ id: 'straight-length', percent: REDUCED_PERCENT, source })).slice(0, 1),
     lengths,
+    open: both || findings.some(({ verdict }) => verdict === 'outside') ? ['straight-length'] : [],
   });
 }
 

@@ -1,6 +1,7 @@
 /** Puts a solved meter together into the one record that every view reads. */
 import type { Finding } from '../check/finding.ts';
 import type { Straightness } from '../check/straight.ts';
+import { unchecked } from '../check/unchecked.ts';
 import type { DutyName, MeterText } from '../document/project.ts';
 import { relativeDensity } from '../fluid/air/relative-density.ts';
 import type { FluidState } from '../fluid/contract.ts';
@@ -55,6 +56,7 @@ export function assemble(parts: Parts): Solved {
     points: pointsOf(parts),
     span_Pa: span,
     checks,
+    unchecked: unchecked({ input, solution }),
     straightLengths: straight.lengths,
     tappings: { upstream_m: tappings.upstream, downstream_m: tappings.downstream },
     unread: UNREAD.filter((key) => written[key] !== undefined),
@@ -91,7 +93,7 @@ export function stateRecord(state: FluidState, [relative]: readonly Working[]): 
   const optional = {
     isentropicExponent: state.isentropicExponent,
     compressibility: state.compressibility,
-    vapourPressure_Pa: state.vapourPressure,
+    vapourPressure_Pa: state.phase === 'liquid' ? state.vapourPressure : undefined,
     saturationTemperature_K: state.saturationTemperature,
     baseDensity_kg_m3: state.baseDensity,
     molarMass_kg_mol: state.molarMass,
@@ -145,6 +147,7 @@ function pointOf({ input, solution }: Parts, name: DutyName, operation: Operatio
       expanded_percent: budget.expandedPercent,
       terms: budget.terms.map(({ name: term, percentOfFlow }) => ({ name: term, percentOfFlow })),
       parts: budget.coefficientParts.map(({ id, percent }) => ({ name: id, percentOfC: percent })),
+      open: budget.open,
     },
   };
   return withLate<typeof figures, Pick<PointRecord, 'working'>>(figures, {

@@ -1,8 +1,9 @@
 /** Flow against differential from nothing to the span, evenly spaced in the root of the differential. */
 
-import type { Part } from '../element/contract.ts';
+import type { Limit, Part } from '../element/contract.ts';
 import type { StatedUncertainty } from '../input/uncertainty.ts';
 import { as } from '../quantity/brand.ts';
+import { differentialFrom } from '../solve/differential.ts';
 import type { Meter } from '../solve/equation.ts';
 import { flowFrom } from '../solve/flow.ts';
 import { flowUncertainty } from '../uncertainty/iso5167.ts';
@@ -13,7 +14,7 @@ const STEPS = 40;
 /** The curve of a meter up to its span, with the point of no flow left out. */
 export function curveOf(meter: Meter, span: number, stated: StatedUncertainty, extra: readonly Part[]): CurvePoint[] {
   const points: CurvePoint[] = [];
-  const { min = 0, max = Number.POSITIVE_INFINITY } = reynoldsLimits(meter);
+  const { min = 0, max = Number.POSITIVE_INFINITY } = reynoldsBounds(meter);
   for (let step = 1; step <= STEPS; step += 1) {
     const differential = as<'pressure difference'>(span * (step / STEPS) ** 2);
     const flow = flowFrom(differential, meter);
@@ -30,10 +31,29 @@ export function curveOf(meter: Meter, span: number, stated: StatedUncertainty, e
   return points;
 }
 
-/** The standard's Reynolds limits of a meter; they depend on its geometry alone. */
-export function reynoldsLimits({ primary, geometry }: Meter) {
+/** The standard's Reynolds limits of a meter, and the differentials of the flows that have them. */
+export function reynoldsLimits(meter: Meter) {
+  const { min, max, source } = reynoldsBounds(meter);
+  return {
+    ...(min === undefined ? {} : { min, ...named('minDifferential_Pa', differentialAt(min, meter)) }),
+    ...(max === undefined ? {} : { max, ...named('maxDifferential_Pa', differentialAt(max, meter)) }),
+    source,
+  };
+}
+
+/** They depend on the geometry alone. */
+function reynoldsBounds({ primary, geometry }: Meter): Limit {
   const limit = primary.limits(geometry, 0).find(({ id }) => id === 'reynolds-pipe');
   if (limit === undefined) throw new Error(`result: expected a Reynolds limit of ${primary.name}, got none`);
-  const { min, max, source } = limit;
-  return { ...(min === undefined ? {} : { min }), ...(max === undefined ? {} : { max }), source };
+  return limit;
 }
+
+/** The differential at a pipe Reynolds number; none where no differential makes that flow. */
+function differentialAt(reynolds: number, meter: Meter): number | undefined {
+  const massFlow = as<'mass flow'>((reynolds * Math.PI * meter.state.viscosity * meter.geometry.pipe) / 4); // ISO 5167-1:2003, 3.3.2
+  const operation = differentialFrom(massFlow, meter, 'duty.maximum');
+  return operation.ok ? operation.value.differential : undefined;
+}
+
+const named = <Key extends string>(key: Key, value: number | undefined) =>
+  (value === undefined ? {} : { [key]: value }) as { readonly [K in Key]?: number };

@@ -3,6 +3,7 @@
  * file writes them. A number that does not apply is absent.
  */
 import type { Finding } from '../check/finding.ts';
+import type { Unchecked } from '../check/unchecked.ts';
 import type { DutyName, Unknown } from '../document/project.ts';
 import type { Dimension, StraightLength } from '../element/contract.ts';
 import type { Phase } from '../fluid/contract.ts';
@@ -50,6 +51,8 @@ export interface PointUncertainty {
   readonly terms: readonly UncertaintyTerm[];
   /** Additive parts of the uncertainty of C, by the id of their words. */
   readonly parts: readonly { readonly name: string; readonly percentOfC: number }[];
+  /** What the figure leaves out: terms that are not stated, limits beyond which nothing is known; it is at least so much. */
+  readonly open: readonly string[];
 }
 
 export interface PointRecord {
@@ -107,9 +110,17 @@ export interface Solved {
   /** The differential of the span: what the user set, or that of the maximum flow. */
   readonly span_Pa: number;
   readonly checks: readonly Finding[];
+  /** Checks that could not be made, and the field each would need. */
+  readonly unchecked: readonly Unchecked[];
   readonly curve: readonly CurvePoint[];
   /** Pipe Reynolds numbers and differentials between which the standard holds for this element. */
-  readonly reynoldsLimits: { readonly min?: number; readonly max?: number; readonly source: Source };
+  readonly reynoldsLimits: {
+    readonly min?: number;
+    readonly max?: number;
+    readonly minDifferential_Pa?: number;
+    readonly maxDifferential_Pa?: number;
+    readonly source: Source;
+  };
   readonly heads: readonly HeadPoint[];
   readonly dimensions: readonly Dimension[];
   readonly tappings: { readonly upstream_m: number; readonly downstream_m: number };

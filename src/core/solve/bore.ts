@@ -8,6 +8,7 @@ import { root } from '../numeric/root.ts';
 import type { Length, MassFlow, PressureDifference } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import { expansibilityOf, geometryOf, heldDischarge, type Operation, reynoldsOf, withHeld } from './equation.ts';
+import { impossible } from './possible.ts';
 
 export interface Bore {
   readonly geometry: Geometry; // at the line temperature
@@ -26,7 +27,7 @@ const FIRST_EPSILON = 0.97; // Annex A, first guess for a gas
 /**
  * The bore at the line temperature that makes `differential` (Pa) at `massFlow` (kg/s) in a pipe of bore `pipe` (m).
  * Problems: bore-too-large and bore-too-small, with the end of the searched range and the differential it would make;
- * differential-exceeds-pressure; bore-unsettled, with the last bracket.
+ * those of possible.ts; bore-unsettled, with the last bracket.
  */
 export function boreFrom(
   massFlow: MassFlow,
@@ -35,9 +36,8 @@ export function boreFrom(
   primary: Primary,
   state: FluidState,
 ): Outcome<Bore> {
-  if (differential >= state.pressure) {
-    return fail('differential-exceeds-pressure', 'differential', { differential, pressure: state.pressure });
-  }
+  const refused = impossible(differential, state, 'differential');
+  if (refused !== undefined) return refused;
   const x = differential / state.pressure;
   const reynolds = reynoldsOf(massFlow, state.viscosity, pipe);
   const a2 = massFlow / ((Math.PI / 4) * pipe ** 2 * Math.sqrt(2 * differential * state.density)); // Annex A, A2
@@ -65,6 +65,8 @@ export function boreFrom(
       ratio: found.side === 'above' ? max : min,
       lower: ratioOf(found.lower),
       upper: ratioOf(found.upper),
+      density: state.density,
+      phase: state.phase,
     });
   }
   const { geometry, held, coefficient, epsilon } = factors(ratioOf(found.x));

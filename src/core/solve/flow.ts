@@ -15,18 +15,18 @@ import {
   reynoldsOf,
   withHeld,
 } from './equation.ts';
+import { impossible } from './possible.ts';
 
 const LEAST_COEFFICIENT = 1e-3;
 const MOST_COEFFICIENT = 1e3;
 
 /**
  * Mass flow in kg/s for a differential in Pa above zero and below the upstream pressure.
- * Problems: differential-exceeds-pressure; flow-unsettled, with the last bracket of C.
+ * Problems: those of possible.ts; flow-unsettled, with the last bracket of C.
  */
 export function flowFrom(differential: PressureDifference, { primary, geometry, state }: Meter): Outcome<Operation> {
-  if (differential >= state.pressure) {
-    return fail('differential-exceeds-pressure', 'differential', { differential, pressure: state.pressure });
-  }
+  const refused = impossible(differential, state, 'differential');
+  if (refused !== undefined) return refused;
   const epsilon = expansibilityOf(primary, geometry.ratio, state)(differential / state.pressure);
   const ideal = epsilon * idealFlow(geometry, differential, state.density); // q_m/C
   const a1 = reynoldsOf(ideal, state.viscosity, geometry.pipe); // Annex A, A1 = Re_D/C

@@ -5,6 +5,7 @@
 import type { Condition, Part } from '../element/contract.ts';
 import { exponentOf } from '../element/shared/expansibility.ts';
 import type { StatedUncertainty } from '../input/uncertainty.ts';
+import { isInside } from '../numeric/bounds.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Meter, Operation } from '../solve/equation.ts';
 
@@ -31,7 +32,12 @@ export interface Budget {
   readonly expandedPercent: number;
   readonly terms: readonly Term[];
   readonly coefficientParts: readonly Part[];
+  /** Why the flow is less certain than the figure says; empty when nothing is left out. */
+  readonly open: readonly Open[];
 }
+
+/** A term that is not stated, or a limit beyond which the standard gives no uncertainty of C. */
+export type Open = 'differential' | 'density' | 'reynolds-pipe' | 'straight-length';
 
 /** Conditions of one operation for limits and uncertainties. */
 export const conditionOf = ({ state }: Meter, { reynolds, differential }: Operation): Condition => {
@@ -67,7 +73,12 @@ export function flowUncertainty(
     term('density', percent(stated.density) ?? 0, 0.5, stated.density !== undefined), // Eq (3)
   ];
   const squares = terms.reduce((sum, { percentOfFlow }) => sum + percentOfFlow ** 2, 0); // Eq (3)
-  return { expandedPercent: Math.sqrt(squares), terms, coefficientParts };
+  const open = terms.flatMap(({ name, stated: known }): Open[] =>
+    !known && (name === 'differential' || name === 'density') ? [name] : [],
+  );
+  const limit = primary.limits(geometry, 0).find(({ id }) => id === 'reynolds-pipe');
+  if (limit !== undefined && !isInside(operation.reynolds, limit)) open.push('reynolds-pipe');
+  return { expandedPercent: Math.sqrt(squares), terms, coefficientParts, open };
 }
 
 const term = (name: TermName, percentage: number, sensitivity: number, stated: boolean): Term => ({

@@ -11,17 +11,19 @@ interface Box {
 interface DutyLabelProps {
   readonly words: string;
   readonly highest: boolean;
+  /** So near the axis that nothing can stand below it. */
+  readonly grounded: boolean;
   readonly viewBox?: Box;
 }
 
-/** Below and to the right of its point, where the curve leaves room; the highest above and to the left. */
-export function DutyLabel({ words, highest, viewBox }: DutyLabelProps) {
+/** Below and to the right of its point, where the curve leaves room, or beside it; the highest above and to the left. */
+export function DutyLabel({ words, highest, grounded, viewBox }: DutyLabelProps) {
   const { x = 0, y = 0, width = 0, height = 0 } = viewBox ?? {};
   return (
     <text
       className={styles.duty}
       x={x + width / 2 + (highest ? -6 : 8)}
-      y={y + height / 2 + (highest ? -10 : 16)}
+      y={y + height / 2 + (highest ? -10 : grounded ? 6 : 16)}
       textAnchor={highest ? 'end' : 'start'}
     >
       {words}

@@ -15,7 +15,9 @@ interface PlotProps {
   readonly hatch: string;
 }
 
-const margin = { top: 22, right: 26, bottom: 18, left: 6 };
+const margin = { top: 22, right: 26, bottom: 14, left: 6 };
+const axisHeight = 24; // px, of the figures below the axis
+const labelDepth = 24; // px, from a duty point to the foot of its label
 const axis = {
   type: 'number',
   tickLine: false,
@@ -28,21 +30,20 @@ const glyph = 7.5; // px, a digit of an axis
 
 export function Plot({ chart, width, height, narrow, hatch }: PlotProps) {
   const most = extremes(chart);
-  const x = ticksTo(most.differential, narrow ? 4 : 6).filter((tick) => tick <= most.differential);
+  const x = ticksTo(most.differential, narrow ? 5 : 6);
   const y = ticksTo(most.flow, 4);
-  const [right, top] = [most.differential > 0 ? most.differential : 1, y.at(-1) ?? 1];
+  const [right, top] = [x.at(-1) ?? 1, y.at(-1) ?? 1];
+  const rise = (height - margin.top - margin.bottom - axisHeight) / top; // px, a unit of flow
   const axisWidth = 20 + glyph * Math.max(3, ...y.map((tick) => axisText(tick).length));
   const across = {
     value: `Δp / ${chart.differentialUnit}`,
     position: 'insideBottomRight',
-    offset: -12,
-    className: styles.axisTitle ?? '',
+    offset: -11,
   } as const;
   const up = {
     value: `q / ${chart.flowUnit}`,
     position: 'top',
     offset: 10,
-    className: styles.axisTitle ?? '',
   } as const;
   return (
     <ComposedChart
@@ -61,10 +62,10 @@ export function Plot({ chart, width, height, narrow, hatch }: PlotProps) {
         hatch={hatch}
         plotRight={narrow ? null : width - margin.right}
       />
-      <XAxis {...axis} dataKey="differential" domain={[0, right]} ticks={[...x]} label={across} />
+      <XAxis {...axis} height={axisHeight} dataKey="differential" domain={[0, right]} ticks={[...x]} label={across} />
       <YAxis {...axis} width={axisWidth} domain={[0, top]} ticks={[...y]} label={up} />
       <Curve />
-      <Duty points={chart.duty} />
+      <Duty points={chart.duty} rise={rise} />
     </ComposedChart>
   );
 }
@@ -125,7 +126,12 @@ function Curve() {
   );
 }
 
-function Duty({ points }: { readonly points: Chart['duty'] }) {
+interface DutyProps {
+  readonly points: Chart['duty'];
+  readonly rise: number; // px above the axis for each unit of flow
+}
+
+function Duty({ points, rise }: DutyProps) {
   const highest = Math.max(...points.map((point) => point.differential));
   return points.map((point) => (
     <ReferenceDot
@@ -136,7 +142,13 @@ function Duty({ points }: { readonly points: Chart['duty'] }) {
       fill="var(--chart-ink)"
       stroke="var(--chart-paper)"
       strokeWidth={1.5}
-      label={<DutyLabel words={point.label} highest={point.differential === highest} />}
+      label={
+        <DutyLabel
+          words={point.label}
+          highest={point.differential === highest}
+          grounded={point.flow * rise < labelDepth}
+        />
+      }
     />
   ));
 }

@@ -38,12 +38,12 @@ export function answerOf(at: Context, result: Solved): readonly Segment[] {
 /** Tag, variant, standard, and the uncertainty of the flow that is metered most. */
 export function underOf(at: Context, result: Solved): string {
   const name = result.points.normal === undefined ? 'maximum' : 'normal';
-  const { expanded_percent } = (result.points.normal ?? maximumOf(result)).uncertainty;
+  const { expanded_percent, open } = (result.points.normal ?? maximumOf(result)).uncertainty;
   const parts = [
     result.tag,
     variantWords(result.element),
     result.standard,
-    uncertaintyAt(at.value(expanded_percent, 'uncertainty').text, name),
+    uncertaintyAt(at.value(expanded_percent, 'uncertainty').text, name, open.length > 0),
   ];
   return parts.filter((part) => part !== undefined && part !== '').join(' · ');
 }

@@ -1,6 +1,6 @@
 /** The curve of flow against differential, in display units. */
 import { fromSI } from '../../core/quantity/units.ts';
-import type { CurvePoint, Solved } from '../../core/result/record.ts';
+import type { Solved } from '../../core/result/record.ts';
 import { aboveReynolds, belowReynolds, chartSummary, dutyAt, outsideRange } from '../words/charts.ts';
 import { type Context, flowOf, maximumOf } from './context.ts';
 import type { Chart, ChartPoint, DutyRow } from './model.ts';
@@ -53,19 +53,17 @@ interface Range {
   readonly label: string;
 }
 
-/** Runs of points outside the Reynolds limits, from the origin or the last point inside to the next one inside. */
-function outsideRanges({ curve, reynoldsLimits: { min } }: Solved): readonly Range[] {
-  const ranges: { from: number; to: number; label: string }[] = [];
-  let before: CurvePoint | undefined;
-  for (const point of curve) {
-    const open = ranges.at(-1);
-    if (!point.inside && (before === undefined || before.inside)) {
-      const label = min !== undefined && point.reynoldsPipe < min ? belowReynolds : aboveReynolds;
-      ranges.push({ from: before?.differential_Pa ?? 0, to: point.differential_Pa, label });
-    } else if (open !== undefined && before?.inside === false) {
-      open.to = point.differential_Pa;
-    }
-    before = point;
-  }
-  return ranges;
+/** Less of the span than this shows nothing on the axis, and matters only where a duty point lies in it. */
+const VISIBLE = 0.002;
+
+/** The differentials below and above the Reynolds limits, as far as the span reaches into them. */
+function outsideRanges({ reynoldsLimits: limits, span_Pa, points }: Solved): readonly Range[] {
+  const { minDifferential_Pa: low, maxDifferential_Pa: high } = limits;
+  const least = Math.min(...Object.values(points).map((point) => point.differential_Pa));
+  const most = Math.max(span_Pa, ...Object.values(points).map((point) => point.differential_Pa));
+  const seen = low !== undefined && (low > VISIBLE * span_Pa || least < low);
+  return [
+    ...(seen ? [{ from: 0, to: Math.min(low, most), label: belowReynolds }] : []),
+    ...(high !== undefined && high < most ? [{ from: high, to: most, label: aboveReynolds }] : []),
+  ];
 }

@@ -7,6 +7,7 @@ import { fieldLabel } from '../words/fields.ts';
 import { fluidLabel, phaseWord } from '../words/fluids.ts';
 import { provenanceNotes } from '../words/provenance.ts';
 import { unreadNote } from '../words/rows.ts';
+import { certaintyNote } from '../words/uncertainty.ts';
 import { meterVerdict, notSolved } from '../words/verdicts.ts';
 import { answerOf, foundOf, underOf } from './answer.ts';
 import { chartOf } from './chart.ts';
@@ -63,12 +64,16 @@ function solvedMeter(at: Context, result: Solved): PresentedSizing {
     under: underOf(at, result),
     found: foundOf(at, result),
     loss: at.value(maximumOf(result).permanentLoss_Pa, 'loss'),
-    fluid: { name: fluidLabel(kind, result.state.phase, textOf(at.meter.fluid?.name)), phase: phaseWord(result.state.phase) },
+    fluid: {
+      name: fluidLabel(kind, result.state.phase, textOf(at.meter.fluid?.name)),
+      phase: phaseWord(result.state.phase),
+    },
     state: stateRows(at, result),
     overridable: kind !== 'stated', // those are stated as it is
     pipe: pipeRows(at, result),
     metal: metalRows(at, result),
     duty,
+    certainty: certaintyNote([...new Set(Object.values(result.points).flatMap((point) => point.uncertainty.open))]),
     checks: checkGroups(at, result),
     working: workingGroups(result),
     dimensions: dimensionRows(at, result),

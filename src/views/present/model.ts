@@ -5,6 +5,7 @@
 import type { DutyName, Unknown } from '../../core/document/project.ts';
 import type { Seen } from '../../core/quantity/source.ts';
 import type { Solved } from '../../core/result/record.ts';
+import type { Mark } from '../words/provenance.ts';
 import type { Expression } from './formula.ts';
 
 export type Finding = Solved['checks'][number];
@@ -25,7 +26,7 @@ export interface Cited {
   readonly clause: string;
   readonly seen: Seen;
   /** '', '°' (second-hand or memory: check against your copy) or '†' (practice, not a standard). */
-  readonly mark: string;
+  readonly mark: Mark;
 }
 
 export interface Row {
@@ -79,8 +80,10 @@ export interface CheckGroup {
   readonly assumption: Assumption;
   readonly title: string; // 'Frictionless'
   readonly meaning: string; // one line: what the assumption leaves out and what stands in for it
-  readonly verdict: Verdict;
+  readonly verdict: Verdict | 'unchecked'; // unchecked: no check could be made
   readonly rows: readonly CheckRow[];
+  /** What could not be checked, and what it would take. */
+  readonly open: readonly string[];
 }
 
 export interface WorkingRow {
@@ -200,6 +203,8 @@ export interface PresentedSizing extends PresentedMeter {
   readonly pipe: readonly Row[];
   readonly metal: readonly Row[]; // the element: bore, ratio, plate
   readonly duty: readonly DutyRow[];
+  /** What the uncertainty leaves out; empty when nothing. */
+  readonly certainty: string;
   readonly checks: readonly CheckGroup[];
   readonly working: readonly WorkingGroup[];
   readonly dimensions: readonly DimensionRow[];

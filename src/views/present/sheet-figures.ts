@@ -60,8 +60,12 @@ export const elementRows = ({ metal }: PresentedSizing, keyOf: KeyOf): readonly 
   metal.map((row) => withoutNote(sheetRow(row, keyOf)));
 
 /** The differential that the instrument spans, in words. */
-export const spanText = (at: Context, { span_Pa }: Solved): string =>
-  words.spanOf(at.given(at.meter.differential, ['pressure difference'], span_Pa, 'differential').text);
+export const spanText = (at: Context, { span_Pa, find }: Solved): string =>
+  words.spanOf(
+    find === 'differential' // what is written then belongs to an earlier question
+      ? at.value(span_Pa, 'differential').text
+      : at.given(at.meter.differential, ['pressure difference'], span_Pa, 'differential').text,
+  );
 
 /** The flows with one unit a column; the sources are those of the working at maximum flow. */
 export function dutyTable({ duty, working }: PresentedSizing, keyOf: KeyOf): DutyTable {

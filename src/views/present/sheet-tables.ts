@@ -1,6 +1,7 @@
 /** The tables of a sheet: what makes the uncertainty, the checks, dimensions and straight pipe. */
 import type { UncertaintyText } from '../../core/document/project.ts';
 import * as words from '../words/sheet.ts';
+import { standingWords } from '../words/verdicts.ts';
 import type { Assumption, DutyRow, PresentedSizing, Verdict } from './model.ts';
 import type { KeyOf } from './sources.ts';
 
@@ -12,7 +13,9 @@ export interface TermTable {
 export interface CheckBlock {
   readonly assumption: Assumption;
   readonly title: string;
-  readonly verdict: Verdict;
+  readonly verdict: Verdict | 'unchecked';
+  readonly standing: string; // its word
+  readonly open: readonly string[];
   readonly rows: readonly {
     readonly key: string;
     readonly text: string;
@@ -57,10 +60,12 @@ export function termTable({ duty }: PresentedSizing, written: UncertaintyText | 
 }
 
 export const checkBlocks = ({ checks }: PresentedSizing, keyOf: KeyOf): readonly CheckBlock[] =>
-  checks.map(({ assumption, title, verdict, rows }) => ({
+  checks.map(({ assumption, title, verdict, rows, open }) => ({
     assumption,
     title,
     verdict,
+    standing: standingWords[verdict],
+    open,
     rows: rows.map(({ key, text, limit, cited, verdict: own, verdictWord }) => ({
       key,
       text,

@@ -1,4 +1,5 @@
 /** Sources numbered in the order in which a sheet names them, so that a figure carries a short key. */
+import { withMarks } from './cited.ts';
 import type { Cited, Row } from './model.ts';
 
 /** A row of a sheet; `key` is '[3]°' or ''. */
@@ -36,7 +37,7 @@ export function numbering(): Numbering {
       return `${number(place)}${cited.mark}`;
     },
     list: () =>
-      sources.map(({ clause, marks }, place) => ({ key: number(place), clause: `${clause}${[...marks].join('')}` })),
+      sources.map(({ clause, marks }, place) => ({ key: number(place), clause: withMarks(clause, [...marks]) })),
   };
 }
 

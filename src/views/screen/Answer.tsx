@@ -3,6 +3,7 @@ import type { PresentedSizing, Segment } from '../present/model.ts';
 import styles from './Answer.module.css';
 import type { SelectedMeter } from './meter.ts';
 import { ProblemList } from './ProblemList.tsx';
+import { unsolved } from './unsolved.ts';
 import { useRested } from './useRested.ts';
 
 const LOUD_PAUSE = 1200; // ms without a change before the sentence is read out
@@ -20,7 +21,9 @@ export function Answer({ selected }: { readonly selected: SelectedMeter }) {
       {sizing ? (
         <Sentence sizing={sizing} stale={stale} />
       ) : (
-        <h1 className={styles.sentence}>{now.tag} waits for its figures.</h1>
+        <h1 className={styles.sentence}>
+          {now.tag} {unsolved(selected).wrong.length > 0 ? 'cannot be solved as it stands' : 'waits for its figures'}.
+        </h1>
       )}
       {stale && <ProblemList selected={selected} />}
       <p className={styles.spoken} aria-live="polite">

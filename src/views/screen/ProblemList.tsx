@@ -3,12 +3,10 @@ import { fieldLabel } from '../words/fields.ts';
 import { focusField } from './focus.ts';
 import type { SelectedMeter } from './meter.ts';
 import styles from './ProblemList.module.css';
-import { valueAt } from './text.ts';
+import { unsolved } from './unsolved.ts';
 
 export function ProblemList({ selected }: { readonly selected: SelectedMeter }) {
-  const { problems } = selected.now;
-  const empty = problems.filter(({ field }) => isEmpty(valueAt(selected.meter, field)));
-  const wrong = problems.filter((problem) => !empty.includes(problem));
+  const { wrong, missing } = unsolved(selected);
   return (
     <div className={styles.list}>
       {wrong.map(({ field, sentence }) => (
@@ -17,10 +15,10 @@ export function ProblemList({ selected }: { readonly selected: SelectedMeter }) 
           <span>{sentence}</span>
         </p>
       ))}
-      {empty.length > 0 && (
+      {missing.length > 0 && (
         <p className={styles.missing}>
           <span>Still to be filled in:</span>
-          {empty.map(({ field, sentence }) => (
+          {missing.map(({ field, sentence }) => (
             <span key={`${field} ${sentence}`} title={sentence}>
               <Way field={field} />
             </span>
@@ -31,9 +29,8 @@ export function ProblemList({ selected }: { readonly selected: SelectedMeter }) 
   );
 }
 
-const isEmpty = (written: unknown): boolean => written === undefined || written === '';
-
-const Way = ({ field }: { readonly field: string }) => (
+/** Leads to the field. */
+export const Way = ({ field }: { readonly field: string }) => (
   <button type="button" className={styles.way} onClick={() => focusField(field)}>
     {fieldLabel(field)}
   </button>

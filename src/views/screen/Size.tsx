@@ -43,13 +43,11 @@ function Found({ selected: { sizing, stale } }: { readonly selected: SelectedMet
         <div className={styles.column}>
           <DutyTable sizing={sizing} stale={stale} />
           <Curve sizing={sizing} stale={stale} />
-          <Working sizing={sizing} stale={stale} />
-        </div>
-        <div className={styles.column}>
-          <Checks groups={sizing.checks} stale={stale} />
           <States sizing={sizing} stale={stale} />
         </div>
+        <Checks groups={sizing.checks} stale={stale} />
       </div>
+      <Working sizing={sizing} stale={stale} />
       <Notes sizing={sizing} />
     </>
   );

@@ -2,13 +2,14 @@
 import type { Verdict } from '../words/verdicts.ts';
 import styles from './VerdictMark.module.css';
 
-type Standing = Verdict | 'refused';
+type Standing = Verdict | 'refused' | 'unchecked';
 
 const shapes: Readonly<Record<Standing, string>> = {
   inside: 'M6 1.5a4.5 4.5 0 1 1 0 9a4.5 4.5 0 1 1 0-9z',
   caution: 'M6 1L11 6L6 11L1 6z',
   outside: 'M1.5 1.5H10.5V10.5H1.5z',
   refused: 'M1 6H11',
+  unchecked: 'M1 6H4M8 6H11',
 };
 
 export function VerdictMark({ verdict, words }: { readonly verdict: Standing; readonly words: string }) {

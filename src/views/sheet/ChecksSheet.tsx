@@ -35,12 +35,12 @@ function Checks({ blocks }: { readonly blocks: readonly CheckBlock[] }) {
             ))}
           </tr>
         </thead>
-        {blocks.map(({ assumption, title, rows }) => (
+        {blocks.map(({ assumption, title, rows, open }) => (
           <tbody key={assumption}>
             {rows.map(({ key, text, limit, source, verdict, verdictWord }, at) => (
               <tr key={key}>
                 {at === 0 && (
-                  <th scope="rowgroup" rowSpan={rows.length}>
+                  <th scope="rowgroup" rowSpan={rows.length + open.length}>
                     {title}
                   </th>
                 )}
@@ -48,6 +48,16 @@ function Checks({ blocks }: { readonly blocks: readonly CheckBlock[] }) {
                 <td>{limit}</td>
                 <td className={verdict === 'inside' ? undefined : tables.loud}>{verdictWord}</td>
                 <td>{source}</td>
+              </tr>
+            ))}
+            {open.map((text, at) => (
+              <tr key={text}>
+                {rows.length === 0 && at === 0 && (
+                  <th scope="rowgroup" rowSpan={open.length}>
+                    {title}
+                  </th>
+                )}
+                <td colSpan={4}>{text}</td>
               </tr>
             ))}
           </tbody>

@@ -2,15 +2,17 @@
 import type { DutyTable as Table } from '../present/sheet-figures.ts';
 import { sheetWords } from '../words/sheet.ts';
 import { Block } from './Block.tsx';
+import content from './content.module.css';
 import { SymbolText } from './SymbolText.tsx';
 import tables from './table.module.css';
 
 interface DutyTableProps {
   readonly table: Table;
   readonly span: string;
+  readonly certainty: string;
 }
 
-export function DutyTable({ table: { columns, rows }, span }: DutyTableProps) {
+export function DutyTable({ table: { columns, rows }, span, certainty }: DutyTableProps) {
   return (
     <Block title={sheetWords.duty} aside={span}>
       <table className={tables.table}>
@@ -39,6 +41,7 @@ export function DutyTable({ table: { columns, rows }, span }: DutyTableProps) {
           ))}
         </tbody>
       </table>
+      {certainty !== '' && <p className={content.exception}>{certainty}</p>}
     </Block>
   );
 }

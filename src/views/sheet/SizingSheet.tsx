@@ -30,7 +30,7 @@ export function SizingSheet({ sheet, place }: { readonly sheet: Sheet; readonly 
           <Rows title={sheetWords.pipe} rows={sheet.pipe} />
         </div>
       </div>
-      <DutyTable table={sheet.duty} span={sheet.span} />
+      <DutyTable table={sheet.duty} span={sheet.span} certainty={sheet.meter.certainty} />
       <div className={styles.curve}>
         <Block title={sheetWords.curve}>
           <FlowChart chart={meter.chart} labels={chartWords} {...CHART} print />

@@ -18,11 +18,11 @@ export function Standing({ blocks }: { readonly blocks: readonly CheckBlock[] })
     <Block title={sheetWords.verdicts}>
       <table className={tables.table}>
         <tbody>
-          {blocks.map(({ assumption, title, verdict, rows: own }) => (
+          {blocks.map(({ assumption, title, verdict, standing, rows: own, open }) => (
             <tr key={assumption}>
               <th scope="row">{title}</th>
-              <td>{checkCount(own.length)}</td>
-              <td className={verdict === 'inside' ? undefined : tables.loud}>{verdict}</td>
+              <td>{checkCount(own.length, open.length)}</td>
+              <td className={verdict === 'inside' || verdict === 'unchecked' ? undefined : tables.loud}>{standing}</td>
             </tr>
           ))}
         </tbody>

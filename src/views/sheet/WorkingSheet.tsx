@@ -1,4 +1,5 @@
 /** The working of the principal figures: state and metal, then the maximum flow. Runs over as many pages as it needs. */
+import { withMarks } from '../present/cited.ts';
 import type { WorkingGroup, WorkingRow } from '../present/model.ts';
 import type { SizingSheet } from '../present/sheet.ts';
 import { checkHeads, checksAre, sheetWords } from '../words/sheet.ts';
@@ -53,7 +54,7 @@ function Line({ row }: { readonly row: WorkingRow }) {
     <tbody className={styles.line}>
       <tr>
         <th scope="row">{title}</th>
-        <td>{`${cited.clause}${cited.mark}`}</td>
+        <td>{withMarks(cited.clause, [cited.mark])}</td>
       </tr>
       <tr>
         <td colSpan={2}>

@@ -17,4 +17,6 @@ export function answerPieces(find: Unknown, opening: string, article: string): r
 /** 'A' or 'An' before a printed number: an 8, an 11, an 18, an 80; a 62.5, a 110. */
 export const article = (number: string): 'A' | 'An' => (/^(8|1[18](?!\d))/.test(number) ? 'An' : 'A');
 
-export const uncertaintyAt = (text: string, at: DutyName): string => `±${text} at ${at} flow, 95 %`;
+/** `least` where something is left out of it. */
+export const uncertaintyAt = (text: string, at: DutyName, least: boolean): string =>
+  `${least ? 'at least ' : ''}±${text} at ${at} flow, 95\u00a0%`;

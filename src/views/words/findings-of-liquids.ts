@@ -21,7 +21,7 @@ export const checksOfLiquids: Readonly<Record<string, FindingWords>> = {
   },
   'caustic-strong': {
     role: 'percent',
-    text: (figure) => `Caustic soda of ${figure}: the density may be 0.6 % low`,
+    text: (figure) => `Caustic soda of ${figure}: the density may be 0.6\u00a0% low`,
   },
   'wet-steam': {
     role: 'percent',

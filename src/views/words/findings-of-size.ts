@@ -10,7 +10,7 @@ const straight = (side: string): FindingWords => ({
     const fitting = detail.text('fitting');
     const parts = [
       fitting === 'downstream' ? bounds : `${bounds} for: ${lower(fittingLabel(fitting))}`,
-      detail.has('reduced') ? `${detail.limit('reduced', 'bores')} adds 0.5 % to the uncertainty of C` : '',
+      detail.has('reduced') ? `${detail.limit('reduced', 'bores')} adds 0.5\u00a0% to the uncertainty of C` : '',
       detail.has('both') ? 'not shortened on both sides at once' : '',
       detail.has('note') ? lower(noteText(detail.text('note'))) : '',
     ];

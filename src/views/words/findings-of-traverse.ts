@@ -54,7 +54,7 @@ export const checksOfTraverse: Readonly<Record<string, FindingWords>> = {
   },
   'traverse-slow': {
     role: 'velocity',
-    text: (figure) => `Mean velocity ${figure}, against what a gauge of 1 Pa can tell`,
+    text: (figure) => `Mean velocity ${figure}, against what a gauge of 1\u00a0Pa can tell`,
   },
   'traverse-gauge': { role: 'factor', text: (figure) => `Sensitivity of the gauge, ratio T ${figure}` },
   'traverse-drift': { role: 'percent', text: (figure) => `The flow drifted by ${figure} at the reference probe` },

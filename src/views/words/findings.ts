@@ -1,6 +1,7 @@
 /** Every finding as a line: the figure that was compared, where, and the limit it was held against. */
 import type { Finding } from '../../core/check/finding.ts';
 import { detailOf, type FindingWords } from './detail.ts';
+import { fieldPlace } from './fields.ts';
 import { checksOfAir } from './findings-of-air.ts';
 import { checksOfFlow } from './findings-of-flow.ts';
 import { checksOfLiquids } from './findings-of-liquids.ts';
@@ -48,3 +49,6 @@ export function range(from: string, to: string): string {
   const unit = gap < 0 ? '' : from.slice(gap);
   return `${unit !== '' && to.endsWith(unit) ? from.slice(0, gap) : from} to ${to}`;
 }
+
+/** A check that is open for want of one field. */
+export const uncheckedText = (needs: string): string => `Not checked: ${fieldPlace(needs)} is not given.`;

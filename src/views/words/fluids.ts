@@ -7,10 +7,10 @@ import { liquidNamed } from './liquids.ts';
 /** The fluids that can be chosen, in the order of the list. */
 export const fluidChoices: readonly Choice[] = [
   { value: 'water', label: 'Water or steam' },
-  { value: 'gas', label: 'Gas or gas mixture' },
-  { value: 'air', label: 'Air, dry or moist' },
+  { value: 'gas', label: 'Gas or mixture' },
+  { value: 'air', label: 'Dry or moist air' },
   { value: 'liquid', label: 'Another liquid' },
-  { value: 'stated', label: 'Stated density and viscosity' },
+  { value: 'stated', label: 'Stated figures' },
 ];
 
 /** What settles the phase of water on the saturation line. */

@@ -1,8 +1,8 @@
 /** Remarks on the figures of air and of gases by the cubic equation. */
 export const airRemarks: Readonly<Record<string, string>> = {
   'over-water': 'Over liquid water.',
-  'over-ice': 'Over ice: below 0 °C a dew point is read as a frost point.',
-  'over-supercooled-water': 'Over liquid water, also below 0 °C: that is the custom for relative humidity.',
+  'over-ice': 'Over ice: below 0\u00a0°C a dew point is read as a frost point.',
+  'over-supercooled-water': 'Over liquid water, also below 0\u00a0°C: that is the custom for relative humidity.',
   'enhancement-factor': 'What the air adds to the vapour that stands over water or ice alone.',
   'air-compressibility': 'From the formula for moist air at pressure and temperature.',
   'viscosity-of-air': 'From the reference correlation of dry air; too long to print here.',

@@ -1,5 +1,5 @@
 /** Remarks on the figures of liquids and of wet steam. */
-const group = (words: string): string => `By the tables of ${words}, from the density at 60 °F.`;
+const group = (words: string): string => `By the tables of ${words}, from the density at 60\u00a0°F.`;
 
 export const liquidRemarks: Readonly<Record<string, string>> = {
   override: 'Put in by the user in place of the figure of the fluid.',

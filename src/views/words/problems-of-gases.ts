@@ -12,7 +12,7 @@ export const gasProblems: ProblemWords = {
   }),
   'fraction-negative': (d) => ({
     cause: `The share of '${d.text('written')}' is negative.`,
-    next: 'Write a share from 0 to 1, or from 0 % to 100 %.',
+    next: 'Write a share from 0 to 1, or from 0\u00a0% to 100\u00a0%.',
   }),
   'composition-sum': (d) => ({
     cause: `The shares of the composition add up to ${d.figure('sum', 'number')}, not to 1.`,

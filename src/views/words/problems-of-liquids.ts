@@ -8,7 +8,7 @@ export const liquidProblems: ProblemWords = {
   }),
   'share-out-of-range': (d) => ({
     cause: `${d.place} '${d.text('written')}' is no share of a whole.`,
-    next: 'Write a share from 0 % to 100 %.',
+    next: 'Write a share from 0\u00a0% to 100\u00a0%.',
   }),
   'table-too-long': (d) => ({
     cause: `${d.place} has ${d.text('count')} rows, and a table has at most ${d.text('most')}.`,
@@ -25,7 +25,7 @@ export const liquidProblems: ProblemWords = {
     next: 'Put the rows in order of rising temperature, each once.',
   }),
   'walther-too-thin': (d) => ({
-    cause: `${d.place} is below 0.3 mm²/s, where the line of an oil ends.`,
+    cause: `${d.place} is below 0.3\u00a0mm²/s, where the line of an oil ends.`,
     next: 'Use the other rule of viscosity, or check the unit.',
   }),
   'viscosity-rises': (d) => ({
@@ -50,7 +50,7 @@ export const liquidProblems: ProblemWords = {
   }),
   'petroleum-density-missing': () => ({
     cause: 'An oil is known by its density, and none is given.',
-    next: 'State the density at 15 °C, the density at 60 °F or the API gravity.',
+    next: 'State the density at 15\u00a0°C, the density at 60\u00a0°F or the API gravity.',
   }),
   'petroleum-density-twice': (d) => ({
     cause: `The density of this oil is given more than once; ${d.place} is one too many.`,
@@ -58,7 +58,7 @@ export const liquidProblems: ProblemWords = {
   }),
   'petroleum-density-out-of-range': (d) => ({
     cause: `${d.place} lies outside the tables of this kind of oil.`,
-    next: `Check it: at 60 °F they hold from ${d.limit('min', 'density')} to ${d.limit('max', 'density')}.`,
+    next: `Check it: at 60\u00a0°F they hold from ${d.limit('min', 'density')} to ${d.limit('max', 'density')}.`,
   }),
   'liquid-boils': (d) => ({
     cause:
@@ -86,7 +86,7 @@ export const liquidProblems: ProblemWords = {
   }),
   'quality-of-liquid': (d) => ({
     cause: `A quality of ${d.figure('percent', 'percent')} is none of wet steam, or the phase is held to liquid.`,
-    next: 'Leave the quality out for water, or write one above 0 % for steam.',
+    next: 'Leave the quality out for water, or write one above 0\u00a0% for steam.',
   }),
   'no-saturation-pressure': (d) => ({
     cause: `Water and steam do not stand side by side at ${d.figure('pressure', 'pressure')}.`,

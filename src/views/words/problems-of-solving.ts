@@ -1,5 +1,8 @@
 /** Problems of the fluid's state and of the solution. */
-import type { ProblemWords } from './detail.ts';
+import type { Detail, ProblemWords } from './detail.ts';
+
+/** The fluid as the model found it, since an unexpected phase is the usual cause. */
+const ofFluid = (d: Detail): string => `, with a fluid (${d.text('phase')}) of ${d.figure('density', 'density')}`;
 
 export const solvingProblems: ProblemWords = {
   'water-out-of-range': (d) => ({
@@ -29,6 +32,12 @@ export const solvingProblems: ProblemWords = {
       `${d.figure('pressure', 'pressure')}.`,
     next: 'Lower the differential or the flow, or check the upstream pressure.',
   }),
+  'differential-beyond-critical': (d) => ({
+    cause:
+      `The differential of ${d.figure('differential', 'differential')} is more than ${d.limit('percent', 'percent')} of the ` +
+      `upstream pressure of ${d.figure('pressure', 'pressure')}: the flow reaches the speed of sound and grows no further.`,
+    next: 'Lower the differential or raise the upstream pressure.',
+  }),
   'differential-too-large': (d) => ({
     cause:
       `This flow needs a differential of more than ${d.limit('percent', 'percent')} of the upstream pressure of ` +
@@ -48,11 +57,11 @@ export const solvingProblems: ProblemWords = {
     next: 'Check flow, differential and fluid.',
   }),
   'bore-too-large': (d) => ({
-    cause: `Even a diameter ratio of ${d.limit('ratio', 'ratio')} makes more than this differential.`,
+    cause: `Even a diameter ratio of ${d.limit('ratio', 'ratio')} makes more than this differential${ofFluid(d)}.`,
     next: 'Raise the differential, lower the flow or choose a larger pipe.',
   }),
   'bore-too-small': (d) => ({
-    cause: `Even a diameter ratio of ${d.limit('ratio', 'ratio')} makes less than this differential.`,
+    cause: `Even a diameter ratio of ${d.limit('ratio', 'ratio')} makes less than this differential${ofFluid(d)}.`,
     next: 'Lower the differential, raise the flow or choose a smaller pipe.',
   }),
   'bore-not-below-pipe': (d) => ({

@@ -19,13 +19,14 @@ export type Mark = '' | '°' | '†';
 
 export const provenanceMark = ({ clause, seen }: Source): Mark => (clause.startsWith(own) ? '' : marks[seen]);
 
-const notes: Readonly<Record<'°' | '†', string>> = {
-  '°': '° second-hand or from memory of the source: check against your copy before purchase.',
-  '†': '† custom of the trade, not a standard.',
+/** What a mark says. */
+export const markMeaning: Readonly<Record<Exclude<Mark, ''>, string>> = {
+  '°': 'second-hand or from memory of the source: check against your copy before purchase.',
+  '†': 'custom of the trade, not a standard.',
 };
 
 /** The notes that the marks of these sources need, each once. */
 export function provenanceNotes(sources: readonly Source[]): readonly string[] {
   const used = new Set(sources.map(provenanceMark));
-  return (['°', '†'] as const).filter((mark) => used.has(mark)).map((mark) => notes[mark]);
+  return (['°', '†'] as const).filter((mark) => used.has(mark)).map((mark) => `${mark}\u00a0${markMeaning[mark]}`);
 }

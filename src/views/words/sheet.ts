@@ -14,7 +14,7 @@ export const sheetWords = {
   curve: 'Flow against differential',
   verdicts: 'Checks by assumption',
   checks: 'Checks',
-  terms: 'Uncertainty of the flow by its terms, 95 %',
+  terms: 'Uncertainty of the flow by its terms, 95\u00a0%',
   dimensions: 'Dimensions and tolerances',
   straight: 'Straight pipe',
   sources: 'Sources',
@@ -80,7 +80,7 @@ export const computedWith = (version: string, inputs: string): string =>
   `computed with Headwright ${version}, inputs ${inputs}`;
 export const notCurrent = 'Not current: the inputs have changed since these figures were computed. Do not use.';
 export const unitsNote =
-  '(a) absolute, (g) above the stated atmosphere. [n] names a source, listed with the checks. Uncertainties: expanded, 95 %.';
+  '(a) absolute, (g) above the stated atmosphere. [n] names a source, listed with the checks. Uncertainties: expanded, 95\u00a0%.';
 
 const measured = (note: string): string => (note === noGrowth ? 'as given, no thermal growth' : note);
 
@@ -102,22 +102,25 @@ export const checkHeads = {
   source: 'Source',
 };
 /** The full length, and the shorter one that adds half a percent to the uncertainty of the coefficient. */
-export const straightHeads = { fitting: 'Nearest fitting', full: 'full', reduced: '+0.5 % on C' };
+export const straightHeads = { fitting: 'Nearest fitting', full: 'full', reduced: '+0.5\u00a0% on C' };
 
 export const chartWords = {
   title: 'Flow against differential',
-  low: 'lowest, 95 %',
-  high: 'highest, 95 %',
+  low: 'lowest, 95\u00a0%',
+  high: 'highest, 95\u00a0%',
   limits: 'Reynolds limits',
   inside: 'inside',
   outside: 'outside',
-  band: 'Band: expanded uncertainty, 95 %.',
+  band: 'Band: expanded uncertainty, 95\u00a0%.',
 } as const;
 
 /** State of all checks, at the head of a sheet. */
 export const checksAre = (verdict: string): string => `Checks: ${verdict}`;
-/** '3 checks' */
-export const checkCount = (count: number): string => (count === 1 ? '1 check' : `${count} checks`);
+/** '3 checks, 1 open': open for want of an input. */
+export function checkCount(count: number, open: number): string {
+  const made = count === 1 ? '1 check' : `${count} checks`;
+  return open === 0 ? made : `${count === 0 ? '' : `${made}, `}${open} open`;
+}
 /** A finding that is not inside, in one sentence. */
 export const exceptionText = (text: string, limit: string): string =>
   limit === '' ? `${text}.` : `${text}; limit: ${limit}.`;
@@ -138,5 +141,5 @@ export const inspection = {
 } as const;
 
 export const stated = 'as stated';
-export const atCoverage = ', 95 %';
+export const atCoverage = ', 95\u00a0%';
 export const dash = '–';

@@ -10,6 +10,12 @@ export const verdictWords: Readonly<Record<Verdict, string>> = {
   outside: 'outside',
 };
 
+/** How an assumption stands: its worst verdict, or no check at all. */
+export const standingWords: Readonly<Record<Verdict | 'unchecked', string>> = {
+  ...verdictWords,
+  unchecked: 'not checked',
+};
+
 /** The state of a whole meter: 'inside', '1 caution', '2 outside', 'not solved'. */
 export function meterVerdict(verdicts: readonly Verdict[]): { readonly worst: Verdict; readonly words: string } {
   const outside = verdicts.filter((verdict) => verdict === 'outside').length;

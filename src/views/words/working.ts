@@ -32,7 +32,7 @@ export const workingTitles: Readonly<Record<string, string>> = {
   'traverse-velocity': 'Velocity at the strongest reading',
   'traverse-mean': 'Mean velocity in the section',
   loss: 'Permanent pressure loss',
-  uncertainty: 'Uncertainty of the flow, 95 %',
+  uncertainty: 'Uncertainty of the flow, 95\u00a0%',
 };
 
 export const workingTitle = catalogue('working', workingTitles);

@@ -200,3 +200,27 @@ test('a meter well inside everything has no caution', () => {
   expect(checks.filter(({ verdict: one }) => one !== 'inside')).toEqual([]);
   expect(checks.length).toBeGreaterThan(10);
 });
+
+describe('what could not be checked', () => {
+  const needs = (meter: object) => solved(meter).unchecked.map((open) => open.needs);
+  test('is named with the field it would take', () => {
+    expect(needs(water)).toEqual([
+      'installation.fluctuation',
+      'pipe.roughness',
+      'installation.fitting',
+      'installation.after',
+      'element.plateThickness',
+    ]);
+    const fluid = { kind: 'stated', density: '1000 kg/m3', viscosity: '1 mPa.s' };
+    expect(needs({ ...water, fluid })).toContain('fluid.vapourPressure');
+    expect(
+      needs({ ...water, installation: { fitting: 'single-bend', before: '45 D', after: '8 D', fluctuation: '2 %' } }),
+    ).toEqual(['pipe.roughness', 'element.plateThickness']);
+  });
+});
+
+test('the differential at the Reynolds limit is that of the flow that has it', () => {
+  const { reynoldsLimits } = solved(water);
+  const at = solved({ ...water, differential: `${reynoldsLimits.minDifferential_Pa} Pa`, duty: {} });
+  expect((at.points.maximum?.reynoldsPipe ?? 0) / (reynoldsLimits.min ?? 1)).toBeCloseTo(1, 10);
+});

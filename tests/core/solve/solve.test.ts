@@ -34,6 +34,23 @@ describe('refused, with the reason', () => {
   });
 });
 
+describe('a gas that would have to pass the speed of sound', () => {
+  // (2/(k + 1))^(k/(k - 1)) is 0.5283 for k = 1.4: any text on gas dynamics
+  const air = {
+    ...steam,
+    fluid: { kind: 'stated', density: '10 kg/m3', viscosity: '0.018 mPa.s', isentropicExponent: 1.4 },
+    upstream: { pressure: '10 bar(a)', temperature: '20 degC' },
+  };
+  test('is refused just beyond the critical ratio, for flow and for bore', () => {
+    expect(refusal({ ...air, duty: {}, differential: '4.71 bar' })).toEqual([]);
+    expect(refusal({ ...air, duty: {}, differential: '4.72 bar' })).toEqual([
+      'differential-beyond-critical at differential',
+    ]);
+    const sized = { ...air, find: 'bore', duty: { maximum: '8 t/h' }, differential: '5 bar' };
+    expect(refusal(sized)).toEqual(['differential-beyond-critical at differential']);
+  });
+});
+
 describe('what is given may lie outside the standard and is solved all the same', () => {
   test('a span beyond a quarter of the pressure carries the flows below it', () => {
     const result = solved({ ...steam, differential: '14 bar', duty: { normal: '207 t/h' } });

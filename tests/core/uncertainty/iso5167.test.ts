@@ -83,3 +83,15 @@ test('steam has a term of the expansibility: 2 dp/p1, ISO 5167-3:2003, 5.1.7.2',
   const epsilon = points.maximum?.uncertainty.terms.find(({ name }) => name === 'epsilon')?.percentOfFlow;
   expect(epsilon).toBeCloseTo((2 * 50000) / state.pressure_Pa, 12);
 });
+
+describe('what the figure leaves out', () => {
+  const open = (meter: object) => solved(meter).points.minimum?.uncertainty.open;
+  const stated = { differential: '0.1 % of span', density: '0.2 %' };
+  test('is named: unstated terms, flows outside the Reynolds numbers, straight pipe too short', () => {
+    expect(open(water)).toEqual(['differential', 'density']);
+    expect(open({ ...water, uncertainty: stated })).toEqual([]);
+    expect(open({ ...water, uncertainty: stated, duty: { minimum: '0.3 t/h' } })).toEqual(['reynolds-pipe']);
+    const short = { fitting: 'single-bend', before: '3 D', after: '8 D' };
+    expect(open({ ...water, uncertainty: stated, installation: short })).toEqual(['straight-length']);
+  });
+});

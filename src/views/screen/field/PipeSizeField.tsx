@@ -2,6 +2,7 @@
 import { useId, useState } from 'react';
 import { type PipeSize, pipeSizeNamed, searchPipeSizes } from '../../../core/document/pipe-sizes.ts';
 import { useWorkbench } from '../binding.tsx';
+import { Mark } from '../Clause.tsx';
 import { useMeterText } from '../meter.ts';
 import styles from './box.module.css';
 import { Frame } from './Frame.tsx';
@@ -39,7 +40,7 @@ export function PipeSizeField() {
           role="combobox"
           autoComplete="off"
           spellCheck={false}
-          placeholder="DN or NPS, schedule"
+          placeholder="DN or NPS"
           aria-expanded={query !== undefined}
           aria-controls={listId}
           aria-autocomplete="list"
@@ -65,5 +66,10 @@ function SizeNote({ size }: { readonly size: string }) {
   const known = pipeSizeNamed(size);
   if (known === undefined) return <span>not in the table of sizes</span>;
   if (bore !== `${known.bore} mm`) return <span>the bore below is not the {known.bore} mm of this size</span>;
-  return <span title={`${known.source.clause}: check against your copy`}>nominal wall, table second-hand°</span>;
+  return (
+    <span title={`${known.source.clause}: check against your copy`}>
+      nominal wall, table second-hand
+      <Mark mark="°" />
+    </span>
+  );
 }

@@ -1,6 +1,7 @@
 /** The sizes a search found: names, bore, and where the row comes from. */
 import { useEffect, useRef } from 'react';
 import type { PipeSize } from '../../../core/document/pipe-sizes.ts';
+import { Mark } from '../Clause.tsx';
 import styles from './PipeSizeList.module.css';
 
 interface Props {
@@ -35,7 +36,10 @@ export function PipeSizeList({ id, sizes, active, pick }: Props) {
           <span>NPS {size.nps}</span>
           <span>{size.schedule}</span>
           <span className={styles.bore}>{size.bore} mm</span>
-          <span className={styles.source}>{size.source.clause}°</span>
+          <span className={styles.source}>
+            {size.source.clause}
+            <Mark mark="°" />
+          </span>
         </div>
       ))}
     </div>

@@ -1,6 +1,7 @@
 /** The checks, under the assumption of Bernoulli's equation that each guards. */
 import type { CheckGroup, CheckRow } from '../../present/model.ts';
-import { verdictWords } from '../../words/verdicts.ts';
+import { standingWords } from '../../words/verdicts.ts';
+import { Clause } from '../Clause.tsx';
 import { VerdictMark } from '../VerdictMark.tsx';
 import styles from './Checks.module.css';
 import { Panel } from './Panel.tsx';
@@ -13,7 +14,7 @@ export function Checks({ groups, stale }: { readonly groups: readonly CheckGroup
           <section key={group.assumption} className={styles.group} aria-label={group.title}>
             <header>
               <h3>{group.title}</h3>
-              <VerdictMark verdict={group.verdict} words={verdictWords[group.verdict]} />
+              <VerdictMark verdict={group.verdict} words={standingWords[group.verdict]} />
               <p>{group.meaning}</p>
             </header>
             <ul>
@@ -21,11 +22,16 @@ export function Checks({ groups, stale }: { readonly groups: readonly CheckGroup
                 <Check key={row.key} row={row} />
               ))}
             </ul>
+            {group.open.map((text) => (
+              <p key={text} className={styles.open}>
+                {text}
+              </p>
+            ))}
           </section>
         ))}
       </div>
       <p className={styles.legend}>
-        ° seen second-hand or from memory: check against your copy. † practice, not a standard.
+        °{'\u00a0'}seen second-hand or from memory: check against your copy. †{'\u00a0'}practice, not a standard.
       </p>
     </Panel>
   );
@@ -35,13 +41,11 @@ function Check({ row }: { readonly row: CheckRow }) {
   return (
     <li className={styles.row} data-verdict={row.verdict} data-check={row.id}>
       <VerdictMark verdict={row.verdict} words={row.verdictWord} />
-      <span className={styles.text}>
-        {row.text} <span className={styles.limit}>{row.limit}</span>
-      </span>
-      <span className={styles.clause}>
-        {row.cited.clause}
-        {row.cited.mark}
-      </span>
+      <p>{row.text}</p>
+      <p className={styles.held}>
+        <span>{row.limit}</span>
+        <Clause cited={row.cited} />
+      </p>
     </li>
   );
 }

@@ -11,12 +11,12 @@ const HEIGHT = 290; // px
 
 const LABELS: ChartLabels = {
   title: 'Flow against differential',
-  low: 'lowest, 95 %',
-  high: 'highest, 95 %',
+  low: 'lowest, 95\u00a0%',
+  high: 'highest, 95\u00a0%',
   limits: 'Reynolds limits',
   inside: 'inside',
   outside: 'outside',
-  band: 'Band: expanded uncertainty of the flow, 95 %.',
+  band: 'Band: expanded uncertainty of the flow, 95\u00a0%.',
 };
 
 const FlowChart = lazy(() => import('../../chart/FlowChart.tsx').then((module) => ({ default: module.FlowChart })));

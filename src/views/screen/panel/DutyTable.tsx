@@ -72,6 +72,7 @@ export function DutyTable({ sizing, stale }: { readonly sizing: PresentedSizing;
           </tbody>
         </table>
       </div>
+      {sizing.certainty !== '' && <p className={styles.certainty}>{sizing.certainty}</p>}
       <Shares duty={duty} />
     </Panel>
   );

@@ -2,6 +2,7 @@
 import { type ReactNode, useEffect, useRef, useState } from 'react';
 import type { Row } from '../../present/model.ts';
 import { overrideWords as words } from '../../words/fluid-forms.ts';
+import { Clause } from '../Clause.tsx';
 import { OverrideField } from '../fluid/OverrideField.tsx';
 import { type Override, overridePath } from '../fluid/overrides.ts';
 import { useMeterText } from '../meter.ts';
@@ -31,7 +32,7 @@ export function Figure({ row: { label, value, working, cited, note, own = false 
         <dd className={styles.source}>
           <span>
             {note && <span className={own ? styles.own : styles.note}>{note}</span>}
-            {cited && `${cited.clause}${cited.mark}`}
+            {cited && <Clause cited={cited} />}
           </span>
           {aside}
         </dd>

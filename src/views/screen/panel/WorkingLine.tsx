@@ -1,6 +1,7 @@
 /** One figure and, opened, how it came about. */
 import { useState } from 'react';
 import type { WorkingRow } from '../../present/model.ts';
+import { Clause } from '../Clause.tsx';
 import { MathExpression } from './MathExpression.tsx';
 import styles from './Working.module.css';
 import { workingId } from './working-place.ts';
@@ -50,8 +51,7 @@ function Opened({ row }: { readonly row: WorkingRow }) {
       )}
       {row.remark && <p>{row.remark}</p>}
       <p className={styles.clause}>
-        {row.cited.clause}
-        {row.cited.mark}
+        <Clause cited={row.cited} />
       </p>
     </div>
   );

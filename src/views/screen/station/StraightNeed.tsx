@@ -1,5 +1,6 @@
 /** The straight pipe that the table asks for: column A, and column B with its price. */
 import type { PresentedSizing } from '../../present/model.ts';
+import { Mark } from '../Clause.tsx';
 
 interface Props {
   readonly sizing: PresentedSizing;
@@ -11,10 +12,10 @@ export function StraightNeed({ sizing, side }: Props) {
   const row = side === 'upstream' ? rows.find(({ chosen }) => chosen) : (rows.find(({ chosen }) => chosen) ?? rows[0]);
   if (row === undefined) return null;
   return (
-    <span title={`${row.cited.clause}. Column B adds 0.5 % to the uncertainty of C.`}>
+    <span title={`${row.cited.clause}. Column B adds 0.5\u00a0% to the uncertainty of C.`}>
       needs {row.full}
-      {row.reduced.includes('D') && `, or ${row.reduced} with 0.5 % more`}
-      {row.cited.mark}
+      {row.reduced.includes('D') && `, or ${row.reduced} with 0.5\u00a0% more`}
+      <Mark mark={row.cited.mark} />
     </span>
   );
 }
