@@ -4,6 +4,8 @@ import { fail, type Outcome, ok } from './outcome.ts';
 import { measuresOf, plainSpelling, unitOf, unitsFor } from './units.ts';
 
 const LONGEST = 40; // characters of a spelling that are quoted and compared
+/** A volume said to be normal or standard: at which state it does not say, so that only `base` can be meant. */
+const REFERRED = /^(?:[ns]|std|norm)\s?(?=m3|ft3|l\/|cf)/i;
 const LEFT_OUT = 0.3; // cost of a letter left out, see editDistance
 
 /** What a problem quotes of a text: its beginning when it is long. */
@@ -53,8 +55,13 @@ function withoutReference(spelling: string): Unit | undefined {
 /** Up to three symbols of the measures asked for, the most similar spelling first; menu order among equals. */
 export function nearestSpellings(spelling: string, measures: readonly Measure[]): readonly string[] {
   const wanted = plainSpelling(spelling).slice(0, LONGEST);
+  const meant = [wanted, wanted.replace(REFERRED, 'base ')];
   const distance = (unit: Unit): number =>
-    Math.min(...[unit.symbol, unit.print, ...unit.aliases].map((text) => editDistance(wanted, plainSpelling(text))));
+    Math.min(
+      ...[unit.symbol, unit.print, ...unit.aliases].flatMap((text) =>
+        meant.map((one) => editDistance(one, plainSpelling(text))),
+      ),
+    );
   const ranked = measures.flatMap(unitsFor).map((unit) => ({ symbol: unit.symbol, distance: distance(unit) }));
   ranked.sort((a, b) => a.distance - b.distance);
   return [...new Set(ranked.map((candidate) => candidate.symbol))].slice(0, 3);

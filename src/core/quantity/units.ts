@@ -37,6 +37,8 @@ export const plainSpelling = (spelling: string): string =>
     .trim()
     .replace(/\s+/g, ' ')
     .replace(/\s(?=\()/g, '')
+    .replace(/\s?\/\s?/g, '/')
+    .replace(/\s(?=[ag]$)/, '') // 'bar a'
     .replace(/\u03bc/g, 'u')
     .replace(/\s?°/g, 'deg')
     .replace(/[\u00b7\u22c5*]/g, '.')

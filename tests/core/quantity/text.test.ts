@@ -161,11 +161,10 @@ describe('file text that is refused', () => {
   test.each([
     ['60 T/h', FLOWS, 't/h'],
     ['60 Kg/h', FLOWS, 'kg/h'],
-    ['60 m3/hr', FLOWS, 'm3/h'],
-    ['60 Nm3/h', FLOWS, 'm3/h'],
+    ['60 Nm3/h', FLOWS, 'base m3/h'],
+    ['60 Sm3/h', FLOWS, 'base m3/h'],
+    ['60 scfm', FLOWS, 'base ft3/min'],
     ['7 Bar(g)', PRESSURES, 'bar(g)'],
-    ['7 C', ['temperature'], 'degC'],
-    ['7 F', ['temperature'], 'degF'],
     ['3 feet', ['length'], 'ft'],
     ['7 kg/m', ['density'], 'kg/m3'],
     ['7 inch', ['length'], 'in'],
@@ -175,5 +174,25 @@ describe('file text that is refused', () => {
     const nearest = String(found.detail.nearest).split(', ');
     expect(nearest[0]).toBe(first);
     expect(nearest.length).toBeLessThanOrEqual(3);
+  });
+});
+
+describe('spellings of the trade', () => {
+  test.each([
+    ['60 gpm', 'volume flow', '60 gal/min'],
+    ['60 tph', 'mass flow', '60 t/h'],
+    ['60 t / h', 'mass flow', '60 t/h'],
+    ['60 m3/hr', 'volume flow', '60 m3/h'],
+    ['60 cfm', 'volume flow', '60 ft3/min'],
+    ['7 bar a', 'absolute pressure', '7 bar(a)'],
+    ['7 bar g', 'gauge pressure', '7 bar(g)'],
+    ['85 C', 'temperature', '85 degC'],
+    ['185 F', 'temperature', '185 degF'],
+    ['100 mmWC', 'pressure difference', '100 mmH2O'],
+    ['10 inWC', 'pressure difference', '10 inH2O'],
+  ] as const)('%s', (text, measure, plain) => {
+    const [one, other] = [readQuantity(text, [measure], 'field'), readQuantity(plain, [measure], 'field')];
+    expect(one.ok && one.value.unit.symbol).toBe(plain.split(' ')[1]);
+    expect(one.ok && one.value.si).toBe(other.ok && other.value.si);
   });
 });
