@@ -58,14 +58,13 @@ export function expand({ set, shapes }: Gathered, coefficients: Float64Array, de
   let a2 = 0;
   for (let k = 0; k < shapes.length; k++) {
     const shape = shapes[k] as number;
-    const first = shape * columns; // the table starts at δ^1
     let P = 0; // Σ A_d δ^(d-1), then its two derivatives
     let P1 = 0;
     let P2 = 0;
-    for (let column = first + (top[shape] as number) - 1; column >= first; column--) {
+    for (let power = top[shape] as number; power > 0; power--) {
       P2 = P2 * delta + P1;
       P1 = P1 * delta + P;
-      P = P * delta + (coefficients[column] as number);
+      P = P * delta + (coefficients[shape * columns + power - 1] as number); // the table starts at δ^1
     }
     P2 = 2 * delta * delta * (P2 * delta + P1); // Σ d (d-1) A_d δ^d
     P1 = delta * (P1 * delta + P); // Σ d A_d δ^d
@@ -81,8 +80,8 @@ export function expand({ set, shapes }: Gathered, coefficients: Float64Array, de
       v = (order - 1) * u;
     } else {
       const eta = figures[own + 1] as number;
-      const away = delta - (figures[own + 2] as number);
       const beta = figures[own + 3] as number;
+      const away = delta - (figures[own + 2] as number);
       h = -eta * away * away - beta * (delta - (figures[own + 4] as number));
       u = -delta * (2 * eta * away + beta);
       v = -2 * eta * delta * delta;
