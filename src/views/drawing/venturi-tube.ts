@@ -28,6 +28,8 @@ export function stationsOf(shape: Shape, rows: readonly DimensionRow[]) {
   return { entry: -entrance * D, convergent, divergent, throatFrom, throatTo, exit, tapping };
 }
 
+type Stations = ReturnType<typeof stationsOf>;
+
 /** Radii of the corners: 5.2.8 as cast; sharp for a machined or fabricated tube, as these prefer. */
 function cornersOf(shape: Shape): readonly [number, number, number] {
   return shape.element.endsWith('as-cast') ? [1.375 * shape.pipe, 3.625 * shape.bore, 10 * shape.bore] : [0, 0, 0];
@@ -85,51 +87,58 @@ function wallsOf(pipe: number, entry: number, exit: number, reach: Reach): reado
   return bothSides([polygon(before), polygon(after)]);
 }
 
-function section(shape: Shape, rows: readonly DimensionRow[], reach: Reach): Section {
-  const { pipe: D, bore: d } = shape;
-  const { entry, throatFrom, throatTo, exit, tapping } = stationsOf(shape, rows);
-  const profile = contourOf(shape, rows);
-  const shell = shellOf(shape, profile);
-  const thick = 0.1 * D;
-  const { flange, wall } = radii(D);
-  const outer = pathReversed(shell);
+/** The tube itself: its contour and shell, closed by the flange at either end. */
+function tubeOf(shape: Shape, { entry, exit }: Stations, profile: Path, shell: Path): Path {
+  const thick = 0.1 * shape.pipe;
+  const { flange, wall } = radii(shape.pipe);
   const metal = closedThrough(profile, [
     at(exit, flange),
     at(exit - thick, flange),
     at(exit - thick, radiusAt(shell, exit - thick)),
   ]);
-  const closed: Path = {
+  return {
     ...metal,
     segments: [
       ...metal.segments,
-      ...outer.segments.slice(0, -1),
+      ...pathReversed(shell).segments.slice(0, -1),
       { kind: 'line', to: at(entry + thick, wall) },
       { kind: 'line', to: at(entry + thick, flange) },
       { kind: 'line', to: at(entry, flange) },
     ],
   };
-  const upstreamHole = -shape.tappingUpstream;
+}
+
+/** What flows, from wall to wall. */
+function fluidOf({ pipe: D }: Shape, profile: Path, reach: Reach): Path {
   const lower = pathReversed(mirrored(profile));
-  const fluid = closedThrough(
-    {
-      start: at(reach.from, D / 2),
-      segments: [{ kind: 'line', to: profile.start }, ...profile.segments],
-      closed: false,
-    },
-    [at(reach.to, D / 2), at(reach.to, -D / 2), lower.start],
-  );
+  const upper: Path = {
+    start: at(reach.from, D / 2),
+    segments: [{ kind: 'line', to: profile.start }, ...profile.segments],
+    closed: false,
+  };
+  const fluid = closedThrough(upper, [at(reach.to, D / 2), at(reach.to, -D / 2), lower.start]);
+  return { ...fluid, segments: [...fluid.segments, ...lower.segments, { kind: 'line', to: at(reach.from, -D / 2) }] };
+}
+
+function section(shape: Shape, rows: readonly DimensionRow[], reach: Reach): Section {
+  const { pipe: D, bore: d } = shape;
+  const stations = stationsOf(shape, rows);
+  const { entry, throatFrom, throatTo, exit, tapping } = stations;
+  const profile = contourOf(shape, rows);
+  const shell = shellOf(shape, profile);
+  const { flange, wall } = radii(D);
   const jet = [0, 0.5 * throatFrom, throatFrom, throatTo, 0.5 * (throatTo + exit), exit];
   return {
     profile,
     walls: wallsOf(D, entry, exit, reach),
-    metal: bothSides([closed]),
-    fluid: { ...fluid, segments: [...fluid.segments, ...lower.segments, { kind: 'line', to: at(reach.from, -D / 2) }] },
+    metal: bothSides([tubeOf(shape, stations, profile, shell)]),
+    fluid: fluidOf(shape, profile, reach),
     streamlines: streamlinesAlong(
       [at(-0.3 * D, D / 2), ...jet.map((x) => at(x, radiusAt(profile, x))), at(exit + 0.6 * D, D / 2)],
       reach,
     ),
     tappings: [
-      { x: upstreamHole, inner: D / 2, outer: wall, width: holeWidth(D) },
+      { x: -shape.tappingUpstream, inner: D / 2, outer: wall, width: holeWidth(D) },
       { x: tapping, inner: d / 2, outer: radiusAt(shell, tapping), width: Math.min(0.1 * d, 0.01) }, // 5.4.2
     ],
     edge: at(throatFrom + 0.85 * d, d / 2),

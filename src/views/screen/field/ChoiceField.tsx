@@ -3,9 +3,10 @@
 import type { Choice } from '../../words/elements.ts';
 import { fieldLabel } from '../../words/fields.ts';
 import { useWorkbench } from '../binding.tsx';
-import { useMeterText, useProblem, useUntried } from '../meter.ts';
+import { useMeterText, useProblem } from '../meter.ts';
 import styles from './box.module.css';
-import { Frame, problemId } from './Frame.tsx';
+import { Frame } from './Frame.tsx';
+import { useFieldState } from './useFieldState.ts';
 
 interface Props {
   readonly path: string;
@@ -20,19 +21,15 @@ export function ChoiceField({ path, label = fieldLabel(path), choices, open }: P
   const problem = useProblem(path);
   const write = useWorkbench((state) => state.write);
   const settle = useWorkbench((state) => state.settle);
-  const waiting = useUntried() && text === '';
-  const id = `field-${path}`;
+  const { frame, invalid, box } = useFieldState({ path, text, problem });
   const foreign = text !== '' && !choices.some((choice) => choice.value === text);
   return (
-    <Frame id={id} label={label} problem={problem} waiting={waiting}>
-      <div className={styles.box} data-invalid={problem !== undefined && !waiting}>
+    <Frame {...frame} label={label}>
+      <div className={styles.box} data-invalid={invalid}>
         <select
-          id={id}
+          {...box}
           className={styles.select}
-          data-field={path}
           value={text}
-          aria-invalid={problem !== undefined && !waiting}
-          aria-describedby={problem === undefined ? undefined : problemId(id)}
           onChange={(event) => {
             write(path, event.target.value);
             settle();

@@ -3,11 +3,12 @@
 import type { ReactNode } from 'react';
 import { fieldLabel } from '../../words/fields.ts';
 import { useWorkbench } from '../binding.tsx';
-import { useMeterText, useProblem, useUntried } from '../meter.ts';
+import { useMeterText, useProblem } from '../meter.ts';
 import styles from './box.module.css';
-import { Frame, noteId, problemId } from './Frame.tsx';
-import { unitMenu } from './split.ts';
-import { useQuantity } from './useQuantity.ts';
+import { Frame } from './Frame.tsx';
+import { UnitOptions } from './UnitOptions.tsx';
+import { useFieldState } from './useFieldState.ts';
+import { type QuantityBinding, useQuantity } from './useQuantity.ts';
 
 export interface QuantityFieldProps {
   readonly path: string;
@@ -36,54 +37,61 @@ interface QuantityBoxProps extends QuantityFieldProps {
 export function QuantityBox({ path, label = fieldLabel(path), place = 'field', ...rest }: QuantityBoxProps) {
   const { text, problem, write, note, aside } = rest;
   const display = useWorkbench((state) => state.project.display ?? 'SI');
-  const settle = useWorkbench((state) => state.settle);
-  const { shown, unit, echo, kind, type, chooseUnit, ...field } = useQuantity(path, text, display, write);
-  const id = `${place}-${path}`;
-  const waiting = useUntried() && text === '';
-  const described = [echo || note ? noteId(id) : '', problem ? problemId(id) : ''].filter(Boolean).join(' ');
+  const quantity = useQuantity(path, text, display, write);
+  const noted = quantity.echo !== '' || Boolean(note);
+  const { frame, invalid, box } = useFieldState({ path, text, problem, place, noted });
   return (
-    <Frame id={id} label={label} echo={echo} problem={problem} waiting={waiting} note={note} aside={aside}>
-      <div className={styles.box} data-invalid={problem !== undefined && !waiting}>
-        <input
-          id={id}
-          className={styles.input}
-          data-field={path}
-          type="text"
-          inputMode="decimal"
-          enterKeyHint="next"
-          autoComplete="off"
-          spellCheck={false}
-          placeholder={waiting && problem !== undefined ? 'needed' : undefined}
-          value={shown}
-          aria-invalid={problem !== undefined && !waiting}
-          aria-describedby={described === '' ? undefined : described}
-          onChange={(event) => type(event.target.value)}
-          onKeyDown={(event) => {
-            if (event.key === 'Enter') field.settle();
-          }}
-          onBlur={() => {
-            field.leave();
-            settle();
-          }}
-        />
-        <select
-          className={styles.unit}
-          aria-label={`${fieldLabel(path)}, unit`}
-          title={unit.words}
-          value={unit.symbol}
-          onChange={(event) => chooseUnit(event.target.value)}
-        >
-          {unitMenu(kind.measures).map(({ measure, units }) => (
-            <optgroup key={measure} label={measure}>
-              {units.map(({ symbol, print }) => (
-                <option key={symbol} value={symbol}>
-                  {print}
-                </option>
-              ))}
-            </optgroup>
-          ))}
-        </select>
+    <Frame {...frame} label={label} echo={quantity.echo} note={note} aside={aside}>
+      <div className={styles.box} data-invalid={invalid}>
+        <NumberInput quantity={quantity} box={box} needed={frame.waiting && problem !== undefined} />
+        <UnitSelect path={path} quantity={quantity} />
       </div>
     </Frame>
+  );
+}
+
+interface NumberProps {
+  readonly quantity: QuantityBinding;
+  readonly box: ReturnType<typeof useFieldState>['box'];
+  readonly needed: boolean;
+}
+
+function NumberInput({ quantity, box, needed }: NumberProps) {
+  const settle = useWorkbench((state) => state.settle);
+  return (
+    <input
+      {...box}
+      className={styles.input}
+      type="text"
+      inputMode="decimal"
+      enterKeyHint="next"
+      autoComplete="off"
+      spellCheck={false}
+      placeholder={needed ? 'needed' : undefined}
+      value={quantity.shown}
+      onChange={(event) => quantity.type(event.target.value)}
+      onKeyDown={(event) => {
+        if (event.key === 'Enter') quantity.settle();
+      }}
+      onBlur={() => {
+        quantity.leave();
+        settle();
+      }}
+    />
+  );
+}
+
+function UnitSelect({ path, quantity }: { readonly path: string; readonly quantity: QuantityBinding }) {
+  const { unit, kind } = quantity;
+  return (
+    <select
+      className={styles.unit}
+      aria-label={`${fieldLabel(path)}, unit`}
+      title={unit.words}
+      value={unit.symbol}
+      onChange={(event) => quantity.chooseUnit(event.target.value)}
+    >
+      <UnitOptions measures={kind.measures} />
+    </select>
   );
 }

@@ -1,7 +1,7 @@
 /** Words or a plain number, kept as typed. */
-import { useUntried } from '../meter.ts';
 import styles from './box.module.css';
-import { Frame, problemId } from './Frame.tsx';
+import { Frame } from './Frame.tsx';
+import { useFieldState } from './useFieldState.ts';
 
 interface Props {
   readonly path: string;
@@ -14,24 +14,19 @@ interface Props {
 }
 
 export function TextField({ path, label, text, problem, decimal = false, write, settle }: Props) {
-  const id = `field-${path}`;
-  const waiting = useUntried() && text === '';
-  const invalid = problem !== undefined && !waiting;
+  const { frame, invalid, box } = useFieldState({ path, text, problem });
   return (
-    <Frame id={id} label={label} problem={problem} waiting={waiting}>
+    <Frame {...frame} label={label}>
       <div className={styles.box} data-invalid={invalid}>
         <input
-          id={id}
+          {...box}
           className={styles.input}
-          data-field={path}
           type="text"
           inputMode={decimal ? 'decimal' : 'text'}
           enterKeyHint="next"
           autoComplete="off"
           spellCheck={!decimal}
           value={text}
-          aria-invalid={invalid}
-          aria-describedby={problem === undefined ? undefined : problemId(id)}
           onChange={(event) => write(event.target.value)}
           onBlur={settle}
         />

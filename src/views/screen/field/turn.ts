@@ -39,8 +39,8 @@ function figure(unknown: Unknown, solved: Solved, measure: Unit['measure'] | und
   return { si: point.massFlow_kg_s, unit: 'kg/s' };
 }
 
-/** Enough for the new question to answer with the old one, and few enough to read. */
-const DIGITS = { significant: 8, typographic: false } as const;
+/** As many as a drawing or a range carries, so that the new question answers with what was shown before. */
+const DIGITS = { significant: 5, typographic: false } as const;
 
 /** Text of the found figure for its own field; undefined where the result has none. */
 export function foundText(unknown: Unknown, solved: Solved, written: string, display: Display): string | undefined {

@@ -1,7 +1,7 @@
 /** The unit above a column; choosing another converts its rows. */
 import { type Unit, unitOf } from '../../../core/quantity/units.ts';
 import { tableWords as words } from '../../words/fluid-forms.ts';
-import { unitMenu } from '../field/split.ts';
+import { UnitOptions } from '../field/UnitOptions.tsx';
 import type { TableColumn } from './rows.ts';
 
 interface Props {
@@ -21,15 +21,7 @@ export function ColumnUnit({ column: { label, kind }, unit, choose }: Props) {
         if (next !== undefined) choose(next);
       }}
     >
-      {unitMenu(kind.measures).map(({ measure, units }) => (
-        <optgroup key={measure} label={measure}>
-          {units.map(({ symbol, print }) => (
-            <option key={symbol} value={symbol}>
-              {print}
-            </option>
-          ))}
-        </optgroup>
-      ))}
+      <UnitOptions measures={kind.measures} />
     </select>
   );
 }

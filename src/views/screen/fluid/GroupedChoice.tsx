@@ -1,8 +1,9 @@
 /** One of a long list in groups. A value that is not in the list is kept and shown as it is written. */
 import type { Choice } from '../../words/elements.ts';
 import box from '../field/box.module.css';
-import { Frame, problemId } from '../field/Frame.tsx';
-import { useMeterText, useProblem, useUntried } from '../meter.ts';
+import { Frame } from '../field/Frame.tsx';
+import { useFieldState } from '../field/useFieldState.ts';
+import { useMeterText, useProblem } from '../meter.ts';
 
 interface Props {
   readonly path: string;
@@ -19,22 +20,12 @@ export function GroupedChoice({ path, label, first, groups, shown, choose }: Pro
   const written = useMeterText(path);
   const problem = useProblem(path);
   const value = shown ?? written;
-  const waiting = useUntried() && written === '';
-  const invalid = problem !== undefined && !waiting;
-  const id = `field-${path}`;
+  const { frame, invalid, box: own } = useFieldState({ path, text: written, problem });
   const known = [...first, ...groups.flatMap((group) => group.choices)].some((choice) => choice.value === value);
   return (
-    <Frame id={id} label={label} problem={problem} waiting={waiting}>
+    <Frame {...frame} label={label}>
       <div className={box.box} data-invalid={invalid}>
-        <select
-          id={id}
-          className={box.select}
-          data-field={path}
-          value={value}
-          aria-invalid={invalid}
-          aria-describedby={problem === undefined ? undefined : problemId(id)}
-          onChange={(event) => choose(event.target.value)}
-        >
+        <select {...own} className={box.select} value={value} onChange={(event) => choose(event.target.value)}>
           {!known && <option value={value}>{value}</option>}
           <Options choices={first} />
           {groups.map((group) => (

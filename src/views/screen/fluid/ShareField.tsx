@@ -3,8 +3,9 @@ import { useState } from 'react';
 import { fieldLabel } from '../../words/fields.ts';
 import { useWorkbench } from '../binding.tsx';
 import box from '../field/box.module.css';
-import { Frame, problemId } from '../field/Frame.tsx';
-import { useMeterText, useProblem, useUntried } from '../meter.ts';
+import { Frame } from '../field/Frame.tsx';
+import { useFieldState } from '../field/useFieldState.ts';
+import { useMeterText, useProblem } from '../meter.ts';
 import { convertShare, fileShare, SHARE_UNITS, type ShareUnit, shownShare, unitOfShare } from './share.ts';
 import { useDraft } from './useDraft.ts';
 
@@ -26,23 +27,18 @@ export function ShareField({ path, label = fieldLabel(path) }: Props) {
     (typed) => fileShare(typed, unit),
     (next) => write(path, next),
   );
-  const waiting = useUntried() && text === '';
-  const id = `field-${path}`;
-  const invalid = problem !== undefined && !waiting;
+  const { frame, invalid, box: own } = useFieldState({ path, text, problem });
   return (
-    <Frame id={id} label={label} problem={problem} waiting={waiting}>
+    <Frame {...frame} label={label}>
       <div className={box.box} data-invalid={invalid}>
         <input
-          id={id}
+          {...own}
           className={box.input}
-          data-field={path}
           type="text"
           inputMode="decimal"
           autoComplete="off"
           spellCheck={false}
           value={draft.value}
-          aria-invalid={invalid}
-          aria-describedby={problem === undefined ? undefined : problemId(id)}
           onChange={(event) => draft.type(event.target.value)}
           onBlur={settle}
         />

@@ -12,8 +12,6 @@ const COLUMNS = [
 
 export function Calibration() {
   const meter = useWorkbench((state) => state.project.meters[state.selected]);
-  const write = useWorkbench((state) => state.write);
-  const settle = useWorkbench((state) => state.settle);
   const problem = useProblem(PATH);
   const list = valueAt(meter, PATH);
   const count = Array.isArray(list) ? list.length : 0;
@@ -33,34 +31,40 @@ export function Calibration() {
       </thead>
       <tbody>
         {rows.map((at) => (
-          <tr key={at}>
-            {COLUMNS.map(({ key, label }) => (
-              <td key={key}>
-                <CalibrationCell
-                  path={`${PATH}.${at}.${key}`}
-                  label={`${label}, row ${at + 1}`}
-                  text={textAt(meter, `${PATH}.${at}.${key}`)}
-                  write={write}
-                  settle={settle}
-                />
-              </td>
-            ))}
-            <td>
-              {at < count && (
-                <button
-                  type="button"
-                  aria-label={`Remove row ${at + 1}`}
-                  onClick={() => write(`${PATH}.${at}`, undefined)}
-                >
-                  ×
-                </button>
-              )}
-            </td>
-          </tr>
+          <CalibrationRow key={at} at={at} last={at === count} />
         ))}
       </tbody>
       {problem && <caption className={styles.problem}>{problem}</caption>}
     </table>
+  );
+}
+
+function CalibrationRow({ at, last }: { readonly at: number; readonly last: boolean }) {
+  const row = useWorkbench((state) => valueAt(state.project.meters[state.selected], `${PATH}.${at}`));
+  const write = useWorkbench((state) => state.write);
+  const settle = useWorkbench((state) => state.settle);
+  const path = `${PATH}.${at}`;
+  return (
+    <tr>
+      {COLUMNS.map(({ key, label }) => (
+        <td key={key}>
+          <CalibrationCell
+            path={`${path}.${key}`}
+            label={`${label}, row ${at + 1}`}
+            text={textAt(row, key)}
+            write={write}
+            settle={settle}
+          />
+        </td>
+      ))}
+      <td>
+        {!last && (
+          <button type="button" aria-label={`Remove row ${at + 1}`} onClick={() => write(path, undefined)}>
+            ×
+          </button>
+        )}
+      </td>
+    </tr>
   );
 }
 
