@@ -86,7 +86,7 @@ test('a composition is pasted, looked over and taken in one step of undo', async
 
 test('a sum that is off is brought to a whole when the user asks for it', async ({ page }) => {
   await openProject(page, project);
-  await expect(answer(page)).toContainText('waits for its figures');
+  await expect(answer(page)).toContainText('cannot be solved as it stands');
   await main(page).getByLabel('Bring the sum to 100 %').check();
   await expect(answer(page)).toContainText('mm bore reads');
   await expect(state(page)).toContainText('Relative density');

@@ -38,7 +38,9 @@ describe('formulas as MathML', () => {
 
   it('is the same on the screen and on the sheet', () => {
     const [symbol, equals] = [parseFormula('C'), parseFormula('0.5961 + 0.0261*β^2 - 0.216*(β^2)^4/sqrt(1 - β^4)')];
-    const markup = [MathExpression, Formula].map((One) => renderToStaticMarkup(<One symbol={symbol} equals={equals} />));
+    const markup = [MathExpression, Formula].map((One) =>
+      renderToStaticMarkup(<One symbol={symbol} equals={equals} />),
+    );
     const [screen, sheet] = markup.map((text) => text.match(/(?<=<math[^>]*>).+?(?=<\/math>)/g));
     expect(screen).toHaveLength(4);
     expect(sheet).toEqual(screen);

@@ -41,7 +41,7 @@ function Check({ row }: { readonly row: CheckRow }) {
   return (
     <li className={styles.row} data-verdict={row.verdict} data-check={row.id}>
       <VerdictMark verdict={row.verdict} words={row.verdictWord} />
-      <p>{row.text}</p>
+      <p className={styles.text}>{row.text}</p>
       <p className={styles.held}>
         <span>{row.limit}</span>
         <Clause cited={row.cited} />
