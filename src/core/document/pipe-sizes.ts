@@ -51,22 +51,43 @@ const pipeSize = ([nps, dn, schedule, outside, wall]: PipeSizeRow): PipeSize => 
 /** Every size of the table, smallest first. */
 export const PIPE_SIZES: readonly PipeSize[] = PIPE_SIZE_ROWS.map(pipeSize);
 
-/**
- * Sizes that a query finds: each of its words must be the DN, the NPS or the schedule of the size, or begin it
- * ('100 40', 'DN100', '4" 40S', '1 1/2 80'). An empty query finds all.
- */
-export const searchPipeSizes = (query: string): readonly PipeSize[] => {
-  const words = query
+/** Words of a query: 'DN', 'NPS', 'schedule', 'in', commas and crosses only part them. */
+const wordsOf = (query: string): readonly string[] =>
+  query
     .toUpperCase()
-    .replace(/\b(DN|NPS|SCH|SCHEDULE|IN)\b\.?/g, ' ')
+    .replace(/\b(DN|NPS|SCH|SCHEDULE|IN|MM|X)\b\.?/g, ' ')
     .replace(/DN(?=\d)/g, '')
-    .split(/[\s,"″]+/)
+    .split(/[\s,"″×]+/)
     .filter(Boolean);
-  return PIPE_SIZES.filter((size) => {
-    const keys = [String(size.dn), size.schedule, ...size.nps.split(' ')];
-    return words.every((word) => keys.some((key) => key.startsWith(word)));
-  });
-};
+
+/** How many words of a query only begin what they stand for; undefined when one stands for nothing of the size. */
+function guesses(size: PipeSize, words: readonly string[]): number | undefined {
+  const keys = [String(size.dn), size.schedule, size.outside, size.wall, ...size.nps.split(' ')];
+  if (!words.every((word) => keys.some((key) => key.startsWith(word)))) return undefined;
+  return words.filter((word) => !keys.includes(word)).length;
+}
+
+/**
+ * Sizes that a query finds, those it names outright first: each of its words must be the DN, the NPS, the schedule, the
+ * outside diameter or the wall of the size, or begin it ('100 40', 'DN100', '4" 40S', '114.3 x 6.02'). An empty query
+ * finds all.
+ */
+export function searchPipeSizes(query: string): readonly PipeSize[] {
+  const words = wordsOf(query);
+  return PIPE_SIZES.flatMap((size) => {
+    const guessed = guesses(size, words);
+    return guessed === undefined ? [] : [{ size, guessed }];
+  })
+    .toSorted((one, other) => one.guessed - other.guessed)
+    .map(({ size }) => size);
+}
+
+/** The one size that a query names outright; undefined when it names none, or several. */
+export function namedOutright(query: string): PipeSize | undefined {
+  const words = wordsOf(query);
+  const [first, ...others] = words.length < 2 ? [] : PIPE_SIZES.filter((size) => guesses(size, words) === 0);
+  return others.length === 0 ? first : undefined;
+}
 
 /** The size of a name as the project keeps it; undefined for a name that is not in the table. */
 export const pipeSizeNamed = (name: string): PipeSize | undefined => PIPE_SIZES.find((size) => size.name === name);

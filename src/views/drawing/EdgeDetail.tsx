@@ -78,36 +78,10 @@ function EdgeFigures({ rows, face, edge, back, rise }: EdgeFiguresProps) {
   return (
     <g>
       {whole === undefined ? null : (
-        <g>
-          <path className={styles.thin} d={`M${face} ${topY}V${upper - 1.2}M${back} ${topY}V${upper - 1.2}`} />
-          <Dimension
-            from={at(face, upper)}
-            to={at(back, upper)}
-            head={paper.head}
-            className={styles.thin}
-            headClassName={styles.arrow}
-          />
-          <path className={styles.thin} d={`M${back} ${upper}H${back + 3 + widthOf(whole, paper.type)}`} />
-          <text className={styles.figure} x={back + 3} y={upper - 0.9}>
-            {whole}
-          </text>
-        </g>
+        <Thickness text={whole} from={face} to={back} y={upper} foot={topY} past={-1.2} gap={3} />
       )}
       {short === undefined ? null : (
-        <g>
-          <path className={styles.thin} d={`M${face} ${edgeY}V${lower + 1.2}M${edge} ${edgeY}V${lower + 1.2}`} />
-          <Dimension
-            from={at(face, lower)}
-            to={at(edge, lower)}
-            head={paper.head}
-            className={styles.thin}
-            headClassName={styles.arrow}
-          />
-          <path className={styles.thin} d={`M${edge} ${lower}H${edge + 6 + widthOf(short, paper.type)}`} />
-          <text className={styles.figure} x={edge + 6} y={lower - 0.9}>
-            {short}
-          </text>
-        </g>
+        <Thickness text={short} from={face} to={edge} y={lower} foot={edgeY} past={1.2} gap={6} />
       )}
       {bevel === undefined ? null : (
         <g>
@@ -121,6 +95,36 @@ function EdgeFigures({ rows, face, edge, back, rise }: EdgeFiguresProps) {
         </g>
       )}
       {radius === undefined ? null : <EdgeRadius text={radius} x={face} />}
+    </g>
+  );
+}
+
+interface ThicknessProps {
+  readonly text: string;
+  readonly from: number;
+  readonly to: number;
+  readonly y: number; // of the dimension line
+  readonly foot: number; // where the extension lines start
+  readonly past: number; // how far they run on
+  readonly gap: number; // from the second arrow to the text
+}
+
+/** A thickness between two extension lines, its text beside it. */
+function Thickness({ text, from, to, y, foot, past, gap }: ThicknessProps) {
+  return (
+    <g>
+      <path className={styles.thin} d={`M${from} ${foot}V${y + past}M${to} ${foot}V${y + past}`} />
+      <Dimension
+        from={at(from, y)}
+        to={at(to, y)}
+        head={paper.head}
+        className={styles.thin}
+        headClassName={styles.arrow}
+      />
+      <path className={styles.thin} d={`M${to} ${y}H${to + gap + widthOf(text, paper.type)}`} />
+      <text className={styles.figure} x={to + gap} y={y - 0.9}>
+        {text}
+      </text>
     </g>
   );
 }

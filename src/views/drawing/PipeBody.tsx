@@ -34,20 +34,21 @@ export function PipeBody({ layout }: { readonly layout: PictureLayout }) {
           <path className={styles.outline} d={pathData(path, scale)} />
         </g>
       ))}
-      {section.tappings.map((hole) => {
-        const top = onPage(at(hole.x, hole.outer), scale);
-        const half = Math.max(1.5, (hole.width * scale.factor) / 2);
-        const depth = (hole.outer - hole.inner) * scale.factor;
-        return (
-          <g key={hole.x}>
-            <rect className={styles.water} x={top.x - half} y={top.y - 1} width={2 * half} height={depth + 2} />
-            <path
-              className={styles.outline}
-              d={`M${top.x - half} ${top.y}v${depth}M${top.x + half} ${top.y}v${depth}`}
-            />
-          </g>
-        );
-      })}
+      <Tappings layout={layout} />
     </g>
   );
+}
+
+function Tappings({ layout: { section, scale } }: { readonly layout: PictureLayout }) {
+  return section.tappings.map((hole) => {
+    const top = onPage(at(hole.x, hole.outer), scale);
+    const half = Math.max(1.5, (hole.width * scale.factor) / 2);
+    const depth = (hole.outer - hole.inner) * scale.factor;
+    return (
+      <g key={hole.x}>
+        <rect className={styles.water} x={top.x - half} y={top.y - 1} width={2 * half} height={depth + 2} />
+        <path className={styles.outline} d={`M${top.x - half} ${top.y}v${depth}M${top.x + half} ${top.y}v${depth}`} />
+      </g>
+    );
+  });
 }

@@ -56,13 +56,20 @@ export function PipeDrawing({ shape, heads, labels, width, dimensions = none, on
           />
         ) : null}
       </svg>
-      <figcaption className={styles.legend}>
-        <span>
-          <span className={styles.bullet} aria-hidden="true" />
-          {labels.legend}
-        </span>
-        <span>{labels.scale}</span>
-      </figcaption>
+      <Legend labels={labels} />
     </figure>
+  );
+}
+
+/** What is computed and what is to scale. */
+function Legend({ labels }: { readonly labels: PipeLabels }) {
+  return (
+    <figcaption className={styles.legend}>
+      <span>
+        <span className={styles.bullet} aria-hidden="true" />
+        {labels.legend}
+      </span>
+      <span>{labels.scale}</span>
+    </figcaption>
   );
 }

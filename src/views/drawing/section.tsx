@@ -83,26 +83,24 @@ function Metal({ layout, id }: { readonly layout: SheetLayout; readonly id: stri
             d={pathData(path, scale)}
           />
         ))}
-        {section.tappings.map((hole) => {
-          const half = Math.max(0.35, (hole.width * scale.factor) / 2);
-          const [top, foot] = [scale.originY - scale.factor * hole.outer, scale.originY - scale.factor * hole.inner];
-          const wall = `M${x(hole.x) - half} ${top}V${foot}M${x(hole.x) + half} ${top}V${foot}`;
-          return (
-            <g key={hole.x}>
-              <rect
-                className={styles.blank}
-                x={x(hole.x) - half}
-                y={top - 0.3}
-                width={2 * half}
-                height={foot - top + 0.6}
-              />
-              <path className={styles.hole} d={wall} />
-            </g>
-          );
-        })}
+        <Holes layout={layout} />
       </g>
     </g>
   );
+}
+
+function Holes({ layout: { section, scale } }: { readonly layout: SheetLayout }) {
+  return section.tappings.map((hole) => {
+    const x = scale.originX + scale.factor * hole.x;
+    const half = Math.max(0.35, (hole.width * scale.factor) / 2);
+    const [top, foot] = [scale.originY - scale.factor * hole.outer, scale.originY - scale.factor * hole.inner];
+    return (
+      <g key={hole.x}>
+        <rect className={styles.blank} x={x - half} y={top - 0.3} width={2 * half} height={foot - top + 0.6} />
+        <path className={styles.hole} d={`M${x - half} ${top}V${foot}M${x + half} ${top}V${foot}`} />
+      </g>
+    );
+  });
 }
 
 function Axis({ layout }: { readonly layout: SheetLayout }) {

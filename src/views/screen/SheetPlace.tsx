@@ -37,8 +37,6 @@ export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) 
   const [alone, setAlone] = useState(false);
   const [include, setInclude] = useState<readonly SheetKind[]>(['sizing', 'checks', 'dimensions']);
   const commands = useCommands();
-  const toggle = (kind: SheetKind) =>
-    setInclude(include.includes(kind) ? include.filter((one) => one !== kind) : [...include, kind]);
   return (
     <div className={styles.place}>
       <h1 className={styles.title}>Sheets</h1>
@@ -51,15 +49,7 @@ export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) 
           chosen={alone ? 'this one' : 'all'}
           choose={(choice) => setAlone(choice === 'this one')}
         />
-        <fieldset>
-          <legend>Sheets</legend>
-          {SHEETS.map(({ kind, label }) => (
-            <label key={kind}>
-              <input type="checkbox" checked={include.includes(kind)} onChange={() => toggle(kind)} />
-              {label}
-            </label>
-          ))}
-        </fieldset>
+        <Kinds include={include} choose={setInclude} />
         <button type="button" onClick={() => commands.print()}>
           Print
         </button>
@@ -74,6 +64,28 @@ export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) 
         />
       </div>
     </div>
+  );
+}
+
+interface KindsProps {
+  readonly include: readonly SheetKind[];
+  readonly choose: (include: readonly SheetKind[]) => void;
+}
+
+/** Which sheets of each meter. */
+function Kinds({ include, choose }: KindsProps) {
+  const toggle = (kind: SheetKind) =>
+    choose(include.includes(kind) ? include.filter((one) => one !== kind) : [...include, kind]);
+  return (
+    <fieldset>
+      <legend>Sheets</legend>
+      {SHEETS.map(({ kind, label }) => (
+        <label key={kind}>
+          <input type="checkbox" checked={include.includes(kind)} onChange={() => toggle(kind)} />
+          {label}
+        </label>
+      ))}
+    </fieldset>
   );
 }
 

@@ -35,35 +35,39 @@ function Checks({ blocks }: { readonly blocks: readonly CheckBlock[] }) {
             ))}
           </tr>
         </thead>
-        {blocks.map(({ assumption, title, rows, open }) => (
-          <tbody key={assumption}>
-            {rows.map(({ key, text, limit, source, verdict, verdictWord }, at) => (
-              <tr key={key}>
-                {at === 0 && (
-                  <th scope="rowgroup" rowSpan={rows.length + open.length}>
-                    {title}
-                  </th>
-                )}
-                <td>{text}</td>
-                <td>{limit}</td>
-                <td className={verdict === 'inside' ? undefined : tables.loud}>{verdictWord}</td>
-                <td>{source}</td>
-              </tr>
-            ))}
-            {open.map((text, at) => (
-              <tr key={text}>
-                {rows.length === 0 && at === 0 && (
-                  <th scope="rowgroup" rowSpan={open.length}>
-                    {title}
-                  </th>
-                )}
-                <td colSpan={4}>{text}</td>
-              </tr>
-            ))}
-          </tbody>
+        {blocks.map((block) => (
+          <Assumption key={block.assumption} block={block} />
         ))}
       </table>
     </Block>
+  );
+}
+
+/** The checks of one assumption; what could not be checked stands last. */
+function Assumption({ block: { title, rows, open } }: { readonly block: CheckBlock }) {
+  const head = (
+    <th scope="rowgroup" rowSpan={rows.length + open.length}>
+      {title}
+    </th>
+  );
+  return (
+    <tbody>
+      {rows.map(({ key, text, limit, source, verdict, verdictWord }, at) => (
+        <tr key={key}>
+          {at === 0 && head}
+          <td>{text}</td>
+          <td>{limit}</td>
+          <td className={verdict === 'inside' ? undefined : tables.loud}>{verdictWord}</td>
+          <td>{source}</td>
+        </tr>
+      ))}
+      {open.map((text, at) => (
+        <tr key={text}>
+          {rows.length + at === 0 && head}
+          <td colSpan={4}>{text}</td>
+        </tr>
+      ))}
+    </tbody>
   );
 }
 

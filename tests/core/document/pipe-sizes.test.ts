@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { PIPE_SIZE_ROWS } from '../../../src/core/document/pipe-sizes.table.ts';
-import { PIPE_SIZES, searchPipeSizes } from '../../../src/core/document/pipe-sizes.ts';
+import { namedOutright, PIPE_SIZES, searchPipeSizes } from '../../../src/core/document/pipe-sizes.ts';
 
 const named = (name: string) => PIPE_SIZES.find((size) => size.name === name);
 
@@ -50,5 +50,31 @@ describe('pipe sizes', () => {
     expect(searchPipeSizes('1 1/2 80').map(({ name }) => name)).toContain('DN 40, 80');
     expect(searchPipeSizes('')).toHaveLength(355);
     expect(searchPipeSizes('DN 77')).toEqual([]);
+  });
+});
+
+describe('what a person types', () => {
+  it.each([
+    ['DN 100 schedule 40', 'DN 100, 40'],
+    ['NPS 4 STD', 'DN 100, STD'],
+    ['4" sch 40', 'DN 100, 40'],
+    ['DN100 40S', 'DN 100, 40S'],
+    ['1 1/2 80', 'DN 40, 80'],
+  ])('%s comes first, and is named outright', (query, name) => {
+    expect(searchPipeSizes(query)[0]?.name).toBe(name);
+    expect(namedOutright(query)?.name).toBe(name);
+  });
+
+  it('an outside diameter and a wall find their sizes, and name several', () => {
+    expect(searchPipeSizes('114.3 x 6.02').map(({ name }) => name)).toEqual([
+      'DN 100, 40S',
+      'DN 100, 40',
+      'DN 100, STD',
+    ]);
+    expect(namedOutright('114.3 x 6.02')).toBeUndefined();
+  });
+
+  it('a nominal size alone, or nothing of the table, names nothing', () => {
+    for (const query of ['', 'DN 100', '40', 'DN 100 sch 41', 'hose']) expect(namedOutright(query)).toBeUndefined();
   });
 });

@@ -61,10 +61,8 @@ export function useQuantity(
   const enter = (typed: string): void => {
     // A unit alone converts the number that stood there before its first letter was typed.
     const previous = live !== undefined && last !== undefined ? last : written;
-    const read =
-      typed.trim() === ''
-        ? undefined
-        : readTyped(typed, kind.measures, path, { ...previous, unit: hasDigit(typed) ? unit : previous.unit });
+    const from = { ...previous, unit: hasDigit(typed) ? unit : previous.unit };
+    const read = typed.trim() === '' ? undefined : readTyped(typed, kind.measures, path, from);
     const file = read === undefined ? '' : read.ok ? read.value.file : typed;
     if (read?.ok && hasDigit(typed)) setLast(split(file, kind.measures) as Previous);
     else if (live === undefined) setLast(written);
