@@ -4,6 +4,7 @@ import { PipeDrawing } from '../drawing/pipe.tsx';
 import type { PresentedProblem, PresentedSizing } from '../present/model.ts';
 import styles from './Along.module.css';
 import { useCommands, useWorkbenchStore } from './binding.tsx';
+import buttons from './button.module.css';
 import { drawingLabels } from './drawing-labels.ts';
 import { pullTo } from './field/turn.ts';
 import { MeterHead } from './MeterHead.tsx';
@@ -82,7 +83,7 @@ function Beginning() {
   return (
     <>
       The pipe is drawn to scale as soon as its figures are in. To look around first,{' '}
-      <button type="button" onClick={() => void commands.openExample()}>
+      <button type="button" className={buttons.word} onClick={() => void commands.openExample()}>
         open the example
       </button>
       .

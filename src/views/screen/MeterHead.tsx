@@ -1,5 +1,6 @@
 /** The name of the meter, and what can be done with it as a whole. */
 import { useWorkbench } from './binding.tsx';
+import buttons from './button.module.css';
 import styles from './MeterHead.module.css';
 import { textAt } from './text.ts';
 
@@ -41,16 +42,28 @@ function MeterActions({ index }: { readonly index: number }) {
   const remove = useWorkbench((state) => state.deleteMeter);
   return (
     <div className={styles.actions}>
-      <button type="button" onClick={() => duplicate(index)}>
+      <button type="button" className={buttons.quiet} onClick={() => duplicate(index)}>
         Duplicate
       </button>
-      <button type="button" disabled={index === 0} title="Alt + ↑" onClick={() => move(index, index - 1)}>
+      <button
+        type="button"
+        className={buttons.quiet}
+        disabled={index === 0}
+        title="Alt + ↑"
+        onClick={() => move(index, index - 1)}
+      >
         Move up
       </button>
-      <button type="button" disabled={index + 1 >= count} title="Alt + ↓" onClick={() => move(index, index + 1)}>
+      <button
+        type="button"
+        className={buttons.quiet}
+        disabled={index + 1 >= count}
+        title="Alt + ↓"
+        onClick={() => move(index, index + 1)}
+      >
         Move down
       </button>
-      <button type="button" onClick={() => remove(index)}>
+      <button type="button" className={buttons.quiet} onClick={() => remove(index)}>
         Delete
       </button>
     </div>

@@ -1,5 +1,6 @@
 /** What still stands in the way, each with the way to its field. */
 import { fieldLabel } from '../words/fields.ts';
+import buttons from './button.module.css';
 import { focusField } from './focus.ts';
 import type { SelectedMeter } from './meter.ts';
 import styles from './ProblemList.module.css';
@@ -31,7 +32,7 @@ export function ProblemList({ selected }: { readonly selected: SelectedMeter }) 
 
 /** Leads to the field. */
 export const Way = ({ field }: { readonly field: string }) => (
-  <button type="button" className={styles.way} onClick={() => focusField(field)}>
+  <button type="button" className={buttons.word} onClick={() => focusField(field)}>
     {fieldLabel(field)}
   </button>
 );

@@ -3,6 +3,7 @@ import { useState } from 'react';
 import { compositionSum } from '../../present/composition.ts';
 import { pasteWords, compositionWords as words } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
+import buttons from '../button.module.css';
 import { Fold } from '../station/Fold.tsx';
 import { valueAt } from '../text.ts';
 import { CompositionPaste } from './CompositionPaste.tsx';
@@ -29,7 +30,7 @@ export function Composition() {
           <Sum of={sum} />
           <Problems below={PATH} />
           <PresetGas />
-          <button type="button" className={styles.order} onClick={() => setPasted('')}>
+          <button type="button" className={`${buttons.framed} ${styles.order}`} onClick={() => setPasted('')}>
             {pasteWords.open}
           </button>
         </>

@@ -3,6 +3,7 @@ import { useState } from 'react';
 import { componentLabel } from '../../words/components.ts';
 import { compositionWords as words } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
+import buttons from '../button.module.css';
 import { Cell } from './Cell.tsx';
 import { ComponentSelect } from './ComponentSelect.tsx';
 import {
@@ -102,7 +103,12 @@ function Row({ shares, entry: { name, text }, unit, taken, once, paste }: RowPro
         />
       </td>
       <td className={styles.narrow}>
-        <button type="button" aria-label={words.remove(label)} onClick={() => once(without(shares, name))}>
+        <button
+          type="button"
+          className={buttons.remove}
+          aria-label={words.remove(label)}
+          onClick={() => once(without(shares, name))}
+        >
           ×
         </button>
       </td>

@@ -1,6 +1,7 @@
 /** The figure that stands in place of the model's, with its unit, and the way back to the model. */
 import { overrideWords as words } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
+import buttons from '../button.module.css';
 import { MeterTextField } from '../field/MeterTextField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
 import { useMeterText } from '../meter.ts';
@@ -29,7 +30,7 @@ export function OverrideField({ name, label, cleared }: Props) {
       ) : (
         <QuantityField path={path} label={words.field(label)} />
       )}
-      <button type="button" aria-label={words.clearOf(label)} onClick={clear}>
+      <button type="button" className={buttons.word} aria-label={words.clearOf(label)} onClick={clear}>
         {words.clear}
       </button>
     </div>

@@ -1,6 +1,7 @@
 /** The frame of a paste: the text as it came, what is read of it, and whether to take it. */
 import { type ReactNode, useEffect, useId, useRef } from 'react';
 import { pasteWords as words } from '../../words/fluid-forms.ts';
+import buttons from '../button.module.css';
 import styles from './paste.module.css';
 
 interface Props {
@@ -43,10 +44,10 @@ export function PastePanel({ hint, text, change, unread, count, take, close, chi
       </div>
       {count > 0 && <p className={styles.hint}>{words.replaces}</p>}
       <div className={styles.orders}>
-        <button type="button" className={styles.take} disabled={count === 0} onClick={take}>
+        <button type="button" className={`${buttons.framed} ${styles.take}`} disabled={count === 0} onClick={take}>
           {words.take(count)}
         </button>
-        <button type="button" onClick={close}>
+        <button type="button" className={buttons.framed} onClick={close}>
           {words.leave}
         </button>
       </div>

@@ -4,6 +4,7 @@ import type { Display } from '../../../core/document/project.ts';
 import { type Unit, unitOf } from '../../../core/quantity/units.ts';
 import { pasteWords } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
+import buttons from '../button.module.css';
 import { textAt, valueAt } from '../text.ts';
 import styles from './inputs.module.css';
 import { Problems } from './Problems.tsx';
@@ -42,7 +43,7 @@ export function RowsEditor({ path, columns }: Props) {
     <>
       <RowsTable {...{ path, columns, units, chooseUnit }} paste={setPasted} />
       <Problems below={path} />
-      <button type="button" className={styles.order} onClick={() => setPasted('')}>
+      <button type="button" className={`${buttons.framed} ${styles.order}`} onClick={() => setPasted('')}>
         {pasteWords.open}
       </button>
     </>

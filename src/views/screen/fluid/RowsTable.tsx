@@ -2,6 +2,7 @@
 import type { Unit } from '../../../core/quantity/units.ts';
 import { tableWords as words } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
+import buttons from '../button.module.css';
 import { textAt, valueAt } from '../text.ts';
 import { Cell } from './Cell.tsx';
 import { ColumnUnit } from './ColumnUnit.tsx';
@@ -73,7 +74,12 @@ function Row({ path, columns, units, at, last, paste }: RowProps) {
       })}
       <td className={styles.narrow}>
         {!last && (
-          <button type="button" aria-label={words.remove(at)} onClick={() => writeAll([[`${path}.${at}`, undefined]])}>
+          <button
+            type="button"
+            className={buttons.remove}
+            aria-label={words.remove(at)}
+            onClick={() => writeAll([[`${path}.${at}`, undefined]])}
+          >
             ×
           </button>
         )}

@@ -1,6 +1,6 @@
 /** Copies a table and says whether it worked. */
 import { useState } from 'react';
-import styles from './CopyTable.module.css';
+import buttons from '../button.module.css';
 import { type Cell, copyCells } from './clipboard.ts';
 
 const WORDS = { ready: 'Copy table', done: 'Copied', refused: 'The browser refused to copy' } as const;
@@ -14,7 +14,7 @@ export function CopyTable({ cells }: { readonly cells: readonly (readonly Cell[]
     );
   };
   return (
-    <button type="button" className={styles.copy} onClick={copy} onBlur={() => setState('ready')}>
+    <button type="button" className={buttons.quiet} onClick={copy} onBlur={() => setState('ready')}>
       <span aria-live="polite">{WORDS[state]}</span>
     </button>
   );

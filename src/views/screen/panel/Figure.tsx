@@ -2,6 +2,7 @@
 import { type ReactNode, useEffect, useRef, useState } from 'react';
 import type { Row } from '../../present/model.ts';
 import { overrideWords as words } from '../../words/fluid-forms.ts';
+import buttons from '../button.module.css';
 import { Clause } from '../Clause.tsx';
 import { OverrideField } from '../fluid/OverrideField.tsx';
 import { type Override, overridePath } from '../fluid/overrides.ts';
@@ -55,7 +56,12 @@ export function OverridableFigure({ row, name }: { readonly row: Row; readonly n
       <Figure
         row={row}
         aside={
-          <button type="button" aria-label={words.orderOf(row.label)} onClick={() => want(true)}>
+          <button
+            type="button"
+            className={buttons.word}
+            aria-label={words.orderOf(row.label)}
+            onClick={() => want(true)}
+          >
             {words.order}
           </button>
         }

@@ -1,5 +1,6 @@
 /** A modal dialog of the browser: it holds the focus, closes by Escape and gives the focus back. */
 import { type ReactNode, useEffect, useRef } from 'react';
+import buttons from '../button.module.css';
 import styles from './Dialog.module.css';
 
 interface Props {
@@ -20,7 +21,7 @@ export function Dialog({ title, close, children }: Props) {
     <dialog ref={ref} className={styles.dialog} aria-labelledby="dialog-title" onClose={close}>
       <header>
         <h2 id="dialog-title">{title}</h2>
-        <button type="button" onClick={() => ref.current?.close()}>
+        <button type="button" className={buttons.framed} onClick={() => ref.current?.close()}>
           Close
         </button>
       </header>

@@ -1,6 +1,7 @@
 /** Where the work stands, in words. */
 import type { Keeping } from '../../../state/workbench.ts';
 import { useCommands, useWorkbench } from '../binding.tsx';
+import buttons from '../button.module.css';
 import styles from './KeepingStatus.module.css';
 import { causeWords } from './standing.ts';
 
@@ -35,10 +36,10 @@ export function KeepingStatus() {
       </span>
       {keeping.state === 'elsewhere' && (
         <>
-          <button type="button" onClick={() => void commands.takeOver()}>
+          <button type="button" className={buttons.framed} onClick={() => void commands.takeOver()}>
             Work here
           </button>
-          <button type="button" onClick={() => void commands.workOnCopy()}>
+          <button type="button" className={buttons.framed} onClick={() => void commands.workOnCopy()}>
             Work on a copy
           </button>
         </>

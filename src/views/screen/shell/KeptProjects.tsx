@@ -1,6 +1,7 @@
 /** The projects kept in this browser. A damaged one is never thrown away unasked. */
 import type { KeptProject } from '../../../state/workbench.ts';
 import { useCommands, useWorkbench } from '../binding.tsx';
+import buttons from '../button.module.css';
 import { useDialogs } from './dialogs.tsx';
 import styles from './KeptProjects.module.css';
 
@@ -37,23 +38,24 @@ function Kept({ project: { id, title, savedAt, condition, current } }: { readonl
       </span>
       <span className={styles.orders}>
         {condition === 'sound' && !current && (
-          <button type="button" onClick={() => open((one) => commands.openKept(one))}>
+          <button type="button" className={buttons.framed} onClick={() => open((one) => commands.openKept(one))}>
             Open
           </button>
         )}
         {condition === 'damaged' && (
-          <button type="button" onClick={() => open((one) => commands.openEarlier(one))}>
+          <button type="button" className={buttons.framed} onClick={() => open((one) => commands.openEarlier(one))}>
             Open earlier version
           </button>
         )}
         {condition !== 'sound' && (
-          <button type="button" onClick={() => void commands.downloadRaw(id)}>
+          <button type="button" className={buttons.framed} onClick={() => void commands.downloadRaw(id)}>
             Save its text
           </button>
         )}
         {!current && (
           <button
             type="button"
+            className={buttons.framed}
             aria-label={`Remove ${title || 'Untitled'}`}
             onClick={() => void commands.removeKept(id)}
           >

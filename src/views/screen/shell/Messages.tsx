@@ -1,6 +1,7 @@
 /** What the program has to say once: a deletion that can be taken back, a notice, a new version. */
 import type { ReactNode } from 'react';
 import { useCommands, useWorkbench } from '../binding.tsx';
+import buttons from '../button.module.css';
 import styles from './Messages.module.css';
 import { noticeWords } from './standing.ts';
 
@@ -25,7 +26,7 @@ function Deleted() {
   };
   return (
     <Line words={`${deleted.tag || 'The meter'} is deleted.`} dismiss={dismiss}>
-      <button type="button" onClick={takeBack}>
+      <button type="button" className={buttons.framed} onClick={takeBack}>
         Take it back
       </button>
     </Line>
@@ -45,7 +46,7 @@ function Update() {
   if (!ready) return null;
   return (
     <Line words="A new version of Headwright is ready. The work is kept first." dismiss={() => setUpdate(false)}>
-      <button type="button" onClick={() => void commands.applyUpdate()}>
+      <button type="button" className={buttons.framed} onClick={() => void commands.applyUpdate()}>
         Start it
       </button>
     </Line>
@@ -64,7 +65,7 @@ function Line({ words, trouble = false, dismiss, children }: LineProps) {
     <p className={styles.line} data-trouble={trouble}>
       <span>{words}</span>
       {children}
-      <button type="button" onClick={dismiss}>
+      <button type="button" className={buttons.framed} onClick={dismiss}>
         Dismiss
       </button>
     </p>

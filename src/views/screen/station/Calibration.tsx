@@ -1,5 +1,6 @@
 /** The element's own coefficients: rows of Reynolds number and C. One row is a constant. */
 import { useWorkbench } from '../binding.tsx';
+import buttons from '../button.module.css';
 import { useProblem } from '../meter.ts';
 import { textAt, valueAt } from '../text.ts';
 import styles from './Calibration.module.css';
@@ -59,7 +60,12 @@ function CalibrationRow({ at, last }: { readonly at: number; readonly last: bool
       ))}
       <td>
         {!last && (
-          <button type="button" aria-label={`Remove row ${at + 1}`} onClick={() => write(path, undefined)}>
+          <button
+            type="button"
+            className={buttons.remove}
+            aria-label={`Remove row ${at + 1}`}
+            onClick={() => write(path, undefined)}
+          >
             ×
           </button>
         )}
