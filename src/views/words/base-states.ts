@@ -1,4 +1,7 @@
-/** Base states in use: where gas volumes are counted. Each with the texts that are written into the project. */
+/**
+ * Base states in use: where gas volumes are counted. Each with the texts that are written into the project; its two
+ * figures stand below the list where it is chosen.
+ */
 import { SITE_DEFAULTS } from '../../core/document/defaults.ts';
 import type { Choice } from './elements.ts';
 
@@ -8,12 +11,12 @@ export interface BaseState {
 }
 
 const states: readonly (Choice & BaseState)[] = [
-  { value: 'iso-13443', label: '15 °C, 101.325 kPa (ISO 13443)', temperature: '15 degC', pressure: '101.325 kPa(a)' },
-  { value: 'din-1343', label: '0 °C, 101.325 kPa (DIN 1343)', temperature: '0 degC', pressure: '101.325 kPa(a)' },
+  { value: 'iso-13443', label: '15 °C, ISO 13443', temperature: '15 degC', pressure: '101.325 kPa(a)' },
+  { value: 'din-1343', label: '0 °C, DIN 1343', temperature: '0 degC', pressure: '101.325 kPa(a)' },
   { value: '60F-14.696', label: '60 °F, 14.696 psi', temperature: '60 degF', pressure: '14.696 psi(a)' },
   { value: '60F-14.73', label: '60 °F, 14.73 psi', temperature: '60 degF', pressure: '14.73 psi(a)' },
-  { value: '20C', label: '20 °C, 101.325 kPa', temperature: '20 degC', pressure: '101.325 kPa(a)' },
-  { value: '25C', label: '25 °C, 101.325 kPa', temperature: '25 degC', pressure: '101.325 kPa(a)' },
+  { value: '20C', label: '20 °C, 1 atm', temperature: '20 degC', pressure: '101.325 kPa(a)' },
+  { value: '25C', label: '25 °C, 1 atm', temperature: '25 degC', pressure: '101.325 kPa(a)' },
 ];
 
 export const baseStateChoices: readonly Choice[] = states;

@@ -102,7 +102,8 @@ describe('the table of a liquid', () => {
   it('writes the unit of the column and shows the number alone', () => {
     const T = column(temperature);
     expect(fileCell('20,5', T, unit('degC', T))).toBe('20.5 degC');
-    expect(fileCell('68 F', T, unit('degC', T))).toBe('68 F'); // F is farad to no one here: it stays, with its problem
+    expect(fileCell('68 F', T, unit('degC', T))).toBe('68 degF');
+    expect(fileCell('68 ells', T, unit('degC', T))).toBe('68 ells'); // what cannot be read stays, with its problem
     expect(shownCell('20.5 degC', T, unit('degC', T))).toBe('20.5');
     expect(shownCell('68 degF', T, unit('degC', T))).toBe('68 degF');
   });
