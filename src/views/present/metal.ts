@@ -2,7 +2,7 @@
 import type { Solved } from '../../core/result/record.ts';
 import { openingWord } from '../words/elements.ts';
 import { materialLabel } from '../words/materials.ts';
-import { measuredAt, metalLabels, noGrowth, withMaterial } from '../words/rows.ts';
+import { measuredAt, metalLabels, noGrowth, withMaterial, withSize } from '../words/rows.ts';
 import { figuresOf } from './answer.ts';
 import { cited } from './cited.ts';
 import { type Context, maximumOf } from './context.ts';
@@ -14,7 +14,7 @@ export function pipeRows(at: Context, result: Solved): readonly Row[] {
   const { pipe, installation } = at.meter;
   const bore = at.given(pipe?.bore, ['length'], result.pipeAsMeasured_m, 'bore');
   return [
-    measured(at, 'pipe-as-measured', metalLabels.pipe, bore, pipe),
+    measured(at, 'pipe-as-measured', withSize(metalLabels.pipe, pipe?.size), bore, pipe),
     atLine(at, result, 'pipe-bore', 'D', metalLabels.pipeAtLine, result.pipe_m),
     ...optional('pipe-roughness', metalLabels.roughness, 'Ra', at.stated(pipe?.roughness, ['length'], 'roughness')),
     ...optional('before', metalLabels.before, undefined, straight(at, installation?.before)),

@@ -44,3 +44,9 @@ export const workingGroupTitles: Readonly<Record<'meter' | DutyName, string>> = 
 
 /** What the file keeps and this version does not evaluate. */
 export const unreadNote = (keys: string): string => `Kept in the file, not evaluated by this version: ${keys}.`;
+
+/** 'Pipe bore, DN 100 schedule 40'; a size that is not of the table stands as it is written. */
+export function withSize(label: string, size: string | undefined): string {
+  if (size === undefined || size.trim() === '') return label;
+  return `${label}, ${size.replace(/^(DN \d+), /, '$1 schedule ')}`;
+}
