@@ -23,13 +23,8 @@ export function KeptProjects() {
   );
 }
 
-function Kept({ project: { id, title, savedAt, condition, current } }: { readonly project: KeptProject }) {
-  const commands = useCommands();
-  const { show } = useDialogs();
-  const open = (order: (id: string) => Promise<void>): void => {
-    show(undefined);
-    void order(id);
-  };
+function Kept({ project }: { readonly project: KeptProject }) {
+  const { title, savedAt, condition, current } = project;
   return (
     <li className={styles.kept}>
       <span>
@@ -37,32 +32,52 @@ function Kept({ project: { id, title, savedAt, condition, current } }: { readonl
         {condition !== 'sound' && <em>{CONDITIONS[condition]}</em>}
       </span>
       <span className={styles.orders}>
-        {condition === 'sound' && !current && (
-          <button type="button" className={buttons.framed} onClick={() => open((one) => commands.openKept(one))}>
-            Open
-          </button>
-        )}
-        {condition === 'damaged' && (
-          <button type="button" className={buttons.framed} onClick={() => open((one) => commands.openEarlier(one))}>
-            Open earlier version
-          </button>
-        )}
-        {condition !== 'sound' && (
-          <button type="button" className={buttons.framed} onClick={() => void commands.downloadRaw(id)}>
-            Save its text
-          </button>
-        )}
-        {!current && (
-          <button
-            type="button"
-            className={buttons.framed}
-            aria-label={`Remove ${title || 'Untitled'}`}
-            onClick={() => void commands.removeKept(id)}
-          >
-            Remove
-          </button>
-        )}
+        <Opening project={project} />
+        {!current && <Remove project={project} />}
       </span>
     </li>
+  );
+}
+
+/** What can be opened of it, and its text where that is not all. */
+function Opening({ project: { id, condition, current } }: { readonly project: KeptProject }) {
+  const commands = useCommands();
+  const { show } = useDialogs();
+  const open = (order: (id: string) => Promise<void>): void => {
+    show(undefined);
+    void order(id);
+  };
+  return (
+    <>
+      {condition === 'sound' && !current && (
+        <button type="button" className={buttons.framed} onClick={() => open((one) => commands.openKept(one))}>
+          Open
+        </button>
+      )}
+      {condition === 'damaged' && (
+        <button type="button" className={buttons.framed} onClick={() => open((one) => commands.openEarlier(one))}>
+          Open earlier version
+        </button>
+      )}
+      {condition !== 'sound' && (
+        <button type="button" className={buttons.framed} onClick={() => void commands.downloadRaw(id)}>
+          Save its text
+        </button>
+      )}
+    </>
+  );
+}
+
+function Remove({ project: { id, title } }: { readonly project: KeptProject }) {
+  const commands = useCommands();
+  return (
+    <button
+      type="button"
+      className={buttons.framed}
+      aria-label={`Remove ${title || 'Untitled'}`}
+      onClick={() => void commands.removeKept(id)}
+    >
+      Remove
+    </button>
   );
 }
