@@ -81,7 +81,7 @@ const offline = () =>
 export default defineConfig({
   appType: 'spa',
   plugins: [react(), contentSecurityPolicy(), offline(), everythingKeptOffline()],
-  build: { target: 'es2023', assetsInlineLimit: 0, modulePreload: { polyfill: false } },
+  build: { target: 'es2023', assetsInlineLimit: 0, chunkSizeWarningLimit: 700, modulePreload: { polyfill: false } },
   server: { host: '127.0.0.1' },
   preview: { host: '127.0.0.1', port: 4173 },
   test: {

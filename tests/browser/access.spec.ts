@@ -92,7 +92,7 @@ for (const [name, reach] of Object.entries(states)) {
 }
 
 test('the two themes are not one', async ({ page }) => {
-  const paper = (): Promise<string> => page.evaluate(() => getComputedStyle(document.body).backgroundColor);
+  const paper = (): Promise<string> => page.evaluate(() => getComputedStyle(document.documentElement).backgroundColor);
   await page.emulateMedia({ colorScheme: 'light' });
   await openExample(page);
   const light = await paper();

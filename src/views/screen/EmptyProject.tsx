@@ -1,10 +1,15 @@
 /** A project without meters: the two ways to begin. */
 import { useCommands, useWorkbench } from './binding.tsx';
 import styles from './EmptyProject.module.css';
+import { focusFieldSoon } from './focus.ts';
 
 export function EmptyProject() {
   const addMeter = useWorkbench((state) => state.addMeter);
   const commands = useCommands();
+  const begin = () => {
+    addMeter();
+    focusFieldSoon('pipe.size');
+  };
   return (
     <div className={styles.empty}>
       <h1>Which bore, which differential, which flow?</h1>
@@ -13,7 +18,7 @@ export function EmptyProject() {
         its working.
       </p>
       <div className={styles.ways}>
-        <button type="button" className={styles.first} onClick={() => addMeter()}>
+        <button type="button" className={styles.first} onClick={begin}>
           Size a meter
         </button>
         <button type="button" onClick={() => void commands.openExample()}>

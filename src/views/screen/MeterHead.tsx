@@ -1,6 +1,7 @@
 /** The name of the meter, and what can be done with it as a whole. */
 import { useWorkbench } from './binding.tsx';
 import buttons from './button.module.css';
+import { focusSoon } from './focus.ts';
 import styles from './MeterHead.module.css';
 import { textAt } from './text.ts';
 
@@ -40,6 +41,10 @@ function MeterActions({ index }: { readonly index: number }) {
   const duplicate = useWorkbench((state) => state.duplicateMeter);
   const move = useWorkbench((state) => state.moveMeter);
   const remove = useWorkbench((state) => state.deleteMeter);
+  const discard = () => {
+    remove(index);
+    focusSoon('#content'); // the button goes with its meter
+  };
   return (
     <div className={styles.actions}>
       <button type="button" className={buttons.quiet} onClick={() => duplicate(index)}>
@@ -63,7 +68,7 @@ function MeterActions({ index }: { readonly index: number }) {
       >
         Move down
       </button>
-      <button type="button" className={buttons.quiet} onClick={() => remove(index)}>
+      <button type="button" className={buttons.quiet} onClick={discard}>
         Delete
       </button>
     </div>

@@ -15,7 +15,7 @@ export function drawingLabels(sizing: PresentedSizing): PipeLabels {
   const ratio = metal.find(({ id }) => id === 'diameter-ratio')?.value.text ?? '';
   return {
     title: `${sizing.element} in its pipe, with the head lines above it`,
-    description: `${plainAnswer(sizing)} The head falls by ${heads.tappingDrop.text} between the tappings; ${heads.loss.text} is lost for good.`,
+    description: `${plainAnswer(sizing)} The head falls by ${heads.tappingDrop.text} between the tappings; ${heads.loss.text} is lost permanently.`,
     totalHead: 'total head',
     pressureHead: 'pressure head',
     tappings: 'across the tappings',

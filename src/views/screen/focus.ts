@@ -26,6 +26,16 @@ export function focusField(path: string): boolean {
   return true;
 }
 
+/** The field of a path once the page has followed a change, so that the keys go on where the change led. */
+export function focusFieldSoon(path: string): void {
+  requestAnimationFrame(() => focusField(path));
+}
+
+/** The same for anything else on the page. */
+export function focusSoon(selector: string): void {
+  requestAnimationFrame(() => document.querySelector<HTMLElement>(selector)?.focus());
+}
+
 /** The field after the one at hand, in the order of the data; folded ones are passed over. */
 export function focusNext(from: HTMLElement): void {
   const shown = all().filter((field) => field.checkVisibility());

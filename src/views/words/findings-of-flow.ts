@@ -29,7 +29,7 @@ export const checksOfFlow: Readonly<Record<string, FindingWords>> = {
     text: (figure) => `Pipe Reynolds number ${figure}{where}, against the calibration`,
   },
   'pressure-ratio': { role: 'factor', text: (figure) => `Pressure ratio p₂/p₁ ${figure}{where}` },
-  flashing: { role: 'pressure', text: (figure) => `Pressure behind the element ${figure}{where}`, ...vapour },
+  flashing: { role: 'pressure', text: (figure) => `Pressure downstream of the element ${figure}{where}`, ...vapour },
   cavitation: { role: 'pressure', text: (figure) => `Pressure in the jet ${figure}{where}`, ...vapour },
   'cavitation-margin': {
     role: 'number',

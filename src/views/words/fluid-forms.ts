@@ -27,7 +27,7 @@ export const pasteWords = {
   preview: 'What is read',
   standsFor: (written: string): string => `${written} stands for`,
   take: (count: number): string => `Take ${lines(count)}`,
-  leave: 'Leave it',
+  leave: 'Cancel',
   leaveOut: 'leave out',
   shareUnit: 'Shares without a unit are',
   unknown: (count: number): string =>

@@ -69,7 +69,7 @@ export const dutyWorking = {
 } as const;
 
 export const flowAt = (name: DutyName): string => `${name} flow`;
-export const whole = 'Whole';
+export const whole = 'Combined';
 export const fluidRow = 'Fluid';
 export const absolutePressure = 'the same, absolute';
 export const atAtmosphere = (pressure: string): string => `over ${pressure}`;

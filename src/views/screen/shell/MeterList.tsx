@@ -3,6 +3,7 @@ import { memo } from 'react';
 import type { MeterText } from '../../../core/document/project.ts';
 import type { MeterResult } from '../../../core/result/record.ts';
 import { useWorkbench, useWorkbenchStore } from '../binding.tsx';
+import { focusFieldSoon } from '../focus.ts';
 import { presented } from '../presented.ts';
 import { textAt } from '../text.ts';
 import { VerdictMark } from '../VerdictMark.tsx';
@@ -14,6 +15,10 @@ export function MeterList() {
   const keys = useWorkbench((state) => state.keys);
   const selected = useWorkbench((state) => state.selected);
   const addMeter = useWorkbench((state) => state.addMeter);
+  const add = () => {
+    addMeter();
+    focusFieldSoon('pipe.size');
+  };
   return (
     <nav className={styles.side} aria-label="Meters">
       <h2 className={styles.title}>Meters</h2>
@@ -28,7 +33,7 @@ export function MeterList() {
           );
         })}
       </ul>
-      <button type="button" className={styles.add} onClick={() => addMeter()}>
+      <button type="button" className={styles.add} onClick={add}>
         Add a meter
       </button>
     </nav>

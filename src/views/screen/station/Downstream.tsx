@@ -1,4 +1,4 @@
-/** Station 4: what is lost for good, the straight pipe around the element, and how sure the inputs are. */
+/** Station 4: the permanent loss, the straight pipe around the element, and how sure the inputs are. */
 
 import type { PresentedSizing } from '../../present/model.ts';
 import { fittingChoices } from '../../words/fittings.ts';
@@ -34,7 +34,7 @@ export function Downstream() {
         label="Straight after"
         note={sizing && <StraightNeed sizing={sizing} side="downstream" />}
       />
-      <Fold title="How sure, how steady">
+      <Fold title="Uncertainty and steadiness">
         <QuantityField path="uncertainty.bore" label="Bore, ±" />
         <QuantityField path="uncertainty.pipe" label="Pipe bore, ±" />
         <QuantityField path="uncertainty.differential" label="Differential, ±" />
