@@ -310,7 +310,7 @@ describe('vectors', () => {
       const used = subjects.some((file) => key.test(file.text));
       return [
         ...(typeof from === 'string' && from !== '' ? [] : [`${path}: no source`]),
-        ...(['published', 'independent', 'unseen', 'transcription'].includes(String(origin))
+        ...(['published', 'independent', 'unseen', 'copied'].includes(String(origin))
           ? []
           : [`${path}: origin ${String(origin)}`]),
         ...(about && tolerance ? [] : [`${path}: no column meanings or no tolerances`]),

@@ -21,7 +21,7 @@ describe.each(files)('$path', ({ path, file }) => {
 
   test('names its source, its columns and the reason of each tolerance', () => {
     expect(file.source).toMatch(/\S/);
-    expect(['published', 'independent', 'unseen', 'transcription']).toContain(file.origin);
+    expect(['published', 'independent', 'unseen', 'copied']).toContain(file.origin);
     for (const { why, rel, abs, digits } of Object.values(file.tolerance)) {
       expect(why).toMatch(/\S/);
       expect(rel ?? abs ?? digits, why).toBeGreaterThanOrEqual(0);

@@ -22,7 +22,7 @@ interface Tolerance {
 }
 export interface VectorFile {
   readonly source: string;
-  readonly origin: 'published' | 'independent' | 'unseen' | 'transcription';
+  readonly origin: 'published' | 'independent' | 'unseen' | 'copied';
   readonly seen?: string;
   readonly subject: string;
   readonly about: Readonly<Record<string, unknown>>;

@@ -111,7 +111,7 @@ function group(folder: string, entries: readonly Entry[]): string {
 
 export function accuracyTable(): string {
   // A table of our own against the copy it was typed from proves the typing, not the accuracy.
-  const entries = vectorFiles().filter(({ file }) => file.origin !== 'transcription');
+  const entries = vectorFiles().filter(({ file }) => file.origin !== 'copied');
   const unknown = entries.map(folderOf).filter((folder) => GROUPS[folder] === undefined);
   if (unknown.length > 0) throw new Error(`expected a group of the table for ${unknown[0]}, got none`);
   const tables = Object.keys(GROUPS).map((folder) =>
