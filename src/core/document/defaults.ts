@@ -7,3 +7,6 @@ export const SITE_DEFAULTS = {
   basePressure: '101.325 kPa(a)',
   baseTemperature: '15 degC',
 } as const;
+
+/** Temperature, in K, at which a bore was measured that names none: 20 degC. */
+export const MEASURED_AT = 293.15;

@@ -2,6 +2,7 @@
  * One meter of the document -> parsed quantities, or every problem found. What is to be found is not read.
  * The element's own fields are declared by the element and handed in by run.ts.
  */
+import { MEASURED_AT } from '../document/defaults.ts';
 import type { DutyName, FluidText, MeterText, Unknown } from '../document/project.ts';
 import { as } from '../quantity/brand.ts';
 import type {
@@ -53,7 +54,6 @@ export interface MeterInput {
   readonly installation: Installation;
 }
 
-const MEASURED_AT = as<'temperature'>(293.15); // K, 20 degC, the file contract's default
 const UNKNOWNS: readonly Unknown[] = ['bore', 'differential', 'flow'];
 
 /** Reads a meter whose shape is checked; `materials` are the keys thermal growth is known for. */
@@ -103,7 +103,7 @@ function readMetal(form: Form, group: 'pipe' | 'element', materials: readonly st
   return {
     ...given('bore', bore?.si),
     ...given('material', material),
-    measuredAt: measuredAt?.si ?? MEASURED_AT,
+    measuredAt: measuredAt?.si ?? as<'temperature'>(MEASURED_AT),
   };
 }
 

@@ -2,13 +2,14 @@
  * How good the plane and the readings were: scatter, symmetry, weak and reversed readings, drift, and what a mean of
  * differentials instead of velocities would have made of them.
  */
+import { standardGravity } from '../quantity/constants.ts';
 import type { PressureDifference, Velocity } from '../quantity/kinds.ts';
 import type { Measured, Survey } from './survey.ts';
 
 /** A reading counts as strong above this share of the largest (air balancing practice). */
 export const STRONG = 0.1;
 /** K of the sensitivity test of a gauge, 0.127 mmH2O. */
-const SENSITIVITY = 0.127 * 9.80665; // Pa; 40 CFR 60 App. A, Method 2, 6.2
+const SENSITIVITY = 0.127 * standardGravity; // Pa; 40 CFR 60 App. A, Method 2, 6.2
 
 export interface Quality {
   readonly largest: PressureDifference;

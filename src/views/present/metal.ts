@@ -1,4 +1,5 @@
 /** Pipe and element: as measured, at the line temperature, and what stands around them. */
+import { MEASURED_AT } from '../../core/document/defaults.ts';
 import type { Solved } from '../../core/result/record.ts';
 import { openingWord } from '../words/elements.ts';
 import { materialLabel } from '../words/materials.ts';
@@ -7,8 +8,6 @@ import { figuresOf } from './answer.ts';
 import { cited } from './cited.ts';
 import { type Context, maximumOf } from './context.ts';
 import type { Row, Value } from './model.ts';
-
-const usualTemperature = 293.15; // K; 20 degC, the default of the file format
 
 export function pipeRows(at: Context, result: Solved): readonly Row[] {
   const { pipe, installation } = at.meter;
@@ -49,7 +48,7 @@ interface Metal {
 function measured(at: Context, id: string, label: string, value: Value, metal: Metal | undefined): Row {
   const { material, measuredAt: written } = metal ?? {};
   const temperature =
-    at.stated(written, ['temperature'], 'temperature')?.text ?? at.print.limit(usualTemperature, 'temperature');
+    at.stated(written, ['temperature'], 'temperature')?.text ?? at.print.limit(MEASURED_AT, 'temperature');
   return {
     id,
     label: withMaterial(label, material === undefined ? undefined : materialLabel(material)),
