@@ -7,7 +7,9 @@ export const aboveReynolds = 'above the Reynolds numbers of the standard';
 /** One sentence for those who do not see the curve. */
 export function chartSummary(duty: readonly string[], outside: readonly string[]): string {
   const marked =
-    outside.length === 0 ? ' From 0.2 % of the span on, the curve is inside the Reynolds numbers of the standard.' : '';
+    outside.length === 0
+      ? ' From 0.2\u00a0% of the span on, the curve is inside the Reynolds numbers of the standard.'
+      : '';
   const parts = outside.map((range) => ` ${range}.`).join('');
   return `Flow against differential pressure: ${duty.join(', ')}.${marked}${parts}`;
 }
