@@ -9,13 +9,13 @@ import { stateOf } from './fluid/state.ts';
 import { readMeter } from './input/meter.ts';
 import { meterShape } from './input/shape.ts';
 import { readSite } from './input/site.ts';
-import { readUpstream } from './input/upstream.ts';
+import { readUpstream, type Upstream } from './input/upstream.ts';
 import { gather, type Outcome, ok } from './quantity/outcome.ts';
 import { assemble } from './result/assemble.ts';
 import type { MeterResult, Results, Solved } from './result/record.ts';
 import { refused, tagOf } from './result/refuse.ts';
+import { settle } from './run/settle.ts';
 import { solveTraverse } from './run/traverse.ts';
-import { solve } from './solve/solve.ts';
 import { dutyUncertainty } from './uncertainty/duty.ts';
 
 type Surroundings = Pick<Project, 'site' | 'base'>;
@@ -42,11 +42,13 @@ function size(meter: MeterText, project: Surroundings): Outcome<Solved> {
   const input = readMeter(shape.value, element.ok ? element.value.fields : [], materialKeys); // 4 texts to quantities
   const upstream = readUpstream(shape.value, site.value);
   const { base, atmosphere } = site.value;
-  const state = upstream.ok ? stateOf(shape.value.fluid ?? {}, upstream.value, base, atmosphere) : upstream; // 5 the fluid
-  if (!element.ok || !input.ok || !state.ok) return gather(element, input, state);
+  const stateAt = (at: Upstream) => stateOf(shape.value.fluid ?? {}, at, base, atmosphere);
+  const state = upstream.ok ? stateAt(upstream.value) : upstream; // 5 the fluid
+  if (!element.ok || !input.ok || !upstream.ok || !state.ok) return gather(element, input, state);
   const { element: metal, uncertainty } = input.value;
   const primary = settled(element.value, metal.own, metal.calibration); // 6 the element with its fields settled
-  const solution = solve(input.value, primary, state.value); // 7 the unknown, then every duty point
+  const task = { input: input.value, primary, upstream: upstream.value, state: state.value, stateAt };
+  const solution = settle(task); // 7 the unknown, then every duty point
   if (!solution.ok) return solution;
   const straight = straightness(input.value, solution.value); // 8 straight pipe, which the uncertainty of C needs
   if (!straight.ok) return straight;

@@ -6,6 +6,7 @@ import { machOf } from '../traverse/velocity.ts';
 import { within } from './case.ts';
 import { ASSUMPTIONS } from './check.ts';
 import type { Finding } from './finding.ts';
+import { findingOf } from './fluid.ts';
 import type { TraverseCase } from './traverse-case.ts';
 import { checkPlane } from './traverse-plane.ts';
 import { checkProbe } from './traverse-probe.ts';
@@ -28,7 +29,7 @@ export function checkTraverse(subject: TraverseCase): readonly Finding[] {
   const findings: Finding[] = [
     ...checkPlane(subject),
     ...checkProbe(subject),
-    ...(state.cautions ?? []).map((caution): Finding => ({ ...caution, assumption: 'one-phase' })),
+    ...(state.cautions ?? []).map(findingOf),
     ...checkReadings(subject),
     ...checkDrift(subject),
     ...checkMach(subject),

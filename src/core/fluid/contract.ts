@@ -17,6 +17,8 @@ export interface Caution {
   readonly unit: string;
   readonly limit: { readonly min?: number; readonly max?: number };
   readonly source: Source;
+  /** True where it says that another phase may be there; else it is about the range of the formulation. */
+  readonly ofPhase?: boolean;
   /** What the sentence needs beside value and limit. */
   readonly detail?: Readonly<Record<string, string | number>>;
 }

@@ -13,7 +13,7 @@ const Meter = v.looseObject({
   tag: text,
   service: text,
   fluid: v.optional(v.looseObject({ kind: text })),
-  upstream: v.optional(v.looseObject({ pressure: text, temperature: text })),
+  upstream: v.optional(v.looseObject({ pressure: text, temperature: text, temperatureAt: text })),
   pipe: v.optional(v.looseObject({ size: text, bore: text, material: text, measuredAt: text, roughness: text })),
   element: v.optional(
     v.looseObject({

@@ -7,17 +7,24 @@ import type { Site } from './site.ts';
 export interface Upstream {
   readonly pressure?: AbsolutePressure;
   readonly temperature?: Temperature;
+  /** True where the temperature was measured behind the element. */
+  readonly downstream?: boolean;
 }
 
-/** Reads the group `upstream` of a meter, or `state` of a traverse. Problems: those of quantity text; not-above-vacuum. */
+/** Where a temperature is measured, seen from the element; upstream unless it is said. */
+const PLACES = ['upstream', 'downstream'] as const;
+
+/** Reads the group `upstream` of a meter, or `state` of a traverse. Problems: those of quantity text; not-above-vacuum; choice-unknown. */
 export function readUpstream(written: object, site: Site, group: 'upstream' | 'state' = 'upstream'): Outcome<Upstream> {
   const form = openForm(written);
   const pressure = readPressure(form, site, `${group}.pressure`);
   const temperature = form.positive(`${group}.temperature`, ['temperature']);
+  const at = group === 'upstream' ? form.choice('upstream.temperatureAt', PLACES) : undefined;
   if (form.problems.length > 0) return failed(form);
   return ok({
     ...(pressure === undefined ? {} : { pressure }),
     ...(temperature === undefined ? {} : { temperature: temperature.si }),
+    ...(at === 'downstream' ? { downstream: true } : {}),
   });
 }
 

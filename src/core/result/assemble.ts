@@ -9,6 +9,7 @@ import type { MeterInput } from '../input/meter.ts';
 import type { Site } from '../input/site.ts';
 import type { Seen, Source } from '../quantity/source.ts';
 import type { Working } from '../quantity/working.ts';
+import { correctionWorking } from '../solve/downstream.ts';
 import { type Operation, velocityOf } from '../solve/equation.ts';
 import { metalWorking } from '../solve/metal.ts';
 import type { Solution } from '../solve/solve.ts';
@@ -47,7 +48,7 @@ export function assemble(parts: Parts): Solved {
     element: primary.name,
     standard: primary.standard,
     site: siteRecord(site),
-    state: stateRecord(state, relative),
+    state: { ...stateRecord(state, relative), ...downstreamRecord(solution) },
     bore_m: geometry.bore,
     pipe_m: geometry.pipe,
     diameterRatio: geometry.ratio,
@@ -66,7 +67,12 @@ export function assemble(parts: Parts): Solved {
     reynoldsLimits: () => reynoldsLimits(meter),
     heads: () => headsOf(meter, duty.maximum, site.gravity),
     dimensions: () => primary.dimensions(geometry),
-    working: () => [...state.working, ...relative, ...metalWorking(input, solution.boreAsMeasured, state.temperature)],
+    working: () => [
+      ...downstreamWorking(solution),
+      ...state.working,
+      ...relative,
+      ...metalWorking(input, solution.boreAsMeasured, state.temperature),
+    ],
     sources: () => sourcesOf(solved, parts.budgets),
   });
   return solved;
@@ -80,6 +86,16 @@ const siteRecord = ({ atmosphere, base }: Site): SiteRecord => ({
   basePressure_Pa: base.pressure,
   baseTemperature_K: base.temperature,
 });
+
+/** What was made of a temperature measured behind the element. */
+function downstreamRecord({ downstream }: Solution): Pick<StateRecord, 'downstream'> {
+  if (downstream === undefined) return {};
+  const { measured } = downstream;
+  return { downstream: { measured_K: measured, ...('loss' in downstream ? { loss_Pa: downstream.loss } : {}) } };
+}
+
+const downstreamWorking = ({ downstream, meter }: Solution): readonly Working[] =>
+  downstream !== undefined && 'loss' in downstream ? correctionWorking(downstream, meter.state.pressure) : [];
 
 /** The relative density as a working line, for a gas whose base volume counts the whole of it: none for air. */
 function relativeOf({ phase, baseDensity }: FluidState, { fluid }: MeterInput, { base }: Site): readonly Working[] {
@@ -99,6 +115,7 @@ export function stateRecord(state: FluidState, [relative]: readonly Working[]): 
     molarMass_kg_mol: state.molarMass,
     relativeDensity: relative?.value,
     quality: state.quality,
+    jouleThomson_K_Pa: state.jouleThomson,
     overridden: state.overridden,
     uncertainty_percent: percentsOf(state.uncertainties),
   };

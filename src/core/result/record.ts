@@ -32,6 +32,13 @@ export interface StateRecord {
   readonly uncertainty_percent?: Readonly<Record<string, number>>;
   readonly pressure_Pa: number; // absolute, upstream tapping
   readonly temperature_K: number;
+  /** Joule-Thomson coefficient, where the formulation gives it. */
+  readonly jouleThomson_K_Pa?: number;
+  /** Where the temperature was measured behind the element: that reading, and what leads from it to the one upstream. */
+  readonly downstream?: {
+    readonly measured_K: number;
+    readonly loss_Pa?: number; // absent where no correction could be made
+  };
 }
 
 /** The site and the base state that the figures were computed with, stated or usual. */

@@ -8,6 +8,7 @@ import type { Length, MassFlow, PressureDifference } from '../quantity/kinds.ts'
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import { boreFrom } from './bore.ts';
 import { differentialFrom } from './differential.ts';
+import type { Downstream } from './downstream.ts';
 import type { Meter, Operation } from './equation.ts';
 import { flowFrom } from './flow.ts';
 import { asMeasured, atLine, hotGeometry } from './metal.ts';
@@ -22,6 +23,8 @@ export interface Solution {
   readonly duty: Readonly<Duty>;
   /** The differential of the span: what was set, or that of the maximum flow. */
   readonly span: PressureDifference;
+  /** Where the temperature was measured behind the element: what was made of it. */
+  readonly downstream?: Downstream;
 }
 
 /** Solves the unknown of a meter and its other duty points. Problems: those of flow.ts, differential.ts, bore.ts, metal.ts. */

@@ -70,6 +70,7 @@ function solvedMeter(at: Context, result: Solved): PresentedSizing {
     },
     state: stateRows(at, result),
     overridable: kind !== 'stated', // those are stated as it is
+    throttles: result.state.jouleThomson_K_Pa !== undefined && result.state.phase !== 'liquid',
     pipe: pipeRows(at, result),
     metal: metalRows(at, result),
     duty,

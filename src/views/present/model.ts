@@ -200,6 +200,8 @@ export interface PresentedSizing extends PresentedMeter {
   readonly state: readonly Row[];
   /** Whether single figures of the state can be put in place of those found. */
   readonly overridable: boolean;
+  /** Whether a temperature measured downstream leads to the one upstream. */
+  readonly throttles: boolean;
   readonly pipe: readonly Row[];
   readonly metal: readonly Row[]; // the element: bore, ratio, plate
   readonly duty: readonly DutyRow[];

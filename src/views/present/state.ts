@@ -2,7 +2,7 @@
 import type { Solved } from '../../core/result/record.ts';
 import { overrideWords } from '../words/fluid-forms.ts';
 import type { Role } from '../words/print.ts';
-import { stateLabels } from '../words/rows.ts';
+import { asDownstream, fromDownstream, stateLabels } from '../words/rows.ts';
 import { cited } from './cited.ts';
 import type { Context } from './context.ts';
 import type { Row } from './model.ts';
@@ -31,6 +31,23 @@ function noteOn(id: string, { uncertainty_percent: known }: Solved['state'], at:
   return percent === undefined ? {} : { note: `±\u202f${at.value(percent, 'uncertainty').text}` };
 }
 
+/** As written, or as found from what was measured behind the element. */
+function temperatureRow(at: Context, { state, working }: Solved): Row {
+  const { downstream, temperature_K: upstream } = state;
+  const written = (si: number) => at.given(at.meter.upstream?.temperature, ['temperature'], si, 'temperature');
+  const row = { id: 'temperature', label: stateLabels.temperature, symbol: symbols.temperature } as const;
+  if (downstream === undefined) return { ...row, value: written(upstream) };
+  if (downstream.loss_Pa === undefined) return { ...row, value: written(upstream), note: asDownstream };
+  const source = working.find(({ id }) => id === 'temperature')?.source;
+  return {
+    ...row,
+    value: at.value(upstream, 'temperature'),
+    note: fromDownstream(written(downstream.measured_K).text),
+    working: 'temperature',
+    ...(source === undefined ? {} : { cited: cited(source) }),
+  };
+}
+
 export function stateRows(at: Context, result: Solved): readonly Row[] {
   const { state, working } = result;
   const { upstream } = at.meter;
@@ -48,7 +65,7 @@ export function stateRows(at: Context, result: Solved): readonly Row[] {
   };
   return [
     given('pressure', at.given(upstream?.pressure, pressureMeasures, state.pressure_Pa, 'pressure')),
-    given('temperature', at.given(upstream?.temperature, ['temperature'], state.temperature_K, 'temperature')),
+    temperatureRow(at, result),
     ...found('quality', state.quality === undefined ? undefined : 100 * state.quality, 'percent'),
     ...found('density', state.density_kg_m3, 'density'),
     ...found('viscosity', state.viscosity_Pa_s, 'viscosity'),

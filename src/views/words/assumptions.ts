@@ -39,6 +39,7 @@ export const assumptions: readonly AssumptionWords[] = [
   {
     assumption: 'range-and-span',
     title: 'Range and span',
-    meaning: 'The sizes lie in the range of the standard, the flows in that of the instrument.',
+    meaning:
+      'The sizes lie in the range of the standard, the fluid in that of its figures, the flows in that of the instrument.',
   },
 ];

@@ -44,6 +44,7 @@ const labels: Readonly<Record<string, string>> = {
   upstream: 'Upstream state',
   'upstream.pressure': 'Upstream pressure',
   'upstream.temperature': 'Temperature',
+  'upstream.temperatureAt': 'Temperature measured',
   pipe: 'Pipe',
   'pipe.size': 'Pipe size',
   'pipe.bore': 'Pipe bore',

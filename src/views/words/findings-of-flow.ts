@@ -4,6 +4,11 @@ import type { Detail, FindingWords } from './detail.ts';
 const held = (detail: Detail): string =>
   detail.has('heldAt') ? `; the coefficient was held at that of ${detail.figure('heldAt', 'reynolds')}` : '';
 
+const uncorrected = (detail: Detail): string =>
+  detail.text('why') === 'no-coefficient'
+    ? 'no Joule–Thomson coefficient is known of this fluid'
+    : 'on the saturation line it is tied to the pressure';
+
 const saturation = (word: string, side: string): FindingWords => ({
   role: 'temperatureDifference',
   text: (figure, detail) => {
@@ -44,6 +49,11 @@ export const checksOfFlow: Readonly<Record<string, FindingWords>> = {
   'fluid-range-pressure': {
     role: 'pressure',
     text: (figure) => `Pressure ${figure} against the range of the equation of state`,
+  },
+  'temperature-downstream': {
+    role: 'temperature',
+    text: (figure, detail) =>
+      `Temperature ${figure} was measured downstream and taken as that upstream: ${uncorrected(detail)}`,
   },
   'detail-composition': {
     role: 'percent',

@@ -28,6 +28,12 @@ export const gasPhaseChoices: UsualFirst = [
   { value: 'liquid', label: 'Liquid' },
 ];
 
+/** Where the temperature is measured, seen from the element. */
+export const temperatureChoices: UsualFirst = [
+  { value: 'upstream', label: 'Upstream' },
+  { value: 'downstream', label: 'Downstream' },
+];
+
 /** What the fractions of a composition count. */
 export const basisChoices: UsualFirst = [
   { value: 'mole', label: 'By mole' },

@@ -17,6 +17,11 @@ export const remarks: Readonly<Record<string, string>> = {
   'if97-at-base': 'From the formulation at the base state of the project.',
   'equation-density': 'From the equation of state at pressure and temperature; too long to print here.',
   'equation-speed-of-sound': 'From the equation of state; too long to print here.',
+  'joule-thomson':
+    'Fall of temperature with pressure at constant enthalpy, at the state upstream; too long to print here.',
+  'temperature-from-downstream':
+    'From the temperature measured downstream and the permanent loss at maximum flow; at a smaller flow the two ' +
+    'temperatures differ less.',
   'gas-base-ideal': 'Something would condense at the base state: the density of the ideal gas is the custom.',
   'viscosity-by-scheme': 'From the viscosities of the dilute gases, mixed, and the effect of density.',
   'viscosity-by-reference': 'From the reference correlation of this gas; too long to print here.',

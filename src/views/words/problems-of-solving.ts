@@ -44,6 +44,12 @@ export const solvingProblems: ProblemWords = {
       `${d.figure('pressure', 'pressure')}, beyond what the expansibility factor is known for.`,
     next: 'Choose a larger bore or a smaller flow.',
   }),
+  'temperature-unsettled': (d) => ({
+    cause:
+      `The temperature upstream did not settle from that measured downstream: it was last sought from ` +
+      `${d.figure('lower', 'temperature')} to ${d.figure('upper', 'temperature')}.`,
+    next: 'Check pressure, temperature and flow: the state is near a border of its phase. Or measure upstream.',
+  }),
   'flow-unsettled': (d) => ({
     cause:
       `The flow did not settle: the discharge coefficient was last sought from ` +

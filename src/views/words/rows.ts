@@ -16,6 +16,11 @@ export const stateLabels = {
   quality: 'Quality, vapour by mass',
 } as const;
 
+/** The temperature upstream, found from the one behind the element. */
+export const fromDownstream = (measured: string): string =>
+  `from ${measured} measured downstream, with the loss at maximum flow`;
+export const asDownstream = 'as measured downstream';
+
 export const withMaterial = (label: string, material: string | undefined): string =>
   material === undefined ? label : `${label}, ${material.charAt(0).toLowerCase()}${material.slice(1)}`;
 

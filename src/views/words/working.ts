@@ -2,6 +2,8 @@
 import { catalogue } from './catalogue.ts';
 
 export const workingTitles: Readonly<Record<string, string>> = {
+  jouleThomson: 'Joule–Thomson coefficient',
+  temperature: 'Temperature upstream',
   density: 'Density',
   'density-reference': 'Density at the reference pressure',
   viscosity: 'Dynamic viscosity',

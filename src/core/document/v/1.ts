@@ -96,7 +96,12 @@ export interface MeterText {
   tag?: string;
   service?: string;
   fluid?: FluidText;
-  upstream?: { pressure?: string; temperature?: string; [key: string]: unknown };
+  upstream?: {
+    pressure?: string;
+    temperature?: string;
+    temperatureAt?: string; // 'upstream' | 'downstream' of the element; upstream unless it is said
+    [key: string]: unknown;
+  };
   pipe?: PipeText;
   element?: ElementText;
   duty?: { maximum?: string; normal?: string; minimum?: string; [key: string]: unknown };

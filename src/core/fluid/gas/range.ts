@@ -80,6 +80,7 @@ export function condenses(x: readonly number[], p: number, T: number): boolean {
 export const liquidCaution = (p: number): Caution => ({
   id: 'fluid-liquid',
   verdict: 'caution',
+  ofPhase: true,
   value: p,
   unit: 'Pa',
   limit: {},
@@ -108,6 +109,7 @@ export function phaseCautions(x: readonly number[], p: number, T: number, phase:
       ? ({
           id: 'fluid-two-phase',
           verdict: 'caution',
+          ofPhase: true,
           value: sum,
           unit: '1',
           limit: { max: 1 },
@@ -118,6 +120,7 @@ export function phaseCautions(x: readonly number[], p: number, T: number, phase:
       ? ({
           id: 'water-dew-point',
           verdict: 'caution',
+          ofPhase: true,
           value: water.at,
           unit: 'Pa',
           limit: { max: water.saturated },

@@ -16,6 +16,7 @@ export interface WaterProperties {
   readonly internalEnergy: number; // J/kg
   readonly entropy: number; // J/(kg.K)
   readonly isobaricHeatCapacity: number; // J/(kg.K)
+  readonly jouleThomson: number; // (∂T/∂p)_h, K/Pa
 }
 
 /** A dimensionless Gibbs function γ(π, τ) and its derivatives at one point. */
@@ -54,6 +55,7 @@ export function fromGibbs(
     internalEnergy: R * T * (tau * gt - pi * gp),
     entropy: R * (tau * gt - g),
     isobaricHeatCapacity: -R * tau * tau * gtt,
+    jouleThomson: (T * gpt) / (pStar * tau * gtt), // (T (∂v/∂T)_p - v)/c_p
   };
 }
 
@@ -67,12 +69,14 @@ export function fromHelmholtz(
 ): WaterProperties {
   const a = 2 * delta * fd + delta * delta * fdd;
   const q = delta * fd - delta * tau * fdt;
+  const isobaricHeatCapacity = R * (-tau * tau * ftt + (q * q) / a);
   return {
     density: rho as Density,
     speedOfSoundSquared: R * T * (a - (q * q) / (tau * tau * ftt)),
     enthalpy: R * T * (tau * ft + delta * fd),
     internalEnergy: R * T * tau * ft,
     entropy: R * (tau * ft - f),
-    isobaricHeatCapacity: R * (-tau * tau * ftt + (q * q) / a),
+    isobaricHeatCapacity,
+    jouleThomson: (q / a - 1) / (rho * isobaricHeatCapacity), // (T (∂p/∂T)/(ρ ∂p/∂ρ) - 1)/(ρ c_p)
   };
 }

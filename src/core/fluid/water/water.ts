@@ -86,7 +86,7 @@ function settle(conditions: Conditions, phase: Side): Outcome<Settled> {
 
 function stateFrom(conditions: Conditions, place: Place, forced: boolean, properties: WaterProperties): FluidState {
   const { pressure: p, temperature: T } = conditions;
-  const { density, speedOfSoundSquared } = properties;
+  const { density, speedOfSoundSquared, jouleThomson } = properties;
   const vapourPressure = vapourPressureAt(T);
   const saturationTemperature = boilingAt(p);
   const base = place.side === 'liquid' ? baseWater(conditions) : undefined;
@@ -106,6 +106,7 @@ function stateFrom(conditions: Conditions, place: Place, forced: boolean, proper
   const heldBeyond = forced && place.side !== placeOf(p, T).side;
   return {
     ...figures,
+    jouleThomson,
     molarMass,
     phase: supercritical(p, T) ? 'supercritical' : place.side,
     expands: place.side === 'vapour',

@@ -22,11 +22,18 @@ export const mixtureDensity = (x: number, liquid: number, vapour: number): Densi
 
 /**
  * The state of wet steam from its saturated vapour and the density of its saturated liquid. Isentropic exponent and
- * viscosity stay those of the vapour, with a finding, as neither is defined for the mixture; speed of sound and
- * compressibility factor are left out.
+ * viscosity stay those of the vapour, with a finding, as neither is defined for the mixture; speed of sound,
+ * compressibility factor and Joule-Thomson coefficient are left out.
  */
 export function wetSteam(vapour: FluidState, liquid: Density, quality: number): FluidState {
-  const { compressibility: _, speedOfSound: __, phaseForced: ___, uncertainties: ____, ...kept } = vapour;
+  const {
+    compressibility: _,
+    speedOfSound: _w,
+    jouleThomson: _j,
+    phaseForced: _f,
+    uncertainties: _u,
+    ...kept
+  } = vapour;
   const density = mixtureDensity(quality, liquid, vapour.density);
   return {
     ...kept,
@@ -41,6 +48,7 @@ export function wetSteam(vapour: FluidState, liquid: Density, quality: number): 
 const cautionOf = (quality: number): Caution => ({
   id: 'wet-steam',
   verdict: 'caution',
+  ofPhase: true,
   value: 100 * quality,
   unit: '%',
   limit: { min: 100 },
