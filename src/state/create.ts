@@ -5,6 +5,7 @@
 import { temporal, type ZundoOptions } from 'zundo';
 import { createStore } from 'zustand/vanilla';
 import { emptyProject, encode } from '../core/document/codec.ts';
+import type { Project } from '../core/document/project.ts';
 import { type Core, createDerive } from './derive.ts';
 import { editing, type Hands } from './editing.ts';
 import { following } from './following.ts';
@@ -13,7 +14,7 @@ import { createSteps, type Steps } from './steps.ts';
 import type { Workbench, WorkbenchActions, WorkbenchState, WorkbenchStore } from './workbench.ts';
 
 /** What history holds of each past state. */
-type Trace = Pick<WorkbenchState, 'project' | 'keys'>;
+type Trace = Pick<WorkbenchState, 'project' | 'keys' | 'traverseKeys'>;
 type Standing = Pick<WorkbenchActions, 'setKeeping' | 'setNotice' | 'dismissNotice' | 'setUpdate' | 'setProjects'>;
 
 export const HISTORY_LIMIT = 200;
@@ -40,8 +41,7 @@ export function createWorkbench(core: Core): WorkbenchStore {
           redo: () => travel('redo'),
           open: (project, source) => {
             steps.end();
-            const keys = project.meters.map(newKey);
-            set({ project, keys, opened: { project, source }, lastSolved: {}, selected: Math.min(0, keys.length - 1) });
+            set({ project, opened: { project, source }, ...opening(project, newKey) });
             store.temporal.getState().clear();
           },
         };
@@ -56,7 +56,7 @@ export function createWorkbench(core: Core): WorkbenchStore {
 }
 
 const remembering = (steps: Steps): ZundoOptions<Workbench, Trace> => ({
-  partialize: ({ project, keys }) => ({ project, keys }),
+  partialize: ({ project, keys, traverseKeys }) => ({ project, keys, traverseKeys }),
   equality: (past, current) => past.project === current.project,
   limit: HISTORY_LIMIT,
   handleSet: (save) => (past, _replace, current, delta) => {
@@ -64,14 +64,26 @@ const remembering = (steps: Steps): ZundoOptions<Workbench, Trace> => ({
   },
 });
 
+/** The lists of a project as it comes to hand: the first of each selected, nothing solved before. */
+function opening(project: Project, newKey: () => string) {
+  const [keys, traverseKeys] = [project.meters.map(newKey), (project.traverses ?? []).map(newKey)];
+  return {
+    keys,
+    selected: Math.min(0, keys.length - 1),
+    lastSolved: {},
+    traverseKeys,
+    traverseSelected: Math.min(0, traverseKeys.length - 1),
+    lastSurveyed: {},
+    hand: keys.length === 0 && traverseKeys.length > 0 ? ('traverses' as const) : ('meters' as const),
+  };
+}
+
 function initial(core: Core, newKey: () => string): WorkbenchState {
   const project = emptyProject();
   return {
     project,
-    keys: project.meters.map(newKey),
-    selected: -1,
+    ...opening(project, newKey),
     results: createDerive(core)(project),
-    lastSolved: {},
     opened: { project, source: encode(project) },
     keeping: { state: 'reading' },
     deleted: undefined,
@@ -95,6 +107,6 @@ function createKeys(): () => string {
   let count = 0;
   return () => {
     count += 1;
-    return `meter-${count}`;
+    return `item-${count}`;
   };
 }

@@ -1,61 +1,65 @@
 /**
- * Results follow the project by reference: a meter is solved again when its own object or the site or base state it
- * stands on is another one, and not otherwise.
+ * Results follow the project by reference: a meter or a traverse is solved again when its own object or the site or
+ * base state it stands on is another one, and not otherwise.
  */
-import type { MeterText, Project } from '../core/document/project.ts';
-import type { MeterResult, Results, Solved } from '../core/result/record.ts';
+import type { MeterText, Project, TraverseText } from '../core/document/project.ts';
+import type { MeterResult, Refused, Results, TraverseResult } from '../core/result/record.ts';
 import { tagOf } from './meters.ts';
 
 /** The part of the core the workbench needs; app hands in the real one. */
 export interface Core {
-  run(project: Project): Results;
   solveMeter(meter: MeterText, index: number, project: Project): MeterResult;
-}
-
-interface Remembered {
-  readonly site: unknown;
-  readonly base: unknown;
-  readonly traverses: unknown;
-  readonly meters: ReadonlyMap<unknown, { readonly index: number; readonly result: MeterResult }>;
-  readonly results: Results;
+  solveTraverse(traverse: TraverseText, index: number, project: Project): TraverseResult;
 }
 
 /** Remembers the last project only: what history holds would keep two hundred results of each meter alive. */
 export function createDerive(core: Core): (project: Project) => Results {
-  let last: Remembered | undefined;
+  let site: unknown;
+  let base: unknown;
+  const meters = following<MeterText, MeterResult>((meter, index, project) => core.solveMeter(meter, index, project));
+  const traverses = following<TraverseText, TraverseResult>((traverse, index, project) =>
+    core.solveTraverse(traverse, index, project),
+  );
   return (project) => {
-    const { site, base, traverses } = project;
-    const same = last !== undefined && last.site === site && last.base === base ? last : undefined;
-    const results = project.meters.map((meter, index) => {
-      const known = same?.meters.get(meter);
-      // A meter without a tag is named after its place.
-      const holds = known !== undefined && (known.index === index || tagOf(meter) !== '');
-      return holds ? known.result : core.solveMeter(meter, index, project);
-    });
-    const derived: Results = {
-      results,
-      traverses:
-        same !== undefined && same.traverses === traverses
-          ? same.results.traverses
-          : core.run({ ...project, meters: [] }).traverses,
+    const same = project.site === site && project.base === base;
+    ({ site, base } = project);
+    return {
+      results: meters(project.meters, project, same),
+      traverses: traverses(project.traverses ?? [], project, same),
     };
-    const meters = new Map(
-      project.meters.map((meter, index) => [meter, { index, result: results[index] as MeterResult }] as const),
-    );
-    last = { site, base, traverses, meters, results: derived };
-    return derived;
   };
 }
 
-/** The last solved result of each meter at hand, by key. */
-export function lastSolvedOf(
+type Solve<Item, Result> = (item: Item, index: number, project: Project) => Result;
+/** `same` while site and base state are those of the last time. */
+type Follow<Item, Result> = (items: readonly Item[], project: Project, same: boolean) => readonly Result[];
+
+function following<Item, Result>(solve: Solve<Item, Result>): Follow<Item, Result> {
+  let known: ReadonlyMap<Item, { readonly index: number; readonly result: Result }> = new Map();
+  let last: readonly Result[] = [];
+  return (items, project, same) => {
+    const results = items.map((item, index) => {
+      const before = same ? known.get(item) : undefined;
+      // An item without a tag is named after its place.
+      const holds = before !== undefined && (before.index === index || tagOf(item) !== '');
+      return holds ? before.result : solve(item, index, project);
+    });
+    known = new Map(items.map((item, index) => [item, { index, result: results[index] as Result }] as const));
+    const unchanged = results.length === last.length && results.every((result, at) => result === last[at]);
+    if (!unchanged) last = results;
+    return last;
+  };
+}
+
+/** The last solved result of each item at hand, by key. */
+export function lastSolvedOf<Solved extends { readonly status: 'solved' }>(
   before: Readonly<Record<string, Solved>>,
   keys: readonly string[],
-  results: Results,
+  results: readonly (Solved | Refused)[],
 ): Readonly<Record<string, Solved>> {
   const solved: Record<string, Solved> = {};
   keys.forEach((key, index) => {
-    const result = results.results[index];
+    const result = results[index];
     const value = result?.status === 'solved' ? result : before[key];
     if (value !== undefined) solved[key] = value;
   });

@@ -1,10 +1,15 @@
 /** Actions that write values. */
-import type { MeterText, Project } from '../core/document/project.ts';
+import type { Project } from '../core/document/project.ts';
 import { writeAt } from './edit.ts';
+import { itemsIn, type ListName, standingOf, withItems } from './lists.ts';
+import { withReadings } from './readings.ts';
 import type { Steps } from './steps.ts';
 import type { Workbench, WorkbenchActions } from './workbench.ts';
 
-type Editing = Pick<WorkbenchActions, 'write' | 'writeAll' | 'writeProject' | 'setDisplay' | 'settle'>;
+type Editing = Pick<
+  WorkbenchActions,
+  'write' | 'writeAll' | 'writeReadings' | 'writeProject' | 'setDisplay' | 'settle'
+>;
 
 /** What carries an edit through: the store, the steps of undo, and how to take the last step back out of history. */
 export interface Hands {
@@ -15,54 +20,75 @@ export interface Hands {
 }
 
 export function editing(hands: Hands): Editing {
+  const { get, steps } = hands;
   const writeProject = (path: string, value: unknown): void => {
-    if (/^(format|version|meters)(\.|$)/.test(path))
-      throw new Error(`expected a path beside the meters, got '${path}'`);
-    edit(hands, `project ${path}`, writeAt(hands.get().project, path, value));
+    if (/^(format|version|meters|traverses)(\.|$)/.test(path))
+      throw new Error(`expected a path beside the lists of the project, got '${path}'`);
+    edit(hands, `project ${path}`, writeAt(get().project, path, value));
   };
   return {
-    write: (path, value) => {
-      const { project, keys, selected } = hands.get();
+    write: (path, value, list = 'meters') => {
+      const { keys, selected } = standingOf(get(), list);
       if (selected < 0) return;
-      const next = withValue(project, selected, path, value);
-      edit(hands, `${keys[selected]} ${path}`, next);
+      edit(hands, `${keys[selected]} ${path}`, withValue(get().project, { list, selected }, path, value), list);
     },
-    writeAll: (values) => {
-      const { project, selected } = hands.get();
+    writeAll: (values, list = 'meters') => {
+      const { selected } = standingOf(get(), list);
       if (selected < 0) return;
-      hands.steps.end();
-      const next = values.reduce((made, [path, value]) => withValue(made, selected, path, value), project);
-      edit(hands, 'several', next);
-      hands.steps.end();
+      steps.end();
+      const at = { list, selected };
+      const next = values.reduce((made, [path, value]) => withValue(made, at, path, value), get().project);
+      edit(hands, 'several', next, list);
+      steps.end();
+    },
+    writeReadings: (cells) => {
+      const { keys, selected } = standingOf(get(), 'traverses');
+      const [first, ...more] = cells;
+      if (selected < 0 || first === undefined) return;
+      const { project } = get();
+      const readings = withReadings(project.traverses?.[selected]?.readings, cells);
+      const next = withValue(project, { list: 'traverses', selected }, 'readings', readings);
+      if (more.length > 0) steps.end();
+      edit(hands, `${keys[selected]} readings.${first.line}.${first.point}`, next, 'traverses');
+      if (more.length > 0) steps.end();
     },
     writeProject,
     setDisplay: (display) => {
-      hands.steps.end();
+      steps.end();
       writeProject('display', display);
     },
-    settle: () => hands.steps.end(),
+    settle: () => steps.end(),
   };
 }
 
-function withValue(project: Project, index: number, path: string, value: unknown): Project {
-  const meter: unknown = project.meters[index];
-  const root = typeof meter === 'object' && meter !== null && !Array.isArray(meter) ? (meter as MeterText) : {};
+interface At {
+  readonly list: ListName;
+  readonly selected: number;
+}
+
+function withValue(project: Project, { list, selected }: At, path: string, value: unknown): Project {
+  const items = itemsIn(project, list);
+  const item = items[selected];
+  const root = typeof item === 'object' && item !== null && !Array.isArray(item) ? item : {};
   const next = writeAt(root, path, value);
-  return next === root ? project : { ...project, meters: project.meters.with(index, next) };
+  return next === root ? project : withItems(project, list, items.with(selected, next));
 }
 
 /** Text typed and taken back again leaves no step: the project is the one from before it. */
-function edit({ get, set, steps, forgetStep }: Hands, field: string, next: Project): void {
-  const { project, selected } = get();
+function edit({ get, set, steps, forgetStep }: Hands, field: string, next: Project, list?: ListName): void {
+  const { project } = get();
   if (next === project) return;
   const before = steps.before(field);
-  const takenBack = before !== undefined && textAt(before, selected) === textAt(next, selected);
-  steps.during(field, project, () => set({ project: takenBack ? before : next }));
+  const takenBack = before !== undefined && textAt(before, get()) === textAt(next, get());
+  const hand = list === undefined ? {} : { hand: list };
+  steps.during(field, project, () => set({ project: takenBack ? before : next, ...hand }));
   if (!takenBack) return;
   steps.end();
   forgetStep();
 }
 
-/** All that one edit can change: the project beside its meters, and the meter at hand. */
-const textAt = (project: Project, index: number): string =>
-  JSON.stringify({ ...project, meters: project.meters.slice(Math.max(0, index)).slice(0, 1) });
+/** All that one edit can change: the project beside its lists, and the items at hand. */
+function textAt(project: Project, { selected, traverseSelected }: Workbench): string {
+  const meter = project.meters[selected];
+  return JSON.stringify({ ...project, meters: meter, traverses: project.traverses?.[traverseSelected] });
+}

@@ -2,6 +2,7 @@
 import type { StateCreator, StoreMutatorIdentifier } from 'zustand/vanilla';
 import type { Project } from '../core/document/project.ts';
 import { type Core, createDerive, lastSolvedOf } from './derive.ts';
+import { itemsIn, type ListName, standingOf } from './lists.ts';
 import type { Workbench } from './workbench.ts';
 
 type Mutators = [StoreMutatorIdentifier, unknown][];
@@ -28,21 +29,25 @@ function createFollow(core: Core): (state: Workbench, change: Partial<Workbench>
     const { project } = change;
     if (project === undefined || project === state.project) return change;
     const keys = change.keys ?? state.keys;
+    const traverseKeys = change.traverseKeys ?? state.traverseKeys;
     const results = derive(project);
     return {
       deleted: undefined,
-      selected: placeOf(state.project, project, state.selected),
+      selected: placeOf(state, project, 'meters'),
+      traverseSelected: placeOf(state, project, 'traverses'),
       ...change,
       results,
-      lastSolved: lastSolvedOf(change.lastSolved ?? state.lastSolved, keys, results),
+      lastSolved: lastSolvedOf(change.lastSolved ?? state.lastSolved, keys, results.results),
+      lastSurveyed: lastSolvedOf(change.lastSurveyed ?? state.lastSurveyed, traverseKeys, results.traverses),
     };
   };
 }
 
-/** The first meter that differs, so that undo shows what it undid; otherwise the one that was selected. */
-function placeOf(before: Project, after: Project, selected: number): number {
-  const most = Math.max(before.meters.length, after.meters.length);
+/** The first item that differs, so that undo shows what it undid; otherwise the one that was selected. */
+function placeOf(state: Workbench, project: Project, list: ListName): number {
+  const [before, after] = [itemsIn(state.project, list), itemsIn(project, list)];
+  const most = Math.max(before.length, after.length);
   let place = 0;
-  while (place < most && before.meters[place] === after.meters[place]) place += 1;
-  return Math.min(place < most ? place : selected, after.meters.length - 1);
+  while (place < most && before[place] === after[place]) place += 1;
+  return Math.min(place < most ? place : standingOf(state, list).selected, after.length - 1);
 }

@@ -3,8 +3,10 @@
  * A zustand vanilla store; views/screen binds to it, app wires it to persist.
  */
 import type { StoreApi } from 'zustand/vanilla';
-import type { Display, MeterText, Project } from '../core/document/project.ts';
-import type { Results, Solved } from '../core/result/record.ts';
+import type { Display, MeterText, Project, TraverseText } from '../core/document/project.ts';
+import type { Results, Solved, SolvedTraverse } from '../core/result/record.ts';
+import type { ListName } from './lists.ts';
+import type { ReadingCell } from './readings.ts';
 
 /** Where the project stands: not yet read, being kept, kept, or why not. */
 export type Keeping =
@@ -37,13 +39,20 @@ export interface WorkbenchState {
   /** Stable identity of each meter while the project is open, parallel to project.meters. */
   readonly keys: readonly string[];
   readonly selected: number; // index into project.meters, -1 when empty
+  /** The same of the traverses. */
+  readonly traverseKeys: readonly string[];
+  readonly traverseSelected: number;
+  /** The list that was last worked on. */
+  readonly hand: ListName;
   readonly results: Results; // of the project as it stands
   /** The last solved result of each meter by key, shown as stale while its input cannot be read. */
   readonly lastSolved: Readonly<Record<string, Solved>>;
+  /** The same of each traverse. */
+  readonly lastSurveyed: Readonly<Record<string, SolvedTraverse>>;
   /** The project as it was opened and its text, byte for byte. */
   readonly opened: { readonly project: Project; readonly source: string };
   readonly keeping: Keeping;
-  readonly deleted: { readonly tag: string } | undefined; // offers undo after a deletion
+  readonly deleted: { readonly tag: string; readonly list: ListName } | undefined; // offers undo after a deletion
   readonly canUndo: boolean;
   readonly canRedo: boolean;
   readonly notice: Notice | undefined;
@@ -52,10 +61,15 @@ export interface WorkbenchState {
 }
 
 export interface WorkbenchActions {
-  /** Writes one value of the selected meter; `path` has dots ('upstream.pressure'); undefined or '' removes the key. Edits of one field in a row are one step of undo. */
-  write(path: string, value: unknown): void;
-  /** Writes several values of the selected meter as one step of undo that stands by itself. */
-  writeAll(values: readonly (readonly [path: string, value: unknown])[]): void;
+  /**
+   * Writes one value of the selected meter, or of the selected item of another list; `path` has dots
+   * ('upstream.pressure'); undefined or '' removes the key. Edits of one field in a row are one step of undo.
+   */
+  write(path: string, value: unknown, list?: ListName): void;
+  /** Writes several values of one item as one step of undo that stands by itself. */
+  writeAll(values: readonly (readonly [path: string, value: unknown])[], list?: ListName): void;
+  /** Writes readings of the selected traverse: those of one point in a row are one step of undo, several a step by themselves. */
+  writeReadings(cells: readonly ReadingCell[]): void;
   /** Ends the current step of undo (on blur or Enter). */
   settle(): void;
   writeProject(path: string, value: unknown): void; // title, revision, site.atmosphere, ...
@@ -65,6 +79,11 @@ export interface WorkbenchActions {
   duplicateMeter(index: number): void;
   moveMeter(index: number, to: number): void;
   deleteMeter(index: number): void;
+  selectTraverse(index: number): void;
+  addTraverse(traverse?: TraverseText): void; // a new survey with usual choices, selected
+  duplicateTraverse(index: number): void;
+  moveTraverse(index: number, to: number): void;
+  deleteTraverse(index: number): void;
   dismissDeleted(): void;
   open(project: Project, source: string): void; // replaces the project; `source` is its text, kept until edited
   undo(): void;

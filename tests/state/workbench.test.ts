@@ -135,7 +135,7 @@ describe('undo', () => {
   test('brings a deleted meter back with its key; other changes end the offer', () => {
     const { keys } = at();
     at().deleteMeter(1);
-    expect(at().deleted).toEqual({ tag: 'FE-1102' });
+    expect(at().deleted).toEqual({ tag: 'FE-1102', list: 'meters' });
     at().undo();
     expect([at().keys, at().deleted, at().selected]).toEqual([keys, undefined, 1]);
     at().deleteMeter(0);
@@ -213,9 +213,9 @@ describe('text', () => {
     expect(textOf(at())).toBe(source);
   });
 
-  test('format, version and meters are not written as values', () => {
-    for (const path of ['format', 'version', 'meters', 'meters.0.tag']) {
-      expect(() => at().writeProject(path, 'x')).toThrow('expected a path beside the meters');
+  test('format, version and the lists are not written as values', () => {
+    for (const path of ['format', 'version', 'meters', 'meters.0.tag', 'traverses.0.rule']) {
+      expect(() => at().writeProject(path, 'x')).toThrow('expected a path beside the lists');
     }
   });
 });
@@ -260,13 +260,41 @@ const order: fc.Arbitrary<Order> = fc.oneof(
       (bench) =>
         bench.moveMeter(i, to),
   ),
+  fc.tuple(path, value).map(
+    ([where, what]): Order =>
+      (bench) =>
+        bench.write(where, what, 'traverses'),
+  ),
+  fc.tuple(index, index, fc.constantFrom('', '61 Pa', 'x')).map(
+    ([line, point, text]): Order =>
+      (bench) =>
+        bench.writeReadings([{ line: line + 1, point: point + 1, text }]),
+  ),
+  fc.tuple(index, index).map(
+    ([i, to]): Order =>
+      (bench) => {
+        bench.moveTraverse(i, to);
+        bench.selectTraverse(to);
+        bench.duplicateTraverse(i);
+        bench.deleteTraverse(to);
+      },
+  ),
   fc.constantFrom<Order>(
     (bench) => bench.addMeter(),
+    (bench) => bench.addTraverse(),
     (bench) => bench.undo(),
     (bench) => bench.redo(),
     (bench) => bench.settle(),
   ),
 );
+
+function expectStanding(items: readonly unknown[], keys: readonly string[], selected: number, last: object): void {
+  expect(keys).toHaveLength(items.length);
+  expect(new Set(keys).size).toBe(keys.length);
+  expect(selected).toBeGreaterThanOrEqual(items.length > 0 ? 0 : -1);
+  expect(selected).toBeLessThan(Math.max(1, items.length));
+  expect(Object.keys(last).every((key) => keys.includes(key))).toBe(true);
+}
 
 describe('laws', () => {
   test('undo to the start gives the first text, redo to the end the last', () => {
@@ -294,13 +322,14 @@ describe('laws', () => {
         bench.getState().open(project, source);
         for (const give of orders) {
           give(bench.getState());
-          const { project: now, keys, results, selected, lastSolved } = bench.getState();
-          expect(keys).toHaveLength(now.meters.length);
-          expect(new Set(keys).size).toBe(keys.length);
-          expect(results).toEqual(countingCore().run(now));
-          expect(selected).toBeGreaterThanOrEqual(now.meters.length > 0 ? 0 : -1);
-          expect(selected).toBeLessThan(Math.max(1, now.meters.length));
-          expect(Object.keys(lastSolved).every((key) => keys.includes(key))).toBe(true);
+          const { project: now, results, ...at } = bench.getState();
+          const fresh = countingCore();
+          expect(results).toEqual({
+            results: now.meters.map((meter, i) => fresh.solveMeter(meter, i, now)),
+            traverses: (now.traverses ?? []).map((traverse, i) => fresh.solveTraverse(traverse, i, now)),
+          });
+          expectStanding(now.meters, at.keys, at.selected, at.lastSolved);
+          expectStanding(now.traverses ?? [], at.traverseKeys, at.traverseSelected, at.lastSurveyed);
         }
         expect(JSON.stringify(project)).toBe(before);
       }),

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { unitOf } from '../../../src/core/quantity/units.ts';
-import { run, solveMeter } from '../../../src/core/run.ts';
+import { solveTraverse } from '../../../src/core/run/traverse.ts';
+import { solveMeter } from '../../../src/core/run.ts';
 import { createWorkbench } from '../../../src/state/create.ts';
 import { compositionSum } from '../../../src/views/present/composition.ts';
 import {
@@ -130,7 +131,7 @@ describe('base states', () => {
     expect(baseStateNamed({ temperature: '16 degC', pressure: '1 bar(a)' })).toBe('');
   });
   it('of the list can all be computed', () => {
-    const store = createWorkbench({ run, solveMeter });
+    const store = createWorkbench({ solveMeter, solveTraverse });
     const meter = {
       fluid: { kind: 'gas', composition: { methane: '100 %' } },
       upstream: { pressure: '8 bar(g)', temperature: '15 degC' },

@@ -1,7 +1,8 @@
 /** A workbench with one meter to be turned round, solved by the real core. */
 
 import type { MeterText } from '../../../src/core/document/project.ts';
-import { run, solveMeter } from '../../../src/core/run.ts';
+import { solveTraverse } from '../../../src/core/run/traverse.ts';
+import { solveMeter } from '../../../src/core/run.ts';
 import { createWorkbench } from '../../../src/state/create.ts';
 
 export const feedWater: MeterText = {
@@ -16,7 +17,7 @@ export const feedWater: MeterText = {
 };
 
 export function openMeter(meter: MeterText = feedWater) {
-  const store = createWorkbench({ run, solveMeter });
+  const store = createWorkbench({ solveMeter, solveTraverse });
   store.getState().open({ format: 'headwright', version: 1, meters: [meter] }, '');
   const solved = () => {
     const result = store.getState().results.results[0];

@@ -25,7 +25,10 @@ function Deleted() {
     dismiss();
   };
   return (
-    <Line words={`${deleted.tag || 'The meter'} is deleted.`} dismiss={dismiss}>
+    <Line
+      words={`${deleted.tag || (deleted.list === 'meters' ? 'The meter' : 'The survey')} is deleted.`}
+      dismiss={dismiss}
+    >
       <button type="button" className={buttons.framed} onClick={takeBack}>
         Take it back
       </button>
