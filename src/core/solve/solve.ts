@@ -9,7 +9,7 @@ import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import { boreFrom } from './bore.ts';
 import { differentialFrom } from './differential.ts';
 import type { Downstream } from './downstream.ts';
-import type { Meter, Operation } from './equation.ts';
+import { type Meter, meterOf, type Operation } from './equation.ts';
 import { flowFrom } from './flow.ts';
 import { asMeasured, atLine, hotGeometry } from './metal.ts';
 
@@ -55,7 +55,7 @@ function solveUnknown(input: MeterInput, primary: Primary, state: FluidState): O
   const bore = known(input.element.bore, 'element.bore');
   const geometry = hotGeometry(bore, input, state.temperature);
   if (!geometry.ok) return geometry;
-  const meter: Meter = { primary, geometry: geometry.value, state };
+  const meter = meterOf(primary, geometry.value, state);
   const maximum =
     input.find === 'flow'
       ? flowFrom(known(input.differential, 'differential'), meter)
@@ -72,7 +72,7 @@ function findBore(input: MeterInput, primary: Primary, state: FluidState): Outco
   if (!found.ok) return found;
   const { geometry, operation } = found.value;
   return ok({
-    meter: { primary, geometry, state },
+    meter: meterOf(primary, geometry, state),
     boreAsMeasured: asMeasured(geometry.bore, input.element, line),
     maximum: operation,
   });

@@ -11,6 +11,7 @@ import type {
   PressureDifference,
   Temperature,
 } from '../../../src/core/quantity/kinds.ts';
+import { meterOf } from '../../../src/core/solve/equation.ts';
 import { flowFrom } from '../../../src/core/solve/flow.ts';
 
 type Given = Readonly<Record<string, number | string>>;
@@ -72,7 +73,7 @@ export const subjects: Readonly<Record<string, (given: Given) => Record<string, 
     return { share: primary.lossShare(geometryOf(given), number(given, 'C'), number(given, 'Re_D')) };
   },
   'gas-flow-from-differential': (given) => {
-    const meter = { primary: primaryOf(String(given.element)), geometry: geometryOf(given), state: gas(given) };
+    const meter = meterOf(primaryOf(String(given.element)), geometryOf(given), gas(given));
     const found = flowFrom(number(given, 'dp') as PressureDifference, meter);
     if (!found.ok) throw new Error(`expected a flow, got ${JSON.stringify(found.problems)}`);
     return { q_m: found.value.massFlow };

@@ -14,6 +14,7 @@ import type {
 } from '../../../src/core/quantity/kinds.ts';
 import type { Outcome } from '../../../src/core/quantity/outcome.ts';
 import { boreFrom } from '../../../src/core/solve/bore.ts';
+import { meterOf } from '../../../src/core/solve/equation.ts';
 import { flowFrom } from '../../../src/core/solve/flow.ts';
 import { geometryOf, number, primaryOf } from './element.ts';
 
@@ -45,7 +46,7 @@ const solved = <Value>(outcome: Outcome<Value>): Value => {
 
 const flow = (given: Given, primary: Primary): Record<string, number> => {
   const geometry = geometryOf(given);
-  const meter = { primary, geometry, state: liquid(given) };
+  const meter = meterOf(primary, geometry, liquid(given));
   const { massFlow } = solved(flowFrom(number(given, 'dp') as PressureDifference, meter));
   const volume = massFlow / number(given, 'rho');
   return { q_m: massFlow, q_v: volume, V: volume / ((Math.PI / 4) * geometry.pipe ** 2) };
