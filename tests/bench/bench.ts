@@ -6,6 +6,7 @@ import { mkdirSync, writeFileSync } from 'node:fs';
 import { cpus } from 'node:os';
 import { join } from 'node:path';
 import { gas } from './gas.ts';
+import { log } from './log.ts';
 import { checksum } from './pairs.ts';
 import { type Line, table } from './report.ts';
 import { screen } from './screen.ts';
@@ -19,6 +20,7 @@ const parts: Readonly<Record<string, () => Line[] | Promise<Line[]>>> = {
   whole: () => whole(root, ownFlow(orificeCases())),
   water,
   gas,
+  log,
   screen: () => screen(root),
 };
 
