@@ -1,6 +1,7 @@
 /** Puts the program together: the core under the workbench, the workbench on the desk, the screen on the page. */
 import { lazy } from 'react';
 import { createRoot } from 'react-dom/client';
+import { solveSite } from '../core/run/site.ts';
 import { solveTraverse } from '../core/run/traverse.ts';
 import { solveMeter } from '../core/run.ts';
 import { flushWhenHidden } from '../persist/autosave.ts';
@@ -19,7 +20,7 @@ const Paper = lazy(async () => ({ default: (await import('../views/sheet/Sheets.
 /** The sheets carry the day they are printed; only the app knows the clock. */
 const Sheets: SheetsView = (props) => <Paper {...props} printedOn={dayOf(new Date())} />;
 
-const store = createWorkbench({ solveMeter, solveTraverse });
+const store = createWorkbench({ solveMeter, solveTraverse, solveSite });
 let desk: Desk | undefined;
 let newVersion: (() => void) | undefined;
 

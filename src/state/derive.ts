@@ -3,13 +3,14 @@
  * base state it stands on is another one, and not otherwise.
  */
 import type { MeterText, Project, TraverseText } from '../core/document/project.ts';
-import type { MeterResult, Refused, Results, TraverseResult } from '../core/result/record.ts';
+import type { MeterResult, Refused, Results, SiteRecord, TraverseResult } from '../core/result/record.ts';
 import { tagOf } from './meters.ts';
 
 /** The part of the core the workbench needs; app hands in the real one. */
 export interface Core {
   solveMeter(meter: MeterText, index: number, project: Project): MeterResult;
   solveTraverse(traverse: TraverseText, index: number, project: Project): TraverseResult;
+  solveSite(project: Project): SiteRecord | undefined;
 }
 
 /** Remembers the last project only: what history holds would keep two hundred results of each meter alive. */
@@ -23,7 +24,9 @@ export function createDerive(core: Core): (project: Project) => Results {
   return (project) => {
     const same = project.site === site && project.base === base;
     ({ site, base } = project);
+    const found = core.solveSite(project);
     return {
+      ...(found === undefined ? {} : { site: found }),
       results: meters(project.meters, project, same),
       traverses: traverses(project.traverses ?? [], project, same),
     };

@@ -17,6 +17,7 @@ export function countingCore(): CountingCore {
       const tag = meter?.tag ?? `meter ${index + 1}`;
       return typeof meter?.pipe?.bore === 'string' ? solved(tag, Number.parseFloat(meter.pipe.bore)) : refused(tag);
     },
+    solveSite: () => undefined,
     solveTraverse: (traverse, index) => {
       core.surveyed += 1;
       const tag = traverse?.tag ?? `survey ${index + 1}`;

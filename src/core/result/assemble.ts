@@ -18,7 +18,8 @@ import type { Budget } from '../uncertainty/iso5167.ts';
 import { curveOf, reynoldsLimits } from './curve.ts';
 import { headsOf } from './heads.ts';
 import { withLate } from './late.ts';
-import type { PointRecord, SiteRecord, Solved, StateRecord } from './record.ts';
+import type { PointRecord, Solved, StateRecord } from './record.ts';
+import { siteRecord, siteWorking } from './site.ts';
 import { type Direction, pointWorking } from './working.ts';
 
 export interface Parts {
@@ -67,12 +68,7 @@ export function assemble(parts: Parts): Solved {
     reynoldsLimits: () => reynoldsLimits(meter),
     heads: () => headsOf(meter, duty.maximum, site.gravity),
     dimensions: () => primary.dimensions(geometry),
-    working: () => [
-      ...downstreamWorking(solution),
-      ...state.working,
-      ...relative,
-      ...metalWorking(input, solution.boreAsMeasured, state.temperature),
-    ],
+    working: () => [...siteWorking(site), ...stateWorking(solution), ...relative, ...metalOf(parts)],
     sources: () => sourcesOf(solved, parts.budgets),
   });
   return solved;
@@ -81,12 +77,6 @@ export function assemble(parts: Parts): Solved {
 /** What only screen and paper ask for. */
 type Late = Pick<Solved, 'curve' | 'reynoldsLimits' | 'heads' | 'dimensions' | 'working' | 'sources'>;
 
-const siteRecord = ({ atmosphere, base }: Site): SiteRecord => ({
-  atmosphere_Pa: atmosphere,
-  basePressure_Pa: base.pressure,
-  baseTemperature_K: base.temperature,
-});
-
 /** What was made of a temperature measured behind the element. */
 function downstreamRecord({ downstream }: Solution): Pick<StateRecord, 'downstream'> {
   if (downstream === undefined) return {};
@@ -94,8 +84,14 @@ function downstreamRecord({ downstream }: Solution): Pick<StateRecord, 'downstre
   return { downstream: { measured_K: measured, ...('loss' in downstream ? { loss_Pa: downstream.loss } : {}) } };
 }
 
-const downstreamWorking = ({ downstream, meter }: Solution): readonly Working[] =>
-  downstream !== undefined && 'loss' in downstream ? correctionWorking(downstream, meter.state.pressure) : [];
+/** The state, its temperature first where that was found from one measured behind the element. */
+function stateWorking({ downstream, meter: { state } }: Solution): readonly Working[] {
+  const corrected = downstream !== undefined && 'loss' in downstream;
+  return [...(corrected ? correctionWorking(downstream, state.pressure) : []), ...state.working];
+}
+
+const metalOf = ({ input, solution: { boreAsMeasured, meter } }: Parts): readonly Working[] =>
+  metalWorking(input, boreAsMeasured, meter.state.temperature);
 
 /** The relative density as a working line, for a gas whose base volume counts the whole of it: none for air. */
 function relativeOf({ phase, baseDensity }: FluidState, { fluid }: MeterInput, { base }: Site): readonly Working[] {

@@ -7,6 +7,7 @@ import type { Unchecked } from '../check/unchecked.ts';
 import type { DutyName, Unknown } from '../document/project.ts';
 import type { Dimension, StraightLength } from '../element/contract.ts';
 import type { Phase } from '../fluid/contract.ts';
+import type { SiteFigureFrom } from '../input/site.ts';
 import type { Problem } from '../quantity/outcome.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Working } from '../quantity/working.ts';
@@ -44,6 +45,16 @@ export interface StateRecord {
 /** The site and the base state that the figures were computed with, stated or usual. */
 export interface SiteRecord {
   readonly atmosphere_Pa: number;
+  /** `place`: of the standard atmosphere at the altitude. */
+  readonly atmosphereFrom: SiteFigureFrom;
+  readonly gravity_m_s2: number;
+  /** `place`: normal gravity at latitude and altitude. */
+  readonly gravityFrom: SiteFigureFrom;
+  readonly altitude_m?: number;
+  readonly latitude_rad?: number;
+  /** What the place has, whether or not another figure is stated. */
+  readonly suggestedAtmosphere_Pa?: number;
+  readonly suggestedGravity_m_s2?: number;
   readonly basePressure_Pa: number;
   readonly baseTemperature_K: number;
 }

@@ -4,6 +4,6 @@ import { asWritten } from './numbers.ts';
 
 /** The same text where it cannot be read. */
 export function asPrinted(text: string): string {
-  const read = readQuantity(text, ['absolute pressure', 'temperature', 'acceleration'], '');
+  const read = readQuantity(text, ['absolute pressure', 'temperature', 'acceleration', 'length', 'angle'], '');
   return read.ok ? asWritten(read.value).text : text;
 }

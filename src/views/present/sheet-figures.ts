@@ -2,6 +2,7 @@
 import type { DutyName, Project } from '../../core/document/project.ts';
 import type { Solved } from '../../core/result/record.ts';
 import * as words from '../words/sheet.ts';
+import { asPrinted } from './base.ts';
 import type { Context } from './context.ts';
 import type { DutyColumn, DutyRow, PresentedSizing } from './model.ts';
 import { type KeyOf, type SheetRow, sheetRow } from './sources.ts';
@@ -29,12 +30,19 @@ export function fluidRows(
 ): readonly SheetRow[] {
   const rows = state.map((row) => sheetRow(row, keyOf));
   const [pressure, ...others] = rows;
-  const atmosphere = at.given(site?.atmosphere, ['absolute pressure'], result.site.atmosphere_Pa, 'pressure').text;
   const absolute = at.value(result.state.pressure_Pa, 'pressure').text;
   const name = fluid.phase === fluid.name.toLowerCase() ? fluid.name : `${fluid.name}, ${fluid.phase}`;
   const pressures = pressure === undefined ? [] : [pressure];
   const below: readonly SheetRow[] = pressure?.text.endsWith('(g)')
-    ? [{ id: 'absolute', label: words.absolutePressure, text: absolute, key: '', note: words.atAtmosphere(atmosphere) }]
+    ? [
+        {
+          id: 'absolute',
+          label: words.absolutePressure,
+          text: absolute,
+          key: '',
+          note: atmosphereNote(at, site, result),
+        },
+      ]
     : [];
   const stated = (text: unknown, measure: 'absolute pressure' | 'temperature', si: number): string =>
     at.given(text, [measure], si, measure === 'temperature' ? 'temperature' : 'pressure').text;
@@ -48,6 +56,13 @@ export function fluidRows(
     ...below,
     ...others.map((row) => (row.id === 'baseDensity' ? { ...row, note: atBase } : row)),
   ];
+}
+
+/** The atmosphere that a gauge pressure stands on, and where it comes from if nobody stated it. */
+function atmosphereNote(at: Context, site: Project['site'], { site: found }: Solved): string {
+  const pressure = at.given(site?.atmosphere, ['absolute pressure'], found.atmosphere_Pa, 'pressure').text;
+  if (found.atmosphereFrom !== 'place') return words.atAtmosphere(pressure);
+  return words.atStandardAtmosphere(pressure, asPrinted(site?.altitude ?? ''));
 }
 
 /** How a diameter was measured stands below the section. */

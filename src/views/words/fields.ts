@@ -82,6 +82,8 @@ const labels: Readonly<Record<string, string>> = {
   checkedBy: 'Checked by',
   'site.atmosphere': 'Atmospheric pressure',
   'site.gravity': 'Gravity',
+  'site.altitude': 'Altitude',
+  'site.latitude': 'Latitude',
   'base.pressure': 'Base pressure',
   'base.temperature': 'Base temperature',
   display: 'Units',

@@ -53,7 +53,11 @@ export const airProblems: ProblemWords = {
     next: 'Leave one out: the composition for a pure gas, the name for a mixture.',
   }),
   'altitude-out-of-range': (d) => ({
-    cause: `The standard atmosphere has no altitude of ${d.figure('altitude', 'length')}.`,
-    next: `Write an altitude from ${d.limit('lowest', 'length')} to ${d.limit('highest', 'length')}.`,
+    cause: `The standard atmosphere has no altitude of ${d.figure('altitude', 'head')}.`,
+    next: `Write an altitude from ${d.limit('lowest', 'head')} to ${d.limit('highest', 'head')}.`,
+  }),
+  'latitude-out-of-range': (d) => ({
+    cause: `No place has a latitude of ${d.text('written')}.`,
+    next: 'Write a latitude from \u221290\u00b0 at the south pole to 90\u00b0 at the north pole.',
   }),
 };

@@ -2,6 +2,8 @@
 import { catalogue } from './catalogue.ts';
 
 export const quantityNames: Readonly<Record<string, string>> = {
+  altitude: 'Altitude of the site',
+  latitude: 'Latitude of the site',
   'approach-factor': 'Velocity of approach factor',
   'base-density': 'Density at the base state',
   'base-density-air': 'Density of dry air at the base state',

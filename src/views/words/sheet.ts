@@ -73,6 +73,8 @@ export const whole = 'Combined';
 export const fluidRow = 'Fluid';
 export const absolutePressure = 'the same, absolute';
 export const atAtmosphere = (pressure: string): string => `over ${pressure}`;
+export const atStandardAtmosphere = (pressure: string, altitude: string): string =>
+  `over ${pressure}, standard atmosphere at ${altitude}`;
 export const atBase = (pressure: string, temperature: string): string => `${pressure}, ${temperature}`;
 export const spanOf = (differential: string): string => `span of the differential ${differential}`;
 

@@ -2,6 +2,8 @@
 import { catalogue } from './catalogue.ts';
 
 export const workingTitles: Readonly<Record<string, string>> = {
+  'site-atmosphere': 'Atmospheric pressure of the site',
+  'site-gravity': 'Gravity of the site',
   jouleThomson: 'Joule–Thomson coefficient',
   temperature: 'Temperature upstream',
   density: 'Density',

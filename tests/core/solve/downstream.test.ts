@@ -1,5 +1,6 @@
 /** A temperature measured behind the element: the one upstream, and what is said where there is no way back. */
 import { describe, expect, it } from 'vitest';
+import type { MeterText } from '../../../src/core/document/project.ts';
 import type { FluidState } from '../../../src/core/fluid/contract.ts';
 import { propertiesAt } from '../../../src/core/fluid/if97/evaluate.ts';
 import { placeOf } from '../../../src/core/fluid/if97/place.ts';
@@ -9,7 +10,7 @@ import { upstreamFrom } from '../../../src/core/solve/downstream.ts';
 import { seeded } from '../fluid/seeded.ts';
 import { answer, refusal, solved, steam, water } from '../sample.ts';
 
-const gas = {
+const gas: MeterText = {
   tag: 'FE-3101',
   fluid: { kind: 'gas', composition: { methane: 0.9, ethane: 0.06, nitrogen: 0.04 } },
   upstream: { pressure: '60 bar(g)', temperature: '15 degC' },
@@ -20,20 +21,19 @@ const gas = {
   find: 'flow',
 };
 
-type Meter = Record<string, unknown> & { readonly upstream: Record<string, string> };
-const behind = (meter: Meter, temperature = meter.upstream.temperature): Meter => ({
+const behind = (meter: MeterText, temperature = meter.upstream?.temperature): MeterText => ({
   ...meter,
   upstream: { ...meter.upstream, ...(temperature === undefined ? {} : { temperature }), temperatureAt: 'downstream' },
 });
 
 describe('the temperature upstream', () => {
-  it.each([
+  it.each<[string, MeterText]>([
     ['flow', gas],
     ['bore', { ...gas, duty: { maximum: '100 t/h' }, find: 'bore' }],
     ['differential', { ...gas, find: 'differential' }],
     ['flow of steam', steam],
     ['flow of air', { ...gas, fluid: { kind: 'air' }, duty: { maximum: '50 t/h' } }],
-  ] as const)('is that measured downstream and the loss times the coefficient: %s', (_, meter) => {
+  ])('is that measured downstream and the loss times the coefficient: %s', (_, meter) => {
     const { state, points } = solved(behind(meter));
     const measured = solved(meter).state.temperature_K;
     expect(state.downstream).toEqual({ measured_K: measured, loss_Pa: points.maximum?.permanentLoss_Pa });
@@ -99,7 +99,7 @@ describe('the temperature upstream', () => {
 });
 
 describe('a temperature that stands as measured downstream', () => {
-  const finding = (meter: Meter) => solved(meter).checks.find(({ id }) => id === 'temperature-downstream');
+  const finding = (meter: MeterText) => solved(meter).checks.find(({ id }) => id === 'temperature-downstream');
   const stated = { kind: 'stated', density: '5 kg/m3', viscosity: '0.01 cP', isentropicExponent: 1.3 };
 
   it('is a caution where no coefficient is known', () => {
@@ -111,7 +111,7 @@ describe('a temperature that stands as measured downstream', () => {
 
   it('is a caution on the saturation line', () => {
     const wet = { ...steam, fluid: { kind: 'water', quality: '97 %' }, upstream: { pressure: '10 bar(g)' } };
-    expect(finding(behind(wet as unknown as Meter))).toMatchObject({ detail: { why: 'on-saturation-line' } });
+    expect(finding(behind(wet))).toMatchObject({ detail: { why: 'on-saturation-line' } });
   });
 
   it('is silent where it was corrected or measured upstream', () => {
@@ -123,7 +123,7 @@ describe('a temperature that stands as measured downstream', () => {
   it('is refused where it is neither', () => {
     const meter = { ...gas, upstream: { ...gas.upstream, temperatureAt: 'here' } };
     expect(refusal(meter)).toEqual(['choice-unknown at upstream.temperatureAt']);
-    expect(answer(behind(water as unknown as Meter)).status).toBe('solved');
+    expect(answer(behind(water)).status).toBe('solved');
   });
 });
 

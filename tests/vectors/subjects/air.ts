@@ -3,13 +3,13 @@ import { airState } from '../../../src/core/fluid/air/air.ts';
 import { R } from '../../../src/core/fluid/air/cipm.table.ts';
 import { molarMassOfDryAir } from '../../../src/core/fluid/air/cipm.ts';
 import type { Moisture } from '../../../src/core/fluid/air/moisture.ts';
-import { grs80, normalGravity, standardAtmosphere, wgs84 } from '../../../src/core/fluid/atmosphere.ts';
 import { gaugeWaterDensity, mercuryDensity } from '../../../src/core/fluid/gauge-liquid.ts';
 import { mixtureOf } from '../../../src/core/fluid/gerg/mixture.ts';
 import { componentNames } from '../../../src/core/fluid/helmholtz/components.ts';
 import { gasDensity } from '../../../src/core/fluid/helmholtz/density.ts';
 import { isothermOf } from '../../../src/core/fluid/helmholtz/isotherm.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
+import { grs80, normalGravity, standardAtmosphere, wgs84 } from '../../../src/core/quantity/place.ts';
 
 type Given = Record<string, number | string>;
 type Subject = (given: Given) => Record<string, number>;

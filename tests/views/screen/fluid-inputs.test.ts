@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { unitOf } from '../../../src/core/quantity/units.ts';
+import { solveSite } from '../../../src/core/run/site.ts';
 import { solveTraverse } from '../../../src/core/run/traverse.ts';
 import { solveMeter } from '../../../src/core/run.ts';
 import { createWorkbench } from '../../../src/state/create.ts';
@@ -131,7 +132,7 @@ describe('base states', () => {
     expect(baseStateNamed({ temperature: '16 degC', pressure: '1 bar(a)' })).toBe('');
   });
   it('of the list can all be computed', () => {
-    const store = createWorkbench({ solveMeter, solveTraverse });
+    const store = createWorkbench({ solveMeter, solveTraverse, solveSite });
     const meter = {
       fluid: { kind: 'gas', composition: { methane: '100 %' } },
       upstream: { pressure: '8 bar(g)', temperature: '15 degC' },

@@ -1,6 +1,7 @@
 /** A workbench with one meter to be turned round, solved by the real core. */
 
 import type { MeterText } from '../../../src/core/document/project.ts';
+import { solveSite } from '../../../src/core/run/site.ts';
 import { solveTraverse } from '../../../src/core/run/traverse.ts';
 import { solveMeter } from '../../../src/core/run.ts';
 import { createWorkbench } from '../../../src/state/create.ts';
@@ -17,7 +18,7 @@ export const feedWater: MeterText = {
 };
 
 export function openMeter(meter: MeterText = feedWater) {
-  const store = createWorkbench({ solveMeter, solveTraverse });
+  const store = createWorkbench({ solveMeter, solveTraverse, solveSite });
   store.getState().open({ format: 'headwright', version: 1, meters: [meter] }, '');
   const solved = () => {
     const result = store.getState().results.results[0];

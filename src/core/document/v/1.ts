@@ -188,7 +188,13 @@ export interface ProjectV1 {
   revision?: string;
   preparedBy?: string;
   checkedBy?: string;
-  site?: { atmosphere?: string; gravity?: string; [key: string]: unknown };
+  site?: {
+    atmosphere?: string;
+    gravity?: string;
+    altitude?: string; // above the sea; the atmosphere follows from it where none is stated
+    latitude?: string; // '52.1 deg', south negative; gravity follows from it where none is stated
+    [key: string]: unknown;
+  };
   base?: { pressure?: string; temperature?: string; [key: string]: unknown };
   display?: Display;
   /** Anything may stand in the list: what is no meter is refused where it stands, the others are solved. */

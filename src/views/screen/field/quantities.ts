@@ -64,6 +64,8 @@ export const QUANTITIES: Readonly<Record<string, QuantityKind>> = {
   'uncertainty.density': share,
   'site.atmosphere': absolute,
   'site.gravity': kind(['acceleration'], 'm/s2', 'm/s2'),
+  'site.altitude': kind(['length'], 'm', 'ft'),
+  'site.latitude': kind(['angle'], 'deg', 'deg'),
   'base.pressure': absolute,
   'base.temperature': temperature,
 };

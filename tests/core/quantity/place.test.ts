@@ -1,8 +1,6 @@
-/** What a site suggests, and the liquids of its gauges. */
+/** The standard atmosphere and normal gravity of a place. */
 import { describe, expect, it } from 'vitest';
-import { normalGravity, standardAtmosphere } from '../../../src/core/fluid/atmosphere.ts';
-import { gaugeWaterDensity, mercuryDensity } from '../../../src/core/fluid/gauge-liquid.ts';
-import { as } from '../../../src/core/quantity/brand.ts';
+import { normalGravity, standardAtmosphere } from '../../../src/core/quantity/place.ts';
 
 const air = (z: number) => {
   const found = standardAtmosphere(z, 'site.altitude');
@@ -42,17 +40,5 @@ describe('normal gravity', () => {
 
   it('falls by 3.086e-6 per second squared for each metre', () => {
     expect(normalGravity(0.785, 1000) - normalGravity(0.785)).toBeCloseTo(-3.086e-3, 5);
-  });
-});
-
-describe('liquids of gauges', () => {
-  it('are denser under pressure and lighter when warm', () => {
-    const [cold, warm] = [as<'temperature'>(283.15), as<'temperature'>(303.15)];
-    for (const density of [mercuryDensity, gaugeWaterDensity]) {
-      expect(density(warm)).toBeLessThan(density(cold));
-      expect(density(cold, as<'absolute pressure'>(1e7))).toBeGreaterThan(density(cold));
-    }
-    // IAPWS-95: water at 20 degC is 1002.7 kg/m3 at 10 MPa.
-    expect(gaugeWaterDensity(as<'temperature'>(293.15), as<'absolute pressure'>(1e7))).toBeCloseTo(1002.7, 0);
   });
 });

@@ -1,18 +1,19 @@
 /**
- * What a site suggests: the pressure of the standard atmosphere at its altitude, and normal gravity at its latitude and
- * height. Suggestions only: the weather moves the pressure by 3 %, the ground gravity by up to 0.02 %.
+ * What a place on Earth has instead of the two constants: the pressure of the standard atmosphere at its altitude, and
+ * normal gravity at its latitude and height. The weather moves the pressure by 3 %, the ground gravity by up to 0.02 %.
  * Standard: ISO 2533:1975 (ICAO Doc 7488) to 47 km; GRS 80 (Moritz, J. Geodesy 74 (2000) 128). Symbols: theirs; SI.
  */
-import { standardGravity as g0, standardAtmosphere as seaLevel } from '../quantity/constants.ts';
-import type {
-  AbsolutePressure,
-  Acceleration,
-  Density,
-  DynamicViscosity,
-  Temperature,
-  Velocity,
-} from '../quantity/kinds.ts';
-import { fail, type Outcome, ok } from '../quantity/outcome.ts';
+import { standardGravity as g0, standardAtmosphere as seaLevel } from './constants.ts';
+import type { AbsolutePressure, Acceleration, Density, DynamicViscosity, Temperature, Velocity } from './kinds.ts';
+import { fail, type Outcome, ok } from './outcome.ts';
+import type { Source } from './source.ts';
+
+/** Where the atmosphere of an altitude, and gravity at a latitude, come from. */
+export const atmosphereSource: Source = { clause: 'ISO 2533:1975, standard atmosphere', seen: 'second-hand' };
+export const gravitySource: Source = {
+  clause: 'normal gravity of GRS 80, Moritz, J. Geodesy 74 (2000) 128',
+  seen: 'second-hand',
+};
 
 /** The air of the standard atmosphere at one altitude. */
 export interface StandardAir {
