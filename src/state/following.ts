@@ -1,6 +1,7 @@
 /** The layer that keeps results, selection and the offer to undo a deletion in step with the project, in one change. */
 import type { StateCreator, StoreMutatorIdentifier } from 'zustand/vanilla';
 import type { Project } from '../core/document/project.ts';
+import type { SolvedTraverse } from '../core/result/record.ts';
 import { type Core, createDerive, lastSolvedOf } from './derive.ts';
 import { itemsIn, type ListName, standingOf } from './lists.ts';
 import type { Workbench } from './workbench.ts';
@@ -38,7 +39,7 @@ function createFollow(core: Core): (state: Workbench, change: Partial<Workbench>
       ...change,
       results,
       lastSolved: lastSolvedOf(change.lastSolved ?? state.lastSolved, keys, results.results),
-      lastSurveyed: lastSolvedOf(change.lastSurveyed ?? state.lastSurveyed, traverseKeys, results.traverses),
+      lastSurveyed: lastSolvedOf<SolvedTraverse>(change.lastSurveyed ?? state.lastSurveyed, traverseKeys, results.traverses),
     };
   };
 }

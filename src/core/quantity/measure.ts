@@ -7,6 +7,7 @@ import type { Source } from './source.ts';
  */
 export type Measure =
   | 'length'
+  | 'area'
   | 'bores' // straight lengths as a multiple of the pipe bore D
   | 'absolute pressure'
   | 'gauge pressure'

@@ -112,6 +112,12 @@ export const UNIT_ROWS: Readonly<Record<Measure, readonly Row[]>> = {
     { symbol: 'ft', print: 'ft', words: 'foot', factor: 'ft' },
     { symbol: 'uin', print: 'µin', words: 'microinch', factor: 'micro * in' },
   ],
+  area: [
+    { symbol: 'm2', print: 'm²', words: 'square metre', factor: 'm * m' },
+    { symbol: 'cm2', print: 'cm²', words: 'square centimetre', factor: 'centi * m * centi * m' },
+    { symbol: 'ft2', print: 'ft²', words: 'square foot', factor: 'ft * ft' },
+    { symbol: 'in2', print: 'in²', words: 'square inch', factor: 'in * in' },
+  ],
   bores: [{ symbol: 'D', print: 'D', words: 'pipe bore', factor: 'one' }],
   'absolute pressure': referenced('(a)', 'absolute'),
   'gauge pressure': referenced('(g)', 'gauge'),

@@ -168,7 +168,13 @@ export interface SolvedTraverse extends TraverseFigures {
   readonly state: StateRecord;
 }
 
-export type TraverseResult = SolvedTraverse | Refused;
+/** A traverse that was not solved. */
+export interface RefusedTraverse extends Refused {
+  /** Where readings alone stand in the way: the traverse as it is without them. */
+  readonly besides?: SolvedTraverse;
+}
+
+export type TraverseResult = SolvedTraverse | RefusedTraverse;
 
 export interface Results {
   readonly results: readonly MeterResult[];

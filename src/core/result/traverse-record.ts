@@ -1,5 +1,6 @@
 /** What the record of a traverse holds beside its tag and its fluid's state. A number that does not apply is absent. */
 import type { Finding } from '../check/finding.ts';
+import type { Unchecked } from '../check/unchecked.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Working } from '../quantity/working.ts';
 
@@ -37,6 +38,10 @@ export interface SuggestionRecord {
 }
 
 export interface QualityRecord {
+  /** Mean by the weights of the points that are read so far, before the factor of the wall. */
+  readonly meanSoFar_m_s: number;
+  readonly leastVelocity_m_s: number;
+  readonly mostVelocity_m_s: number;
   readonly scatter_percent?: number;
   /** Between the means of the lines. */
   readonly lines_percent?: number;
@@ -93,6 +98,8 @@ export interface TraverseFigures {
   readonly quality?: QualityRecord;
   readonly uncertainty?: TraverseUncertaintyRecord;
   readonly checks: readonly Finding[];
+  /** Checks that could not be made, and the field each would need. */
+  readonly unchecked: readonly Unchecked[];
   readonly working: readonly Working[];
   /** Every source behind the plan and the checks, worst `seen` first, each once. */
   readonly sources: readonly Source[];

@@ -1,5 +1,6 @@
 /** Puts a surveyed traverse together into the record that every view reads. */
 import type { Finding } from '../check/finding.ts';
+import { uncheckedTraverse } from '../check/traverse-unchecked.ts';
 import type { TraverseText } from '../document/project.ts';
 import type { TraverseInput } from '../input/traverse.ts';
 import type { Section } from '../input/traverse-section.ts';
@@ -55,6 +56,7 @@ export function assembleTraverse(parts: TraverseParts): SolvedTraverse {
     ...(quality === undefined ? {} : { quality: qualityRecord(quality, input, survey) }),
     ...(budget === undefined ? {} : { uncertainty: uncertaintyRecord(budget) }),
     checks,
+    unchecked: uncheckedTraverse(input),
     working,
     sources: sourcesOnce(
       sourcesOf(survey, [...working, ...checks, ...suggestions, ...(budget === undefined ? [] : [budget])]),
@@ -115,6 +117,9 @@ function qualityRecord(quality: Quality, { rule }: TraverseInput, { plan }: Surv
   };
   return {
     ...Object.fromEntries(Object.entries(optional).filter(([, value]) => value !== undefined)),
+    meanSoFar_m_s: quality.meanVelocity,
+    leastVelocity_m_s: quality.leastVelocity,
+    mostVelocity_m_s: quality.mostVelocity,
     strongReadings_percent: quality.strongPercent,
     reversedReadings: quality.reversed,
     stillReadings: quality.still,

@@ -25,7 +25,24 @@ export function solveTraverse(
   const tag = tagOf(traverse, index);
   if (solved.ok) return { ...solved.value, tag };
   const [first, ...rest] = solved.problems;
-  return refused(tag, [placed(first, index), ...rest.map((problem) => placed(problem, index))]);
+  const refusal = refused(tag, [placed(first, index), ...rest.map((problem) => placed(problem, index))]);
+  const others = besides(traverse, solved.problems, project);
+  return others === undefined ? refusal : { ...refusal, besides: { ...others, tag } };
+}
+
+/** The traverse without the readings that stand in the way, so that one slip of the keys does not hide the others. */
+function besides(
+  traverse: TraverseText,
+  problems: readonly Problem[],
+  project: Pick<Project, 'site' | 'base'>,
+): SolvedTraverse | undefined {
+  const wrong = new Set(problems.map(({ field }) => field));
+  if (![...wrong].every((field) => /^readings\.\d+\.\d+$/.test(field))) return undefined;
+  const readings = (traverse.readings ?? []).map((line, at) =>
+    line.map((text, point) => (wrong.has(`readings.${at}.${point}`) ? '' : text)),
+  );
+  const others = survey({ ...traverse, readings }, project);
+  return others.ok ? others.value : undefined;
 }
 
 /** What is no traverse at all is named by its place in the list. */

@@ -23,6 +23,8 @@ export interface Quality {
   readonly linesPercent?: number;
   /** What the root of the mean differential is above the mean of the roots. */
   readonly differentialAveragingPercent?: number;
+  /** Mean by the weights of what is read so far. */
+  readonly meanVelocity: Velocity;
   readonly leastVelocity: Velocity;
   readonly mostVelocity: Velocity;
   /** Largest less smallest root of the reference readings, over their mean. */
@@ -50,6 +52,7 @@ export function qualityOf({ measured, lines, reference, complete }: Survey): Qua
     ...figure('sensitivity', sensitivity(differentials)),
     ...figure('linesPercent', spread.linesPercent),
     ...figure('driftPercent', reference.length > 1 ? rangePercent(reference.map(root)) : undefined),
+    meanVelocity: weighted(measured, ({ velocity }) => velocity) as Velocity,
     leastVelocity: Math.min(...velocities) as Velocity,
     mostVelocity: Math.max(...velocities) as Velocity,
   };

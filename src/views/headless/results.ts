@@ -3,11 +3,12 @@ import type { MeterText, Project } from '../../core/document/project.ts';
 import type { MeterResult, PointRecord, Refused, Results, Solved } from '../../core/result/record.ts';
 import { contextOf } from '../present/context.ts';
 import { inputsHash } from '../present/hash.ts';
+import { surveyContext } from '../present/survey-list.ts';
 import type { Print } from '../words/print.ts';
 import { type Problem, problemSentence } from '../words/problems.ts';
 import { dutyNames } from '../words/verdicts.ts';
 import { type Asked, checkOf } from './checks.ts';
-import { traverseOf, unitsLike } from './traverses.ts';
+import { traverseOf } from './traverses.ts';
 
 /** The whole output; its keys keep this order. */
 export function resultsOf(project: Project, results: Results, asked: Asked): object {
@@ -21,8 +22,10 @@ export function resultsOf(project: Project, results: Results, asked: Asked): obj
       return { ...meterOf(result, print, asked), inputs: inputsHash(meter, project) };
     }),
     traverses: results.traverses.map((traverse, index) => {
-      const { print } = contextOf(unitsLike(project.traverses?.[index]), project);
-      return traverse.status === 'refused' ? refusedOf(traverse, print) : traverseOf(traverse, print, asked);
+      const written = project.traverses?.[index];
+      const { print } = surveyContext(written, project);
+      const own = traverse.status === 'refused' ? refusedOf(traverse, print) : traverseOf(traverse, print, asked);
+      return { ...own, inputs: inputsHash(written ?? {}, project) };
     }),
   };
 }

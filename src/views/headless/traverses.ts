@@ -1,5 +1,4 @@
 /** A traverse as the file contract writes it. Velocities are listed once every point is read; until then by point. */
-import type { MeterText, TraverseText } from '../../core/document/project.ts';
 import type { SolvedTraverse } from '../../core/result/record.ts';
 import type { Print } from '../words/print.ts';
 import { type Asked, checkOf } from './checks.ts';
@@ -42,15 +41,6 @@ const sourced = <Figure extends { readonly source: SolvedTraverse['sources'][num
   source: source.clause,
   seen: source.seen,
 });
-
-/** A meter whose units are those of the traverse: differentials as they were read, pascal before anything is. */
-export function unitsLike(traverse: TraverseText | undefined): MeterText {
-  if (typeof traverse !== 'object' || traverse === null) return {};
-  const { readings, state } = traverse;
-  const lines = Array.isArray(readings) ? readings.flat() : [];
-  const differential = lines.find((reading) => typeof reading === 'string' && reading.trim() !== '') ?? '0 Pa';
-  return typeof state === 'object' && state !== null ? { differential, upstream: state } : { differential };
-}
 
 /** The points that are read so far, where not all of them are. */
 const readOf = ({ lines }: SolvedTraverse): object[] =>

@@ -8,7 +8,10 @@ import type { Context } from './context.ts';
 import type { CheckGroup, CheckRow, Finding } from './model.ts';
 
 /** Assumptions with neither a check nor one that is open are left out. */
-export function checkGroups(at: Context, result: Solved): readonly CheckGroup[] {
+export function checkGroups(
+  at: Pick<Context, 'print'>,
+  result: Pick<Solved, 'checks' | 'unchecked'>,
+): readonly CheckGroup[] {
   const rows = result.checks.map((finding) => ({ assumption: finding.assumption, row: checkRow(at, finding) }));
   return assumptions.flatMap(({ assumption, title, meaning }) => {
     const own = rows.filter((row) => row.assumption === assumption).map(({ row }) => row);
@@ -21,7 +24,7 @@ export function checkGroups(at: Context, result: Solved): readonly CheckGroup[] 
   });
 }
 
-function checkRow(at: Context, finding: Finding): CheckRow {
+function checkRow(at: Pick<Context, 'print'>, finding: Finding): CheckRow {
   const { id, verdict, source, at: name } = finding;
   return {
     id,

@@ -1,12 +1,12 @@
 /**
- * A short fingerprint of the inputs of one meter, printed on its sheet and beside its result: two papers with the same
+ * A short fingerprint of the inputs of one meter or survey, printed on its sheet and beside its result: two papers with the same
  * fingerprint were computed from the same inputs. It tells inputs apart; it is no seal against forgery.
  */
-import type { MeterText, Project } from '../../core/document/project.ts';
+import type { MeterText, Project, TraverseText } from '../../core/document/project.ts';
 
-/** Twelve hexadecimal digits over the meter, the site and the base state; the order of keys does not matter. */
-export function inputsHash(meter: MeterText, { site, base }: Pick<Project, 'site' | 'base'>): string {
-  const hash = fnv1a(canonical({ meter, site, base }));
+/** Twelve hexadecimal digits over the meter or traverse, the site and the base state; the order of keys does not matter. */
+export function inputsHash(item: MeterText | TraverseText, { site, base }: Pick<Project, 'site' | 'base'>): string {
+  const hash = fnv1a(canonical({ meter: item, site, base }));
   return ((hash >> 48n) ^ (hash & 0xffffffffffffn)).toString(16).padStart(12, '0'); // RFC 9923: folded to 48 bits
 }
 

@@ -46,7 +46,7 @@ export interface Printer {
   readonly print: Print;
 }
 
-const plainRoles: readonly Role[] = ['reynolds', 'ratio', 'coefficient', 'factor', 'number'];
+const plainRoles: readonly Role[] = ['reynolds', 'ratio', 'coefficient', 'factor', 'count', 'number'];
 
 export function printer(units: DisplayUnits): Printer {
   const unitOf = (role: Role): Unit | undefined => (isPlain(role) ? undefined : units[role]);

@@ -37,6 +37,9 @@ const rounding: Readonly<Record<Role, Rounding>> = {
   factor: { decimals: 4 },
   percent: { significant: 3 },
   uncertainty: { significant: 2 },
+  depth: { significant: 4 },
+  area: { significant: 4 },
+  count: { decimals: 0 },
   bores: { significant: 3, trim: true },
   number: { significant: 4 },
 };
@@ -44,9 +47,12 @@ const rounding: Readonly<Record<Role, Rounding>> = {
 /** A workshop reads a diameter to the hundredth of a millimetre, whatever its size. */
 const boreDecimals: Readonly<Record<string, number>> = { mm: 2, cm: 3, m: 5, in: 4, ft: 5 };
 
+/** A mark on a tube is set by a rule with divisions. */
+const depthDecimals: Readonly<Record<string, number>> = { mm: 1, cm: 2, m: 4, in: 2, ft: 3 };
+
 /** The rule for one role in the unit shown. */
 export function roundingOf(role: Role, unit: string): Rounding {
-  const decimals = role === 'bore' ? boreDecimals[unit] : undefined;
+  const decimals = role === 'bore' ? boreDecimals[unit] : role === 'depth' ? depthDecimals[unit] : undefined;
   return decimals === undefined ? rounding[role] : { decimals };
 }
 

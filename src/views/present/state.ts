@@ -10,6 +10,8 @@ import { pressureMeasures } from './units.ts';
 
 type Id = keyof typeof stateLabels;
 
+/** What a fluid's state is shown from: a meter, or a survey. */
+type Stated = Pick<Solved, 'state' | 'working'>;
 const symbols: Readonly<Record<Id, string>> = {
   pressure: 'p_1',
   temperature: 'T_1',
@@ -32,7 +34,7 @@ function noteOn(id: string, { uncertainty_percent: known }: Solved['state'], at:
 }
 
 /** As written, or as found from what was measured behind the element. */
-function temperatureRow(at: Context, { state, working }: Solved): Row {
+function temperatureRow(at: Context, { state, working }: Stated): Row {
   const { downstream, temperature_K: upstream } = state;
   const written = (si: number) => at.given(at.meter.upstream?.temperature, ['temperature'], si, 'temperature');
   const row = { id: 'temperature', label: stateLabels.temperature, symbol: symbols.temperature } as const;
@@ -48,7 +50,21 @@ function temperatureRow(at: Context, { state, working }: Solved): Row {
   };
 }
 
-export function stateRows(at: Context, result: Solved): readonly Row[] {
+/** Where the formulation of a figure holds. */
+function rangeOn(id: string, { ranges }: Solved['state'], { print }: Context): Pick<Row, 'range'> {
+  const range = ranges?.[id];
+  if (range === undefined) return {};
+  const { minTemperature_K, maxTemperature_K, minPressure_Pa, maxPressure_Pa } = range;
+  const bounds = (min: number | undefined, max: number | undefined, role: Role): string =>
+    boundsText({ ...(min === undefined ? {} : { min }), ...(max === undefined ? {} : { max }) }, (bound) =>
+      print.limit(bound, role),
+    );
+  const temperature = bounds(minTemperature_K, maxTemperature_K, 'temperature');
+  const pressure = bounds(minPressure_Pa, maxPressure_Pa, 'pressure');
+  return { range: holdsFor([temperature, pressure].filter((text) => text !== '')) };
+}
+
+export function stateRows(at: Context, result: Stated): readonly Row[] {
   const { state, working } = result;
   const { upstream } = at.meter;
   const liquid = state.phase === 'liquid';

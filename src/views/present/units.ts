@@ -8,7 +8,7 @@ import { type Measure, type Unit, unitOf } from '../../core/quantity/units.ts';
 import type { Role } from '../words/print.ts';
 
 /** The roles that have a unit; the others are plain numbers. */
-export type UnitRole = Exclude<Role, 'reynolds' | 'ratio' | 'coefficient' | 'factor' | 'number'>;
+export type UnitRole = Exclude<Role, 'reynolds' | 'ratio' | 'coefficient' | 'factor' | 'count' | 'number'>;
 /** `flow` is the measure and unit in which the flows of this meter are shown. */
 export type DisplayUnits = Readonly<Record<UnitRole, Unit>> & { readonly flow: Unit };
 
@@ -34,6 +34,8 @@ const usual: Readonly<Record<UnitRole, Usual>> = {
   molarMass: ['molar mass', 'kg/kmol', 'lb/lbmol'],
   percent: ['share', '%', '%'],
   uncertainty: ['share', '%', '%'],
+  depth: ['length', 'mm', 'in'],
+  area: ['area', 'm2', 'ft2'],
   bores: ['bores', 'D', 'D'],
 };
 

@@ -2,9 +2,12 @@
 import { useDeferredValue } from 'react';
 import type { MeterText, Project } from '../../core/document/project.ts';
 import type { MeterResult } from '../../core/result/record.ts';
-import type { PresentedMeter, PresentedSizing } from '../present/model.ts';
+import { type ListName, standingOf } from '../../state/lists.ts';
+import type { Workbench } from '../../state/workbench.ts';
+import type { PresentedMeter, PresentedProblem, PresentedSizing } from '../present/model.ts';
 import { useWorkbench } from './binding.tsx';
-import { isSizing, presented, presentedEarlier } from './presented.ts';
+import { useHand, useItem } from './hand.tsx';
+import { isSizing, listed, presented, presentedEarlier } from './presented.ts';
 import { textAt } from './text.ts';
 
 export interface SelectedMeter {
@@ -40,19 +43,41 @@ export function useSelectedMeter(): SelectedMeter | undefined {
 /** A part of the result that may be drawn a moment later than the figures. */
 export const useLater = <Part>(part: Part): Part => useDeferredValue(part);
 
-/** The text of one field of the selected meter. */
+/** The text of one field of the item at hand. */
 export const useMeterText = (path: string): string =>
-  useWorkbench((state) => textAt(state.project.meters[state.selected], path));
+  useItem((item) => textAt(item, path));
 
-/** The sentence of the problem at a field of the selected meter, undefined when there is none. */
-export const useProblem = (path: string): string | undefined =>
-  useWorkbench((state) => {
-    const meter = state.project.meters[state.selected];
-    const result = state.results.results[state.selected];
-    if (meter === undefined || result === undefined || result.status === 'solved') return undefined;
-    return presented(meter, state.project, result).problems.find((problem) => problem.field === path)?.sentence;
+const NONE: readonly PresentedProblem[] = [];
+
+/** What stands in the way of the item at hand. */
+export function useProblems(): readonly PresentedProblem[] {
+  const list = useHand();
+  return useWorkbench((state) => problemsOf(state, list));
+}
+
+function problemsOf({ project, results, ...at }: Workbench, list: ListName): readonly PresentedProblem[] {
+  const { selected } = standingOf(at, list);
+  if (list === 'traverses') {
+    const [traverse, result] = [project.traverses?.[selected], results.traverses[selected]];
+    return traverse === undefined || result === undefined ? NONE : listed(traverse, project, result).problems;
+  }
+  const [meter, result] = [project.meters[selected], results.results[selected]];
+  if (meter === undefined || result === undefined || result.status === 'solved') return NONE;
+  return presented(meter, project, result).problems;
+}
+
+/** The sentence of the problem at a field of the item at hand, undefined when there is none. */
+export function useProblem(path: string): string | undefined {
+  const list = useHand();
+  return useWorkbench((state) => problemsOf(state, list).find((problem) => problem.field === path)?.sentence);
+}
+
+/** True until the item at hand has been solved once: an empty field is then no fault yet. */
+export function useUntried(): boolean {
+  const list = useHand();
+  return useWorkbench((state) => {
+    const { keys, selected } = standingOf(state, list);
+    const last = list === 'meters' ? state.lastSolved : state.lastSurveyed;
+    return last[keys[selected] ?? ''] === undefined;
   });
-
-/** True until the selected meter has been solved once: an empty field is then no fault yet. */
-export const useUntried = (): boolean =>
-  useWorkbench(({ keys, selected, lastSolved }) => lastSolved[keys[selected] ?? ''] === undefined);
+}

@@ -26,6 +26,9 @@ export type Role =
   | 'factor'
   | 'percent' // the figure is a percentage
   | 'uncertainty' // the same, of a flow
+  | 'depth' // of a point, as a mark on a tube
+  | 'area'
+  | 'count' // whole
   | 'bores' // multiples of the pipe bore
   | 'number';
 
@@ -61,6 +64,9 @@ const siUnits: Readonly<Record<Role, string>> = {
   factor: '',
   percent: '%',
   uncertainty: '%',
+  depth: 'm',
+  area: 'm²',
+  count: '',
   bores: 'D',
   number: '',
 };

@@ -80,6 +80,7 @@ const temperatures = { K: one, degC: one, degF: fahrenheit, degR: fahrenheit };
 
 const recomputed: Record<Measure, Record<string, Whole>> = {
   length: { m: one, cm: centi, mm: milli, um: micro, in: inch, ft: foot, uin: times(micro, inch) },
+  area: { m2: one, cm2: times(centi, centi), ft2: times(foot, foot), in2: times(inch, inch) },
   bores: { D: one },
   'absolute pressure': marked('(a)'),
   'gauge pressure': marked('(g)'),

@@ -7,6 +7,7 @@ import { useMeterText, useProblem } from '../meter.ts';
 import styles from './box.module.css';
 import { Frame } from './Frame.tsx';
 import { useFieldState } from './useFieldState.ts';
+import { useWrite } from '../hand.tsx';
 
 interface Props {
   readonly path: string;
@@ -19,7 +20,7 @@ interface Props {
 export function ChoiceField({ path, label = fieldLabel(path), choices, open }: Props) {
   const text = useMeterText(path);
   const problem = useProblem(path);
-  const write = useWorkbench((state) => state.write);
+  const write = useWrite();
   const settle = useWorkbench((state) => state.settle);
   const { frame, invalid, box } = useFieldState({ path, text, problem });
   const foreign = text !== '' && !choices.some((choice) => choice.value === text);

@@ -3,6 +3,7 @@ import { fieldLabel } from '../../words/fields.ts';
 import { useWorkbench } from '../binding.tsx';
 import { useMeterText, useProblem } from '../meter.ts';
 import { TextField } from './TextField.tsx';
+import { useWrite } from '../hand.tsx';
 
 interface Props {
   readonly path: string;
@@ -13,7 +14,7 @@ interface Props {
 export function MeterTextField({ path, label = fieldLabel(path), decimal = false }: Props) {
   const text = useMeterText(path);
   const problem = useProblem(path);
-  const write = useWorkbench((state) => state.write);
+  const write = useWrite();
   const settle = useWorkbench((state) => state.settle);
   return (
     <TextField

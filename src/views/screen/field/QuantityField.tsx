@@ -9,6 +9,7 @@ import { Frame } from './Frame.tsx';
 import { UnitOptions } from './UnitOptions.tsx';
 import { useFieldState } from './useFieldState.ts';
 import { type QuantityBinding, useQuantity } from './useQuantity.ts';
+import { useWrite } from '../hand.tsx';
 
 export interface QuantityFieldProps {
   readonly path: string;
@@ -21,7 +22,7 @@ export interface QuantityFieldProps {
 export function QuantityField({ path, ...rest }: QuantityFieldProps) {
   const text = useMeterText(path);
   const problem = useProblem(path);
-  const write = useWorkbench((state) => state.write);
+  const write = useWrite();
   return <QuantityBox path={path} text={text} problem={problem} write={(next) => write(path, next)} {...rest} />;
 }
 

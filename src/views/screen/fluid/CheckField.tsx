@@ -1,12 +1,12 @@
 /** A choice of yes or no; no leaves nothing behind in the document. */
 import { fieldLabel } from '../../words/fields.ts';
 import { useWorkbench } from '../binding.tsx';
-import { valueAt } from '../text.ts';
 import styles from './inputs.module.css';
+import { useWrite, useWritten } from '../hand.tsx';
 
 export function CheckField({ path }: { readonly path: string }) {
-  const checked = useWorkbench((state) => isYes(valueAt(state.project.meters[state.selected], path)));
-  const write = useWorkbench((state) => state.write);
+  const checked = isYes(useWritten(path));
+  const write = useWrite();
   const settle = useWorkbench((state) => state.settle);
   return (
     <label className={styles.check}>

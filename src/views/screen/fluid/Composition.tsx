@@ -2,10 +2,8 @@
 import { useState } from 'react';
 import { compositionSum } from '../../present/composition.ts';
 import { pasteWords, compositionWords as words } from '../../words/fluid-forms.ts';
-import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
 import { Fold } from '../station/Fold.tsx';
-import { valueAt } from '../text.ts';
 import { CompositionPaste } from './CompositionPaste.tsx';
 import { CompositionTable } from './CompositionTable.tsx';
 import { compositionIn, entriesOf } from './composition.ts';
@@ -13,11 +11,12 @@ import styles from './inputs.module.css';
 import { PresetGas } from './PresetGas.tsx';
 import { Problems } from './Problems.tsx';
 import { Sum } from './Sum.tsx';
+import { useWritten } from '../hand.tsx';
 
 const PATH = 'fluid.composition';
 
 export function Composition() {
-  const shares = compositionIn(useWorkbench((state) => valueAt(state.project.meters[state.selected], PATH)));
+  const shares = compositionIn(useWritten(PATH));
   const [pasted, setPasted] = useState<string>();
   const entries = entriesOf(shares);
   const sum = compositionSum(entries.map(({ text }) => text));

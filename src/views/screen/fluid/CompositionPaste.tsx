@@ -2,13 +2,13 @@
 import { useState } from 'react';
 import { compositionSum } from '../../present/composition.ts';
 import { pasteWords as words } from '../../words/fluid-forms.ts';
-import { useWorkbench } from '../binding.tsx';
 import { PastedShares } from './PastedShares.tsx';
 import { PastePanel } from './PastePanel.tsx';
 import styles from './paste.module.css';
 import { type Choices, chosenName, compositionFrom, pastedComposition } from './paste-composition.ts';
 import { Sum } from './Sum.tsx';
 import type { ShareUnit } from './share.ts';
+import { useWriteAll } from '../hand.tsx';
 
 interface Props {
   readonly text: string;
@@ -16,7 +16,7 @@ interface Props {
 }
 
 export function CompositionPaste({ text: pasted, close }: Props) {
-  const writeAll = useWorkbench((state) => state.writeAll);
+  const writeAll = useWriteAll();
   const [text, setText] = useState(pasted);
   const [unit, setUnit] = useState<ShareUnit>();
   const [choices, setChoices] = useState<Choices>({});

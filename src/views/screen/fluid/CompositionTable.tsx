@@ -19,6 +19,7 @@ import {
 import styles from './inputs.module.css';
 import { ShareUnitSelect } from './ShareUnitSelect.tsx';
 import { fileShare, type ShareUnit, shownShare } from './share.ts';
+import { useWrite, useWriteAll } from '../hand.tsx';
 
 const PATH = 'fluid.composition';
 
@@ -28,7 +29,7 @@ interface Props {
 }
 
 export function CompositionTable({ shares, paste }: Props) {
-  const writeAll = useWorkbench((state) => state.writeAll);
+  const writeAll = useWriteAll();
   const [chosen, setChosen] = useState<ShareUnit>();
   const entries = entriesOf(shares);
   const unit = entries.some(({ text }) => text !== '') ? tableUnit(shares) : (chosen ?? '%');
@@ -77,7 +78,7 @@ interface RowProps extends Props {
 }
 
 function Row({ shares, entry: { name, text }, unit, taken, once, paste }: RowProps) {
-  const write = useWorkbench((state) => state.write);
+  const write = useWrite();
   const settle = useWorkbench((state) => state.settle);
   const label = componentLabel(name);
   return (

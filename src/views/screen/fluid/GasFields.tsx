@@ -1,21 +1,18 @@
 /** A gas by its composition, or one gas by its name. */
 import { saturationWords as words } from '../../words/fluid-forms.ts';
 import { basisChoices, gasPhaseChoices } from '../../words/fluids.ts';
-import { useWorkbench } from '../binding.tsx';
 import { useMeterText } from '../meter.ts';
 import { Fold } from '../station/Fold.tsx';
-import { valueAt } from '../text.ts';
 import { CheckField } from './CheckField.tsx';
 import { Composition } from './Composition.tsx';
 import { GasName } from './GasName.tsx';
 import { UsualChoice } from './UsualChoice.tsx';
+import { useWritten } from '../hand.tsx';
 
 export function GasFields() {
   const phase = useMeterText('fluid.phase');
   const name = useMeterText('fluid.name');
-  const composed = useWorkbench(
-    (state) => valueAt(state.project.meters[state.selected], 'fluid.composition') !== undefined,
-  );
+  const composed = useWritten('fluid.composition') !== undefined;
   return (
     <>
       <GasName />

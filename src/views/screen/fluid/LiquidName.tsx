@@ -2,10 +2,9 @@
 import { useState } from 'react';
 import { choiceWords as words } from '../../words/fluid-forms.ts';
 import { liquidGroups, liquidNamed } from '../../words/liquids.ts';
-import { useWorkbench } from '../binding.tsx';
 import { useMeterText } from '../meter.ts';
-import { valueAt } from '../text.ts';
 import { GroupedChoice } from './GroupedChoice.tsx';
+import { useWriteAll, useWritten } from '../hand.tsx';
 
 const PATH = 'fluid.name';
 const OWN = '(table)'; // no name of the list has brackets
@@ -17,7 +16,7 @@ export interface OwnTable {
 }
 
 export function useOwnTable(): OwnTable {
-  const written = useWorkbench((state) => valueAt(state.project.meters[state.selected], 'fluid.table') !== undefined);
+  const written = useWritten('fluid.table') !== undefined;
   const name = useMeterText(PATH);
   const [wanted, want] = useState(false);
   return { chosen: written || (wanted && name === ''), want };
@@ -25,7 +24,7 @@ export function useOwnTable(): OwnTable {
 
 export function LiquidName({ own }: { readonly own: OwnTable }) {
   const name = useMeterText(PATH);
-  const writeAll = useWorkbench((state) => state.writeAll);
+  const writeAll = useWriteAll();
   const choose = (value: string): void => {
     const table = value === OWN;
     own.want(table);

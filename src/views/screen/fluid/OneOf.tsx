@@ -1,10 +1,10 @@
 /** One figure out of several that say the same thing: choosing another way of saying it takes the last one back. */
 import { type ReactNode, useState } from 'react';
 import { fieldLabel } from '../../words/fields.ts';
-import { useWorkbench } from '../binding.tsx';
 import box from '../field/box.module.css';
 import { Frame } from '../field/Frame.tsx';
 import { textAt } from '../text.ts';
+import { useItem, useWriteAll } from '../hand.tsx';
 
 interface Props {
   readonly id: string;
@@ -17,11 +17,8 @@ interface Props {
 }
 
 export function OneOf({ id, label, paths, none, children }: Props) {
-  const written = useWorkbench((state) => {
-    const meter = state.project.meters[state.selected];
-    return paths.filter((path) => textAt(meter, path) !== '').join(' ');
-  });
-  const writeAll = useWorkbench((state) => state.writeAll);
+  const written = useItem((item) => paths.filter((path) => textAt(item, path) !== '').join(' '));
+  const writeAll = useWriteAll();
   const [wanted, setWanted] = useState(none === undefined ? (paths[0] ?? '') : '');
   const given = written === '' ? [] : written.split(' ');
   const chosen = given.includes(wanted) ? wanted : (given[0] ?? wanted);

@@ -1,12 +1,12 @@
 /** The figure that stands in place of the model's, with its unit, and the way back to the model. */
 import { overrideWords as words } from '../../words/fluid-forms.ts';
-import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
 import { MeterTextField } from '../field/MeterTextField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
 import { useMeterText } from '../meter.ts';
 import styles from './override.module.css';
 import { type Override, overridePath } from './overrides.ts';
+import { useWriteAll } from '../hand.tsx';
 
 interface Props {
   readonly name: Override;
@@ -18,7 +18,7 @@ interface Props {
 export function OverrideField({ name, label, cleared }: Props) {
   const path = overridePath(name);
   const text = useMeterText(path);
-  const writeAll = useWorkbench((state) => state.writeAll);
+  const writeAll = useWriteAll();
   const clear = (): void => {
     if (text !== '') writeAll([[path, undefined]]);
     cleared?.();

@@ -1,20 +1,19 @@
 /** An oil: its density at a reference temperature, and its viscosity at one temperature or along a line. */
 import { choiceWords, tableWords } from '../../words/fluid-forms.ts';
-import { useWorkbench } from '../binding.tsx';
 import { MeterTextField } from '../field/MeterTextField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
 import { Fold } from '../station/Fold.tsx';
-import { valueAt } from '../text.ts';
 import { OIL_VISCOSITIES } from './liquid-columns.ts';
 import { OneOf } from './OneOf.tsx';
 import { RowsEditor } from './RowsEditor.tsx';
+import { useWritten } from '../hand.tsx';
 
 const API = 'fluid.apiGravity';
 const DENSITIES = ['fluid.densityAt15', 'fluid.densityAt60F', API] as const;
 const VISCOSITIES = 'fluid.viscosities';
 
 export function PetroleumFields() {
-  const along = useWorkbench((state) => valueAt(state.project.meters[state.selected], VISCOSITIES) !== undefined);
+  const along = useWritten(VISCOSITIES) !== undefined;
   return (
     <>
       <OneOf id="oil-density" label={choiceWords.oilDensity} paths={DENSITIES}>

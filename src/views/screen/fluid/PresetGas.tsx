@@ -2,15 +2,15 @@
 import { gasPresets } from '../../../core/document/gas-presets.table.ts';
 import { compositionWords as words } from '../../words/fluid-forms.ts';
 import { presetLabel } from '../../words/fluids.ts';
-import { useWorkbench } from '../binding.tsx';
 import box from '../field/box.module.css';
 import { Frame } from '../field/Frame.tsx';
 import { inUnit } from './composition.ts';
+import { useWriteAll } from '../hand.tsx';
 
 const ID = 'preset-gas';
 
 export function PresetGas() {
-  const writeAll = useWorkbench((state) => state.writeAll);
+  const writeAll = useWriteAll();
   const take = (name: string): void => {
     const preset = gasPresets.find((candidate) => candidate.name === name);
     if (preset === undefined) return;

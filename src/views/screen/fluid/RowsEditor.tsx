@@ -5,12 +5,13 @@ import { type Unit, unitOf } from '../../../core/quantity/units.ts';
 import { pasteWords } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
-import { textAt, valueAt } from '../text.ts';
+import { textAt } from '../text.ts';
 import styles from './inputs.module.css';
 import { Problems } from './Problems.tsx';
 import { RowsTable } from './RowsTable.tsx';
 import { columnUnit, convertedCell, rowsIn, type TableColumn } from './rows.ts';
 import { TablePaste } from './TablePaste.tsx';
+import { useWriteAll, useWritten } from '../hand.tsx';
 
 interface Props {
   readonly path: string;
@@ -20,9 +21,9 @@ interface Props {
 type Units = Readonly<Record<string, Unit>>;
 
 export function RowsEditor({ path, columns }: Props) {
-  const list = useWorkbench((state) => valueAt(state.project.meters[state.selected], path));
+  const list = useWritten(path);
   const display = useWorkbench((state) => state.project.display ?? 'SI');
-  const writeAll = useWorkbench((state) => state.writeAll);
+  const writeAll = useWriteAll();
   const [chosen, setChosen] = useState<Units>({});
   const [pasted, setPasted] = useState<string>();
   const rows = rowsIn(list);

@@ -3,11 +3,12 @@ import type { Unit } from '../../../core/quantity/units.ts';
 import { tableWords as words } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
-import { textAt, valueAt } from '../text.ts';
+import { textAt } from '../text.ts';
 import { Cell } from './Cell.tsx';
 import { ColumnUnit } from './ColumnUnit.tsx';
 import styles from './inputs.module.css';
 import { fileCell, rowsIn, shownCell, type TableColumn } from './rows.ts';
+import { useWrite, useWriteAll, useWritten } from '../hand.tsx';
 
 interface Props {
   readonly path: string;
@@ -18,7 +19,7 @@ interface Props {
 }
 
 export function RowsTable({ path, columns, units, chooseUnit, paste }: Props) {
-  const count = useWorkbench((state) => rowsIn(valueAt(state.project.meters[state.selected], path)).length);
+  const count = rowsIn(useWritten(path)).length;
   const rows = Array.from({ length: count + 1 }, (_, at) => at); // one more, to be filled
   return (
     <table className={styles.table}>
@@ -48,9 +49,9 @@ interface RowProps extends Omit<Props, 'chooseUnit'> {
 }
 
 function Row({ path, columns, units, at, last, paste }: RowProps) {
-  const row = useWorkbench((state) => valueAt(state.project.meters[state.selected], `${path}.${at}`));
-  const write = useWorkbench((state) => state.write);
-  const writeAll = useWorkbench((state) => state.writeAll);
+  const row = useWritten(`${path}.${at}`);
+  const write = useWrite();
+  const writeAll = useWriteAll();
   const settle = useWorkbench((state) => state.settle);
   return (
     <tr>

@@ -8,6 +8,7 @@ import { useFieldState } from '../field/useFieldState.ts';
 import { useMeterText, useProblem } from '../meter.ts';
 import { convertShare, fileShare, SHARE_UNITS, type ShareUnit, shownShare, unitOfShare } from './share.ts';
 import { useDraft } from './useDraft.ts';
+import { useWrite } from '../hand.tsx';
 
 interface Props {
   readonly path: string;
@@ -17,7 +18,7 @@ interface Props {
 export function ShareField({ path, label = fieldLabel(path) }: Props) {
   const text = useMeterText(path);
   const problem = useProblem(path);
-  const write = useWorkbench((state) => state.write);
+  const write = useWrite();
   const settle = useWorkbench((state) => state.settle);
   const [chosen, setChosen] = useState<ShareUnit>('%');
   const unit = unitOfShare(text) ?? chosen;

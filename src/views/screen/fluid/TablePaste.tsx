@@ -2,11 +2,11 @@
 import { useState } from 'react';
 import type { Unit } from '../../../core/quantity/units.ts';
 import { pasteWords as words } from '../../words/fluid-forms.ts';
-import { useWorkbench } from '../binding.tsx';
 import { PastePanel } from './PastePanel.tsx';
 import styles from './paste.module.css';
 import { pastedTable, type Row } from './paste-table.ts';
 import type { TableColumn } from './rows.ts';
+import { useWriteAll } from '../hand.tsx';
 
 interface Props {
   readonly path: string;
@@ -19,7 +19,7 @@ interface Props {
 }
 
 export function TablePaste({ path, columns, units, text: pasted, close, took }: Props) {
-  const writeAll = useWorkbench((state) => state.writeAll);
+  const writeAll = useWriteAll();
   const [text, setText] = useState(pasted);
   const asked = columns.map(({ name, kind }) => ({ name, measures: kind.measures }));
   const read = pastedTable(text, asked, units);

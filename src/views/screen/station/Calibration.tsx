@@ -2,8 +2,9 @@
 import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
 import { useProblem } from '../meter.ts';
-import { textAt, valueAt } from '../text.ts';
+import { textAt } from '../text.ts';
 import styles from './Calibration.module.css';
+import { useWrite, useWritten } from '../hand.tsx';
 
 const PATH = 'element.calibration';
 const COLUMNS = [
@@ -12,9 +13,8 @@ const COLUMNS = [
 ] as const;
 
 export function Calibration() {
-  const meter = useWorkbench((state) => state.project.meters[state.selected]);
   const problem = useProblem(PATH);
-  const list = valueAt(meter, PATH);
+  const list = useWritten(PATH);
   const count = Array.isArray(list) ? list.length : 0;
   const rows = Array.from({ length: count + 1 }, (_, at) => at); // one more, to be filled
   return (
@@ -41,8 +41,8 @@ export function Calibration() {
 }
 
 function CalibrationRow({ at, last }: { readonly at: number; readonly last: boolean }) {
-  const row = useWorkbench((state) => valueAt(state.project.meters[state.selected], `${PATH}.${at}`));
-  const write = useWorkbench((state) => state.write);
+  const row = useWritten(`${PATH}.${at}`);
+  const write = useWrite();
   const settle = useWorkbench((state) => state.settle);
   const path = `${PATH}.${at}`;
   return (
