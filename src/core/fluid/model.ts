@@ -80,6 +80,15 @@ export interface Paths {
   readonly own: (name: string) => string;
 }
 
+/**
+ * Where a formulation changes or bends: between two neighbouring pressures, Pa, and temperatures, K, every figure runs
+ * smoothly as long as the phase stays.
+ */
+export interface Seams {
+  readonly pressure: readonly number[];
+  readonly temperature: readonly number[];
+}
+
 /** One kind of fluid. */
 export interface FluidModel {
   readonly kind: string;
@@ -90,6 +99,8 @@ export interface FluidModel {
    */
   readonly complete?: (parsed: Parsed, known: Partial<State>, paths: Paths) => Outcome<State>;
   readonly state: (parsed: Parsed, conditions: Conditions) => Outcome<FluidState>;
+  /** Absent where there are none. */
+  readonly seams?: (parsed: Parsed) => Seams;
 }
 
 /** Pressure and temperature where both must be given. Problem field-missing for each that is not. */

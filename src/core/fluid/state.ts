@@ -3,7 +3,7 @@ import type { FluidText } from '../document/project.ts';
 import type { AbsolutePressure } from '../quantity/kinds.ts';
 import { fail, gather, type Outcome } from '../quantity/outcome.ts';
 import type { FluidState } from './contract.ts';
-import { bothOf, type FluidModel, type Parsed, type Paths, type State } from './model.ts';
+import { bothOf, type FluidModel, type Parsed, type Paths, type Seams, type State } from './model.ts';
 import { fluids } from './registry.ts';
 import { parseFields } from './state-fields.ts';
 import { override, readOverride } from './state-override.ts';
@@ -40,6 +40,14 @@ export function stateOf(
   if (!at.ok) return at;
   const state = model.value.state(parsed.value, { ...at.value, base, paths });
   return state.ok && stated.value !== undefined ? override(state.value, stated.value, field) : state;
+}
+
+/** Where the formulation of a fluid changes or bends; none of a fluid that cannot be read. */
+export function seamsOf(fluid: FluidText, atmosphere: AbsolutePressure): Seams {
+  const none: Seams = { pressure: [], temperature: [] };
+  const model = modelOf(fluid, 'fluid');
+  const parsed = model.ok ? parseFields(fluid, model.value.fields, atmosphere, 'fluid') : model;
+  return (parsed.ok && model.ok ? model.value.seams?.(parsed.value) : undefined) ?? none;
 }
 
 /** Pressure and temperature of the state: as given, or as the fluid ties one to the other. */

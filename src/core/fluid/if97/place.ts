@@ -26,7 +26,8 @@ export const bounds = {
   hot: 1073.15,
 } as const;
 
-const between1And3 = 623.15; // K
+/** From here region 3 lies between liquid and vapour, K. */
+export const between1And3 = 623.15; // IAPWS R7-97(2012), Fig. 1
 const between2And3 = 863.15; // K: from here region 2 reaches to 100 MPa
 
 /** The pressure at which the saturation line begins, at 273.15 K, Pa. IAPWS R7-97(2012), text beside Eq. 30. */

@@ -73,6 +73,10 @@ export function inhibitedGlycol(
   return ok(liquidOf(name, row, columns, between));
 }
 
+/** Temperatures of the table of a glycol, K, between which it runs straight; none of another name. */
+export const inhibitedTemperatures = (name: string | undefined): readonly number[] =>
+  (glycols.find((candidate) => candidate.name === name)?.temperature ?? []).map(kelvin);
+
 function liquidOf(
   name: string,
   { density, viscosity, temperature }: (typeof glycols)[number],

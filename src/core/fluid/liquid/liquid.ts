@@ -10,13 +10,13 @@ import { liquidCautions } from './cautions.ts';
 import type { Liquid } from './contract.ts';
 import { electrolyte } from './electrolyte.ts';
 import { figuresOf } from './figures.ts';
-import { inhibitedGlycol } from './inhibited-glycol.ts';
+import { inhibitedGlycol, inhibitedTemperatures } from './inhibited-glycol.ts';
 import { liquidNames } from './names.ts';
 import { petroleum, products } from './petroleum.ts';
 import { pureLiquid } from './pure.ts';
 import { secondaryFluid } from './secondary.ts';
 import { tableLiquid, type ViscosityRule } from './table.ts';
-import { liquidSources, liquidUncertainties, liquidWorking } from './working.ts';
+import { liquidRanges, liquidSources, liquidUncertainties, liquidWorking } from './working.ts';
 
 /** The state of a liquid. Problems: those of finding the liquid, of its ranges and of the stated figures. */
 function liquidState(parsed: Parsed, conditions: Conditions): Outcome<FluidState> {
@@ -37,6 +37,7 @@ function liquidState(parsed: Parsed, conditions: Conditions): Outcome<FluidState
     ...(baseDensity === undefined ? {} : { baseDensity }),
     ...(cautions.length === 0 ? {} : { cautions }),
     uncertainties: liquidUncertainties(found.value, figures.value),
+    ranges: liquidRanges(found.value, figures.value),
     sources: liquidSources(found.value, figures.value),
     working: liquidWorking(found.value, figures.value, conditions),
   });
@@ -109,4 +110,11 @@ export const liquid: FluidModel = {
     { name: 'baseDensity', type: 'quantity', measures: ['density'], required: false },
   ],
   state: liquidState,
+  seams: ({ rows, choices }) => ({
+    pressure: [],
+    temperature: [
+      ...[...(rows.table ?? []), ...(rows.viscosities ?? [])].map(({ temperature }) => temperature?.si as number),
+      ...inhibitedTemperatures(choices.name),
+    ],
+  }),
 };
