@@ -2,6 +2,7 @@
  * What a fluid model answers with: the state at the upstream tapping, everything the meter equations ask of a fluid.
  * A model knows physics, not the form: only state.ts reads the document's fluid.
  */
+import type { Bounds } from '../numeric/bounds.ts';
 import type { AbsolutePressure, Density, DynamicViscosity, MolarMass, Temperature } from '../quantity/kinds.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Working } from '../quantity/working.ts';
@@ -28,6 +29,21 @@ export interface StatedUncertainty {
   readonly share: number; // 0.001 is 0.1 %
   readonly source: Source;
 }
+
+/** Pressures, Pa absolute, and temperatures, K; a bound that its source does not give is absent. */
+export interface FigureRange {
+  readonly pressure?: Bounds;
+  readonly temperature?: Bounds;
+}
+
+/** The figures that can have a range. */
+export type RangedFigure =
+  | 'density'
+  | 'viscosity'
+  | 'isentropicExponent'
+  | 'compressibility'
+  | 'vapourPressure'
+  | 'baseDensity';
 
 /** Everything that the meter equations ask of a fluid, with where it comes from. */
 export interface FluidState {
@@ -65,6 +81,8 @@ export interface FluidState {
     readonly viscosity?: StatedUncertainty;
     readonly speedOfSound?: StatedUncertainty;
   };
+  /** Where the formulation of each figure holds, with the uncertainty above where it states one. */
+  readonly ranges?: Readonly<Partial<Record<RangedFigure, FigureRange>>>;
   /** The formulation of each figure. */
   readonly sources: {
     readonly density: Source;

@@ -59,6 +59,7 @@ export function override(state: FluidState, parsed: Parsed, field: string): Outc
     ...(figures as Partial<FluidState>),
     overridden: names,
     ...(state.uncertainties === undefined ? {} : { uncertainties: without(state.uncertainties, [...names, ...stale]) }),
+    ...(state.ranges === undefined ? {} : { ranges: without(state.ranges, [...names, ...stale]) }),
     sources: { ...state.sources, ...Object.fromEntries(names.map((name) => [name, byUser])) },
     working: workingOf(state.working, figures, stale),
   });

@@ -4,7 +4,7 @@ import type { Straightness } from '../check/straight.ts';
 import { unchecked } from '../check/unchecked.ts';
 import type { DutyName, MeterText } from '../document/project.ts';
 import { relativeDensity } from '../fluid/air/relative-density.ts';
-import type { FluidState } from '../fluid/contract.ts';
+import type { FigureRange, FluidState } from '../fluid/contract.ts';
 import type { MeterInput } from '../input/meter.ts';
 import type { Site } from '../input/site.ts';
 import type { Seen, Source } from '../quantity/source.ts';
@@ -18,7 +18,8 @@ import type { Budget } from '../uncertainty/iso5167.ts';
 import { curveOf, reynoldsLimits } from './curve.ts';
 import { headsOf } from './heads.ts';
 import { withLate } from './late.ts';
-import type { PointRecord, Solved, StateRecord } from './record.ts';
+import type { Readings } from './readings-record.ts';
+import type { PointRecord, RangeRecord, Solved, StateRecord } from './record.ts';
 import { siteRecord, siteWorking } from './site.ts';
 import { type Direction, pointWorking } from './working.ts';
 
@@ -30,10 +31,12 @@ export interface Parts {
   readonly budgets: Budgets;
   readonly straight: Straightness;
   readonly checks: readonly Finding[];
+  /** Absent where the file has neither instrument nor readings. */
+  readonly readings?: () => Readings;
 }
 
 /** Keys of a meter that are kept for later versions and not evaluated by this one. */
-const UNREAD = ['instrument', 'readings', 'log'] as const;
+const UNREAD = ['log'] as const;
 
 /** The record of a solved meter; what only screen and paper ask for is worked out when they do. */
 export function assemble(parts: Parts): Solved {
@@ -70,12 +73,13 @@ export function assemble(parts: Parts): Solved {
     dimensions: () => primary.dimensions(geometry),
     working: () => [...siteWorking(site), ...stateWorking(solution), ...relative, ...metalOf(parts)],
     sources: () => sourcesOf(solved, parts.budgets),
+    ...(parts.readings === undefined ? {} : { readings: parts.readings }),
   });
   return solved;
 }
 
 /** What only screen and paper ask for. */
-type Late = Pick<Solved, 'curve' | 'reynoldsLimits' | 'heads' | 'dimensions' | 'working' | 'sources'>;
+type Late = Pick<Solved, 'readings' | 'curve' | 'reynoldsLimits' | 'heads' | 'dimensions' | 'working' | 'sources'>;
 
 /** What was made of a temperature measured behind the element. */
 function downstreamRecord({ downstream }: Solution): Pick<StateRecord, 'downstream'> {
@@ -114,6 +118,7 @@ export function stateRecord(state: FluidState, [relative]: readonly Working[]): 
     jouleThomson_K_Pa: state.jouleThomson,
     overridden: state.overridden,
     uncertainty_percent: percentsOf(state.uncertainties),
+    ranges: rangesOf(state.ranges),
   };
   const known = Object.entries(optional).filter(([, value]) => value !== undefined);
   return {
@@ -125,6 +130,19 @@ export function stateRecord(state: FluidState, [relative]: readonly Working[]): 
     temperature_K: state.temperature,
   };
 }
+
+/** The ranges of the figures, by their names; undefined where none is known. */
+function rangesOf(ranges: FluidState['ranges']): Readonly<Record<string, RangeRecord>> | undefined {
+  const known = Object.entries(ranges ?? {}).map(([name, range]) => [name, rangeOf(range)] as const);
+  return known.length === 0 ? undefined : Object.fromEntries(known);
+}
+
+const rangeOf = ({ temperature: T = {}, pressure: p = {} }: FigureRange): RangeRecord => ({
+  ...(T.min === undefined ? {} : { minTemperature_K: T.min }),
+  ...(T.max === undefined ? {} : { maxTemperature_K: T.max }),
+  ...(p.min === undefined ? {} : { minPressure_Pa: p.min }),
+  ...(p.max === undefined ? {} : { maxPressure_Pa: p.max }),
+});
 
 /** Uncertainties that the formulations state, by the names of the figures, in per cent; undefined where none does. */
 function percentsOf(stated: FluidState['uncertainties']): Readonly<Record<string, number>> | undefined {

@@ -31,6 +31,8 @@ export interface StateRecord {
   readonly overridden?: readonly string[];
   /** Expanded, 95 %, as the formulation of the figure states it, by the name of the figure. */
   readonly uncertainty_percent?: Readonly<Record<string, number>>;
+  /** Where the formulation of a figure holds, by the name of the figure; absolute pressures. */
+  readonly ranges?: Readonly<Record<string, RangeRecord>>;
   readonly pressure_Pa: number; // absolute, upstream tapping
   readonly temperature_K: number;
   /** Joule-Thomson coefficient, where the formulation gives it. */
@@ -177,6 +179,8 @@ export interface RefusedTraverse extends Refused {
 export type TraverseResult = SolvedTraverse | RefusedTraverse;
 
 export interface Results {
+  /** The site of the project; absent where it cannot be read. */
+  readonly site?: SiteRecord;
   readonly results: readonly MeterResult[];
   readonly traverses: readonly TraverseResult[];
 }

@@ -38,6 +38,8 @@ export interface Row {
   /** Id of the working line that opens from this row. */
   readonly working?: string;
   readonly note?: string;
+  /** Where the formulation of the figure holds, in words. */
+  readonly range?: string;
   /** True where the user put the figure in place of the one that would be found. */
   readonly own?: boolean;
 }

@@ -1,17 +1,18 @@
 /** The fluid upstream: pressure and temperature as written, the properties as found. */
 import type { Solved } from '../../core/result/record.ts';
+import { boundsText } from '../words/findings.ts';
 import { overrideWords } from '../words/fluid-forms.ts';
 import type { Role } from '../words/print.ts';
-import { asDownstream, fromDownstream, stateLabels } from '../words/rows.ts';
+import { asDownstream, fromDownstream, holdsFor, stateLabels } from '../words/rows.ts';
 import { cited } from './cited.ts';
 import type { Context } from './context.ts';
 import type { Row } from './model.ts';
 import { pressureMeasures } from './units.ts';
 
 type Id = keyof typeof stateLabels;
-
 /** What a fluid's state is shown from: a meter, or a survey. */
 type Stated = Pick<Solved, 'state' | 'working'>;
+
 const symbols: Readonly<Record<Id, string>> = {
   pressure: 'p_1',
   temperature: 'T_1',
@@ -71,7 +72,7 @@ export function stateRows(at: Context, result: Stated): readonly Row[] {
   const given = (id: Id, value: Row['value']): Row => ({ id, label: stateLabels[id], symbol: symbols[id], value });
   const found = (id: Id, si: number | undefined, role: Role): readonly Row[] => {
     if (si === undefined) return [];
-    const row = { ...given(id, at.value(si, role)), ...noteOn(id, state, at) };
+    const row = { ...given(id, at.value(si, role)), ...noteOn(id, state, at), ...rangeOn(id, state, at) };
     const line = working.find((one) => one.id === id);
     if (line === undefined) return [row];
     const own = state.overridden?.includes(id);

@@ -48,7 +48,7 @@ export const tableWords = {
 export const saturationWords = {
   fold: 'Saturated or wet steam',
   phase: 'Phase',
-  side: 'Gas or liquid, by hand',
+  side: 'Equation of state and phase',
   quality: 'Quality (vapour by mass)',
   onLine: 'on the saturation line',
   hint: 'With a phase or a quality, pressure alone or temperature alone is enough: leave the other empty.',

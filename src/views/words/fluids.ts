@@ -28,6 +28,12 @@ export const gasPhaseChoices: UsualFirst = [
   { value: 'liquid', label: 'Liquid' },
 ];
 
+/** The equation of state of a mixture. */
+export const equationChoices: UsualFirst = [
+  { value: 'gerg-2008', label: 'GERG-2008' },
+  { value: 'aga8-detail', label: 'AGA8 DETAIL' },
+];
+
 /** Where the temperature is measured, seen from the element. */
 export const temperatureChoices: UsualFirst = [
   { value: 'upstream', label: 'Upstream' },

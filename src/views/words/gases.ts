@@ -37,6 +37,9 @@ export const gasGroups: readonly { readonly label: string; readonly choices: rea
   },
 ];
 
+/** Whether a gas is one of those that no equation of mixtures holds. */
+export const isOther = (name: string): boolean => others.some((other) => other === name);
+
 /** Name of a gas of the file; one that is not in the list stands as written. */
 export const gasLabel = (name: string): string =>
   components.find(({ value }) => value === name)?.label ?? labelOf(name);

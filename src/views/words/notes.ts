@@ -17,6 +17,7 @@ export const remarks: Readonly<Record<string, string>> = {
   'if97-at-base': 'From the formulation at the base state of the project.',
   'equation-density': 'From the equation of state at pressure and temperature; too long to print here.',
   'equation-speed-of-sound': 'From the equation of state; too long to print here.',
+  'composition-normalised': 'The shares of the composition do not add up to 1; each was divided by this sum.',
   'standard-atmosphere':
     'From the altitude, as none is stated; the weather moves the true pressure by up to 3\u00a0%. Too long to print here.',
   'normal-gravity': 'From latitude and altitude, as none is stated; too long to print here.',

@@ -1,7 +1,12 @@
 /** Problems of a gas: its composition, and states that its equation does not have. */
 import type { ProblemWords } from './detail.ts';
+import { gasLabel } from './gases.ts';
 
 export const gasProblems: ProblemWords = {
+  'equation-unused': (d) => ({
+    cause: `No equation of mixtures holds ${gasLabel(d.text('gas')).toLowerCase()}: it is computed by a cubic equation.`,
+    next: 'Leave the equation of state empty.',
+  }),
   'component-unknown': (d) => ({
     cause: `'${d.text('written')}' is no component of a gas mixture here.`,
     next: `Choose a component of the list, such as ${d.list('nearest')}.`,

@@ -16,6 +16,9 @@ export const stateLabels = {
   quality: 'Quality, vapour by mass',
 } as const;
 
+/** The range of a formulation: temperatures, then pressures. */
+export const holdsFor = (bounds: readonly string[]): string => `holds for ${bounds.join(', ')}`;
+
 /** The temperature upstream, found from the one behind the element. */
 export const fromDownstream = (measured: string): string =>
   `from ${measured} measured downstream, with the loss at maximum flow`;

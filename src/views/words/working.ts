@@ -2,6 +2,7 @@
 import { catalogue } from './catalogue.ts';
 
 export const workingTitles: Readonly<Record<string, string>> = {
+  'composition-sum': 'Sum of the shares',
   'site-atmosphere': 'Atmospheric pressure of the site',
   'site-gravity': 'Gravity of the site',
   jouleThomson: 'Joule–Thomson coefficient',

@@ -5,7 +5,8 @@
 import type { Density, DynamicViscosity, Temperature } from '../../quantity/kinds.ts';
 import { fail, type Outcome, ok } from '../../quantity/outcome.ts';
 import type { Caution, FluidState, StatedUncertainty } from '../contract.ts';
-import { gasCautions, gasUncertainty, outsideBy, refusedOutside } from '../gas/range.ts';
+import { gasCautions, gasUncertainty, gergRange, outsideBy, refusedOutside } from '../gas/range.ts';
+import { gasRanges } from '../gas/working.ts';
 import { gasViscosity, schemeOf, viscosityBasis, viscosityCautions } from '../gas-viscosity/viscosity.ts';
 import { mixtureOf } from '../gerg/mixture.ts';
 import { gasDensity } from '../helmholtz/density.ts';
@@ -76,6 +77,7 @@ function stateFrom(
     ...(atBase === undefined ? {} : { baseDensity: atBase.density }),
     ...(cautions.length === 0 ? {} : { cautions }),
     uncertainties: uncertaintiesOf(found, xv, conditions, viscous.uncertainty),
+    ranges: rangesOf(xv, conditions, found, density / molarMass, atBase),
     sources: airSources(found.by, viscous.uncertainty.source, atBase),
     working: airWorking(figures, found.by, vapour, viscous.uncertainty.source, atBase, base),
   };
@@ -130,6 +132,26 @@ function uncertaintiesOf(
   };
 }
 
+/** The formula of metrology has a range of its own; sound and exponent are always those of the mixture. */
+function rangesOf(
+  xv: number,
+  { pressure, temperature }: State,
+  found: AirDensity,
+  rho: number,
+  atBase: BaseAir | undefined,
+): NonNullable<FluidState['ranges']> {
+  const x = airFractions(xv);
+  const mixture = gergRange(x, pressure, temperature);
+  const of = ({ by }: AirDensity) => (by === 'cipm' ? cipm.range : mixture);
+  const density = of(found);
+  return {
+    ...gasRanges(mixture, viscosityBasis(x, temperature, rho)),
+    density,
+    compressibility: density,
+    ...(atBase === undefined ? {} : { baseDensity: of(atBase) }),
+  };
+}
+
 function cautionsOf(xv: number, vapour: Vapour | undefined, at: State, rho: number): readonly Caution[] {
   const { pressure: p, temperature: T } = at;
   return [
@@ -168,4 +190,5 @@ export const air: FluidModel = {
     if (!moisture.ok) return moisture;
     return airState(moisture.value, conditions, parsed.choices.baseBasis as BaseBasis | undefined);
   },
+  seams: () => ({ pressure: Object.values(cipm.range.pressure), temperature: Object.values(cipm.range.temperature) }),
 };

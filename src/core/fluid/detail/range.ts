@@ -4,7 +4,7 @@
  */
 import { isInside } from '../../numeric/bounds.ts';
 import type { Source } from '../../quantity/source.ts';
-import type { Caution, StatedUncertainty } from '../contract.ts';
+import type { Caution, FigureRange, StatedUncertainty } from '../contract.ts';
 import { componentNames } from '../helmholtz/components.ts';
 import { limits } from './limits.table.ts';
 
@@ -14,6 +14,9 @@ const range: Source = { clause: 'ISO 20765-1:2005, gas of pipeline quality', see
 
 const temperature = { min: 263, max: 338 } as const; // K
 const pressure = { max: 12e6 } as const; // Pa
+
+/** Where the equation is known to hold, for gas of pipeline quality. */
+export const detailRange: FigureRange = { temperature, pressure };
 
 /** Everything in which a gas leaves the range of pipeline quality. */
 export function detailCautions(x: readonly number[], p: number, T: number): readonly Caution[] {

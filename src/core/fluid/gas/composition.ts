@@ -3,6 +3,8 @@
  * Standard: none. Mole fractions that do not add up to 1 are refused beyond 1e-3 and brought to 1 below (practice).
  */
 import { type Outcome, ok, type Problem } from '../../quantity/outcome.ts';
+import type { Source } from '../../quantity/source.ts';
+import type { Working } from '../../quantity/working.ts';
 import { componentNames, molarMasses } from '../helmholtz/components.ts';
 import type { Fraction } from '../model.ts';
 import { spellings } from './composition.table.ts';
@@ -70,6 +72,19 @@ export function compositionOf(
   const [first, ...rest] = problems;
   if (first !== undefined) return { ok: false, problems: [first, ...rest] };
   return ok(shares(basis === 'mass' ? amounts.map((value, i) => value / (molarMasses[i] as number)) : amounts));
+}
+
+/** Sums that differ from 1 by less are 1: it is the rounding of what was written. */
+const ROUNDING = 1e-12;
+
+/** The working of a sum that is not 1, which every share was divided by; none where it is. */
+export function sumWorking(written: readonly Fraction[]): readonly Working[] {
+  const sum = written.reduce((total, { value }) => total + value, 0);
+  if (Math.abs(sum - 1) <= ROUNDING) return [];
+  const source: Source = { clause: 'shares divided by their sum', seen: 'practice' };
+  return [
+    { id: 'composition-sum', symbol: 'S_x', given: [], value: sum, unit: '', source, remark: 'composition-normalised' },
+  ];
 }
 
 /** Each amount as a share of all. */

@@ -14,11 +14,11 @@ import type { Mixture } from '../helmholtz/mixture.ts';
 import { type GasProperties, propertiesAt } from '../helmholtz/properties.ts';
 import { type Conditions, type FluidModel, type Parsed, plainName, type State } from '../model.ts';
 import { spellings } from './composition.table.ts';
-import { type Basis, compositionOf } from './composition.ts';
+import { type Basis, compositionOf, sumWorking } from './composition.ts';
 import { type EquationName, equationNames, type GasEquation, gasEquations } from './equation.ts';
 import { otherGasNames, otherGasState } from './other-gas.ts';
 import { condenses, liquidCaution, outsideBy, phaseCautions, phaseSum, refusedOutside } from './range.ts';
-import { type BaseGas, type GasFigures, gasSources, gasWorking } from './working.ts';
+import { type BaseGas, type GasFigures, gasRanges, gasSources, gasWorking } from './working.ts';
 
 /** The phase of a mixture, found or asked for. */
 export type GasPhase = 'gas' | 'liquid';
@@ -94,6 +94,7 @@ function stateFrom(
   const basis = viscosityBasis(x, temperature, rho);
   const doubts = [...(unasked ? [liquidCaution(p)] : []), ...phaseCautions(x, p, T, phase)];
   const cautions = [...doubts, ...equation.cautions(x, p, T), ...viscosityCautions(basis, temperature)];
+  const range = equation.range(x, p, T);
   const known = doubts.length > 0 ? undefined : equation.uncertainty(x, p, T); // what is in doubt has no figure
   return {
     ...figures,
@@ -106,10 +107,18 @@ function stateFrom(
       ...(known === undefined ? {} : { density: known, speedOfSound: known }),
       viscosity: { share: basis.uncertainty, source: basis.source },
     },
+    ranges: {
+      ...gasRanges(range, basis),
+      ...(atBase.ideal ? {} : { baseDensity: range }),
+    },
     sources: gasSources(equation, basis.source, atBase),
-    working: gasWorking(equation, mixture.R, figures, basis, atBase, base),
+    working: gasWorking(equation, mixture.R, figures, basis, atBase, base).filter(({ id }) => isUsed(id, phase)),
   };
 }
+
+/** A liquid has no use for the exponent and the compressibility factor. */
+const isUsed = (line: string, phase: GasPhase): boolean =>
+  phase === 'gas' || (line !== 'isentropicExponent' && line !== 'compressibility');
 
 /** ρ_b = p_b M / (Z_b R T_b), with Z_b = 1 where the gas would not be one gas at the base state. */
 function baseGas(mixture: Mixture, { pressure: p, temperature: T }: State): BaseGas {
@@ -145,7 +154,9 @@ function parsedState({ fractions, flags, choices }: Parsed, conditions: Conditio
   if (composition === undefined) return fail('field-missing', own('composition'));
   const basis = (choices.basis ?? 'mole') as Basis;
   const x = compositionOf(composition, basis, flags.normalise === true, own('composition'));
-  return x.ok ? gasState(x.value, conditions, asked) : x;
+  const state = x.ok ? gasState(x.value, conditions, asked) : x;
+  if (!state.ok) return state;
+  return ok({ ...state.value, working: [...sumWorking(composition), ...state.value.working] });
 }
 
 function pureState(name: string, conditions: Conditions, asked: Asked): Outcome<FluidState> {
@@ -156,8 +167,9 @@ function pureState(name: string, conditions: Conditions, asked: Asked): Outcome<
       conditions,
       asked,
     );
-  if (asked.phase !== 'liquid') return otherGasState(name, conditions);
   const { pressure, temperature, paths } = conditions;
+  if (asked.equation !== undefined) return fail('equation-unused', paths.own('equation'), { gas: name });
+  if (asked.phase !== 'liquid') return otherGasState(name, conditions);
   return fail('gas-density-none', paths.own('phase'), { pressure, temperature, phase: asked.phase });
 }
 

@@ -13,7 +13,7 @@ import { schemeUncertainty, viscosityCautions } from '../gas-viscosity/viscosity
 import { type Conditions, plainName, type State } from '../model.ts';
 import { type OtherGas, otherGases } from './other-gas.table.ts';
 import { cubic, otherSources, otherWorking } from './other-working.ts';
-import type { BaseGas, GasFigures } from './working.ts';
+import { type BaseGas, type GasFigures, gasRanges } from './working.ts';
 
 const R = molarGasConstant.exact;
 
@@ -124,9 +124,15 @@ function stateFrom(gas: OtherGas, figures: GasFigures, { base }: Conditions): Fl
     baseDensity: atBase.density,
     ...(cautions.length === 0 ? {} : { cautions }),
     uncertainties: { density, speedOfSound: density, viscosity: { ...schemeUncertainty, share: viscousSpread } },
+    ranges: rangesOf(gas),
     sources: otherSources(atBase),
     working: otherWorking(figures, atBase, base),
   };
+}
+
+function rangesOf({ caloric: [min, max], viscous: temperatures }: OtherGas): NonNullable<FluidState['ranges']> {
+  const equation = { temperature: { min, max } };
+  return { ...gasRanges(equation, { temperatures }), baseDensity: equation };
 }
 
 function uncertaintyOf(gas: OtherGas, figures: GasFigures): StatedUncertainty {

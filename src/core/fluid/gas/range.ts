@@ -7,7 +7,7 @@ import { type Bounds, isInside } from '../../numeric/bounds.ts';
 import type { Temperature } from '../../quantity/kinds.ts';
 import { fail, type Outcome } from '../../quantity/outcome.ts';
 import type { Source } from '../../quantity/source.ts';
-import type { Caution, StatedUncertainty } from '../contract.ts';
+import type { Caution, FigureRange, StatedUncertainty } from '../contract.ts';
 import { critical } from '../cubic/critical.table.ts';
 import { splits, trialSum } from '../cubic/stability.ts';
 import { componentNames } from '../helmholtz/components.ts';
@@ -18,6 +18,7 @@ import type { Conditions } from '../model.ts';
 export const GERG: Source = { clause: 'ISO 20765-2:2015 (GERG-2008)', seen: 'second-hand' };
 
 const normal = { temperature: { min: 90, max: 450 }, pressure: { max: 35e6 } } as const; // K, Pa
+const best = { temperature: { min: 250, max: 450 }, pressure: { max: 35e6 } } as const; // K, Pa
 const extended = { temperature: { min: 60, max: 700 }, pressure: { max: 70e6 } } as const; // K, Pa
 const normalRange: Source = { clause: `${GERG.clause}, normal range`, seen: 'second-hand' };
 const extendedRange: Source = { clause: `${GERG.clause}, extended range`, seen: 'memory' };
@@ -148,7 +149,15 @@ const poorly = ['hydrogen', 'water', 'hydrogen-sulfide'].map((name) => component
  */
 export function gasUncertainty(x: readonly number[], p: number, T: number): StatedUncertainty | undefined {
   if (!isInside(T, normal.temperature) || !isInside(p, normal.pressure)) return undefined;
+  const source = { clause: `${GERG.clause}, uncertainty`, seen: 'memory' } as const;
+  return { share: isBest(x, p, T) ? 0.001 : 0.01, source }; // GERG-2008, uncertainty
+}
+
+/** The states in which that uncertainty is smallest; else the normal range. */
+export const gergRange = (x: readonly number[], p: number, T: number): FigureRange => (isBest(x, p, T) ? best : normal);
+
+function isBest(x: readonly number[], p: number, T: number): boolean {
   const share = poorly.reduce((sum, place) => sum + (x[place] ?? 0), 0);
-  const best = T >= 250 && (share <= POORLY_KNOWN || x.includes(1)); // a pure gas is known well
-  return { share: best ? 0.001 : 0.01, source: { clause: `${GERG.clause}, uncertainty`, seen: 'memory' } };
+  const known = share <= POORLY_KNOWN || x.includes(1); // a pure gas is known well
+  return known && isInside(T, best.temperature) && isInside(p, best.pressure);
 }

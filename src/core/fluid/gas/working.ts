@@ -2,7 +2,7 @@
 import type { Density, DynamicViscosity } from '../../quantity/kinds.ts';
 import type { Source } from '../../quantity/source.ts';
 import type { Given, Working } from '../../quantity/working.ts';
-import type { FluidState } from '../contract.ts';
+import type { FigureRange, FluidState } from '../contract.ts';
 import type { ViscosityBasis } from '../gas-viscosity/viscosity.ts';
 import type { State } from '../model.ts';
 import {
@@ -48,6 +48,19 @@ const baseSource = ({ clause, seen }: Source, { ideal }: BaseGas): Source =>
 /** The formulation of each figure that the state has. */
 export function gasSources({ source }: GasEquation, viscosity: Source, found: BaseGas): FluidState['sources'] {
   return { density: source, viscosity, isentropicExponent: exponent, baseDensity: baseSource(source, found) };
+}
+
+/** The ranges that the equation gives to all that follows from it, and the correlation to the viscosity. */
+export function gasRanges(
+  equation: FigureRange,
+  { temperatures: [min, max] }: Pick<ViscosityBasis, 'temperatures'>,
+): NonNullable<FluidState['ranges']> {
+  return {
+    density: equation,
+    viscosity: { temperature: { min, max } },
+    isentropicExponent: equation,
+    compressibility: equation,
+  };
 }
 
 /** The working of each figure; `R` is the gas constant of the equation, J/(mol.K). */

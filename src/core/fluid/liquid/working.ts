@@ -47,6 +47,21 @@ export function liquidUncertainties({ density, viscosity }: Liquid, { viscosityS
   };
 }
 
+/** The ranges of the sources; a stated figure has none, and no pressure bounds what follows from a bulk modulus. */
+export function liquidRanges(
+  { density, viscosity, vapourPressure, pressure }: Liquid,
+  { viscosityStated, vapourStated, baseStated }: LiquidFigures,
+): NonNullable<FluidState['ranges']> {
+  const of = ({ min, max }: Property) => ({ temperature: { min, max } });
+  const rho = { ...of(density), ...(pressure === undefined ? {} : { pressure: { max: pressure.max } }) };
+  return {
+    density: rho,
+    ...(viscosityStated || viscosity === undefined ? {} : { viscosity: of(viscosity) }),
+    ...(vapourStated || vapourPressure === undefined ? {} : { vapourPressure: of(vapourPressure) }),
+    ...(baseStated ? {} : { baseDensity: rho }),
+  };
+}
+
 /** The working of each figure. */
 export function liquidWorking(liquid: Liquid, figures: LiquidFigures, at: Conditions): readonly Working[] {
   const T = T1(at.temperature);

@@ -8,6 +8,7 @@ import type { Source } from '../../quantity/source.ts';
 import type { FluidState } from '../contract.ts';
 import { densityAt, propertiesAt } from '../if97/evaluate.ts';
 import {
+  between1And3,
   boilingAt,
   bounds,
   highestPressureAt,
@@ -25,7 +26,7 @@ import { highestTemperature as highestTemperatureOfViscosity, viscosity } from '
 import type { Conditions, FluidModel, Parsed } from '../model.ts';
 import { saturatedState } from './saturated.ts';
 import { wetSteam } from './wet-steam.ts';
-import { waterSources, waterUncertainties, waterWorking } from './working.ts';
+import { waterRanges, waterSources, waterUncertainties, waterWorking } from './working.ts';
 
 const molarMass = 0.018015257 as MolarMass; // kg/mol; IAPWS R7-97(2012), section 2: R_m = 8.31451 J/(mol.K) by R
 
@@ -112,8 +113,9 @@ function stateFrom(conditions: Conditions, place: Place, forced: boolean, proper
     expands: place.side === 'vapour',
     ...(forced ? { phaseForced: true } : {}),
     uncertainties: waterUncertainties(place.region, place.side === 'vapour'),
+    ranges: waterRanges(place.region),
     sources: waterSources(place.region, extrapolated, figures, base?.source),
-    working: waterWorking(place.region, heldBeyond, extrapolated, figures, conditions.base),
+    working: waterWorking(place.region, heldBeyond, extrapolated, place.side === 'liquid', figures, conditions.base),
   };
 }
 
@@ -153,4 +155,5 @@ export const water: FluidModel = {
   ],
   complete: saturatedState,
   state: stateOfWater,
+  seams: () => ({ pressure: [], temperature: [between1And3, bounds.hot] }),
 };

@@ -1,9 +1,11 @@
 /** Where the figures of water and steam come from, and their working. */
 import type { Source } from '../../quantity/source.ts';
 import { named, type Working } from '../../quantity/working.ts';
-import type { FluidState } from '../contract.ts';
-import type { Region } from '../if97/place.ts';
+import type { FigureRange, FluidState } from '../contract.ts';
+import { bounds, type Region } from '../if97/place.ts';
 import { R } from '../if97/properties.ts';
+import { criticalTemperature } from '../if97/saturation.ts';
+import { highestTemperature as hottestViscosity } from '../if97/viscosity.ts';
 import type { State } from '../model.ts';
 import { atBase, baseLine, exponentLine, p1, rho1, sound, T1 } from '../working.ts';
 
@@ -54,18 +56,36 @@ export function waterUncertainties(region: Region, expands: boolean): NonNullabl
   };
 }
 
-/** The working of each figure. `heldBeyond`: the phase is held beyond the saturation line. */
+/** Where the formulation holds: all its regions to 1073.15 K, the fifth beyond; the viscosity and the line apart. */
+export function waterRanges(region: Region): NonNullable<FluidState['ranges']> {
+  const { lowestTemperature: lowest, highestTemperature, highestPressure, highestPressureHot, hot } = bounds;
+  const cool: FigureRange = { temperature: { min: lowest, max: hot }, pressure: { max: highestPressure } };
+  const whole: FigureRange =
+    region === 5 ? { temperature: { min: hot, max: highestTemperature }, pressure: { max: highestPressureHot } } : cool;
+  return {
+    density: whole,
+    viscosity: { ...whole, temperature: { min: lowest, max: hottestViscosity } },
+    isentropicExponent: whole,
+    compressibility: whole,
+    vapourPressure: { temperature: { min: lowest, max: criticalTemperature } },
+    baseDensity: cool,
+  };
+}
+
+/** The working of each figure. `heldBeyond`: the phase is held beyond the saturation line. A liquid has no use for the
+ * exponent and the compressibility factor. */
 export function waterWorking(
   region: Region,
   heldBeyond: boolean,
   extrapolated: boolean,
+  liquid: boolean,
   figures: Figures,
   base: State,
 ): readonly Working[] {
   const working = [
     ...byRegion(region, heldBeyond, figures),
     viscosityWorking(extrapolated, figures),
-    ...ratios(region, figures),
+    ...(liquid ? [] : ratios(region, figures)),
     vapourPressureWorking(figures),
     baseDensityWorking(figures, base),
   ];

@@ -16,7 +16,7 @@ interface Props {
   readonly children?: ReactNode;
 }
 
-export function Figure({ row: { label, value, working, cited, note, own = false }, aside, children }: Props) {
+export function Figure({ row: { label, value, working, cited, note, range, own = false }, aside, children }: Props) {
   return (
     <div>
       <dt>{label}</dt>
@@ -34,6 +34,7 @@ export function Figure({ row: { label, value, working, cited, note, own = false 
           <span>
             {note && <span className={own ? styles.own : styles.note}>{note}</span>}
             {cited && <Clause cited={cited} />}
+            {range && <span className={styles.range}>{range}</span>}
           </span>
           {aside}
         </dd>
