@@ -1,5 +1,5 @@
 /** Which column of a log holds what, how it is spelled, and how a figure becomes SI: all that the reader has to know. */
-import type { AbsolutePressure, MassFlow, PressureDifference, Temperature } from '../quantity/kinds.ts';
+import type { AbsolutePressure, PressureDifference, Temperature } from '../quantity/kinds.ts';
 import type { Spelling } from './encoding.ts';
 import type { FigureFormat } from './figure.ts';
 import type { TimeFormat } from './time.ts';
@@ -50,7 +50,12 @@ export interface Mapping {
   readonly interpretation: 'sampled' | 'held';
   /** Longest interval that is bridged, s; none where every interval is. */
   readonly maxGap?: number;
-  readonly cutOff?: { readonly differential: PressureDifference } | { readonly massFlow: MassFlow };
+  /** A differential below it is no flow. */
+  readonly cutOff?: PressureDifference;
+  /** Rows with one and the same signal from which on they count as frozen. */
+  readonly frozen?: number;
+  /** Distance of a spike from the median of the rows before, in median absolute deviations. */
+  readonly spike?: number;
   /** What stands in for a figure that is missing in a row. */
   readonly fallback: { readonly pressure?: AbsolutePressure; readonly temperature?: Temperature };
   /** What was taken because the file says nothing: `zone` for UTC, `interpretation` for sampled. */

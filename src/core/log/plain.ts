@@ -64,7 +64,8 @@ export function plainRow(reader: Reader, from: number): number {
     if (at < 0 || window[at] !== delimiter) return NOT_PLAIN;
     at += 1;
   }
-  const end = at < 0 ? NOT_PLAIN : plainEnd(reader, at);
+  // A figure that goes on in another spelling is not read to its end here.
+  const end = at < 0 || classes[window[at] as number] === PLAIN ? NOT_PLAIN : plainEnd(reader, at);
   if (end < 0 || end - from >= LONGEST_ROW) return NOT_PLAIN;
   return keepRow(reader, missing) ? end : NOT_PLAIN;
 }
