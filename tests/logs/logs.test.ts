@@ -10,9 +10,8 @@ import {
   TIME_REPEATED,
   TROUBLES,
 } from '../../src/core/log/chunk.ts';
-import { readMapping } from '../../src/core/log/columns.ts';
+import { mapLog } from '../../src/core/log/columns.ts';
 import type { Mapping } from '../../src/core/log/mapping.ts';
-import { previewLog } from '../../src/core/log/preview.ts';
 import { type LogEnd, openRows } from '../../src/core/log/rows.ts';
 import type { Outcome, Problem } from '../../src/core/quantity/outcome.ts';
 
@@ -46,11 +45,9 @@ const logs = names.map((name) => ({
 }));
 
 function mappingOf(log: LogText, bytes: Uint8Array): Outcome<Mapping> {
-  const delimiter = log.delimiter === undefined ? {} : { delimiter: log.delimiter };
-  const preview = previewLog(bytes, { complete: true, ...delimiter });
   const site = readSite({});
-  if (!preview || !site.ok) throw new Error('expected rows and a site, got none');
-  return readMapping(log, preview, site.value);
+  if (!site.ok) throw new Error('expected a site, got none');
+  return mapLog(log, { first: bytes, complete: true }, site.value);
 }
 
 const bits: readonly (readonly [number, string])[] = [

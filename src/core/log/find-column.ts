@@ -11,8 +11,7 @@ export interface Desk {
 
 /** The decimal mark of a column: that of the column, that of the log, or what the preview has decided. */
 export function figuresOf({ form }: Desk, { name, figures }: ColumnPreview, path: string): FigureFormat | undefined {
-  const marks = ['.', ','] as const;
-  const stated = form.choice(`${path}.decimal`, marks) ?? form.choice('log.decimal', marks);
+  const stated = statedMark(form, `${path}.decimal`) ?? statedMark(form, 'log.decimal');
   if (stated !== undefined) return { decimal: stated, group: stated === '.' ? ',' : '.' };
   if (figures.kind === 'decided') return figures.value;
   const [one, other] = figures.readings;
@@ -22,6 +21,13 @@ export function figuresOf({ form }: Desk, { name, figures }: ColumnPreview, path
     ...(one ? { one: one.reads, oneMark: one.value.decimal } : {}),
     ...(other ? { other: other.reads, otherMark: other.value.decimal } : {}),
   });
+}
+
+/** The decimal mark that a field states. */
+function statedMark(form: Form, field: string): '.' | ',' | undefined {
+  const written = form.word(field);
+  if (written === undefined || written === '.' || written === ',') return written;
+  return form.report('log-decimal-unknown', field, { written });
 }
 
 /** The column that a field names: by its name in the header, or by its number. */

@@ -24,6 +24,7 @@ export interface LogText {
   decimal?: string; // '.' or ','
   delimiter?: string; // ',', ';', '|' or 'tab'
   dateOrder?: string; // 'day-first' | 'month-first'
+  dayStart?: string; // clock at which a day begins, '06:00'; midnight where it is not stated
   maxGap?: string; // longest interval that is bridged, '60 s'
   interpretation?: string; // 'sampled' | 'held'
   cutOff?: string; // a differential below it is no flow
