@@ -18,7 +18,13 @@ export interface Box {
 }
 
 /** Why there is no surface: the fluid is refused somewhere in the box, changes its phase, or is nowhere smooth enough. */
-export type NoSurface = 'fluid-refused' | 'two-phases' | 'temperature-tied' | 'not-smooth' | 'too-many-seams';
+export type NoSurface =
+  | 'fluid-refused'
+  | 'two-phases'
+  | 'partly-outside'
+  | 'temperature-tied'
+  | 'not-smooth'
+  | 'too-many-seams';
 
 /** Largest relative errors. */
 export interface SurfaceBounds {
@@ -36,8 +42,12 @@ export interface Cells {
   readonly bordersT: Float64Array;
   readonly patches: readonly Patch[]; // p before T
   readonly bounds: SurfaceBounds;
+  /** Least and largest isentropic exponent that was met; 1 and 1 of a liquid. */
+  readonly exponents: Side;
   /** Cautions that some state of the box carries. */
   readonly cautions: readonly string[];
+  /** Whether every state of the box is outside the range of its formulation; if only some were there is no surface. */
+  readonly outside: boolean;
   /** True states that were solved for it. */
   readonly states: number;
 }
@@ -89,31 +99,46 @@ export function surfaceOf(stateAt: StateAt, box: Box, seams: Seams): Surface {
   if (typeof bounds === 'string') return exact(bounds);
   const good =
     bounds.density <= MOST_ERROR && Math.max(bounds.viscosity, bounds.isentropicExponent) <= MOST_OTHER_ERROR;
-  return good
-    ? { kind: 'cells', ...cells, bounds, cautions: taken.cautions(), states: taken.count() }
-    : exact('not-smooth');
+  return good ? { kind: 'cells', ...cells, bounds, ...taken.summary() } : exact('not-smooth');
 }
 
 const exact = (why: unknown): Surface => ({ kind: 'exact', why: why as NoSurface });
 
+/** The exponents met are widened by this share, for what lies between the states. */
+const WIDER = 0.05;
+
 /** True states as samples, with a count and with what all of them must have in common. */
 function takenFrom(stateAt: StateAt) {
-  let count = 0;
-  let phase: boolean | undefined;
+  let states = 0;
+  let [phase, outside]: (boolean | undefined)[] = [];
+  let [least, most] = [Number.POSITIVE_INFINITY, 0];
   const cautions = new Set<string>();
   const sample: Sample = (p, T) => {
     const found = stateAt(p, T);
-    count += 1;
+    states += 1;
     if (!found.ok) return 'fluid-refused' satisfies NoSurface;
-    const { density, viscosity, isentropicExponent, expands, temperature } = found.value;
+    const { density, viscosity, isentropicExponent: kappa = 1, expands, temperature } = found.value;
     if (temperature !== T) return 'temperature-tied' satisfies NoSurface;
-    const ids = (found.value.cautions ?? []).map(({ id }) => id);
+    const said = found.value.cautions ?? [];
+    const beyond = said.some(({ verdict }) => verdict === 'outside');
     phase ??= expands;
-    if (expands !== phase || ids.some((id) => twoPhases.includes(id))) return 'two-phases' satisfies NoSurface;
-    for (const id of ids) cautions.add(id);
-    return expands ? [(density * T) / p, viscosity, isentropicExponent as number] : [density, viscosity];
+    outside ??= beyond;
+    if (expands !== phase || said.some(({ id }) => twoPhases.includes(id))) return 'two-phases' satisfies NoSurface;
+    if (beyond !== outside) return 'partly-outside' satisfies NoSurface;
+    for (const { id } of said) cautions.add(id);
+    [least, most] = [Math.min(least, kappa), Math.max(most, kappa)];
+    return expands ? [(density * T) / p, viscosity, kappa] : [density, viscosity];
   };
-  return { sample, count: () => count, expands: () => phase === true, cautions: () => [...cautions] };
+  const summary = () => {
+    const room = WIDER * (most - least);
+    return {
+      exponents: [least - room, most + room] as const,
+      cautions: [...cautions],
+      outside: outside === true,
+      states,
+    };
+  };
+  return { sample, expands: () => phase === true, summary };
 }
 
 /** The corners of the box and states along its edges: a phase border that cuts a corner off shows there first. */
@@ -178,7 +203,7 @@ function meets(patch: Patch, border: number, side: 'pressure' | 'temperature', o
 
 /** The largest errors at states drawn at random, with what the last coefficients leave out. */
 function boundsOf(
-  cells: Omit<Cells, 'kind' | 'bounds' | 'cautions' | 'states'>,
+  cells: Omit<Cells, 'kind' | 'bounds' | 'exponents' | 'cautions' | 'outside' | 'states'>,
   sample: Sample,
 ): SurfaceBounds | string {
   const random = seeded(SEED);
