@@ -6,6 +6,7 @@ import { type Outcome, ok } from './quantity/outcome.ts';
 import { assemble } from './result/assemble.ts';
 import type { MeterResult, Results, Solved } from './result/record.ts';
 import { refused, tagOf } from './result/refuse.ts';
+import { lateReadings } from './run/readings.ts';
 import { solveSite } from './run/site.ts';
 import { type Surroundings, standing } from './run/standing.ts';
 import { solveTraverse } from './run/traverse.ts';
@@ -36,5 +37,7 @@ function size(meter: MeterText, index: number, project: Surroundings): Outcome<S
   const { parts: extra, open } = straight.value;
   const budgets = dutyUncertainty(solution, input.uncertainty, extra, open); // 9 uncertainty of each flow
   const checks = check({ input, solution }, budgets, straight.value.findings); // 10 checks
-  return ok(assemble({ written, input, site, solution, straight: straight.value, budgets, checks })); // 11 the record
+  const late = lateReadings(stands.value, { parts: extra, open }); // 11 the readings, when a view asks for them
+  const parts = { written, input, site, solution, straight: straight.value, budgets, checks, ...late };
+  return ok(assemble(parts)); // 12 the record
 }

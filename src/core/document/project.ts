@@ -10,3 +10,4 @@ export type {
   UncertaintyText,
   Unknown,
 } from './v/1.ts';
+export type { InstrumentText, LiquidText, ReadingText } from './v/1-instrument.ts';

@@ -28,8 +28,8 @@ export function readUpstream(written: object, site: Site, group: 'upstream' | 's
   });
 }
 
-/** Absolute as written, or gauge above the site's atmosphere. */
-function readPressure(form: Form, site: Site, field: string): AbsolutePressure | undefined {
+/** Absolute as written, or gauge above the site's atmosphere. Problem not-above-vacuum. */
+export function readPressure(form: Form, site: Site, field: string): AbsolutePressure | undefined {
   const pressure = form.quantity(field, ['absolute pressure', 'gauge pressure']);
   if (pressure === undefined) return undefined;
   const absolute = pressure.measure === 'gauge pressure' ? aboveVacuum(pressure.si, site) : pressure.si;

@@ -11,7 +11,16 @@ import type { SiteFigureFrom } from '../input/site.ts';
 import type { Problem } from '../quantity/outcome.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Working } from '../quantity/working.ts';
+import type { Readings } from './readings-record.ts';
 import type { TraverseFigures } from './traverse-record.ts';
+
+/** Bounds of a range; one that its source does not give is absent. */
+export interface RangeRecord {
+  readonly minTemperature_K?: number;
+  readonly maxTemperature_K?: number;
+  readonly minPressure_Pa?: number;
+  readonly maxPressure_Pa?: number;
+}
 
 export interface StateRecord {
   readonly density_kg_m3: number;
@@ -149,7 +158,9 @@ export interface Solved {
   readonly working: readonly Working[];
   /** Every source behind the figures of this result, worst `seen` first, each once. */
   readonly sources: readonly Source[];
-  /** Keys of the meter that this version keeps but does not evaluate (readings, log, ...). */
+  /** What was read on the meter's instrument; absent where the file has neither. */
+  readonly readings?: Readings;
+  /** Keys of the meter that this version keeps but does not evaluate (log, ...). */
   readonly unread: readonly string[];
 }
 

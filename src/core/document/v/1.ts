@@ -2,6 +2,7 @@
  * The project file, version 1: what the user wrote, as text. Every value with a dimension is a string kept byte for
  * byte; a plain number stands only for what has no unit. Keys this version does not know are kept.
  */
+import type { InstrumentText, ReadingText } from './1-instrument.ts';
 
 export type Unknown = 'bore' | 'differential' | 'flow';
 export type Display = 'SI' | 'US';
@@ -109,6 +110,8 @@ export interface MeterText {
   find?: Unknown;
   uncertainty?: UncertaintyText;
   installation?: InstallationText;
+  instrument?: InstrumentText;
+  readings?: ReadingText[];
   [key: string]: unknown;
 }
 
