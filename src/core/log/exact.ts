@@ -1,7 +1,7 @@
 /** A row of a log through the whole calculation: the state of its fluid, its metal, its flow, whether it is inside its limits. */
 import { type Bounds, isInside } from '../numeric/bounds.ts';
 import { as } from '../quantity/brand.ts';
-import { flowAt, type MomentFlow, type Standing } from '../run/standing.ts';
+import { flowAt, type Moment, type MomentFlow, type Standing } from '../run/standing.ts';
 
 /** What the standard limits of one flow: Re_D, and p2/p1 of a fluid that expands. */
 export interface FlowLimits {
@@ -24,15 +24,13 @@ export interface Solved {
   readonly inside: boolean;
 }
 
-/** The flow that a differential above zero makes at a pressure and a temperature; else the code of the problem. */
+/** The flow that a differential above zero makes at a moment; else the code of the problem. */
 export function exactRow(
   stands: Standing,
   limits: FlowLimits,
   differential: number,
-  pressure: number,
-  temperature: number,
+  moment: Moment,
 ): Solved | { readonly problem: string } {
-  const moment = { pressure: as<'absolute pressure'>(pressure), temperature: as<'temperature'>(temperature) };
   const flow = flowAt(stands, moment, as<'pressure difference'>(differential));
   if (!flow.ok) return { problem: flow.problems[0].code };
   const { meter, operation } = flow.value;

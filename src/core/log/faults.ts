@@ -1,8 +1,8 @@
 /** Rows as they are read -> rows with a differential, a pressure and a temperature, each with the first of its account. */
+import { differentialOf, type Output, type Range, type Signal, type SignalLimits } from '../reading/signal.ts';
 import { ACCOUNT, accountOfTrouble } from './account.ts';
 import { type Batch, makeRoom } from './batch.ts';
 import { type Chunk, PRESSURE_MISSING, TEMPERATURE_MISSING, TIME_REPEATED } from './chunk.ts';
-import { differentialOf, type SignalRule } from './signal.ts';
 import { isSpike, openSpikes, type Spikes } from './spike.ts';
 
 /** Figure of every row where no column holds it, and what stands in where a row of the column has none. */
@@ -11,8 +11,18 @@ export interface Stands {
   readonly fallback?: number;
 }
 
+/** The signal of a transmitter, all in the unit of the column. */
+export interface SignalRule {
+  readonly ends: Pick<Signal, 'zero' | 'full'>;
+  readonly range: Range;
+  readonly output: Output;
+  readonly zero: number; // of the cell, Pa
+  readonly limits: SignalLimits;
+}
+
 export interface FaultRule {
-  readonly signal: SignalRule;
+  /** Absent where the column holds the differential. */
+  readonly signal?: SignalRule;
   readonly pressure: Stands; // Pa absolute
   readonly temperature: Stands; // K
   /** A differential below it is no flow, Pa; 0 where no cut-off is stated. */
@@ -63,27 +73,26 @@ export function screen(faults: Faults, chunk: Chunk, batch: Batch): void {
 
 /** The account of a row that has its place in time; fills in its figures. */
 function judge(faults: Faults, chunk: Chunk, at: number, batch: Batch, place: number): number {
-  const { rule } = faults;
+  const { rule, spikes } = faults;
   const signal = chunk.signal[at] as number;
   const missing = chunk.missing[at] as number;
-  const differential = differentialOf(rule.signal, signal);
+  const frozen = isFrozen(faults, signal);
+  const state = rule.signal === undefined ? ACCOUNT.converted : stateOf(rule.signal, signal);
+  if (state === ACCOUNT.fault) return state;
+  const differential = rule.signal === undefined ? signal : seen(rule.signal, signal);
+  const spike = spikes !== undefined && isSpike(spikes, differential);
+  batch.differential[place] = differential;
   const noPressure = (missing & PRESSURE_MISSING) !== 0;
-  const noTemperature = (missing & TEMPERATURE_MISSING) !== 0;
   const pressure = noPressure ? rule.pressure.fallback : (chunk.pressure?.[at] ?? rule.pressure.constant);
+  if (pressure === undefined) return ACCOUNT.pressureMissing;
+  const noTemperature = (missing & TEMPERATURE_MISSING) !== 0;
   const temperature = noTemperature
     ? rule.temperature.fallback
     : (chunk.temperature?.[at] ?? rule.temperature.constant);
-  const frozen = isFrozen(faults, signal);
-  const { faultBelow, faultAbove, saturatedAbove, uncertainBelow } = rule.signal;
-  if (signal <= faultBelow || signal >= faultAbove) return ACCOUNT.fault;
-  const spike = faults.spikes !== undefined && isSpike(faults.spikes, differential);
-  batch.differential[place] = differential;
-  if (pressure === undefined) return ACCOUNT.pressureMissing;
   if (temperature === undefined) return ACCOUNT.temperatureMissing;
   batch.pressure[place] = pressure;
   batch.temperature[place] = temperature;
-  if (signal > saturatedAbove) return ACCOUNT.saturated;
-  if (signal < uncertainBelow) return ACCOUNT.uncertain;
+  if (state !== ACCOUNT.converted) return state;
   if (differential < 0) return ACCOUNT.negative;
   if (differential < rule.cutOff) return ACCOUNT.belowCutOff;
   if (noPressure) return ACCOUNT.pressureSubstituted;
@@ -92,6 +101,17 @@ function judge(faults: Faults, chunk: Chunk, at: number, batch: Batch, place: nu
   if (frozen) return ACCOUNT.frozen;
   return (missing & TIME_REPEATED) === 0 ? ACCOUNT.converted : ACCOUNT.hourRepeated;
 }
+
+/** What the limits say of a signal; the limits of a fault themselves are faults. NAMUR NE 43. */
+function stateOf({ limits }: SignalRule, signal: number): number {
+  if (signal <= limits.failLow || signal >= limits.failHigh) return ACCOUNT.fault;
+  if (signal > limits.high) return ACCOUNT.saturated;
+  return signal < limits.low ? ACCOUNT.uncertain : ACCOUNT.converted;
+}
+
+/** Differential of a signal, Pa. */
+const seen = ({ ends, range, output, zero }: SignalRule, signal: number): number =>
+  differentialOf((signal - ends.zero) / (ends.full - ends.zero), range, output) - zero;
 
 /** Whether the signal has stood still for as many rows as are stated. */
 function isFrozen(faults: Faults, signal: number): boolean {

@@ -7,6 +7,7 @@ import { FIRST_REFUSED } from './account.ts';
 import { type Batch, drop, openBatch } from './batch.ts';
 import type { Sink } from './bytes.ts';
 import type { Chunk } from './chunk.ts';
+import { openCovering } from './covering.ts';
 import { daysOfZone } from './days.ts';
 import { addPoint, type Decimation, openDecimation } from './decimate.ts';
 import { type Faults, openFaults, screen } from './faults.ts';
@@ -57,11 +58,13 @@ const DIGITS = 7; // as many as the bound of the surface leaves right
 
 /** Opens a conversion; its output goes to `sink`, whose bytes are used again after the call. */
 export function openLog(plan: LogPlan, sink: Sink, { digits = DIGITS, chunkRows = CHUNK_ROWS }: Manner = {}): Log {
+  const { mapping } = plan;
+  const fixed = { pressure: mapping.pressure === undefined, temperature: mapping.temperature === undefined };
   const stages: Stages = {
     plan,
     batch: openBatch(2 * chunkRows),
     faults: openFaults(plan.faults),
-    flows: openFlows(plan.stands, plan.cutOff, plan.exact),
+    flows: openFlows(plan.stands, plan.faults.cutOff, openCovering(plan.stands, fixed, plan.exact)),
     repeats: openRepeats(),
     shown: openShown(),
     chart: openDecimation(),
@@ -98,9 +101,10 @@ function take(stages: Stages, chunk: Chunk): void {
 function totalsOf(stages: Stages, complete: boolean): Totals | undefined {
   const { plan, batch } = stages;
   if (stages.totals !== undefined) return stages.totals;
-  const maxGap = plan.maxGap ?? longestBridged(batch, complete);
+  const held = plan.mapping.interpretation === 'held';
+  const maxGap = plan.mapping.maxGap ?? (held ? Number.POSITIVE_INFINITY : longestBridged(batch, complete));
   if (maxGap === undefined) return undefined;
-  stages.totals = openTotals({ held: plan.held, maxGap, dayOf: daysOfZone(plan.mapping.zone, plan.dayStart) });
+  stages.totals = openTotals({ held, maxGap, dayOf: daysOfZone(plan.mapping.zone, plan.dayStart) });
   return stages.totals;
 }
 

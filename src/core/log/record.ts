@@ -4,6 +4,7 @@
  */
 import type { Fate } from './account.ts';
 import type { ChartPoint } from './decimate.ts';
+import type { KernelBounds } from './kernel.ts';
 
 export interface ShownRow {
   readonly row: number;
@@ -77,15 +78,13 @@ export interface DayRecord extends PeriodRecord {
 /** How the rows were computed. */
 export interface PathRecord {
   readonly kind: 'surface' | 'exact';
-  /** Why not by the surface, where that was not asked for. */
+  /** Why no wider surface was built, where one was wanted. */
   readonly why?: string;
   /** Rows by the surface, and rows in full. */
   readonly surfaceRows: number;
   readonly exactRows: number;
-  /** Verified relative bounds of the surface of the density and of the approximated coefficient. */
-  readonly densityBound?: number;
-  readonly coefficientBound?: number;
-  readonly flowBound?: number;
+  /** Largest relative errors of the rows by the surface against the whole calculation. */
+  readonly bounds?: KernelBounds;
 }
 
 export interface LogResult extends PeriodRecord {
