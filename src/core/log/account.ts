@@ -2,9 +2,8 @@
  * What became of a row of a log. Every row has exactly one account: converted, converted with a remark, or not converted
  * with the reason. Where several remarks fit, the one that stands first in this list is the account.
  */
+import type { Fate } from '../result/log-record.ts';
 import { TROUBLES } from './chunk.ts';
-
-export type Fate = 'converted' | 'remarked' | 'refused';
 
 export interface Account {
   /** Code of its words. */

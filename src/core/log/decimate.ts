@@ -3,12 +3,7 @@
  * times, so that no peak is lost. Stretches double in length when they have become too many.
  */
 
-export interface ChartPoint {
-  readonly time_s: number;
-  readonly massFlow_kg_s: number;
-  /** Nothing is known between the point before and this one. */
-  readonly afterGap?: true;
-}
+import type { ChartPoint } from '../result/log-record.ts';
 
 /** Two points of each stretch at most: 2,000. */
 const MOST_STRETCHES = 1000;

@@ -4,13 +4,13 @@
  */
 import { isInside } from '../numeric/bounds.ts';
 import { as } from '../quantity/brand.ts';
+import type { PathRecord } from '../result/log-record.ts';
 import type { Standing } from '../run/standing.ts';
 import { ACCOUNT, FIRST_REFUSED } from './account.ts';
 import type { Batch } from './batch.ts';
 import { type Covering, covers, widen } from './covering.ts';
 import { exactRow, type FlowLimits, limitsOf } from './exact.ts';
 import { PATH } from './kernel.ts';
-import type { PathRecord } from './record.ts';
 
 export interface Flows {
   readonly stands: Standing;

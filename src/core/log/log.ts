@@ -3,6 +3,8 @@
  * stands the record of what it came to. What it answers does not depend on where the pieces are cut, and its memory does
  * not grow with the log.
  */
+
+import type { LogResult } from '../result/log-record.ts';
 import { FIRST_REFUSED } from './account.ts';
 import { type Batch, drop, openBatch } from './batch.ts';
 import type { Sink } from './bytes.ts';
@@ -14,7 +16,6 @@ import { type Faults, openFaults, screen } from './faults.ts';
 import { type Flows, flowRows, openFlows } from './flows.ts';
 import { closeOut, type Digits, type Out, openOut, writeRows } from './out.ts';
 import type { LogPlan } from './plan.ts';
-import type { LogResult } from './record.ts';
 import { moveRepeats, openRepeats, type Repeats, settleRepeats } from './repeats.ts';
 import { resultOf } from './result.ts';
 import { openRows } from './rows.ts';

@@ -1,4 +1,6 @@
 /** The stages of a conversion at its end -> its record. */
+
+import type { AccountRecord, DayRecord, LogResult } from '../result/log-record.ts';
 import { accounts, FIRST_REFUSED, FIRST_TROUBLE } from './account.ts';
 import { TROUBLES } from './chunk.ts';
 import { dateOf } from './days.ts';
@@ -7,7 +9,6 @@ import { chartPoints } from './decimate.ts';
 import { type Flows, pathOf } from './flows.ts';
 import type { Period } from './period.ts';
 import type { LogPlan } from './plan.ts';
-import type { AccountRecord, DayRecord, LogResult } from './record.ts';
 import type { LogEnd } from './rows.ts';
 import type { Shown } from './shown.ts';
 import { massOf, periodRecord } from './summary.ts';

@@ -1,7 +1,8 @@
 /** The first rows of each account, to be shown. */
+
+import type { ShownRow } from '../result/log-record.ts';
 import { accounts, FIRST_TROUBLE } from './account.ts';
 import type { Batch } from './batch.ts';
-import type { ShownRow } from './record.ts';
 
 const MOST_SHOWN = 5; // of each account
 

@@ -1,8 +1,8 @@
 /** Sums -> what they say of a day or of the whole log. */
 import { sumOf } from '../numeric/neumaier.ts';
+import type { Extreme, PeriodRecord } from '../result/log-record.ts';
 import { accounts, FIRST_REFUSED } from './account.ts';
 import { EXTREME, extremeOf, integral, type Period, SUM } from './period.ts';
-import type { Extreme, PeriodRecord } from './record.ts';
 
 /** The record of a period; `baseDensity` in kg/m3 where the fluid has one. */
 export function periodRecord(period: Period, baseDensity: number | undefined): PeriodRecord {

@@ -2,9 +2,27 @@
  * What the conversion of a log comes to: the one record that every view of a log reads. Keys carry their SI unit. A
  * number that does not apply is absent. Times are s since 1970-01-01 UTC.
  */
-import type { Fate } from './account.ts';
-import type { ChartPoint } from './decimate.ts';
-import type { KernelBounds } from './kernel.ts';
+
+/** What became of a row: converted, converted with a remark, or not converted. */
+export type Fate = 'converted' | 'remarked' | 'refused';
+
+/** A point of the chart: the smallest or the largest flow of a stretch of time, at its own time. */
+export interface ChartPoint {
+  readonly time_s: number;
+  readonly massFlow_kg_s: number;
+  /** Nothing is known between the point before and this one. */
+  readonly afterGap?: true;
+}
+
+/** Largest relative errors that the explicit rows have against the whole calculation. */
+export interface KernelBounds {
+  readonly density: number;
+  readonly viscosity: number;
+  readonly isentropicExponent: number;
+  readonly coefficient: number;
+  readonly epsilon: number;
+  readonly massFlow: number;
+}
 
 export interface ShownRow {
   readonly row: number;
@@ -87,7 +105,7 @@ export interface PathRecord {
   readonly bounds?: KernelBounds;
 }
 
-export interface LogResult extends PeriodRecord {
+export interface LogRecord extends PeriodRecord {
   readonly tag: string;
   readonly from_s?: number;
   readonly to_s?: number;
