@@ -9,6 +9,7 @@ import { gas } from './gas.ts';
 import { log } from './log.ts';
 import { checksum } from './pairs.ts';
 import { type Line, table } from './report.ts';
+import { rows } from './rows.ts';
 import { screen } from './screen.ts';
 import { orificeCases, ownFlow, solving } from './solving.ts';
 import { water } from './water.ts';
@@ -20,6 +21,7 @@ const parts: Readonly<Record<string, () => Line[] | Promise<Line[]>>> = {
   whole: () => whole(root, ownFlow(orificeCases())),
   water,
   gas,
+  rows,
   log,
   screen: () => screen(root),
 };

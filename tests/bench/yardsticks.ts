@@ -102,3 +102,8 @@ export function ratio(plate: Plate, q: number, dp: number): number {
   }
   return beta;
 }
+
+/** The least that a row of a log can cost: one root and one product, from column to column. */
+export function rootLoop(differential: Float64Array, factor: number, into: Float64Array, count: number): void {
+  for (let row = 0; row < count; row += 1) into[row] = factor * Math.sqrt(differential[row] as number);
+}
