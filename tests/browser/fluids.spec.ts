@@ -164,3 +164,54 @@ test('a table of the user is pasted, its units taken from the header', async ({ 
     },
   });
 });
+
+test('a temperature measured downstream leads to the one upstream', async ({ page }) => {
+  await openProject(page, project);
+  await main(page).getByLabel('Bring the sum to 100 %').check();
+  await expect(answer(page)).toContainText('mm bore reads');
+  await field(page, UPSTREAM, 'Temperature measured').selectOption('downstream');
+  await expect(state(page)).toContainText('from 15 °C measured downstream');
+  await expect(panel(page, 'Working')).toContainText('Joule–Thomson coefficient');
+  expect(await savedMeter(page)).toMatchObject({ upstream: { temperature: '15 degC', temperatureAt: 'downstream' } });
+  await choose(page, 'FE-2103'); // a brine has no such figure: it is not asked
+  await expect(field(page, UPSTREAM, 'Temperature')).toHaveValue('5');
+  await expect(field(page, UPSTREAM, 'Temperature measured')).toHaveCount(0);
+});
+
+test('the equation of a gas is chosen, and its range is said', async ({ page }) => {
+  await openProject(page, project);
+  await main(page).getByLabel('Bring the sum to 100 %').check();
+  await expect(state(page)).toContainText('holds for \u221223.2 to 176.9 °C, at most 350 bar(a)');
+  await main(page).getByText('Equation of state and phase').click();
+  await field(page, UPSTREAM, 'Equation of state').selectOption({ label: 'AGA8 DETAIL' });
+  await expect(state(page)).toContainText('holds for \u221210.2 to 64.9 °C, at most 120 bar(a)');
+});
+
+test('the place of a site suggests its atmosphere', async ({ page }) => {
+  await openProject(page, project);
+  await page.getByRole('button', { name: 'Menu' }).click();
+  await page.getByRole('button', { name: 'Title block, site, base state', exact: true }).click();
+  const dialog = page.getByRole('dialog');
+  await dialog.getByLabel('Altitude', { exact: true }).fill('350');
+  await expect(dialog).toContainText('empty: 97.191 kPa(a), from 350 m');
+  await dialog.getByLabel('Atmospheric pressure', { exact: true }).fill('98 kPa(a)');
+  await expect(dialog).toContainText('suggested from 350 m: 97.191 kPa(a)');
+  await dialog.getByRole('button', { name: 'Atmospheric pressure: take 97.191 kPa(a)' }).click();
+  await expect(dialog.getByLabel('Atmospheric pressure', { exact: true })).toHaveValue('97.191');
+});
+
+test('a unit is never cut, however narrow its field', async ({ page }) => {
+  await openProject(page, project);
+  for (const width of [1600, 1440, 1280, 1024, 600, 390, 320]) {
+    await page.setViewportSize({ width, height: 900 });
+    const unit = main(page).getByLabel('Maximum flow, unit');
+    const short = await unit.evaluate((select: HTMLSelectElement) => {
+      const { fontWeight, fontSize, fontFamily, paddingLeft, paddingRight } = getComputedStyle(select);
+      const ink = document.createElement('canvas').getContext('2d') as CanvasRenderingContext2D;
+      ink.font = `${fontWeight} ${fontSize} ${fontFamily}`;
+      const text = ink.measureText(select.selectedOptions[0]?.text ?? '').width;
+      return text + Number.parseFloat(paddingLeft) + Number.parseFloat(paddingRight) - select.clientWidth;
+    });
+    expect(short, `${width} px`).toBeLessThan(1);
+  }
+});
