@@ -56,10 +56,10 @@ const at = (x: number, zero: number, full: number): number => zero + x * (full -
 export const placeOf = (signal: number, { zero, full }: Signal): number => (signal - zero) / (full - zero);
 
 /** What a limit says of a signal; the limits of failure themselves are failures. */
-export type SignalState = 'failed' | 'uncertain' | 'valid' | 'saturated';
+export type SignalState = 'faulty' | 'uncertain' | 'valid' | 'saturated';
 
 export function stateOfSignal(signal: number, { failLow, low, high, failHigh }: SignalLimits): SignalState {
-  if (signal <= failLow || signal >= failHigh) return 'failed';
+  if (signal <= failLow || signal >= failHigh) return 'faulty';
   if (signal > high) return 'saturated';
   return signal < low ? 'uncertain' : 'valid';
 }

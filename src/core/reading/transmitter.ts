@@ -72,7 +72,7 @@ function shownOf(reading: ReadingInput, own: TransmitterFields, fields: CellFiel
 }
 
 function standingOf(state: SignalState, differential: number, cutOff: number): Standing {
-  if (state === 'failed') return 'failed';
+  if (state === 'faulty') return 'failed';
   if (state === 'saturated') return 'at-least';
   return Math.abs(differential) < cutOff ? 'cut-off' : 'as-shown';
 }
@@ -84,9 +84,9 @@ function signalCautions(
   { unit, size }: Signal,
   { failLow, low, high, failHigh }: SignalLimits,
 ): readonly Caution[] {
-  const common = { value: value / size, unit, source: NE43 } as const;
+  const common = { value: value / size, unit, source: NE43, detail: { unit } } as const;
   const between = (min: number, max: number) => ({ min: min / size, max: max / size });
-  if (state === 'failed')
+  if (state === 'faulty')
     return [{ ...common, id: 'signal-failed', verdict: 'outside', limit: between(failLow, failHigh) }];
   if (state === 'saturated')
     return [{ ...common, id: 'signal-saturated', verdict: 'outside', limit: between(low, high) }];

@@ -5,9 +5,10 @@ import { contextOf } from '../present/context.ts';
 import { inputsHash } from '../present/hash.ts';
 import { surveyContext } from '../present/survey-list.ts';
 import type { Print } from '../words/print.ts';
-import { type Problem, problemSentence } from '../words/problems.ts';
+import type { Problem } from '../words/problems.ts';
 import { dutyNames } from '../words/verdicts.ts';
 import { type Asked, checkOf } from './checks.ts';
+import { readingsOf, writtenProblem } from './readings.ts';
 import { traverseOf } from './traverses.ts';
 
 /** The whole output; its keys keep this order. */
@@ -33,7 +34,8 @@ export function resultsOf(project: Project, results: Results, asked: Asked): obj
 const meterOf = (result: MeterResult, print: Print, asked: Asked): object =>
   result.status === 'refused' ? refusedOf(result, print) : solvedOf(result, print, asked);
 
-function solvedOf(result: Solved, print: Print, { working = false }: Asked): object {
+function solvedOf(result: Solved, print: Print, asked: Asked): object {
+  const { working = false } = asked;
   const points = dutyNames.flatMap((name) => {
     const point = result.points[name];
     return point === undefined ? [] : [[name, pointOf(point, working)] as const];
@@ -51,6 +53,7 @@ function solvedOf(result: Solved, print: Print, { working = false }: Asked): obj
     boreAsMeasured_m: result.boreAsMeasured_m,
     pipeAsMeasured_m: result.pipeAsMeasured_m,
     points: Object.fromEntries(points),
+    ...(result.readings === undefined ? {} : readingsOf(result.readings, print, asked)),
     checks: result.checks.map((finding) => checkOf(finding, print)),
     ...(working ? { working: result.working } : {}),
     unread: result.unread,
@@ -61,11 +64,8 @@ function pointOf({ working, ...figures }: PointRecord, asked: boolean): object {
   return asked ? { ...figures, working } : figures;
 }
 
-function refusedOf({ tag, status, problem, problems }: Refused, print: Print): object {
-  const written = ({ code, field, detail }: Problem) => ({
-    code,
-    field,
-    message: problemSentence({ code, field, detail }, print),
-  });
+/** A meter that was refused, with every reason. */
+export function refusedOf({ tag, status, problem, problems }: Refused, print: Print): object {
+  const written = (one: Problem) => writtenProblem(one, print);
   return { tag, status, problem: written(problem), problems: problems.map(written) };
 }

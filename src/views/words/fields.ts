@@ -1,6 +1,7 @@
 /** Labels of the document's fields by path, and how a sentence names each. */
 
 import { componentLabel } from './components.ts';
+import { instrumentLabels, readingParts } from './fields-of-instrument.ts';
 import { readingLabel, traverseLabels } from './fields-of-traverse.ts';
 
 const labels: Readonly<Record<string, string>> = {
@@ -87,7 +88,7 @@ const labels: Readonly<Record<string, string>> = {
   'base.pressure': 'Base pressure',
   'base.temperature': 'Base temperature',
   display: 'Units',
-  instrument: 'Instrument',
+  ...instrumentLabels,
   readings: 'Readings',
   log: 'Log',
   meters: 'Meters',
@@ -103,6 +104,7 @@ const inRow: Readonly<Record<string, string>> = {
   density: 'density',
   viscosity: 'viscosity',
   velocity: 'velocity',
+  ...readingParts,
 };
 
 /** A path without the meter it stands in and with its row numbers apart. */

@@ -5,6 +5,7 @@ import { fieldPlace } from './fields.ts';
 import { checksOfAir } from './findings-of-air.ts';
 import { checksOfFlow } from './findings-of-flow.ts';
 import { checksOfLiquids } from './findings-of-liquids.ts';
+import { checksOfReadings } from './findings-of-readings.ts';
 import { checksOfSize } from './findings-of-size.ts';
 import { checksOfTraverse } from './findings-of-traverse.ts';
 import type { Print } from './print.ts';
@@ -16,6 +17,7 @@ export const findingWords: Readonly<Record<string, FindingWords>> = {
   ...checksOfLiquids,
   ...checksOfAir,
   ...checksOfTraverse,
+  ...checksOfReadings,
 };
 
 /** The line of a finding and its limit, figures printed by `print`. A code without words is a defect. */

@@ -9,6 +9,7 @@ import { gasProblems } from './problems-of-gases.ts';
 import { inputProblems } from './problems-of-input.ts';
 import { liquidProblems } from './problems-of-liquids.ts';
 import { numberProblems } from './problems-of-numbers.ts';
+import { readingProblems } from './problems-of-readings.ts';
 import { solvingProblems } from './problems-of-solving.ts';
 import { traverseProblems } from './problems-of-traverse.ts';
 
@@ -22,6 +23,7 @@ export const problemWords: ProblemWords = {
   ...liquidProblems,
   ...solvingProblems,
   ...traverseProblems,
+  ...readingProblems,
   ...fileProblems,
 };
 

@@ -1,5 +1,6 @@
 /** Names of the quantities that are put into a formula. */
 import { catalogue } from './catalogue.ts';
+import { quantitiesOfReadings } from './quantities-of-readings.ts';
 
 export const quantityNames: Readonly<Record<string, string>> = {
   altitude: 'Altitude of the site',
@@ -81,6 +82,7 @@ export const quantityNames: Readonly<Record<string, string>> = {
   'water-fraction': 'Mole fraction of water vapour',
   'water-mass-fraction': 'Mass fraction of water',
   'wet-bulb': 'Wet bulb temperature',
+  ...quantitiesOfReadings,
 };
 
 export const quantityName = catalogue('quantity', quantityNames);

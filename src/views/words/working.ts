@@ -38,6 +38,12 @@ export const workingTitles: Readonly<Record<string, string>> = {
   'traverse-mean': 'Mean velocity in the section',
   loss: 'Permanent pressure loss',
   uncertainty: 'Uncertainty of the flow, 95\u00a0%',
+  gaugeLiquid: 'Density of the gauge liquid',
+  trueLength: 'Length from the zero of the scale',
+  separation: 'Vertical distance of the two levels',
+  place: 'Place of the signal in its range',
+  cell: 'Difference that the cell sees',
+  uncertaintyOfReading: 'Uncertainty of the reading, 95\u00a0%',
 };
 
 export const workingTitle = catalogue('working', workingTitles);

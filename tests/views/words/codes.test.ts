@@ -28,7 +28,7 @@ function found(pattern: RegExp, path = /./): string[] {
 function problemCodes(): string[] {
   const statements = found(
     /((?:\bfail|\breport|\bwithin|\bcode\b)[^;{}]*(?:\{[^{}]*\}[^;{}]*)?;?)/g,
-    /document|input|fluid|solve|quantity|registry|straight\.ts|traverse|run\.ts/,
+    /document|input|fluid|solve|quantity|registry|straight\.ts|traverse|reading|run\.ts/,
   );
   const literals = statements.flatMap((text) =>
     [...text.matchAll(/'([a-z]+(?:-[a-z0-9]+)+)'/g)].map((match) => match[1] ?? ''),
@@ -49,9 +49,9 @@ describe('every code of the core has its words', () => {
     expect(Object.keys(problemWords).filter((code) => !whole.includes(`'${code}'`))).toEqual([]);
   });
   it('findings', () => {
-    const ids = found(/id: '([a-z-]+)'(?!, percent)/g, /check\//).concat(
-      found(/(?:size\(subject|thickness\(subject|judge\()[, ]*'([a-z-]+)'/g, /check\//),
-    );
+    const ids = found(/\bid: '([a-z]+-[a-z-]+)'/g, /reading\//)
+      .concat(found(/id: '([a-z-]+)'(?!, percent)/g, /check\//))
+      .concat(found(/(?:size\(subject|thickness\(subject|judge\()[, ]*'([a-z-]+)'/g, /check\//));
     expect(ids.length).toBeGreaterThan(12);
     expect(ids.filter((id) => findingWords[id] === undefined)).toEqual([]);
     const ternary = found(/id: \w+ \? '([a-z-]+)'/g, /check\//);
@@ -62,7 +62,7 @@ describe('every code of the core has its words', () => {
     expect(ids.length).toBeGreaterThan(12);
     expect(ids.filter((id) => workingTitles[id] === undefined)).toEqual([]);
     const quantities = found(/words: '([a-z-]+)'/g).concat(
-      found(/(?:given|named)\('[^']+', [^;]+?, '([a-z]+(?:-[a-z]+)*)'\)/g, /element|fluid|result/),
+      found(/(?:given|named)\('[^']+', [^;]+?, '([a-z]+(?:-[a-z]+)*)'\)/g, /element|fluid|result|reading/),
     );
     expect(quantities.length).toBeGreaterThan(20);
     expect(quantities.filter((code) => quantityNames[code] === undefined)).toEqual([]);

@@ -1,0 +1,56 @@
+/** Findings on one reading: what the instrument says of itself, and how the differential stands in the span. */
+import type { Detail, FindingWords } from './detail.ts';
+
+/** A signal is printed in its own unit, which no display changes. */
+const signal = (figure: string, detail: Detail): string => `${figure}\u00a0${detail.text('unit')}`;
+const ofSignal = (text: (figure: string) => string): FindingWords => ({
+  role: 'number',
+  text: (figure, detail) => text(signal(figure, detail)),
+  limit: (bounds, detail) => signal(bounds, detail),
+});
+
+export const checksOfReadings: Readonly<Record<string, FindingWords>> = {
+  'reading-reversed': {
+    role: 'differential',
+    text: (figure) =>
+      `Differential ${figure}: the flow runs backwards, the legs are crossed, or a leg holds something else`,
+  },
+  'reading-above-span': {
+    role: 'differential',
+    text: (figure) => `Differential ${figure}, above the span of the meter`,
+  },
+  'gauge-liquid-range': {
+    role: 'temperature',
+    text: (figure) => `Gauge liquid at ${figure}, outside the formula of its density`,
+  },
+  'signal-failed': ofSignal((figure) => `Signal ${figure}: the instrument reports a failure, there is no reading`),
+  'signal-saturated': ofSignal((figure) => `Signal ${figure}: saturated, the flow is at least what stands here`),
+  'signal-uncertain': ofSignal((figure) => `Signal ${figure}: below its valid range`),
+  'below-cut-off': {
+    role: 'differential',
+    text: (figure) => `Differential ${figure}, below the cut-off: taken as no flow`,
+  },
+  'cells-apart': {
+    role: 'differential',
+    text: (figure) => `The two cells differ by ${figure}, more than their uncertainties together`,
+  },
+};
+
+/** What the findings of readings are called in one or two words, for a row of the table. */
+export const readingFlags: Readonly<Record<string, string>> = {
+  'reading-reversed': 'legs crossed or flow reversed',
+  'reading-above-span': 'above the span',
+  'gauge-liquid-range': 'gauge liquid out of range',
+  'signal-failed': 'instrument failed',
+  'signal-saturated': 'saturated, at least',
+  'signal-uncertain': 'signal uncertain',
+  'below-cut-off': 'below the cut-off',
+  'cells-apart': 'cells differ',
+  'reynolds-pipe': 'Reynolds number outside',
+  'pressure-ratio': 'p₂/p₁ outside',
+  flashing: 'flashing',
+  cavitation: 'boils in the jet',
+  'cavitation-margin': 'near boiling in the jet',
+  subcooling: 'near boiling',
+  superheat: 'near condensing',
+};
