@@ -105,7 +105,7 @@ export interface PathRecord {
   readonly bounds?: KernelBounds;
 }
 
-export interface LogRecord extends PeriodRecord {
+export interface LogResult extends PeriodRecord {
   readonly tag: string;
   readonly from_s?: number;
   readonly to_s?: number;

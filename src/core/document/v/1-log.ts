@@ -31,5 +31,6 @@ export interface LogText {
   frozen?: string | number; // rows with one and the same signal that are suspect
   spike?: string | number; // distance from the median that is suspect, in median absolute deviations
   fallback?: { pressure?: string; temperature?: string; [key: string]: unknown };
+  exact?: boolean; // every row through the whole calculation, without a surface
   [key: string]: unknown;
 }
