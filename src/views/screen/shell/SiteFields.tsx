@@ -1,7 +1,7 @@
 /** Where the site lies and what it stands in; what is empty is said, and what its place suggests can be taken. */
 import { SITE_DEFAULTS } from '../../../core/document/defaults.ts';
 import { asPrinted } from '../../present/base.ts';
-import { type Suggestions, siteSuggestions } from '../../present/site.ts';
+import { type Suggestion, type Suggestions, siteSuggestions } from '../../present/site.ts';
 import { fieldLabel } from '../../words/fields.ts';
 import { problemSentence } from '../../words/problems.ts';
 import { siteWords as words } from '../../words/site.ts';
@@ -29,7 +29,12 @@ export function SiteFields() {
     const problem = refused.find(({ field }) => field === path);
     return problem && problemSentence(problem);
   };
-  const suggestions = siteSuggestions(project, results);
+  const suggestions: Suggestions = siteSuggestions(project, results);
+  const noteOn = (path: string, usual: string, text: string) => {
+    const suggestion = path === 'site.atmosphere' || path === 'site.gravity' ? suggestions[path] : undefined;
+    if (suggestion !== undefined) return <Suggested path={path} text={text} suggestion={suggestion} />;
+    return text === '' && usual !== '' && <span>{words.empty(asPrinted(usual))}</span>;
+  };
   return Object.entries(USUAL).map(([path, usual]) => (
     <QuantityBox
       key={path}
@@ -37,25 +42,21 @@ export function SiteFields() {
       text={textAt(project, path)}
       problem={problemAt(path)}
       write={(next) => write(path, next)}
-      note={<Note path={path} text={textAt(project, path)} usual={usual} suggestions={suggestions} />}
+      note={noteOn(path, usual, textAt(project, path))}
     />
   ));
 }
 
-interface NoteProps {
+interface SuggestedProps {
   readonly path: string;
   readonly text: string;
-  readonly usual: string;
-  readonly suggestions: Suggestions;
+  readonly suggestion: Suggestion;
 }
 
-/** Below a figure: what stands there while it is empty, or what the place of the site suggests. */
-function Note({ path, text, usual, suggestions }: NoteProps) {
+/** What the place of the site suggests: in use while the field is empty, else there to be taken. */
+function Suggested({ path, text, suggestion: { sentence, figure, file, taken } }: SuggestedProps) {
   const write = useWorkbench((state) => state.writeProject);
   const settle = useWorkbench((state) => state.settle);
-  const suggestion = path === 'site.atmosphere' || path === 'site.gravity' ? suggestions[path] : undefined;
-  if (suggestion === undefined) return text === '' && usual !== '' && <span>{words.empty(asPrinted(usual))}</span>;
-  const { sentence, figure, file, taken } = suggestion;
   const take = (): void => {
     settle();
     write(path, file);
