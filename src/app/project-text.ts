@@ -9,7 +9,7 @@ export const readProject = (text: string): Outcome<Project> => decode(text.repla
 /** The title for lists and file names; without one, the first tags. */
 export function titleOf(project: Project): string {
   if (typeof project.title === 'string' && project.title.trim() !== '') return project.title;
-  const tags = project.meters.flatMap((meter: unknown) => {
+  const tags = [...project.meters, ...(project.traverses ?? [])].flatMap((meter: unknown) => {
     const tag = typeof meter === 'object' && meter !== null && 'tag' in meter ? meter.tag : undefined;
     return typeof tag === 'string' && tag !== '' ? [tag] : [];
   });

@@ -59,7 +59,7 @@ export function termTable({ duty }: PresentedSizing, written: UncertaintyText | 
   };
 }
 
-export const checkBlocks = ({ checks }: PresentedSizing, keyOf: KeyOf): readonly CheckBlock[] =>
+export const checkBlocks = ({ checks }: Pick<PresentedSizing, 'checks'>, keyOf: KeyOf): readonly CheckBlock[] =>
   checks.map(({ assumption, title, verdict, rows, open }) => ({
     assumption,
     title,

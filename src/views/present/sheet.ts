@@ -1,10 +1,10 @@
 /** Everything one printed sheet shows, as text: rows with the number of their source, tables, names and fingerprint. */
-import type { MeterText, Project } from '../../core/document/project.ts';
+import type { MeterText, Project, TraverseText } from '../../core/document/project.ts';
 import type { MeterResult, Results, Solved } from '../../core/result/record.ts';
 import { cautions } from '../words/cautions.ts';
 import { openingWord } from '../words/elements.ts';
 import { fieldLabel } from '../words/fields.ts';
-import { computedWith, notCurrent } from '../words/sheet.ts';
+import { computedWith, notCurrent, sheetWords } from '../words/sheet.ts';
 import { contextOf } from './context.ts';
 import { inputsHash } from './hash.ts';
 import { presentMeter } from './meter.ts';
@@ -27,8 +27,8 @@ import { version } from './version.ts';
 export interface Printing {
   readonly project: Project;
   readonly results: Results;
-  /** Index of the one meter to print; every meter unless given. */
-  readonly only?: number;
+  /** The one meter or survey to print; all of them unless given. */
+  readonly only?: { readonly list: 'meters' | 'traverses'; readonly index: number };
   /** True while the results belong to earlier inputs; every sheet then says so. */
   readonly stale?: boolean;
 }
@@ -50,6 +50,8 @@ export interface SheetHead {
 export interface RefusedSheet {
   readonly status: 'refused';
   readonly head: SheetHead;
+  readonly type: string; // of the document
+  readonly lead: string;
   readonly problems: readonly { readonly field: string; readonly sentence: string }[];
   /** What was written, so that the reason can be found on the paper. */
   readonly inputs: readonly { readonly field: string; readonly text: string }[];
@@ -82,10 +84,14 @@ export type PresentedSheet = SizingSheet | RefusedSheet;
 export function presentSheets({ project, results, only, stale = false }: Printing): readonly PresentedSheet[] {
   return results.results.flatMap((result, index) => {
     const meter = project.meters[index];
-    if (meter === undefined || (only !== undefined && only !== index)) return [];
+    if (meter === undefined || !isAsked(only, 'meters', index)) return [];
     return [presentSheet(meter, project, result, stale)];
   });
 }
+
+/** Whether an item of a list is to be printed. */
+export const isAsked = (only: Printing['only'], list: 'meters' | 'traverses', index: number): boolean =>
+  only === undefined || (only.list === list && only.index === index);
 
 export function presentSheet(meter: MeterText, project: Project, result: MeterResult, stale = false): PresentedSheet {
   const presented = presentMeter(meter, project, result);
@@ -96,7 +102,12 @@ export function presentSheet(meter: MeterText, project: Project, result: MeterRe
 
 const isSizing = (meter: PresentedMeter | PresentedSizing): meter is PresentedSizing => meter.status === 'solved';
 
-function headOf(meter: MeterText, project: Project, presented: PresentedMeter, stale: boolean): SheetHead {
+export function headOf(
+  item: MeterText | TraverseText,
+  project: Project,
+  presented: Pick<PresentedMeter, 'tag' | 'service' | 'element' | 'standard'>,
+  stale: boolean,
+): SheetHead {
   const { title, revision, preparedBy, checkedBy } = project;
   const { tag, service, element, standard } = presented;
   return {
@@ -108,7 +119,7 @@ function headOf(meter: MeterText, project: Project, presented: PresentedMeter, s
     revision: textOf(revision),
     preparedBy: textOf(preparedBy),
     checkedBy: textOf(checkedBy),
-    status: computedWith(version, inputsHash(meter, project)),
+    status: computedWith(version, inputsHash(item, project)),
     warning: stale ? notCurrent : '',
   };
 }
@@ -147,6 +158,8 @@ function refusedSheet(head: SheetHead, meter: MeterText, { problems }: Presented
   return {
     status: 'refused',
     head,
+    type: sheetWords.documentType,
+    lead: sheetWords.refused,
     problems: problems.map(({ field, sentence }) => ({ field: fieldLabel(field), sentence })),
     inputs: writtenIn(meter, '').map(([path, text]) => ({ field: fieldLabel(path), text })),
     cautions: cautions({ fluid: '', phase: '' }),
@@ -154,7 +167,7 @@ function refusedSheet(head: SheetHead, meter: MeterText, { problems }: Presented
 }
 
 /** Every text and number of a meter, by path. */
-function writtenIn(node: unknown, path: string): readonly (readonly [path: string, text: string])[] {
+export function writtenIn(node: unknown, path: string): readonly (readonly [path: string, text: string])[] {
   if (typeof node === 'string' || typeof node === 'number') return [[path, String(node)]];
   if (typeof node !== 'object' || node === null) return [];
   return Object.entries(node).flatMap(([key, inner]) => writtenIn(inner, path === '' ? key : `${path}.${key}`));

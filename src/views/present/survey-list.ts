@@ -1,10 +1,10 @@
 /** A survey as the list of the project shows it: names, verdict, what stands in the way. */
 import type { MeterText, Project, TraverseText } from '../../core/document/project.ts';
 import type { TraverseResult } from '../../core/result/record.ts';
-import { surveyLabel } from '../words/surveys.ts';
+import { readShort, surveyLabel } from '../words/surveys.ts';
 import { meterVerdict, notSolved } from '../words/verdicts.ts';
 import { type Context, contextOf } from './context.ts';
-import type { PresentedMeter, PresentedProblem } from './model.ts';
+import type { PresentedProblem, Verdict } from './model.ts';
 import { printer } from './numbers.ts';
 import { presentProblem } from './problem.ts';
 import { type DisplayUnits, unit, written } from './units.ts';
@@ -14,7 +14,7 @@ export interface ListedSurvey {
   readonly service: string;
   readonly title: string; // 'Rectangular duct, log-Tchebycheff'
   readonly problems: readonly PresentedProblem[];
-  readonly verdict: PresentedMeter['verdict'];
+  readonly verdict: { readonly worst: Verdict | 'refused' | 'unchecked'; readonly words: string };
   /** How far it is read; undefined where there is no plan. */
   readonly progress: { readonly measured: number; readonly points: number } | undefined;
 }
@@ -30,12 +30,17 @@ export function listSurvey(traverse: TraverseText, project: Project, result: Tra
       result.status === 'solved'
         ? []
         : result.problems.map((problem) => presentProblem(problem, surveyContext(traverse, project).print)),
-    verdict:
-      result.status === 'solved'
-        ? meterVerdict(result.checks.map(({ verdict }) => verdict))
-        : { worst: 'refused', words: notSolved },
+    verdict: verdictOf(result),
     progress: plan === undefined ? undefined : { measured: plan.measured, points: plan.points },
   };
+}
+
+/** A survey is judged once it is read to the end. */
+function verdictOf(result: TraverseResult): ListedSurvey['verdict'] {
+  if (result.status === 'refused') return { worst: 'refused', words: notSolved };
+  const { measured, points, checks } = result;
+  if (measured < points) return { worst: 'unchecked', words: readShort(measured, points) };
+  return meterVerdict(checks.map(({ verdict }) => verdict));
 }
 
 /** Figures of a survey in its own units: differentials as they were read, air by the cubic metre an hour or foot a minute. */

@@ -1,23 +1,29 @@
 /**
- * What the printer gets while a meter is being sized: its sheets, drawn when the typing rests, and at once when the
+ * What the printer gets while a meter or a survey is worked on: its sheets, drawn when the typing rests, and at once when the
  * browser is about to print.
  */
 import { Suspense, useMemo, useSyncExternalStore } from 'react';
+import { type ListName, standingOf } from '../../state/lists.ts';
 import { useWorkbench } from './binding.tsx';
 import { paperFor, type SheetsView } from './SheetPlace.tsx';
 import { useRested } from './useRested.ts';
 
 const REST = 1000; // ms
 
-export function PaperOfSize({ sheets: Sheets }: { readonly sheets: SheetsView }) {
+interface Props {
+  readonly list: ListName;
+  readonly sheets: SheetsView;
+}
+
+export function PaperOfSize({ list, sheets: Sheets }: Props) {
   const project = useWorkbench((state) => state.project);
   const results = useWorkbench((state) => state.results);
-  const only = useWorkbench((state) => state.selected);
-  const now = useMemo(() => ({ project, results, only }), [project, results, only]);
+  const index = useWorkbench((state) => standingOf(state, list).selected);
+  const now = useMemo(() => ({ project, results, only: { list, index } }), [project, results, list, index]);
   const rested = useRested(now, REST);
   const printing = usePrinting();
   const shown = printing ? now : rested;
-  if (shown === undefined || shown.only < 0) return null;
+  if (shown === undefined || shown.only.index < 0) return null;
   return (
     <Suspense fallback={null}>
       <Sheets {...shown} paper={paperFor(shown.project)} paperOnly />

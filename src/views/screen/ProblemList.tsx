@@ -2,11 +2,10 @@
 import { fieldLabel } from '../words/fields.ts';
 import buttons from './button.module.css';
 import { focusField } from './focus.ts';
-import type { SelectedMeter } from './meter.ts';
 import styles from './ProblemList.module.css';
-import { unsolved } from './unsolved.ts';
+import { type Troubled, unsolved } from './unsolved.ts';
 
-export function ProblemList({ selected }: { readonly selected: SelectedMeter }) {
+export function ProblemList({ selected }: { readonly selected: Troubled }) {
   const { wrong, missing } = unsolved(selected);
   return (
     <div className={styles.list}>

@@ -1,5 +1,5 @@
 /** The screen: header, list of meters, and the place the address names. */
-import { Suspense, useState } from 'react';
+import { lazy, Suspense, useState } from 'react';
 import type { Commands } from '../../state/commands.ts';
 import type { WorkbenchStore } from '../../state/workbench.ts';
 import { Boundary } from './Boundary.tsx';
@@ -14,10 +14,12 @@ import { DialogProvider } from './shell/dialogs.tsx';
 import { Header } from './shell/Header.tsx';
 import { Hotkeys } from './shell/Hotkeys.tsx';
 import { Messages } from './shell/Messages.tsx';
-import { MeterList } from './shell/MeterList.tsx';
+import { Side } from './shell/Side.tsx';
 import { startTheme } from './theme.ts';
 import './tokens.css';
 import styles from './Root.module.css';
+
+const Survey = lazy(async () => ({ default: (await import('./survey/Survey.tsx')).Survey }));
 
 interface Props {
   readonly store: WorkbenchStore;
@@ -50,15 +52,15 @@ function Body({ sheets }: { readonly sheets: SheetsView }) {
   const project = useWorkbench((state) => state.project);
   return (
     <div className={styles.body}>
-      <Boundary of={project}>
-        <MeterList />
-      </Boundary>
+      <Side />
       <main className={styles.main} id="content" tabIndex={-1}>
         <Suspense fallback={<p className={styles.wait}>One moment</p>}>
           <Boundary key={place} of={project}>
-            {place === 'size' ? <Size /> : <SheetPlace sheets={sheets} />}
+            {place === 'size' && <Size />}
+            {place === 'survey' && <Survey />}
+            {place === 'sheet' && <SheetPlace sheets={sheets} />}
           </Boundary>
-          {place === 'size' && <PaperOfSize sheets={sheets} />}
+          {place !== 'sheet' && <PaperOfSize list={place === 'survey' ? 'traverses' : 'meters'} sheets={sheets} />}
         </Suspense>
       </main>
     </div>

@@ -2,18 +2,19 @@
 import { type ComponentType, useState } from 'react';
 import type { Project } from '../../core/document/project.ts';
 import type { Results } from '../../core/result/record.ts';
+import { type ListName, standingOf } from '../../state/lists.ts';
 import { useCommands, useWorkbench } from './binding.tsx';
 import styles from './SheetPlace.module.css';
 
 export type Paper = 'A4' | 'Letter';
-export type SheetKind = 'sizing' | 'checks' | 'dimensions' | 'working';
+export type SheetKind = 'form' | 'survey' | 'sizing' | 'checks' | 'dimensions' | 'working';
 
 /** The printed sheets; app hands them in, the screen only gives them their place. */
 export type SheetsView = ComponentType<{
   readonly project: Project;
   readonly results: Results;
   readonly paper: Paper;
-  readonly only?: number;
+  readonly only?: { readonly list: ListName; readonly index: number };
   readonly include?: readonly SheetKind[];
   readonly paperOnly?: boolean;
 }>;
@@ -21,6 +22,8 @@ export type SheetsView = ComponentType<{
 const PAPERS: readonly Paper[] = ['A4', 'Letter'];
 const SHEETS: readonly { readonly kind: SheetKind; readonly label: string }[] = [
   { kind: 'sizing', label: 'Sizing' },
+  { kind: 'form', label: 'Field form' },
+  { kind: 'survey', label: 'Survey' },
   { kind: 'checks', label: 'Checks and sources' },
   { kind: 'dimensions', label: 'Tolerances and inspection' },
   { kind: 'working', label: 'Working' },
@@ -29,13 +32,20 @@ const SHEETS: readonly { readonly kind: SheetKind; readonly label: string }[] = 
 /** The paper that goes with the units of a project. */
 export const paperFor = ({ display }: Project): Paper => (display === 'US' ? 'Letter' : 'A4');
 
+/** The form for the field goes along while some survey is not read to the end. */
+function usualSheets({ traverses }: Results): readonly SheetKind[] {
+  const read = traverses.every((result) => result.status === 'solved' && result.measured === result.points);
+  return [...(read ? [] : ['form' as const]), 'survey', 'sizing', 'checks', 'dimensions'];
+}
+
 export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) {
   const project = useWorkbench((state) => state.project);
   const results = useWorkbench((state) => state.results);
-  const selected = useWorkbench((state) => state.selected);
+  const list = useWorkbench((state) => state.hand);
+  const index = useWorkbench((state) => standingOf(state, state.hand).selected);
   const [paper, setPaper] = useState<Paper>(paperFor(project));
   const [alone, setAlone] = useState(false);
-  const [include, setInclude] = useState<readonly SheetKind[]>(['sizing', 'checks', 'dimensions']);
+  const [include, setInclude] = useState<readonly SheetKind[]>(() => usualSheets(results));
   const commands = useCommands();
   return (
     <div className={styles.place}>
@@ -43,8 +53,8 @@ export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) 
       <div className={styles.bar}>
         <Choices legend="Paper" name="paper" choices={PAPERS} chosen={paper} choose={setPaper} />
         <Choices
-          legend="Meters"
-          name="meters"
+          legend="Print"
+          name="which"
           choices={['all', 'this one']}
           chosen={alone ? 'this one' : 'all'}
           choose={(choice) => setAlone(choice === 'this one')}
@@ -60,7 +70,7 @@ export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) 
           results={results}
           paper={paper}
           include={include}
-          {...(alone && selected >= 0 ? { only: selected } : {})}
+          {...(alone && index >= 0 ? { only: { list, index } } : {})}
         />
       </div>
     </div>
@@ -72,7 +82,7 @@ interface KindsProps {
   readonly choose: (include: readonly SheetKind[]) => void;
 }
 
-/** Which sheets of each meter. */
+/** Which sheets of each meter and survey. */
 function Kinds({ include, choose }: KindsProps) {
   const toggle = (kind: SheetKind) =>
     choose(include.includes(kind) ? include.filter((one) => one !== kind) : [...include, kind]);

@@ -44,8 +44,7 @@ export function useSelectedMeter(): SelectedMeter | undefined {
 export const useLater = <Part>(part: Part): Part => useDeferredValue(part);
 
 /** The text of one field of the item at hand. */
-export const useMeterText = (path: string): string =>
-  useItem((item) => textAt(item, path));
+export const useMeterText = (path: string): string => useItem((item) => textAt(item, path));
 
 const NONE: readonly PresentedProblem[] = [];
 

@@ -3,6 +3,7 @@ import { useSyncExternalStore } from 'react';
 
 export const PLACES = [
   { id: 'size', label: 'Size' },
+  { id: 'survey', label: 'Survey' },
   { id: 'sheet', label: 'Sheet' },
 ] as const;
 
@@ -10,9 +11,16 @@ export type PlaceId = (typeof PLACES)[number]['id'];
 
 const placeOf = (hash: string): PlaceId => PLACES.find((place) => hash === `#/${place.id}`)?.id ?? 'size';
 
+/** The place at hand, for what is done on a key. */
+export const placeNow = (): PlaceId => placeOf(window.location.hash);
+
+export function goTo(place: PlaceId): void {
+  window.location.hash = `#/${place}`;
+}
+
 const subscribe = (changed: () => void): (() => void) => {
   window.addEventListener('hashchange', changed);
   return () => window.removeEventListener('hashchange', changed);
 };
 
-export const usePlace = (): PlaceId => useSyncExternalStore(subscribe, () => placeOf(window.location.hash));
+export const usePlace = (): PlaceId => useSyncExternalStore(subscribe, placeNow);

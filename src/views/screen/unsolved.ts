@@ -1,6 +1,5 @@
 /** What stands between a refused meter and its result: figures that cannot be used, and figures not given. */
 import type { PresentedProblem } from '../present/model.ts';
-import type { SelectedMeter } from './meter.ts';
 import { valueAt } from './text.ts';
 
 interface Unsolved {
@@ -14,7 +13,13 @@ const FIGURES = ['pipe.bore', 'element.bore', 'differential', 'duty', 'upstream'
 
 const isEmpty = (written: unknown): boolean => written === undefined || written === '';
 
-export function unsolved({ now, meter }: Pick<SelectedMeter, 'now' | 'meter'>): Unsolved {
+/** An item as it is written, and the problems of its result. */
+export interface Troubled {
+  readonly now: { readonly problems: readonly PresentedProblem[] };
+  readonly meter: unknown;
+}
+
+export function unsolved({ now, meter }: Troubled): Unsolved {
   const missing = now.problems.filter(({ field }) => isEmpty(valueAt(meter, field)));
   return {
     wrong: now.problems.filter((problem) => !missing.includes(problem)),

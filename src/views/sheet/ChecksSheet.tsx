@@ -10,12 +10,20 @@ import { Page } from './Page.tsx';
 import type { Place } from './paper.ts';
 import tables from './table.module.css';
 
-export function ChecksSheet({ sheet, place }: { readonly sheet: SizingSheet; readonly place: Place }) {
+/** The same for a meter and for a survey. */
+interface Props {
+  readonly sheet: Pick<SizingSheet, 'head' | 'checks' | 'terms' | 'sources'> & {
+    readonly meter: Pick<SizingSheet['meter'], 'notes'> & { readonly verdict: { readonly words: string } };
+  };
+  readonly place: Place;
+}
+
+export function ChecksSheet({ sheet, place }: Props) {
   const { head, meter, checks, terms, sources } = sheet;
   return (
     <Page head={head} type={sheetWords.checksSheet} verdict={checksAre(meter.verdict.words)} place={place}>
       <Checks blocks={checks} />
-      <Terms table={terms} />
+      {terms.rows.length > 0 && <Terms table={terms} />}
       <Sources lines={sources} />
       <Notes lines={meter.notes} />
     </Page>

@@ -7,11 +7,11 @@ import { Notes } from './Notes.tsx';
 import { Page } from './Page.tsx';
 import tables from './table.module.css';
 
-export function RefusedSheet({ sheet: { head, problems, inputs, cautions } }: { readonly sheet: Sheet }) {
+export function RefusedSheet({ sheet: { head, type, lead, problems, inputs, cautions } }: { readonly sheet: Sheet }) {
   return (
-    <Page head={head} type={sheetWords.documentType} verdict={sheetWords.problems} place={{ sheet: 1, of: 1 }}>
+    <Page head={head} type={type} verdict={sheetWords.problems} place={{ sheet: 1, of: 1 }}>
       <Block title={sheetWords.problems}>
-        <p className={styles.answer}>{sheetWords.refused}</p>
+        <p className={styles.answer}>{lead}</p>
         <table className={`${tables.table} ${tables.reasons}`}>
           <tbody>
             {problems.map(({ field, sentence }) => (

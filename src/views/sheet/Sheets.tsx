@@ -1,15 +1,23 @@
 /**
- * The printed sheets, one meter after the other, shown on screen as the paper they will be. While this is in the page,
+ * The printed sheets, one meter after the other, then the surveys, shown on screen as the paper they will be. While this is in the page,
  * nothing else is printed: everything that neither holds nor belongs to the sheets is left off the paper.
  */
 import { type ComponentType, useMemo } from 'react';
 import { type PresentedSheet, type Printing, presentSheets, type SizingSheet as Sizing } from '../present/sheet.ts';
+import {
+  type PresentedSurveySheet,
+  presentSurveySheets,
+  type SurveySheet as SurveySheetOf,
+} from '../present/survey-sheet.ts';
 import { ChecksSheet } from './ChecksSheet.tsx';
 import { DimensionsSheet } from './DimensionsSheet.tsx';
+import { FormSheet } from './FormSheet.tsx';
+import { PointsSheet } from './PointsSheet.tsx';
 import { type Paper, type Place, SheetContext } from './paper.ts';
 import { RefusedSheet } from './RefusedSheet.tsx';
 import styles from './Sheets.module.css';
 import { SizingSheet } from './SizingSheet.tsx';
+import { SurveySheet } from './SurveySheet.tsx';
 import { WorkingSheet } from './WorkingSheet.tsx';
 
 /** The sheets of a meter, in this order; the first stands on its own and carries the signatures. */
@@ -20,9 +28,9 @@ const kinds = {
   working: WorkingSheet,
 } as const satisfies Record<string, ComponentType<{ readonly sheet: Sizing; readonly place: Place }>>;
 
-export type SheetKind = keyof typeof kinds;
+export type SheetKind = keyof typeof kinds | 'form' | 'survey';
 
-const usual: readonly SheetKind[] = ['sizing', 'checks', 'dimensions'];
+const usual: readonly SheetKind[] = ['survey', 'sizing', 'checks', 'dimensions'];
 
 interface SheetsProps extends Printing {
   readonly paper: Paper;
@@ -40,6 +48,10 @@ export function Sheets({ paper, printedOn = '', include = usual, paperOnly = fal
     () => presentSheets({ project, results, stale, ...(only === undefined ? {} : { only }) }),
     [project, results, only, stale],
   );
+  const surveys = useMemo(
+    () => presentSurveySheets({ project, results, stale, ...(only === undefined ? {} : { only }) }),
+    [project, results, only, stale],
+  );
   const surroundings = useMemo(() => ({ paper, printedOn }), [paper, printedOn]);
   return (
     <SheetContext value={surroundings}>
@@ -48,6 +60,10 @@ export function Sheets({ paper, printedOn = '', include = usual, paperOnly = fal
           // biome-ignore lint/suspicious/noArrayIndexKey: two meters may carry the same tag
           <Meter key={index} sheet={sheet} include={include} />
         ))}
+        {surveys.map((sheet, index) => (
+          // biome-ignore lint/suspicious/noArrayIndexKey: two surveys may carry the same tag
+          <Survey key={index} sheet={sheet} include={include} />
+        ))}
       </div>
     </SheetContext>
   );
@@ -55,9 +71,45 @@ export function Sheets({ paper, printedOn = '', include = usual, paperOnly = fal
 
 function Meter({ sheet, include }: { readonly sheet: PresentedSheet; readonly include: readonly SheetKind[] }) {
   if (sheet.status === 'refused') return <RefusedSheet sheet={sheet} />;
-  const chosen = (Object.keys(kinds) as SheetKind[]).filter((kind) => include.includes(kind));
+  const chosen = (Object.keys(kinds) as (keyof typeof kinds)[]).filter((kind) => include.includes(kind));
   return chosen.map((kind, at) => {
     const One = kinds[kind];
     return <One key={kind} sheet={sheet} place={{ sheet: at + 1, of: chosen.length }} />;
   });
 }
+
+/** A survey: the form to take along, and once something is read its sheets. */
+function Survey({ sheet, include }: { readonly sheet: PresentedSurveySheet; readonly include: readonly SheetKind[] }) {
+  if (sheet.status === 'refused') return <RefusedSheet sheet={sheet} />;
+  const read = sheet.survey.measured > 0;
+  const pages: readonly (readonly [kind: SheetKind, page: ComponentType<SurveyPageProps>])[] = [
+    ['survey', SurveySheet],
+    ['survey', PointsSheet],
+    ['checks', ChecksOfSurvey],
+    ['working', WorkingOfSurvey],
+  ];
+  const chosen = read ? pages.filter(([kind]) => include.includes(kind)) : [];
+  const form = include.includes('form') || !read;
+  return (
+    <>
+      {form && <FormSheet sheet={sheet} place={{ sheet: 1, of: 1 }} />}
+      {chosen.map(([kind, One], at) => (
+        // biome-ignore lint/suspicious/noArrayIndexKey: a page is its place among the sheets
+        <One key={`${kind} ${at}`} sheet={sheet} place={{ sheet: at + 1, of: chosen.length }} />
+      ))}
+    </>
+  );
+}
+
+interface SurveyPageProps {
+  readonly sheet: SurveySheetOf;
+  readonly place: Place;
+}
+
+const ChecksOfSurvey = ({ sheet, place }: SurveyPageProps) => (
+  <ChecksSheet sheet={{ ...sheet, meter: sheet.survey }} place={place} />
+);
+
+const WorkingOfSurvey = ({ sheet, place }: SurveyPageProps) => (
+  <WorkingSheet sheet={{ ...sheet, meter: sheet.survey }} place={place} />
+);

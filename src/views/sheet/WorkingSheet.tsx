@@ -12,7 +12,9 @@ export function WorkingSheet({
   sheet: { head, meter },
   place,
 }: {
-  readonly sheet: SizingSheet;
+  readonly sheet: Pick<SizingSheet, 'head'> & {
+    readonly meter: Pick<SizingSheet['meter'], 'working'> & { readonly verdict: { readonly words: string } };
+  };
   readonly place: Place;
 }) {
   const groups = meter.working.filter(({ id }) => id === 'meter' || id === 'maximum');

@@ -8,7 +8,7 @@ import { type SheetKind, Sheets } from '../../../src/views/sheet/Sheets.tsx';
 import { feedWater, meters, projectOf } from '../present/meters.ts';
 
 interface Asked {
-  readonly only?: number;
+  readonly only?: { readonly list: 'meters' | 'traverses'; readonly index: number };
   readonly stale?: boolean;
   readonly paper?: 'A4' | 'Letter';
   readonly printedOn?: string;
@@ -46,7 +46,7 @@ describe('pages', () => {
     ]);
   });
   it('prints one meter, and the sheets that are asked for, in their order', () => {
-    expect(labels(printed(meters, { only: 1, include: ['working', 'sizing'] }))).toEqual([
+    expect(labels(printed(meters, { only: { list: 'meters', index: 1 }, include: ['working', 'sizing'] }))).toEqual([
       'FE-2304, Sizing sheet, 1 of 2',
       'FE-2304, Working, 2 of 2',
     ]);

@@ -4,7 +4,8 @@ import { decode } from '../../../src/core/document/codec.ts';
 import { run } from '../../../src/core/run.ts';
 import { solveText } from '../../../src/views/headless/solve.ts';
 import { presentSheets } from '../../../src/views/present/sheet.ts';
-import { sheetText } from './text.ts';
+import { presentSurveySheets } from '../../../src/views/present/survey-sheet.ts';
+import { sheetText, surveyText } from './text.ts';
 
 const folder = new URL('../../../public/examples/', import.meta.url);
 const files = readdirSync(folder).filter((name) => name.endsWith('.headwright.json'));
@@ -17,14 +18,17 @@ describe.each(files)('%s', (name) => {
   it('golden of its sheets', async () => {
     const sheets = presentSheets({ project: project.value, results: run(project.value) });
     expect(sheets).toHaveLength(project.value.meters.length);
+    const surveys = presentSurveySheets({ project: project.value, results: run(project.value) });
+    expect(surveys).toHaveLength(project.value.traverses?.length ?? 0);
     const golden = `../../examples/${name.replace('.headwright.json', '.sheet.txt')}`;
-    await expect(sheets.map(sheetText).join('\n')).toMatchFileSnapshot(golden);
+    await expect([...sheets.map(sheetText), ...surveys.map(surveyText)].join('\n')).toMatchFileSnapshot(golden);
   });
   it('carries the fingerprint that the command line prints', () => {
     const sheets = presentSheets({ project: project.value, results: run(project.value) });
-    const { results } = JSON.parse(solveText(readFileSync(new URL(name, folder), 'utf8')).output);
-    expect(sheets.map(({ head }) => head.status.split(' ').at(-1))).toEqual(
-      results.map(({ inputs }: { inputs: string }) => inputs),
+    const surveys = presentSurveySheets({ project: project.value, results: run(project.value) });
+    const { results, traverses } = JSON.parse(solveText(readFileSync(new URL(name, folder), 'utf8')).output);
+    expect([...sheets, ...surveys].map(({ head }) => head.status.split(' ').at(-1))).toEqual(
+      [...results, ...traverses].map(({ inputs }: { inputs: string }) => inputs),
     );
   });
 });

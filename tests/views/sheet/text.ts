@@ -1,7 +1,8 @@
 /** A presented sheet as plain text: what a golden holds. */
-import type { PresentedSheet, SheetHead } from '../../../src/views/present/sheet.ts';
-import type { FigureRow } from '../../../src/views/present/sheet-tables.ts';
+import type { PresentedSheet, RefusedSheet, SheetHead } from '../../../src/views/present/sheet.ts';
+import type { CheckBlock, FigureRow, TermTable } from '../../../src/views/present/sheet-tables.ts';
 import type { SheetRow } from '../../../src/views/present/sources.ts';
+import type { PresentedSurveySheet } from '../../../src/views/present/survey-sheet.ts';
 
 const cells = (...list: readonly (string | undefined)[]): string =>
   `  ${list.map((cell) => cell ?? '').join(' | ')}`.trimEnd();
@@ -17,18 +18,77 @@ const headText = (head: SheetHead): readonly string[] =>
     `${name}: ${name === 'status' ? text.replace(/\d+\.\d+\.\d+/, 'VERSION') : text}`.trimEnd(),
   );
 
+function refusedText({ head, problems, inputs, cautions }: RefusedSheet): string {
+  const lines = [
+    ...headText(head),
+    'not solved',
+    ...problems.map(({ field, sentence }) => cells(field, sentence)),
+    'inputs',
+    ...inputs.map(({ field, text }) => cells(field, text)),
+    ...cautions,
+  ];
+  return `${lines.join('\n')}\n`;
+}
+
+const judgedText = (checks: readonly CheckBlock[], terms: TermTable): readonly string[] => [
+  'checks',
+  ...checks.flatMap(({ title, verdict, rows }) => [
+    `  ${title}: ${verdict}`,
+    ...rows.map(({ text, limit, verdictWord, source }) => `  ${cells(text, limit, verdictWord, source)}`),
+  ]),
+  'terms',
+  cells('', ...terms.terms),
+  ...terms.rows.map((row) => cells(row.label, ...row.cells)),
+];
+
+/** A survey, its points line by line. */
+export function surveyText(sheet: PresentedSurveySheet): string {
+  if (sheet.status === 'refused') return refusedText(sheet);
+  const { survey } = sheet;
+  const lines = [
+    ...headText(sheet.head),
+    sheet.answer,
+    survey.under,
+    ...sheet.facts.map(({ label, text }) => cells(label, text)),
+    'result',
+    ...sheet.results.map(rowText),
+    'section',
+    ...sheet.plan.map(rowText),
+    'quality',
+    ...sheet.quality.map(rowText),
+    'fluid',
+    ...sheet.fluid.map(rowText),
+    `points: ${Object.values(survey.units).join(', ')}`,
+    ...survey.lines.flatMap(({ title, place, points, mean }) => [
+      `  ${title} ${place}`.trimEnd(),
+      ...points.map(({ number, depth, weight, differential, velocity, moved }) =>
+        cells(
+          `  ${number}${moved ? ' moved' : ''}`,
+          depth.number,
+          weight.number,
+          differential?.number,
+          velocity?.number,
+        ),
+      ),
+      ...(mean === undefined ? [] : [cells('  mean', mean.number)]),
+    ]),
+    survey.profile.summary,
+    'suggestions',
+    ...survey.suggestions.map(({ text, cited, chosen }) =>
+      cells(`${chosen ? '*' : ''}${text}`, cited.clause, cited.mark),
+    ),
+    ...judgedText(sheet.checks, sheet.terms),
+    'sources',
+    ...sheet.sources.map(({ key, clause }) => cells(key, clause)),
+    survey.certainty,
+    ...survey.notes,
+    ...survey.cautions,
+  ];
+  return `${lines.join('\n')}\n`;
+}
+
 export function sheetText(sheet: PresentedSheet): string {
-  if (sheet.status === 'refused') {
-    const lines = [
-      ...headText(sheet.head),
-      'not solved',
-      ...sheet.problems.map(({ field, sentence }) => cells(field, sentence)),
-      'inputs',
-      ...sheet.inputs.map(({ field, text }) => cells(field, text)),
-      ...sheet.cautions,
-    ];
-    return `${lines.join('\n')}\n`;
-  }
+  if (sheet.status === 'refused') return refusedText(sheet);
   const { section, duty, terms } = sheet;
   const lines = [
     ...headText(sheet.head),
@@ -44,14 +104,7 @@ export function sheetText(sheet: PresentedSheet): string {
     `flows, ${sheet.span}`,
     cells('', ...duty.columns.map(({ label, symbol, measure, key }) => `${label} ${symbol} ${measure} ${key}`.trim())),
     ...duty.rows.map((row) => cells(row.label, ...row.cells)),
-    'checks',
-    ...sheet.checks.flatMap(({ title, verdict, rows }) => [
-      `  ${title}: ${verdict}`,
-      ...rows.map(({ text, limit, verdictWord, source }) => `  ${cells(text, limit, verdictWord, source)}`),
-    ]),
-    'terms',
-    cells('', ...terms.terms),
-    ...terms.rows.map((row) => cells(row.label, ...row.cells)),
+    ...judgedText(sheet.checks, terms),
     'dimensions',
     ...sheet.dimensions.map(figureText),
     'straight pipe',

@@ -3,11 +3,11 @@
 import type { Choice } from '../../words/elements.ts';
 import { fieldLabel } from '../../words/fields.ts';
 import { useWorkbench } from '../binding.tsx';
+import { useWrite } from '../hand.tsx';
 import { useMeterText, useProblem } from '../meter.ts';
 import styles from './box.module.css';
 import { Frame } from './Frame.tsx';
 import { useFieldState } from './useFieldState.ts';
-import { useWrite } from '../hand.tsx';
 
 interface Props {
   readonly path: string;

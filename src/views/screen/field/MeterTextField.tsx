@@ -1,9 +1,9 @@
 /** A text of the selected meter: its tag, its service, a plain number. */
 import { fieldLabel } from '../../words/fields.ts';
 import { useWorkbench } from '../binding.tsx';
+import { useWrite } from '../hand.tsx';
 import { useMeterText, useProblem } from '../meter.ts';
 import { TextField } from './TextField.tsx';
-import { useWrite } from '../hand.tsx';
 
 interface Props {
   readonly path: string;

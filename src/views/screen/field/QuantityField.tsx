@@ -3,13 +3,13 @@
 import type { ReactNode } from 'react';
 import { fieldLabel } from '../../words/fields.ts';
 import { useWorkbench } from '../binding.tsx';
+import { useWrite } from '../hand.tsx';
 import { useMeterText, useProblem } from '../meter.ts';
 import styles from './box.module.css';
 import { Frame } from './Frame.tsx';
 import { UnitOptions } from './UnitOptions.tsx';
 import { useFieldState } from './useFieldState.ts';
 import { type QuantityBinding, useQuantity } from './useQuantity.ts';
-import { useWrite } from '../hand.tsx';
 
 export interface QuantityFieldProps {
   readonly path: string;

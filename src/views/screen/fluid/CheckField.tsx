@@ -1,8 +1,8 @@
 /** A choice of yes or no; no leaves nothing behind in the document. */
 import { fieldLabel } from '../../words/fields.ts';
 import { useWorkbench } from '../binding.tsx';
-import styles from './inputs.module.css';
 import { useWrite, useWritten } from '../hand.tsx';
+import styles from './inputs.module.css';
 
 export function CheckField({ path }: { readonly path: string }) {
   const checked = isYes(useWritten(path));

@@ -3,6 +3,7 @@ import { useState } from 'react';
 import { compositionSum } from '../../present/composition.ts';
 import { pasteWords, compositionWords as words } from '../../words/fluid-forms.ts';
 import buttons from '../button.module.css';
+import { useWritten } from '../hand.tsx';
 import { Fold } from '../station/Fold.tsx';
 import { CompositionPaste } from './CompositionPaste.tsx';
 import { CompositionTable } from './CompositionTable.tsx';
@@ -11,7 +12,6 @@ import styles from './inputs.module.css';
 import { PresetGas } from './PresetGas.tsx';
 import { Problems } from './Problems.tsx';
 import { Sum } from './Sum.tsx';
-import { useWritten } from '../hand.tsx';
 
 const PATH = 'fluid.composition';
 

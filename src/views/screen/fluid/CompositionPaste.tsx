@@ -2,13 +2,13 @@
 import { useState } from 'react';
 import { compositionSum } from '../../present/composition.ts';
 import { pasteWords as words } from '../../words/fluid-forms.ts';
+import { useWriteAll } from '../hand.tsx';
 import { PastedShares } from './PastedShares.tsx';
 import { PastePanel } from './PastePanel.tsx';
 import styles from './paste.module.css';
 import { type Choices, chosenName, compositionFrom, pastedComposition } from './paste-composition.ts';
 import { Sum } from './Sum.tsx';
 import type { ShareUnit } from './share.ts';
-import { useWriteAll } from '../hand.tsx';
 
 interface Props {
   readonly text: string;

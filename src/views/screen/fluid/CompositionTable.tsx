@@ -4,6 +4,7 @@ import { componentLabel } from '../../words/components.ts';
 import { compositionWords as words } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
+import { useWrite, useWriteAll } from '../hand.tsx';
 import { Cell } from './Cell.tsx';
 import { ComponentSelect } from './ComponentSelect.tsx';
 import {
@@ -19,7 +20,6 @@ import {
 import styles from './inputs.module.css';
 import { ShareUnitSelect } from './ShareUnitSelect.tsx';
 import { fileShare, type ShareUnit, shownShare } from './share.ts';
-import { useWrite, useWriteAll } from '../hand.tsx';
 
 const PATH = 'fluid.composition';
 

@@ -2,9 +2,9 @@
 import { useState } from 'react';
 import { choiceWords as words } from '../../words/fluid-forms.ts';
 import { liquidGroups, liquidNamed } from '../../words/liquids.ts';
+import { useWriteAll, useWritten } from '../hand.tsx';
 import { useMeterText } from '../meter.ts';
 import { GroupedChoice } from './GroupedChoice.tsx';
-import { useWriteAll, useWritten } from '../hand.tsx';
 
 const PATH = 'fluid.name';
 const OWN = '(table)'; // no name of the list has brackets

@@ -3,8 +3,8 @@ import { type ReactNode, useState } from 'react';
 import { fieldLabel } from '../../words/fields.ts';
 import box from '../field/box.module.css';
 import { Frame } from '../field/Frame.tsx';
-import { textAt } from '../text.ts';
 import { useItem, useWriteAll } from '../hand.tsx';
+import { textAt } from '../text.ts';
 
 interface Props {
   readonly id: string;

@@ -3,10 +3,10 @@ import { overrideWords as words } from '../../words/fluid-forms.ts';
 import buttons from '../button.module.css';
 import { MeterTextField } from '../field/MeterTextField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
+import { useWriteAll } from '../hand.tsx';
 import { useMeterText } from '../meter.ts';
 import styles from './override.module.css';
 import { type Override, overridePath } from './overrides.ts';
-import { useWriteAll } from '../hand.tsx';
 
 interface Props {
   readonly name: Override;

@@ -2,11 +2,11 @@
 import { choiceWords, tableWords } from '../../words/fluid-forms.ts';
 import { MeterTextField } from '../field/MeterTextField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
+import { useWritten } from '../hand.tsx';
 import { Fold } from '../station/Fold.tsx';
 import { OIL_VISCOSITIES } from './liquid-columns.ts';
 import { OneOf } from './OneOf.tsx';
 import { RowsEditor } from './RowsEditor.tsx';
-import { useWritten } from '../hand.tsx';
 
 const API = 'fluid.apiGravity';
 const DENSITIES = ['fluid.densityAt15', 'fluid.densityAt60F', API] as const;

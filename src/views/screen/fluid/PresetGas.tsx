@@ -4,8 +4,8 @@ import { compositionWords as words } from '../../words/fluid-forms.ts';
 import { presetLabel } from '../../words/fluids.ts';
 import box from '../field/box.module.css';
 import { Frame } from '../field/Frame.tsx';
-import { inUnit } from './composition.ts';
 import { useWriteAll } from '../hand.tsx';
+import { inUnit } from './composition.ts';
 
 const ID = 'preset-gas';
 

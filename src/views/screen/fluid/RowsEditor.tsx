@@ -5,13 +5,13 @@ import { type Unit, unitOf } from '../../../core/quantity/units.ts';
 import { pasteWords } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
+import { useWriteAll, useWritten } from '../hand.tsx';
 import { textAt } from '../text.ts';
 import styles from './inputs.module.css';
 import { Problems } from './Problems.tsx';
 import { RowsTable } from './RowsTable.tsx';
 import { columnUnit, convertedCell, rowsIn, type TableColumn } from './rows.ts';
 import { TablePaste } from './TablePaste.tsx';
-import { useWriteAll, useWritten } from '../hand.tsx';
 
 interface Props {
   readonly path: string;

@@ -3,12 +3,12 @@ import type { Unit } from '../../../core/quantity/units.ts';
 import { tableWords as words } from '../../words/fluid-forms.ts';
 import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
+import { useWrite, useWriteAll, useWritten } from '../hand.tsx';
 import { textAt } from '../text.ts';
 import { Cell } from './Cell.tsx';
 import { ColumnUnit } from './ColumnUnit.tsx';
 import styles from './inputs.module.css';
 import { fileCell, rowsIn, shownCell, type TableColumn } from './rows.ts';
-import { useWrite, useWriteAll, useWritten } from '../hand.tsx';
 
 interface Props {
   readonly path: string;

@@ -5,10 +5,10 @@ import { useWorkbench } from '../binding.tsx';
 import box from '../field/box.module.css';
 import { Frame } from '../field/Frame.tsx';
 import { useFieldState } from '../field/useFieldState.ts';
+import { useWrite } from '../hand.tsx';
 import { useMeterText, useProblem } from '../meter.ts';
 import { convertShare, fileShare, SHARE_UNITS, type ShareUnit, shownShare, unitOfShare } from './share.ts';
 import { useDraft } from './useDraft.ts';
-import { useWrite } from '../hand.tsx';
 
 interface Props {
   readonly path: string;

@@ -2,11 +2,11 @@
 import { useState } from 'react';
 import type { Unit } from '../../../core/quantity/units.ts';
 import { pasteWords as words } from '../../words/fluid-forms.ts';
+import { useWriteAll } from '../hand.tsx';
 import { PastePanel } from './PastePanel.tsx';
 import styles from './paste.module.css';
 import { pastedTable, type Row } from './paste-table.ts';
 import type { TableColumn } from './rows.ts';
-import { useWriteAll } from '../hand.tsx';
 
 interface Props {
   readonly path: string;

@@ -3,7 +3,7 @@ import type { PresentedSizing } from '../../present/model.ts';
 import styles from './Notes.module.css';
 import { Panel } from './Panel.tsx';
 
-export function Notes({ sizing }: { readonly sizing: PresentedSizing }) {
+export function Notes({ sizing }: { readonly sizing: Pick<PresentedSizing, 'notes' | 'cautions'> }) {
   if (sizing.notes.length + sizing.cautions.length === 0) return null;
   return (
     <Panel id="notes" title="Notes and cautions">

@@ -5,7 +5,12 @@ import { Figure, OverridableFigure } from './Figure.tsx';
 import { Panel } from './Panel.tsx';
 import styles from './States.module.css';
 
-export function States({ sizing, stale }: { readonly sizing: PresentedSizing; readonly stale: boolean }) {
+interface Props {
+  readonly sizing: Pick<PresentedSizing, 'state' | 'overridable' | 'pipe' | 'metal'>;
+  readonly stale: boolean;
+}
+
+export function States({ sizing, stale }: Props) {
   return (
     <Panel id="state" title="State and sizes" stale={stale}>
       <dl className={styles.rows}>

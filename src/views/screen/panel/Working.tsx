@@ -4,7 +4,12 @@ import { Panel } from './Panel.tsx';
 import styles from './Working.module.css';
 import { WorkingLine } from './WorkingLine.tsx';
 
-export function Working({ sizing, stale }: { readonly sizing: PresentedSizing; readonly stale: boolean }) {
+interface Props {
+  readonly sizing: Pick<PresentedSizing, 'working'>;
+  readonly stale: boolean;
+}
+
+export function Working({ sizing, stale }: Props) {
   return (
     <Panel id="working" title="Working" stale={stale}>
       <p className={styles.lead}>

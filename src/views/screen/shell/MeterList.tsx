@@ -4,6 +4,7 @@ import type { MeterText } from '../../../core/document/project.ts';
 import type { MeterResult } from '../../../core/result/record.ts';
 import { useWorkbench, useWorkbenchStore } from '../binding.tsx';
 import { focusFieldSoon } from '../focus.ts';
+import { goTo, usePlace } from '../place.ts';
 import { presented } from '../presented.ts';
 import { textAt } from '../text.ts';
 import { VerdictMark } from '../VerdictMark.tsx';
@@ -15,12 +16,16 @@ export function MeterList() {
   const keys = useWorkbench((state) => state.keys);
   const selected = useWorkbench((state) => state.selected);
   const addMeter = useWorkbench((state) => state.addMeter);
+  const hand = useWorkbench((state) => state.hand);
+  const place = usePlace();
+  const shown = place === 'sheet' ? hand === 'meters' : place !== 'survey';
   const add = () => {
     addMeter();
+    if (place === 'survey') goTo('size');
     focusFieldSoon('pipe.size');
   };
   return (
-    <nav className={styles.side} aria-label="Meters">
+    <nav className={styles.part} aria-label="Meters">
       <h2 className={styles.title}>Meters</h2>
       <MeterStrip />
       <ul className={styles.list}>
@@ -28,7 +33,13 @@ export function MeterList() {
           const result = results[index];
           return (
             result && (
-              <MeterItem key={keys[index]} meter={meter} result={result} index={index} current={index === selected} />
+              <MeterItem
+                key={keys[index]}
+                meter={meter}
+                result={result}
+                index={index}
+                current={shown && index === selected}
+              />
             )
           );
         })}
@@ -51,6 +62,7 @@ interface ItemProps {
 const MeterItem = memo(function MeterItem({ meter, result, index, current }: ItemProps) {
   useWorkbench((state) => state.project.display);
   const store = useWorkbenchStore();
+  const place = usePlace();
   const { tag, service, element, verdict } = presented(meter, store.getState().project, result);
   return (
     <li>
@@ -58,7 +70,10 @@ const MeterItem = memo(function MeterItem({ meter, result, index, current }: Ite
         type="button"
         className={styles.item}
         aria-current={current ? 'true' : undefined}
-        onClick={() => store.getState().select(index)}
+        onClick={() => {
+          store.getState().select(index);
+          if (place === 'survey') goTo('size');
+        }}
       >
         <span className={styles.tag}>{tag || 'no tag'}</span>
         <VerdictMark verdict={verdict.worst} words={verdict.words} />

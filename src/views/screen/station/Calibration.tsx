@@ -1,10 +1,10 @@
 /** The element's own coefficients: rows of Reynolds number and C. One row is a constant. */
 import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
+import { useWrite, useWritten } from '../hand.tsx';
 import { useProblem } from '../meter.ts';
 import { textAt } from '../text.ts';
 import styles from './Calibration.module.css';
-import { useWrite, useWritten } from '../hand.tsx';
 
 const PATH = 'element.calibration';
 const COLUMNS = [

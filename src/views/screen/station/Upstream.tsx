@@ -7,6 +7,7 @@ import { QuantityField } from '../field/QuantityField.tsx';
 import { FluidFields } from '../fluid/FluidFields.tsx';
 import { LostOverrides } from '../fluid/LostOverrides.tsx';
 import { StateFields } from '../fluid/StateFields.tsx';
+import { useSelectedMeter } from '../meter.ts';
 import { Fold } from './Fold.tsx';
 import { Station } from './Station.tsx';
 
@@ -17,7 +18,7 @@ export function Upstream() {
       <QuantityField path="pipe.bore" />
       <ChoiceField path="fluid.kind" choices={fluidChoices} />
       <FluidFields />
-      <LostOverrides />
+      <LostOverrides state={useSelectedMeter()?.sizing?.state} />
       <StateFields />
       <ChoiceField path="pipe.material" label="Material" choices={materialChoices} open="not stated" />
       <Fold title="Roughness and more">

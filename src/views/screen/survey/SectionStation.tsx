@@ -1,0 +1,64 @@
+/** Station 1: the section, the rule of the points, and how the probe gets in. */
+import {
+  placeChoices,
+  portChoices,
+  profileChoices,
+  ruleChoices,
+  shapeChoices,
+  wallChoices,
+  surveyPlace as words,
+} from '../../words/surveys.ts';
+import { ChoiceField } from '../field/ChoiceField.tsx';
+import { MeterTextField } from '../field/MeterTextField.tsx';
+import { QuantityField } from '../field/QuantityField.tsx';
+import { useMeterText } from '../meter.ts';
+import { Station } from '../station/Station.tsx';
+
+export function SectionStation() {
+  const shape = useMeterText('section.shape');
+  const rule = useMeterText('rule');
+  const single = rule === 'single-point';
+  const pattern = rule === 'log-linear' && shape === 'rectangular';
+  return (
+    <Station number={1} title={words.stations[0]}>
+      <ChoiceField path="section.shape" label="Shape" choices={shapeChoices} />
+      {shape === 'rectangular' ? (
+        <>
+          <QuantityField path="section.width" />
+          <QuantityField path="section.height" />
+          <ChoiceField path="section.ports" label="Ports" choices={portChoices} open="Along the width" />
+        </>
+      ) : (
+        <QuantityField path="section.diameter" />
+      )}
+      <QuantityField path="port" note={<span>mark depths from its outer end; empty: from the wall</span>} />
+      <ChoiceField path="rule" label="Rule" choices={ruleChoices} />
+      {single ? <Profile /> : null}
+      {!single && !pattern && (
+        <>
+          <MeterTextField path="lines" label={shape === 'circular' ? 'Diameters' : 'Lines'} decimal />
+          <MeterTextField path="pointsPerLine" label="Points on each" decimal />
+        </>
+      )}
+      {pattern && <p>26 points in four lines, with weights.</p>}
+      <ChoiceField
+        path="wallRule"
+        label="Points near the wall"
+        choices={wallChoices.slice(1)}
+        open="Left where they are"
+      />
+    </Station>
+  );
+}
+
+function Profile() {
+  const kind = useMeterText('profile.kind');
+  return (
+    <>
+      <ChoiceField path="profile.kind" choices={profileChoices} />
+      {kind !== 'stated' && <ChoiceField path="profile.at" label="Place" choices={placeChoices} />}
+      {kind === 'power' && <MeterTextField path="profile.exponent" label="Exponent, usual 7" decimal />}
+      {kind === 'stated' && <MeterTextField path="profile.meanOverCentre" label="Mean over centre" decimal />}
+    </>
+  );
+}
