@@ -28,6 +28,7 @@ export function resultsOf(project: Project, results: Results, asked: Asked): obj
       const own = traverse.status === 'refused' ? refusedOf(traverse, print) : traverseOf(traverse, print, asked);
       return { ...own, inputs: inputsHash(written ?? {}, project) };
     }),
+    ...(results.site === undefined ? {} : { site: results.site }),
   };
 }
 
