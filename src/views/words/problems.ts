@@ -8,6 +8,7 @@ import { fileProblems } from './problems-of-files.ts';
 import { gasProblems } from './problems-of-gases.ts';
 import { inputProblems } from './problems-of-input.ts';
 import { liquidProblems } from './problems-of-liquids.ts';
+import { logPlanProblems } from './problems-of-log-plan.ts';
 import { numberProblems } from './problems-of-numbers.ts';
 import { readingProblems } from './problems-of-readings.ts';
 import { solvingProblems } from './problems-of-solving.ts';
@@ -24,6 +25,7 @@ export const problemWords: ProblemWords = {
   ...solvingProblems,
   ...traverseProblems,
   ...readingProblems,
+  ...logPlanProblems,
   ...fileProblems,
 };
 
