@@ -7,6 +7,7 @@ import { subjects as gas } from './subjects/gas.ts';
 import { subjects as gasViscosity } from './subjects/gas-viscosity.ts';
 import { subjects as liquid } from './subjects/liquid.ts';
 import { subjects as otherGas } from './subjects/other-gas.ts';
+import { subjects as reading } from './subjects/reading.ts';
 import { subjects as solve } from './subjects/solve.ts';
 import { subjects as traverse } from './subjects/traverse.ts';
 import { subjects as units } from './subjects/units.ts';
@@ -59,6 +60,7 @@ const subjects: Readonly<Record<string, (given: Given) => Record<string, number>
   ...gasViscosity,
   ...liquid,
   ...otherGas,
+  ...reading,
   ...solve,
   ...traverse,
   ...units,

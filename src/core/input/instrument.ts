@@ -105,14 +105,20 @@ export function readInclination(form: Form): number | undefined {
   return form.report('angle-out-of-range', 'instrument.angle', { written: `${angle.number} ${angle.unit.symbol}` });
 }
 
-/** Section of the tube over that of the well; both or none of the two bores. */
-export function readWellRatio(form: Form, required: boolean): number | undefined {
+export interface Well {
+  /** Section of the tube over that of the well. */
+  readonly ratio: number;
+  readonly tube: Length;
+}
+
+/** Reads the bores of tube and well, both or none. Problem well-not-wider. */
+export function readWell(form: Form, required: boolean): Well | undefined {
   const written = ['tube', 'well'].some((name) => (at(form.group, `instrument.${name}`) ?? '') !== '');
   const tube = form.positive('instrument.tube', ['length'], required || written)?.si;
   const well = form.positive('instrument.well', ['length'], required || written)?.si;
   if (tube === undefined || well === undefined) return undefined;
   if (tube >= well) return form.report('well-not-wider', 'instrument.well', { tube, well });
-  return (tube / well) ** 2;
+  return { ratio: (tube / well) ** 2, tube };
 }
 
 /**

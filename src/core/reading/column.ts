@@ -12,6 +12,7 @@ import {
 } from '../input/instrument.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
 import { named, type Working } from '../quantity/working.ts';
+import { capillaryCautions } from './capillary.ts';
 import { columnsDifferential, hydrostatics } from './chain.ts';
 import type { Conditions, Shown, UncertaintyPart } from './contract.ts';
 import { fillingOf, type LegDensities, legsAt, legsGiven } from './legs.ts';
@@ -42,6 +43,8 @@ export interface Levels {
   readonly menisci: 1 | 2;
   /** Inclination of the tube, rad; absent where it is upright. */
   readonly angle?: number;
+  /** Bore of a tube that stands against a well, m. */
+  readonly bore?: number;
 }
 
 export function readColumnFields(form: Form, inverted = false): ColumnFields | undefined {
@@ -70,11 +73,12 @@ export function readColumn(fields: ColumnFields, levels: Levels, { state, gravit
   }
   const differential = columnsDifferential(levels, density, legs, gravity);
   const parts = partsOf(fields, levels, net * gravity, differential);
+  const narrow = levels.bore === undefined ? [] : capillaryCautions(gauge.liquid, density, levels.bore, gravity);
   const line = { ...lineOf(levels, density, legs, gravity, inverted), value: differential };
   return ok({
     standing: 'as-shown',
     differential,
-    cautions: [...reversedCautions(differential), ...liquidCautions(gauge)],
+    cautions: [...reversedCautions(differential), ...liquidCautions(gauge), ...narrow],
     working: [liquidWorking(gauge, liquid.value), ...levels.working, line, ...combinedWorking(parts)],
     uncertainty: parts,
     picture: {

@@ -2,7 +2,7 @@
  * A tube beside a well, upright or inclined: the reading along the tube, the fall of the level in the well, and what a
  * scale says that is made for it. Symbols: R the reading, θ the inclination, a/A the sections of tube and well.
  */
-import type { Scale } from '../input/instrument.ts';
+import type { Scale, Well } from '../input/instrument.ts';
 import type { Temperature } from '../quantity/kinds.ts';
 import type { Source } from '../quantity/source.ts';
 import { named, type Working } from '../quantity/working.ts';
@@ -16,9 +16,15 @@ export interface Tube {
   readonly angle?: number; // rad, of an inclined tube
   /** a/A; nothing where the well is so wide that its level stays. */
   readonly wellRatio: number;
+  /** Bore of the tube, m, where it is stated. */
+  readonly bore?: number;
   /** True where the divisions are shortened, so that the scale reads the vertical separation. */
   readonly corrected: boolean;
 }
+
+/** What the two bores are to a tube; a well that is not described is so wide that its level stays. */
+export const wellOf = (well: Well | undefined): Pick<Tube, 'wellRatio' | 'bore'> =>
+  well === undefined ? { wellRatio: 0 } : { wellRatio: well.ratio, bore: well.tube };
 
 /** Metres of separation for one metre along the tube. */
 const separation = ({ sine, wellRatio }: Tube): number => sine + wellRatio; // sin(theta) + a/A
@@ -37,6 +43,7 @@ export function tubeLevels(read: number, tube: Tube, scale: Scale, temperature: 
     perReading: tube.corrected ? 1 : whole,
     menisci: 1,
     ...(tube.angle === undefined ? {} : { angle: tube.angle }),
+    ...(tube.bore === undefined ? {} : { bore: tube.bore }),
   };
 }
 

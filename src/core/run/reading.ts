@@ -163,6 +163,9 @@ export const flowRecord = (massFlow: number, { density, baseDensity }: FluidStat
   ...(baseDensity === undefined ? {} : { baseVolumeFlow_m3_s: massFlow / baseDensity }),
 });
 
+/** What the mass flow of a root signal grows by from one density to another, at one differential: q_m ~ sqrt(dp rho). */
+export const densityFactor = (density: number, design: number): number => Math.sqrt(density / design);
+
 /**
  * A root signal scaled for the design state: q_m = q_m,max sqrt(dp/span), corrected by sqrt(rho/rho_d). At equal dp, C,
  * epsilon, d and D that is exact.
@@ -176,11 +179,11 @@ function compensationOf(
   const design = solution.meter.state;
   const { massFlow, differential: full } = solution.duty.maximum;
   const indicated = massFlow * Math.sqrt(differential / full); // root signal of the design
-  const densityFactor = Math.sqrt(state.density / design.density); // q_m ~ sqrt(dp rho)
-  const corrected = indicated * densityFactor;
+  const factor = densityFactor(state.density, design.density);
+  const corrected = indicated * factor;
   return {
     indicated: flowRecord(indicated, design),
-    densityFactor,
+    densityFactor: factor,
     corrected: flowRecord(corrected, state),
     residual_percent: 100 * (corrected / exact - 1),
   };

@@ -30,6 +30,10 @@ export const checksOfReadings: Readonly<Record<string, FindingWords>> = {
     role: 'differential',
     text: (figure) => `Differential ${figure}, below the cut-off: taken as no flow`,
   },
+  'capillary-level': {
+    role: 'length',
+    text: (figure) => `The tube is narrow: its walls move the level by ${figure}, which belongs into the zero`,
+  },
   'cells-apart': {
     role: 'differential',
     text: (figure) => `The two cells differ by ${figure}, more than their uncertainties together`,
@@ -46,6 +50,7 @@ export const readingFlags: Readonly<Record<string, string>> = {
   'signal-uncertain': 'signal uncertain',
   'below-cut-off': 'below the cut-off',
   'cells-apart': 'cells differ',
+  'capillary-level': 'narrow tube',
   'reynolds-pipe': 'Reynolds number outside',
   'pressure-ratio': 'p₂/p₁ outside',
   flashing: 'flashing',
