@@ -82,6 +82,7 @@ export default defineConfig({
   appType: 'spa',
   plugins: [react(), contentSecurityPolicy(), offline(), everythingKeptOffline()],
   build: { target: 'es2023', assetsInlineLimit: 0, chunkSizeWarningLimit: 700, modulePreload: { polyfill: false } },
+  worker: { format: 'es' },
   server: { host: '127.0.0.1' },
   preview: { host: '127.0.0.1', port: 4173 },
   test: {

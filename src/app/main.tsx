@@ -8,8 +8,11 @@ import { flushWhenHidden } from '../persist/autosave.ts';
 import { createWorkbench } from '../state/create.ts';
 import { Root } from '../views/screen/Root.tsx';
 import type { SheetsView } from '../views/screen/SheetPlace.tsx';
+import { createClient } from '../worker/client.ts';
+import { spawn } from '../worker/spawn.ts';
 import { dayOf } from './clock.ts';
 import { createDesk, type Desk } from './desk.ts';
+import { createLogOrders } from './logs.ts';
 import { registerOffline } from './offline.ts';
 import { createOrders } from './orders.ts';
 import { start } from './shelf.ts';
@@ -38,7 +41,11 @@ await start(desk);
 
 const root = document.getElementById('root');
 if (root === null) throw new Error('expected an element #root in the page, got none');
-const commands = createOrders({ desk, newVersion: () => newVersion });
+const owner = newId();
+/** Other pages leave what this one converted alone as long as it lives. */
+void (navigator.locks as LockManager | undefined)?.request(owner, () => new Promise(() => undefined));
+const logs = createLogOrders({ store, client: createClient(spawn), owner });
+const commands = createOrders({ desk, logs, newVersion: () => newVersion });
 createRoot(root).render(<Root store={store} commands={commands} sheets={Sheets} />);
 
 registerOffline(

@@ -1,10 +1,12 @@
 /** Carries out the commands of the screen and reports through the store. No order runs twice at a time. */
 import { causeOf } from '../persist/autosave.ts';
 import { type FileHandle, fileNameOf, type Opened, openFile, readFile, saveFile } from '../persist/files.ts';
+import { isLogName } from '../persist/log-files.ts';
 import type { Commands } from '../state/commands.ts';
 import { textOf } from '../state/text.ts';
 import type { Notice } from '../state/workbench.ts';
 import { type Desk, isSafe, listedTitle } from './desk.ts';
+import type { LogOrders } from './logs.ts';
 import { titleOf } from './project-text.ts';
 import { takeOver, workOnCopy } from './sharing.ts';
 import { openEarlier, openEmpty, openKept, openText, rawText, remove } from './shelf.ts';
@@ -13,6 +15,7 @@ const EXAMPLE = 'examples/tern-island.headwright.json';
 
 export interface OrdersOptions {
   readonly desk: Desk;
+  readonly logs: LogOrders;
   /** Starts the new version of the program; undefined while there is none. */
   readonly newVersion: () => (() => void) | undefined;
 }
@@ -23,13 +26,16 @@ interface Place {
   handle: FileHandle | undefined;
 }
 
-export function createOrders({ desk, newVersion }: OrdersOptions): Commands {
+export function createOrders({ desk, logs, newVersion }: OrdersOptions): Commands {
   const place: Place = { id: '', handle: undefined };
   const once = createOnce((notice) => desk.options.store.getState().setNotice(notice));
   return {
     newProject: () => once('new', () => openEmpty(desk)),
     openFile: () => once('open', async () => take(desk, place, await openFile())),
-    openDropped: (file) => once('open', async () => take(desk, place, await readFile(file))),
+    openDropped: (file) =>
+      once('open', async () =>
+        isLogName(file.name) ? logs.openDroppedLog(file) : take(desk, place, await readFile(file)),
+      ),
     saveFile: () => once('save', () => save(desk, place)),
     openExample: () => once('example', () => openExample(desk)),
     openKept: (id) => once('kept', () => openKept(desk, id)),
@@ -42,6 +48,12 @@ export function createOrders({ desk, newVersion }: OrdersOptions): Commands {
       once('update', async () => {
         if (await isSafe(desk)) newVersion()?.();
       }),
+    openLog: () => once('log', logs.openLog),
+    openExampleLog: () => once('log', logs.openExampleLog),
+    convertLog: () => once('convert', logs.convertLog),
+    cancelLog: logs.cancelLog,
+    closeLog: logs.closeLog,
+    saveConverted: logs.saveConverted,
     print: () => window.print(),
   };
 }

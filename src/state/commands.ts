@@ -6,6 +6,7 @@ export interface Commands {
   /** A new, empty project; the one at hand stays in the list. */
   newProject(): Promise<void>;
   openFile(): Promise<void>;
+  /** A project file, or a log for the selected meter. */
   openDropped(file: File): Promise<void>;
   /** Saves to the file the project came from, or asks where; a download where the browser has no such dialog. */
   saveFile(): Promise<void>;
@@ -23,5 +24,15 @@ export interface Commands {
   workOnCopy(): Promise<void>;
   /** Keeps the work, then starts the new version of the program. */
   applyUpdate(): Promise<void>;
+  /** Asks for a log, for the selected meter. */
+  openLog(): Promise<void>;
+  /** Makes the log of a day and opens it at the selected meter. */
+  openExampleLog(): Promise<void>;
+  /** Converts the log at hand by its meter. */
+  convertLog(): Promise<void>;
+  cancelLog(): void;
+  closeLog(): void;
+  /** Saves the rows of the last conversion. */
+  saveConverted(): void;
   print(): void;
 }

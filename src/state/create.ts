@@ -15,7 +15,10 @@ import type { Workbench, WorkbenchActions, WorkbenchState, WorkbenchStore } from
 
 /** What history holds of each past state. */
 type Trace = Pick<WorkbenchState, 'project' | 'keys' | 'traverseKeys'>;
-type Standing = Pick<WorkbenchActions, 'setKeeping' | 'setNotice' | 'dismissNotice' | 'setUpdate' | 'setProjects'>;
+type Standing = Pick<
+  WorkbenchActions,
+  'setKeeping' | 'setNotice' | 'dismissNotice' | 'setUpdate' | 'setProjects' | 'setLog'
+>;
 
 export const HISTORY_LIMIT = 200;
 
@@ -92,6 +95,7 @@ function initial(core: Core, newKey: () => string): WorkbenchState {
     notice: undefined,
     update: false,
     projects: [],
+    log: undefined,
   };
 }
 
@@ -101,6 +105,7 @@ const standing = (set: (change: Partial<Workbench>) => void): Standing => ({
   dismissNotice: () => set({ notice: undefined }),
   setUpdate: (update) => set({ update }),
   setProjects: (projects) => set({ projects }),
+  setLog: (log) => set({ log }),
 });
 
 function createKeys(): () => string {

@@ -6,6 +6,7 @@ import type { StoreApi } from 'zustand/vanilla';
 import type { Display, MeterText, Project, TraverseText } from '../core/document/project.ts';
 import type { Results, Solved, SolvedTraverse } from '../core/result/record.ts';
 import type { ListName } from './lists.ts';
+import type { OpenLog } from './logs.ts';
 import type { ReadingCell } from './readings.ts';
 
 /** Where the project stands: not yet read, being kept, kept, or why not. */
@@ -58,6 +59,7 @@ export interface WorkbenchState {
   readonly notice: Notice | undefined;
   readonly update: boolean; // a new version of the program is ready
   readonly projects: readonly KeptProject[]; // kept in this browser, newest first
+  readonly log: OpenLog | undefined;
 }
 
 export interface WorkbenchActions {
@@ -79,6 +81,7 @@ export interface WorkbenchActions {
   duplicateMeter(index: number): void;
   moveMeter(index: number, to: number): void;
   deleteMeter(index: number): void;
+  takeToHand(list: ListName): void; // as the place that is open works on it
   selectTraverse(index: number): void;
   addTraverse(traverse?: TraverseText): void; // a new survey with usual choices, selected
   duplicateTraverse(index: number): void;
@@ -93,6 +96,7 @@ export interface WorkbenchActions {
   dismissNotice(): void;
   setUpdate(ready: boolean): void;
   setProjects(projects: readonly KeptProject[]): void;
+  setLog(log: OpenLog | undefined): void;
 }
 
 export type Workbench = WorkbenchState & WorkbenchActions;

@@ -4,13 +4,23 @@ const picker = vi.hoisted(() => ({ fileOpen: vi.fn(), fileSave: vi.fn() }));
 vi.mock('browser-fs-access', () => picker);
 
 import { createDesk, type Desk } from '../../src/app/desk.ts';
+import { createLogOrders } from '../../src/app/logs.ts';
 import { createOrders } from '../../src/app/orders.ts';
 import { start } from '../../src/app/shelf.ts';
 import { createMemory } from '../../src/persist/memory.ts';
 import type { Commands } from '../../src/state/commands.ts';
 import { createWorkbench } from '../../src/state/create.ts';
 import type { Notice, Workbench } from '../../src/state/workbench.ts';
+import type { Client } from '../../src/worker/client.ts';
 import { countingCore, source } from '../state/sample.ts';
+
+/** No order of this file reaches the worker of logs. */
+const client: Client = {
+  run: ({ kind }) => {
+    throw new Error(`expected no order for the worker, got ${kind}`);
+  },
+  stop: () => undefined,
+};
 
 let desk: Desk;
 let commands: Commands;
@@ -44,6 +54,7 @@ beforeEach(async () => {
   });
   commands = createOrders({
     desk,
+    logs: createLogOrders({ store: desk.options.store, client, owner: 'page' }),
     newVersion: () => () => {
       started += 1;
     },

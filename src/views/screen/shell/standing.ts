@@ -41,6 +41,8 @@ const NOTICES: Readonly<Record<string, Words>> = {
   'file-refused': (d) => `${named(d)} could not be written there. Save it to another place.`,
   'file-downloaded': (d) => `${named(d)} went to the downloads of this browser.`,
   'file-saved': (d) => `Saved as ${named(d)}.`,
+  'example-log-missing': () =>
+    'This meter cannot be solved as it stands, so that there is no example log for it. Mend the meter first.',
   'example-missing': () => 'The example is not at hand without a network. Open it once while online.',
   'example-opened': () => 'This is a copy of the example. Change what you like.',
 };
