@@ -125,6 +125,8 @@ test('no vector has been lost', () => {
       "liquids/melinder-ethylene-glycol-water.json": 75,
       "liquids/melinder-propylene-glycol-water.json": 64,
       "liquids/melinder-sodium-chloride-brine.json": 23,
+      "logs/gaps.json": 2,
+      "logs/rooting.json": 3,
       "other-gases/states.json": 120,
       "pitot/abulencia-oil.json": 1,
       "pitot/anderson-airspeed.json": 1,

@@ -6,6 +6,7 @@ import { subjects as element } from './subjects/element.ts';
 import { subjects as gas } from './subjects/gas.ts';
 import { subjects as gasViscosity } from './subjects/gas-viscosity.ts';
 import { subjects as liquid } from './subjects/liquid.ts';
+import { subjects as log } from './subjects/log.ts';
 import { subjects as otherGas } from './subjects/other-gas.ts';
 import { subjects as reading } from './subjects/reading.ts';
 import { subjects as solve } from './subjects/solve.ts';
@@ -59,6 +60,7 @@ const subjects: Readonly<Record<string, (given: Given) => Record<string, number>
   ...gas,
   ...gasViscosity,
   ...liquid,
+  ...log,
   ...otherGas,
   ...reading,
   ...solve,

@@ -88,6 +88,7 @@ const GROUPS: Readonly<Record<string, string>> = {
   liquids: 'Liquids',
   gauge: 'Liquids of gauges',
   pitot: 'Pitot tubes and traverses',
+  logs: 'Logs',
   site: 'Site',
   units: 'Units',
 };
