@@ -22,9 +22,11 @@ export const instruments: readonly Instrument[] = [
   transmitter,
 ];
 
+const UNSTATED = { kind: 'differential' };
+
 /** The instrument of a meter with its fields read; a meter that names none is read as a pressure difference. */
 export function instrumentOf(meter: MeterText): Outcome<Settled> {
-  const form = openForm({ instrument: { kind: 'differential' }, ...meter });
+  const form = openForm(meter.instrument === undefined ? { ...meter, instrument: UNSTATED } : meter);
   const kind = form.choice(
     'instrument.kind',
     instruments.map((instrument) => instrument.kind),
