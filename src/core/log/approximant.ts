@@ -51,7 +51,7 @@ const words = new Uint32Array(double.buffer);
 const high = new Uint32Array(new Float64Array([1]).buffer)[0] === 0 ? 1 : 0; // the word that holds the exponent
 
 /** Number of the piece that X lies in, over all doubles. */
-const pieceOf = (x: number): number => {
+export const pieceOf = (x: number): number => {
   double[0] = x;
   return (words[high] as number) >>> SHIFT;
 };
@@ -190,13 +190,22 @@ const quartic = (c: ArrayLike<number>, at: number, u: number): number =>
   ((((c[at] as number) * u + (c[at + 1] as number)) * u + (c[at + 2] as number)) * u + (c[at + 3] as number)) * u +
   (c[at + 4] as number);
 
-/** C at X in a span, with t from -1 to 1 in it; 0 where the approximant does not reach, and C is to be solved for. */
+/** The same, without the powers of the temperature where the metal is still. */
+export function piecePolynomial(c: Float64Array, at: number, u: number, t: number, still: boolean): number {
+  if (still) return (quartic(c, at + 10, u) * u + (c[at + 15] as number)) * u + (c[at + 16] as number);
+  return polynomial(c, at, u, t);
+}
+
+/** C below the first piece in a span, with t from -1 to 1 in it; 0 where it is not within the bound. */
+export const heldAt = ({ holds, held }: Approximant, span: number, t: number): number =>
+  holds ? cubic(held, span * DEGREES.length, t) : 0;
+
+/** C at X in a span, with t from -1 to 1 in it; 0 where the approximant does not reach, and C is to be searched for. */
 export function coefficientAt(of: Approximant, span: number, x: number, t: number): number {
   const piece = pieceOf(x) - of.first;
-  if (piece < 0) return of.holds ? cubic(of.held, span * DEGREES.length, t) : 0;
-  if (piece >= of.pieces) return 0;
+  if (piece < 0) return heldAt(of, span, t);
   const at = span * of.pieces + piece;
-  if (of.closed[at] !== 1) return 0;
+  if (piece >= of.pieces || of.closed[at] !== 1) return 0;
   const u = (x - (of.middle[piece] as number)) * (of.perHalf[piece] as number);
   return polynomial(of.terms, at * TERMS, u, t);
 }

@@ -22,15 +22,16 @@ export interface Expansion {
 /** p2/p1 = 0.75: ISO 5167-2:2022, 5.3.2.2, and its sister clauses. */
 const MOST_EXPANSION = 0.25;
 const MOST_ERROR = 1e-13;
-const DEGREE_X = [8, 10, 12] as const;
-const DEGREE_K = [3, 5, 7] as const;
+const DEGREES_X = [6, 8, 10, 12] as const;
+/** Degree in κ, where it moves at all. */
+const DEGREE_K = 3;
 const DRAWN = 128;
 const SEED = 51672;
 
 /** The polynomial for a ratio and a range of κ; undefined where no short one is within the bound. */
 export function expansionOf(primary: Primary, ratio: number, exponents: Side): Expansion | undefined {
-  for (const [at, degreeX] of DEGREE_X.entries()) {
-    const degreeK = exponents[0] === exponents[1] ? 0 : (DEGREE_K[at] as number);
+  const degreeK = exponents[0] === exponents[1] ? 0 : DEGREE_K;
+  for (const degreeX of DEGREES_X) {
     const draft = through(primary, ratio, exponents, degreeX, degreeK);
     const bound = boundOf(draft, primary, ratio, exponents);
     if (bound <= MOST_ERROR) return { ...draft, bound };
@@ -75,20 +76,34 @@ function boundOf(draft: Draft, primary: Primary, ratio: number, [lower, upper]: 
 }
 
 /** ε at x from 0 to `most` and an exponent of the range. */
-export function expansibilityAt(of: Draft, x: number, kappa: number): number {
-  const { terms, degreeX, degreeK } = of;
-  const u = (2 * x) / of.most - 1;
-  const k = (kappa - of.middle) * of.perHalf;
-  let sum = 0;
-  let at = 0;
-  for (let i = 0; i <= degreeX; i += 1) {
-    let line = terms[at] as number;
-    at += 1;
-    for (let j = 1; j <= degreeK; j += 1) {
-      line = line * k + (terms[at] as number);
-      at += 1;
+function expansibilityAt(of: Draft, x: number, kappa: number): number {
+  const one = (value: number) => Float64Array.of(value);
+  const epsilon = one(0);
+  expansibilities(of, one(x), one(1), one(kappa), epsilon, 1);
+  return epsilon[0] as number;
+}
+
+/** ε of the first rows, whose differentials are at most the share `most` of their pressures. */
+export function expansibilities(
+  { terms, most, degreeX, degreeK, middle, perHalf }: Draft,
+  differential: Float64Array,
+  pressure: Float64Array,
+  exponent: Float64Array,
+  epsilon: Float64Array,
+  count: number,
+): void {
+  for (let row = 0; row < count; row += 1) {
+    const x = (differential[row] as number) / (pressure[row] as number);
+    const u = (2 / most) * x - 1;
+    let sum = 0;
+    if (degreeK === 0) for (let i = 0; i <= degreeX; i += 1) sum = sum * u + (terms[i] as number);
+    else {
+      const k = ((exponent[row] as number) - middle) * perHalf;
+      for (let at = 0; at <= 4 * degreeX; at += 4) {
+        const square = ((terms[at] as number) * k + (terms[at + 1] as number)) * k + (terms[at + 2] as number);
+        sum = sum * u + square * k + (terms[at + 3] as number);
+      }
     }
-    sum = sum * u + line;
+    epsilon[row] = 1 - x * sum;
   }
-  return 1 - x * sum;
 }

@@ -10,11 +10,11 @@ import { flowAt, meterAt, type Standing } from '../run/standing.ts';
 import { heldDischarge } from '../solve/equation.ts';
 import { coefficientFrom } from '../solve/flow.ts';
 import { hotGeometry } from '../solve/metal.ts';
-import { type Approximant, approximantOf, coefficientAt } from './approximant.ts';
-import { type Expansion, expansibilityAt, expansionOf } from './expansion.ts';
-import { lookUp } from './patch.ts';
-import { FLOW, figureAt, type Growth, growthOf, RATIO, REYNOLDS, spanAt, spansOf } from './spans.ts';
-import { type Box, type Cells, type NoSurface, patchAt, type StateAt, surfaceOf } from './surface.ts';
+import { approximantOf } from './approximant.ts';
+import { BLOCK, type Block, coefficients, type Explicit, epsilons, ideals, openBlock, states } from './block.ts';
+import { expansionOf } from './expansion.ts';
+import { growthOf, spansOf } from './spans.ts';
+import { type Box, type Cells, type NoSurface, type StateAt, surfaceOf } from './surface.ts';
 
 /** What was measured, a figure a row. Pa, Pa absolute, K; what is absent is as the meter has it. */
 export interface Rows {
@@ -60,23 +60,8 @@ export interface Kernel {
   readonly outside: boolean;
 }
 
-/** What explicit rows are made of. */
-interface Parts {
-  readonly stands: Standing;
-  readonly fallback: { readonly pressure: number; readonly temperature: number };
-  readonly surface: Cells;
-  readonly growth: Growth;
-  readonly approximant: Approximant;
-  /** Absent where the ratio moves or no short polynomial holds: then the element's own formula is taken. */
-  readonly expansion?: Expansion;
-  /** Density, viscosity and exponent of the row at hand. */
-  readonly figures: Float64Array;
-}
-
 /** The kernel of a meter for rows in a box; outside the box a row goes through the whole calculation. */
 export function kernelOf(stands: Standing, box: Box): Kernel {
-  const { state } = stands.solution.meter;
-  const fallback = { pressure: state.pressure as number, temperature: state.temperature as number };
   const problemOf = (rows: Rows, row: number) => problemAt(stands, rows, row);
   const wholly = (why: NonNullable<Kernel['why']>): Kernel => ({
     convert: (rows, flows, from, to) => {
@@ -90,11 +75,11 @@ export function kernelOf(stands: Standing, box: Box): Kernel {
   if (stands.upstream.downstream === true) return wholly('downstream-temperature');
   const surface = surfaceOf(stateOn(stands), box, seamsOf(stands.written.fluid ?? {}, stands.site.atmosphere));
   if (surface.kind === 'exact') return wholly(surface.why);
-  const parts = partsOf(stands, surface, fallback);
-  const bounds = boundsOf(parts);
+  const explicit = explicitOf(stands, surface);
+  const bounds = boundsOf(explicit);
   const { cautions, outside } = surface;
   return {
-    convert: (rows, flows, from, to) => convert(parts, rows, flows, from, to),
+    convert: (rows, flows, from, to) => convert(stands, explicit, rows, flows, from, to),
     problemOf,
     bounds,
     cautions,
@@ -109,15 +94,21 @@ const stateOn =
     return meter.ok ? { ok: true, value: meter.value.state } : meter;
   };
 
-function partsOf(stands: Standing, surface: Cells, fallback: Parts['fallback']): Parts {
-  const { primary, input } = stands;
+function explicitOf(stands: Standing, surface: Cells): Explicit {
+  const { primary, input, solution } = stands;
   const geometry = (T: number) => geometryAt(stands, T);
   const spans = spansOf(input, surface.box.temperature);
   const growth = growthOf(spans, geometry);
   const approximant = approximantOf(primary, spans, geometry);
   const ratio = geometry(surface.box.temperature[0]).ratio;
   const expansion = surface.expands && growth.rigid ? expansionOf(primary, ratio, surface.exponents) : undefined;
-  const common = { stands, fallback, surface, growth, approximant, figures: new Float64Array(3) };
+  const { pressure, temperature } = solution.meter.state;
+  const block = openBlock();
+  block.pressure.fill(surface.box.pressure[0]);
+  block.temperature.fill(surface.box.temperature[0]);
+  const still = [surface.box.pressure, surface.box.temperature].every(([lower, upper]) => lower === upper);
+  if (still) states(surface, block, BLOCK);
+  const common = { primary, surface, growth, approximant, pressure, temperature, still, block };
   return expansion === undefined ? common : { ...common, expansion };
 }
 
@@ -131,7 +122,7 @@ function geometryAt({ solution, input }: Standing, T: number): Geometry {
 /** |dε/ε| is at most this share of |dκ/κ| up to a quarter of p1: ε falls to no less than 0.7 there. */
 const EXPONENT_SHARE = 0.43;
 
-function boundsOf({ surface, approximant, expansion }: Parts): KernelBounds {
+function boundsOf({ surface, approximant, expansion }: Explicit): KernelBounds {
   const { density, viscosity, isentropicExponent } = surface.bounds;
   const coefficient = approximant.bound + approximant.steepness * (viscosity + density / 2);
   const epsilon = (expansion?.bound ?? 0) + (surface.expands ? EXPONENT_SHARE * isentropicExponent : 0);
@@ -140,41 +131,73 @@ function boundsOf({ surface, approximant, expansion }: Parts): KernelBounds {
   return { density, viscosity, isentropicExponent, coefficient, epsilon, massFlow };
 }
 
-/** The rows one by one, in one function: nothing is allocated for a row that is explicit. */
-function convert(parts: Parts, rows: Rows, flows: RowFlows, from: number, to: number): void {
-  const { surface, growth, approximant, figures, stands, fallback } = parts;
-  const { differential, pressure, temperature } = rows;
-  const { expands } = surface;
-  const [[leastP, mostP], [leastT, mostT]] = [surface.box.pressure, surface.box.temperature];
-  for (let row = from; row < to; row += 1) {
-    const dp = differential[row] as number;
-    const p = pressure === undefined ? fallback.pressure : (pressure[row] as number);
-    const T = temperature === undefined ? fallback.temperature : (temperature[row] as number);
-    const x = dp / p;
-    if (!(dp > 0 && x <= MOST_SHARE && p >= leastP && p <= mostP && T >= leastT && T <= mostT)) {
-      whole(stands, rows, flows, row);
-      continue;
-    }
-    lookUp(patchAt(surface, p, T), p, T, figures);
-    const density = expands ? ((figures[0] as number) * p) / T : (figures[0] as number);
-    const span = spanAt(growth, T);
-    const t = (T - (growth.middle[span] as number)) * (growth.perHalf[span] as number);
-    const epsilon = expands ? epsilonOf(parts, span, t, x, figures[2] as number) : 1;
-    const ideal = epsilon * figureAt(growth, span, FLOW, t) * Math.sqrt(dp * density); // q_m/C
-    const a1 = (ideal * figureAt(growth, span, REYNOLDS, t)) / (figures[1] as number); // Annex A, A1 = Re_D/C
-    const explicit = coefficientAt(approximant, span, a1, t);
-    const C = explicit === 0 ? searched(stands, a1, T) : explicit;
-    put(flows, row, explicit === 0 ? PATH.coefficient : PATH.explicit, C * ideal, density, C, epsilon, a1 * C);
-  }
-}
-
 /** Up to a quarter of p1 every differential makes a flow; beyond it the whole calculation says. */
 const MOST_SHARE = 0.25;
 
-function epsilonOf(parts: Parts, span: number, t: number, x: number, kappa: number): number {
-  const { expansion, growth, stands } = parts;
-  if (expansion !== undefined) return expansibilityAt(expansion, x, kappa);
-  return stands.primary.expansibility(figureAt(growth, span, RATIO, t), kappa)(x);
+/** The rows in blocks, and those that no block takes one by one. */
+function convert(stands: Standing, explicit: Explicit, rows: Rows, flows: RowFlows, from: number, to: number): void {
+  let row = from;
+  while (row < to) {
+    const count = taken(explicit, rows, row, Math.min(to, row + BLOCK));
+    if (count === 0) whole(stands, rows, flows, row);
+    else throughBlock(stands, explicit, flows, row, count);
+    row += Math.max(count, 1);
+  }
+}
+
+/** Copies rows into the block as long as they lie in the box and make a flow; how many. */
+function taken(explicit: Explicit, { differential, pressure, temperature }: Rows, from: number, to: number): number {
+  const { block, surface } = explicit;
+  const [leastP, mostP] = surface.box.pressure;
+  const [leastT, mostT] = surface.box.temperature;
+  let count = 0;
+  for (let row = from; row < to; row += 1) {
+    const dp = differential[row] as number;
+    const p = pressure === undefined ? explicit.pressure : (pressure[row] as number);
+    const T = temperature === undefined ? explicit.temperature : (temperature[row] as number);
+    if (!(dp > 0 && dp <= MOST_SHARE * p && p >= leastP && p <= mostP && T >= leastT && T <= mostT)) break;
+    block.differential[count] = dp;
+    block.pressure[count] = p;
+    block.temperature[count] = T;
+    count += 1;
+  }
+  return count;
+}
+
+function throughBlock(stands: Standing, explicit: Explicit, flows: RowFlows, from: number, count: number): void {
+  const { block, surface } = explicit;
+  if (!explicit.still) states(surface, block, count);
+  if (surface.expands) epsilons(explicit, count);
+  ideals(explicit, count);
+  const open = coefficients(explicit, count);
+  flows.path.fill(PATH.explicit, from, from + count);
+  if (open) searchRows(stands, block, flows, from, count);
+  hand(block, flows, from, count);
+}
+
+/** C of the rows that the approximant left open. */
+function searchRows(stands: Standing, block: Block, flows: RowFlows, from: number, count: number): void {
+  for (let at = 0; at < count; at += 1) {
+    if (block.coefficient[at] !== 0) continue;
+    block.coefficient[at] = searched(stands, block.invariant[at] as number, block.temperature[at] as number);
+    flows.path[from + at] = PATH.coefficient;
+  }
+}
+
+/** The figures of a block into the columns that are there. */
+function hand(
+  { coefficient, ideal, invariant, density, epsilon }: Block,
+  flows: RowFlows,
+  from: number,
+  count: number,
+): void {
+  const { massFlow, reynolds } = flows;
+  for (let at = 0; at < count; at += 1) massFlow[from + at] = (coefficient[at] as number) * (ideal[at] as number);
+  if (reynolds !== undefined)
+    for (let at = 0; at < count; at += 1) reynolds[from + at] = (coefficient[at] as number) * (invariant[at] as number);
+  flows.density?.set(density.subarray(0, count), from);
+  flows.coefficient?.set(coefficient.subarray(0, count), from);
+  flows.epsilon?.set(epsilon.subarray(0, count), from);
 }
 
 /** C where the approximant does not reach. */

@@ -29,10 +29,11 @@ const SIZES = [6, 10, 16, 24, 36] as const;
 /** The last coefficients, relative to the first, that end the search; and those beyond which a surface is not smooth. */
 const SMALL = 1e-9;
 const ROUGH = 1e-6;
-/** Cells of a side, at most, and how well they follow the table, relative. */
+/** Cells of a side, at most, and how well they follow the table, relative: the first figure, and those that move little. */
 const MOST_CELLS = 64;
-const CLOSE = 4e-9;
-const TERMS = 16; // coefficients of a bicubic
+const CLOSE = [4e-9, 1e-7] as const;
+/** Coefficients of a bicubic. */
+export const TERMS = 16;
 
 /** A patch over a box, or the code of why there is none: that of a sample, or `not-smooth`. */
 export function patchOver(pressures: Side, temperatures: Side, sample: Sample): Patch | string {
@@ -88,7 +89,7 @@ function cut(tables: readonly Table[], pressures: Side, temperatures: Side, tail
     return { patch, off: offOf(patch, tables) };
   };
   let best = made(1, 1);
-  while (best.off > CLOSE) {
+  while (best.off > 1) {
     const { cellsP, cellsT } = best.patch;
     const finer = [
       ...(2 * cellsP <= MOST_CELLS && pressures[0] < pressures[1] ? [made(2 * cellsP, cellsT)] : []),
@@ -145,7 +146,7 @@ const BETWEEN = [0.11, 0.5, 0.89] as const;
 /** Cells looked at along each side: the first, the last and some between. */
 const LOOKED_AT = 6;
 
-/** Largest distance of the cells from the tables, relative, at places between the nodes. */
+/** Largest distance of the cells from the tables, as a share of what is close, at places between the nodes. */
 function offOf(patch: Patch, tables: readonly Table[]): number {
   const into = new Float64Array(patch.figures);
   const cellsAlong = (count: number) =>
@@ -162,7 +163,7 @@ function offOf(patch: Patch, tables: readonly Table[]): number {
       inCell(patch, x, y, into);
       lines.forEach((line, figure) => {
         const known = chebyshevSum(line, (2 * y) / patch.cellsT - 1);
-        most = Math.max(most, Math.abs((into[figure] as number) / known - 1));
+        most = Math.max(most, Math.abs((into[figure] as number) / known - 1) / CLOSE[figure === 0 ? 0 : 1]);
       });
     }
   }
@@ -179,13 +180,13 @@ function inCell({ cellsP, cellsT, cells, figures }: Patch, x: number, y: number,
   const atT = Math.max(0, Math.min(y | 0, cellsT - 1));
   const u = x - atP;
   const v = y - atT;
-  let at = (atP * cellsT + atT) * figures * TERMS;
-  for (let figure = 0; figure < figures; figure += 1) {
-    into[figure] =
-      ((row(cells, at + 12, v) * u + row(cells, at + 8, v)) * u + row(cells, at + 4, v)) * u + row(cells, at, v);
-    at += TERMS;
-  }
+  const at = (atP * cellsT + atT) * figures * TERMS;
+  for (let figure = 0; figure < figures; figure += 1) into[figure] = bicubic(cells, at + figure * TERMS, u, v);
 }
 
-const row = (c: Float64Array, at: number, v: number): number =>
+/** The bicubic whose coefficients start at `at`: powers of u from the constant up, each by those of v. */
+export const bicubic = (c: Float64Array, at: number, u: number, v: number): number =>
+  ((line(c, at + 12, v) * u + line(c, at + 8, v)) * u + line(c, at + 4, v)) * u + line(c, at, v);
+
+const line = (c: Float64Array, at: number, v: number): number =>
   (((c[at + 3] as number) * v + (c[at + 2] as number)) * v + (c[at + 1] as number)) * v + (c[at] as number);

@@ -18,7 +18,7 @@ export interface Span {
   readonly moves: boolean;
 }
 
-/** No span is wider: what a polynomial leaves out falls with the fifth power of the width. K. */
+/** No span is wider: what a polynomial leaves out falls with the fourth power of the width. K. */
 const WIDEST = 50;
 
 /** The spans of a box, in rising order. */
@@ -39,18 +39,18 @@ export function spansOf(input: MeterInput, [lower, upper]: Side): readonly Span[
   });
 }
 
-/** Of each span: its upper end, middle and half width turned round, and three polynomials of degree 4. */
+/** Of each span: its upper end, middle and half width turned round, and three polynomials of degree 3. */
 export interface Growth {
   readonly upper: Float64Array;
   readonly middle: Float64Array;
   readonly perHalf: Float64Array;
-  /** q_m/(C epsilon) at 1 Pa and 1 kg/m3, 4/(π D) and the ratio: highest power first, 15 figures a span. */
+  /** q_m/(C epsilon) at 1 Pa and 1 kg/m3, 4/(π D) and the ratio: highest power first, 12 figures a span. */
   readonly terms: Float64Array;
   /** Whether the ratio is the same at every temperature. */
   readonly rigid: boolean;
 }
 
-const DEGREE = 4;
+const DEGREE = 3;
 const POWERS = DEGREE + 1;
 export const FLOW = 0;
 export const REYNOLDS = POWERS;
@@ -102,6 +102,8 @@ export function spanAt({ upper }: Growth, T: number): number {
 /** One of the three figures in a span, with t from -1 to 1 in it. */
 export function figureAt({ terms }: Growth, span: number, figure: number, t: number): number {
   const at = span * FIGURES + figure;
-  const upperHalf = ((terms[at] as number) * t + (terms[at + 1] as number)) * t + (terms[at + 2] as number);
-  return (upperHalf * t + (terms[at + 3] as number)) * t + (terms[at + 4] as number);
+  return (
+    (((terms[at] as number) * t + (terms[at + 1] as number)) * t + (terms[at + 2] as number)) * t +
+    (terms[at + 3] as number)
+  );
 }

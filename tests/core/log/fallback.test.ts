@@ -104,6 +104,23 @@ describe('a row that the box does not hold', () => {
     expect([...flows.density].slice(2)).toEqual([0, 0, 0, 0, 0, 0]);
   });
 
+  it('of one state is at that state, not at that of the meter', () => {
+    const other = kernelOf(stands, { pressure: [38e5, 38e5], temperature: [655, 655] });
+    const one = flowsFor(2);
+    const rows: Rows = { differential: column(2e4, 2e4), pressure: column(38e5, 40e5), temperature: column(655, 655) };
+    other.convert(rows, one, 0, 2);
+    expect([...one.path]).toEqual([PATH.explicit, PATH.whole]);
+    for (const row of [0, 1]) {
+      const known = flowAt(
+        stands,
+        { pressure: rows.pressure?.[row] as never, temperature: 655 as never },
+        2e4 as never,
+      );
+      if (!known.ok) throw new Error(JSON.stringify(known.problems));
+      expect(Math.abs((one.massFlow[row] as number) / known.value.operation.massFlow - 1)).toBeLessThan(1e-12);
+    }
+  });
+
   it('takes rows from one to another and leaves the others alone', () => {
     const some = flowsFor(3);
     kernel.convert({ differential: column(1e4, 2e4, 3e4) }, some, 1, 2);

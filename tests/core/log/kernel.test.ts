@@ -30,7 +30,7 @@ function rowsOf({ box, most }: Pick<ReturnType<typeof logMeter>, 'box' | 'most'>
 }
 
 /** Converts rows both ways and keeps the largest relative distance of each figure. */
-function worstOf(fluid: string, element: string, count = ROWS) {
+function worstOf(fluid: string, element: string, count: number) {
   const logs = logMeter(fluid, element);
   const kernel = kernelOf(logs.stands, logs.box);
   if (kernel.bounds === undefined) throw new Error(`${fluid}, ${element}: expected a surface, got ${kernel.why}`);
@@ -56,14 +56,15 @@ function worstOf(fluid: string, element: string, count = ROWS) {
 }
 
 const every = Object.keys(elementsOf);
-const combinations: (readonly [fluid: string, element: string])[] = [
-  ...Object.keys(logged).map((fluid) => [fluid, 'orifice flange'] as const),
-  ...every.slice(1).flatMap((element) => ['liquid water', 'stated gas'].map((fluid) => [fluid, element] as const)),
+const combinations: (readonly [rows: number, fluid: string, element: string])[] = [
+  ...Object.keys(logged).map((fluid) => [ROWS, fluid, 'orifice flange'] as const),
+  ...every.slice(1).map((element) => [ROWS, 'stated gas', element] as const),
+  ...every.slice(1).map((element) => [ROWS / 10, 'liquid water', element] as const),
 ];
 
-describe(`${ROWS} rows of a log`, () => {
-  it.each(combinations)('of %s in an element of the kind %s are those of the whole calculation', (fluid, element) => {
-    const { worst, bounds, explicit } = worstOf(fluid, element);
+describe('random rows of a log', () => {
+  it.each(combinations)('%d of %s, %s, are those of the whole calculation', (count, fluid, element) => {
+    const { worst, bounds, explicit } = worstOf(fluid, element, count);
     expect(worst.massFlow).toBeLessThanOrEqual(bounds.massFlow);
     expect(worst.density).toBeLessThanOrEqual(bounds.density);
     expect(worst.coefficient).toBeLessThanOrEqual(bounds.coefficient + 1e-13);
