@@ -39,7 +39,11 @@ function createFollow(core: Core): (state: Workbench, change: Partial<Workbench>
       ...change,
       results,
       lastSolved: lastSolvedOf(change.lastSolved ?? state.lastSolved, keys, results.results),
-      lastSurveyed: lastSolvedOf<SolvedTraverse>(change.lastSurveyed ?? state.lastSurveyed, traverseKeys, results.traverses),
+      lastSurveyed: lastSolvedOf<SolvedTraverse>(
+        change.lastSurveyed ?? state.lastSurveyed,
+        traverseKeys,
+        results.traverses,
+      ),
     };
   };
 }

@@ -16,6 +16,7 @@ type Listing = Pick<
   | 'duplicateTraverse'
   | 'moveTraverse'
   | 'deleteTraverse'
+  | 'takeToHand'
   | 'dismissDeleted'
 >;
 
@@ -33,6 +34,7 @@ export function listing(hands: Hands, newKey: () => string): Listing {
     duplicateTraverse: traverses.duplicate,
     moveTraverse: traverses.move,
     deleteTraverse: traverses.remove,
+    takeToHand: (hand) => hands.set({ hand }),
     dismissDeleted: () => hands.set({ deleted: undefined }),
   };
 }

@@ -1,6 +1,5 @@
 /** The lists of a project that are edited alike, and what the workbench holds of each. */
 import type { Project } from '../core/document/project.ts';
-import type { WorkbenchState } from './workbench.ts';
 
 export type ListName = 'meters' | 'traverses';
 
@@ -20,7 +19,13 @@ export const withItems = (project: Project, list: ListName, items: readonly unkn
   [list]: items,
 });
 
-type Held = Pick<WorkbenchState, 'keys' | 'selected' | 'traverseKeys' | 'traverseSelected'>;
+/** The parts of the workbench that hold it. */
+interface Held {
+  readonly keys: readonly string[];
+  readonly selected: number;
+  readonly traverseKeys: readonly string[];
+  readonly traverseSelected: number;
+}
 
 export const standingOf = (state: Held, list: ListName): Standing =>
   list === 'meters'
@@ -28,5 +33,8 @@ export const standingOf = (state: Held, list: ListName): Standing =>
     : { keys: state.traverseKeys, selected: state.traverseSelected };
 
 /** The change of the workbench that gives a list this standing and takes it to hand. */
-export const standingAs = (list: ListName, { keys, selected }: Standing): Partial<WorkbenchState> =>
+export const standingAs = (
+  list: ListName,
+  { keys, selected }: Standing,
+): Partial<Held> & { readonly hand: ListName } =>
   list === 'meters' ? { keys, selected, hand: list } : { traverseKeys: keys, traverseSelected: selected, hand: list };

@@ -46,6 +46,23 @@ const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
     await page.getByRole('link', { name: 'Sheet' }).click();
     await expect(page.getByRole('region', { name: /FE-4101, Sizing sheet/ })).toBeVisible();
   },
+  'a survey, its folds open': async (page) => {
+    await openExample(page);
+    await page.getByRole('link', { name: 'Survey' }).click();
+    await expect(panel(page, 'Readings')).toBeVisible();
+    for (const fold of await page.locator('main details').all())
+      await fold.evaluate((node) => node.setAttribute('open', ''));
+  },
+  'a survey point by point': async (page) => {
+    await openExample(page);
+    await page.getByRole('link', { name: 'Survey' }).click();
+    await press(page, 'Measure point by point');
+    await expect(page.getByRole('dialog', { name: 'Measure' })).toBeVisible();
+  },
+  'a new survey': async (page) => {
+    await page.goto('/#/survey');
+    await press(page, 'Plan a survey');
+  },
   'the menu': async (page) => {
     await openExample(page);
     await menu(page);

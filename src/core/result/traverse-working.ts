@@ -62,7 +62,7 @@ function flowWorking({ plan, state, measured }: Survey, flow: Flow, { correction
   };
   const area = given('A', plan.area, 'm2', 'duct-area');
   const volume: Working = {
-    id: 'volume-flow',
+    id: 'duct-volume-flow',
     symbol: 'q_V',
     formula: 'A * V',
     given: [area, given('V', flow.meanVelocity, 'm/s', 'mean-velocity')],
@@ -74,7 +74,7 @@ function flowWorking({ plan, state, measured }: Survey, flow: Flow, { correction
     id: 'mass-flow',
     symbol: 'q_m',
     formula: 'ρ_1 * q_V',
-    given: [density, given('q_V', flow.volumeFlow, 'm3/s', 'volume-flow')],
+    given: [density, given('q_V', flow.volumeFlow, 'm3/s', 'duct-volume-flow')],
     value: flow.massFlow,
     unit: 'kg/s',
     source: FLOW,

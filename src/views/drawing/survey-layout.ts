@@ -67,7 +67,21 @@ export function surveyLayout({ section, lines }: SurveyShape, box: Box): SurveyL
   );
   const closest = nearest(all);
   const radius = Math.max(2, Math.min(5, closest / 2.6));
-  return { width: box.width, height: place.height, outline, spots: labelled(all, radius, box.type), ports, radius };
+  return {
+    width: box.width,
+    height: place.height,
+    outline,
+    spots: labelled(all, radius, box.type, insideOf(outline)),
+    ports,
+    radius,
+  };
+}
+
+/** Whether a place on the page is clear of the wall. */
+function insideOf(outline: SurveyLayout['outline']): (x: number, y: number) => boolean {
+  if (outline.shape === 'circle') return (x, y) => Math.hypot(x - outline.x, y - outline.y) < outline.radius - 2;
+  const { x: left, y: top, width, height } = outline;
+  return (x, y) => x > left + 2 && x < left + width - 2 && y > top + 2 && y < top + height - 2;
 }
 
 type XY = readonly [x: number, y: number];
@@ -139,22 +153,32 @@ function nearest(spots: readonly Bare[]): number {
   return Math.min(14, ...gaps);
 }
 
-/** A number stands right of its point; it is left out where it would cover a point or another number. */
-function labelled(spots: readonly Bare[], radius: number, type: number): readonly Spot[] {
-  const taken: { x: number; y: number }[] = [];
+/** A number stands right of its point, or where there is room; it is left out where it would cover something. */
+function labelled(
+  spots: readonly Bare[],
+  radius: number,
+  type: number,
+  inside: (x: number, y: number) => boolean,
+): readonly Spot[] {
+  const taken: { readonly x: number; readonly y: number; readonly half: number }[] = [];
   return spots.map((spot) => {
-    const label = { x: spot.x + radius + 2 + type * 0.3 * String(spot.number).length, y: spot.y };
-    const room = type * (0.45 + 0.3 * String(spot.number).length);
-    const free =
-      taken.every((one) => Math.abs(one.x - label.x) > room || Math.abs(one.y - label.y) > type * 0.8) &&
-      spots.every(
-        (other) =>
-          other === spot ||
-          Math.abs(other.x - label.x) > radius + type * 0.3 * String(spot.number).length ||
-          Math.abs(other.y - label.y) > radius + type * 0.3,
-      );
-    if (!free) return spot;
-    taken.push(label);
-    return { ...spot, label };
+    const half = type * 0.31 * String(spot.number).length;
+    const [aside, above] = [radius + 2 + half, radius + 1 + type * 0.5];
+    const places = [
+      { x: spot.x + aside, y: spot.y },
+      { x: spot.x - aside, y: spot.y },
+      { x: spot.x, y: spot.y - above },
+      { x: spot.x, y: spot.y + above },
+    ];
+    const free = places.find(
+      ({ x, y }) =>
+        inside(x - half, y) &&
+        inside(x + half, y) &&
+        taken.every((one) => Math.abs(one.x - x) > one.half + half || Math.abs(one.y - y) > type * 0.85) &&
+        spots.every((one) => Math.abs(one.x - x) > radius + half || Math.abs(one.y - y) > radius + type * 0.35),
+    );
+    if (free === undefined) return spot;
+    taken.push({ ...free, half });
+    return { ...spot, label: free };
   });
 }

@@ -18,7 +18,7 @@ export function resultRows(at: Context, { flow, quality, uncertainty }: SolvedTr
   if (flow === undefined) return rowOf(at, 'meanSoFar', quality?.meanSoFar_m_s, 'velocity');
   return [
     ...rowOf(at, 'meanVelocity', flow.meanVelocity_m_s, 'velocity', { symbol: 'V', working: 'traverse-mean' }),
-    ...rowOf(at, 'volumeFlow', flow.volumeFlow_m3_s, 'volumeFlow', { symbol: 'q_V', working: 'volume-flow' }),
+    ...rowOf(at, 'volumeFlow', flow.volumeFlow_m3_s, 'volumeFlow', { symbol: 'q_V', working: 'duct-volume-flow' }),
     ...rowOf(at, 'massFlow', flow.massFlow_kg_s, 'massFlow', { symbol: 'q_m', working: 'mass-flow' }),
     ...rowOf(at, 'baseVolumeFlow', flow.baseVolumeFlow_m3_s, 'baseVolumeFlow', {
       symbol: 'q_Vb',

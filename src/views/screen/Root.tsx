@@ -1,5 +1,5 @@
 /** The screen: header, list of meters, and the place the address names. */
-import { lazy, Suspense, useState } from 'react';
+import { lazy, Suspense, useEffect, useState } from 'react';
 import type { Commands } from '../../state/commands.ts';
 import type { WorkbenchStore } from '../../state/workbench.ts';
 import { Boundary } from './Boundary.tsx';
@@ -50,6 +50,10 @@ export function Root({ store, commands, sheets }: Props) {
 function Body({ sheets }: { readonly sheets: SheetsView }) {
   const place = usePlace();
   const project = useWorkbench((state) => state.project);
+  const takeToHand = useWorkbench((state) => state.takeToHand);
+  useEffect(() => {
+    if (place !== 'sheet') takeToHand(place === 'survey' ? 'traverses' : 'meters');
+  }, [place, takeToHand]);
   return (
     <div className={styles.body}>
       <Side />

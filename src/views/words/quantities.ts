@@ -78,6 +78,7 @@ export const quantityNames: Readonly<Record<string, string>> = {
   'uncertainty-expansibility': 'Uncertainty of the expansibility factor',
   'uncertainty-pipe': 'Uncertainty of the pipe bore',
   viscosity: 'Dynamic viscosity',
+  'duct-volume-flow': 'Volume flow in the duct',
   'volume-flow': 'Volume flow at the upstream state',
   'water-fraction': 'Mole fraction of water vapour',
   'water-mass-fraction': 'Mass fraction of water',

@@ -2,12 +2,15 @@
 import type { SolvedTraverse } from '../../core/result/record.ts';
 import type { Choice } from './elements.ts';
 
+/** A list of which the first stands where nothing is written. */
+type UsualFirst = readonly [Choice, ...Choice[]];
+
 export const shapeChoices: readonly Choice[] = [
   { value: 'circular', label: 'Circular' },
   { value: 'rectangular', label: 'Rectangular' },
 ];
 
-export const portChoices: readonly Choice[] = [
+export const portChoices: UsualFirst = [
   { value: 'width', label: 'Along the width' },
   { value: 'height', label: 'Along the height' },
 ];
@@ -19,7 +22,7 @@ export const ruleChoices: readonly Choice[] = [
   { value: 'single-point', label: 'Single point' },
 ];
 
-export const wallChoices: readonly Choice[] = [
+export const wallChoices: UsualFirst = [
   { value: 'leave', label: 'Left where they are' },
   { value: 'move', label: 'Moved to the distance' },
   { value: 'merge', label: 'Moved, those that meet made one' },
@@ -46,7 +49,7 @@ export const gaugeLiquidChoices: readonly Choice[] = [
   { value: 'mercury', label: 'Mercury' },
 ];
 
-export const blockageChoices: readonly Choice[] = [
+export const blockageChoices: UsualFirst = [
   { value: 'off', label: 'Off' },
   { value: 'stem', label: 'By the area of the stem' },
 ];
@@ -195,6 +198,10 @@ export const surveyPlace = {
   hint: 'Enter goes on to the next point, Shift + Enter back. A column, a row or a block can be pasted into any box.',
   unit: 'Unit of the readings',
   clear: 'Clear the readings',
+  lineMean: 'Mean of the line',
+  moved: 'moved by the wall rule',
+  plan: 'Plan',
+  planOf: 'section, points, probe, fluid, plane',
   point: 'Point',
   depth: 'Depth',
   reading: 'Reading',

@@ -32,6 +32,7 @@ export const workingTitles: Readonly<Record<string, string>> = {
   'mass-flow': 'Mass flow',
   differential: 'Differential pressure',
   'volume-flow': 'Volume flow at the upstream state',
+  'duct-volume-flow': 'Volume flow in the duct',
   'base-volume-flow': 'Volume flow at the base state',
   velocity: 'Mean velocity in the pipe',
   'traverse-velocity': 'Velocity at the strongest reading',

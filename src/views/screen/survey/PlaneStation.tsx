@@ -1,7 +1,6 @@
 /** Station 4: the plane, the second probe, corrections that are chosen, and how sure the inputs are. */
 import { blockageChoices, surveyPlace as words } from '../../words/surveys.ts';
 import { useWorkbench } from '../binding.tsx';
-import { ChoiceField } from '../field/ChoiceField.tsx';
 import { MeterTextField } from '../field/MeterTextField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
 import { quantityKind } from '../field/quantities.ts';
@@ -9,6 +8,7 @@ import { Cell } from '../fluid/Cell.tsx';
 import styles from '../fluid/inputs.module.css';
 import { Problems } from '../fluid/Problems.tsx';
 import { fileCell, rowsIn, shownCell, type TableColumn } from '../fluid/rows.ts';
+import { UsualChoice } from '../fluid/UsualChoice.tsx';
 import { useWrite, useWritten } from '../hand.tsx';
 import { Fold } from '../station/Fold.tsx';
 import { Station } from '../station/Station.tsx';
@@ -22,12 +22,7 @@ export function PlaneStation({ readings }: { readonly readings: Readings }) {
       <QuantityField path="nullAngle" label="Mean null angle" />
       <Fold title="Second probe, corrections">
         <Reference readings={readings} />
-        <ChoiceField
-          path="corrections.blockage"
-          label="Stem in the duct"
-          choices={blockageChoices.slice(1)}
-          open="Off"
-        />
+        <UsualChoice path="corrections.blockage" label="Stem in the duct" choices={blockageChoices} />
         <QuantityField path="corrections.turbulence" label="Turbulence" />
         <MeterTextField path="corrections.wall" label="Wall factor" decimal />
       </Fold>

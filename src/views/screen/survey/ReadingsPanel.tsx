@@ -121,7 +121,7 @@ function Line({ line, survey: { units }, readings, current, setCurrent, go, past
         {line.points.map((point) => (
           <tr key={point.number} data-current={point.number === current}>
             <th scope="row">{point.number}</th>
-            <td title={point.moved ? 'moved by the wall rule' : undefined}>
+            <td title={point.moved ? words.moved : undefined}>
               {point.depth.number}
               {point.moved && <span aria-hidden="true"> ▪</span>}
             </td>
@@ -143,7 +143,7 @@ function Line({ line, survey: { units }, readings, current, setCurrent, go, past
         <tfoot>
           <tr>
             <th scope="row" colSpan={3}>
-              Mean of the line
+              {words.lineMean}
             </th>
             <td>{line.mean.number}</td>
           </tr>

@@ -11,6 +11,7 @@ import {
 import { ChoiceField } from '../field/ChoiceField.tsx';
 import { MeterTextField } from '../field/MeterTextField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
+import { UsualChoice } from '../fluid/UsualChoice.tsx';
 import { useMeterText } from '../meter.ts';
 import { Station } from '../station/Station.tsx';
 
@@ -26,7 +27,7 @@ export function SectionStation() {
         <>
           <QuantityField path="section.width" />
           <QuantityField path="section.height" />
-          <ChoiceField path="section.ports" label="Ports" choices={portChoices} open="Along the width" />
+          <UsualChoice path="section.ports" label="Ports" choices={portChoices} />
         </>
       ) : (
         <QuantityField path="section.diameter" />
@@ -41,12 +42,7 @@ export function SectionStation() {
         </>
       )}
       {pattern && <p>26 points in four lines, with weights.</p>}
-      <ChoiceField
-        path="wallRule"
-        label="Points near the wall"
-        choices={wallChoices.slice(1)}
-        open="Left where they are"
-      />
+      <UsualChoice path="wallRule" label="Points near the wall" choices={wallChoices} />
     </Station>
   );
 }

@@ -65,10 +65,12 @@ function One({ selected }: { readonly selected: SelectedSurvey }) {
       <SurveyAnswer selected={selected} />
       <div className={along.along}>
         <SurveyHead index={selected.index} />
-        <Pictures selected={selected} current={current ?? next} goTo={goTo} />
-        <Stations readings={readings} />
+        <Plan selected={selected} readings={readings} />
       </div>
       <Boundary of={survey}>
+        <div className={along.along}>
+          <Pictures selected={selected} current={current ?? next} goTo={goTo} />
+        </div>
         {survey && (
           <ReadingsPanel
             {...{ survey, readings, stale, setCurrent }}
@@ -90,6 +92,25 @@ function One({ selected }: { readonly selected: SelectedSurvey }) {
         />
       )}
     </div>
+  );
+}
+
+interface PlanProps {
+  readonly selected: SelectedSurvey;
+  readonly readings: Readings;
+}
+
+/** The form, folded away at first where the plan is made. */
+function Plan({ selected: { now }, readings }: PlanProps) {
+  const [open] = useState(now.progress === undefined);
+  return (
+    <details className={styles.plan} open={open}>
+      <summary>
+        <b>{words.plan}</b> {now.title}
+        <span>{words.planOf}</span>
+      </summary>
+      <Stations readings={readings} />
+    </details>
   );
 }
 
