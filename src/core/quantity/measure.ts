@@ -17,6 +17,8 @@ export type Measure =
   | 'mass flow'
   | 'volume flow' // at the upstream state
   | 'base volume flow' // at the base state of the project
+  | 'mass'
+  | 'volume'
   | 'density'
   | 'dynamic viscosity'
   | 'kinematic viscosity'

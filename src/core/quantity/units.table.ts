@@ -148,6 +148,16 @@ export const UNIT_ROWS: Readonly<Record<Measure, readonly Row[]>> = {
   ],
   'volume flow': volumeFlows,
   'base volume flow': baseVolumeFlows,
+  mass: [
+    { symbol: 'kg', print: 'kg', words: 'kilogram', factor: 'kg' },
+    { symbol: 't', print: 't', words: 'tonne', factor: 't' },
+    { symbol: 'lb', print: 'lb', words: 'pound', factor: 'lb' },
+  ],
+  volume: [
+    { symbol: 'm3', print: 'm³', words: 'cubic metre', factor: 'm * m * m' },
+    { symbol: 'ft3', print: 'ft³', words: 'cubic foot', factor: 'ft3' },
+    { symbol: 'gal', print: 'gal', words: 'US gallon', factor: 'gal' },
+  ],
   density: [
     { symbol: 'kg/m3', print: 'kg/m³', words: 'kilogram per cubic metre', factor: 'kg / m / m / m' },
     { symbol: 'g/cm3', print: 'g/cm³', words: 'gram per cubic centimetre', factor: 'g / centi / centi / centi' },

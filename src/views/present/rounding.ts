@@ -23,6 +23,8 @@ const rounding: Readonly<Record<Role, Rounding>> = {
   massFlow: { significant: 4 },
   volumeFlow: { significant: 4 },
   baseVolumeFlow: { significant: 4 },
+  mass: { significant: 6, plainTo: 1e9 },
+  volume: { significant: 6, plainTo: 1e9 },
   temperature: { decimals: 1 },
   temperatureDifference: { decimals: 1 },
   density: { significant: 4 },

@@ -24,6 +24,8 @@ const usual: Readonly<Record<UnitRole, Usual>> = {
   massFlow: ['mass flow', 't/h', 'lb/h'],
   volumeFlow: ['volume flow', 'm3/h', 'gal/min'],
   baseVolumeFlow: ['base volume flow', 'base m3/h', 'base ft3/h'],
+  mass: ['mass', 't', 'lb'],
+  volume: ['volume', 'm3', 'ft3'],
   temperature: ['temperature', 'degC', 'degF'],
   temperatureDifference: ['temperature difference', 'K', 'degF'],
   density: ['density', 'kg/m3', 'lb/ft3'],

@@ -12,6 +12,8 @@ export type Role =
   | 'massFlow'
   | 'volumeFlow'
   | 'baseVolumeFlow'
+  | 'mass' // what passed
+  | 'volume'
   | 'temperature'
   | 'temperatureDifference'
   | 'density'
@@ -50,6 +52,8 @@ const siUnits: Readonly<Record<Role, string>> = {
   massFlow: 'kg/s',
   volumeFlow: 'm³/s',
   baseVolumeFlow: 'base m³/s',
+  mass: 'kg',
+  volume: 'm³',
   temperature: 'K',
   temperatureDifference: 'K',
   density: 'kg/m³',

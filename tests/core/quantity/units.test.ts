@@ -106,6 +106,8 @@ const recomputed: Record<Measure, Record<string, Whole>> = {
   },
   'volume flow': volumeFlows,
   'base volume flow': Object.fromEntries(Object.entries(volumeFlows).map(([symbol, f]) => [`base ${symbol}`, f])),
+  mass: { kg: one, t: kilo, lb: pound },
+  volume: { m3: one, ft3: cubicFoot, gal: gallon },
   density: {
     'kg/m3': one,
     'g/cm3': kilo,
