@@ -58,14 +58,21 @@ function push(reader: Reader, bytes: Uint8Array): void {
 function pushPlain(reader: Reader, bytes: Uint8Array): void {
   let at = 0;
   while (at < bytes.length) {
+    if (reader.passing) at = lineEndFrom(bytes, at);
     const taken = bytes.subarray(at, at + roomOf(reader));
-    if (taken.length === 0) throw new Error('log: expected room in the window, got none');
+    if (taken.length === 0 && at < bytes.length) throw new Error('log: expected room in the window, got none');
     reader.window.set(taken, reader.end);
     reader.end += taken.length;
     at += taken.length;
     const isLong = reader.end - reader.start > LONGEST_ROW;
     if (isLong || reader.passing || taken.includes(LF) || taken.includes(CR)) drain(reader, false);
   }
+}
+
+/** Place of the next line end, or the end of the bytes. */
+function lineEndFrom(bytes: Uint8Array, from: number): number {
+  const ends = [bytes.indexOf(LF, from), bytes.indexOf(CR, from)].filter((at) => at >= 0);
+  return Math.min(...ends, bytes.length);
 }
 
 /** Reads all rows of the window that are whole, and moves what is left to its beginning. */
