@@ -56,6 +56,7 @@ test('there are documents of every version', () =>
   expect(documents.map(({ name }) => name)).toEqual([
     '1/fluids.headwright.json',
     '1/odd-order.headwright.json',
+    '1/place.headwright.json',
     '1/tern-island.headwright.json',
     '1/unknown-keys.headwright.json',
   ]));
