@@ -11,3 +11,4 @@ export type {
   Unknown,
 } from './v/1.ts';
 export type { InstrumentText, LiquidText, ReadingText } from './v/1-instrument.ts';
+export type { LogColumnText, LogText, LogTimeText } from './v/1-log.ts';

@@ -9,6 +9,7 @@ import { gasProblems } from './problems-of-gases.ts';
 import { inputProblems } from './problems-of-input.ts';
 import { liquidProblems } from './problems-of-liquids.ts';
 import { logPlanProblems } from './problems-of-log-plan.ts';
+import { logProblems } from './problems-of-logs.ts';
 import { numberProblems } from './problems-of-numbers.ts';
 import { readingProblems } from './problems-of-readings.ts';
 import { solvingProblems } from './problems-of-solving.ts';
@@ -25,6 +26,7 @@ export const problemWords: ProblemWords = {
   ...solvingProblems,
   ...traverseProblems,
   ...readingProblems,
+  ...logProblems,
   ...logPlanProblems,
   ...fileProblems,
 };

@@ -3,6 +3,7 @@
  * byte; a plain number stands only for what has no unit. Keys this version does not know are kept.
  */
 import type { InstrumentText, ReadingText } from './1-instrument.ts';
+import type { LogText } from './1-log.ts';
 
 export type Unknown = 'bore' | 'differential' | 'flow';
 export type Display = 'SI' | 'US';
@@ -112,6 +113,7 @@ export interface MeterText {
   installation?: InstallationText;
   instrument?: InstrumentText;
   readings?: ReadingText[];
+  log?: LogText;
   [key: string]: unknown;
 }
 
