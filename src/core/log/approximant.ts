@@ -42,7 +42,7 @@ const SEARCHED = 5e-14;
 const MOST_REYNOLDS = 1e9;
 /** Degrees in X for each power of the temperature, the constant first: the metal moves C but little. */
 const DEGREES = [6, 4, 2, 1] as const;
-export const TERMS = DEGREES.reduce((sum: number, degree) => sum + degree + 1, 0);
+const TERMS = DEGREES.reduce((sum: number, degree) => sum + degree + 1, 0);
 /** The leading bits of a double that number its piece: sign, exponent and four of the mantissa. */
 const SHIFT = 16;
 
@@ -51,7 +51,7 @@ const words = new Uint32Array(double.buffer);
 const high = new Uint32Array(new Float64Array([1]).buffer)[0] === 0 ? 1 : 0; // the word that holds the exponent
 
 /** Number of the piece that X lies in, over all doubles. */
-export const pieceOf = (x: number): number => {
+const pieceOf = (x: number): number => {
   double[0] = x;
   return (words[high] as number) >>> SHIFT;
 };
@@ -182,30 +182,27 @@ function polynomial(c: ArrayLike<number>, at: number, u: number, t: number): num
   const cube = (c[at] as number) * u + (c[at + 1] as number);
   const square = ((c[at + 2] as number) * u + (c[at + 3] as number)) * u + (c[at + 4] as number);
   const line = quartic(c, at + 5, u);
-  const still = (quartic(c, at + 10, u) * u + (c[at + 15] as number)) * u + (c[at + 16] as number);
+  const still = sextic(c, at + 10, u);
   return ((cube * t + square) * t + line) * t + still;
 }
+
+const sextic = (c: ArrayLike<number>, at: number, u: number): number =>
+  (quartic(c, at, u) * u + (c[at + 5] as number)) * u + (c[at + 6] as number);
 
 const quartic = (c: ArrayLike<number>, at: number, u: number): number =>
   ((((c[at] as number) * u + (c[at + 1] as number)) * u + (c[at + 2] as number)) * u + (c[at + 3] as number)) * u +
   (c[at + 4] as number);
 
-/** The same, without the powers of the temperature where the metal is still. */
-export function piecePolynomial(c: Float64Array, at: number, u: number, t: number, still: boolean): number {
-  if (still) return (quartic(c, at + 10, u) * u + (c[at + 15] as number)) * u + (c[at + 16] as number);
-  return polynomial(c, at, u, t);
-}
-
-/** C below the first piece in a span, with t from -1 to 1 in it; 0 where it is not within the bound. */
-export const heldAt = ({ holds, held }: Approximant, span: number, t: number): number =>
-  holds ? cubic(held, span * DEGREES.length, t) : 0;
-
-/** C at X in a span, with t from -1 to 1 in it; 0 where the approximant does not reach, and C is to be searched for. */
-export function coefficientAt(of: Approximant, span: number, x: number, t: number): number {
+/**
+ * C at X in a span, with t from -1 to 1 in it; 0 where the approximant does not reach, and C is to be searched for.
+ * `still` leaves out the powers of the temperature, where the metal does not move.
+ */
+export function coefficientAt(of: Approximant, span: number, x: number, t: number, still: boolean): number {
   const piece = pieceOf(x) - of.first;
-  if (piece < 0) return heldAt(of, span, t);
+  if (piece < 0) return of.holds ? cubic(of.held, span * DEGREES.length, t) : 0;
   const at = span * of.pieces + piece;
   if (piece >= of.pieces || of.closed[at] !== 1) return 0;
   const u = (x - (of.middle[piece] as number)) * (of.perHalf[piece] as number);
-  return polynomial(of.terms, at * TERMS, u, t);
+  const from = at * TERMS;
+  return still ? sextic(of.terms, from + 10, u) : polynomial(of.terms, from, u, t);
 }

@@ -4,11 +4,11 @@
  * Rows of a block lie in the box of the surface.
  */
 import type { Primary } from '../element/contract.ts';
-import { type Approximant, heldAt, pieceOf, piecePolynomial, TERMS } from './approximant.ts';
+import { type Approximant, coefficientAt } from './approximant.ts';
 import { type Expansion, expansibilities } from './expansion.ts';
 import { bicubic, TERMS as CELL_TERMS, type Patch } from './patch.ts';
 import { FLOW, figureAt, type Growth, RATIO, REYNOLDS, spanAt } from './spans.ts';
-import type { Cells } from './surface.ts';
+import { type Cells, patchNumber } from './surface.ts';
 
 /** Rows in a block, at most. */
 export const BLOCK = 512;
@@ -59,7 +59,7 @@ export const openBlock = (): Block => ({
 export function states(surface: Cells, block: Block, count: number): void {
   const { patches } = surface;
   if (patches.length === 1) {
-    statesOn(patches[0] as Patch, surface.expands, block, 0, count);
+    statesOn(patches[0] as Patch, surface, block, 0, count);
     return;
   }
   let from = 0;
@@ -68,36 +68,27 @@ export function states(surface: Cells, block: Block, count: number): void {
     let to = from + 1;
     while (to < count && patchNumber(surface, block.pressure[to] as number, block.temperature[to] as number) === patch)
       to += 1;
-    statesOn(patches[patch] as Patch, surface.expands, block, from, to);
+    statesOn(patches[patch] as Patch, surface, block, from, to);
     from = to;
   }
 }
 
-/** Number of the patch that a state of the box lies in. */
-function patchNumber({ bordersP, bordersT }: Cells, p: number, T: number): number {
-  let atP = 0;
-  while (atP < bordersP.length && p > (bordersP[atP] as number)) atP += 1;
-  let atT = 0;
-  while (atT < bordersT.length && T > (bordersT[atT] as number)) atT += 1;
-  return atP * (bordersT.length + 1) + atT;
-}
-
-function statesOn(patch: Patch, expands: boolean, block: Block, from: number, to: number): void {
+function statesOn(patch: Patch, { expands, tied }: Cells, block: Block, from: number, to: number): void {
   const { p0, perP, T0, perT, cells, figures } = patch;
   const { pressure, temperature, density, viscosity, exponent } = block;
   const [lastP, lastT, stride] = [patch.cellsP - 1, patch.cellsT - 1, figures * CELL_TERMS];
   for (let row = from; row < to; row += 1) {
     const p = pressure[row] as number;
-    const T = temperature[row] as number;
     const x = (p - p0) * perP;
-    const y = (T - T0) * perT;
+    const y = ((temperature[row] as number) - T0) * perT;
     const atP = Math.max(0, Math.min(x | 0, lastP));
     const atT = Math.max(0, Math.min(y | 0, lastT));
     const at = (atP * (lastT + 1) + atT) * stride;
     const first = bicubic(cells, at, x - atP, y - atT);
     viscosity[row] = bicubic(cells, at + CELL_TERMS, x - atP, y - atT);
+    if (tied) temperature[row] = bicubic(cells, at + stride - CELL_TERMS, x - atP, y - atT);
     if (expands) {
-      density[row] = (first * p) / T;
+      density[row] = tied ? first * p : (first * p) / (temperature[row] as number);
       exponent[row] = bicubic(cells, at + 2 * CELL_TERMS, x - atP, y - atT);
     } else density[row] = first;
   }
@@ -142,7 +133,6 @@ export function ideals({ growth, block }: Explicit, count: number): void {
 
 /** C at Re_D/C and the temperature of the row; 0 where the approximant does not reach. Whether there is such a row. */
 export function coefficients({ approximant, growth, block }: Explicit, count: number): boolean {
-  const { first, pieces, middle, perHalf, closed, terms } = approximant;
   const { temperature, invariant, coefficient } = block;
   const still = growth.upper.length === 1 && growth.perHalf[0] === 0;
   let open = false;
@@ -150,17 +140,9 @@ export function coefficients({ approximant, growth, block }: Explicit, count: nu
     const T = temperature[row] as number;
     const span = still ? 0 : spanAt(growth, T);
     const t = still ? 0 : (T - (growth.middle[span] as number)) * (growth.perHalf[span] as number);
-    const x = invariant[row] as number;
-    const piece = pieceOf(x) - first;
-    const at = span * pieces + piece;
-    if (piece >= 0 && piece < pieces && closed[at] === 1) {
-      const u = (x - (middle[piece] as number)) * (perHalf[piece] as number);
-      coefficient[row] = piecePolynomial(terms, at * TERMS, u, t, still);
-    } else {
-      const held = piece < 0 ? heldAt(approximant, span, t) : 0;
-      coefficient[row] = held;
-      open ||= held === 0;
-    }
+    const C = coefficientAt(approximant, span, invariant[row] as number, t, still);
+    coefficient[row] = C;
+    open ||= C === 0;
   }
   return open;
 }

@@ -14,7 +14,7 @@ import { approximantOf } from './approximant.ts';
 import { BLOCK, type Block, coefficients, type Explicit, epsilons, ideals, openBlock, states } from './block.ts';
 import { expansionOf } from './expansion.ts';
 import { growthOf, spansOf } from './spans.ts';
-import { type Box, type Cells, type NoSurface, type StateAt, surfaceOf } from './surface.ts';
+import { type Box, type Cells, type NoSurface, type StateAt, surfaceOf, tiedSurfaceOf } from './surface.ts';
 
 /** What was measured, a figure a row. Pa, Pa absolute, K; what is absent is as the meter has it. */
 export interface Rows {
@@ -54,7 +54,7 @@ export interface Kernel {
   readonly problemOf: (rows: Rows, row: number) => string | undefined;
   /** Absent where every row goes through the whole calculation. */
   readonly bounds?: KernelBounds;
-  readonly why?: NoSurface | 'downstream-temperature';
+  readonly why?: NoSurface | 'downstream-temperature' | 'pressure-tied';
   /** Cautions that some state of the box carries, and whether all of it is outside its formulation; rows that went whole say it themselves. */
   readonly cautions: readonly string[];
   readonly outside: boolean;
@@ -62,10 +62,13 @@ export interface Kernel {
 
 /** The kernel of a meter for rows in a box; outside the box a row goes through the whole calculation. */
 export function kernelOf(stands: Standing, box: Box): Kernel {
-  const problemOf = (rows: Rows, row: number) => problemAt(stands, rows, row);
+  const tied = isTied(stands, box);
+  const own = (rows: Rows): Rows => (tied ? withoutTemperature(rows) : rows);
+  const problemOf = (rows: Rows, row: number) => problemAt(stands, own(rows), row);
   const wholly = (why: NonNullable<Kernel['why']>): Kernel => ({
     convert: (rows, flows, from, to) => {
-      for (let row = from; row < to; row += 1) whole(stands, rows, flows, row);
+      const measured = own(rows);
+      for (let row = from; row < to; row += 1) whole(stands, measured, flows, row);
     },
     problemOf,
     why,
@@ -73,13 +76,16 @@ export function kernelOf(stands: Standing, box: Box): Kernel {
     outside: false,
   });
   if (stands.upstream.downstream === true) return wholly('downstream-temperature');
-  const surface = surfaceOf(stateOn(stands), box, seamsOf(stands.written.fluid ?? {}, stands.site.atmosphere));
+  if (stands.upstream.pressure === undefined) return wholly('pressure-tied');
+  const surface = tied
+    ? tiedSurfaceOf(stateOn(stands), box.pressure)
+    : surfaceOf(stateOn(stands), box, seamsOf(stands.written.fluid ?? {}, stands.site.atmosphere));
   if (surface.kind === 'exact') return wholly(surface.why);
   const explicit = explicitOf(stands, surface);
   const bounds = boundsOf(explicit);
   const { cautions, outside } = surface;
   return {
-    convert: (rows, flows, from, to) => convert(stands, explicit, rows, flows, from, to),
+    convert: (rows, flows, from, to) => convert(stands, explicit, own(rows), flows, from, to),
     problemOf,
     bounds,
     cautions,
@@ -87,25 +93,35 @@ export function kernelOf(stands: Standing, box: Box): Kernel {
   };
 }
 
+/** Whether the temperature is neither written nor logged, but follows from the pressure: saturated steam. */
+const isTied = ({ upstream }: Standing, { temperature }: Box): boolean =>
+  upstream.temperature === undefined && temperature[0] === temperature[1];
+
+const withoutTemperature = ({ differential, pressure }: Rows): Rows => ({
+  differential,
+  ...(pressure === undefined ? {} : { pressure }),
+});
+
 const stateOn =
   (stands: Standing): StateAt =>
   (p, T) => {
-    const meter = meterAt(stands, { pressure: as<'absolute pressure'>(p), temperature: as<'temperature'>(T) });
+    const pressure = as<'absolute pressure'>(p);
+    const meter = meterAt(stands, T === undefined ? { pressure } : { pressure, temperature: as<'temperature'>(T) });
     return meter.ok ? { ok: true, value: meter.value.state } : meter;
   };
 
 function explicitOf(stands: Standing, surface: Cells): Explicit {
   const { primary, input, solution } = stands;
   const geometry = (T: number) => geometryAt(stands, T);
-  const spans = spansOf(input, surface.box.temperature);
+  const spans = spansOf(input, surface.temperatures);
   const growth = growthOf(spans, geometry);
   const approximant = approximantOf(primary, spans, geometry);
-  const ratio = geometry(surface.box.temperature[0]).ratio;
+  const ratio = geometry(surface.temperatures[0]).ratio;
   const expansion = surface.expands && growth.rigid ? expansionOf(primary, ratio, surface.exponents) : undefined;
   const { pressure, temperature } = solution.meter.state;
   const block = openBlock();
   block.pressure.fill(surface.box.pressure[0]);
-  block.temperature.fill(surface.box.temperature[0]);
+  block.temperature.fill(surface.temperatures[0]);
   const still = [surface.box.pressure, surface.box.temperature].every(([lower, upper]) => lower === upper);
   if (still) states(surface, block, BLOCK);
   const common = { primary, surface, growth, approximant, pressure, temperature, still, block };
@@ -145,11 +161,14 @@ function convert(stands: Standing, explicit: Explicit, rows: Rows, flows: RowFlo
   }
 }
 
+/** A temperature that follows from the pressure is not looked at. */
+const ANY = [Number.NEGATIVE_INFINITY, Number.POSITIVE_INFINITY] as const;
+
 /** Copies rows into the block as long as they lie in the box and make a flow; how many. */
 function taken(explicit: Explicit, { differential, pressure, temperature }: Rows, from: number, to: number): number {
   const { block, surface } = explicit;
   const [leastP, mostP] = surface.box.pressure;
-  const [leastT, mostT] = surface.box.temperature;
+  const [leastT, mostT] = surface.tied ? ANY : surface.box.temperature;
   let count = 0;
   for (let row = from; row < to; row += 1) {
     const dp = differential[row] as number;

@@ -3,7 +3,7 @@
  * rows by the million. The error is measured when it is built, at states drawn at random, and stated; where the box is
  * not one smooth phase there is no surface and the reason is told: then each row is solved by itself.
  *
- * Of a gas the surface holds ρ T/p, which hardly moves; of a liquid ρ.
+ * Of a gas the surface holds ρ T/p, which hardly moves, along a saturation line ρ/p; of a liquid ρ.
  */
 import type { FluidState } from '../fluid/contract.ts';
 import type { Seams } from '../fluid/model.ts';
@@ -37,6 +37,10 @@ export interface Cells {
   readonly kind: 'cells';
   readonly box: Box;
   readonly expands: boolean;
+  /** Whether the temperature follows from the pressure; then it is the last figure of a patch, and no side of the box. */
+  readonly tied: boolean;
+  /** Least and largest temperature of a state, K. */
+  readonly temperatures: Side;
   /** Inner borders of the patches, rising; a figure on a border belongs below it. */
   readonly bordersP: Float64Array;
   readonly bordersT: Float64Array;
@@ -54,7 +58,8 @@ export interface Cells {
 
 export type Surface = Cells | { readonly kind: 'exact'; readonly why: NoSurface };
 
-export type StateAt = (p: number, T: number) => Outcome<FluidState>;
+/** The state at a pressure and a temperature; without one, at that which the fluid ties to the pressure. */
+export type StateAt = (p: number, T?: number) => Outcome<FluidState>;
 
 /** The error of density that a surface may have. */
 const MOST_ERROR = 1e-7;
@@ -75,13 +80,22 @@ const HAIR = 4e-12;
 /** Two phases stand side by side, or the state is not the phase it is taken for. */
 const twoPhases = ['fluid-two-phase', 'fluid-liquid', 'wet-steam', 'water-dew-point'];
 
+/** Wet steam is what a surface along the saturation line is asked for. */
+const asked = 'wet-steam';
+
 /** The surface of a fluid over a box; `seams` are where its formulation changes or bends. */
-export function surfaceOf(stateAt: StateAt, box: Box, seams: Seams): Surface {
+export const surfaceOf = (stateAt: StateAt, box: Box, seams: Seams): Surface =>
+  surfaceFrom(takenFrom(stateAt, false), box, seams);
+
+/** The surface of a fluid whose temperature follows from its pressure, along the pressures of a log. */
+export const tiedSurfaceOf = (stateAt: StateAt, pressure: Side): Surface =>
+  surfaceFrom(takenFrom(stateAt, true), { pressure, temperature: [0, 0] }, { pressure: [], temperature: [] });
+
+function surfaceFrom(taken: Taken, box: Box, seams: Seams): Surface {
   const inside = (values: readonly number[], [lower, upper]: Side): number[] =>
     [...new Set(values)].filter((at) => at > lower && at < upper).sort((one, other) => one - other);
   const [atP, atT] = [inside(seams.pressure, box.pressure), inside(seams.temperature, box.temperature)];
   if ((atP.length + 1) * (atT.length + 1) > MOST_PATCHES) return { kind: 'exact', why: 'too-many-seams' };
-  const taken = takenFrom(stateAt);
   const edge = edgesOf(box).map(([p, T]) => taken.sample(p, T));
   const refused = edge.find((figures) => typeof figures === 'string');
   if (refused !== undefined) return exact(refused);
@@ -90,7 +104,12 @@ export function surfaceOf(stateAt: StateAt, box: Box, seams: Seams): Surface {
   );
   const failed = patches.find((patch) => typeof patch === 'string');
   if (failed !== undefined) return exact(failed);
-  const draft = { box, expands: taken.expands(), patches: patches.filter((patch) => typeof patch !== 'string') };
+  const draft = {
+    box,
+    expands: taken.expands(),
+    tied: taken.tied,
+    patches: patches.filter((patch) => typeof patch !== 'string'),
+  };
   const bordersP = owned(atP, 'pressure', draft, taken.sample);
   const bordersT = owned(atT, 'temperature', draft, taken.sample);
   if (bordersP === undefined || bordersT === undefined) return exact('not-smooth');
@@ -107,38 +126,53 @@ const exact = (why: unknown): Surface => ({ kind: 'exact', why: why as NoSurface
 /** The exponents met are widened by this share, for what lies between the states. */
 const WIDER = 0.05;
 
+type Taken = ReturnType<typeof takenFrom>;
+
 /** True states as samples, with a count and with what all of them must have in common. */
-function takenFrom(stateAt: StateAt) {
+function takenFrom(stateAt: StateAt, tied: boolean) {
   let states = 0;
   let [phase, outside]: (boolean | undefined)[] = [];
-  let [least, most] = [Number.POSITIVE_INFINITY, 0];
+  const exponents = openRange();
+  const temperatures = openRange();
   const cautions = new Set<string>();
   const sample: Sample = (p, T) => {
-    const found = stateAt(p, T);
+    const found = tied ? stateAt(p) : stateAt(p, T);
     states += 1;
     if (!found.ok) return 'fluid-refused' satisfies NoSurface;
     const { density, viscosity, isentropicExponent: kappa = 1, expands, temperature } = found.value;
-    if (temperature !== T) return 'temperature-tied' satisfies NoSurface;
+    if (!tied && temperature !== T) return 'temperature-tied' satisfies NoSurface;
     const said = found.value.cautions ?? [];
     const beyond = said.some(({ verdict }) => verdict === 'outside');
     phase ??= expands;
     outside ??= beyond;
-    if (expands !== phase || said.some(({ id }) => twoPhases.includes(id))) return 'two-phases' satisfies NoSurface;
+    const twofold = said.some(({ id }) => twoPhases.includes(id) && !(tied && id === asked));
+    if (expands !== phase || twofold) return 'two-phases' satisfies NoSurface;
     if (beyond !== outside) return 'partly-outside' satisfies NoSurface;
     for (const { id } of said) cautions.add(id);
-    [least, most] = [Math.min(least, kappa), Math.max(most, kappa)];
-    return expands ? [(density * T) / p, viscosity, kappa] : [density, viscosity];
+    exponents.take(kappa);
+    temperatures.take(temperature);
+    const still = (density * (tied ? 1 : T)) / p;
+    const figures = expands ? [still, viscosity, kappa] : [density, viscosity];
+    return tied ? [...figures, temperature] : figures;
   };
-  const summary = () => {
-    const room = WIDER * (most - least);
-    return {
-      exponents: [least - room, most + room] as const,
-      cautions: [...cautions],
-      outside: outside === true,
-      states,
-    };
+  const summary = () => ({
+    exponents: exponents.wider(),
+    temperatures: tied ? temperatures.wider() : temperatures.met(),
+    ...{ cautions: [...cautions], outside: outside === true, states },
+  });
+  return { sample, expands: () => phase === true, tied, summary };
+}
+
+/** Least and largest of the figures met, as they are and with room for what lies between. */
+function openRange() {
+  let [least, most] = [Number.POSITIVE_INFINITY, Number.NEGATIVE_INFINITY];
+  return {
+    take: (value: number): void => {
+      [least, most] = [Math.min(least, value), Math.max(most, value)];
+    },
+    met: (): Side => [least, most],
+    wider: (): Side => [least - WIDER * (most - least), most + WIDER * (most - least)],
   };
-  return { sample, expands: () => phase === true, summary };
 }
 
 /** The corners of the box and states along its edges: a phase border that cuts a corner off shows there first. */
@@ -159,7 +193,7 @@ const sidesOf = ([lower, upper]: Side, borders: readonly number[]): Side[] => {
   return all.slice(1).map((end, at) => [all[at] as number, end]);
 };
 
-type Draft = Pick<Cells, 'box' | 'expands' | 'patches'>;
+type Draft = Pick<Cells, 'box' | 'expands' | 'tied' | 'patches'>;
 
 /** The borders, each moved a hair to leave it to the side whose patch is right there; undefined where neither is. */
 function owned(
@@ -203,12 +237,12 @@ function meets(patch: Patch, border: number, side: 'pressure' | 'temperature', o
 
 /** The largest errors at states drawn at random, with what the last coefficients leave out. */
 function boundsOf(
-  cells: Omit<Cells, 'kind' | 'bounds' | 'exponents' | 'cautions' | 'outside' | 'states'>,
+  cells: Omit<Cells, 'kind' | 'bounds' | 'exponents' | 'temperatures' | 'cautions' | 'outside' | 'states'>,
   sample: Sample,
 ): SurfaceBounds | string {
   const random = seeded(SEED);
-  const into = new Float64Array(3);
-  const worst = [0, 0, 0];
+  const into = new Float64Array(4);
+  const worst = [0, 0, 0, 0];
   const { box, patches } = cells;
   const count = Math.max(DRAWN, DRAWN_PER_PATCH * patches.length);
   for (let drawn = 0; drawn < count; drawn += 1) {
@@ -227,14 +261,15 @@ function boundsOf(
 }
 
 /** The patch that a state of the box lies in. */
-export function patchAt(
-  { bordersP, bordersT, patches }: Pick<Cells, 'bordersP' | 'bordersT' | 'patches'>,
-  p: number,
-  T: number,
-): Patch {
+export const patchAt = (of: Layout, p: number, T: number): Patch => of.patches[patchNumber(of, p, T)] as Patch;
+
+type Layout = Pick<Cells, 'bordersP' | 'bordersT' | 'patches'>;
+
+/** Its number, p before T. */
+export function patchNumber({ bordersP, bordersT }: Layout, p: number, T: number): number {
   let atP = 0;
   while (atP < bordersP.length && p > (bordersP[atP] as number)) atP += 1;
   let atT = 0;
   while (atT < bordersT.length && T > (bordersT[atT] as number)) atT += 1;
-  return patches[atP * (bordersT.length + 1) + atT] as Patch;
+  return atP * (bordersT.length + 1) + atT;
 }

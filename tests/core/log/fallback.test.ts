@@ -75,6 +75,39 @@ describe('a box without a surface', () => {
   });
 });
 
+describe('steam along its saturation line', () => {
+  const rows: Required<Rows> = {
+    differential: column(5e3, 2e4, 8e3, 2e4),
+    pressure: column(6.1e5, 7.7e5, 8.9e5, 12e5),
+    temperature: column(443, 443, 443, 443), // not logged: a constant that says nothing
+  };
+  it.each([
+    ['dry', { kind: 'water', phase: 'vapour' }],
+    ['wet', { kind: 'water', quality: '97 %' }],
+  ])('is explicit where only the pressure is logged: %s', (_, fluid) => {
+    const stands = standingOf(fluid, { pressure: '8 bar(a)' });
+    const kernel = kernelOf(stands, { pressure: [6e5, 9e5], temperature: [443, 443] });
+    const flows = flowsFor(4);
+    kernel.convert(rows, flows, 0, 4);
+    const { explicit, whole } = PATH;
+    expect([...flows.path]).toEqual([explicit, explicit, explicit, whole]);
+    rows.pressure.forEach((pressure, row) => {
+      const known = flowAt(stands, { pressure: pressure as never }, rows.differential[row] as never);
+      if (!known.ok) throw new Error(JSON.stringify(known.problems));
+      const off = Math.abs((flows.massFlow[row] as number) / known.value.operation.massFlow - 1);
+      expect(off).toBeLessThanOrEqual(kernel.bounds?.massFlow ?? 0);
+    });
+  });
+
+  it('goes the whole way where only its temperature is known', () => {
+    const kernel = kernelOf(standingOf({ kind: 'water', phase: 'vapour' }, { temperature: '450 K' }), {
+      pressure: [9e5, 9e5],
+      temperature: [440, 460],
+    });
+    expect(kernel.why).toBe('pressure-tied');
+  });
+});
+
 describe('a row that the box does not hold', () => {
   const { stands, box } = logMeter('steam', 'ISA 1932 nozzle');
   const kernel = kernelOf(stands, box);
