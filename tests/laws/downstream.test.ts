@@ -36,10 +36,10 @@ function drawn(random: () => number): MeterText {
   };
 }
 
-it(`T1 = T3 + μ_JT Δϖ at 1,000 random states (seed ${seed})`, () => {
+it(`T1 = T3 + μ_JT Δϖ at 400 random states (seed ${seed})`, () => {
   const random = seeded(seed);
   let largest = 0;
-  for (let k = 0; k < 1000; k += 1) {
+  for (let k = 0; k < 400; k += 1) {
     const meter = drawn(random);
     const said = JSON.stringify([meter.fluid, meter.upstream, meter.differential]);
     const result = solveMeter(meter, 0, {});
