@@ -9,11 +9,11 @@ import { written } from './units.ts';
 
 type Figures = Pick<Context, 'value' | 'units'>;
 
-export function linesOf(at: Figures, { lines, port_m }: SolvedTraverse): readonly SurveyLine[] {
+export function linesOf(at: Context, { lines, port_m }: SolvedTraverse, readings: unknown): readonly SurveyLine[] {
   return lines.map(({ points, across_m, angle_rad, meanVelocity_m_s }, line): SurveyLine => {
     const place =
       across_m !== undefined
-        ? words.at(at.value(across_m, 'length').text)
+        ? words.at(at.value(across_m, 'depth').text)
         : lines.length === 1 || angle_rad === undefined
           ? ''
           : words.turned(at.value(angle_rad, 'angle').text);
@@ -21,7 +21,10 @@ export function linesOf(at: Figures, { lines, port_m }: SolvedTraverse): readonl
       at: line,
       title: words.line(line + 1),
       place: line === 0 && across_m === undefined ? '' : place,
-      points: points.map((point, order) => pointOf(at, point, line, order, port_m > 0)),
+      points: points.map((point, order) => {
+        const text = textIn(readings, line, order);
+        return pointOf(at, { ...point, text }, line, order, port_m > 0);
+      }),
       ...(meanVelocity_m_s === undefined ? {} : { mean: at.value(meanVelocity_m_s, 'velocity') }),
       ...(across_m === undefined ? {} : { across_m }),
       ...(angle_rad === undefined ? {} : { angle_rad }),
@@ -29,9 +32,21 @@ export function linesOf(at: Figures, { lines, port_m }: SolvedTraverse): readonl
   });
 }
 
-type Point = SolvedTraverse['lines'][number]['points'][number];
+type Point = SolvedTraverse['lines'][number]['points'][number] & { readonly text: unknown };
 
-function pointOf(at: Figures, point: Point, line: number, order: number, fromPort: boolean): SurveyPoint {
+/** What is written for a point; a file may hold anything there. */
+function textIn(readings: unknown, line: number, point: number): unknown {
+  const own: unknown = Array.isArray(readings) ? readings[line] : undefined;
+  return Array.isArray(own) ? own[point] : undefined;
+}
+
+/** As it was read, where that is in the unit of the column. */
+function differentialOf(at: Context, text: unknown, si: number): Value {
+  const own = at.given(text, ['pressure difference'], si, 'differential');
+  return own.unit === at.units.differential.print ? own : at.value(si, 'differential');
+}
+
+function pointOf(at: Context, point: Point, line: number, order: number, fromPort: boolean): SurveyPoint {
   const { number, position_m, depth_m, weight, moved, differential_Pa, velocity_m_s } = point;
   return {
     number,
@@ -42,7 +57,7 @@ function pointOf(at: Figures, point: Point, line: number, order: number, fromPor
     weight: at.value(weight, 'factor'),
     moved,
     position_m,
-    ...(differential_Pa === undefined ? {} : { differential: at.value(differential_Pa, 'differential') }),
+    ...(differential_Pa === undefined ? {} : { differential: differentialOf(at, point.text, differential_Pa) }),
     ...(velocity_m_s === undefined ? {} : { velocity: at.value(velocity_m_s, 'velocity'), velocity_m_s }),
   };
 }

@@ -3,7 +3,8 @@ import type { Project, TraverseText } from '../../core/document/project.ts';
 import type { TraverseResult } from '../../core/result/record.ts';
 import { fieldLabel } from '../words/fields.ts';
 import { stated as asStated, dash, whole } from '../words/sheet.ts';
-import { ductCautions, formFacts, sheetOfSurvey as words } from '../words/surveys.ts';
+import { formFacts, sheetOfSurvey as words } from '../words/survey-sheet.ts';
+import { ductCautions, probeLabel } from '../words/surveys.ts';
 import type { Row } from './model.ts';
 import { headOf, isAsked, type Printing, type RefusedSheet, type SheetHead, writtenIn } from './sheet.ts';
 import { type CheckBlock, checkBlocks, type TermTable } from './sheet-tables.ts';
@@ -109,7 +110,7 @@ function factsOf(survey: PresentedSurvey, traverse: TraverseText): SurveySheet['
     [formFacts.section, survey.section],
     [formFacts.points, survey.under.split(' · ').slice(1, 3).join(', ')],
     [formFacts.port, text(port)],
-    [formFacts.probe, formFacts.kind(text(probe?.kind))],
+    [formFacts.probe, probeLabel(text(probe?.kind))],
     [formFacts.coefficient, text(probe?.coefficient)],
   ];
   return facts

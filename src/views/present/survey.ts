@@ -29,7 +29,7 @@ import { workingRow } from './working.ts';
 /** A survey that has its plan. */
 export function presentSurvey(traverse: TraverseText, project: Project, result: SolvedTraverse): PresentedSurvey {
   const at = surveyContext(traverse, project);
-  const lines = linesOf(at, result);
+  const lines = linesOf(at, result, traverse.readings);
   const weights = result.lines.flatMap(({ points }) => points.map(({ weight }) => weight));
   const kind = typeof traverse.fluid?.kind === 'string' ? traverse.fluid.kind : '';
   const name = typeof traverse.fluid?.name === 'string' ? traverse.fluid.name : '';

@@ -1,4 +1,5 @@
 /** Every check with its limit, the terms of the uncertainty, and the sources that the sheets of this meter name. */
+import type { ReactNode } from 'react';
 import type { SizingSheet } from '../present/sheet.ts';
 import type { CheckBlock, TermTable } from '../present/sheet-tables.ts';
 import type { SourceLine } from '../present/sources.ts';
@@ -16,12 +17,16 @@ interface Props {
     readonly meter: Pick<SizingSheet['meter'], 'notes'> & { readonly verdict: { readonly words: string } };
   };
   readonly place: Place;
+  readonly type?: string;
+  /** What stands before the checks. */
+  readonly children?: ReactNode;
 }
 
-export function ChecksSheet({ sheet, place }: Props) {
+export function ChecksSheet({ sheet, place, type = sheetWords.checksSheet, children }: Props) {
   const { head, meter, checks, terms, sources } = sheet;
   return (
-    <Page head={head} type={sheetWords.checksSheet} verdict={checksAre(meter.verdict.words)} place={place}>
+    <Page head={head} type={type} verdict={checksAre(meter.verdict.words)} place={place}>
+      {children}
       <Checks blocks={checks} />
       {terms.rows.length > 0 && <Terms table={terms} />}
       <Sources lines={sources} />

@@ -2,7 +2,8 @@
 import { SurveySection } from '../drawing/SurveySection.tsx';
 import type { SurveyLine } from '../present/survey-model.ts';
 import type { SurveySheet } from '../present/survey-sheet.ts';
-import { fieldNotes, formFacts, surveyWords, sheetOfSurvey as words } from '../words/surveys.ts';
+import { fieldNotes, formFacts, sheetOfSurvey as words } from '../words/survey-sheet.ts';
+import { surveyWords } from '../words/surveys.ts';
 import { Block } from './Block.tsx';
 import styles from './content.module.css';
 import { Notes } from './Notes.tsx';

@@ -4,20 +4,14 @@
  */
 import { type ComponentType, useMemo } from 'react';
 import { type PresentedSheet, type Printing, presentSheets, type SizingSheet as Sizing } from '../present/sheet.ts';
-import {
-  type PresentedSurveySheet,
-  presentSurveySheets,
-  type SurveySheet as SurveySheetOf,
-} from '../present/survey-sheet.ts';
+import { presentSurveySheets } from '../present/survey-sheet.ts';
 import { ChecksSheet } from './ChecksSheet.tsx';
 import { DimensionsSheet } from './DimensionsSheet.tsx';
-import { FormSheet } from './FormSheet.tsx';
-import { PointsSheet } from './PointsSheet.tsx';
-import { type Paper, type Place, SheetContext } from './paper.ts';
+import { type Paper, type Place, SheetContext, type SheetKind } from './paper.ts';
 import { RefusedSheet } from './RefusedSheet.tsx';
 import styles from './Sheets.module.css';
 import { SizingSheet } from './SizingSheet.tsx';
-import { SurveySheet } from './SurveySheet.tsx';
+import { SurveyPages } from './SurveyPages.tsx';
 import { WorkingSheet } from './WorkingSheet.tsx';
 
 /** The sheets of a meter, in this order; the first stands on its own and carries the signatures. */
@@ -26,9 +20,7 @@ const kinds = {
   checks: ChecksSheet,
   dimensions: DimensionsSheet,
   working: WorkingSheet,
-} as const satisfies Record<string, ComponentType<{ readonly sheet: Sizing; readonly place: Place }>>;
-
-export type SheetKind = keyof typeof kinds | 'form' | 'survey';
+} as const satisfies Partial<Record<SheetKind, ComponentType<{ readonly sheet: Sizing; readonly place: Place }>>>;
 
 const usual: readonly SheetKind[] = ['survey', 'sizing', 'checks', 'dimensions'];
 
@@ -62,7 +54,7 @@ export function Sheets({ paper, printedOn = '', include = usual, paperOnly = fal
         ))}
         {surveys.map((sheet, index) => (
           // biome-ignore lint/suspicious/noArrayIndexKey: two surveys may carry the same tag
-          <Survey key={index} sheet={sheet} include={include} />
+          <SurveyPages key={index} sheet={sheet} include={include} />
         ))}
       </div>
     </SheetContext>
@@ -77,39 +69,3 @@ function Meter({ sheet, include }: { readonly sheet: PresentedSheet; readonly in
     return <One key={kind} sheet={sheet} place={{ sheet: at + 1, of: chosen.length }} />;
   });
 }
-
-/** A survey: the form to take along, and once something is read its sheets. */
-function Survey({ sheet, include }: { readonly sheet: PresentedSurveySheet; readonly include: readonly SheetKind[] }) {
-  if (sheet.status === 'refused') return <RefusedSheet sheet={sheet} />;
-  const read = sheet.survey.measured > 0;
-  const pages: readonly (readonly [kind: SheetKind, page: ComponentType<SurveyPageProps>])[] = [
-    ['survey', SurveySheet],
-    ['survey', PointsSheet],
-    ['checks', ChecksOfSurvey],
-    ['working', WorkingOfSurvey],
-  ];
-  const chosen = read ? pages.filter(([kind]) => include.includes(kind)) : [];
-  const form = include.includes('form') || !read;
-  return (
-    <>
-      {form && <FormSheet sheet={sheet} place={{ sheet: 1, of: 1 }} />}
-      {chosen.map(([kind, One], at) => (
-        // biome-ignore lint/suspicious/noArrayIndexKey: a page is its place among the sheets
-        <One key={`${kind} ${at}`} sheet={sheet} place={{ sheet: at + 1, of: chosen.length }} />
-      ))}
-    </>
-  );
-}
-
-interface SurveyPageProps {
-  readonly sheet: SurveySheetOf;
-  readonly place: Place;
-}
-
-const ChecksOfSurvey = ({ sheet, place }: SurveyPageProps) => (
-  <ChecksSheet sheet={{ ...sheet, meter: sheet.survey }} place={place} />
-);
-
-const WorkingOfSurvey = ({ sheet, place }: SurveyPageProps) => (
-  <WorkingSheet sheet={{ ...sheet, meter: sheet.survey }} place={place} />
-);

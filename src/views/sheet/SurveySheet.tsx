@@ -3,7 +3,7 @@ import { SurveyProfile } from '../drawing/SurveyProfile.tsx';
 import { SurveySection } from '../drawing/SurveySection.tsx';
 import type { SurveySheet as Sheet } from '../present/survey-sheet.ts';
 import { checksAre, unitsNote } from '../words/sheet.ts';
-import { sheetOfSurvey as words } from '../words/surveys.ts';
+import { sheetOfSurvey as words } from '../words/survey-sheet.ts';
 import { Block } from './Block.tsx';
 import styles from './content.module.css';
 import { Notes } from './Notes.tsx';

@@ -3,6 +3,9 @@ import { createContext } from 'react';
 
 export type Paper = 'A4' | 'Letter';
 
+/** Sheets of a meter, and of a survey; checks and working are of both. */
+export type SheetKind = 'sizing' | 'form' | 'survey' | 'checks' | 'dimensions' | 'working';
+
 /** Where a page stands among the sheets of its meter, from 1. */
 export interface Place {
   readonly sheet: number;

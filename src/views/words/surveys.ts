@@ -57,6 +57,8 @@ export const blockageChoices: UsualFirst = [
 const labelIn = (choices: readonly Choice[], value: string): string =>
   choices.find((choice) => choice.value === value)?.label ?? value;
 
+export const probeLabel = (kind: string): string => labelIn(probeChoices, kind);
+
 export const ruleLabel = (rule: string): string => labelIn(ruleChoices, rule);
 
 const shapeWords: Readonly<Record<string, string>> = { circular: 'Circular duct', rectangular: 'Rectangular duct' };
@@ -188,116 +190,3 @@ export const surveyPicture = {
   profile: 'Velocity along each line',
   mean: (velocity: string): string => `mean ${velocity}`,
 } as const;
-
-export const surveyPlace = {
-  title: 'Surveys',
-  add: 'Add a survey',
-  choose: 'Survey',
-  measure: 'Measure point by point',
-  readings: 'Readings',
-  hint: 'Enter goes on to the next point, Shift + Enter back. A column, a row or a block can be pasted into any box.',
-  unit: 'Unit of the readings',
-  clear: 'Clear the readings',
-  lineMean: 'Mean of the line',
-  moved: 'moved by the wall rule',
-  plan: 'Plan',
-  planOf: 'section, points, probe, fluid, plane',
-  point: 'Point',
-  depth: 'Depth',
-  reading: 'Reading',
-  velocity: 'Velocity',
-  readingOf: (number: number): string => `Reading at point ${number}`,
-  pictures: 'Section and velocities',
-  taken: (count: number, left: number): string =>
-    `${count} ${count === 1 ? 'reading is' : 'readings are'} taken.` +
-    (left > 0
-      ? ` ${left} more ${left === 1 ? 'has' : 'have'} no point and ${left === 1 ? 'is' : 'are'} left out.`
-      : ''),
-  block: (rows: number, columns: number): string => `The pasted block has ${rows} rows of ${columns}.`,
-  byRows: 'Each row is a line',
-  byColumns: 'Each column is a line',
-  noFit: 'does not fit the plan',
-  leave: 'Cancel',
-  result: 'Result',
-  quality: 'How good the readings are',
-  terms: 'What makes the uncertainty',
-  suggestions: 'Numbers of points in use',
-  suggestionNote: 'A choice to begin with. What a contract or a method asks for goes before it.',
-  take: 'Take it',
-  takeOf: (text: string): string => `Take: ${text}`,
-  chosen: 'as planned',
-  waiting: 'waits for its figures',
-  wrong: 'cannot be solved as it stands',
-  stale: 'Last good result. What is typed now cannot be solved.',
-  besides: 'Shown without the readings that cannot be read.',
-  blank: 'The section is drawn to scale once this is given: ',
-  stations: ['Section and points', 'Probe and gauge', 'Fluid in the duct', 'Plane and uncertainty'],
-  none: 'none',
-  sure: 'Uncertainty, 95\u00a0%',
-  ownLiquid: 'Own liquid',
-  calibration: 'Calibration of the probe, replaces the coefficient',
-  reference: 'Second probe at one point, in the order of time',
-  referenceRow: (at: number): string => `Reference reading ${at + 1}`,
-  empty: 'How much flows in the duct?',
-  emptyText:
-    'State the section. The points, their depths and a form for the field follow; with the readings come mean, flow and checks.',
-  begin: 'Plan a survey',
-} as const;
-
-export const measureWords = {
-  title: 'Measure',
-  point: (number: number, of: number): string => `Point ${number} of ${of}`,
-  back: 'Back',
-  next: 'Next',
-  done: 'Done',
-  close: 'Close',
-  sign: 'Change the sign',
-  last: 'That was the last point.',
-} as const;
-
-export const sheetOfSurvey = {
-  type: 'Survey sheet',
-  points: 'Points and readings',
-  form: 'Form for the field',
-  refused: 'This survey has no plan yet. What stands in the way:',
-  section: 'Inside of the section',
-  fluid: 'Fluid in the duct',
-  result: 'Result',
-  plan: 'Section',
-  quality: 'Quality of the readings',
-  ofFlow: 'of the flow',
-  pictures: 'Section and velocities',
-  depthFrom: (from: string, unit: string): string => `depth ${from}, in ${unit}`,
-  weight: 'Weight',
-  byLine: 'Points by line',
-  toRead: 'To be read, point by point',
-  toNote: 'To be noted at the duct',
-  incomplete: 'Not read to the end: no flow can be stated.',
-  differential: 'Differential',
-} as const;
-
-export const formFacts = {
-  section: 'Inside of the section',
-  points: 'Points',
-  port: 'Length of the port',
-  probe: 'Probe',
-  kind: (kind: string): string => labelIn(probeChoices, kind),
-  coefficient: 'Coefficient',
-  legend: 'Points in the order of measuring; ports outside, with the number of the line. A square marks a moved point.',
-} as const;
-
-/** What a technician writes down beside the readings. */
-export const fieldNotes: readonly string[] = [
-  'Unit of the readings',
-  'Gauge, its zero before',
-  'Zero after',
-  'Static pressure in the duct',
-  'Temperature in the duct',
-  'Humidity or wet bulb',
-  'Barometer',
-  'Second probe, begin and end',
-  'Time, begin and end',
-  'Inside sizes as measured',
-  'By, date',
-  'Remarks',
-];

@@ -4,7 +4,8 @@ import { describe, expect, it } from 'vitest';
 import type { MeterText } from '../../../src/core/document/project.ts';
 import { run } from '../../../src/core/run.ts';
 import { presentSheets } from '../../../src/views/present/sheet.ts';
-import { type SheetKind, Sheets } from '../../../src/views/sheet/Sheets.tsx';
+import type { SheetKind } from '../../../src/views/sheet/paper.ts';
+import { Sheets } from '../../../src/views/sheet/Sheets.tsx';
 import { feedWater, meters, projectOf } from '../present/meters.ts';
 
 interface Asked {

@@ -2,7 +2,7 @@
 import { memo } from 'react';
 import type { TraverseText } from '../../../core/document/project.ts';
 import type { TraverseResult } from '../../../core/result/record.ts';
-import { surveyPlace as words } from '../../words/surveys.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import { useWorkbench, useWorkbenchStore } from '../binding.tsx';
 import { focusFieldSoon } from '../focus.ts';
 import { goTo, usePlace } from '../place.ts';

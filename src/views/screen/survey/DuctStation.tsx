@@ -1,6 +1,6 @@
 /** Station 3: what flows in the duct, at which pressure and temperature. */
 import { fluidChoices } from '../../words/fluids.ts';
-import { surveyPlace as words } from '../../words/surveys.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import { ChoiceField } from '../field/ChoiceField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
 import { BaseState } from '../fluid/BaseState.tsx';

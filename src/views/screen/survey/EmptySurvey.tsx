@@ -1,5 +1,5 @@
 /** A project without surveys: how to begin. */
-import { surveyPlace as words } from '../../words/surveys.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import { useCommands, useWorkbench } from '../binding.tsx';
 import styles from '../EmptyProject.module.css';
 import { focusFieldSoon } from '../focus.ts';

@@ -2,7 +2,8 @@
 import { useEffect, useRef, useState } from 'react';
 import { SurveySection } from '../../drawing/SurveySection.tsx';
 import type { PresentedSurvey, SurveyPoint } from '../../present/survey-model.ts';
-import { surveyWords, measureWords as words } from '../../words/surveys.ts';
+import { measureWords as words } from '../../words/survey-place.ts';
+import { surveyWords } from '../../words/surveys.ts';
 import { useProblem } from '../meter.ts';
 import styles from './Measure.module.css';
 import { ReadingBox, readingPath } from './ReadingBox.tsx';

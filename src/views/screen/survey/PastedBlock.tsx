@@ -1,5 +1,5 @@
 /** A pasted block of several rows and columns: which of them are the lines is asked, never guessed. */
-import { surveyPlace as words } from '../../words/surveys.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import buttons from '../button.module.css';
 import { type Counts, figuresIn, inLines } from './paste-readings.ts';
 import styles from './ReadingsPanel.module.css';

@@ -1,5 +1,6 @@
 /** Station 4: the plane, the second probe, corrections that are chosen, and how sure the inputs are. */
-import { blockageChoices, surveyPlace as words } from '../../words/surveys.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
+import { blockageChoices } from '../../words/surveys.ts';
 import { useWorkbench } from '../binding.tsx';
 import { MeterTextField } from '../field/MeterTextField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';

@@ -1,8 +1,8 @@
 /** The calibration of the probe: its coefficient at each velocity. It replaces the one coefficient. */
 
-import { unitOf } from '../../../core/quantity/units.ts';
+import { type Unit, unitOf } from '../../../core/quantity/units.ts';
 import { tableWords } from '../../words/fluid-forms.ts';
-import { surveyPlace as words } from '../../words/surveys.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
 import { quantityKind } from '../field/quantities.ts';
@@ -21,17 +21,7 @@ export function ProbeCalibration() {
   const rows = rowsIn(useWritten(PATH));
   const display = useWorkbench((state) => state.project.display ?? 'SI');
   const unit = columnUnit(rows, velocity) ?? unitOf(velocity.kind.unit[display], velocity.kind.measures);
-  const settle = useWorkbench((state) => state.settle);
-  const write = useWrite();
-  const writeAll = useWriteAll();
-  const cell = (at: number, name: string, label: string) => ({
-    path: `${PATH}.${at}.${name}`,
-    label: tableWords.row(label, at),
-    text: textAt(rows[at], name),
-    write: (text: string) => write(`${PATH}.${at}.${name}`, text),
-    settle,
-    paste: () => undefined,
-  });
+  if (unit === undefined) throw new Error(`expected a unit of velocity, got ${velocity.kind.unit[display]}`);
   return (
     <>
       <table className={styles.table}>
@@ -39,43 +29,62 @@ export function ProbeCalibration() {
         <thead>
           <tr>
             <th scope="col">
-              {velocity.label} / {unit?.print}
+              {velocity.label} / {unit.print}
             </th>
-            <th scope="col">Coefficient</th>
+            <th scope="col">{words.coefficient}</th>
             <td className={styles.narrow} />
           </tr>
         </thead>
         <tbody>
-          {[...rows, undefined].map((_, at) => (
+          {[...rows, undefined].map((row, at) => (
             // biome-ignore lint/suspicious/noArrayIndexKey: a row is its place in the list
-            <tr key={at}>
-              <td>
-                <Cell
-                  {...cell(at, 'velocity', velocity.label)}
-                  shown={(text) => (unit ? shownCell(text, velocity, unit) : text)}
-                  file={(typed) => (unit ? fileCell(typed, velocity, unit) : typed)}
-                />
-              </td>
-              <td>
-                <Cell {...cell(at, 'coefficient', 'Coefficient')} shown={same} file={same} />
-              </td>
-              <td className={styles.narrow}>
-                {at < rows.length && (
-                  <button
-                    type="button"
-                    className={buttons.remove}
-                    aria-label={tableWords.remove(at)}
-                    onClick={() => writeAll([[`${PATH}.${at}`, undefined]])}
-                  >
-                    ×
-                  </button>
-                )}
-              </td>
-            </tr>
+            <Row key={at} row={row} at={at} unit={unit} last={at === rows.length} />
           ))}
         </tbody>
       </table>
       <Problems below={PATH} />
     </>
+  );
+}
+
+interface RowProps {
+  readonly row: unknown;
+  readonly at: number;
+  readonly unit: Unit;
+  readonly last: boolean;
+}
+
+function Row({ row, at, unit, last }: RowProps) {
+  const settle = useWorkbench((state) => state.settle);
+  const write = useWrite();
+  const writeAll = useWriteAll();
+  const path = `${PATH}.${at}`;
+  const cell = (name: string, label: string) => ({
+    path: `${path}.${name}`,
+    label: tableWords.row(label, at),
+    text: textAt(row, name),
+    write: (text: string) => write(`${path}.${name}`, text),
+    settle,
+    paste: () => undefined,
+  });
+  const shown = (text: string): string => shownCell(text, velocity, unit);
+  const file = (typed: string): string => fileCell(typed, velocity, unit);
+  const remove = (): void => writeAll([[path, undefined]]);
+  return (
+    <tr>
+      <td>
+        <Cell {...cell('velocity', velocity.label)} shown={shown} file={file} />
+      </td>
+      <td>
+        <Cell {...cell('coefficient', words.coefficient)} shown={same} file={same} />
+      </td>
+      <td className={styles.narrow}>
+        {!last && (
+          <button type="button" className={buttons.remove} aria-label={tableWords.remove(at)} onClick={remove}>
+            ×
+          </button>
+        )}
+      </td>
+    </tr>
   );
 }

@@ -1,5 +1,6 @@
 /** Station 2: the probe, and the gauge it is read on. */
-import { probeChoices, surveyPlace as words } from '../../words/surveys.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
+import { probeChoices } from '../../words/surveys.ts';
 import { ChoiceField } from '../field/ChoiceField.tsx';
 import { MeterTextField } from '../field/MeterTextField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
@@ -15,11 +16,7 @@ export function ProbeStation() {
     <Station number={2} title={words.stations[1]}>
       <ChoiceField path="probe.kind" label="Probe" choices={probeChoices} />
       <MeterTextField path="probe.coefficient" label="Coefficient" decimal />
-      <QuantityField
-        path="probe.head"
-        label="Head diameter"
-        note={head === '' && <span>the least distance from the wall follows it</span>}
-      />
+      <QuantityField path="probe.head" label="Head diameter" note={head === '' && <span>{words.headNote}</span>} />
       <ManometerFields />
       <Fold title="Stem, hole, angle, calibration">
         <QuantityField path="probe.stem" label="Stem diameter" />

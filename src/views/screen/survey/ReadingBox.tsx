@@ -1,6 +1,6 @@
 /** The box of one reading. Enter goes on to the next point, Shift + Enter back; a pasted table goes to the survey. */
 import type { SurveyPoint } from '../../present/survey-model.ts';
-import { surveyPlace as words } from '../../words/surveys.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import { useWorkbench } from '../binding.tsx';
 import { isTable } from '../fluid/paste.ts';
 import { useDraft } from '../fluid/useDraft.ts';

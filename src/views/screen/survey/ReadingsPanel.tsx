@@ -1,7 +1,7 @@
 /** The readings, line by line: number and depth of each point, its box, the velocity found there. */
 import { useState } from 'react';
-import type { PresentedSurvey, SurveyLine, SurveyPoint } from '../../present/survey-model.ts';
-import { surveyPlace as words } from '../../words/surveys.ts';
+import type { PresentedSurvey, SurveyPoint } from '../../present/survey-model.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import buttons from '../button.module.css';
 import { UnitOptions } from '../field/UnitOptions.tsx';
 import { Problems } from '../fluid/Problems.tsx';
@@ -9,7 +9,8 @@ import { focusField } from '../focus.ts';
 import { Panel } from '../panel/Panel.tsx';
 import { PastedBlock } from './PastedBlock.tsx';
 import { figuresIn, inOrder, sequenceOf } from './paste-readings.ts';
-import { ReadingBox, readingPath } from './ReadingBox.tsx';
+import { readingPath } from './ReadingBox.tsx';
+import { type Hands, ReadingsLine } from './ReadingsLine.tsx';
 import styles from './ReadingsPanel.module.css';
 import type { Readings } from './readings.ts';
 
@@ -23,6 +24,38 @@ interface Props {
 }
 
 export function ReadingsPanel({ survey, readings, stale, current, setCurrent, measure }: Props) {
+  const { said, block, hands, close } = useHands({ survey, readings, current, setCurrent });
+  return (
+    <Panel id="readings" title={words.readings} stale={stale} aside={<Aside readings={readings} measure={measure} />}>
+      <p className={styles.hint}>{words.hint}</p>
+      {block !== undefined && (
+        <PastedBlock
+          text={block}
+          counts={survey.lines.map(({ points }) => points.length)}
+          readings={readings}
+          close={close}
+        />
+      )}
+      <div className={styles.lines}>
+        {survey.lines.map((line) => (
+          <ReadingsLine key={line.at} line={line} hands={hands} />
+        ))}
+      </div>
+      <Problems below="readings" />
+      <p className={styles.said} aria-live="polite">
+        {said}
+      </p>
+    </Panel>
+  );
+}
+
+/** Where the keys lead, and what becomes of a pasted table. */
+function useHands({
+  survey,
+  readings,
+  current,
+  setCurrent,
+}: Pick<Props, 'survey' | 'readings' | 'current' | 'setCurrent'>) {
   const [said, say] = useState('');
   const [block, setBlock] = useState<string>();
   const counts = survey.lines.map(({ points }) => points.length);
@@ -41,31 +74,12 @@ export function ReadingsPanel({ survey, readings, stale, current, setCurrent, me
     readings.write(cells.map((cell) => ({ ...cell, text: readings.file(cell.text) })));
     say(words.taken(cells.length, left));
   };
-  return (
-    <Panel id="readings" title={words.readings} stale={stale} aside={<Aside readings={readings} measure={measure} />}>
-      <p className={styles.hint}>{words.hint}</p>
-      {block !== undefined && (
-        <PastedBlock
-          text={block}
-          counts={counts}
-          readings={readings}
-          close={(sentence) => {
-            setBlock(undefined);
-            say(sentence);
-          }}
-        />
-      )}
-      <div className={styles.lines}>
-        {survey.lines.map((line) => (
-          <Line key={line.at} {...{ line, survey, readings, current, setCurrent, go, paste }} />
-        ))}
-      </div>
-      <Problems below="readings" />
-      <p className={styles.said} aria-live="polite">
-        {said}
-      </p>
-    </Panel>
-  );
+  const close = (sentence: string): void => {
+    setBlock(undefined);
+    say(sentence);
+  };
+  const hands: Hands = { survey, readings, current, setCurrent, go, paste };
+  return { said, block, hands, close };
 }
 
 function Aside({ readings, measure }: { readonly readings: Readings; readonly measure: () => void }) {
@@ -84,71 +98,5 @@ function Aside({ readings, measure }: { readonly readings: Readings; readonly me
         {words.measure}
       </button>
     </div>
-  );
-}
-
-interface LineProps {
-  readonly line: SurveyLine;
-  readonly survey: PresentedSurvey;
-  readonly readings: Readings;
-  readonly current: number | undefined;
-  readonly setCurrent: (number: number) => void;
-  readonly go: (from: SurveyPoint, by: 1 | -1) => void;
-  readonly paste: (text: string, from: SurveyPoint) => void;
-}
-
-function Line({ line, survey: { units }, readings, current, setCurrent, go, paste }: LineProps) {
-  return (
-    <table className={styles.line}>
-      <caption>
-        <b>{line.title}</b> {line.place}
-      </caption>
-      <thead>
-        <tr>
-          <th scope="col">{words.point}</th>
-          <th scope="col">
-            {words.depth} <span>/ {units.depth}</span>
-          </th>
-          <th scope="col">
-            {words.reading} <span>/ {readings.unit.print}</span>
-          </th>
-          <th scope="col">
-            {words.velocity} <span>/ {units.velocity}</span>
-          </th>
-        </tr>
-      </thead>
-      <tbody>
-        {line.points.map((point) => (
-          <tr key={point.number} data-current={point.number === current}>
-            <th scope="row">{point.number}</th>
-            <td title={point.moved ? words.moved : undefined}>
-              {point.depth.number}
-              {point.moved && <span aria-hidden="true"> ▪</span>}
-            </td>
-            <td>
-              <ReadingBox
-                point={point}
-                readings={readings}
-                className={styles.box}
-                enter={() => setCurrent(point.number)}
-                go={(by) => go(point, by)}
-                paste={(text) => paste(text, point)}
-              />
-            </td>
-            <td className={styles.velocity}>{point.velocity?.number ?? ''}</td>
-          </tr>
-        ))}
-      </tbody>
-      {line.mean && (
-        <tfoot>
-          <tr>
-            <th scope="row" colSpan={3}>
-              {words.lineMean}
-            </th>
-            <td>{line.mean.number}</td>
-          </tr>
-        </tfoot>
-      )}
-    </table>
   );
 }

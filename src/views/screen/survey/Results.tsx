@@ -1,7 +1,7 @@
 /** What the survey found: flow, quality of the readings, what makes the uncertainty, and numbers of points in use. */
 import type { Row } from '../../present/model.ts';
 import type { PresentedSurvey, SurveySuggestion } from '../../present/survey-model.ts';
-import { surveyPlace as words } from '../../words/surveys.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import buttons from '../button.module.css';
 import { Clause } from '../Clause.tsx';
 import { useWriteAll } from '../hand.tsx';

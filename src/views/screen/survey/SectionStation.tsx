@@ -1,4 +1,5 @@
 /** Station 1: the section, the rule of the points, and how the probe gets in. */
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import {
   placeChoices,
   portChoices,
@@ -6,7 +7,6 @@ import {
   ruleChoices,
   shapeChoices,
   wallChoices,
-  surveyPlace as words,
 } from '../../words/surveys.ts';
 import { ChoiceField } from '../field/ChoiceField.tsx';
 import { MeterTextField } from '../field/MeterTextField.tsx';
@@ -32,7 +32,7 @@ export function SectionStation() {
       ) : (
         <QuantityField path="section.diameter" />
       )}
-      <QuantityField path="port" note={<span>mark depths from its outer end; empty: from the wall</span>} />
+      <QuantityField path="port" note={<span>{words.fromEnd}</span>} />
       <ChoiceField path="rule" label="Rule" choices={ruleChoices} />
       {single ? <Profile /> : null}
       {!single && !pattern && (
@@ -41,7 +41,7 @@ export function SectionStation() {
           <MeterTextField path="pointsPerLine" label="Points on each" decimal />
         </>
       )}
-      {pattern && <p>26 points in four lines, with weights.</p>}
+      {pattern && <p>{words.pattern}</p>}
       <UsualChoice path="wallRule" label="Points near the wall" choices={wallChoices} />
     </Station>
   );

@@ -2,7 +2,8 @@
 import { type KeyboardEvent, useState } from 'react';
 import { SurveyProfile } from '../../drawing/SurveyProfile.tsx';
 import { SurveySection } from '../../drawing/SurveySection.tsx';
-import { surveyPlace as words } from '../../words/surveys.ts';
+import type { PresentedSurvey } from '../../present/survey-model.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import along from '../Along.module.css';
 import { Boundary } from '../Boundary.tsx';
 import { focusField, focusNext } from '../focus.ts';
@@ -53,47 +54,38 @@ function One({ selected }: { readonly selected: SelectedSurvey }) {
   const readings = useReadings(survey);
   const [current, setCurrent] = useState<number>();
   const [measuring, setMeasuring] = useState(false);
-  const all = survey?.lines.flatMap(({ points }) => points) ?? [];
-  const next = all.find(({ line, point }) => readings.textAt(line, point) === '')?.number;
-  const goTo = (number: number): void => {
-    const point = all[number - 1];
-    if (point !== undefined) focusField(readingPath(point));
+  const next = nextOf(survey, readings);
+  const measure = (): void => setMeasuring(true);
+  const stop = (at: number): void => {
+    setMeasuring(false);
+    setCurrent(at);
   };
   return (
     // biome-ignore lint/a11y/noStaticElementInteractions: Enter is only passed on to the next field
     <div className={size.size} onKeyDown={onEnter}>
       <SurveyAnswer selected={selected} />
+      {survey && (
+        <button type="button" className={styles.measure} onClick={measure}>
+          {words.measure}
+        </button>
+      )}
       <div className={along.along}>
         <SurveyHead index={selected.index} />
         <Plan selected={selected} readings={readings} />
       </div>
       <Boundary of={survey}>
-        <div className={along.along}>
-          <Pictures selected={selected} current={current ?? next} goTo={goTo} />
-        </div>
-        {survey && (
-          <ReadingsPanel
-            {...{ survey, readings, stale, setCurrent }}
-            current={current ?? next}
-            measure={() => setMeasuring(true)}
-          />
-        )}
+        <Pictures selected={selected} current={current ?? next} />
+        {survey && <ReadingsPanel {...{ survey, readings, stale, setCurrent, measure }} current={current ?? next} />}
         {survey && <Found selected={selected} />}
       </Boundary>
-      {survey && measuring && (
-        <Measure
-          survey={survey}
-          readings={readings}
-          from={next ?? current ?? 1}
-          close={(at) => {
-            setMeasuring(false);
-            setCurrent(at);
-          }}
-        />
-      )}
+      {survey && measuring && <Measure survey={survey} readings={readings} from={next ?? current ?? 1} close={stop} />}
     </div>
   );
 }
+
+/** The first point that is not read yet. */
+const nextOf = (survey: PresentedSurvey | undefined, readings: Readings): number | undefined =>
+  survey?.lines.flatMap(({ points }) => points).find(({ line, point }) => readings.textAt(line, point) === '')?.number;
 
 interface PlanProps {
   readonly selected: SelectedSurvey;
@@ -126,18 +118,21 @@ const Stations = ({ readings }: { readonly readings: Readings }) => (
 interface PicturesProps {
   readonly selected: SelectedSurvey;
   readonly current: number | undefined;
-  readonly goTo: (number: number) => void;
 }
 
-function Pictures({ selected, current, goTo }: PicturesProps) {
+function Pictures({ selected, current }: PicturesProps) {
   const { survey, stale } = selected;
   const [frame, width] = useWidth();
   if (survey === undefined) return <Blank selected={selected} />;
+  const goTo = (number: number): void => {
+    const point = survey.lines.flatMap(({ points }) => points)[number - 1];
+    if (point !== undefined) focusField(readingPath(point));
+  };
   const wide = width > 760;
   const left = wide ? Math.min(400, width * 0.38) : width;
   const height = wide ? 270 : 250;
   return (
-    <div className={along.drawing} data-stale={stale} ref={frame}>
+    <div className={`${along.along} ${along.drawing}`} data-stale={stale} ref={frame}>
       {width > 0 && (
         <div className={styles.pictures}>
           <SurveySection survey={survey} width={left} height={height} current={current} onPoint={goTo} />
@@ -159,7 +154,7 @@ function Blank({ selected: { now, traverse } }: { readonly selected: SelectedSur
   const { wrong, missing } = unsolved({ now, meter: traverse });
   const fields = [...new Set((wrong.length > 0 ? wrong : missing).map(({ field }) => field))];
   return (
-    <p className={along.blank}>
+    <p className={`${along.along} ${along.blank}`}>
       {words.blank}
       {fields.map((field, at) => (
         <span key={field}>

@@ -1,5 +1,5 @@
 /** What flows in the duct as one sentence, or how far the survey is. It is read out once the typing rests. */
-import { surveyPlace as words } from '../../words/surveys.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import styles from '../Answer.module.css';
 import { ProblemList } from '../ProblemList.tsx';
 import { unsolved } from '../unsolved.ts';

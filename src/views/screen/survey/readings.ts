@@ -3,7 +3,7 @@ import { useState } from 'react';
 import { type Unit, unitOf } from '../../../core/quantity/units.ts';
 import { type ReadingCell, readingAt } from '../../../state/readings.ts';
 import type { PresentedSurvey } from '../../present/survey-model.ts';
-import { surveyPlace as words } from '../../words/surveys.ts';
+import { surveyPlace as words } from '../../words/survey-place.ts';
 import { useWorkbench, useWorkbenchStore } from '../binding.tsx';
 import { quantityKind } from '../field/quantities.ts';
 import { split } from '../field/split.ts';
