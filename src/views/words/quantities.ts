@@ -47,7 +47,7 @@ export const quantityNames: Readonly<Record<string, string>> = {
   'molar-mass': 'Molar mass',
   'molar-mass-dry-air': 'Molar mass of dry air',
   'molar-mass-water': 'Molar mass of water',
-  'permanent-loss': 'Permanent pressure loss at the flow',
+  'permanent-loss': 'Permanent pressure loss',
   'pipe-bore': 'Pipe bore at the line temperature',
   'pipe-bore-as-measured': 'Pipe bore as measured',
   'pressure-base': 'Base pressure',
