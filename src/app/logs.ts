@@ -5,7 +5,7 @@
 import type { MeterText, Project } from '../core/document/project.ts';
 import { convertedName, download, pickLog } from '../persist/log-files.ts';
 import type { Commands } from '../state/commands.ts';
-import type { OpenLog } from '../state/logs.ts';
+import type { ConvertedLog, OpenLog } from '../state/logs.ts';
 import type { Workbench, WorkbenchStore } from '../state/workbench.ts';
 import type { Client, Job } from '../worker/client.ts';
 import type { Ending, LogTrouble, Order } from '../worker/protocol.ts';
@@ -141,9 +141,10 @@ async function look(desk: LogDesk): Promise<void> {
 
 async function convert(desk: LogDesk): Promise<void> {
   const { file, store, owner, client } = desk;
-  const { project } = store.getState();
+  const { project, results } = store.getState();
   const at = meterOf(store.getState());
-  if (file === undefined || at === undefined || desk.job !== undefined) return;
+  const result = results.results[at?.index ?? -1];
+  if (file === undefined || at === undefined || result === undefined || desk.job !== undefined) return;
   const order: Order = { kind: 'convert', file, owner, of: ofMeter(project, at) };
   report(desk, { troubles: [], cancelled: false, progress: begun(file) }, ['converted']);
   desk.output = undefined;
@@ -152,12 +153,12 @@ async function convert(desk: LogDesk): Promise<void> {
   const ending = await job.ended;
   if (desk.job !== job) return;
   desk.job = undefined;
-  settle(desk, ending, { meter: at.meter, project });
+  settle(desk, ending, { meter: at.meter, project, result });
 }
 
 const begun = ({ size }: File) => ({ bytes: 0, ofBytes: size, rows: 0, rowsPerSecond: 0 });
 
-function settle(desk: LogDesk, ending: Ending, by: { meter: MeterText; project: Project }): void {
+function settle(desk: LogDesk, ending: Ending, by: Pick<ConvertedLog, 'meter' | 'project' | 'result'>): void {
   const { log } = desk.store.getState();
   if (ending.kind === 'converted' && log !== undefined) {
     const { record, seconds, output } = ending.converted;

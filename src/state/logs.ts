@@ -2,6 +2,7 @@
 import type { MeterText, Project } from '../core/document/project.ts';
 import type { LogLook } from '../core/result/log-look.ts';
 import type { LogResult } from '../core/result/log-record.ts';
+import type { MeterResult } from '../core/result/record.ts';
 
 /** Why a log is not converted; words by its code. */
 export type LogTrouble = LogLook['problems'][number];
@@ -20,6 +21,7 @@ export interface ConvertedLog {
   readonly record: LogResult;
   readonly meter: MeterText;
   readonly project: Project;
+  readonly result: MeterResult;
   readonly seconds: number; // that it took
   /** The converted rows, to be saved. */
   readonly output: { readonly name: string; readonly bytes: number };

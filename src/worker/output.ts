@@ -78,9 +78,9 @@ export function inFile(file: SyncFile, read: () => Promise<Blob>, remove: () => 
   const put = (): void => {
     try {
       const written = file.write(buffer.subarray(0, size), { at });
-      if (written !== size) throw new OutputFull('log-store-full', { written: at + written });
+      if (written !== size) throw new OutputFull('log-store-full', { bytes: at + written });
     } catch (fault) {
-      if (fault instanceof DOMException) throw new OutputFull('log-store-full', { written: at });
+      if (fault instanceof DOMException) throw new OutputFull('log-store-full', { bytes: at });
       throw fault;
     }
     at += size;

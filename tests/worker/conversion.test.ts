@@ -152,7 +152,7 @@ describe('a log that is not', () => {
   test('no room for the output', async () => {
     const full = keepingOutput();
     const write = (): void => {
-      throw new OutputFull('log-store-full', { written: 8 });
+      throw new OutputFull('log-store-full', { bytes: 8 });
     };
     const { surroundings } = around({ openOutput: async () => Object.assign(full, { write }) });
     expect(codes(await convert(ofMeter, new Blob([text]), surroundings))).toEqual(['log-store-full']);

@@ -2,6 +2,7 @@
 
 import { componentLabel } from './components.ts';
 import { instrumentLabels, readingParts } from './fields-of-instrument.ts';
+import { logLabels } from './fields-of-log.ts';
 import { readingLabel, traverseLabels } from './fields-of-traverse.ts';
 
 const labels: Readonly<Record<string, string>> = {
@@ -90,10 +91,10 @@ const labels: Readonly<Record<string, string>> = {
   display: 'Units',
   ...instrumentLabels,
   readings: 'Readings',
-  log: 'Log',
   meters: 'Meters',
   traverses: 'Surveys',
   ...traverseLabels,
+  ...logLabels,
 };
 
 /** Fields inside a row of a list. */

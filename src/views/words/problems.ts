@@ -8,6 +8,7 @@ import { fileProblems } from './problems-of-files.ts';
 import { gasProblems } from './problems-of-gases.ts';
 import { inputProblems } from './problems-of-input.ts';
 import { liquidProblems } from './problems-of-liquids.ts';
+import { logFileProblems } from './problems-of-log-files.ts';
 import { logPlanProblems } from './problems-of-log-plan.ts';
 import { logProblems } from './problems-of-logs.ts';
 import { numberProblems } from './problems-of-numbers.ts';
@@ -28,6 +29,7 @@ export const problemWords: ProblemWords = {
   ...readingProblems,
   ...logProblems,
   ...logPlanProblems,
+  ...logFileProblems,
   ...fileProblems,
 };
 

@@ -9,7 +9,7 @@ import { remarks } from '../../../src/views/words/notes.ts';
 import { problemWords } from '../../../src/views/words/problems.ts';
 import { quantityNames } from '../../../src/views/words/quantities.ts';
 import { workingTitles } from '../../../src/views/words/working.ts';
-import { coreText } from './core-text.ts';
+import { coreText, workerText } from './core-text.ts';
 
 /** Comments may name a code that no statement makes. */
 const source = new Map(
@@ -28,7 +28,7 @@ function found(pattern: RegExp, path = /./): string[] {
 function problemCodes(): string[] {
   const statements = found(
     /((?:\bfail|\breport|\bwithin|\bcode\b)[^;{}]*(?:\{[^{}]*\}[^;{}]*)?;?)/g,
-    /document|input|fluid|solve|quantity|registry|straight\.ts|traverse|reading|run\.ts/,
+    /document|input|fluid|solve|quantity|registry|straight\.ts|traverse|reading|log|run\.ts/,
   );
   const literals = statements.flatMap((text) =>
     [...text.matchAll(/'([a-z]+(?:-[a-z0-9]+)+)'/g)].map((match) => match[1] ?? ''),
@@ -44,8 +44,15 @@ describe('every code of the core has its words', () => {
     expect(codes.length).toBeGreaterThan(30);
     expect(codes.filter((code) => problemWords[code] === undefined)).toEqual([]);
   });
+  it('troubles of the worker of logs', () => {
+    const texts = [...workerText.values()];
+    const made = texts.flatMap((text) => [...text.matchAll(/(?:trouble|OutputFull)\('([a-z-]+)'/g)]);
+    const codes = [...new Set(made.map(([, code = '']) => code))];
+    expect(codes.length).toBeGreaterThan(4);
+    expect(codes.filter((code) => problemWords[code] === undefined)).toEqual([]);
+  });
   it('and no words stand for a problem that is not there', () => {
-    const whole = [...source.values()].join('\n');
+    const whole = [...source.values(), ...workerText.values()].join('\n');
     expect(Object.keys(problemWords).filter((code) => !whole.includes(`'${code}'`))).toEqual([]);
   });
   it('findings', () => {

@@ -2,10 +2,16 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 
-const core = join(import.meta.dirname, '../../../src/core');
+const source = join(import.meta.dirname, '../../../src');
 
-export const coreText: ReadonlyMap<string, string> = new Map(
-  readdirSync(core, { recursive: true, encoding: 'utf8' })
-    .filter((file) => file.endsWith('.ts'))
-    .map((file) => [file.replaceAll('\\', '/'), readFileSync(join(core, file), 'utf8')]),
-);
+const textOf = (room: string): ReadonlyMap<string, string> =>
+  new Map(
+    readdirSync(join(source, room), { recursive: true, encoding: 'utf8' })
+      .filter((file) => file.endsWith('.ts'))
+      .map((file) => [file.replaceAll('\\', '/'), readFileSync(join(source, room, file), 'utf8')]),
+  );
+
+export const coreText = textOf('core');
+
+/** The same of the worker of logs, by its path below src/worker. */
+export const workerText = textOf('worker');
