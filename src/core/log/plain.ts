@@ -6,19 +6,7 @@
  */
 import { DAY, daysOf, HOUR, isDate } from './calendar.ts';
 import { PRESSURE_MISSING, TEMPERATURE_MISSING } from './chunk.ts';
-import type { FigureColumn } from './mapping.ts';
-import {
-  DELIMITER,
-  keepRow,
-  LINE_END,
-  NO_ROLE,
-  PLAIN,
-  PRESSURE,
-  type Reader,
-  SIGNAL,
-  TEMPERATURE,
-  TIME,
-} from './reader.ts';
+import { DELIMITER, keepRow, LINE_END, NO_ROLE, PLAIN, PRESSURE, type Reader, TIME } from './reader.ts';
 import { LONGEST_ROW } from './split.ts';
 import { stampOf, type TimeFormat } from './time.ts';
 
@@ -85,21 +73,14 @@ function plainEnd({ window, classes, roles, mapping }: Reader, from: number): nu
   return kind === LINE_END && fields === mapping.layout.fields ? at : NOT_PLAIN;
 }
 
-function columnOf({ mapping }: Reader, role: number): FigureColumn | undefined {
-  if (role === SIGNAL) return mapping.signal;
-  if (role === PRESSURE) return mapping.pressure;
-  return role === TEMPERATURE ? mapping.temperature : undefined;
-}
-
 /** Reads a figure and puts it in SI; the place behind it, or -1. */
 function plainFigure(reader: Reader, role: number, from: number): number {
-  const column = columnOf(reader, role);
-  if (column === undefined) return NOT_PLAIN;
-  const { figures, window } = reader;
+  const { figures, window, scales } = reader;
   let first = from;
   while (window[first] === SPACE) first += 1;
-  const at = plainNumber(window, first, column.figures.decimal === '.' ? POINT : COMMA, figures);
-  figures[role] = ((figures[0] as number) + column.before) * column.factor + column.after;
+  const at = plainNumber(window, first, scales.mark[role] as number, figures);
+  const figure = (figures[0] as number) + (scales.before[role] as number);
+  figures[role] = figure * (scales.factor[role] as number) + (scales.after[role] as number);
   return at;
 }
 

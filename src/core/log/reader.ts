@@ -39,6 +39,7 @@ export interface Reader {
   readonly classes: Uint8Array;
   /** Role of each column up to the last that has one. */
   readonly roles: Uint8Array;
+  readonly scales: Scales;
   /** Figures of the row at hand, by role; 0 holds the place of what has no role. */
   readonly figures: Float64Array;
   /** The date of the last plain stamp as it is written, and its midnight, s since 1970. */
@@ -60,6 +61,36 @@ export interface Reader {
   blank: number;
   spanning: number;
   readonly samples: Sample[];
+}
+
+/** Decimal mark, zero, step and shift of the columns of figures, by role. */
+interface Scales {
+  readonly mark: Uint8Array;
+  readonly before: Float64Array;
+  readonly factor: Float64Array;
+  readonly after: Float64Array;
+}
+
+function scalesOf({ signal, pressure, temperature }: Mapping): Scales {
+  const scales = {
+    mark: new Uint8Array(6),
+    before: new Float64Array(6),
+    factor: new Float64Array(6),
+    after: new Float64Array(6),
+  };
+  const columns = [
+    [SIGNAL, signal],
+    [PRESSURE, pressure],
+    [TEMPERATURE, temperature],
+  ] as const;
+  for (const [role, column] of columns) {
+    if (column === undefined) continue;
+    scales.mark[role] = column.figures.decimal.charCodeAt(0);
+    scales.before[role] = column.before;
+    scales.factor[role] = column.factor;
+    scales.after[role] = column.after;
+  }
+  return scales;
 }
 
 /** Rows that a window holds at least; its spare bytes are looked at, never taken. */
@@ -101,6 +132,7 @@ export function openReader(mapping: Mapping, take: (chunk: Chunk) => void, rows:
     end: 0,
     classes: classesOf(layout.delimiter),
     roles: rolesOf(mapping),
+    scales: scalesOf(mapping),
     figures: new Float64Array(6),
     date: { text: new Uint8Array(10), seconds: 0 },
     ...(wide ? { transcoder: openTranscoder(encoding) } : {}),
