@@ -5,6 +5,7 @@
 import { mkdirSync, writeFileSync } from 'node:fs';
 import { cpus } from 'node:os';
 import { join } from 'node:path';
+import { conversion } from './conversion.ts';
 import { gas } from './gas.ts';
 import { log } from './log.ts';
 import { checksum } from './pairs.ts';
@@ -23,6 +24,7 @@ const parts: Readonly<Record<string, () => Line[] | Promise<Line[]>>> = {
   gas,
   rows,
   log,
+  conversion: () => conversion(root),
   screen: () => screen(root),
 };
 

@@ -25,8 +25,8 @@ export interface Covering {
 const MOST_SURFACES = 16;
 /** What a box has beyond the rows that it is built for: of its width, and at least of the figures themselves. */
 const MARGINS = [
-  { width: 0.5, pressure: 0.02, temperature: 2 },
-  { width: 0.05, pressure: 0.001, temperature: 0.1 },
+  { width: 1, pressure: 0.1, temperature: 10 },
+  { width: 0.1, pressure: 0.002, temperature: 0.2 },
 ] as const;
 
 type Side = Box['pressure'];

@@ -46,7 +46,7 @@ interface Stages {
   readonly repeats: Repeats;
   readonly shown: Shown;
   readonly chart: Decimation;
-  readonly out: Out;
+  readonly out?: Out;
   /** Opened when the longest interval that is bridged is known. */
   totals?: Totals;
   /** Time of the newest point of the chart. */
@@ -57,8 +57,8 @@ interface Stages {
 const CHUNK_ROWS = 4096;
 const DIGITS = 7; // as many as the bound of the surface leaves right
 
-/** Opens a conversion; its output goes to `sink`, whose bytes are used again after the call. */
-export function openLog(plan: LogPlan, sink: Sink, { digits = DIGITS, chunkRows = CHUNK_ROWS }: Manner = {}): Log {
+/** Opens a conversion; its output goes to `sink`, whose bytes are used again after the call; without one it is not written. */
+export function openLog(plan: LogPlan, sink?: Sink, { digits = DIGITS, chunkRows = CHUNK_ROWS }: Manner = {}): Log {
   const { mapping } = plan;
   const fixed = { pressure: mapping.pressure === undefined, temperature: mapping.temperature === undefined };
   const stages: Stages = {
@@ -69,7 +69,7 @@ export function openLog(plan: LogPlan, sink: Sink, { digits = DIGITS, chunkRows 
     repeats: openRepeats(),
     shown: openShown(),
     chart: openDecimation(),
-    out: openOut(sink, digits),
+    ...(sink === undefined ? {} : { out: openOut(sink, digits) }),
     charted: 0,
     rows: 0,
   };
@@ -115,7 +115,7 @@ function settle(stages: Stages, totals: Totals, settled: number): void {
   takeRows(totals, batch, settled);
   showRows(shown, batch, settled, flows.problems);
   draw(stages, totals.rule.maxGap, settled);
-  writeRows(out, batch, settled);
+  if (out !== undefined) writeRows(out, batch, settled);
   drop(batch, settled);
   moveRepeats(repeats, settled);
 }
@@ -135,6 +135,6 @@ function close(stages: Stages): Totals {
   if (totals === undefined) throw new Error('log: expected totals at the end, got none');
   settle(stages, totals, stages.batch.size);
   closeTotals(totals);
-  closeOut(stages.out);
+  if (stages.out !== undefined) closeOut(stages.out);
   return totals;
 }
