@@ -10,6 +10,7 @@ import { readFigure } from '../../src/core/log/figure.ts';
 import type { Mapping } from '../../src/core/log/mapping.ts';
 import { plainNumber } from '../../src/core/log/plain.ts';
 import { openRows, type Rows } from '../../src/core/log/rows.ts';
+import { LONGEST_ROW } from '../../src/core/log/split.ts';
 import { civilOf } from '../../src/core/log/stamp.ts';
 import { localOf, offsetAt, zoneOf } from '../../src/core/log/zone.ts';
 import { generator } from './random.ts';
@@ -149,6 +150,40 @@ it('the quick and the careful way read plain rows to the same bits', () => {
   const [plain, quoted] = ['', '"'].map((quote) => answers(mapping, (all) => all.push(encode(text(quote)))).found);
   expect(plain).toHaveLength(5000);
   expect(quoted).toEqual(plain);
+});
+
+describe('at the limits of a row', () => {
+  const mapping = mappingOf(PASCALS, 'time,dp,note\n2026-03-01T00:00:00Z,1.5,a\n');
+  const head = 'time,dp,note\n';
+  const start = '2026-03-01T00:00:01Z,2.5,';
+  const troubles = (text: string, piece: number): readonly (string | undefined)[] => {
+    const bytes = encode(text);
+    const { found } = answers(mapping, (rows) => {
+      for (let at = 0; at < bytes.length; at += piece) rows.push(bytes.slice(at, at + piece));
+    });
+    return found.map((row) => TROUBLES[row[4] ?? 0]);
+  };
+
+  it.each([
+    [LONGEST_ROW - 1, 'none'],
+    [LONGEST_ROW, 'line-too-long'],
+    [LONGEST_ROW + 1, 'line-too-long'],
+  ])('a row of %i bytes is read alike in all pieces: %s', (length, trouble) => {
+    const text = `${head}${start}${'x'.repeat(length - start.length)}\n${start}\n`;
+    for (const piece of [1 << 20, 1 << 16, 4099, 1]) expect(troubles(text, piece)).toEqual([trouble, 'none']);
+  });
+
+  it.each([
+    [16, 'none'],
+    [17, 'quote-open'],
+  ])('quoted text of %i line ends is read alike in all pieces: %s', (lines, trouble) => {
+    for (const end of ['\n', '\r', '\r\n']) {
+      const text = `${head}${start}"${end.repeat(lines)}"\n`;
+      const whole = troubles(text, 1 << 20);
+      expect(whole[0]).toBe(trouble);
+      for (let piece = 1; piece < text.length; piece += 1) expect(troubles(text, piece)).toEqual(whole);
+    }
+  });
 });
 
 describe('calendar and zones', () => {
