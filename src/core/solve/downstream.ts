@@ -10,7 +10,10 @@ import type { Source } from '../quantity/source.ts';
 import { named, type Working } from '../quantity/working.ts';
 
 const clause: Source = { clause: 'ISO 5167-1:2003, 5.4.4.1', seen: 'memory' };
-const byEquation: Source = { clause: '∂T/∂p at constant enthalpy, from the equation of state of the density', seen: 'derived' };
+const byEquation: Source = {
+  clause: '∂T/∂p at constant enthalpy, from the equation of state of the density',
+  seen: 'derived',
+};
 
 /** What a temperature upstream was found from. */
 export interface Correction {

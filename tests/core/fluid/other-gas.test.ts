@@ -1,10 +1,15 @@
 /** Gases by the cubic equation: their names, limits, refusals, and the error that they show. */
 import { describe, expect, it } from 'vitest';
 import type { FluidText } from '../../../src/core/document/project.ts';
+import { critical } from '../../../src/core/fluid/cubic/critical.table.ts';
+import { pureGas } from '../../../src/core/fluid/cubic/pure.ts';
 import { gasState } from '../../../src/core/fluid/gas/gas.ts';
 import { otherGases } from '../../../src/core/fluid/gas/other-gas.table.ts';
 import { otherGasState } from '../../../src/core/fluid/gas/other-gas.ts';
+import { mixtureOf } from '../../../src/core/fluid/gerg/mixture.ts';
 import { componentNames } from '../../../src/core/fluid/helmholtz/components.ts';
+import { isothermOf } from '../../../src/core/fluid/helmholtz/isotherm.ts';
+import { propertiesAt } from '../../../src/core/fluid/helmholtz/properties.ts';
 import { stateOf } from '../../../src/core/fluid/state.ts';
 import { as } from '../../../src/core/quantity/brand.ts';
 import { evaluate } from '../../../src/views/present/evaluate.ts';
@@ -124,5 +129,38 @@ describe('the cubic equation', () => {
     }
     expect(wrong).toEqual([]);
     expect(figures).toBeGreaterThan(1500);
+  });
+});
+
+describe('the Joule–Thomson coefficient of the cubic equation', () => {
+  /** A gas of the mixtures by both equations, with the heat capacity of its ideal gas from the better one. */
+  function byBoth(name: string, p: number, T: number): readonly [cubic: number, gerg: number, reduced: number] {
+    const x = componentNames.map((one) => (one === name ? 1 : 0));
+    const isotherm = isothermOf(mixtureOf(x), T);
+    const [, Tc = 0, pc = 0, omega = 0] = critical.find(([one]) => one === name) ?? [];
+    const ideal = propertiesAt(isotherm, 1e-6).isobaricHeatCapacity;
+    const cubic = pureGas({ Tc, pc: pc * 1e6, omega }, ideal, p, T);
+    const gerg = gasState(x, { ...at(p, T), base, paths });
+    if (cubic === undefined || !gerg.ok) throw new Error(`expected ${name} as a gas at ${p} Pa, ${T} K`);
+    return [cubic.jouleThomson, gerg.value.jouleThomson ?? Number.NaN, T / Tc];
+  }
+
+  it('is that of GERG-2008 within a tenth, and within a quarter far above the critical temperature', () => {
+    for (const name of ['methane', 'nitrogen', 'carbon-dioxide', 'ethane', 'propane', 'oxygen'])
+      for (const [p, T] of [
+        [1e5, 300],
+        [5e5, 320],
+        [2e6, 400],
+      ] as const) {
+        const [cubic, gerg, reduced] = byBoth(name, p, T);
+        expect(Math.abs(cubic / gerg - 1), `${name}, ${p} Pa, ${T} K`).toBeLessThan(reduced < 1.3 ? 0.1 : 0.26);
+      }
+  });
+
+  it('stands in the state of every gas by its name', () => {
+    for (const { name } of otherGases) {
+      const { jouleThomson = Number.NaN } = solved(name, at(1e5, 400));
+      expect(jouleThomson, name)[name === 'neon' ? 'toBeLessThan' : 'toBeGreaterThan'](0); // neon warms above 230 K
+    }
   });
 });

@@ -12,6 +12,7 @@ export interface PureGas {
   readonly molarVolume: number; // m3/mol
   readonly compressibility: number;
   readonly isentropicExponent: number; // w2 ρ M / p
+  readonly jouleThomson: number; // ∂T/∂p at constant enthalpy, K/Pa
 }
 
 const root2 = Math.SQRT2;
@@ -43,5 +44,6 @@ export function pureGas(component: CubicComponent, heatCapacity: number, p: numb
     molarVolume: v,
     compressibility: Z,
     isentropicExponent: (-v / p) * (cp / cv) * pv, // κ = -(v/p) (c_p/c_v) ∂p/∂v
+    jouleThomson: ((-T * pT) / pv - v) / cp, // (T ∂v/∂T - v)/c_p, ∂v/∂T = -(∂p/∂T)/(∂p/∂v)
   };
 }

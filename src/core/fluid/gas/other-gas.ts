@@ -7,7 +7,7 @@ import type { AbsolutePressure, Density, MolarMass, Temperature } from '../../qu
 import { fail, type Outcome, ok } from '../../quantity/outcome.ts';
 import type { Source } from '../../quantity/source.ts';
 import type { Caution, FluidState, StatedUncertainty } from '../contract.ts';
-import { pureGas } from '../cubic/pure.ts';
+import { type PureGas, pureGas } from '../cubic/pure.ts';
 import { schemeViscosity, type ViscousGas } from '../gas-viscosity/scheme.ts';
 import { schemeUncertainty, viscosityCautions } from '../gas-viscosity/viscosity.ts';
 import { type Conditions, plainName, type State } from '../model.ts';
@@ -49,10 +49,11 @@ export function otherGasState(name: string, conditions: Conditions): Outcome<Flu
   const detail = { pressure: p, temperature: T, phase: 'gas' };
   const outside = outsideBy(gas, p, T);
   if (outside !== undefined) return outOfRange(gas, conditions, outside);
-  const figures = figuresOf(gas, p, T);
-  if (figures === undefined) return fail('gas-density-none', paths.pressure, detail);
+  const found = cubicGas(gas, p, T);
+  if (found === undefined) return fail('gas-density-none', paths.pressure, detail);
+  const figures = figuresOf(gas, found, p, T);
   if (crowding(gas, figures) > densest.evaluated) return fail('gas-beyond-equation', paths.pressure, detail);
-  return ok(stateFrom(gas, figures, conditions));
+  return ok({ ...stateFrom(gas, figures, conditions), jouleThomson: found.jouleThomson });
 }
 
 /** Highest pressure of any state, Pa (practice): no reduced density of a gas in range stands above it. */
@@ -84,10 +85,12 @@ const crowding = (gas: OtherGas, { density }: Pick<FluidState, 'density'>): numb
   (density / molarMass(gas)) * gas.Vc * 1e-6;
 
 /** Undefined where the gas would be a liquid. */
-function figuresOf(gas: OtherGas, p: AbsolutePressure, T: Temperature): GasFigures | undefined {
+function cubicGas(gas: OtherGas, p: AbsolutePressure, T: Temperature): PureGas | undefined {
   const heatCapacity = R * gas.a.reduceRight((sum, next) => sum * T + next, 0); // c_p°/R = Σ a_i T^i
-  const found = pureGas({ Tc: gas.Tc, pc: gas.pc * 1e6, omega: gas.omega }, heatCapacity, p, T);
-  if (found === undefined) return undefined;
+  return pureGas({ Tc: gas.Tc, pc: gas.pc * 1e6, omega: gas.omega }, heatCapacity, p, T);
+}
+
+function figuresOf(gas: OtherGas, found: PureGas, p: AbsolutePressure, T: Temperature): GasFigures {
   const M = molarMass(gas);
   const density = (M / found.molarVolume) as Density;
   const { compressibility, isentropicExponent } = found;
@@ -156,7 +159,8 @@ function cautionsOf(gas: OtherGas, figures: GasFigures): readonly Caution[] {
 /** ρ_b = p_b M / (Z_b R T_b), with Z_b = 1 where the gas would be a liquid at the base state. */
 function baseGas(gas: OtherGas, { pressure: p, temperature: T }: State): BaseGas {
   const ideal = ((p * molarMass(gas)) / (R * T)) as Density;
-  const found = outsideBy(gas, p, T) === undefined ? figuresOf(gas, p, T) : undefined;
+  const found = outsideBy(gas, p, T) === undefined ? cubicGas(gas, p, T) : undefined;
   if (found === undefined) return { density: ideal, compressibility: 1, ideal: true };
-  return { density: found.density, compressibility: found.compressibility, ideal: false };
+  const density = (molarMass(gas) / found.molarVolume) as Density;
+  return { density, compressibility: found.compressibility, ideal: false };
 }
