@@ -84,8 +84,8 @@ export function writeSignificant(out: Bytes, value: number, digits: number): voi
 function writeQuickly(out: Bytes, value: number, digits: number): boolean {
   const size = Math.abs(value);
   if (digits > MOST_QUICK || !(size >= PLAIN_FROM && size < PLAIN_TO)) return false;
-  let power = 6; // of ten, just above the figure
-  while (power > 0 && size < (POWERS[power - 1] as number)) power -= 1;
+  let power = size >= 1 ? 1 : 0; // of ten, just above the figure
+  while (size >= (POWERS[power] as number) && power > 0) power += 1;
   while (power <= 0 && size * (POWERS[1 - power] as number) < 1) power -= 1;
   const decimals = digits - power;
   if (decimals < 0) return false;

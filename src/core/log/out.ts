@@ -29,7 +29,8 @@ export interface Out {
 
 const HEADER = 'row,time,differential_Pa,density_kg_m3,massFlow_kg_s,account';
 const COMMA = 44;
-const codes = accounts.map(({ code }) => code);
+/** The last cell of a row by account, with the comma before it. */
+const lastCells = accounts.map(({ code }) => Uint8Array.from(`,${code}`, (letter) => letter.charCodeAt(0)));
 
 /** Opens the output and writes its header. */
 export function openOut(sink: Sink, digits: Digits): Out {
@@ -53,10 +54,15 @@ export function writeRows({ bytes, calendar, digits }: Out, batch: Batch, settle
     if (kind < FIRST_REFUSED && flow[at] !== 0) writeFigure(bytes, density[at] as number, digits);
     writeByte(bytes, COMMA);
     if (kind < FIRST_REFUSED) writeFigure(bytes, flow[at] as number, digits);
-    writeByte(bytes, COMMA);
-    writeWord(bytes, codes[kind] as string);
+    writeCell(bytes, lastCells[kind] as Uint8Array);
     endRow(bytes);
   }
+}
+
+function writeCell(out: Bytes, cell: Uint8Array): void {
+  const { buffer, size } = out;
+  for (let at = 0; at < cell.length; at += 1) buffer[size + at] = cell[at] as number;
+  out.size = size + cell.length;
 }
 
 const writeFigure = (bytes: Bytes, value: number, digits: Digits): void =>

@@ -31,16 +31,43 @@ export function civilOf(days: number): Civil {
   };
 }
 
-/** The last date that was written: most stamps of a log stand in the same day. */
+/** What the last stamp began with: most stamps of a log stand in the same minute as the one before. */
 export interface Calendar {
   days: number;
   civil: Civil;
+  /** Whole minutes since 1970, and the bytes of a stamp up to its seconds; none where it is NaN. */
+  minute: number;
+  readonly upToSeconds: Uint8Array;
 }
 
-export const openCalendar = (): Calendar => ({ days: 0, civil: civilOf(0) });
+const UP_TO_SECONDS = 17; // bytes of '2026-03-14T06:00:'
+
+export const openCalendar = (): Calendar => ({
+  days: 0,
+  civil: civilOf(0),
+  minute: Number.NaN,
+  upToSeconds: new Uint8Array(UP_TO_SECONDS),
+});
 
 /** Writes the years 0 to 9999; a fraction of a second with three or six digits, none where it is nil. */
 export function writeStamp(out: Bytes, calendar: Calendar, time: number): void {
+  const minute = Math.floor(time / 60);
+  const second = time - 60 * minute;
+  if (minute === calendar.minute && second === Math.floor(second)) {
+    const { buffer, size } = out;
+    for (let at = 0; at < UP_TO_SECONDS; at += 1) buffer[size + at] = calendar.upToSeconds[at] as number;
+    out.size = size + UP_TO_SECONDS;
+    writeDigits(out, second, 2);
+    writeByte(out, Z);
+    return;
+  }
+  const start = out.size;
+  writeWhole(out, calendar, time);
+  calendar.minute = second === Math.floor(second) ? minute : Number.NaN; // a fraction may have been rounded up
+  calendar.upToSeconds.set(out.buffer.subarray(start, start + UP_TO_SECONDS));
+}
+
+function writeWhole(out: Bytes, calendar: Calendar, time: number): void {
   const days = Math.floor(time / DAY);
   if (days !== calendar.days) {
     calendar.days = days;
@@ -49,7 +76,7 @@ export function writeStamp(out: Bytes, calendar: Calendar, time: number): void {
   const micros = toMicros(time - days * DAY, Math.abs(time));
   const seconds = Math.floor(micros / MICRO);
   if (seconds >= DAY) {
-    writeStamp(out, calendar, (days + 1) * DAY);
+    writeWhole(out, calendar, (days + 1) * DAY);
     return;
   }
   writeDate(out, calendar.civil);

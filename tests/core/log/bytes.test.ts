@@ -105,6 +105,22 @@ describe('stamps', () => {
     );
   });
 
+  test('one after another are what each is alone', () => {
+    const steps = fc.array(fc.oneof(fc.integer({ min: -2, max: 90 }), fc.double({ min: 0, max: 61, noNaN: true })));
+    fc.assert(
+      fc.property(steps, (each) => {
+        const calendar = openCalendar();
+        let time = 1773446395;
+        for (const step of each) {
+          time += step;
+          const alone = written((out) => writeStamp(out, openCalendar(), time));
+          expect(written((out) => writeStamp(out, calendar, time))).toBe(alone);
+        }
+      }),
+      { numRuns: 500 },
+    );
+  });
+
   test('in turn, over days and back', () => {
     const calendar = openCalendar();
     for (const text of ['2026-02-28T23:59:59Z', '2026-03-01T00:00:00Z', '2024-02-29T12:00:00Z', '1969-12-31T23:59:59Z'])
