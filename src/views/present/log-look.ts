@@ -23,6 +23,7 @@ export function presentLook(look: LogLook, meter: MeterText, project: Project): 
   return {
     spelling: spellingText(look.encoding, look.delimiter, look.skip, look.hasHeader),
     columns: columns.map(({ name }, place) => ({ name, at: place })),
+    hasClock: columns.some(({ kind }) => kind === 'clock'),
     roles,
     rows: rows.slice(0, MOST_ROWS).map((cells, place) => rowOf(cells, place, roles, mapping, at)),
     decided: mapping === undefined ? {} : decisionsOf(mapping, columns),

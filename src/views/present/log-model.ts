@@ -12,6 +12,8 @@ export interface LogColumn {
 export interface PresentedLook {
   readonly spelling: string; // 'UTF-8, parted by comma, 1 row above the data'
   readonly columns: readonly LogColumn[];
+  /** Whether a column holds clocks without dates. */
+  readonly hasClock: boolean;
   /** Part of the meter that a column stands for, by its place. */
   readonly roles: Readonly<Record<number, string>>;
   readonly rows: readonly {
