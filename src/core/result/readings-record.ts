@@ -4,6 +4,8 @@ import type { Problem } from '../quantity/outcome.ts';
 import type { Working } from '../quantity/working.ts';
 import type { Picture, Standing } from '../reading/contract.ts';
 
+export type { Picture, Standing } from '../reading/contract.ts';
+
 /** One flow, on each basis that the fluid has. */
 export interface FlowRecord {
   readonly massFlow_kg_s: number;

@@ -24,7 +24,7 @@ export function checkGroups(
   });
 }
 
-function checkRow(at: Pick<Context, 'print'>, finding: Finding): CheckRow {
+export function checkRow(at: Pick<Context, 'print'>, finding: Finding): CheckRow {
   const { id, verdict, source, at: name } = finding;
   return {
     id,

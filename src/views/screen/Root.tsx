@@ -19,6 +19,7 @@ import { startTheme } from './theme.ts';
 import './tokens.css';
 import styles from './Root.module.css';
 
+const Read = lazy(async () => ({ default: (await import('./read/Read.tsx')).Read }));
 const Survey = lazy(async () => ({ default: (await import('./survey/Survey.tsx')).Survey }));
 
 interface Props {
@@ -61,6 +62,7 @@ function Body({ sheets }: { readonly sheets: SheetsView }) {
         <Suspense fallback={<p className={styles.wait}>One moment</p>}>
           <Boundary key={place} of={project}>
             {place === 'size' && <Size />}
+            {place === 'read' && <Read />}
             {place === 'survey' && <Survey />}
             {place === 'sheet' && <SheetPlace sheets={sheets} />}
           </Boundary>

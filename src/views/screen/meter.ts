@@ -8,6 +8,7 @@ import type { PresentedMeter, PresentedProblem, PresentedSizing } from '../prese
 import { useWorkbench } from './binding.tsx';
 import { useHand, useItem } from './hand.tsx';
 import { isSizing, listed, presented, presentedEarlier } from './presented.ts';
+import { isOfReadings, readingProblems } from './read/problems.ts';
 import { textAt } from './text.ts';
 
 export interface SelectedMeter {
@@ -68,7 +69,11 @@ function problemsOf({ project, results, ...at }: Workbench, list: ListName): rea
 /** The sentence of the problem at a field of the item at hand, undefined when there is none. */
 export function useProblem(path: string): string | undefined {
   const list = useHand();
-  return useWorkbench((state) => problemsOf(state, list).find((problem) => problem.field === path)?.sentence);
+  const ofReadings = list === 'meters' && isOfReadings(path);
+  return useWorkbench((state) => {
+    const problems = ofReadings ? readingProblems(state) : problemsOf(state, list);
+    return problems.find((problem) => problem.field === path)?.sentence;
+  });
 }
 
 /** True until the item at hand has been solved once: an empty field is then no fault yet. */

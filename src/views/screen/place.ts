@@ -3,13 +3,15 @@ import { useSyncExternalStore } from 'react';
 
 export const PLACES = [
   { id: 'size', label: 'Size' },
+  { id: 'read', label: 'Read' },
   { id: 'survey', label: 'Survey' },
   { id: 'sheet', label: 'Sheet' },
 ] as const;
 
 export type PlaceId = (typeof PLACES)[number]['id'];
 
-const placeOf = (hash: string): PlaceId => PLACES.find((place) => hash === `#/${place.id}`)?.id ?? 'size';
+const placeOf = (hash: string): PlaceId =>
+  PLACES.find(({ id }) => hash === `#/${id}` || hash.startsWith(`#/${id}/`))?.id ?? 'size';
 
 /** The place at hand, for what is done on a key. */
 export const placeNow = (): PlaceId => placeOf(window.location.hash);

@@ -16,6 +16,8 @@ export interface QuantityFieldProps {
   readonly label?: string;
   readonly note?: ReactNode;
   readonly aside?: ReactNode;
+  /** Whose kind it is, where what a field measures depends on another. */
+  readonly kindPath?: string;
 }
 
 /** A quantity of the selected meter. */
@@ -36,9 +38,9 @@ interface QuantityBoxProps extends QuantityFieldProps {
 
 /** The same for any part of the project. */
 export function QuantityBox({ path, label = fieldLabel(path), place = 'field', ...rest }: QuantityBoxProps) {
-  const { text, problem, write, note, aside } = rest;
+  const { text, problem, write, note, aside, kindPath = path } = rest;
   const display = useWorkbench((state) => state.project.display ?? 'SI');
-  const quantity = useQuantity(path, text, display, write);
+  const quantity = useQuantity(kindPath, text, display, write);
   const noted = quantity.echo !== '' || Boolean(note);
   const { frame, invalid, box } = useFieldState({ path, text, problem, place, noted });
   return (

@@ -42,7 +42,7 @@ export function pastedTable(
 }
 
 /** A unit in brackets, behind a solidus, or alone in the cell. */
-function unitIn(head: string, columns: readonly Column[]): Unit | undefined {
+export function unitIn(head: string, columns: readonly Column[]): Unit | undefined {
   const [, bracketed] = /[([]([^)\]]+)[)\]]\s*$/.exec(head) ?? [];
   const [, behind] = /^[^/]*?\s*\/\s*(.+)$/.exec(head) ?? [];
   const [, last] = /\s(\S+)$/.exec(head) ?? [];
