@@ -1,4 +1,5 @@
 /** The example log of a meter: a day around the state that its meter has. */
+import type { MeterText } from '../document/project.ts';
 import { gather, type Outcome, ok } from '../quantity/outcome.ts';
 import { standing } from '../run/standing.ts';
 import type { Sink } from './bytes.ts';
@@ -22,8 +23,14 @@ export function writeExampleOf({ meter, index, project }: OfMeter, sink: Sink): 
       seed: SEED,
       pressure: (pressure - stands.value.site.atmosphere) / BAR,
       temperature: temperature - ZERO_CELSIUS,
+      root: takesRoot(stands.value.written),
     },
     sink,
   );
   return ok(undefined);
+}
+
+/** Whether the transmitter of a meter takes the root. */
+function takesRoot({ instrument }: MeterText): boolean {
+  return typeof instrument === 'object' && instrument !== null && instrument.output === 'square-root';
 }

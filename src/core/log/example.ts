@@ -14,6 +14,8 @@ export interface ExampleLog {
   readonly seed: number;
   readonly pressure: number; // bar(g)
   readonly temperature: number; // degC
+  /** Whether the transmitter takes the root. */
+  readonly root?: boolean;
 }
 
 /** The kinds of what goes wrong. */
@@ -63,7 +65,10 @@ export function writeExample(log: ExampleLog, sink: Sink): void {
   for (let second = 0; second < log.seconds; second += 1) {
     const what = mishapAt(second % DAY);
     drift += (random() - 0.5) / 50 - drift / 200;
-    const figures = { signal: signalOf(what, second, drift, random()), ...aroundOf(log, drift, random()) };
+    const figures = {
+      signal: signalOf(log, what, second % DAY, drift + (random() - 0.5) / 60),
+      ...aroundOf(log, drift, random()),
+    };
     if (what === 'no-rows') continue;
     for (let time = what === 'twice' ? 0 : 1; time < 2; time += 1) {
       writeStamp(out, calendar, log.from + second - (what === 'clock-back' ? PUT_BACK : 0));
@@ -79,17 +84,23 @@ function mishapAt(second: number): Mishap | undefined {
   return undefined;
 }
 
-/** Thousandths of a milliampere. */
-function signalOf(what: Mishap | undefined, second: number, drift: number, noise: number): number {
-  if (what === 'fault-high') return 21_600;
-  if (what === 'fault-low') return 3_500;
-  if (what === 'saturated') return 20_600;
-  if (what === 'uncertain') return 3_700;
-  if (what === 'stopped') return 3_990 + Math.floor(20 * noise);
-  const share = (second % DAY) / DAY;
-  const wave = 4 * share * (1 - share); // a day of more flow at noon
-  const flow = 0.5 + 0.3 * wave + drift + (noise - 0.5) / 60;
-  return 4_000 + Math.round(16_000 * flow * flow);
+/** Signals of mishaps, thousandths of a milliampere. */
+const MISHAP_SIGNALS: Readonly<Partial<Record<Mishap, number>>> = {
+  'fault-high': 21_600,
+  'fault-low': 3_500,
+  saturated: 20_600,
+  uncertain: 3_700,
+};
+const ZERO_NOISE = 1200; // of a stopped flow, thousandths of a milliampere for a drift of 1
+
+/** Thousandths of a milliampere; `moved` is how far the flow is off the course of its day. */
+function signalOf({ root = false }: ExampleLog, what: Mishap | undefined, second: number, moved: number): number {
+  const mishap = what === undefined ? undefined : MISHAP_SIGNALS[what];
+  if (mishap !== undefined) return mishap;
+  if (what === 'stopped') return 4_000 + Math.round(ZERO_NOISE * (moved % 0.01));
+  const share = second / DAY;
+  const flow = 0.5 + 1.2 * share * (1 - share) + moved; // more at noon
+  return 4_000 + Math.round(16_000 * (root ? flow : flow * flow));
 }
 
 /** Pressure in thousandths, temperature in hundredths. */
