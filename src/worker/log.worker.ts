@@ -25,6 +25,7 @@ self.addEventListener('message', ({ data }: MessageEvent<ToWorker>) => {
 });
 
 async function serve(job: number, order: Order): Promise<void> {
+  post({ kind: 'alive', job });
   const beat = setInterval(() => post({ kind: 'alive', job }), HEARTBEAT);
   try {
     const ending = await carryOut(job, order);

@@ -126,6 +126,7 @@ describe('a worker that is lost', () => {
   test('one that falls silent is given up within 2 s, and the next job works', async () => {
     const job = watched(client.run(order).ended);
     const next = client.run(order);
+    last().say({ kind: 'alive', job: 1 });
     await vi.advanceTimersByTimeAsync(1300);
     expect(job.at()).toBeUndefined();
     await vi.advanceTimersByTimeAsync(700);
@@ -133,6 +134,14 @@ describe('a worker that is lost', () => {
     expect(workers.map(({ alive }) => alive)).toEqual([false, true]);
     end(2);
     expect((await next.ended).kind).toBe('tidied');
+  });
+
+  test('one that is not loaded yet has longer', async () => {
+    const job = watched(client.run(order).ended);
+    await vi.advanceTimersByTimeAsync(9000);
+    expect(job.at()).toBeUndefined();
+    await vi.advanceTimersByTimeAsync(1000);
+    expect(job.at()).toEqual(lost);
   });
 
   test('one that says it is alive is waited for', async () => {
@@ -159,6 +168,7 @@ describe('a worker that is lost', () => {
     const report = vi.fn();
     const job = watched(client.run(order, report).ended);
     const [dead] = workers;
+    dead?.say({ kind: 'alive', job: 1 });
     await vi.advanceTimersByTimeAsync(2000);
     const next = watched(client.run(order, report).ended);
     dead?.say({ kind: 'progress', job: 2, progress });

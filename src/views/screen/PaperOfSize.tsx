@@ -5,6 +5,7 @@
 import { Suspense, useMemo, useSyncExternalStore } from 'react';
 import { type ListName, standingOf } from '../../state/lists.ts';
 import { useWorkbench } from './binding.tsx';
+import { useLogConversion } from './log-conversion.ts';
 import { paperFor, type SheetsView } from './SheetPlace.tsx';
 import { useRested } from './useRested.ts';
 
@@ -20,13 +21,14 @@ export function PaperOfSize({ list, sheets: Sheets }: Props) {
   const results = useWorkbench((state) => state.results);
   const index = useWorkbench((state) => standingOf(state, list).selected);
   const now = useMemo(() => ({ project, results, only: { list, index } }), [project, results, list, index]);
+  const log = useLogConversion();
   const rested = useRested(now, REST);
   const printing = usePrinting();
   const shown = printing ? now : rested;
   if (shown === undefined || shown.only.index < 0) return null;
   return (
     <Suspense fallback={null}>
-      <Sheets {...shown} paper={paperFor(shown.project)} paperOnly />
+      <Sheets {...shown} {...(log === undefined ? {} : { log })} paper={paperFor(shown.project)} paperOnly />
     </Suspense>
   );
 }

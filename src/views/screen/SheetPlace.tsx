@@ -3,11 +3,13 @@ import { type ComponentType, useState } from 'react';
 import type { Project } from '../../core/document/project.ts';
 import type { Results } from '../../core/result/record.ts';
 import { type ListName, standingOf } from '../../state/lists.ts';
+import type { Conversion } from '../present/log.ts';
 import { useCommands, useWorkbench } from './binding.tsx';
+import { useLogConversion } from './log-conversion.ts';
 import styles from './SheetPlace.module.css';
 
 export type Paper = 'A4' | 'Letter';
-export type SheetKind = 'form' | 'survey' | 'sizing' | 'checks' | 'dimensions' | 'working';
+export type SheetKind = 'log' | 'form' | 'survey' | 'sizing' | 'checks' | 'dimensions' | 'working';
 
 /** The printed sheets; app hands them in, the screen only gives them their place. */
 export type SheetsView = ComponentType<{
@@ -16,12 +18,14 @@ export type SheetsView = ComponentType<{
   readonly paper: Paper;
   readonly only?: { readonly list: ListName; readonly index: number };
   readonly include?: readonly SheetKind[];
+  readonly log?: Conversion & { readonly index: number };
   readonly paperOnly?: boolean;
 }>;
 
 const PAPERS: readonly Paper[] = ['A4', 'Letter'];
 const SHEETS: readonly { readonly kind: SheetKind; readonly label: string }[] = [
   { kind: 'sizing', label: 'Sizing' },
+  { kind: 'log', label: 'Summary of the log' },
   { kind: 'form', label: 'Field form' },
   { kind: 'survey', label: 'Survey' },
   { kind: 'checks', label: 'Checks and sources' },
@@ -32,10 +36,13 @@ const SHEETS: readonly { readonly kind: SheetKind; readonly label: string }[] = 
 /** The paper that goes with the units of a project. */
 export const paperFor = ({ display }: Project): Paper => (display === 'US' ? 'Letter' : 'A4');
 
+/** Whether the address asks for the summary of the log alone. */
+const isLogAsked = (): boolean => window.location.hash === '#/sheet/log';
+
 /** The form for the field goes along while some survey is not read to the end. */
 function usualSheets({ traverses }: Results): readonly SheetKind[] {
   const read = traverses.every((result) => result.status === 'solved' && result.measured === result.points);
-  return [...(read ? [] : ['form' as const]), 'survey', 'sizing', 'checks', 'dimensions'];
+  return [...(read ? [] : ['form' as const]), 'log', 'survey', 'sizing', 'checks', 'dimensions'];
 }
 
 export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) {
@@ -44,8 +51,10 @@ export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) 
   const list = useWorkbench((state) => state.hand);
   const index = useWorkbench((state) => standingOf(state, state.hand).selected);
   const [paper, setPaper] = useState<Paper>(paperFor(project));
-  const [alone, setAlone] = useState(false);
-  const [include, setInclude] = useState<readonly SheetKind[]>(() => usualSheets(results));
+  const log = useLogConversion();
+  const [onlyLog] = useState(() => log !== undefined && isLogAsked());
+  const [alone, setAlone] = useState(onlyLog);
+  const [include, setInclude] = useState<readonly SheetKind[]>(() => (onlyLog ? ['log'] : usualSheets(results)));
   const commands = useCommands();
   return (
     <div className={styles.place}>
@@ -59,7 +68,7 @@ export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) 
           chosen={alone ? 'this one' : 'all'}
           choose={(choice) => setAlone(choice === 'this one')}
         />
-        <Kinds include={include} choose={setInclude} />
+        <Kinds include={include} choose={setInclude} offered={SHEETS.filter(({ kind }) => kind !== 'log' || log)} />
         <button type="button" onClick={() => commands.print()}>
           Print
         </button>
@@ -70,6 +79,7 @@ export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) 
           results={results}
           paper={paper}
           include={include}
+          {...(log === undefined ? {} : { log })}
           {...(alone && index >= 0 ? { only: { list, index } } : {})}
         />
       </div>
@@ -78,18 +88,19 @@ export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) 
 }
 
 interface KindsProps {
+  readonly offered: typeof SHEETS;
   readonly include: readonly SheetKind[];
   readonly choose: (include: readonly SheetKind[]) => void;
 }
 
 /** Which sheets of each meter and survey. */
-function Kinds({ include, choose }: KindsProps) {
+function Kinds({ include, choose, offered }: KindsProps) {
   const toggle = (kind: SheetKind) =>
     choose(include.includes(kind) ? include.filter((one) => one !== kind) : [...include, kind]);
   return (
     <fieldset>
       <legend>Sheets</legend>
-      {SHEETS.map(({ kind, label }) => (
+      {offered.map(({ kind, label }) => (
         <label key={kind}>
           <input type="checkbox" checked={include.includes(kind)} onChange={() => toggle(kind)} />
           {label}

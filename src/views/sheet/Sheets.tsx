@@ -3,10 +3,18 @@
  * nothing else is printed: everything that neither holds nor belongs to the sheets is left off the paper.
  */
 import { type ComponentType, useMemo } from 'react';
-import { type PresentedSheet, type Printing, presentSheets, type SizingSheet as Sizing } from '../present/sheet.ts';
+import { type Conversion, presentLog } from '../present/log.ts';
+import {
+  isAsked,
+  type PresentedSheet,
+  type Printing,
+  presentSheets,
+  type SizingSheet as Sizing,
+} from '../present/sheet.ts';
 import { presentSurveySheets } from '../present/survey-sheet.ts';
 import { ChecksSheet } from './ChecksSheet.tsx';
 import { DimensionsSheet } from './DimensionsSheet.tsx';
+import { LogSheet } from './LogSheet.tsx';
 import { type Paper, type Place, SheetContext, type SheetKind } from './paper.ts';
 import { RefusedSheet } from './RefusedSheet.tsx';
 import styles from './Sheets.module.css';
@@ -22,7 +30,7 @@ const kinds = {
   working: WorkingSheet,
 } as const satisfies Partial<Record<SheetKind, ComponentType<{ readonly sheet: Sizing; readonly place: Place }>>>;
 
-const usual: readonly SheetKind[] = ['survey', 'sizing', 'checks', 'dimensions'];
+const usual: readonly SheetKind[] = ['log', 'survey', 'sizing', 'checks', 'dimensions'];
 
 interface SheetsProps extends Printing {
   readonly paper: Paper;
@@ -30,11 +38,13 @@ interface SheetsProps extends Printing {
   readonly printedOn?: string;
   /** Which sheets of each meter; all but the working unless given. */
   readonly include?: readonly SheetKind[];
+  /** The log that was last converted, and the place of its meter in the list. */
+  readonly log?: Conversion & { readonly index: number };
   /** Takes no room on screen and is there for the printer only. */
   readonly paperOnly?: boolean;
 }
 
-export function Sheets({ paper, printedOn = '', include = usual, paperOnly = false, ...printing }: SheetsProps) {
+export function Sheets({ paper, printedOn = '', include = usual, paperOnly = false, log, ...printing }: SheetsProps) {
   const { project, results, only, stale = false } = printing;
   const sheets = useMemo(
     () => presentSheets({ project, results, stale, ...(only === undefined ? {} : { only }) }),
@@ -44,6 +54,8 @@ export function Sheets({ paper, printedOn = '', include = usual, paperOnly = fal
     () => presentSurveySheets({ project, results, stale, ...(only === undefined ? {} : { only }) }),
     [project, results, only, stale],
   );
+  const isLogAsked = log !== undefined && include.includes('log') && isAsked(only, 'meters', log.index);
+  const summary = useMemo(() => (isLogAsked ? presentLog(log) : undefined), [isLogAsked, log]);
   const surroundings = useMemo(() => ({ paper, printedOn }), [paper, printedOn]);
   return (
     <SheetContext value={surroundings}>
@@ -52,6 +64,7 @@ export function Sheets({ paper, printedOn = '', include = usual, paperOnly = fal
           // biome-ignore lint/suspicious/noArrayIndexKey: two meters may carry the same tag
           <Meter key={index} sheet={sheet} include={include} />
         ))}
+        {summary && <LogSheet log={summary} />}
         {surveys.map((sheet, index) => (
           // biome-ignore lint/suspicious/noArrayIndexKey: two surveys may carry the same tag
           <SurveyPages key={index} sheet={sheet} include={include} />

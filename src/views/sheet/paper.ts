@@ -3,8 +3,8 @@ import { createContext } from 'react';
 
 export type Paper = 'A4' | 'Letter';
 
-/** Sheets of a meter, and of a survey; checks and working are of both. */
-export type SheetKind = 'sizing' | 'form' | 'survey' | 'checks' | 'dimensions' | 'working';
+/** Sheets of a meter, of its log, and of a survey; checks and working are of both. */
+export type SheetKind = 'sizing' | 'log' | 'form' | 'survey' | 'checks' | 'dimensions' | 'working';
 
 /** Where a page stands among the sheets of its meter, from 1. */
 export interface Place {

@@ -4,7 +4,7 @@ import type { OpenLog } from '../../../state/logs.ts';
 import { logWords as words } from '../../words/logs.ts';
 import { useCommands } from '../binding.tsx';
 import buttons from '../button.module.css';
-import { type SelectedMeter, useSelectedMeter } from '../meter.ts';
+import { useSelectedMeter } from '../meter.ts';
 import { Panel } from '../panel/Panel.tsx';
 import styles from './Log.module.css';
 import { LogColumns } from './LogColumns.tsx';
@@ -22,7 +22,7 @@ export function LogPanel() {
   if (selected === undefined) return null;
   return (
     <Panel id="log" title={words.title} aside={log && <CloseLog busy={log.progress !== undefined} />}>
-      {log === undefined ? <OpenLogButtons elsewhere={elsewhere} /> : <LogAtHand log={log} selected={selected} />}
+      {log === undefined ? <OpenLogButtons elsewhere={elsewhere} /> : <LogAtHand log={log} />}
     </Panel>
   );
 }
@@ -41,9 +41,9 @@ function CloseLog({ busy }: { readonly busy: boolean }) {
   );
 }
 
-function LogAtHand({ log, selected }: { readonly log: OpenLog; readonly selected: SelectedMeter }) {
+function LogAtHand({ log }: { readonly log: OpenLog }) {
   const look = useLook(log);
-  const converted = useConverted(log, selected.meter);
+  const converted = useConverted();
   return (
     <div className={styles.log}>
       <p className={styles.file}>

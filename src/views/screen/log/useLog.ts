@@ -1,12 +1,12 @@
 /** The log at hand as the panel shows it, and what its fields need. */
 import { useMemo } from 'react';
-import type { MeterText } from '../../../core/document/project.ts';
-import { isCurrent, type OpenLog } from '../../../state/logs.ts';
+import type { OpenLog } from '../../../state/logs.ts';
 import { presentLog } from '../../present/log.ts';
 import { presentLook } from '../../present/log-look.ts';
 import type { PresentedLog, PresentedLook } from '../../present/log-model.ts';
 import { presentProblem } from '../../present/problem.ts';
 import { useWorkbench } from '../binding.tsx';
+import { useLogConversion } from '../log-conversion.ts';
 import { useSelectedMeter } from '../meter.ts';
 
 /** The log of the selected meter; `elsewhere` is the tag of another meter that has it. */
@@ -27,19 +27,11 @@ export function useLook({ look }: OpenLog): PresentedLook | undefined {
   );
 }
 
-/** What the last conversion came to; in the display of today. */
-export function useConverted(
-  { converted, name }: OpenLog,
-  meter: MeterText,
-): { log: PresentedLog; stale: boolean } | undefined {
-  const now = useWorkbench((state) => state.project);
-  const stale = converted !== undefined && !isCurrent(converted, meter, now);
-  const display = now.display ?? 'SI';
-  const log = useMemo(
-    () => converted && presentLog({ ...converted, project: { ...converted.project, display }, name, stale }),
-    [converted, name, display, stale],
-  );
-  return log && { log, stale };
+/** What the last conversion came to; undefined while there is none. */
+export function useConverted(): { readonly log: PresentedLog; readonly stale: boolean } | undefined {
+  const conversion = useLogConversion();
+  const log = useMemo(() => conversion && presentLog(conversion), [conversion]);
+  return log && { log, stale: conversion?.stale ?? false };
 }
 
 /** The sentence of the problem at a field of the log. */
