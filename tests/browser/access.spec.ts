@@ -50,7 +50,7 @@ const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
     await openExample(page);
     await page.getByRole('link', { name: 'Survey' }).click();
     await expect(panel(page, 'Readings')).toBeVisible();
-    for (const fold of await page.locator('main details').all())
+    for (const fold of await page.locator('details:has(form), form details').all())
       await fold.evaluate((node) => node.setAttribute('open', ''));
   },
   'a survey point by point': async (page) => {

@@ -16,7 +16,10 @@ export const MOST_CHARACTERS = 20_000_000;
 const Envelope = v.looseObject({ meters: v.array(v.unknown()) });
 const FORBIDDEN_KEYS = new Set(['__proto__', 'constructor', 'prototype']);
 
-/** Reads a project file. Problems: too-long, not-json, not-headwright, version-missing, newer-version, no-meters. */
+/**
+ * Reads a project file. Problems: too-long, not-json, not-headwright, version-missing, newer-version, no-meters,
+ * list-expected (traverses that are no list).
+ */
 export function decode(text: string): Outcome<Project> {
   if (text.length > MOST_CHARACTERS) return fail('too-long', '', { length: text.length, most: MOST_CHARACTERS });
   let data: unknown;
@@ -31,6 +34,9 @@ export function decode(text: string): Outcome<Project> {
     return fail('version-missing', 'version');
   if (version > VERSION) return fail('newer-version', 'version', { version, known: VERSION });
   if (!v.is(Envelope, data)) return fail('no-meters', 'meters');
+  const { traverses } = data;
+  if (traverses !== undefined && !Array.isArray(traverses))
+    return fail('list-expected', 'traverses', { written: traverses === null ? 'null' : typeof traverses });
   return ok(data as unknown as Project);
 }
 

@@ -153,6 +153,12 @@ function nearest(spots: readonly Bare[]): number {
   return Math.min(14, ...gaps);
 }
 
+/** Whether the line of a point runs level, so that its number stands clear above or below it. */
+function isLevel(spot: Bare, spots: readonly Bare[]): boolean {
+  const other = spots.find(({ line, number }) => line === spot.line && number !== spot.number);
+  return other !== undefined && Math.abs(other.y - spot.y) < 0.2 * Math.abs(other.x - spot.x);
+}
+
 /** A number stands right of its point, or where there is room; it is left out where it would cover something. */
 function labelled(
   spots: readonly Bare[],
@@ -164,12 +170,15 @@ function labelled(
   return spots.map((spot) => {
     const half = type * 0.31 * String(spot.number).length;
     const [aside, above] = [radius + 2 + half, radius + 1 + type * 0.5];
-    const places = [
+    const beside = [
       { x: spot.x + aside, y: spot.y },
       { x: spot.x - aside, y: spot.y },
+    ];
+    const over = [
       { x: spot.x, y: spot.y - above },
       { x: spot.x, y: spot.y + above },
     ];
+    const places = isLevel(spot, spots) ? [...over, ...beside] : [...beside, ...over];
     const free = places.find(
       ({ x, y }) =>
         inside(x - half, y) &&

@@ -24,7 +24,7 @@ export function Points({ survey: read }: { readonly survey: PresentedSurvey }) {
   const from = read.fromPort ? surveyWords.fromPort : surveyWords.fromWall;
   return (
     <Block title={words.byLine} aside={words.depthFrom(from, read.units.depth)}>
-      <div className={survey.lines}>
+      <div className={read.shape.weighted ? survey.weighted : survey.narrow}>
         {read.lines.map((line) => (
           <Line key={line.at} line={line} survey={read} />
         ))}

@@ -5,7 +5,7 @@ export const sheetOfSurvey = {
   points: 'Points and readings',
   both: 'Readings, checks and sources',
   form: 'Form for the field',
-  refused: 'This survey has no plan yet. What stands in the way:',
+  refused: 'This survey has no result. What stands in the way:',
   section: 'Inside of the section',
   fluid: 'Fluid in the duct',
   result: 'Result',
@@ -19,7 +19,7 @@ export const sheetOfSurvey = {
   toRead: 'To be read, point by point',
   toNote: 'To be noted at the duct',
   incomplete: 'Not read to the end: no flow can be stated.',
-  differential: 'Differential',
+  differential: 'Δp',
 } as const;
 
 export const formFacts = {

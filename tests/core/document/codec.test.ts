@@ -58,6 +58,9 @@ describe('refusals', () => {
     ['{"format":"headwright","version":1,"meters":{}}', 'no-meters'],
     ['{"format":"headwright","version":1,"meters":[]}', 'read'],
     ['{"format":"headwright","version":1,"meters":[null,5]}', 'read'],
+    ['{"format":"headwright","version":1,"meters":[],"traverses":"x"}', 'list-expected'],
+    ['{"format":"headwright","version":1,"meters":[],"traverses":null}', 'list-expected'],
+    ['{"format":"headwright","version":1,"meters":[],"traverses":[null,5]}', 'read'],
   ])('%s: %s', (text, code) => expect(codeOf(text)).toBe(code));
 
   test('a file of another size', () => expect(codeOf(' '.repeat(MOST_CHARACTERS + 1))).toBe('too-long'));

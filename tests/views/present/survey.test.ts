@@ -120,14 +120,14 @@ describe('the picture of the velocities', () => {
 });
 
 describe('sheets', () => {
-  it('a survey without a plan prints why, with its inputs as written', () => {
+  it('a survey without a result prints why, with its inputs as written', () => {
     const sheet = presentSurveySheet(
       { tag: 'FP-9', rule: 'log-linear' },
       project(),
       solveTraverse({ tag: 'FP-9', rule: 'log-linear' }, 0, project()),
     );
     if (sheet.status !== 'refused') throw new Error('expected a refusal');
-    expect(sheet.lead).toContain('no plan');
+    expect(sheet.lead).toContain('no result');
     expect(sheet.inputs).toContainEqual({ field: 'Rule of the points', text: 'log-linear' });
   });
 });
