@@ -17,14 +17,17 @@ const isMiss = ({ path, name, field }: Compared): boolean =>
 
 const most = (values: readonly number[]): number => values.reduce((one, other) => Math.max(one, other), 0);
 
+/** A tolerance without the rounding of the product it came from. */
+const tidy = (tolerance: number): number => Number(tolerance.toPrecision(12));
+
 /** Tolerances as `5e-9` or `±5e-7`; the columns of one source may differ, and more than three are not listed. */
 const tolerances = (files: readonly VectorFile[]): string => {
   const texts = files.flatMap(({ tolerance }) =>
     Object.values(tolerance).map(({ rel, abs, digits }) =>
       [
         ...(digits === undefined ? [] : [`${digits} digits`]),
-        ...(abs === undefined ? [] : [`±${abs}`]),
-        ...(rel === undefined ? [] : [rel === 0 ? 'exact' : `${rel}`]),
+        ...(abs === undefined ? [] : [`±${tidy(abs)}`]),
+        ...(rel === undefined ? [] : [rel === 0 ? 'exact' : `${tidy(rel)}`]),
       ].join(' + '),
     ),
   );
@@ -88,6 +91,7 @@ const GROUPS: Readonly<Record<string, string>> = {
   liquids: 'Liquids',
   gauge: 'Liquids of gauges',
   pitot: 'Pitot tubes and traverses',
+  reading: 'What instruments show',
   logs: 'Logs',
   site: 'Site',
   units: 'Units',

@@ -1,4 +1,4 @@
-/** Totals of small logs that can be added up by hand, and of the notes on logs. */
+/** Totals of small logs that can be added up by hand. */
 import { describe, expect, test } from 'vitest';
 import { ACCOUNT } from '../../../src/core/log/account.ts';
 import { type Batch, drop, openBatch } from '../../../src/core/log/batch.ts';
