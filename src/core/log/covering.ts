@@ -26,7 +26,7 @@ const MOST_SURFACES = 16;
 /** What a box has beyond the rows that it is built for: of its width, and at least of the figures themselves. */
 const MARGINS = [
   { width: 1, pressure: 0.1, temperature: 10 },
-  { width: 0.1, pressure: 0.002, temperature: 0.2 },
+  { width: 0.1, pressure: 0.01, temperature: 0.5 },
 ] as const;
 
 type Side = Box['pressure'];
