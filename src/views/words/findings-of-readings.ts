@@ -32,7 +32,7 @@ export const checksOfReadings: Readonly<Record<string, FindingWords>> = {
   },
   'capillary-level': {
     role: 'length',
-    text: (figure) => `The tube is narrow: its walls move the level by ${figure}, which belongs into the zero`,
+    text: (figure) => `The tube is narrow: its walls move the level by ${figure}, which belongs in the zero reading`,
   },
   'cells-apart': {
     role: 'differential',

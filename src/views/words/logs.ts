@@ -2,7 +2,7 @@
 
 export const logWords = {
   title: 'Log',
-  none: 'A log is a table of what was recorded: time, differential or signal, and where there are, pressure and temperature.',
+  none: 'A log is a table of what was recorded: time, differential or signal, and pressure and temperature where they were.',
   open: 'Open a log',
   openOther: 'Open another',
   drop: 'or drop a .csv or .csv.gz file on the page. It is read here and sent nowhere.',
@@ -212,6 +212,9 @@ export function rowsAccount(
 ): string {
   return `${rows} rows in ${seconds}: ${converted} converted, ${remarked} of them with a remark, ${refused} not converted.`;
 }
+
+/** '98.8 % of the rows converted'. */
+export const shareText = (share: string): string => `${share} of the rows converted`;
 
 export const logAnswer = (mass: string, from: string, to: string, mean: string): string =>
   `${mass} passed between ${from} and ${to}, ${mean} in the mean.`;

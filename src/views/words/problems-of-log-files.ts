@@ -12,7 +12,7 @@ export const logFileProblems: ProblemWords = {
     cause:
       'The packed log is cut off, damaged, or has more behind its end: it cannot be unpacked ' +
       `after ${d.figure('bytes', 'count')} bytes, at row ${d.figure('row', 'count')}.`,
-    next: 'Open what the program that packed it makes of it. Nothing was converted.',
+    next: 'Open the log unpacked, or pack it again. Nothing was converted.',
   }),
   'log-store-full': (d) => ({
     cause: `The browser has no more room for the converted rows, after ${d.figure('bytes', 'count')} bytes.`,
@@ -20,8 +20,8 @@ export const logFileProblems: ProblemWords = {
   }),
   'log-memory-full': (d) => ({
     cause:
-      'This browser lends the page no files, so that the converted rows are kept in memory, ' +
-      `and there are more than ${d.figure('most', 'count')} bytes of them.`,
+      'This browser gives the page no file to write to: the converted rows are kept in memory, ' +
+      `and they come to more than ${d.figure('most', 'count')} bytes.`,
     next: 'Use another browser or the command line, or put the log through in parts. Nothing was converted.',
   }),
   'log-worker-lost': () => ({

@@ -16,15 +16,15 @@ export const logProblems: ProblemWords = {
     next: 'Check that the right file was chosen, and that it was written to its end.',
   }),
   'log-column-missing': (d) => ({
-    cause: `The log has no column '${d.text('written')}' for ${d.place}.`,
+    cause: `The log has no column '${d.text('written')}', which is named as ${d.place}.`,
     next: `Choose ${d.list('choices')}.`,
   }),
   'log-column-twice': (d) => ({
-    cause: `The log has several columns of the name '${d.text('written')}'.`,
+    cause: `The log has several columns named '${d.text('written')}'.`,
     next: 'Write the number of the column in place of its name, 1 for the first.',
   }),
   'log-column-shared': (d) => ({
-    cause: `${d.place} stands in a column that holds something else already.`,
+    cause: `${d.place} is also that of another figure.`,
     next: 'Choose a column of its own for each figure.',
   }),
   'log-signal-missing': () => ({
@@ -64,7 +64,7 @@ export const logProblems: ProblemWords = {
     next: 'State the format of the time.',
   }),
   'log-time-unreadable': (d) => ({
-    cause: `'${d.text('written')}' in the column ${d.text('column')} is written in no format of a time that is known.`,
+    cause: `'${d.text('written')}' in the column ${d.text('column')} is no time in a format that is known.`,
     next: 'Choose another column, or write the time as in 2026-03-01T06:00:00.',
   }),
   'log-zone-unknown': (d) => ({

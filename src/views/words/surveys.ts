@@ -89,8 +89,6 @@ export const pointsRead = (measured: number, points: number): string =>
 
 export const readShort = (measured: number, points: number): string => `${measured} of ${points} read`;
 
-export const countText = (points: number): string => `${points} ${points === 1 ? 'point' : 'points'}`;
-
 export const termNamesOfTraverse: Readonly<
   Record<NonNullable<SolvedTraverse['uncertainty']>['terms'][number]['name'], string>
 > = {
