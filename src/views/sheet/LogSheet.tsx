@@ -17,8 +17,9 @@ const MOST_DAYS = 10;
 export function LogSheet({ log }: { readonly log: PresentedLog }) {
   const { head, answer, account, totals, means, chart, reasons, days, configuration, notes } = log;
   return (
-    <Page head={head} type={logSheet.type} verdict={account} place={{ sheet: 1, of: 1 }}>
+    <Page head={head} type={logSheet.type} verdict={log.share} place={{ sheet: 1, of: 1 }}>
       <p className={styles.answer}>{answer.map(({ text }) => text).join('')}</p>
+      <p>{account}</p>
       <div className={styles.halves}>
         <Lines title={words.totals} rows={totals} />
         <Lines title={words.means} rows={means} />

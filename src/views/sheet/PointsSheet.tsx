@@ -42,7 +42,7 @@ function Line({ line: { title, place, points, mean }, survey: { units, shape } }
   const heads = [
     { label: surveyPlace.depth, unit: units.depth },
     { label: words.differential, unit: units.differential },
-    { label: surveyPlace.velocity, unit: units.velocity },
+    { label: words.velocity, unit: units.velocity },
     ...(shape.weighted ? [{ label: words.weight, unit: '1' }] : []),
   ];
   return (
@@ -52,7 +52,7 @@ function Line({ line: { title, place, points, mean }, survey: { units, shape } }
       </caption>
       <thead>
         <tr>
-          <th scope="col">{surveyPlace.point}</th>
+          <th scope="col">{words.number}</th>
           {heads.map(({ label, unit }) => (
             <th key={label} scope="col">
               {label} / {unit}

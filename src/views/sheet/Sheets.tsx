@@ -16,6 +16,7 @@ import { ChecksSheet } from './ChecksSheet.tsx';
 import { DimensionsSheet } from './DimensionsSheet.tsx';
 import { LogSheet } from './LogSheet.tsx';
 import { type Paper, type Place, SheetContext, type SheetKind } from './paper.ts';
+import { ReadingsSheet } from './ReadingsSheet.tsx';
 import { RefusedSheet } from './RefusedSheet.tsx';
 import styles from './Sheets.module.css';
 import { SizingSheet } from './SizingSheet.tsx';
@@ -25,12 +26,13 @@ import { WorkingSheet } from './WorkingSheet.tsx';
 /** The sheets of a meter, in this order; the first stands on its own and carries the signatures. */
 const kinds = {
   sizing: SizingSheet,
+  readings: ReadingsSheet,
   checks: ChecksSheet,
   dimensions: DimensionsSheet,
   working: WorkingSheet,
 } as const satisfies Partial<Record<SheetKind, ComponentType<{ readonly sheet: Sizing; readonly place: Place }>>>;
 
-const usual: readonly SheetKind[] = ['log', 'survey', 'sizing', 'checks', 'dimensions'];
+const usual: readonly SheetKind[] = ['log', 'survey', 'sizing', 'readings', 'checks', 'dimensions'];
 
 interface SheetsProps extends Printing {
   readonly paper: Paper;
@@ -76,7 +78,9 @@ export function Sheets({ paper, printedOn = '', include = usual, paperOnly = fal
 
 function Meter({ sheet, include }: { readonly sheet: PresentedSheet; readonly include: readonly SheetKind[] }) {
   if (sheet.status === 'refused') return <RefusedSheet sheet={sheet} />;
-  const chosen = (Object.keys(kinds) as (keyof typeof kinds)[]).filter((kind) => include.includes(kind));
+  const chosen = (Object.keys(kinds) as (keyof typeof kinds)[]).filter(
+    (kind) => include.includes(kind) && (kind !== 'readings' || sheet.readings !== undefined),
+  );
   return chosen.map((kind, at) => {
     const One = kinds[kind];
     return <One key={kind} sheet={sheet} place={{ sheet: at + 1, of: chosen.length }} />;

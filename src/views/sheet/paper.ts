@@ -4,7 +4,7 @@ import { createContext } from 'react';
 export type Paper = 'A4' | 'Letter';
 
 /** Sheets of a meter, of its log, and of a survey; checks and working are of both. */
-export type SheetKind = 'sizing' | 'log' | 'form' | 'survey' | 'checks' | 'dimensions' | 'working';
+export type SheetKind = 'sizing' | 'readings' | 'log' | 'form' | 'survey' | 'checks' | 'dimensions' | 'working';
 
 /** Where a page stands among the sheets of its meter, from 1. */
 export interface Place {

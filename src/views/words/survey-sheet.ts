@@ -19,7 +19,9 @@ export const sheetOfSurvey = {
   toRead: 'To be read, point by point',
   toNote: 'To be noted at the duct',
   incomplete: 'Not read to the end: no flow can be stated.',
+  number: 'No.',
   differential: 'Δp',
+  velocity: 'v',
 } as const;
 
 export const formFacts = {
