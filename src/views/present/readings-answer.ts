@@ -20,6 +20,11 @@ const SHOWN = [
   'pressure difference',
   'gauge pressure',
   'absolute pressure',
+  'temperature',
+  'density',
+  'angle',
+  'share of span',
+  'share of reading',
 ] as const;
 
 /** What was read, digit for digit. */

@@ -9,6 +9,7 @@ import { contextOf } from './context.ts';
 import { inputsHash } from './hash.ts';
 import { presentMeter } from './meter.ts';
 import type { DimensionRow, PresentedMeter, PresentedSizing } from './model.ts';
+import { type ReadingTable, readingTable } from './readings-sheet.ts';
 import { type DutyTable, dutyTable, elementRows, fluidRows, pipeSheetRows, spanText } from './sheet-figures.ts';
 import { drawnDimensions, type SectionText, sectionText } from './sheet-section.ts';
 import {
@@ -76,6 +77,8 @@ export interface SizingSheet {
   readonly dimensions: readonly FigureRow[];
   readonly straight: readonly FigureRow[];
   readonly sources: readonly SourceLine[];
+  /** Absent where nothing was read. */
+  readonly readings?: ReadingTable;
 }
 
 export type PresentedSheet = SizingSheet | RefusedSheet;
@@ -151,6 +154,7 @@ function sizingSheet(
     dimensions: dimensionFigures(presented, sources.keyOf),
     straight: straightFigures(presented, sources.keyOf),
     sources: sources.list(),
+    ...readingTable(meter, project, result),
   };
 }
 

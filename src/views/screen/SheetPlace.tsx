@@ -9,7 +9,7 @@ import { useLogConversion } from './log-conversion.ts';
 import styles from './SheetPlace.module.css';
 
 export type Paper = 'A4' | 'Letter';
-export type SheetKind = 'log' | 'form' | 'survey' | 'sizing' | 'checks' | 'dimensions' | 'working';
+export type SheetKind = 'log' | 'form' | 'survey' | 'sizing' | 'readings' | 'checks' | 'dimensions' | 'working';
 
 /** The printed sheets; app hands them in, the screen only gives them their place. */
 export type SheetsView = ComponentType<{
@@ -25,6 +25,7 @@ export type SheetsView = ComponentType<{
 const PAPERS: readonly Paper[] = ['A4', 'Letter'];
 const SHEETS: readonly { readonly kind: SheetKind; readonly label: string }[] = [
   { kind: 'sizing', label: 'Sizing' },
+  { kind: 'readings', label: 'Readings' },
   { kind: 'log', label: 'Summary of the log' },
   { kind: 'form', label: 'Field form' },
   { kind: 'survey', label: 'Survey' },
@@ -42,7 +43,7 @@ const isLogAsked = (): boolean => window.location.hash === '#/sheet/log';
 /** The form for the field goes along while some survey is not read to the end. */
 function usualSheets({ traverses }: Results): readonly SheetKind[] {
   const read = traverses.every((result) => result.status === 'solved' && result.measured === result.points);
-  return [...(read ? [] : ['form' as const]), 'log', 'survey', 'sizing', 'checks', 'dimensions'];
+  return [...(read ? [] : ['form' as const]), 'log', 'survey', 'sizing', 'readings', 'checks', 'dimensions'];
 }
 
 export function SheetPlace({ sheets: Sheets }: { readonly sheets: SheetsView }) {

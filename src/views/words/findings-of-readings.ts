@@ -46,7 +46,7 @@ export const readingFlags: Readonly<Record<string, string>> = {
   'reading-above-span': 'above the span',
   'gauge-liquid-range': 'gauge liquid out of range',
   'signal-failed': 'instrument failed',
-  'signal-saturated': 'saturated, at least',
+  'signal-saturated': 'saturated: at least',
   'signal-uncertain': 'signal uncertain',
   'below-cut-off': 'below the cut-off',
   'cells-apart': 'cells differ',

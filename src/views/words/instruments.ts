@@ -52,6 +52,20 @@ export const meantChoices: readonly [Choice, ...Choice[]] = [
   { value: 'rectangular', label: 'Limits, rectangular' },
 ];
 
+/** The label of a choice in any field of an instrument; absent for what is no choice. */
+export const choiceLabel = (value: string): string | undefined =>
+  [
+    ...gaugeChoices,
+    ...topChoices,
+    ...fillChoices,
+    ...limbChoices,
+    ...scaleChoices,
+    ...metalChoices,
+    ...signalChoices,
+    ...outputChoices,
+    ...meantChoices,
+  ].find((choice) => choice.value === value)?.label;
+
 export const instrumentWords = {
   own: 'By its density',
   ownDensity: 'Density of the gauge liquid',
@@ -62,7 +76,7 @@ export const instrumentWords = {
   lowRange: 'Second cell of a low range',
   notStated: 'not stated',
   sameFilling: 'As the upstream leg',
-  process: 'process fluid',
+  process: 'the process fluid',
 } as const;
 
 /** The liquid of a column in the middle of a sentence. */

@@ -84,7 +84,7 @@ export function meanSentence(counted: number, mean: string, least: string, most:
 }
 export const rootedSentence = (flow: string, percent: string, high: boolean): string =>
   `Rooting the mean differential would give ${flow}, ${percent} too ${high ? 'high' : 'low'}.`;
-export const flagSentence = (flags: readonly string[]): string => `Flags: ${flags.join(', ')}.`;
+export const flagSentence = (flags: readonly string[]): string => `Flags: ${flags.join('; ')}.`;
 export const leftOut = (count: number): string =>
   count === 1 ? 'One row is left out of the mean.' : `${count} rows are left out of the mean.`;
 export const oneFlag = (count: number, words: string): string => `${count} × ${words}`;

@@ -1,4 +1,5 @@
 /** A presented sheet as plain text: what a golden holds. */
+import type { ReadingTable } from '../../../src/views/present/readings-sheet.ts';
 import type { PresentedSheet, RefusedSheet, SheetHead } from '../../../src/views/present/sheet.ts';
 import type { CheckBlock, FigureRow, TermTable } from '../../../src/views/present/sheet-tables.ts';
 import type { SheetRow } from '../../../src/views/present/sources.ts';
@@ -87,6 +88,19 @@ export function surveyText(sheet: PresentedSurveySheet): string {
   return `${lines.join('\n')}\n`;
 }
 
+function readingLines({ answer, instrument, heads, rows, together, problems, notes }: ReadingTable): readonly string[] {
+  return [
+    'readings',
+    answer,
+    ...instrument.map(({ label, text }) => cells(label, text)),
+    cells(...heads.map(({ label, unit }) => [label, unit].filter(Boolean).join(' '))),
+    ...rows.map((row) => cells(...row)),
+    ...together,
+    ...problems,
+    ...notes,
+  ];
+}
+
 export function sheetText(sheet: PresentedSheet): string {
   if (sheet.status === 'refused') return refusedText(sheet);
   const { section, duty, terms } = sheet;
@@ -111,6 +125,7 @@ export function sheetText(sheet: PresentedSheet): string {
     ...sheet.straight.map(figureText),
     'sources',
     ...sheet.sources.map(({ key, clause }) => cells(key, clause)),
+    ...(sheet.readings === undefined ? [] : readingLines(sheet.readings)),
     ...sheet.meter.notes,
     ...sheet.meter.cautions,
   ];

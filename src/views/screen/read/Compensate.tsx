@@ -8,7 +8,7 @@ export function Compensate({ readings }: { readonly readings: PresentedReadings 
   const rows = readings.rows.flatMap(({ index, time, compensation }) =>
     compensation === undefined ? [] : [{ index, time, ...compensation }],
   );
-  if (rows.length === 0) return null;
+  if (rows.every(({ factor }) => factor.si === 1)) return null; // one density: nothing to correct
   return (
     <Panel id="compensate" title={words.compensate}>
       <p className={styles.hint}>{words.compensateLead}</p>

@@ -1,5 +1,6 @@
 /** Reading one meter: the answer, the instrument as it stands, the table of readings, and what follows from them. */
 import { type KeyboardEvent, lazy, Suspense, useState } from 'react';
+import type { ReadingRow } from '../../present/readings-model.ts';
 import { Boundary } from '../Boundary.tsx';
 import { EmptyProject } from '../EmptyProject.tsx';
 import { focusNext } from '../focus.ts';
@@ -44,7 +45,7 @@ function One({ selected }: { readonly selected: SelectedMeter }) {
   const readings = result.status === 'solved' ? presentedReadings(meter, project, result) : undefined;
   const [chosen, setCurrent] = useState<number>();
   const rows = readings?.rows ?? [];
-  const current = chosen !== undefined && chosen < rows.length ? chosen : Math.max(0, lastSolved(rows));
+  const current = chosen !== undefined && chosen < rows.length ? chosen : Math.max(0, lastTelling(rows));
   const row = rows[current];
   return (
     <>
@@ -63,5 +64,8 @@ function One({ selected }: { readonly selected: SelectedMeter }) {
   );
 }
 
-const lastSolved = (rows: readonly { readonly status: string }[]): number =>
-  rows.findLastIndex(({ status }) => status === 'solved');
+/** The last row that flows, else the last that can be read. */
+function lastTelling(rows: readonly ReadingRow[]): number {
+  const flowing = rows.findLastIndex(({ figures }) => figures.reynolds !== undefined);
+  return flowing >= 0 ? flowing : rows.findLastIndex(({ status }) => status === 'solved');
+}

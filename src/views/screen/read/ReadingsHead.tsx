@@ -6,15 +6,9 @@ import { UnitOptions } from '../field/UnitOptions.tsx';
 import type { ReadColumn, Units } from './columns.ts';
 import styles from './Read.module.css';
 
-export const FOUND: readonly ReadingColumn[] = [
-  'differential',
-  'flow',
-  'velocity',
-  'reynolds',
-  'coefficient',
-  'expansibility',
-  'uncertainty',
-];
+/** What is found, before the note of a row and after it. */
+export const FIRST: readonly ReadingColumn[] = ['differential', 'flow'];
+export const MORE: readonly ReadingColumn[] = ['velocity', 'reynolds', 'coefficient', 'expansibility', 'uncertainty'];
 
 interface Props {
   readonly columns: readonly ReadColumn[];
@@ -45,18 +39,26 @@ export function ReadingsHead({ columns, units, found, chooseUnit, fill }: Props)
             )}
           </th>
         ))}
-        {FOUND.map((id) => (
-          <th key={id} scope="col" className={styles.figure}>
-            {words[id]}
-            {found !== undefined && found[id] !== '' && <span className={styles.unit}>{found[id]}</span>}
-          </th>
-        ))}
+        <Found ids={FIRST} found={found} />
         <th scope="col">{words.note}</th>
+        <Found ids={MORE} found={found} />
         <td />
       </tr>
     </thead>
   );
 }
+
+interface FoundProps extends Pick<Props, 'found'> {
+  readonly ids: readonly ReadingColumn[];
+}
+
+const Found = ({ ids, found }: FoundProps) =>
+  ids.map((id) => (
+    <th key={id} scope="col" className={styles.figure}>
+      {words[id]}
+      {found !== undefined && found[id] !== '' && <span className={styles.unit}>{found[id]}</span>}
+    </th>
+  ));
 
 interface UnitProps {
   readonly column: ReadColumn;

@@ -1,5 +1,5 @@
 /** One row of the table of readings: its boxes, what it makes, and how it stands. */
-import type { ReadingRow } from '../../present/readings-model.ts';
+import type { ReadingColumn, ReadingRow } from '../../present/readings-model.ts';
 import { readWords as words } from '../../words/readings.ts';
 import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
@@ -11,7 +11,7 @@ import { textAt } from '../text.ts';
 import { VerdictMark } from '../VerdictMark.tsx';
 import type { ReadColumn, Units } from './columns.ts';
 import styles from './Read.module.css';
-import { FOUND } from './ReadingsHead.tsx';
+import { FIRST, MORE } from './ReadingsHead.tsx';
 
 interface Props {
   readonly at: number;
@@ -35,14 +35,11 @@ export function ReadingsRow({ at, row, columns, units, found, current, last, set
           <Box {...{ at, row, column, units }} paste={(text) => paste(text, at, place)} />
         </td>
       ))}
-      {FOUND.map((id) => (
-        <td key={id} className={styles.figure} data-figure={id}>
-          {found?.figures[id]?.number ?? ''}
-        </td>
-      ))}
+      <Figures ids={FIRST} found={found} />
       <td className={styles.note}>
         {found && !last && <VerdictMark verdict={found.note.verdict} words={found.note.words} />}
       </td>
+      <Figures ids={MORE} found={found} />
       <td>
         {!last && (
           <button
@@ -58,6 +55,17 @@ export function ReadingsRow({ at, row, columns, units, found, current, last, set
     </tr>
   );
 }
+
+interface FiguresProps extends Pick<Props, 'found'> {
+  readonly ids: readonly ReadingColumn[];
+}
+
+const Figures = ({ ids, found }: FiguresProps) =>
+  ids.map((id) => (
+    <td key={id} className={styles.figure} data-figure={id}>
+      {found?.figures[id]?.number ?? ''}
+    </td>
+  ));
 
 interface BoxProps {
   readonly at: number;
