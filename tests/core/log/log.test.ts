@@ -44,6 +44,11 @@ describe('the example day', () => {
     expect(result.longestGap).toEqual({ seconds: 1261, from_s: midnight + 21_899 });
   });
 
+  test('gives every second but those of gaps without stamps to an account', () => {
+    const accounted = result.accounts.reduce((sum, { seconds }) => sum + seconds, 0);
+    expect(accounted).toBe(86_399 - 1261 - 13); // the clock that was put back leaves a gap too
+  });
+
   test('adds up: the total is that of its day and of its output', () => {
     expect(result.days).toHaveLength(1);
     expect(result.days[0]?.total_kg).toBe(result.total_kg);
@@ -88,6 +93,23 @@ describe.each([1, 7, 65_536])('worked on %d rows at once', (chunkRows) => {
       expect(other.text === usual.text).toBe(true);
     },
   );
+});
+
+test('surfaces that grow on the way do not make the answer depend on the chunks', () => {
+  const rows = Array.from(
+    { length: 3000 },
+    (_, at) => `${midnight + at},${8 + (at % 7)},${20 + at / 80},${380 + at / 60}`,
+  );
+  const { time: _, ...log } = steamMeter.log as Record<string, unknown>;
+  const meter = { ...steamMeter, log: { ...log, time: { column: 'time', format: 'epoch-s' } } };
+  const [whole, ...others] = [65_536, 1, 7, 1000].map((chunkRows) =>
+    converted(logOf(rows), meter, { chunkRows, digits: 'all' }),
+  );
+  expect(whole?.result.path).toMatchObject({ kind: 'surface', exactRows: 0 });
+  for (const other of others) {
+    expect(other.result).toEqual(whole?.result);
+    expect(other.text === whole?.text).toBe(true);
+  }
 });
 
 test('cut into single bytes a log comes out the same', () => {
