@@ -35,8 +35,8 @@ interface Waiting {
 const TICK = 450; // ms
 /** Ticks without a word after which the worker is lost: within 2 s. Counted, so that a computer that slept is no cause. */
 const SILENT_TICKS = 4;
-/** Ticks that a new worker has to be loaded; one that cannot be loaded says so. */
-const STARTING_TICKS = 22;
+/** The same while it is being loaded, before it has told any progress, and while it has said that it is busy. */
+const BUSY_TICKS = 22;
 const CANCEL = 80; // ms that the worker has to leave a job by itself
 const IDLE = 30_000; // ms
 
@@ -48,15 +48,23 @@ interface Desk {
   readonly spawn: () => Port;
   readonly queue: Waiting[]; // the first is the one that runs
   port: Port | undefined;
-  /** Whether the worker has said a word yet. */
-  heard: boolean;
   silent: number; // ticks
+  /** Ticks that the worker may be silent. */
+  patience: number;
   watch: ReturnType<typeof setInterval> | undefined;
   idle: ReturnType<typeof setTimeout> | undefined;
 }
 
 export function createClient(spawn: () => Port): Client {
-  const desk: Desk = { spawn, queue: [], port: undefined, heard: false, silent: 0, watch: undefined, idle: undefined };
+  const desk: Desk = {
+    spawn,
+    queue: [],
+    port: undefined,
+    silent: 0,
+    patience: BUSY_TICKS,
+    watch: undefined,
+    idle: undefined,
+  };
   let jobs = 0;
   return {
     run: (order, report = () => undefined) => {
@@ -80,20 +88,18 @@ function begin(desk: Desk): void {
   clearTimeout(desk.idle);
   desk.port ??= open(desk);
   desk.silent = 0;
+  desk.patience = BUSY_TICKS;
   desk.watch = setInterval(() => {
     desk.silent += 1;
-    if (desk.silent >= (desk.heard ? SILENT_TICKS : STARTING_TICKS)) lose(desk, LOST);
+    if (desk.silent >= desk.patience) lose(desk, LOST);
   }, TICK);
   desk.port.postMessage({ kind: 'order', job: next.number, order: next.order });
 }
 
 function open(desk: Desk): Port {
   const opened = desk.spawn();
-  desk.heard = false;
   opened.onmessage = ({ data }) => {
-    if (desk.port !== opened) return;
-    desk.heard = true;
-    hear(desk, data);
+    if (desk.port === opened) hear(desk, data);
   };
   const fail = (): void => {
     if (desk.port === opened) lose(desk, LOST);
@@ -110,7 +116,11 @@ function hear(desk: Desk, message: FromWorker): void {
   const [running] = desk.queue;
   if (running?.number !== message.job) return; // of a job that was given up
   desk.silent = 0;
-  if (message.kind === 'progress') running.report(message.progress);
+  if (message.kind === 'busy') desk.patience = BUSY_TICKS;
+  if (message.kind === 'progress') {
+    desk.patience = SILENT_TICKS;
+    running.report(message.progress);
+  }
   if (message.kind === 'ended') end(desk, message.ending);
 }
 

@@ -12,6 +12,8 @@ export interface Surroundings {
   readonly pause: () => Promise<void>;
   readonly isCancelled: () => boolean;
   readonly report: (progress: Progress) => void;
+  /** Says that a surface is built, which takes a while. */
+  readonly announce: () => void;
   readonly openOutput: () => Promise<Output>;
 }
 
@@ -34,7 +36,7 @@ export async function convert(of: OfMeter, file: Blob, around: Surroundings): Pr
     output = await around.openOutput();
     const { write } = output;
     place.source = await openSource(file);
-    place.log = openLog(plan.value, write, { chunkRows: CHUNK_ROWS });
+    place.log = openLog(plan.value, write, { chunkRows: CHUNK_ROWS, announce: around.announce });
     if (!(await run(place.source, place.log, around, begun))) return await leave(output, { kind: 'cancelled' });
     if (!(await place.source.complete())) return await leave(output, changed(place.source, place.log));
     const record = place.log.finish();

@@ -25,7 +25,6 @@ self.addEventListener('message', ({ data }: MessageEvent<ToWorker>) => {
 });
 
 async function serve(job: number, order: Order): Promise<void> {
-  post({ kind: 'alive', job });
   const beat = setInterval(() => post({ kind: 'alive', job }), HEARTBEAT);
   try {
     const ending = await carryOut(job, order);
@@ -50,6 +49,7 @@ async function carryOut(job: number, order: Order): Promise<Ending> {
     now: () => performance.now(),
     pause,
     isCancelled: () => cancelled.has(job),
+    announce: () => post({ kind: 'busy', job }),
     report: (progress) => post({ kind: 'progress', job, progress }),
     openOutput: () => openOutput(order.owner, storage),
   });

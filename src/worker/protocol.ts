@@ -54,6 +54,8 @@ export type Ending =
 
 export type FromWorker =
   | { readonly kind: 'alive'; readonly job: number }
+  /** Something that takes a while comes next: nothing will be heard until it is done. */
+  | { readonly kind: 'busy'; readonly job: number }
   | { readonly kind: 'progress'; readonly job: number; readonly progress: Progress }
   | { readonly kind: 'ended'; readonly job: number; readonly ending: Ending };
 

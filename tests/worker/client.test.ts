@@ -126,7 +126,7 @@ describe('a worker that is lost', () => {
   test('one that falls silent is given up within 2 s, and the next job works', async () => {
     const job = watched(client.run(order).ended);
     const next = client.run(order);
-    last().say({ kind: 'alive', job: 1 });
+    last().say({ kind: 'progress', job: 1, progress });
     await vi.advanceTimersByTimeAsync(1300);
     expect(job.at()).toBeUndefined();
     await vi.advanceTimersByTimeAsync(700);
@@ -136,8 +136,13 @@ describe('a worker that is lost', () => {
     expect((await next.ended).kind).toBe('tidied');
   });
 
-  test('one that is not loaded yet has longer', async () => {
+  test.each([
+    ['has told no progress yet', []],
+    ['has said that it is busy', ['progress', 'busy']],
+    ['has said so and that it is alive', ['progress', 'busy', 'alive']],
+  ] as const)('one that %s has longer', async (_, said) => {
     const job = watched(client.run(order).ended);
+    for (const kind of said) last().say(kind === 'progress' ? { kind, job: 1, progress } : { kind, job: 1 });
     await vi.advanceTimersByTimeAsync(9000);
     expect(job.at()).toBeUndefined();
     await vi.advanceTimersByTimeAsync(1000);
@@ -168,7 +173,8 @@ describe('a worker that is lost', () => {
     const report = vi.fn();
     const job = watched(client.run(order, report).ended);
     const [dead] = workers;
-    dead?.say({ kind: 'alive', job: 1 });
+    dead?.say({ kind: 'progress', job: 1, progress });
+    report.mockClear();
     await vi.advanceTimersByTimeAsync(2000);
     const next = watched(client.run(order, report).ended);
     dead?.say({ kind: 'progress', job: 2, progress });

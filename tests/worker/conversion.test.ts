@@ -22,15 +22,17 @@ function clock(step: number): () => number {
 function around(change: Partial<Surroundings> = {}) {
   const output = keepingOutput();
   const reports: Progress[] = [];
+  const announced: number[] = [];
   const surroundings: Surroundings = {
     now: clock(7),
     pause: async () => undefined,
     isCancelled: () => false,
     report: (progress) => void reports.push(progress),
+    announce: () => void announced.push(reports.length),
     openOutput: async () => output,
     ...change,
   };
-  return { output, reports, surroundings };
+  return { output, reports, announced, surroundings };
 }
 
 /** The same log through the core at once. */
@@ -64,6 +66,12 @@ describe('a log that is converted', () => {
     expect(output.text()).toBe(whole.out);
     expect(bytes.size).toBe(whole.out.length);
     expect(output.discarded).toBe(false);
+  });
+
+  test('says so before it builds a surface', async () => {
+    const { announced, surroundings } = around();
+    await convert(ofMeter, new Blob([text]), surroundings);
+    expect(announced).toEqual([0]);
   });
 
   test('tells its progress at most ten times a second, up to the end of the file', async () => {

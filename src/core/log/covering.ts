@@ -16,6 +16,8 @@ export interface Covering {
   box: Box;
   /** The largest of those of every surface so far. */
   bounds?: KernelBounds;
+  /** Called before a surface is built, which takes a while. */
+  readonly announce: () => void;
   /** Surfaces that may still be built. */
   left: number;
   /** Why there was none, where one was wanted. */
@@ -33,9 +35,15 @@ type Side = Box['pressure'];
 
 const NOWHERE: Side = [Number.POSITIVE_INFINITY, Number.NEGATIVE_INFINITY];
 
-export const openCovering = (stands: Standing, fixed: Covering['fixed'], exact: boolean): Covering => ({
+export const openCovering = (
+  stands: Standing,
+  fixed: Covering['fixed'],
+  exact: boolean,
+  announce: Covering['announce'] = () => undefined,
+): Covering => ({
   stands,
   fixed,
+  announce,
   box: { pressure: NOWHERE, temperature: NOWHERE },
   left: exact ? 0 : MOST_SURFACES,
 });
@@ -50,6 +58,7 @@ export function widen(covering: Covering, p: number, T: number): void {
   for (const { width, pressure, temperature } of MARGINS) {
     if (covering.left === 0) return;
     covering.left -= 1;
+    covering.announce();
     const wider = {
       pressure: fixed.pressure ? ([p, p] as const) : widened(box.pressure, p, width, pressure * p),
       temperature: fixed.temperature ? ([T, T] as const) : widened(box.temperature, T, width, temperature),

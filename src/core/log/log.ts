@@ -35,6 +35,8 @@ export interface Manner {
   readonly digits?: Digits;
   /** Rows that are worked on at once; the answer does not depend on it. */
   readonly chunkRows?: number;
+  /** Called before a surface of the fluid is built: nothing is heard of the conversion for a while then. */
+  readonly announce?: () => void;
 }
 
 /** What the stages of a conversion hold. */
@@ -58,14 +60,18 @@ const CHUNK_ROWS = 4096;
 const DIGITS = 7; // as many as the bound of the surface leaves right
 
 /** Opens a conversion; its output goes to `sink`, whose bytes are used again after the call; without one it is not written. */
-export function openLog(plan: LogPlan, sink?: Sink, { digits = DIGITS, chunkRows = CHUNK_ROWS }: Manner = {}): Log {
+export function openLog(
+  plan: LogPlan,
+  sink?: Sink,
+  { digits = DIGITS, chunkRows = CHUNK_ROWS, announce }: Manner = {},
+): Log {
   const { mapping } = plan;
   const fixed = { pressure: mapping.pressure === undefined, temperature: mapping.temperature === undefined };
   const stages: Stages = {
     plan,
     batch: openBatch(2 * chunkRows),
     faults: openFaults(plan.faults),
-    flows: openFlows(plan.stands, plan.faults.cutOff, openCovering(plan.stands, fixed, plan.exact)),
+    flows: openFlows(plan.stands, plan.faults.cutOff, openCovering(plan.stands, fixed, plan.exact, announce)),
     repeats: openRepeats(),
     shown: openShown(),
     chart: openDecimation(),

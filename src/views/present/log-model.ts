@@ -91,6 +91,7 @@ export interface LogChart {
 
 export interface PresentedLog {
   readonly answer: readonly Segment[];
+  readonly share: string; // '98.8 % of the rows converted'
   readonly account: string; // '86 400 rows in 3.1 s: ...'
   readonly totals: readonly Row[];
   readonly means: readonly Row[];

@@ -12,6 +12,7 @@ import {
   openEnd,
   resultWords,
   rowsAccount,
+  shareText,
   spanningText,
   logRows as words,
 } from '../words/logs.ts';
@@ -54,6 +55,7 @@ export function presentLog(conversion: Conversion): PresentedLog {
   const presented = presentMeter(meter, project, result);
   return {
     answer: answerOf(at),
+    share: shareText(at.value((100 * record.converted) / Math.max(1, record.rows), 'percent').text),
     account: accountOf(at, conversion.seconds),
     totals: totalRows(at),
     means: meanRows(at),

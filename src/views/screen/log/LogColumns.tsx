@@ -65,7 +65,7 @@ function ColumnSelect({ id, path, columns, written, open, problem, choose }: Sel
   return (
     <select
       id={id}
-      className={box.select}
+      className={styles.column}
       data-field={path}
       aria-invalid={problem !== undefined}
       value={isForeign ? 'foreign' : at}

@@ -33,7 +33,9 @@ export function LogReasons({ reasons }: { readonly reasons: readonly AccountRow[
             <th scope="col">{words.share}</th>
             <th scope="col">{words.time}</th>
             <th scope="col">{words.mass}</th>
-            <th scope="col">{words.first}</th>
+            <th scope="col" className={styles.firsts}>
+              {words.first}
+            </th>
           </tr>
         </thead>
         <tbody>
