@@ -84,6 +84,14 @@ describe('readings', () => {
     expect(survey()).not.toHaveProperty('readings');
   });
 
+  test('a later point leaves the earlier ones where they are', () => {
+    at().writeReadings([{ line: 0, point: 0, text: '61 Pa' }]);
+    at().writeReadings([{ line: 0, point: 3, text: '70 Pa' }]);
+    expect(survey()?.readings).toEqual([['61 Pa', '', '', '70 Pa']]);
+    at().writeReadings([{ line: 0, point: 0, text: '' }]);
+    expect(survey()?.readings).toEqual([['', '', '', '70 Pa']]);
+  });
+
   test('one point is one step however often it is typed, a block is one step', () => {
     for (const text of ['6', '61', '61 Pa']) at().writeReadings([{ line: 0, point: 0, text }]);
     at().writeReadings([{ line: 0, point: 1, text: '70 Pa' }]);

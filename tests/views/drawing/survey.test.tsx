@@ -67,6 +67,17 @@ it('is to scale, and the probe goes in from the side that holds the ports', () =
   expect(side.ports.every(({ from, to }) => from[0] < to[0])).toBe(true);
 });
 
+it('puts the points of a diameter on both sides of the axis, the first below its port on top', () => {
+  const { outline, spots } = layoutOf(round);
+  if (outline.shape !== 'circle') throw new Error('expected a circle');
+  const points = survey(round).lines[0]?.points ?? [];
+  for (const [at, { position_m }] of points.entries()) {
+    expect(spots[at]?.x).toBeCloseTo(outline.x, 9);
+    const share = ((spots[at]?.y ?? 0) - (outline.y - outline.radius)) / (2 * outline.radius);
+    expect(share).toBeCloseTo(position_m / 0.6, 9);
+  }
+});
+
 describe('the markup', () => {
   const half: TraverseText = { ...round, readings: [['61 Pa', '74 Pa', '', '86 Pa', '75 Pa', '60 Pa']] };
   it('names the pictures, marks the point at hand and joins neighbours that are read', () => {

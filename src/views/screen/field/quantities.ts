@@ -71,7 +71,7 @@ export const QUANTITIES: Readonly<Record<string, QuantityKind>> = {
   'manometer.temperature': temperature,
   'manometer.angle': kind(['angle'], 'deg', 'deg'),
   readings: kind(['pressure difference', 'length'], 'Pa', 'inH2O'),
-  velocity: kind(['velocity'], 'm/s', 'ft/min'),
+  'probe.calibration': kind(['velocity'], 'm/s', 'ft/min'),
   'instrument.temperature': temperature,
   'instrument.liquid.density': density,
   'instrument.above.density': density,

@@ -14,7 +14,7 @@ import { useWrite, useWriteAll, useWritten } from '../hand.tsx';
 import { textAt } from '../text.ts';
 
 const PATH = 'probe.calibration';
-const velocity: TableColumn = { name: 'velocity', label: words.velocity, kind: quantityKind('velocity') };
+const velocity: TableColumn = { name: 'velocity', label: words.velocity, kind: quantityKind('probe.calibration') };
 const same = (text: string): string => text;
 
 export function ProbeCalibration() {
