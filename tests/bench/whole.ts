@@ -29,7 +29,7 @@ const copies = (project: Project, count: number): Project => ({
 const figure = (project: Project): number =>
   run(project).results.reduce((sum, one) => {
     if (one.status !== 'solved') throw new Error(`expected a solved meter, got ${JSON.stringify(one)}`);
-    return sum + one.diameterRatio;
+    return sum + one.pipe_m;
   }, 0);
 
 function commandLine(root: string, project: Project): Line {

@@ -36,7 +36,8 @@ export function solveHeadless(text: string, info: TestInfo): readonly Figures[] 
 
 function figuresOf(meter: MeterText, project: Project, solved: Solved): Figures {
   const at = contextOf(meter, project);
-  const { boreAsMeasured_m: bore } = solved;
+  const { boreAsMeasured_m: bore, diameterRatio } = solved;
+  if (bore === undefined || diameterRatio === undefined) throw new Error(`expected a bore of ${solved.tag}, got none`);
   const { density_kg_m3, viscosity_Pa_s } = solved.state;
   const duty = Object.entries(solved.points).map(([name, point]) => [
     name,
@@ -47,7 +48,7 @@ function figuresOf(meter: MeterText, project: Project, solved: Solved): Figures 
     solved,
     bore: solved.find === 'bore' ? at.value(bore, 'bore') : at.given(meter.element?.bore, ['length'], bore, 'bore'),
     pipe: at.given(meter.pipe?.bore, ['length'], solved.pipeAsMeasured_m, 'bore'),
-    ratio: at.value(solved.diameterRatio, 'ratio'),
+    ratio: at.value(diameterRatio, 'ratio'),
     density: at.value(density_kg_m3, 'density'),
     viscosity: at.value(viscosity_Pa_s, 'viscosity'),
     duty: Object.fromEntries(duty),
@@ -56,14 +57,17 @@ function figuresOf(meter: MeterText, project: Project, solved: Solved): Figures 
 
 function dutyOf(at: Context, { find }: Solved, name: DutyName, point: PointRecord): Record<DutyColumn, Value> {
   const { value } = at;
+  const { permanentLoss_Pa: loss, uncertainty } = point;
+  if (loss === undefined || uncertainty.expanded_percent === undefined)
+    throw new Error('expected a loss and an uncertainty, got none');
   return {
     flow: find === 'flow' && name === 'maximum' ? at.flow(point) : at.givenFlow(at.meter.duty?.[name], point),
     differential: value(point.differential_Pa, 'differential'),
     reynolds: value(point.reynoldsPipe, 'reynolds'),
     coefficient: value(point.C, 'coefficient'),
     expansibility: value(point.epsilon, 'factor'),
-    loss: value(point.permanentLoss_Pa, 'loss'),
+    loss: value(loss, 'loss'),
     velocity: value(point.velocityPipe_m_s, 'velocity'),
-    uncertainty: value(point.uncertainty.expanded_percent, 'uncertainty'),
+    uncertainty: value(uncertainty.expanded_percent, 'uncertainty'),
   };
 }

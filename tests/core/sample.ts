@@ -34,6 +34,15 @@ export const solved = (meter: unknown, project: Pick<Project, 'site' | 'base'> =
   return result;
 };
 
+/** A solved meter whose element has a bore. */
+export const bored = (meter: unknown) => {
+  const result = solved(meter);
+  const { bore_m, boreAsMeasured_m, diameterRatio } = result;
+  if (bore_m === undefined || boreAsMeasured_m === undefined || diameterRatio === undefined)
+    throw new Error(`expected a bore of ${result.element}, got none`);
+  return { ...result, bore_m, boreAsMeasured_m, diameterRatio };
+};
+
 /** Codes and fields of a refusal, `code at field`. */
 export const refusal = (meter: unknown, project: Pick<Project, 'site' | 'base'> = {}): string[] => {
   const result = answer(meter, project);

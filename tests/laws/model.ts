@@ -20,6 +20,8 @@ export interface Exact {
   readonly pressure: D;
   /** Absent for a liquid. */
   readonly exponent?: D;
+  /** What the sheet of an averaging pitot says; a width of nothing where K counts the whole pipe. */
+  readonly bar?: { readonly coefficient: D; readonly expansion: D; readonly width: D };
 }
 
 /** ISO 5167-2:2022, Formula (4). */
@@ -56,7 +58,8 @@ function orifice(tappings: string, b: D, Re: D, pipe: D): D {
 }
 
 /** C of every element inside its Reynolds limits. */
-export function coefficient({ element, pipe }: Exact, b: D, Re: D): D {
+export function coefficient({ element, pipe, bar }: Exact, b: D, Re: D): D {
+  if (bar !== undefined) return bar.coefficient;
   const [kind, variant = ''] = element.split('.');
   const mega = decimal('1e6');
   if (kind === 'orifice-plate') return orifice(variant, b, Re, pipe);
@@ -72,9 +75,10 @@ export function coefficient({ element, pipe }: Exact, b: D, Re: D): D {
   return decimal(constants[variant] as string);
 }
 
-/** Expansibility factor at x = dp/p1: ISO 5167-2:2022, Formula (5); ISO 5167-3:2022, Formula (6) for all others. */
-export function expansibility({ element, exponent: k }: Exact, b: D, x: D): D {
+/** Expansibility factor at x = dp/p1: ISO 5167-2:2022, Formula (5); that of the sheet; ISO 5167-3:2022, Formula (6) for all others. */
+export function expansibility({ element, exponent: k, bar }: Exact, b: D, x: D): D {
   if (k === undefined) return ONE;
+  if (bar !== undefined) return ONE.minus(bar.expansion.times(x).div(k)); // ε = 1 - a Δp/(κ p₁)
   const tau = ONE.minus(x);
   const b4 = b.pow(4);
   if (element.startsWith('orifice-plate')) {
@@ -88,17 +92,21 @@ export function expansibility({ element, exponent: k }: Exact, b: D, x: D): D {
   return first.times(second).times(third).sqrt();
 }
 
-/** q_m - C E eps (pi/4) d2 sqrt(2 dp rho), as a share of q_m: ISO 5167-1:2022, Formula (1). */
+/** E A of a bore, with A = (pi/4) d2; the area alone for a bar across the pipe, less a strip of its width where K says so. */
+function sectionOf({ pipe, bar }: Exact, b: D): D {
+  if (bar !== undefined) return PI.div(4).times(pipe.pow(2)).minus(bar.width.times(pipe));
+  return PI.div(4)
+    .times(b.times(pipe).pow(2))
+    .div(ONE.minus(b.pow(4)).sqrt());
+}
+
+/** q_m - C E eps A sqrt(2 dp rho), as a share of q_m: ISO 5167-1:2022, Formula (1), and its form without a bore. */
 export function residual(meter: Exact, b: D, massFlow: D, differential: D): D {
   const Re = massFlow.times(4).div(PI.times(meter.viscosity).times(meter.pipe));
-  const bore = b.times(meter.pipe);
-  const approach = ONE.div(ONE.minus(b.pow(4)).sqrt());
   const epsilon = expansibility(meter, b, differential.div(meter.pressure));
   const flow = coefficient(meter, b, Re)
-    .times(approach)
+    .times(sectionOf(meter, b))
     .times(epsilon)
-    .times(PI.div(4))
-    .times(bore.pow(2))
     .times(differential.times(meter.density).times(2).sqrt());
   return ONE.minus(flow.div(massFlow));
 }

@@ -1,4 +1,5 @@
 /** Seeded random meters over the whole valid range of every element, and a little beyond its edges where asked. */
+import { averagingPitot } from '../../src/core/element/averaging-pitot.ts';
 import type { Geometry, Primary } from '../../src/core/element/contract.ts';
 import { elements } from '../../src/core/element/registry.ts';
 import type { FluidState } from '../../src/core/fluid/contract.ts';
@@ -23,17 +24,47 @@ export function generator(seed: number): () => number {
   };
 }
 
+/** What the sheet of an averaging pitot says; a width of nothing where K counts the whole pipe. */
+export interface Sheet {
+  readonly coefficient: number;
+  readonly expansion: number;
+  readonly width: number; // m
+}
+
 export interface RandomMeter extends Meter {
+  /** Of a bar across the pipe, which has no bore. */
+  readonly sheet?: Sheet;
   readonly differential: PressureDifference;
 }
 
 /** Every element with every choice of its own field. */
 export const everyPrimary: readonly Primary[] = elements.flatMap((element) => {
-  const [field] = element.fields;
-  if (field === undefined) return [element.primary({})];
-  if (field.type !== 'choice') throw new Error(`expected a choice, got ${field.type}`);
-  return field.choices.map((choice) => element.primary({ [field.name]: choice }));
+  const field = element.fields.find(({ type }) => type === 'choice');
+  if (field?.type !== 'choice') return [element.primary({})];
+  const sheet = element.bore === 'none' ? { coefficient: 0.65, width: 0.004 } : {};
+  return field.choices.map((choice) => element.primary({ ...sheet, [field.name]: choice }));
 });
+
+/** The same element with figures of its own, where a sheet says them. */
+function withSheet(primary: Primary, pipe: Length, random: () => number) {
+  if (primary.insertion === undefined) return { primary };
+  const clear = primary.name === 'averaging-pitot.clear';
+  const figures = { coefficient: 0.4 + 0.6 * random(), expansion: 0.4 * random() };
+  const width = (0.01 + 0.2 * random()) * pipe;
+  const area = clear ? 'clear' : 'pipe';
+  return {
+    primary: averagingPitot.primary({ ...figures, width, area }),
+    sheet: { ...figures, width: clear ? width : 0 },
+  };
+}
+
+/** Pipe and section; a bar across the pipe has its own. */
+function geometryOf(primary: Primary, pipe: Length, ratio: number): Geometry {
+  const section = primary.insertion?.section(pipe);
+  if (section === undefined) return { pipe, bore: (ratio * pipe) as Length, ratio };
+  if (!section.ok) throw new Error(`expected a section of ${primary.name}, got ${JSON.stringify(section.problems)}`);
+  return section.value;
+}
 
 const source = { clause: 'drawn at random', seen: 'read' } as const;
 const MOST_REYNOLDS = 1e8;
@@ -42,17 +73,18 @@ const MOST_REYNOLDS = 1e8;
 export function randomMeter(random: () => number): RandomMeter {
   const between = (a: number, b: number) => a + (b - a) * random();
   const logBetween = (a: number, b: number) => a * (b / a) ** random();
-  const primary = everyPrimary[Math.floor(random() * everyPrimary.length)] as Primary;
-  const bounds = (at: Geometry, id: string) => primary.limits(at, 1e6).find((limit) => limit.id === id) ?? {};
+  const drawn = everyPrimary[Math.floor(random() * everyPrimary.length)] as Primary;
+  const bounds = (at: Geometry, id: string) => drawn.limits(at, 1e6).find((limit) => limit.id === id) ?? {};
   const any: Geometry = { pipe: 0.1 as Length, bore: 0.05 as Length, ratio: 0.5 };
   const { min: leastPipe = 0.05, max: mostPipe = 1 } = bounds(any, 'pipe-bore') as { min?: number; max?: number };
   const { min: leastRatio = 0.1, max: mostRatio = 0.75 } = bounds(any, 'diameter-ratio') as {
     min?: number;
     max?: number;
   };
-  const pipe = logBetween(leastPipe, mostPipe);
-  const ratio = between(leastRatio, mostRatio);
-  const geometry = { pipe: pipe as Length, bore: (ratio * pipe) as Length, ratio };
+  const pipe = logBetween(leastPipe, mostPipe) as Length;
+  const { primary, sheet } = withSheet(drawn, pipe, random);
+  const geometry = geometryOf(primary, pipe, between(leastRatio, mostRatio));
+  const { ratio } = geometry;
   const { min = 1e4, max = MOST_REYNOLDS } = bounds(geometry, 'reynolds-pipe') as { min?: number; max?: number };
   const reynolds = logBetween(min * 1.04, max / 1.1);
   const expands = random() < 0.6;
@@ -76,5 +108,9 @@ export function randomMeter(random: () => number): RandomMeter {
     sources: { density: source, viscosity: source },
     working: [],
   };
-  return { ...meterOf(primary, geometry, state), differential: differential as PressureDifference };
+  return {
+    ...meterOf(primary, geometry, state),
+    ...(sheet === undefined ? {} : { sheet }),
+    differential: differential as PressureDifference,
+  };
 }

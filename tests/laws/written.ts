@@ -57,7 +57,23 @@ export const gasMeter = fc
     meterOf(part, { density: `${density} kg/m3`, isentropicExponent: exponent }, share),
   );
 
-export const anyMeter = fc.oneof(liquidMeter, gasMeter);
+/** Meters whose bore can be asked for. */
+export const boredMeter = fc.oneof(liquidMeter, gasMeter);
+
+const sheets = fc.record({
+  kind: fc.constant('averaging-pitot'),
+  coefficient: between(0.4, 1),
+  area: fc.constantFrom('pipe', 'clear'),
+  width: fc.constantFrom('3 mm', '12 mm'),
+  expansion: between(0, 0.4),
+  loss: fc.constantFrom('3 %', '20 %'),
+  coefficientUncertainty: fc.constant('1 %'),
+});
+
+/** A bar across the pipe, which has no bore. */
+export const barMeter = fc.tuple(boredMeter, sheets).map(([meter, element]): MeterText => ({ ...meter, element }));
+
+export const anyMeter = fc.oneof({ weight: 3, arbitrary: boredMeter }, { weight: 1, arbitrary: barMeter });
 
 /** Equal within a relative tolerance. */
 export const near = (value: number, expected: number, tolerance: number): void => {

@@ -1,5 +1,6 @@
 /** Every check of a solved meter, grouped by the order of the assumptions. */
 import type { Budgets } from '../uncertainty/duty.ts';
+import { checkBar } from './bar.ts';
 import { checkCalibration } from './calibration.ts';
 import type { Case } from './case.ts';
 import type { Assumption, Finding } from './finding.ts';
@@ -27,6 +28,7 @@ export function check(subject: Case, budgets: Budgets, straight: readonly Findin
     ...checkLimits(subject),
     ...checkCalibration(subject),
     ...straight,
+    ...checkBar(subject),
     ...checkFluid(subject),
     ...checkPhase(subject),
     ...checkPlate(subject),

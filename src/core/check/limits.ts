@@ -1,9 +1,10 @@
-/** The standard's own limits of use: sizes, diameter ratio, Reynolds number, p2/p1, pipe roughness. */
+/** The element's own limits of use: sizes, diameter ratio, Reynolds number, velocity, p2/p1, pipe roughness. */
 import type { Limit, LimitId } from '../element/contract.ts';
+import { velocityOf } from '../solve/equation.ts';
 import { boundsOf, type Case, type Flow, flowsOf, largest, limitOf, within } from './case.ts';
 import type { Finding } from './finding.ts';
 
-/** One finding for each limit that the element's standard sets and the meter states a figure for. */
+/** One finding for each limit that the element's standard or sheet sets and the meter states a figure for. */
 export function checkLimits(subject: Case): readonly Finding[] {
   const { geometry, primary } = subject.solution.meter;
   const limits = primary.limits(geometry, 0); // of sizes, which depend on no flow
@@ -12,6 +13,7 @@ export function checkLimits(subject: Case): readonly Finding[] {
     ...size(limits, 'element-bore', geometry.bore, 'm'),
     ...size(limits, 'diameter-ratio', geometry.ratio, '1'),
     ...checkReynolds(subject),
+    ...checkVelocity(subject),
     ...checkPressureRatio(subject),
     ...checkRoughness(subject),
   ];
@@ -58,6 +60,18 @@ function checkReynolds(subject: Case): Finding[] {
   const lowest = finding(largest(flows, ({ reynolds }) => -reynolds));
   const highest = largest(flows, ({ reynolds }) => reynolds).reynolds;
   return lowest.map(({ at: _, ...rest }) => ({ ...rest, detail: { highest } }));
+}
+
+/** What the element itself may be run at, for its strength or its coefficient; custom has its own in practice.ts. */
+function checkVelocity(subject: Case): Finding[] {
+  const { state, geometry } = subject.solution.meter;
+  const flow = largest(flowsOf(subject), ({ massFlow }) => massFlow);
+  const limit = limitOf(subject, 'pipe-velocity', flow.reynolds);
+  if (limit === undefined) return [];
+  const value = velocityOf(flow.massFlow, state.density, geometry.pipe);
+  const bounds = boundsOf(limit);
+  const common = { id: 'pipe-velocity', assumption: 'range-and-span', verdict: within(value, bounds) } as const;
+  return [{ ...common, value, unit: 'm/s', limit: bounds, source: limit.source, at: flow.name }];
 }
 
 /** p2/p1 matters to a fluid that expands. */

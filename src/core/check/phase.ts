@@ -1,5 +1,6 @@
 /** One phase: boiling of a liquid behind and in the jet, condensation of a vapour, a phase settled by the user. */
 import type { Source } from '../quantity/source.ts';
+import { lossOf } from '../solve/equation.ts';
 import { type Case, flowsOf, largest, NEAR_SATURATION } from './case.ts';
 import type { Finding } from './finding.ts';
 
@@ -17,23 +18,14 @@ export function checkPhase(subject: Case): readonly Finding[] {
 /** Pressure behind the element and in the jet against the vapour pressure, at the flow with the largest differential. */
 function checkBoiling(subject: Case): Finding[] {
   const { meter } = subject.solution;
-  const { state, primary, geometry } = meter;
+  const { state, primary } = meter;
   const vapour = state.vapourPressure;
-  if (state.phase !== 'liquid' || vapour === undefined) return [];
+  if (state.phase !== 'liquid' || vapour === undefined || primary.insertion !== undefined) return []; // see bar.ts
   const flow = largest(flowsOf(subject), ({ differential }) => differential);
-  const loss = flow.differential * primary.lossShare(geometry, flow.coefficient, flow.reynolds);
+  const loss = lossOf(meter, flow);
   const common = { assumption: 'one-phase', at: flow.name } as const;
-  const behind = state.pressure - loss;
   const jet = state.pressure - flow.differential;
-  const flashing: Finding = {
-    ...common,
-    id: 'flashing',
-    verdict: behind <= vapour ? 'outside' : 'inside',
-    value: behind,
-    unit: 'Pa',
-    limit: { min: vapour },
-    source: JET,
-  };
+  const flashing = loss === undefined ? [] : [{ ...common, ...flashingAt(state.pressure - loss, vapour) }];
   const cavitation: Finding = {
     ...common,
     id: 'cavitation',
@@ -53,8 +45,18 @@ function checkBoiling(subject: Case): Finding[] {
     limit: { min: LEAST_MARGIN },
     source: MARGIN,
   };
-  return jet <= vapour ? [flashing, cavitation] : [flashing, cavitation, margin];
+  return jet <= vapour ? [...flashing, cavitation] : [...flashing, cavitation, margin];
 }
+
+const flashingAt = (behind: number, vapour: number) =>
+  ({
+    id: 'flashing',
+    verdict: behind <= vapour ? 'outside' : 'inside',
+    value: behind,
+    unit: 'Pa',
+    limit: { min: vapour },
+    source: JET,
+  }) as const;
 
 /** Distance from the saturation line; a phase that was settled against or on the line is a caution. */
 function checkSaturation({ solution }: Case): Finding[] {

@@ -15,7 +15,9 @@ const LEAST_SHARE = 6.25; // %
 
 /** Pipe velocity and span against the usual ones; the turndown, where there is more than one flow. */
 export function checkPractice(subject: Case, budgets: Budgets): readonly Finding[] {
-  return [checkVelocity(subject), checkSpan(subject), ...checkTurndown(subject, budgets)];
+  const { insertion } = subject.solution.meter.primary;
+  const span = insertion === undefined ? [checkSpan(subject)] : []; // the differential of a bar is what the flow makes it
+  return [checkVelocity(subject), ...span, ...checkTurndown(subject, budgets)];
 }
 
 const caution = (bad: boolean): Verdict => (bad ? 'caution' : 'inside');

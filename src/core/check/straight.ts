@@ -9,6 +9,9 @@ import type { Finding } from './finding.ts';
 /** What a length between columns B and A adds to the uncertainty of C. */
 const REDUCED_PERCENT = 0.5; // ISO 5167-2:2003, 6.2.4; ISO 5167-3:2003, 6.2.4; ISO 5167-4:2003, 6.2.4
 
+/** A row that holds for every fitting. */
+const ANY = 'any';
+
 export interface Straightness {
   readonly findings: readonly Finding[];
   /** Additional parts of the uncertainty of C. */
@@ -23,9 +26,10 @@ export function straightness(input: MeterInput, solution: Solution): Outcome<Str
   const { primary, geometry } = solution.meter;
   const lengths = primary.straightLengths(geometry.ratio, solution.duty.maximum.reynolds);
   const { fitting, before, after } = input.installation;
-  const upstream = lengths.find((length) => length.side === 'upstream' && length.fitting === fitting);
-  if (fitting !== undefined && upstream === undefined) {
-    const choices = lengths.flatMap((length) => (length.side === 'upstream' ? [length.fitting] : []));
+  const table = lengths.filter(({ side }) => side === 'upstream');
+  const upstream = table.find((length) => length.fitting === ANY || length.fitting === fitting);
+  if (fitting !== undefined && upstream === undefined && primary.insertion === undefined) {
+    const choices = table.map((length) => length.fitting);
     return fail('choice-unknown', 'installation.fitting', { written: fitting, choices: choices.join(', ') });
   }
   const downstream = lengths.find((length) => length.side === 'downstream');

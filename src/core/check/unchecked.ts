@@ -13,22 +13,15 @@ export interface Unchecked {
 /** The checks that are open for want of an input, in the order of the assumptions. */
 export function unchecked({ input, solution }: Case): readonly Unchecked[] {
   const { primary, geometry, state } = solution.meter;
-  const { fluctuation, fitting, before, after } = input.installation;
+  const { fluctuation } = input.installation;
   const limited = primary.limits(geometry, 0).some(({ id }) => id === 'pipe-roughness');
+  const ranged = primary.limits(geometry, 0).some(({ id }) => id === 'reynolds-pipe');
   const plate = primary.dimensions(geometry).some(({ id }) => id === 'plate-thickness');
-  const open = (id: string, assumption: Assumption, needs: string, wanting: boolean): Unchecked[] =>
-    wanting ? [{ id, assumption, needs }] : [];
   return [
     ...open('fluctuation', 'steady', 'installation.fluctuation', fluctuation === undefined),
     ...open('pipe-roughness', 'frictionless', 'pipe.roughness', limited && input.pipe.roughness === undefined),
-    ...open('straight-upstream', 'one-streamline', 'installation.fitting', fitting === undefined),
-    ...open(
-      'straight-upstream',
-      'one-streamline',
-      'installation.before',
-      fitting !== undefined && before === undefined,
-    ),
-    ...open('straight-downstream', 'one-streamline', 'installation.after', after === undefined),
+    ...open('reynolds-pipe', 'frictionless', 'element.reynoldsMin', !ranged),
+    ...straightNeeds({ input, solution }),
     ...open(
       'cavitation',
       'one-phase',
@@ -41,5 +34,25 @@ export function unchecked({ input, solution }: Case): readonly Unchecked[] {
       'element.plateThickness',
       plate && input.element.plateThickness === undefined,
     ),
+  ];
+}
+
+const open = (id: string, assumption: Assumption, needs: string, wanting: boolean): readonly Unchecked[] =>
+  wanting ? [{ id, assumption, needs }] : [];
+
+/** First what says how much straight pipe is needed, the fitting or the sheet; then how much there is. */
+function straightNeeds({ input, solution }: Case): readonly Unchecked[] {
+  const { primary, geometry } = solution.meter;
+  const { fitting, before, after } = input.installation;
+  const bar = primary.insertion !== undefined;
+  const lengths = bar ? primary.straightLengths(geometry.ratio, 0) : [];
+  const asked = (side: 'upstream' | 'downstream') => !bar || lengths.some((length) => length.side === side);
+  const known = bar ? asked('upstream') : fitting !== undefined;
+  const says = bar ? 'element.straightBefore' : 'installation.fitting';
+  return [
+    ...open('straight-upstream', 'one-streamline', says, !known),
+    ...open('straight-upstream', 'one-streamline', 'installation.before', known && before === undefined),
+    ...open('straight-downstream', 'one-streamline', 'element.straightAfter', !asked('downstream')),
+    ...open('straight-downstream', 'one-streamline', 'installation.after', asked('downstream') && after === undefined),
   ];
 }

@@ -5,6 +5,7 @@
  */
 import type { Field } from '../input/field.ts';
 import type { Length } from '../quantity/kinds.ts';
+import type { Outcome } from '../quantity/outcome.ts';
 import type { Source } from '../quantity/source.ts';
 import type { Working } from '../quantity/working.ts';
 
@@ -25,7 +26,7 @@ export interface Condition {
 
 /** A limit of use. Bounds are in SI; a bound that does not exist is absent. */
 export interface Limit {
-  /** One of: pipe-bore, element-bore, diameter-ratio, reynolds-pipe, pressure-ratio, pipe-roughness. */
+  /** One of: pipe-bore, element-bore, diameter-ratio, reynolds-pipe, pressure-ratio, pipe-roughness, pipe-velocity. */
   readonly id: LimitId;
   readonly min?: number;
   readonly max?: number;
@@ -37,7 +38,8 @@ export type LimitId =
   | 'diameter-ratio'
   | 'reynolds-pipe'
   | 'pressure-ratio'
-  | 'pipe-roughness';
+  | 'pipe-roughness'
+  | 'pipe-velocity';
 
 /** One additive part of a relative expanded uncertainty, in percent at 95 %. */
 export interface Part {
@@ -82,6 +84,21 @@ export interface Section {
   readonly level: 'upstream' | 'throat';
 }
 
+/** A bar across the pipe: it has no bore, and its coefficient counts a section of the pipe instead. */
+export interface Insertion {
+  /**
+   * The section at the line temperature: ratio 0, so that the velocity of approach factor is 1; `bore` is the diameter of
+   * a circle of its area. Problems: figures of the element that leave no section, or exclude each other.
+   */
+  readonly section: (pipe: Length) => Outcome<Geometry>;
+  /** The working of its area, m2; absent where it is that of the pipe. */
+  readonly area?: (pipe: Length) => Working;
+  /** What one percent of D moves the flow by, %. */
+  readonly pipeSensitivity: (pipe: Length) => number;
+  /** False where the expansibility factor is taken as 1 for want of a figure. */
+  readonly expansionStated: boolean;
+}
+
 /** An element whose own fields are settled (tappings, convergent, ...). */
 export interface Primary {
   readonly kind: string;
@@ -95,31 +112,37 @@ export interface Primary {
   /** First guess of C for the solver: ISO 5167-1:2003, Annex A (0.606 for orifice plates, 1 for the others). */
   readonly guess: number;
   readonly discharge: (at: Geometry) => Discharge;
+  /** Present where the element has no bore. */
+  readonly insertion?: Insertion;
   readonly expansibility: (ratio: number, isentropicExponent: number) => Expansibility;
-  /** Permanent pressure loss as a share of the differential. */
-  readonly lossShare: (at: Geometry, coefficient: number, reynolds: number) => number;
+  /** Permanent pressure loss as a share of the differential; absent where nothing says it. */
+  readonly lossShare?: (at: Geometry, coefficient: number, reynolds: number) => number;
   readonly limits: (at: Geometry, reynolds: number) => readonly Limit[];
-  /** Parts of the uncertainty of C, to be added arithmetically. */
+  /** Parts of the uncertainty of C, to be added arithmetically; none where nothing says it. */
   readonly coefficientUncertainty: (at: Geometry, flow: Condition) => readonly Part[];
-  readonly expansibilityUncertainty: (at: Geometry, flow: Condition) => Part;
+  /** Undefined where nothing says it. */
+  readonly expansibilityUncertainty: (at: Geometry, flow: Condition) => Part | undefined;
   readonly straightLengths: (ratio: number, reynolds: number) => readonly StraightLength[];
   readonly dimensions: (at: Geometry) => readonly Dimension[];
   /** Distance of the two tappings from the upstream face (or tapping planes), for drawing and head lines, m. */
   readonly tappings: (at: Geometry) => { readonly upstream: number; readonly downstream: number };
   /** Further sections at which the heads are known, m from the upstream face; a Venturi tube has them. */
   readonly sections?: (at: Geometry) => readonly Section[];
-  /** Distance downstream within which the pressure recovers, in pipe bores. */
-  readonly recovery: number;
+  /** Distance downstream within which the pressure recovers, in pipe bores; absent where nothing says it. */
+  readonly recovery?: number;
   readonly working: {
     readonly coefficient: (at: Geometry, reynolds: number) => Working;
     readonly expansibility: (ratio: number, isentropicExponent: number, expansion: number) => Working;
-    readonly loss: (at: Geometry, coefficient: number, reynolds: number, differential: number) => Working;
+    /** Present with `lossShare`. */
+    readonly loss?: (at: Geometry, coefficient: number, reynolds: number, differential: number) => Working;
   };
 }
 
 export interface Element {
   /** As written in the file, `element.kind`. */
   readonly kind: string;
+  /** Where the element has no bore to be asked for. */
+  readonly bore?: 'none';
   /** The element's own fields beside bore, material and measuredAt. */
   readonly fields: readonly Field[];
   /** The element with its fields settled; the values come parsed, by field name. */

@@ -1,5 +1,6 @@
 /** Every primary element of this version, by the kind the file writes. */
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';
+import { averagingPitot } from './averaging-pitot.ts';
 import type { Element } from './contract.ts';
 import { isa1932Nozzle } from './isa-1932-nozzle.ts';
 import { longRadiusNozzle } from './long-radius-nozzle.ts';
@@ -8,7 +9,14 @@ import { venturiNozzle } from './venturi-nozzle.ts';
 import { venturiTube } from './venturi-tube.ts';
 
 /** The elements in the order in which they are offered. */
-export const elements: readonly Element[] = [orificePlate, isa1932Nozzle, longRadiusNozzle, venturiNozzle, venturiTube];
+export const elements: readonly Element[] = [
+  orificePlate,
+  isa1932Nozzle,
+  longRadiusNozzle,
+  venturiNozzle,
+  venturiTube,
+  averagingPitot,
+];
 
 /** Kinds that the file format names and this version does not compute. */
 export const notOffered: readonly string[] = [
@@ -18,7 +26,6 @@ export const notOffered: readonly string[] = [
   'conical-entrance-plate',
   'eccentric-plate',
   'segmental-plate',
-  'averaging-pitot',
 ];
 
 /** The element of a kind. Problems at `element.kind`: field-missing, element-not-offered, element-unknown. */

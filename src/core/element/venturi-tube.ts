@@ -94,6 +94,7 @@ const coefficientWorking = (convergent: Convergent, reynolds: number): Working =
   const range = ranges[convergent];
   if (isBelow(range, reynolds) && range.below.length > 0) {
     return curveWorking(pointsOf(range), reynolds, {
+      symbol: 'C',
       source: annexB,
       between: 'venturi-annex-b',
       held: 'venturi-annex-b',

@@ -15,7 +15,7 @@ import type {
 } from '../quantity/kinds.ts';
 import { type Outcome, ok } from '../quantity/outcome.ts';
 import type { Quantity } from '../quantity/text.ts';
-import type { Field } from './field.ts';
+import type { Field, NumberField } from './field.ts';
 import { type Form, failed, openForm } from './form.ts';
 import { type Installation, readInstallation } from './installation.ts';
 import { readUncertainty, type StatedUncertainty } from './uncertainty.ts';
@@ -56,21 +56,23 @@ export interface MeterInput {
 
 const UNKNOWNS: readonly Unknown[] = ['bore', 'differential', 'flow'];
 
+/** What an element asks of the form: its own fields, and whether it has a bore. */
+export interface Asked {
+  readonly fields: readonly Field[];
+  readonly bore?: 'none';
+}
+
 /** Reads a meter whose shape is checked; `materials` are the keys thermal growth is known for. */
-export function readMeter(
-  meter: MeterText,
-  fields: readonly Field[],
-  materials: readonly string[],
-): Outcome<MeterInput> {
+export function readMeter(meter: MeterText, asked: Asked, materials: readonly string[]): Outcome<MeterInput> {
   const form = openForm(meter);
   const find = form.choice('find', UNKNOWNS, true);
   const pipe = readMetal(form, 'pipe', materials, true);
-  const element = readMetal(form, 'element', materials, find !== 'bore');
+  const element = readMetal(form, 'element', materials, find !== 'bore' && asked.bore !== 'none');
   const roughness = form.positive('pipe.roughness', ['length']);
   const plate = form.positive('element.plateThickness', ['length']);
   const edge = form.positive('element.edgeThickness', ['length']);
-  const own = readOwn(form, fields);
   const calibration = readCalibration(form, meter.element?.calibration?.length ?? 0);
+  const own = readOwn(form, asked.fields, calibration.length > 0);
   const duty = readDuty(form, find);
   const differential =
     find === 'differential' ? undefined : form.positive('differential', ['pressure difference'], find !== undefined);
@@ -107,12 +109,13 @@ function readMetal(form: Form, group: 'pipe' | 'element', materials: readonly st
   };
 }
 
-function readOwn(form: Form, fields: readonly Field[]): Record<string, string | number> {
+function readOwn(form: Form, fields: readonly Field[], calibrated: boolean): Record<string, string | number> {
   const read = (field: Field): string | number | undefined => {
     const path = `element.${field.name}`;
     if (field.type === 'choice') return form.choice(path, field.choices, field.required);
-    if (field.type === 'number') return form.number(path, field.required);
-    return form.quantity(path, [field.measure], field.required)?.si;
+    if (field.type === 'number') return numberWithin(form, path, field, calibrated);
+    if (field.type === 'share') return shareOfWhole(form, path, field.required);
+    return form.positive(path, [field.measure], field.required)?.si;
   };
   return Object.fromEntries(
     fields.flatMap((field) => {
@@ -120,6 +123,19 @@ function readOwn(form: Form, fields: readonly Field[]): Record<string, string | 
       return value === undefined ? [] : [[field.name, value]];
     }),
   );
+}
+
+function numberWithin(form: Form, path: string, field: NumberField, calibrated: boolean): number | undefined {
+  const { required, least, most } = field;
+  const value = form.number(path, required === 'uncalibrated' ? !calibrated : required);
+  if (value === undefined || (value >= least && value <= most)) return value;
+  return form.report('figure-implausible', path, { written: String(value), least, most });
+}
+
+function shareOfWhole(form: Form, path: string, required: boolean): number | undefined {
+  const share = form.quantity(path, ['share'], required);
+  if (share === undefined || (share.si >= 0 && share.si <= 1)) return share?.si;
+  return form.report('share-out-of-range', path, { written: `${share.number} ${share.unit.symbol}` });
 }
 
 function readCalibration(form: Form, rows: number): CalibrationPoint[] {

@@ -9,7 +9,7 @@ import { as } from '../quantity/brand.ts';
 import { flowAt, meterAt, type Standing } from '../run/standing.ts';
 import { heldDischarge } from '../solve/equation.ts';
 import { coefficientFrom } from '../solve/flow.ts';
-import { hotGeometry } from '../solve/metal.ts';
+import { hotSection } from '../solve/metal.ts';
 import { approximantOf } from './approximant.ts';
 import { BLOCK, type Block, coefficients, type Explicit, epsilons, ideals, openBlock, states } from './block.ts';
 import { expansionOf } from './expansion.ts';
@@ -129,8 +129,8 @@ function explicitOf(stands: Standing, surface: Cells): Explicit {
 }
 
 /** The metal at a temperature; a bore as wide as its pipe was refused when the meter was solved, and stays narrower. */
-function geometryAt({ solution, input }: Standing, T: number): Geometry {
-  const found = hotGeometry(solution.boreAsMeasured, input, as<'temperature'>(T));
+function geometryAt({ primary, solution, input }: Standing, T: number): Geometry {
+  const found = hotSection(primary, solution.boreAsMeasured, input, as<'temperature'>(T));
   if (found.ok) return found.value;
   throw new Error(`kernel: expected a bore below the pipe at ${T} K, got ${JSON.stringify(found.problems)}`);
 }

@@ -10,11 +10,11 @@ import type { Site } from '../input/site.ts';
 import type { Seen, Source } from '../quantity/source.ts';
 import type { Working } from '../quantity/working.ts';
 import { correctionWorking } from '../solve/downstream.ts';
-import { type Operation, velocityOf } from '../solve/equation.ts';
+import { lossOf, type Operation, velocityOf } from '../solve/equation.ts';
 import { metalWorking } from '../solve/metal.ts';
 import type { Solution } from '../solve/solve.ts';
 import type { Budgets } from '../uncertainty/duty.ts';
-import type { Budget } from '../uncertainty/iso5167.ts';
+import { type Budget, isKnown } from '../uncertainty/iso5167.ts';
 import { curveOf, reynoldsLimits } from './curve.ts';
 import { headsOf } from './heads.ts';
 import { withLate } from './late.ts';
@@ -53,10 +53,8 @@ export function assemble(parts: Parts): Solved {
     standard: primary.standard,
     site: siteRecord(site),
     state: { ...stateRecord(state, relative), ...downstreamRecord(solution) },
-    bore_m: geometry.bore,
+    ...boreOf(solution),
     pipe_m: geometry.pipe,
-    diameterRatio: geometry.ratio,
-    boreAsMeasured_m: solution.boreAsMeasured,
     pipeAsMeasured_m: solution.pipeAsMeasured,
     points: pointsOf(parts),
     span_Pa: span,
@@ -78,6 +76,12 @@ export function assemble(parts: Parts): Solved {
   return solved;
 }
 
+/** The bore and its ratio, of an element that has one. */
+function boreOf({ meter: { geometry }, boreAsMeasured }: Solution) {
+  if (boreAsMeasured === undefined) return {};
+  return { bore_m: geometry.bore, diameterRatio: geometry.ratio, boreAsMeasured_m: boreAsMeasured };
+}
+
 /** What only screen and paper ask for. */
 type Late = Pick<Solved, 'readings' | 'curve' | 'reynoldsLimits' | 'heads' | 'dimensions' | 'working' | 'sources'>;
 
@@ -94,8 +98,12 @@ function stateWorking({ downstream, meter: { state } }: Solution): readonly Work
   return [...(corrected ? correctionWorking(downstream, state.pressure) : []), ...state.working];
 }
 
-const metalOf = ({ input, solution: { boreAsMeasured, meter } }: Parts): readonly Working[] =>
-  metalWorking(input, boreAsMeasured, meter.state.temperature);
+/** How the metal grew, and the area that a bar across the pipe leaves clear, where its coefficient counts that. */
+function metalOf({ input, solution: { boreAsMeasured, meter } }: Parts): readonly Working[] {
+  const area = meter.primary.insertion?.area?.(meter.geometry.pipe);
+  const grown = metalWorking(input, boreAsMeasured, meter.state.temperature);
+  return area === undefined ? grown : [...grown, area];
+}
 
 /** The relative density as a working line, for a gas whose base volume counts the whole of it: none for air. */
 function relativeOf({ phase, baseDensity }: FluidState, { fluid }: MeterInput, { base }: Site): readonly Working[] {
@@ -162,6 +170,7 @@ function pointsOf(parts: Parts): Partial<Record<DutyName, PointRecord>> {
 function pointOf({ input, solution }: Parts, name: DutyName, operation: Operation, budget: Budget): PointRecord {
   const { state, geometry, primary } = solution.meter;
   const { massFlow, differential, coefficient, epsilon, reynolds } = operation;
+  const loss = lossOf(solution.meter, operation);
   const direction: Direction = name === 'maximum' && input.find === 'flow' ? 'flow' : 'differential';
   const figures = {
     massFlow_kg_s: massFlow,
@@ -171,11 +180,13 @@ function pointOf({ input, solution }: Parts, name: DutyName, operation: Operatio
     C: coefficient,
     epsilon,
     reynoldsPipe: reynolds,
-    permanentLoss_Pa: differential * primary.lossShare(geometry, coefficient, reynolds),
+    ...(loss === undefined ? {} : { permanentLoss_Pa: loss }),
     velocityPipe_m_s: velocityOf(massFlow, state.density, geometry.pipe),
-    velocityBore_m_s: velocityOf(massFlow, state.density, geometry.bore),
+    ...(primary.insertion === undefined
+      ? { velocityBore_m_s: velocityOf(massFlow, state.density, geometry.bore) }
+      : {}),
     uncertainty: {
-      expanded_percent: budget.expandedPercent,
+      ...(isKnown(budget) ? { expanded_percent: budget.expandedPercent } : {}),
       terms: budget.terms.map(({ name: term, percentOfFlow }) => ({ name: term, percentOfFlow })),
       parts: budget.coefficientParts.map(({ id, percent }) => ({ name: id, percentOfC: percent })),
       open: budget.open,

@@ -31,22 +31,19 @@ export function curveOf(meter: Meter, span: number, stated: StatedUncertainty, e
   return points;
 }
 
-/** The standard's Reynolds limits of a meter, and the differentials of the flows that have them. */
+/** The Reynolds limits of a meter, none or more, and the differentials of the flows that have them. */
 export function reynoldsLimits(meter: Meter) {
   const { min, max, source } = reynoldsBounds(meter);
   return {
     ...(min === undefined ? {} : { min, ...named('minDifferential_Pa', differentialAt(min, meter)) }),
     ...(max === undefined ? {} : { max, ...named('maxDifferential_Pa', differentialAt(max, meter)) }),
-    source,
+    ...(source === undefined ? {} : { source }),
   };
 }
 
 /** They depend on the geometry alone. */
-function reynoldsBounds({ primary, geometry }: Meter): Limit {
-  const limit = primary.limits(geometry, 0).find(({ id }) => id === 'reynolds-pipe');
-  if (limit === undefined) throw new Error(`result: expected a Reynolds limit of ${primary.name}, got none`);
-  return limit;
-}
+const reynoldsBounds = ({ primary, geometry }: Meter): Partial<Limit> =>
+  primary.limits(geometry, 0).find(({ id }) => id === 'reynolds-pipe') ?? {};
 
 /** The differential at a pipe Reynolds number; none where no differential makes that flow. */
 function differentialAt(reynolds: number, meter: Meter): number | undefined {

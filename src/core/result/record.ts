@@ -76,7 +76,8 @@ export interface UncertaintyTerm {
 }
 
 export interface PointUncertainty {
-  readonly expanded_percent: number;
+  /** Absent where no term of it is stated. */
+  readonly expanded_percent?: number;
   readonly terms: readonly UncertaintyTerm[];
   /** Additive parts of the uncertainty of C, by the id of their words. */
   readonly parts: readonly { readonly name: string; readonly percentOfC: number }[];
@@ -92,15 +93,16 @@ export interface PointRecord {
   readonly C: number;
   readonly epsilon: number;
   readonly reynoldsPipe: number;
-  readonly permanentLoss_Pa: number;
+  /** Absent where nothing says it. */
+  readonly permanentLoss_Pa?: number;
   readonly velocityPipe_m_s: number;
-  readonly velocityBore_m_s: number;
+  readonly velocityBore_m_s?: number;
   readonly uncertainty: PointUncertainty;
   /** The working of every figure of this point, in the order of the calculation. */
   readonly working: readonly Working[];
 }
 
-/** A point of flow against differential; `inside` is false outside the Reynolds limits of the standard. */
+/** A point of flow against differential; `inside` is false outside the Reynolds limits of the element. */
 export interface CurvePoint {
   readonly differential_Pa: number;
   readonly massFlow_kg_s: number;
@@ -109,7 +111,7 @@ export interface CurvePoint {
   readonly inside: boolean;
 }
 
-/** Heads above the pipe axis at maximum flow, relative to the outlet's pressure head; metres of flowing fluid. */
+/** Heads above the pipe axis at maximum flow, relative to the outlet's pressure head; metres of flowing fluid. None where the loss is not known. */
 export interface HeadPoint {
   /** inlet, tapping-upstream, tapping-downstream, recovered; sections of a Venturi between. */
   readonly station: string;
@@ -130,10 +132,11 @@ export interface Solved {
   readonly standard: string;
   readonly site: SiteRecord;
   readonly state: StateRecord;
-  readonly bore_m: number;
+  /** Bore and ratio are absent for an element without a bore. */
+  readonly bore_m?: number;
   readonly pipe_m: number;
-  readonly diameterRatio: number;
-  readonly boreAsMeasured_m: number;
+  readonly diameterRatio?: number;
+  readonly boreAsMeasured_m?: number;
   readonly pipeAsMeasured_m: number;
   readonly points: Readonly<Partial<Record<DutyName, PointRecord>>>;
   /** The differential of the span: what the user set, or that of the maximum flow. */
@@ -142,13 +145,13 @@ export interface Solved {
   /** Checks that could not be made, and the field each would need. */
   readonly unchecked: readonly Unchecked[];
   readonly curve: readonly CurvePoint[];
-  /** Pipe Reynolds numbers and differentials between which the standard holds for this element. */
+  /** Pipe Reynolds numbers and differentials between which the element's coefficient is known; none where nothing says it. */
   readonly reynoldsLimits: {
     readonly min?: number;
     readonly max?: number;
     readonly minDifferential_Pa?: number;
     readonly maxDifferential_Pa?: number;
-    readonly source: Source;
+    readonly source?: Source;
   };
   readonly heads: readonly HeadPoint[];
   readonly dimensions: readonly Dimension[];

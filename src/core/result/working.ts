@@ -4,7 +4,9 @@ import { approachFactor } from '../element/shared/approach.ts';
 import type { Source } from '../quantity/source.ts';
 import { type Given, named as given, type Working } from '../quantity/working.ts';
 import { type Meter, type Operation, velocityOf } from '../solve/equation.ts';
-import { type Budget, EQUATION, type Term, type TermName } from '../uncertainty/iso5167.ts';
+import { type Budget, EQUATION, isKnown, type TermName } from '../uncertainty/iso5167.ts';
+import { barEquation, barUncertaintyWorking } from './bar-working.ts';
+import { termOf } from './budget-term.ts';
 
 const iso = (clause: string, seen: Source['seen'] = 'read'): Source => ({ clause: `ISO 5167-1:2022, ${clause}`, seen });
 
@@ -17,23 +19,27 @@ export function pointWorking(meter: Meter, operation: Operation, direction: Dire
   const { reynolds, coefficient, differential } = operation;
   const expansion = differential / state.pressure;
   const held = operation.heldAt;
+  const bar = primary.insertion !== undefined;
+  const equation = bar ? barEquation : boreEquation;
+  const loss = primary.working.loss?.(geometry, coefficient, reynolds, differential);
   const discharge = primary.working.coefficient(geometry, Math.max(reynolds, held ?? 0));
   return [
-    ratioWorking(meter),
-    approachWorking(meter),
+    ...(bar ? [] : [ratioWorking(meter), approachWorking(meter)]),
     reynoldsWorking(meter, operation),
     held === undefined ? discharge : { ...discharge, remark: 'coefficient-held' },
     ...(state.expands && state.isentropicExponent !== undefined
       ? [primary.working.expansibility(geometry.ratio, state.isentropicExponent, expansion)]
       : []),
-    direction === 'flow' ? flowWorking(meter, operation) : differentialWorking(meter, operation),
+    equation[direction](meter, operation),
     volumeWorking(meter, operation),
     ...(state.baseDensity === undefined
       ? []
       : [baseWorking(operation, state.baseDensity, state.sources.baseDensity ?? state.sources.density)]),
     velocityWorking(meter, operation),
-    primary.working.loss(geometry, coefficient, reynolds, differential),
-    uncertaintyWorking(budget, geometry.ratio),
+    ...(loss === undefined ? [] : [loss]),
+    ...(isKnown(budget)
+      ? [bar ? barUncertaintyWorking(budget, meter) : uncertaintyWorking(budget, geometry.ratio)]
+      : []),
   ];
 }
 
@@ -102,6 +108,8 @@ const differentialWorking = (meter: Meter, operation: Operation): Working => ({
   source: iso('Formula (1)'),
 });
 
+const boreEquation = { flow: flowWorking, differential: differentialWorking } as const;
+
 const volumeWorking = ({ state }: Meter, { massFlow }: Operation): Working => ({
   id: 'volume-flow',
   symbol: 'q_V',
@@ -158,13 +166,6 @@ const uncertaintyWorking = (budget: Budget, ratio: number): Working => {
     ...(budget.terms.some(({ stated }) => !stated) ? { remark: unstatedRemark(budget) } : {}),
   };
 };
-
-/** One term of a budget; a budget has all of them. */
-function termOf({ terms }: Budget, name: TermName): Term {
-  const term = terms.find((one) => one.name === name);
-  if (term === undefined) throw new Error(`result: expected the term ${name} in the budget, got none`);
-  return term;
-}
 
 /** Which terms the user left to the standard's allowance, and which are left out. */
 function unstatedRemark(budget: Budget): string {

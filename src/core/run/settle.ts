@@ -6,6 +6,7 @@ import type { Upstream } from '../input/upstream.ts';
 import type { Temperature } from '../quantity/kinds.ts';
 import { type Outcome, ok } from '../quantity/outcome.ts';
 import { type Attempt, uncorrected, upstreamFrom } from '../solve/downstream.ts';
+import { knownLoss } from '../solve/equation.ts';
 import { type Solution, solve } from '../solve/solve.ts';
 
 /** What is solved: the meter, the state as written, and the state at any other. */
@@ -23,7 +24,7 @@ export interface Task {
  */
 export function settle({ input, primary, upstream, state, stateAt }: Task): Outcome<Solution> {
   if (upstream.downstream !== true) return solve(input, primary, state);
-  const why = uncorrected(upstream, state);
+  const why = uncorrected(upstream, state, primary);
   if (why !== undefined) {
     const solved = solve(input, primary, state);
     return solved.ok ? ok({ ...solved.value, downstream: why }) : solved;
@@ -39,7 +40,4 @@ export function settle({ input, primary, upstream, state, stateAt }: Task): Outc
 }
 
 /** Permanent pressure loss at maximum flow, Pa. */
-function lossOf({ meter: { primary, geometry }, duty: { maximum } }: Solution): number {
-  const { coefficient, reynolds, differential } = maximum;
-  return differential * primary.lossShare(geometry, coefficient, reynolds);
-}
+const lossOf = ({ meter, duty: { maximum } }: Solution): number => knownLoss(meter, maximum);

@@ -14,9 +14,9 @@ import type { AbsolutePressure, PressureDifference, Temperature } from '../quant
 import { gather, type Outcome, ok } from '../quantity/outcome.ts';
 import { tagOf } from '../result/refuse.ts';
 import { type Attempt, type Correction, uncorrected, upstreamFrom } from '../solve/downstream.ts';
-import { type Meter, meterOf, type Operation } from '../solve/equation.ts';
+import { knownLoss, type Meter, meterOf, type Operation } from '../solve/equation.ts';
 import { flowFrom } from '../solve/flow.ts';
-import { hotGeometry } from '../solve/metal.ts';
+import { hotSection } from '../solve/metal.ts';
 import type { Solution } from '../solve/solve.ts';
 import { settle } from './settle.ts';
 
@@ -56,7 +56,7 @@ export function standing(meter: MeterText, index: number, project: Surroundings)
   if (!site.ok || !shape.ok) return gather(site, shape);
   const written = shape.value;
   const element = elementOf(written.element?.kind); // 3 the element, and which fields are its own
-  const input = readMeter(written, element.ok ? element.value.fields : [], materialKeys); // 4 texts to quantities
+  const input = readMeter(written, element.ok ? element.value : { fields: [] }, materialKeys); // 4 texts to quantities
   const upstream = readUpstream(written, site.value);
   const stateAt = (at: Upstream) => stateOn(written, site.value, at);
   const state = upstream.ok ? stateAt(upstream.value) : upstream; // 5 the fluid
@@ -96,7 +96,7 @@ export function flowAt(
   const first = stateOn(written, site, upstream, field);
   if (!first.ok) return first;
   const measured = upstream.temperature;
-  if (measured === undefined || uncorrected(upstream, first.value) !== undefined)
+  if (measured === undefined || uncorrected(upstream, first.value, stands.primary) !== undefined)
     return flowOf(meterWith(stands, first.value), differential);
   const found = upstreamFrom(
     measured,
@@ -117,8 +117,7 @@ function attemptAt(
   const flow = flowOf(meterWith(stands, state), differential);
   if (!flow.ok) return flow;
   const { meter, operation } = flow.value;
-  const loss = differential * meter.primary.lossShare(meter.geometry, operation.coefficient, operation.reynolds);
-  return ok({ value: flow.value, state, loss });
+  return ok({ value: flow.value, state, loss: knownLoss(meter, operation) });
 }
 
 function flowOf(meter: Outcome<Meter>, differential: PressureDifference): Outcome<MomentFlow> {
@@ -128,7 +127,7 @@ function flowOf(meter: Outcome<Meter>, differential: PressureDifference): Outcom
 }
 
 function meterWith({ input, primary, solution }: Standing, state: FluidState): Outcome<Meter> {
-  const geometry = hotGeometry(solution.boreAsMeasured, input, state.temperature);
+  const geometry = hotSection(primary, solution.boreAsMeasured, input, state.temperature);
   return geometry.ok ? ok(meterOf(primary, geometry.value, state)) : geometry;
 }
 

@@ -2,6 +2,7 @@
  * The temperature upstream where it was measured behind the element: a fluid that is throttled changes its temperature.
  * Standard: ISO 5167-1:2003, 5.4.4.1: T1 = T3 + μ_JT Δϖ, with the coefficient at the upstream state. Symbols: theirs; SI.
  */
+import type { Primary } from '../element/contract.ts';
 import type { FluidState } from '../fluid/contract.ts';
 import type { Upstream } from '../input/upstream.ts';
 import type { Temperature } from '../quantity/kinds.ts';
@@ -26,8 +27,8 @@ export interface Correction {
 /** Why a temperature measured downstream stands for that upstream as it is. */
 export interface Uncorrected {
   readonly measured: Temperature;
-  /** No coefficient is known of this fluid, or pressure and temperature are tied on the saturation line. */
-  readonly why: 'no-coefficient' | 'on-saturation-line';
+  /** No coefficient is known of this fluid, no loss of this element, or pressure and temperature are tied on the saturation line. */
+  readonly why: 'no-coefficient' | 'no-loss' | 'on-saturation-line';
 }
 
 export type Downstream = Correction | Uncorrected;
@@ -49,10 +50,12 @@ const LEAST_STEP = 1e-10;
 export function uncorrected(
   { pressure, temperature }: Upstream,
   { jouleThomson, quality, temperature: settled }: FluidState,
+  { lossShare }: Primary,
 ): Uncorrected | undefined {
   const measured = temperature ?? settled;
   if (pressure === undefined || temperature === undefined || quality !== undefined)
     return { measured, why: 'on-saturation-line' };
+  if (lossShare === undefined) return { measured, why: 'no-loss' };
   return jouleThomson === undefined ? { measured, why: 'no-coefficient' } : undefined;
 }
 

@@ -65,6 +65,19 @@ export const meterOf = (primary: Primary, geometry: Geometry, state: FluidState)
   unitFlow: idealFlow(geometry, 1, state.density),
 });
 
+/** Permanent pressure loss of one flow, Pa; undefined where nothing says it. */
+export const lossOf = ({ primary, geometry }: Meter, operation: Operation): number | undefined => {
+  const share = primary.lossShare?.(geometry, operation.coefficient, operation.reynolds);
+  return share === undefined ? undefined : share * operation.differential;
+};
+
+/** The same where an earlier question has made sure of it; its absence is our error. */
+export const knownLoss = (meter: Meter, operation: Operation): number => {
+  const loss = lossOf(meter, operation);
+  if (loss === undefined) throw new Error(`solve: expected a loss of ${meter.primary.name}, got none`);
+  return loss;
+};
+
 /** Mean velocity in a circular section, m/s, of a mass flow in kg/s at a density in kg/m3; `bore` in m. Continuity. */
 export const velocityOf = (massFlow: number, density: number, bore: number): Velocity =>
   ((4 * massFlow) / (Math.PI * density * bore ** 2)) as Velocity; // continuity

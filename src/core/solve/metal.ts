@@ -1,5 +1,5 @@
 /** The metal at the line temperature, and the found bore back at the temperature it will be measured at. */
-import type { Geometry } from '../element/contract.ts';
+import type { Geometry, Primary } from '../element/contract.ts';
 import { grow, growthWorking, materialOf } from '../element/shared/growth.ts';
 import type { MetalInput, MeterInput } from '../input/meter.ts';
 import type { Length, Temperature } from '../quantity/kinds.ts';
@@ -24,16 +24,29 @@ const moved = (length: Length, metal: Metal, from: Temperature, to: Temperature)
 
 /** Pipe and bore at the line temperature. Problem bore-not-below-pipe: no element has a bore as wide as its pipe. */
 export function hotGeometry(bore: Length, input: MeterInput, line: Temperature): Outcome<Geometry> {
-  const geometry = geometryOf(atLine(input.pipe.bore, input.pipe, line), atLine(bore, input.element, line));
+  const geometry = geometryOf(hotPipe(input, line), atLine(bore, input.element, line));
   if (geometry.ratio < 1) return ok(geometry);
   return fail('bore-not-below-pipe', 'element.bore', { bore, pipe: input.pipe.bore });
 }
 
-/** How pipe and bore grew; a metal without a material has no line here. */
-export function metalWorking(input: MeterInput, bore: Length, line: Temperature): readonly Working[] {
+/**
+ * The metal as it stands in the line: a bore in its pipe, or the section that a bar across the pipe counts.
+ * Problems: those of hotGeometry, or of the bar.
+ */
+export function hotSection(primary: Primary, bore: Length | undefined, input: MeterInput, line: Temperature) {
+  if (primary.insertion !== undefined) return primary.insertion.section(hotPipe(input, line));
+  if (bore === undefined) throw new Error(`metal: expected a bore of ${primary.name}, got none`);
+  return hotGeometry(bore, input, line);
+}
+
+/** The pipe's bore at the line temperature. */
+export const hotPipe = ({ pipe }: MeterInput, line: Temperature): Length => atLine(pipe.bore, pipe, line);
+
+/** How pipe and bore grew; a metal without a material has no line here, nor has the bore of an element without one. */
+export function metalWorking(input: MeterInput, bore: Length | undefined, line: Temperature): readonly Working[] {
   const rows = [
     { symbol: 'D', words: 'pipe-bore', length: input.pipe.bore, metal: input.pipe },
-    { symbol: 'd', words: 'element-bore', length: bore, metal: input.element },
+    ...(bore === undefined ? [] : [{ symbol: 'd', words: 'element-bore', length: bore, metal: input.element }]),
   ];
   return rows.flatMap(({ symbol, words, length, metal }) => {
     const material = metal.material === undefined ? undefined : materialOf(metal.material);

@@ -11,14 +11,15 @@ import { differentialFrom } from './differential.ts';
 import type { Downstream } from './downstream.ts';
 import { type Meter, meterOf, type Operation } from './equation.ts';
 import { flowFrom } from './flow.ts';
-import { asMeasured, atLine, hotGeometry } from './metal.ts';
+import { asMeasured, hotPipe, hotSection } from './metal.ts';
 
 /** The flows of a meter; the maximum is always there, given or found. */
 type Duty = Partial<Record<DutyName, Operation>> & Record<'maximum', Operation>;
 
 export interface Solution {
   readonly meter: Meter;
-  readonly boreAsMeasured: Length;
+  /** Absent where the element has no bore. */
+  readonly boreAsMeasured?: Length;
   readonly pipeAsMeasured: Length;
   readonly duty: Readonly<Duty>;
   /** The differential of the span: what was set, or that of the maximum flow. */
@@ -27,11 +28,15 @@ export interface Solution {
   readonly downstream?: Downstream;
 }
 
-/** Solves the unknown of a meter and its other duty points. Problems: those of flow.ts, differential.ts, bore.ts, metal.ts. */
+/**
+ * Solves the unknown of a meter and its other duty points.
+ * Problems: those of flow.ts, differential.ts, bore.ts, metal.ts and of the element; bore-none, an element without one.
+ */
 export function solve(input: MeterInput, primary: Primary, state: FluidState): Outcome<Solution> {
   const first = solveUnknown(input, primary, state);
   if (!first.ok) return first;
-  const { meter, boreAsMeasured, maximum } = first.value;
+  const { maximum, ...found } = first.value;
+  const { meter } = found;
   const span = input.differential ?? maximum.differential;
   const duty: Duty = { maximum };
   for (const name of ['normal', 'minimum'] as const) {
@@ -41,33 +46,35 @@ export function solve(input: MeterInput, primary: Primary, state: FluidState): O
     if (!operation.ok) return operation;
     duty[name] = operation.value;
   }
-  return ok({ meter, boreAsMeasured, pipeAsMeasured: input.pipe.bore, duty, span });
+  return ok({ ...found, pipeAsMeasured: input.pipe.bore, duty, span });
 }
 
 interface First {
   readonly meter: Meter;
-  readonly boreAsMeasured: Length;
+  readonly boreAsMeasured?: Length;
   readonly maximum: Operation;
 }
 
 function solveUnknown(input: MeterInput, primary: Primary, state: FluidState): Outcome<First> {
   if (input.find === 'bore') return findBore(input, primary, state);
-  const bore = known(input.element.bore, 'element.bore');
-  const geometry = hotGeometry(bore, input, state.temperature);
+  const boreAsMeasured = primary.insertion === undefined ? known(input.element.bore, 'element.bore') : undefined;
+  const geometry = hotSection(primary, boreAsMeasured, input, state.temperature);
   if (!geometry.ok) return geometry;
   const meter = meterOf(primary, geometry.value, state);
   const maximum =
     input.find === 'flow'
       ? flowFrom(known(input.differential, 'differential'), meter)
       : operate(known(input.duty.maximum, 'duty.maximum'), meter, 'maximum', 0);
-  return maximum.ok ? ok({ meter, boreAsMeasured: bore, maximum: maximum.value }) : maximum;
+  if (!maximum.ok) return maximum;
+  return ok({ meter, maximum: maximum.value, ...(boreAsMeasured === undefined ? {} : { boreAsMeasured }) });
 }
 
 function findBore(input: MeterInput, primary: Primary, state: FluidState): Outcome<First> {
+  if (primary.insertion !== undefined) return fail('bore-none', 'find');
   const massFlow = massFlowOf(known(input.duty.maximum, 'duty.maximum'), state, 'duty.maximum');
   if (!massFlow.ok) return massFlow;
   const line = state.temperature;
-  const pipe = atLine(input.pipe.bore, input.pipe, line);
+  const pipe = hotPipe(input, line);
   const found = boreFrom(massFlow.value, known(input.differential, 'differential'), pipe, primary, state);
   if (!found.ok) return found;
   const { geometry, operation } = found.value;

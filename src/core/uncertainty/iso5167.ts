@@ -1,6 +1,7 @@
 /**
  * Uncertainty of the flow rate by ISO 5167-1:2003, 8.2.2.1, Eq (3): relative, expanded, at 95 %; additive parts of C
- * are summed before the squares. What the user does not state takes the standard's allowance (pipe, bore) or is left out.
+ * are summed before the squares. What the user does not state takes the standard's allowance (pipe, bore) or is left out;
+ * a bar across the pipe has no bore and no allowance for its pipe.
  */
 import type { Condition, Part } from '../element/contract.ts';
 import { exponentOf } from '../element/shared/expansibility.ts';
@@ -36,8 +37,19 @@ export interface Budget {
   readonly open: readonly Open[];
 }
 
-/** A term that is not stated, or a limit beyond which the standard gives no uncertainty of C. */
-export type Open = 'differential' | 'density' | 'reynolds-pipe' | 'straight-length';
+/** A term that is not stated, or a limit beyond which nothing says the uncertainty of C. */
+export type Open =
+  | 'coefficient'
+  | 'expansibility'
+  | 'pipe'
+  | 'differential'
+  | 'density'
+  | 'reynolds-pipe'
+  | 'straight-length';
+
+/** Whether the budget says anything: one whose terms are all open is no uncertainty of nothing. */
+export const isKnown = ({ terms, open }: Budget): boolean =>
+  terms.some(({ percent: own }) => own > 0) || open.length === 0;
 
 /** Conditions of one operation for limits and uncertainties. */
 export const conditionOf = ({ state }: Meter, { reynolds, differential }: Operation): Condition => {
@@ -56,29 +68,52 @@ export function flowUncertainty(
 ): Budget {
   const { primary, geometry, state } = meter;
   const condition = conditionOf(meter, operation);
-  const coefficientParts = [...primary.coefficientUncertainty(geometry, condition), ...extra];
-  const b4 = geometry.ratio ** 4;
-  const epsilon = state.expands ? primary.expansibilityUncertainty(geometry, condition).percent : 0;
+  const own = primary.coefficientUncertainty(geometry, condition);
+  const coefficientParts = [...own, ...extra];
+  const coefficient = coefficientParts.reduce((sum, part) => sum + part.percent, 0);
+  const epsilon = state.expands ? primary.expansibilityUncertainty(geometry, condition)?.percent : 0;
   const terms = [
-    term(
-      'C',
-      coefficientParts.reduce((sum, part) => sum + part.percent, 0),
-      1,
-      true,
-    ),
-    term('epsilon', epsilon, 1, true),
-    term('pipe', percent(stated.pipe) ?? PIPE_ALLOWANCE, (2 * b4) / (1 - b4), stated.pipe !== undefined), // Eq (3)
-    term('bore', percent(stated.bore) ?? BORE_ALLOWANCE, 2 / (1 - b4), stated.bore !== undefined), // Eq (3)
+    term('C', coefficient, 1, own.length > 0),
+    term('epsilon', epsilon ?? 0, 1, epsilon !== undefined),
+    ...metalTerms(meter, stated),
     term('differential', differentialPercent(stated, operation, span), 0.5, stated.differential !== undefined), // Eq (3)
     term('density', percent(stated.density) ?? 0, 0.5, stated.density !== undefined), // Eq (3)
   ];
   const squares = terms.reduce((sum, { percentOfFlow }) => sum + percentOfFlow ** 2, 0); // Eq (3)
-  const open = terms.flatMap(({ name, stated: known }): Open[] =>
-    !known && (name === 'differential' || name === 'density') ? [name] : [],
-  );
+  const open = openTerms(meter, terms);
   const limit = primary.limits(geometry, 0).find(({ id }) => id === 'reynolds-pipe');
   if (limit !== undefined && !isInside(operation.reynolds, limit)) open.push('reynolds-pipe');
   return { expandedPercent: Math.sqrt(squares), terms, coefficientParts, open };
+}
+
+/** Pipe and bore; only the pipe where there is no bore. */
+function metalTerms({ primary: { insertion }, geometry }: Meter, stated: StatedUncertainty): readonly Term[] {
+  if (insertion !== undefined) {
+    const sensitivity = insertion.pipeSensitivity(geometry.pipe);
+    return [term('pipe', percent(stated.pipe) ?? 0, sensitivity, stated.pipe !== undefined)];
+  }
+  const b4 = geometry.ratio ** 4;
+  return [
+    term('pipe', percent(stated.pipe) ?? PIPE_ALLOWANCE, (2 * b4) / (1 - b4), stated.pipe !== undefined), // Eq (3)
+    term('bore', percent(stated.bore) ?? BORE_ALLOWANCE, 2 / (1 - b4), stated.bore !== undefined), // Eq (3)
+  ];
+}
+
+/** What a term is called that is not stated; an allowance stands in for those that are not named here. */
+const OPEN: Readonly<Partial<Record<TermName, Open>>> = {
+  C: 'coefficient',
+  epsilon: 'expansibility',
+  differential: 'differential',
+  density: 'density',
+};
+
+/** The terms that are left out for want of a figure. */
+function openTerms({ primary }: Meter, terms: readonly Term[]): Open[] {
+  const names = primary.insertion === undefined ? OPEN : { ...OPEN, pipe: 'pipe' as const };
+  return terms.flatMap(({ name, stated }) => {
+    const open = stated ? undefined : names[name];
+    return open === undefined ? [] : [open];
+  });
 }
 
 const term = (name: TermName, percentage: number, sensitivity: number, stated: boolean): Term => ({

@@ -36,7 +36,7 @@ export function FlowChart({ chart, labels, width, height, print = false }: FlowC
           </p>
         ))}
         <p>
-          {chart.summary} {labels.band}
+          {chart.summary} {chart.banded && labels.band}
         </p>
       </figcaption>
       <Twin chart={chart} labels={labels} />

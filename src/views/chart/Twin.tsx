@@ -24,9 +24,9 @@ export function Twin({ chart, labels }: { readonly chart: Chart; readonly labels
           <tr>
             <th scope="col">{`Δp / ${chart.differentialUnit}`}</th>
             <th scope="col">{`q / ${chart.flowUnit}`}</th>
-            <th scope="col">{labels.low}</th>
-            <th scope="col">{labels.high}</th>
-            <th scope="col">{labels.limits}</th>
+            {chart.banded && <th scope="col">{labels.low}</th>}
+            {chart.banded && <th scope="col">{labels.high}</th>}
+            {chart.limited && <th scope="col">{labels.limits}</th>}
           </tr>
         </thead>
         <tbody>
@@ -34,16 +34,17 @@ export function Twin({ chart, labels }: { readonly chart: Chart; readonly labels
             <tr key={row.differential}>
               <th scope="row">{plain(row.differential)}</th>
               <td>{plain(row.flow)}</td>
-              <td>{plain(row.low)}</td>
-              <td>{plain(row.high)}</td>
-              <td>{row.name}</td>
+              {chart.banded && <td>{plain(row.low)}</td>}
+              {chart.banded && <td>{plain(row.high)}</td>}
+              {chart.limited && <td>{row.name}</td>}
             </tr>
           ))}
           {chart.duty.map((duty) => (
             <tr key={duty.name}>
               <th scope="row">{plain(duty.differential)}</th>
               <td>{plain(duty.flow)}</td>
-              <td colSpan={3}>{duty.label}</td>
+              {/* as wide as the columns above leave; alone where there are none */}
+              <td colSpan={Math.max(1, (chart.banded ? 2 : 0) + (chart.limited ? 1 : 0))}>{duty.label}</td>
             </tr>
           ))}
         </tbody>

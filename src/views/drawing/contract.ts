@@ -26,8 +26,9 @@ export interface Section {
   readonly tappings: readonly Tapping[];
   /** The edge that sets the bore. */
   readonly edge: Point;
-  /** Largest radius of the metal. */
+  /** Largest radius of the metal; below the axis another where it differs. */
   readonly outside: number;
+  readonly below?: number;
 }
 
 /** A dimension on the sheet. Radii and lengths in m of the section; `row` counts dimension lines outwards. */

@@ -25,8 +25,13 @@ export interface PictureLayout {
   readonly below: number;
 }
 
-/** Layout of the picture at a width; the pipe runs out of the picture at both ends. */
-export function pictureLayout(shape: Shape, dimensions: readonly DimensionRow[], width: number): PictureLayout {
+/** Layout of the picture at a width, with or without the head lines; the pipe runs out of the picture at both ends. */
+export function pictureLayout(
+  shape: Shape,
+  dimensions: readonly DimensionRow[],
+  width: number,
+  headed = true,
+): PictureLayout {
   const compact = width < compactBelow;
   const draft = draftOf(shape.element);
   const wanted = draft.reach(shape, compact);
@@ -37,9 +42,9 @@ export function pictureLayout(shape: Shape, dimensions: readonly DimensionRow[],
   const originX = margin - from * factor;
   const reach = { from: -(originX + 6) / factor, to: (width - originX + 6) / factor };
   const section = draft.section(shape, dimensions, reach);
-  const band = { top: above, bottom: above + (compact ? 84 : 108) };
+  const band = headed ? { top: above, bottom: above + (compact ? 84 : 108) } : { top: 0, bottom: 0 };
   const originY = band.bottom + between + section.outside * factor;
-  const below = originY + section.outside * factor;
+  const below = originY + (section.below ?? section.outside) * factor;
   return {
     compact,
     width,

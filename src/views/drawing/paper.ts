@@ -43,11 +43,11 @@ export interface SheetLayout {
 const rowsOf = (measures: readonly Measure[], sign: 1 | -1): number =>
   Math.max(0, ...measures.map((measure) => (measure.kind === 'length' ? sign * measure.row : 0)));
 
-function fitted(shape: Shape, draft: Draft, outside: number, rows: number) {
+function fitted(shape: Shape, draft: Draft, across: number, rows: number) {
   const wanted = draft.sheetReach(shape);
   const width = paper.width - 2 * side - (draft.edgeDetail ? detailWidth + 4 : 0);
   const height = paper.height - captionHeight - 3 - rows * paper.row;
-  const largest = Math.min(width / (wanted.to - wanted.from), height / (2 * outside)) / 1000;
+  const largest = Math.min(width / (wanted.to - wanted.from), height / across) / 1000;
   const [drawn, real] = statedScale(largest);
   const factor = (1000 * drawn) / real;
   const spare = width / factor - (wanted.to - wanted.from);
@@ -62,13 +62,14 @@ export function sheetLayout(shape: Shape, rows: readonly DimensionRow[], labels:
   const draft = draftOf(shape.element);
   const printed = { pipe: labels.pipe, bore: labels.bore };
   const wanted = draft.sheetReach(shape);
-  const { outside } = draft.section(shape, rows, wanted);
+  const { outside, below = outside } = draft.section(shape, rows, wanted);
+  const across = outside + below;
   const trial = draft.measures(shape, rows, wanted, printed);
   const [up, down] = [rowsOf(trial, 1), rowsOf(trial, -1)];
-  const { factor, stated, reach, originX } = fitted(shape, draft, outside, up + down);
+  const { factor, stated, reach, originX } = fitted(shape, draft, across, up + down);
   const beyond = 3 / factor; // the ends are cut by break lines
   const section = draft.section(shape, rows, { from: reach.from - beyond, to: reach.to + beyond });
-  const free = paper.height - captionHeight - (up + down) * paper.row - 2 * outside * factor;
+  const free = paper.height - captionHeight - (up + down) * paper.row - across * factor;
   const originY = free / 2 + up * paper.row + outside * factor;
   return {
     section,
@@ -77,7 +78,7 @@ export function sheetLayout(shape: Shape, rows: readonly DimensionRow[], labels:
     scale: { factor, originX, originY },
     stated,
     above: originY - outside * factor,
-    below: originY + outside * factor,
+    below: originY + below * factor,
     edgeDetail: draft.edgeDetail,
   };
 }

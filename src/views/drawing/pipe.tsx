@@ -11,22 +11,24 @@ import type { PipeLabels } from './words.ts';
 
 interface PipeDrawingProps {
   readonly shape: Shape;
-  readonly heads: Heads;
+  /** The head lines above the pipe, where they are known. */
+  readonly heads?: Heads | undefined;
   readonly labels: PipeLabels;
   /** Width in px; below 640 px the picture drops the labels that have no room. */
   readonly width: number;
   /** Dimensions of the element, where the drawing follows them. */
   readonly dimensions?: readonly DimensionRow[];
   /** Shows a handle on the bore's edge, and is told the diameter ratio that it asks for. */
-  readonly onPullBore?: (ratio: number) => void;
+  readonly onPullBore?: ((ratio: number) => void) | undefined;
 }
 
 const none: readonly DimensionRow[] = [];
 
 export function PipeDrawing({ shape, heads, labels, width, dimensions = none, onPullBore }: PipeDrawingProps) {
   const id = useId();
-  const layout = useMemo(() => pictureLayout(shape, dimensions, width), [shape, dimensions, width]);
-  const lines = useMemo(() => headLines(heads, shape, layout), [heads, shape, layout]);
+  const headed = heads !== undefined;
+  const layout = useMemo(() => pictureLayout(shape, dimensions, width, headed), [shape, dimensions, width, headed]);
+  const lines = useMemo(() => heads && headLines(heads, shape, layout), [heads, shape, layout]);
   const { height, section, scale, compact } = layout;
   return (
     <figure className={styles.figureBox}>
@@ -42,7 +44,7 @@ export function PipeDrawing({ shape, heads, labels, width, dimensions = none, on
         <title id={`${id}t`}>{labels.title}</title>
         <desc id={`${id}d`}>{labels.description}</desc>
         <PipeBody layout={layout} />
-        <HeadBand heads={heads} lines={lines} layout={layout} labels={labels} />
+        {heads && lines && <HeadBand heads={heads} lines={lines} layout={layout} labels={labels} />}
         <PipeTexts shape={shape} layout={layout} labels={labels} />
         {onPullBore ? (
           <Pull
@@ -56,19 +58,21 @@ export function PipeDrawing({ shape, heads, labels, width, dimensions = none, on
           />
         ) : null}
       </svg>
-      <Legend labels={labels} />
+      <Legend labels={labels} headed={headed} />
     </figure>
   );
 }
 
 /** What is computed and what is to scale. */
-function Legend({ labels }: { readonly labels: PipeLabels }) {
+function Legend({ labels, headed }: { readonly labels: PipeLabels; readonly headed: boolean }) {
   return (
     <figcaption className={styles.legend}>
-      <span>
-        <span className={styles.bullet} aria-hidden="true" />
-        {labels.legend}
-      </span>
+      {headed && (
+        <span>
+          <span className={styles.bullet} aria-hidden="true" />
+          {labels.legend}
+        </span>
+      )}
       <span>{labels.scale}</span>
     </figcaption>
   );

@@ -1,4 +1,5 @@
 /** The drawn elements, by the kind that begins an element's code. */
+import { averagingPitot } from './averaging-pitot.ts';
 import type { Draft } from './contract.ts';
 import { isa1932Nozzle } from './isa-1932-nozzle.ts';
 import { longRadiusNozzle } from './long-radius-nozzle.ts';
@@ -12,6 +13,7 @@ const drafts: Readonly<Record<string, Draft>> = {
   'long-radius-nozzle': longRadiusNozzle,
   'venturi-nozzle': venturiNozzle,
   'venturi-tube': venturiTube,
+  'averaging-pitot': averagingPitot,
 };
 
 /** Kinds that can be drawn. */

@@ -2,6 +2,7 @@
 import { fromSI } from '../../core/quantity/units.ts';
 import type { Solved } from '../../core/result/record.ts';
 import { aboveReynolds, belowReynolds, chartSummary, dutyAt, outsideRange } from '../words/charts.ts';
+import { rulesOf } from '../words/elements.ts';
 import { type Context, flowOf, maximumOf } from './context.ts';
 import type { Chart, ChartPoint, DutyRow } from './model.ts';
 import { flowRole } from './units.ts';
@@ -23,6 +24,7 @@ export function chartOf(at: Context, result: Solved, duty: readonly DutyRow[]): 
     };
   });
   const outside = outsideRanges(result);
+  const limited = result.reynoldsLimits.source !== undefined;
   return {
     points,
     duty: duty.map(({ name, label, cells }) => ({
@@ -33,6 +35,8 @@ export function chartOf(at: Context, result: Solved, duty: readonly DutyRow[]): 
     })),
     differentialUnit: differential.print,
     flowUnit: unit.print,
+    banded: result.curve.some((point) => point.expanded_percent > 0),
+    limited,
     outside: outside.map(({ from, to, label }) => ({
       from: fromSI(from, differential),
       to: fromSI(to, differential),
@@ -43,6 +47,7 @@ export function chartOf(at: Context, result: Solved, duty: readonly DutyRow[]): 
       outside.map(({ from, to, label }) =>
         outsideRange(at.print.figure(from, 'differential'), at.print.figure(to, 'differential'), label),
       ),
+      limited ? rulesOf(result.element) : undefined,
     ),
   };
 }
@@ -57,13 +62,19 @@ interface Range {
 const VISIBLE = 0.002;
 
 /** The differentials below and above the Reynolds limits, as far as the span reaches into them. */
-function outsideRanges({ reynoldsLimits: limits, span_Pa, points }: Solved): readonly Range[] {
-  const { minDifferential_Pa: low, maxDifferential_Pa: high } = limits;
+function outsideRanges({ element, reynoldsLimits: limits, span_Pa, points, curve }: Solved): readonly Range[] {
+  const rules = rulesOf(element);
+  const { maxDifferential_Pa: high } = limits;
   const least = Math.min(...Object.values(points).map((point) => point.differential_Pa));
   const most = Math.max(span_Pa, ...Object.values(points).map((point) => point.differential_Pa));
+  const low = limits.minDifferential_Pa ?? (isBelow(limits.min, curve) ? most : undefined);
   const seen = low !== undefined && (low > VISIBLE * span_Pa || least < low);
   return [
-    ...(seen ? [{ from: 0, to: Math.min(low, most), label: belowReynolds }] : []),
-    ...(high !== undefined && high < most ? [{ from: high, to: most, label: aboveReynolds }] : []),
+    ...(seen ? [{ from: 0, to: Math.min(low, most), label: belowReynolds(rules) }] : []),
+    ...(high !== undefined && high < most ? [{ from: high, to: most, label: aboveReynolds(rules) }] : []),
   ];
 }
+
+/** The whole curve below a least Reynolds number that no differential reaches. */
+const isBelow = (least: number | undefined, curve: Solved['curve']): boolean =>
+  least !== undefined && curve.every(({ reynoldsPipe }) => reynoldsPipe < least);

@@ -5,7 +5,7 @@ import type { Measure } from '../../core/quantity/units.ts';
 import type { PointRecord, Solved } from '../../core/result/record.ts';
 import type { Role } from '../words/print.ts';
 import type { Value } from './model.ts';
-import { asWritten, type Printer, printer } from './numbers.ts';
+import { asWritten, type Printer, plainNumber, printer } from './numbers.ts';
 import { belongs, displayUnits, flowMeasures, flowRole, written } from './units.ts';
 
 export interface Context extends Printer {
@@ -15,6 +15,8 @@ export interface Context extends Printer {
   readonly given: (text: unknown, measures: readonly Measure[], si: number, role: Role) => Value;
   /** What the user wrote and could be read, in the display; absent where there is nothing. */
   readonly stated: (text: unknown, measures: readonly Measure[], role: Role) => Value | undefined;
+  /** A plain number as the user wrote it; absent where there is none. */
+  readonly number: (text: unknown) => Value | undefined;
   /** The flow of a point in the measure and unit of this meter. */
   readonly flow: (point: PointRecord) => Value;
   /** The flow as the user wrote it, where it is at home in the display. */
@@ -45,6 +47,7 @@ export function contextOf(meter: MeterText, project: Project): Context {
       const read = written(from, measures);
       return read === undefined ? undefined : (own(read) ?? value(read.si, as));
     },
+    number: plainNumber,
     flow,
     givenFlow: (from, point) => own(written(from, flowMeasures)) ?? flow(point),
   };

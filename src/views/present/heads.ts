@@ -4,7 +4,9 @@ import type { HeadPoint, Solved } from '../../core/result/record.ts';
 import type { Context } from './context.ts';
 import type { Heads } from './model.ts';
 
-export function headsOf(at: Context, { heads }: Solved): Heads {
+/** None where the loss is not known. */
+export function headsOf(at: Context, { heads }: Solved): Heads | undefined {
+  if (heads.length === 0) return undefined;
   const { head } = at.units;
   const station = (name: string): HeadPoint => {
     const found = heads.find((point) => point.station === name);

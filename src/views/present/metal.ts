@@ -1,7 +1,7 @@
 /** Pipe and element: as measured, at the line temperature, and what stands around them. */
 import { MEASURED_AT } from '../../core/document/defaults.ts';
 import type { Solved } from '../../core/result/record.ts';
-import { openingWord } from '../words/elements.ts';
+import { coefficientWords, openingWord } from '../words/elements.ts';
 import { materialLabel } from '../words/materials.ts';
 import { measuredAt, metalLabels, noGrowth, withMaterial, withSize } from '../words/rows.ts';
 import { figuresOf } from './answer.ts';
@@ -21,18 +21,45 @@ export function pipeRows(at: Context, result: Solved): readonly Row[] {
   ];
 }
 
+/** The element; a bar across the pipe is known by its coefficient and its width. */
 export function metalRows(at: Context, result: Solved): readonly Row[] {
+  const { bore_m: bore, diameterRatio: ratio } = result;
+  return bore === undefined || ratio === undefined ? barRows(at, result) : boreRows(at, result, { bore, ratio });
+}
+
+function barRows(at: Context, result: Solved): readonly Row[] {
   const { element } = at.meter;
+  const { name, symbol } = coefficientWords(result.element);
+  const lines = maximumOf(result).working;
+  const line = lines.find(({ id }) => id === 'C');
+  const expansion = lines.some(({ id }) => id === 'epsilon') ? at.number(element?.expansion) : undefined;
+  return [
+    {
+      id: 'coefficient',
+      label: name,
+      symbol,
+      value: figuresOf(at, result).coefficient,
+      ...(line === undefined ? {} : { cited: cited(line.source) }),
+    },
+    ...optional('bar-width', metalLabels.width, 'w', at.stated(element?.width, ['length'], 'length')),
+    ...optional('expansion-number', metalLabels.expansion, 'a', expansion),
+  ];
+}
+
+/** `hot` are the figures at the line temperature. */
+function boreRows(at: Context, result: Solved, hot: { readonly bore: number; readonly ratio: number }): readonly Row[] {
+  const { element } = at.meter;
+  const { bore } = figuresOf(at, result);
   const opening = openingWord(result.element);
   const ratio = maximumOf(result).working.find(({ id }) => id === 'diameter-ratio');
   return [
-    measured(at, 'bore-as-measured', metalLabels.opening(opening), figuresOf(at, result).bore, element),
-    atLine(at, result, 'element-bore', 'd', metalLabels.atLine(opening), result.bore_m),
+    ...(bore === undefined ? [] : [measured(at, 'bore-as-measured', metalLabels.opening(opening), bore, element)]),
+    atLine(at, result, 'element-bore', 'd', metalLabels.atLine(opening), hot.bore),
     {
       id: 'diameter-ratio',
       label: metalLabels.ratio,
       symbol: 'β',
-      value: at.value(result.diameterRatio, 'ratio'),
+      value: at.value(hot.ratio, 'ratio'),
       ...(ratio === undefined ? {} : { cited: cited(ratio.source), working: ratio.id }),
     },
     ...optional('plate-thickness', metalLabels.plate, 'E', at.stated(element?.plateThickness, ['length'], 'length')),

@@ -2,7 +2,7 @@
 import type { MeterText, Project } from '../../core/document/project.ts';
 import type { MeterResult, Refused, Solved } from '../../core/result/record.ts';
 import { cautions } from '../words/cautions.ts';
-import { elementLabel } from '../words/elements.ts';
+import { coefficientWords, elementLabel, rulesOf } from '../words/elements.ts';
 import { fieldLabel } from '../words/fields.ts';
 import { fluidLabel, phaseWord } from '../words/fluids.ts';
 import { provenanceNotes } from '../words/provenance.ts';
@@ -35,7 +35,7 @@ export function presentMeter(
 
 function refusedMeter(at: Context, result: Refused): PresentedMeter {
   const { service, element } = at.meter;
-  const variant = element?.tappings ?? element?.convergent;
+  const variant = element?.tappings ?? element?.convergent ?? element?.area;
   const kind = textOf(element?.kind);
   return {
     tag: result.tag,
@@ -63,7 +63,8 @@ function solvedMeter(at: Context, result: Solved): PresentedSizing {
     answer: answerOf(at, result),
     under: underOf(at, result),
     found: foundOf(at, result),
-    loss: at.value(maximumOf(result).permanentLoss_Pa, 'loss'),
+    ...lossOf(at, result),
+    coefficient: coefficientWords(result.element),
     fluid: {
       name: fluidLabel(kind, result.state.phase, textOf(at.meter.fluid?.name)),
       phase: phaseWord(result.state.phase),
@@ -74,18 +75,36 @@ function solvedMeter(at: Context, result: Solved): PresentedSizing {
     pipe: pipeRows(at, result),
     metal: metalRows(at, result),
     duty,
-    certainty: certaintyNote([...new Set(Object.values(result.points).flatMap((point) => point.uncertainty.open))]),
+    certainty: certaintyNote(
+      openOf(result),
+      rulesOf(result.element),
+      duty.every(({ cells }) => cells.uncertainty),
+    ),
     checks: checkGroups(at, result),
     working: workingGroups(result),
     dimensions: dimensionRows(at, result),
     straight: straightRows(at, result),
     chart: chartOf(at, result, duty),
-    heads: headsOf(at, result),
     shape: shapeOf(result),
     notes: notesOf(result),
     cautions: cautions({ fluid: kind, phase: result.state.phase }),
   };
 }
+
+/** The permanent loss and the head lines that it makes, where it is known. */
+function lossOf(at: Context, result: Solved): Pick<PresentedSizing, 'loss' | 'heads'> {
+  const { permanentLoss_Pa: loss } = maximumOf(result);
+  const heads = headsOf(at, result);
+  return {
+    ...(loss === undefined ? {} : { loss: at.value(loss, 'loss') }),
+    ...(heads === undefined ? {} : { heads }),
+  };
+}
+
+/** What the uncertainty of any flow leaves out, each once. */
+const openOf = ({ points }: Solved): readonly string[] => [
+  ...new Set(Object.values(points).flatMap((point) => point.uncertainty.open)),
+];
 
 /** Notes for the marks of every source that is shown, and what the file keeps for later. */
 function notesOf(result: Solved): readonly string[] {
@@ -95,18 +114,17 @@ function notesOf(result: Solved): readonly string[] {
   return [...provenanceNotes(cited), ...(unread === '' ? [] : [unreadNote(unread)])];
 }
 
-/** The recovered station of the head lines is where the pressure has recovered. */
+/** The recovered station of the head lines is where the pressure has recovered, where it is more than drawn. */
 function shapeOf(result: Solved): Shape {
-  const recovered = result.heads.find(({ station }) => station === 'recovered');
-  if (recovered === undefined) throw new Error(`expected a recovered station of ${result.tag}, got none`);
+  const recovered = result.heads.find(({ station, computed }) => station === 'recovered' && computed);
   return {
     element: result.element,
     pipe: result.pipe_m,
-    bore: result.bore_m,
-    ratio: result.diameterRatio,
+    bore: result.bore_m ?? result.pipe_m,
+    ratio: result.diameterRatio ?? 1,
     tappingUpstream: result.tappings.upstream_m,
     tappingDownstream: result.tappings.downstream_m,
-    recovery_D: recovered.position_D,
+    recovery_D: recovered?.position_D ?? 0,
   };
 }
 

@@ -5,6 +5,7 @@
 import type { DutyName, Unknown } from '../../core/document/project.ts';
 import type { Seen } from '../../core/quantity/source.ts';
 import type { Solved } from '../../core/result/record.ts';
+import type { CoefficientWords } from '../words/elements.ts';
 import type { Mark } from '../words/provenance.ts';
 import type { Expression } from './formula.ts';
 
@@ -53,11 +54,14 @@ export interface Segment {
 export interface DutyRow {
   readonly name: DutyName;
   readonly label: string; // 'maximum'
-  readonly cells: Readonly<Record<DutyColumn, Value>>;
+  readonly cells: Cells;
   /** Shares of the uncertainty of this flow, largest first. */
   readonly terms: readonly Row[];
   readonly verdict: Verdict;
 }
+/** Loss and uncertainty are absent where nothing says them. */
+export type Cells = Readonly<Record<Exclude<DutyColumn, Untold>, Value> & Partial<Record<Untold, Value>>>;
+type Untold = 'loss' | 'uncertainty';
 export type DutyColumn =
   | 'flow'
   | 'differential'
@@ -134,6 +138,9 @@ export interface Chart {
   }[];
   readonly differentialUnit: string;
   readonly flowUnit: string;
+  /** Whether an uncertainty makes a band round the curve, and whether there are Reynolds limits. */
+  readonly banded: boolean;
+  readonly limited: boolean;
   /** Range of differential outside the Reynolds limits, with its words; empty when the whole curve is inside. */
   readonly outside: readonly { readonly from: number; readonly to: number; readonly label: string }[];
   /** One sentence that says what the chart shows. */
@@ -162,7 +169,7 @@ export interface DimensionRow {
   readonly cited: Cited;
 }
 
-/** Figures that the drawing needs, SI, straight from the result. */
+/** Figures that the drawing needs, SI, straight from the result. A bar across the pipe leaves its bore open: ratio 1. */
 export interface Shape {
   readonly element: string; // words code 'orifice-plate.flange'
   readonly pipe: number;
@@ -170,7 +177,7 @@ export interface Shape {
   readonly ratio: number;
   readonly tappingUpstream: number;
   readonly tappingDownstream: number;
-  readonly recovery_D: number;
+  readonly recovery_D: number; // 0 where nothing says it
 }
 
 export interface PresentedProblem {
@@ -196,7 +203,9 @@ export interface PresentedSizing extends PresentedMeter {
   readonly under: string; // line below the answer: tag, tappings, standard, uncertainty at normal flow
   /** What was found, for the shaded field: bore as measured, differential or flow. */
   readonly found: { readonly value: Value; readonly from: string };
-  readonly loss: Value; // permanent loss at maximum flow
+  readonly loss?: Value; // permanent loss at maximum flow
+  /** The coefficient's symbol and its names. */
+  readonly coefficient: CoefficientWords;
   /** Name and phase of the fluid: 'Water', 'liquid'. */
   readonly fluid: { readonly name: string; readonly phase: string };
   readonly state: readonly Row[];
@@ -205,7 +214,7 @@ export interface PresentedSizing extends PresentedMeter {
   /** Whether a temperature measured downstream leads to the one upstream. */
   readonly throttles: boolean;
   readonly pipe: readonly Row[];
-  readonly metal: readonly Row[]; // the element: bore, ratio, plate
+  readonly metal: readonly Row[]; // the element: bore, ratio, plate; the coefficient of a bar
   readonly duty: readonly DutyRow[];
   /** What the uncertainty leaves out; empty when nothing. */
   readonly certainty: string;
@@ -214,7 +223,8 @@ export interface PresentedSizing extends PresentedMeter {
   readonly dimensions: readonly DimensionRow[];
   readonly straight: readonly StraightRow[];
   readonly chart: Chart;
-  readonly heads: Heads;
+  /** Absent where the loss is not known. */
+  readonly heads?: Heads;
   readonly shape: Shape;
   readonly notes: readonly string[]; // provenance notes and what this version leaves unread
   readonly cautions: readonly string[];

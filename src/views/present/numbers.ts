@@ -28,6 +28,18 @@ export function asWritten({ number, unit, si }: Quantity): Value {
   return printed(number.trim().replace('-', '\u2212').replace(/^\+/, ''), number.trim().replace(/^\+/, ''), unit, si);
 }
 
+/** A plain number digit for digit; one with a power of ten is spelled anew. */
+export function plainNumber(written: unknown): Value | undefined {
+  const text = typeof written === 'number' || typeof written === 'string' ? String(written).trim() : '';
+  const si = Number(text);
+  if (text === '' || !Number.isFinite(si)) return undefined;
+  if (/^\+?(\d+\.?\d*|\.\d+)$/.test(text)) {
+    const number = text.replace(/^\+/, '');
+    return printed(number, number, undefined, si);
+  }
+  return show(si, undefined, { significant: 6, trim: true });
+}
+
 function printed(number: string, plain: string, unit: Unit | undefined, si: number): Value {
   if (unit === undefined) return { number, unit: '', text: number, plain, si };
   return { number, unit: unit.print, text: withUnit(number, unit), plain: `${plain} ${unit.symbol}`, si };

@@ -4,7 +4,7 @@ import type { Solved } from '../../core/result/record.ts';
 import * as words from '../words/sheet.ts';
 import { asPrinted } from './base.ts';
 import type { Context } from './context.ts';
-import type { DutyColumn, DutyRow, PresentedSizing } from './model.ts';
+import type { DutyColumn, DutyRow, PresentedSizing, Value } from './model.ts';
 import { type KeyOf, type SheetRow, sheetRow } from './sources.ts';
 
 export interface DutyTable {
@@ -18,7 +18,9 @@ export interface DutyTable {
   readonly rows: readonly { readonly name: DutyName; readonly label: string; readonly cells: readonly string[] }[];
 }
 
-const columns = Object.keys(words.dutyHeads) as DutyColumn[];
+/** Every column that the flows have figures for. */
+const columnsOf = (rows: readonly DutyRow[]): readonly DutyColumn[] =>
+  (Object.keys(words.dutyHeads) as DutyColumn[]).filter((id) => rows.some((row) => row.cells[id] !== undefined));
 
 /** The fluid and its state; a gauge pressure is followed by the absolute one and the atmosphere it stands on. */
 export function fluidRows(
@@ -83,18 +85,31 @@ export const spanText = (at: Context, { span_Pa, find }: Solved): string =>
   );
 
 /** The flows with one unit a column; the sources are those of the working at maximum flow. */
-export function dutyTable({ duty, working }: PresentedSizing, keyOf: KeyOf): DutyTable {
+export function dutyTable({ duty, working, coefficient }: PresentedSizing, keyOf: KeyOf): DutyTable {
   const lines = working.find(({ id }) => id === 'maximum')?.rows ?? [];
-  const heads = columns.map((id) => {
+  const own = { label: coefficient.head, symbol: coefficient.symbol };
+  const heads = columnsOf(duty).map((id) => {
     const line = lines.find((row) => row.id === words.dutyWorking[id]);
-    return { id, ...words.dutyHeads[id], unit: unitOf(duty, id), key: keyOf(line?.cited) };
+    return {
+      id,
+      ...words.dutyHeads[id],
+      ...(id === 'coefficient' ? own : {}),
+      unit: unitOf(duty, id),
+      key: keyOf(line?.cited),
+    };
   });
   const cell = (row: DutyRow, { id, unit }: (typeof heads)[number]): string =>
-    id === 'uncertainty' ? `±${row.cells[id].text}` : unit === '' ? row.cells[id].text : row.cells[id].number;
+    cellText(row.cells[id], id === 'uncertainty' ? '±' : '', unit);
   return {
     columns: heads.map(({ unit, ...head }) => ({ ...head, measure: measureText(head.id, unit) })),
     rows: duty.map((row) => ({ name: row.name, label: row.label, cells: heads.map((head) => cell(row, head)) })),
   };
+}
+
+/** A figure, with its own unit where the column has none in common; a dash where there is none. */
+function cellText(value: Value | undefined, sign: string, unit: string): string {
+  if (value === undefined) return words.dash;
+  return sign === '' && unit !== '' ? value.number : `${sign}${value.text}`;
 }
 
 const measureText = (id: DutyColumn, unit: string): string =>
@@ -102,6 +117,6 @@ const measureText = (id: DutyColumn, unit: string): string =>
 
 /** The one unit of a column; '' where its rows have none or are written in different ones. */
 function unitOf(rows: readonly DutyRow[], column: DutyColumn): string {
-  const [first, ...more] = new Set(rows.map((row) => row.cells[column].unit));
+  const [first, ...more] = new Set(rows.flatMap((row) => row.cells[column]?.unit ?? []));
   return first === undefined || more.length > 0 ? '' : first;
 }

@@ -14,6 +14,7 @@ export interface SectionText {
   readonly edge: string;
   /** Diameters as measured, in the unit of the caption. */
   readonly pipe: string;
+  /** Empty where the element has no bore. */
   readonly bore: string;
 }
 
@@ -25,16 +26,17 @@ export function sectionText(at: Context, result: Solved, sizing: PresentedSizing
   const unit = at.units.bore.print;
   /** As it is written where that is in the unit of the caption, else rounded. */
   const inUnit = (value: Value): string => (value.unit === unit ? value.number : at.value(value.si, 'bore').number);
+  const { bore } = figuresOf(at, result);
   const pipe = at.given(at.meter.pipe?.bore, ['length'], result.pipeAsMeasured_m, 'bore');
   return {
     caption: sectionWords.caption(unit, measuredText(sizing)),
     title: sectionWords.title(sizing.element),
     description: sizing.answer.map(({ text }) => text).join(''),
     flow,
-    scale,
+    scale: result.bore_m === undefined ? sectionWords.scaleOfPipe : scale,
     edge,
     pipe: inUnit(pipe),
-    bore: inUnit(figuresOf(at, result).bore),
+    bore: bore === undefined ? '' : inUnit(bore),
   };
 }
 
@@ -51,5 +53,6 @@ export function drawnDimensions(at: Context, { dimensions, metal }: PresentedSiz
 /** How the diameters were measured, once where pipe and element agree. */
 function measuredText({ pipe, metal }: PresentedSizing): string {
   const [first = '', second = ''] = [pipe, metal].map((rows) => rows.find(({ note }) => note !== undefined)?.note);
+  if (second === '') return sectionWords.pipeAlone(first);
   return first === second ? sectionWords.both(first) : sectionWords.apart(first, second);
 }

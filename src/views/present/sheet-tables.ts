@@ -53,7 +53,7 @@ export function termTable({ duty }: PresentedSizing, written: UncertaintyText | 
       { label: words.stated, cells: [...[...terms.keys()].map(stated), words.dash] },
       ...duty.map((row) => ({
         label: words.flowAt(row.name),
-        cells: [...[...terms.keys()].map((id) => cell(row, id)), row.cells.uncertainty.text],
+        cells: [...[...terms.keys()].map((id) => cell(row, id)), row.cells.uncertainty?.text ?? words.dash],
       })),
     ],
   };

@@ -2,7 +2,7 @@
 import type { MeterText, Project, TraverseText } from '../../core/document/project.ts';
 import type { MeterResult, Results, Solved } from '../../core/result/record.ts';
 import { cautions } from '../words/cautions.ts';
-import { openingWord } from '../words/elements.ts';
+import { type Opening, openingWord } from '../words/elements.ts';
 import { fieldLabel } from '../words/fields.ts';
 import { computedWith, notCurrent, sheetWords } from '../words/sheet.ts';
 import { contextOf } from './context.ts';
@@ -70,7 +70,7 @@ export interface SizingSheet {
   readonly pipe: readonly SheetRow[];
   readonly element: readonly SheetRow[];
   readonly span: string; // 'span of the differential 250 mbar'
-  readonly opening: string; // 'bore' or 'throat'
+  readonly opening: Opening;
   readonly duty: DutyTable;
   readonly terms: TermTable;
   readonly checks: readonly CheckBlock[];

@@ -33,7 +33,7 @@ export function workingRow({ id, symbol, formula, given, value, unit, source, re
   const numbers = Object.fromEntries(given.map((item) => [item.symbol, givenFigure(item).number]));
   return {
     id,
-    title: workingTitle(id),
+    title: workingTitle(symbol === 'K' ? 'K' : id),
     symbol: parseFormula(symbol),
     ...(tree === undefined ? {} : { formula: tree, substituted: substitute(tree, numbers) }),
     value: figure(value, unit),

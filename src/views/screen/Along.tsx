@@ -2,6 +2,7 @@
 import { Fragment } from 'react';
 import { PipeDrawing } from '../drawing/pipe.tsx';
 import type { PresentedProblem, PresentedSizing } from '../present/model.ts';
+import { openingWord } from '../words/elements.ts';
 import styles from './Along.module.css';
 import { useCommands, useWorkbenchStore } from './binding.tsx';
 import buttons from './button.module.css';
@@ -39,6 +40,7 @@ export function Along({ selected }: { readonly selected: SelectedMeter }) {
 
 function Drawn({ sizing, width }: { readonly sizing: PresentedSizing; readonly width: number }) {
   const store = useWorkbenchStore();
+  const hasBore = openingWord(sizing.shape.element) !== 'none';
   return (
     <PipeDrawing
       shape={sizing.shape}
@@ -46,7 +48,7 @@ function Drawn({ sizing, width }: { readonly sizing: PresentedSizing; readonly w
       dimensions={sizing.dimensions}
       labels={drawingLabels(sizing)}
       width={width}
-      onPullBore={(ratio) => pullTo(ratio, store.getState())}
+      onPullBore={hasBore ? (ratio) => pullTo(ratio, store.getState()) : undefined}
     />
   );
 }

@@ -1,5 +1,7 @@
 /** Moves between fields. Each input of the form carries its path in data-field. */
 const FIELDS = '[data-field]';
+/** The buttons that say what is to be found. */
+const UNKNOWNS = '[data-unknown]';
 
 const all = (): HTMLElement[] => [...document.querySelectorAll<HTMLElement>(FIELDS)];
 
@@ -20,7 +22,8 @@ function enter(field: HTMLElement): void {
 export function focusField(path: string): boolean {
   const field =
     all().find(({ dataset }) => dataset.field === path) ??
-    all().find(({ dataset }) => dataset.field?.startsWith(`${path}.`));
+    all().find(({ dataset }) => dataset.field?.startsWith(`${path}.`)) ??
+    (path === 'find' ? (document.querySelector<HTMLElement>(UNKNOWNS) ?? undefined) : undefined);
   if (field === undefined) return false;
   enter(field);
   return true;

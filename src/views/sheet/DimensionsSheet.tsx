@@ -1,5 +1,6 @@
 /** For the workshop and the pipework: dimensions with tolerances, straight lengths, and what is measured on receipt. */
 import type { SizingSheet } from '../present/sheet.ts';
+import type { Opening } from '../words/elements.ts';
 import { checksAre, inspection, sheetWords, straightHeads } from '../words/sheet.ts';
 import { Block } from './Block.tsx';
 import styles from './content.module.css';
@@ -14,7 +15,7 @@ export function DimensionsSheet({ sheet, place }: { readonly sheet: SizingSheet;
     <Page head={head} type={sheetWords.dimensionsSheet} verdict={checksAre(meter.verdict.words)} place={place}>
       <p className={styles.answer}>{sheet.answer}</p>
       <div className={styles.halves}>
-        <Figures title={sheetWords.dimensions} rows={dimensions} heads={[]} />
+        {dimensions.length > 0 && <Figures title={sheetWords.dimensions} rows={dimensions} heads={[]} />}
         <Figures
           title={sheetWords.straight}
           rows={straight}
@@ -27,7 +28,7 @@ export function DimensionsSheet({ sheet, place }: { readonly sheet: SizingSheet;
 }
 
 /** Blank boxes, five to a line where diameters are measured. */
-function Inspection({ opening }: { readonly opening: string }) {
+function Inspection({ opening }: { readonly opening: Opening }) {
   return (
     <Block title={inspection.title}>
       <table className={`${tables.table} ${tables.blank}`}>
@@ -42,7 +43,7 @@ function Inspection({ opening }: { readonly opening: string }) {
               <td />
             </tr>
           ))}
-          {inspection.others.map((label) => (
+          {inspection.others(opening).map((label) => (
             <tr key={label}>
               <th scope="row">{label}</th>
               <td colSpan={5} />

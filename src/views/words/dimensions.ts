@@ -2,6 +2,7 @@
 import { catalogue } from './catalogue.ts';
 
 export const dimensionNames: Readonly<Record<string, string>> = {
+  'bar-width': 'Width of the bar',
   'bevel-angle': 'Bevel angle',
   'bore-roundness': 'Bore, deviation of a diameter from the mean',
   'convergent-angle': 'Convergent angle',

@@ -8,9 +8,19 @@ export interface Choice {
 export interface ElementChoice {
   readonly kind: string;
   readonly label: string;
-  /** What the smallest section is called: 'bore' of a plate, 'throat' of a nozzle or Venturi tube. */
-  readonly opening: 'bore' | 'throat';
-  readonly fields: readonly { readonly name: string; readonly label: string; readonly choices: readonly Choice[] }[];
+  readonly opening: Opening;
+  readonly fields: readonly ChoiceOfField[];
+}
+
+/** What the smallest section is called: 'bore' of a plate, 'throat' of a nozzle or Venturi tube; a bar has none. */
+export type Opening = 'bore' | 'throat' | 'none';
+
+interface ChoiceOfField {
+  readonly name: string;
+  readonly label: string;
+  readonly choices: readonly Choice[];
+  /** Words for leaving it open, where it may be. */
+  readonly open?: string;
 }
 
 const tappings: readonly Choice[] = [
@@ -23,6 +33,11 @@ const convergents: readonly Choice[] = [
   { value: 'as-cast', label: 'As cast' },
   { value: 'machined', label: 'Machined' },
   { value: 'fabricated', label: 'Fabricated' },
+];
+
+const areas: readonly Choice[] = [
+  { value: 'pipe', label: 'Whole pipe' },
+  { value: 'clear', label: 'Less the bar' },
 ];
 
 export const elementChoices: readonly ElementChoice[] = [
@@ -41,6 +56,12 @@ export const elementChoices: readonly ElementChoice[] = [
     opening: 'throat',
     fields: [{ name: 'convergent', label: 'Convergent', choices: convergents }],
   },
+  {
+    kind: 'averaging-pitot',
+    label: 'Averaging pitot',
+    opening: 'none',
+    fields: [{ name: 'area', label: 'Area of K', choices: areas, open: 'not stated' }],
+  },
 ];
 
 const variants: Readonly<Record<string, string>> = {
@@ -50,6 +71,8 @@ const variants: Readonly<Record<string, string>> = {
   'as-cast': 'as-cast convergent',
   machined: 'machined convergent',
   fabricated: 'fabricated convergent',
+  pipe: 'K on the pipe area',
+  clear: 'K on the clear area',
 };
 
 const choiceOf = (code: string): ElementChoice | undefined =>
@@ -69,6 +92,22 @@ export function variantWords(code: string): string | undefined {
 }
 
 /** What the smallest section of the element is called. */
-export function openingWord(code: string): 'bore' | 'throat' {
+export function openingWord(code: string): Opening {
   return choiceOf(code)?.opening ?? 'bore';
 }
+
+/** What holds the limits of the element: its standard, or the sheet of its maker. */
+export type Rules = 'standard' | 'maker’s sheet';
+export const rulesOf = (code: string): Rules => (openingWord(code) === 'none' ? 'maker’s sheet' : 'standard');
+
+/** The coefficient in the equation of the flow: its symbol, its name, and its name at the head of a column. */
+export interface CoefficientWords {
+  readonly symbol: 'C' | 'K';
+  readonly name: string;
+  readonly head: string;
+}
+
+export const coefficientWords = (code: string): CoefficientWords =>
+  openingWord(code) === 'none'
+    ? { symbol: 'K', name: 'Flow coefficient', head: 'Coefficient' }
+    : { symbol: 'C', name: 'Discharge coefficient', head: 'Discharge' };

@@ -1,13 +1,16 @@
 /** Findings on fluid and flow. `{where}` stands for the flow at which it was found. */
+import { catalogue } from './catalogue.ts';
 import type { Detail, FindingWords } from './detail.ts';
 
 const held = (detail: Detail): string =>
   detail.has('heldAt') ? `; the coefficient was held at that of ${detail.figure('heldAt', 'reynolds')}` : '';
 
-const uncorrected = (detail: Detail): string =>
-  detail.text('why') === 'no-coefficient'
-    ? 'no Joule–Thomson coefficient is known of this fluid'
-    : 'on the saturation line it is tied to the pressure';
+const whyUncorrected: Readonly<Record<string, string>> = {
+  'no-coefficient': 'no Joule–Thomson coefficient is known of this fluid',
+  'no-loss': 'the permanent loss is not known',
+  'on-saturation-line': 'on the saturation line it is tied to the pressure',
+};
+const uncorrected = (detail: Detail): string => catalogue('reason', whyUncorrected)(detail.text('why'));
 
 const saturation = (word: string, side: string): FindingWords => ({
   role: 'temperatureDifference',
@@ -34,6 +37,13 @@ export const checksOfFlow: Readonly<Record<string, FindingWords>> = {
     text: (figure) => `Pipe Reynolds number ${figure}{where}, against the calibration`,
   },
   'pressure-ratio': { role: 'factor', text: (figure) => `Pressure ratio p₂/p₁ ${figure}{where}` },
+  'expansion-number': {
+    role: 'percent',
+    text: (figure) =>
+      `No expansion number is given: ε is taken as 1 at a differential of ${figure} of the pressure{where}`,
+  },
+  'bar-cavitation': { role: 'pressure', text: (figure) => `Pressure behind the bar ${figure}{where}`, ...vapour },
+  'pipe-velocity': { role: 'velocity', text: (figure) => `Pipe velocity ${figure}{where}, against the maker’s sheet` },
   flashing: { role: 'pressure', text: (figure) => `Pressure downstream of the element ${figure}{where}`, ...vapour },
   cavitation: { role: 'pressure', text: (figure) => `Pressure in the jet ${figure}{where}`, ...vapour },
   'cavitation-margin': {

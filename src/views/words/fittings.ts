@@ -3,6 +3,7 @@ import type { Choice } from './elements.ts';
 
 /** Every fitting, in the order of the list. */
 export const fittingChoices: readonly Choice[] = [
+  { value: 'any', label: 'Any fitting' },
   { value: 'single-bend', label: 'One 90° bend' },
   { value: 'bend-45', label: 'One 45° bend, or two in one plane, S at least 2\u00a0D' },
   { value: 'bends-same-plane', label: 'Two or more 90° bends in one plane' },

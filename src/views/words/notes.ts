@@ -42,6 +42,7 @@ export const remarks: Readonly<Record<string, string>> = {
   'venturi-annex-b': 'From the list for low Reynolds numbers, which is for information only.',
   'venturi-held': 'Outside the Reynolds numbers of the standard; the constant is held.',
   'venturi-machined-doubt': 'The 2022 edition may give another value: check your copy.',
+  'expansion-number-missing': 'The maker’s sheet gives no expansion number: the factor is taken as 1.',
   'calibration-constant': 'From the calibration of this meter, one point.',
   'calibration-held': 'Outside the calibration of this meter; its end value is held.',
   'calibration-interpolated': 'From the calibration of this meter, between two points.',
@@ -52,6 +53,7 @@ export const remarks: Readonly<Record<string, string>> = {
   'uncertainty-allowance-and-gaps':
     'Pipe bore or bore take the largest uncertainty that the standard allows; differential or density are left out, so ' +
     'the true figure is larger.',
+  'uncertainty-left-out': 'What has no uncertainty stated is left out: the true figure is larger.',
   'straight-perpendicular-high-reynolds': 'Longer at high Reynolds numbers',
   'straight-from-throat-tapping': 'Counted from the plane of the throat tappings',
   'straight-perpendicular-conditioner': 'A flow conditioner is advised',

@@ -74,6 +74,18 @@ export const solvingProblems: ProblemWords = {
     cause: `The bore of ${d.figure('bore', 'bore')} is not smaller than the pipe bore of ${d.figure('pipe', 'bore')}.`,
     next: 'Choose a smaller bore or a larger pipe.',
   }),
+  'bore-none': () => ({
+    cause: 'This element has no bore that could be found.',
+    next: 'Choose the differential or the flow to be found.',
+  }),
+  'bar-too-wide': (d) => ({
+    cause: `A bar ${d.figure('width', 'length')} wide leaves nothing of a pipe bore of ${d.figure('pipe', 'bore')}.`,
+    next: 'Check the width of the bar and the pipe bore.',
+  }),
+  'reynolds-order': (d) => ({
+    cause: `The greatest Reynolds number of K, ${d.figure('most', 'reynolds')}, is not above the least, ${d.figure('least', 'reynolds')}.`,
+    next: 'Write the two as they stand in the maker’s sheet.',
+  }),
   'base-density-missing': (d) => ({
     cause: `This fluid has no density at the base state, and ${d.place} is a volume flow there.`,
     next: 'State the density at the base state, or write a mass flow or a volume flow at the upstream state.',

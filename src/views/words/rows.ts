@@ -41,6 +41,8 @@ export const metalLabels = {
   ratio: 'Diameter ratio',
   plate: 'Plate thickness',
   edge: 'Edge thickness',
+  width: 'Width of the bar',
+  expansion: 'Expansion number',
 } as const;
 
 export const workingGroupTitles: Readonly<Record<'meter' | DutyName, string>> = {

@@ -1,5 +1,6 @@
 /** Words of the printed sheet. */
 import type { DutyName } from '../../core/document/project.ts';
+import type { Opening } from './elements.ts';
 import { noGrowth } from './rows.ts';
 
 export const sheetWords = {
@@ -92,6 +93,8 @@ export const sectionWords = {
   scale: 'scale',
   edge: 'edge',
   caption: (unit: string, measured: string): string => `dimensions in ${unit === 'in' ? 'inches' : unit}; ${measured}`,
+  pipeAlone: (note: string): string => `pipe bore ${measured(note)}`,
+  scaleOfPipe: 'bar not to scale; scale of the pipe',
   both: (note: string): string => `diameters ${measured(note)}`,
   apart: (pipe: string, element: string): string => `pipe bore ${measured(pipe)}, element ${measured(element)}`,
 } as const;
@@ -131,13 +134,16 @@ export const moreExceptions = (count: number): string => `${count} more, listed 
 /** What is written by hand when the part is received and fitted. */
 export const inspection = {
   title: 'Inspection, to be filled in',
-  bore: (opening: string): string => `${opening === 'throat' ? 'Throat' : 'Bore'}, four diameters and their mean`,
+  bore: (opening: Opening): string =>
+    opening === 'none'
+      ? 'Width of the bar, and its set across the pipe'
+      : `${opening === 'throat' ? 'Throat' : 'Bore'}, four diameters and their mean`,
   pipe: 'Pipe bore, four diameters and their mean',
-  others: [
+  others: (opening: Opening): readonly string[] => [
     'Temperature and instrument',
-    'Edge and faces examined',
-    'Flatness or profile',
-    'Centred after fitting, upstream side marked',
+    ...(opening === 'none'
+      ? ['Ports clear, front ports facing the flow', 'Reaches across the whole pipe, square to its axis']
+      : ['Edge and faces examined', 'Flatness or profile', 'Centred after fitting, upstream side marked']),
     'By, date',
   ],
 } as const;

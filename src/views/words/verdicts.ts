@@ -35,6 +35,13 @@ export const dutyLabels: Readonly<Record<DutyName, string>> = {
   minimum: 'minimum',
 };
 
+/** What the differential and the flow of an averaging pitot were found from. */
+export const foundFromBar: Readonly<Record<Unknown, string>> = {
+  bore: '',
+  differential: 'found from flow and K',
+  flow: 'found from K and differential',
+};
+
 /** What an unknown was found from, beside the shaded field. */
 export const foundFrom: Readonly<Record<Unknown, string>> = {
   bore: 'found from flow and differential',

@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { ASSUMPTIONS } from '../../../src/core/check/check.ts';
-import { solved, steam, verdict, water } from '../sample.ts';
+import { bored, solved, steam, verdict, water } from '../sample.ts';
 
 const withElement = (own: object, from = water) => ({ ...from, element: { ...from.element, ...own } });
 
@@ -9,7 +9,7 @@ describe('limits of the standard', () => {
     const at = (minimum: string) =>
       solved({ ...water, duty: { minimum } }).checks.filter(({ id }) => id === 'reynolds-pipe');
     const [limit] = at('12 t/h');
-    const { diameterRatio, pipe_m } = solved(water);
+    const { diameterRatio, pipe_m } = bored(water);
     expect(limit?.limit.min).toBeCloseTo(170 * diameterRatio ** 2 * pipe_m * 1000, 6);
     expect(at('1 t/h').map((finding) => finding.verdict)).toEqual(['inside']); // 10,300
     expect(at('0.5 t/h').map((finding) => [finding.verdict, finding.at])).toEqual([['outside', 'minimum']]);

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
+import { averagingPitot } from '../../../src/core/element/averaging-pitot.ts';
 import { calibrated, calibrationRange } from '../../../src/core/element/shared/calibration.ts';
-import { geometry, primary } from './primaries.ts';
+import { geometry, lossShareOf, primary } from './primaries.ts';
 
 const rows = [
   { reynolds: 1e5, coefficient: 0.99 },
@@ -34,7 +35,14 @@ describe('a calibrated primary', () => {
     const meter = calibrated(plain, rows);
     expect(meter.limits(at, 1e5)).toEqual(plain.limits(at, 1e5));
     expect(meter.name).toBe(plain.name);
-    expect(meter.lossShare(at, 0.98, 1e5)).toBe(plain.lossShare(at, 0.98, 1e5));
+    expect(lossShareOf(meter, at, 0.98, 1e5)).toBe(lossShareOf(plain, at, 0.98, 1e5));
+  });
+
+  it('of an averaging pitot replaces K, under its symbol', () => {
+    const bar = calibrated(averagingPitot.primary({}), rows);
+    expect(bar.discharge(at)(1e5)).toBe(0.99);
+    const { symbol, formula } = bar.working.coefficient(at, 2e5);
+    expect([symbol, formula]).toEqual(['K', 'K_1 + (K_2 - K_1) * ln(Re_D / Re_1) / ln(Re_2 / Re_1)']);
   });
 
   it('throws a defect for rows that input must have refused', () => {

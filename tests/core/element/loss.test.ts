@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { venturiLossShare } from '../../../src/core/element/shared/loss.ts';
-import { geometry, primaries } from './primaries.ts';
+import { geometry, lossShareOf, primaries, primary } from './primaries.ts';
 
 describe('the permanent loss', () => {
   it('lies between nothing and the differential, for every element', () => {
@@ -9,7 +9,7 @@ describe('the permanent loss', () => {
         for (const reynolds of [1e4, 1e5, 1e6, 1e7]) {
           const at = geometry(0.1, ratio);
           const C = one.discharge(at)(Math.max(reynolds, one.reynoldsFloor(at)));
-          const share = one.lossShare(at, C, reynolds);
+          const share = lossShareOf(one, at, C, reynolds);
           expect(share, `${one.name}, beta ${ratio}`).toBeGreaterThan(0);
           expect(share, `${one.name}, beta ${ratio}`).toBeLessThan(1);
         }
@@ -20,8 +20,8 @@ describe('the permanent loss', () => {
   it('of an orifice plate is about 1 - beta^1.9 (ISO 5167-2:2003, 5.4.1)', () => {
     for (const ratio of [0.3, 0.4, 0.5, 0.6, 0.7]) {
       const at = geometry(0.1, ratio);
-      const plate = primaries[0];
-      expect(plate?.lossShare(at, 0.605, 1e6)).toBeCloseTo(1 - ratio ** 1.9, 1);
+      const plate = primary('orifice-plate.corner');
+      expect(lossShareOf(plate, at, 0.605, 1e6)).toBeCloseTo(1 - ratio ** 1.9, 1);
     }
   });
 

@@ -98,6 +98,15 @@ export const elementsOf: Readonly<Record<string, Record<string, unknown>>> = {
   'as-cast Venturi': { kind: 'venturi-tube', convergent: 'as-cast', bore: '60 mm', material: 'carbon-steel' },
   'machined Venturi': { kind: 'venturi-tube', convergent: 'machined', bore: '60 mm' },
   'fabricated Venturi': { kind: 'venturi-tube', convergent: 'fabricated', bore: '60 mm' },
+  'averaging pitot': { kind: 'averaging-pitot', coefficient: 0.65, expansion: 0.2 },
+  'averaging pitot, clear area': { kind: 'averaging-pitot', coefficient: 0.7, area: 'clear', width: '6 mm' },
+  'calibrated averaging pitot': {
+    kind: 'averaging-pitot',
+    calibration: [
+      { reynolds: 5e4, coefficient: 0.66 },
+      { reynolds: 1e6, coefficient: 0.64 },
+    ],
+  },
   calibrated: {
     kind: 'orifice-plate',
     tappings: 'flange',

@@ -40,6 +40,20 @@ const meters: readonly (readonly [string, unknown])[] = [
       },
     },
   ],
+  ...[
+    { coefficient: 0.65 },
+    { coefficient: '0.65', area: 'clear', width: '20 mm', loss: '8 %', coefficientUncertainty: '1 %', expansion: 0.2 },
+    {
+      calibration: [
+        { reynolds: 1e5, coefficient: 0.61 },
+        { reynolds: 1e8, coefficient: 0.6 },
+      ],
+    },
+  ].flatMap((sheet, at) =>
+    [water, steam].map(
+      (meter) => [`bar ${at + 1}`, { ...meter, element: { kind: 'averaging-pitot', ...sheet } }] as const,
+    ),
+  ),
   ['held', { ...water, duty: { minimum: '20 kg/h' } }],
 ];
 

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { refusal, solved, steam, water } from '../sample.ts';
+import { bored, refusal, solved, steam, water } from '../sample.ts';
 
 describe('refused, with the reason', () => {
   test('a bore as wide as its pipe', () => {
@@ -64,7 +64,7 @@ describe('what is given may lie outside the standard and is solved all the same'
 
 describe('metal', () => {
   test('the found bore is told as measured and at the line temperature', () => {
-    const result = solved({ ...water, find: 'bore' });
+    const result = bored({ ...water, find: 'bore' });
     const growth = result.bore_m / result.boreAsMeasured_m - 1;
     expect(growth).toBeCloseTo(16e-6 * 65, 9); // 316, EN 10088-1: 16.0e-6/K up to 100 degC
     const again = solved({ ...water, element: { ...water.element, bore: `${result.boreAsMeasured_m} m` } });
@@ -79,7 +79,7 @@ describe('metal', () => {
     expect([result.bore_m, result.pipe_m]).toEqual([result.boreAsMeasured_m, result.pipeAsMeasured_m]);
   });
   test('a bore measured hot is brought back through 20 degC', () => {
-    const cold = solved({ ...water, element: { ...water.element, measuredAt: '20 degC' } });
+    const cold = bored({ ...water, element: { ...water.element, measuredAt: '20 degC' } });
     const hot = solved({ ...water, element: { ...water.element, bore: `${cold.bore_m} m`, measuredAt: '85 degC' } });
     expect(hot.bore_m).toBeCloseTo(cold.bore_m, 15);
   });

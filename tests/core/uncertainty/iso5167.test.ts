@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { solved, steam, water } from '../sample.ts';
+import { bored, solved, steam, water } from '../sample.ts';
 
 /** A gas meter with a published budget: 500 mm pipe, 300 mm bore, 50 kPa, 48.7 kg/m3, C 0.6, 100.0 kg/s. */
 const published = {
@@ -55,7 +55,7 @@ describe('what is not stated', () => {
     const terms = Object.fromEntries(
       points.maximum?.uncertainty.terms.map(({ name, percentOfFlow }) => [name, percentOfFlow]) ?? [],
     );
-    const b4 = solved(water).diameterRatio ** 4;
+    const b4 = bored(water).diameterRatio ** 4;
     expect(terms.pipe).toBeCloseTo(((2 * b4) / (1 - b4)) * 0.4, 12);
     expect(terms.bore).toBeCloseTo((2 / (1 - b4)) * 0.1, 12);
     expect([terms.differential, terms.density, terms.epsilon]).toEqual([0, 0, 0]);

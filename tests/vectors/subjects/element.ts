@@ -21,8 +21,15 @@ export function primaryOf(code: string): Primary {
   const [kind = '', variant = ''] = code.split('.');
   const element = elementOf(kind);
   if (!element.ok) throw new Error(`expected an element of the registry, got ${code}`);
-  const [field] = element.value.fields;
-  return element.value.primary(field === undefined ? {} : { [field.name]: variant });
+  const choice = element.value.fields.find((field) => field.type === 'choice');
+  return element.value.primary(choice === undefined ? {} : { [choice.name]: variant });
+}
+
+/** The permanent loss as a share of the differential. */
+export function lossShareOf(primary: Primary, at: Geometry, coefficient: number, reynolds: number): number {
+  const share = primary.lossShare?.(at, coefficient, reynolds);
+  if (share === undefined) throw new Error(`expected a loss of ${primary.name}, got none`);
+  return share;
 }
 
 export function number(given: Given, name: string): number {
@@ -70,7 +77,7 @@ export const subjects: Readonly<Record<string, (given: Given) => Record<string, 
   },
   'loss-share': (given) => {
     const primary = primaryOf(String(given.element));
-    return { share: primary.lossShare(geometryOf(given), number(given, 'C'), number(given, 'Re_D')) };
+    return { share: lossShareOf(primary, geometryOf(given), number(given, 'C'), number(given, 'Re_D')) };
   },
   'gas-flow-from-differential': (given) => {
     const meter = meterOf(primaryOf(String(given.element)), geometryOf(given), gas(given));

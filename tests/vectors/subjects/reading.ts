@@ -171,7 +171,7 @@ const boreOfColumn: Subject = (given) => {
     differential: `${dp} Pa`,
     duty: { maximum: `${given.q_m} kg/s` },
   });
-  return { d: found.bore_m };
+  return { d: figure(found.bore_m) };
 };
 
 const flowOfDifferential = (given: Given, reading: number, changes: Partial<MeterText> = {}): number =>

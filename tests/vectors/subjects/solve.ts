@@ -16,7 +16,7 @@ import type { Outcome } from '../../../src/core/quantity/outcome.ts';
 import { boreFrom } from '../../../src/core/solve/bore.ts';
 import { meterOf } from '../../../src/core/solve/equation.ts';
 import { flowFrom } from '../../../src/core/solve/flow.ts';
-import { geometryOf, number, primaryOf } from './element.ts';
+import { geometryOf, lossShareOf, number, primaryOf } from './element.ts';
 
 type Given = Readonly<Record<string, number | string>>;
 
@@ -75,7 +75,7 @@ export const subjects: Readonly<Record<string, (given: Given) => Record<string, 
   },
   'loss-at-found-bore': (given) => {
     const { primary, geometry, operation } = bore(given);
-    const share = primary.lossShare(geometry, operation.coefficient, operation.reynolds);
+    const share = lossShareOf(primary, geometry, operation.coefficient, operation.reynolds);
     return { loss: share * operation.differential };
   },
 };

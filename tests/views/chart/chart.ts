@@ -20,6 +20,8 @@ export const chart: Chart = {
   ],
   differentialUnit: 'mbar',
   flowUnit: 't/h',
+  banded: true,
+  limited: true,
   outside: [
     { from: 0, to: 10, label: 'pipe Reynolds number below 6 510' },
     { from: 200, to: 275, label: 'pipe Reynolds number above 10⁷' },

@@ -44,6 +44,18 @@ describe('the words of the chart', () => {
     for (const range of chart.outside) expect(render(380)).toContain(range.label);
   });
 
+  it('say nothing of a band or of limits where there are none', () => {
+    const bare = renderToStaticMarkup(
+      <FlowChart chart={{ ...chart, banded: false, limited: false }} labels={chartLabels} width={640} height={280} />,
+    );
+    for (const word of [chartLabels.band, chartLabels.low, chartLabels.high, chartLabels.limits]) {
+      expect(render(640)).toContain(word);
+      expect(bare).not.toContain(word);
+    }
+    expect(bare).not.toContain('<td>inside</td>');
+    expect(bare).toContain('maximum 60 t/h');
+  });
+
   it('complain of nothing', () => {
     const said = [vi.spyOn(console, 'error'), vi.spyOn(console, 'warn')];
     render(640);

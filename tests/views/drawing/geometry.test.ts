@@ -5,7 +5,7 @@ import { radiusAt } from '../../../src/views/drawing/profile.ts';
 import { draftOf, drawnKinds } from '../../../src/views/drawing/registry.ts';
 import { stationsOf } from '../../../src/views/drawing/venturi-tube.ts';
 import type { Shape } from '../../../src/views/present/model.ts';
-import { shapeOf, shapesAt } from './shapes.ts';
+import { barAt, row, shapeOf, shapesAt } from './shapes.ts';
 
 const sectionOf = (shape: Shape) =>
   draftOf(shape.element).section(shape, [], draftOf(shape.element).reach(shape, false));
@@ -34,8 +34,10 @@ const everything = ratios.flatMap((ratio) => [...shapesAt(0.05, ratio), ...shape
 
 describe('every section', () => {
   it('is drawn for each kind of the registry and for no other', () => {
-    expect(new Set(shapesAt(0.1, 0.5).map((shape) => shape.element.split('.')[0]))).toEqual(new Set(drawnKinds));
-    expect(() => draftOf('averaging-pitot')).toThrow(/expected one of orifice-plate/);
+    expect(new Set([...shapesAt(0.1, 0.5), barAt(0.1)].map((shape) => shape.element.split('.')[0]))).toEqual(
+      new Set(drawnKinds),
+    );
+    expect(() => draftOf('wedge')).toThrow(/expected one of orifice-plate/);
   });
 
   it.each(everything)(
@@ -83,6 +85,72 @@ describe('every section', () => {
     expect(lower.segments.map((segment) => segment.to)).toEqual(
       upper.segments.map(({ to }) => ({ x: to.x, y: -to.y })),
     );
+  });
+});
+
+describe('an averaging pitot', () => {
+  const pipe = 0.2;
+  const { bore, wall } = { bore: pipe / 2, wall: 0.56 * pipe };
+  const drawnWith = (width?: number) => {
+    const rows = width === undefined ? [] : [row('bar-width', `${width * 1000}\u00a0mm`, width)];
+    const draft = draftOf('averaging-pitot.pipe');
+    return draft.section(barAt(pipe, width), rows, draft.reach(barAt(pipe), false));
+  };
+  const extent = (paths: readonly Path[], axis: 'x' | 'y') => {
+    const places = paths
+      .flatMap((path) => [path.start, ...path.segments.map(({ to }) => to)])
+      .map((point) => point[axis]);
+    return { least: Math.min(...places), most: Math.max(...places) };
+  };
+
+  it.each([undefined, 0.004, 0.02, 0.06])('of width %s reaches across the pipe, in closed pieces', (width) => {
+    const { metal, walls, fluid, outside } = drawnWith(width);
+    expect([...walls, ...metal].every((path) => path.closed)).toBe(true);
+    const across = extent(metal, 'y');
+    expect(across.least).toBeLessThan(-bore);
+    expect(across.least).toBeGreaterThanOrEqual(-wall - 1e-12);
+    expect(across.most).toBe(outside);
+    expect(outside).toBeGreaterThan(wall);
+    expect(extent([fluid], 'y')).toEqual({ least: -bore, most: bore });
+  });
+
+  it('has its two passages apart from each other, inside the bar, and open at the top', () => {
+    for (const width of [undefined, 0.004, 0.02, 0.06]) {
+      const { tappings, profile, outside } = drawnWith(width);
+      const [front, back] = tappings;
+      if (front === undefined || back === undefined) throw new Error('expected two passages');
+      expect(front.x + front.width / 2).toBeLessThan(back.x - back.width / 2);
+      expect(front.x - front.width / 2).toBeGreaterThan(profile.start.x);
+      expect(back.x + back.width / 2).toBeLessThan(endOf(profile).x);
+      expect([front.outer, back.outer]).toEqual([outside, outside]);
+    }
+  });
+
+  it('has ports through front and back at the middles of rings of equal area', () => {
+    const { metal, profile } = drawnWith();
+    const isFront = (x = 0): boolean => x > profile.start.x && x < 0;
+    const front = metal.filter((path) => path.start.x === profile.start.x && isFront(path.segments[0]?.to.x));
+    const gaps = front
+      .map((path) => extent([path], 'y'))
+      .sort((one, other) => one.least - other.least)
+      .flatMap((piece, index, all) => {
+        const next = all[index + 1];
+        return next === undefined ? [] : [(piece.most + next.least) / 2];
+      });
+    expect(gaps.map((place) => Math.abs(place / bore) ** 2)).toEqual(
+      [0.75, 0.25, 0.25, 0.75].map((share) => expect.closeTo(share, 3)), // r² at a quarter and three quarters of the area
+    );
+  });
+
+  it('writes its width beside the bar on the sheet, and no diameter but that of the pipe', () => {
+    const draft = draftOf('averaging-pitot.pipe');
+    const measures = draft.measures(
+      barAt(pipe),
+      [row('bar-width', '20\u00a0mm', 0.02)],
+      { from: -0.3, to: 0.3 },
+      { pipe: '200', bore: '' },
+    );
+    expect(measures.map(({ kind, text }) => `${kind} ${text}`)).toEqual(['diameter Ø 200', 'note w 20']);
   });
 });
 

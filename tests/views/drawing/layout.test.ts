@@ -2,12 +2,14 @@ import { describe, expect, it } from 'vitest';
 import { headLines, pictureLayout } from '../../../src/views/drawing/layout.ts';
 import { paper, sheetLayout, statedScale } from '../../../src/views/drawing/paper.ts';
 import { onPage } from '../../../src/views/drawing/path.ts';
-import { heads, sectionLabels, shapesAt } from './shapes.ts';
+import { barAt, heads, sectionLabels, shapesAt } from './shapes.ts';
 
 const widths = [1440, 1024, 760, 390, 320];
 
 describe('the picture on the screen', () => {
-  const cases = widths.flatMap((width) => shapesAt(0.1, 0.6).map((shape) => ({ width, shape, name: shape.element })));
+  const cases = widths.flatMap((width) =>
+    [...shapesAt(0.1, 0.6), barAt(0.1, 0.012)].map((shape) => ({ width, shape, name: shape.element })),
+  );
 
   it.each(cases)(
     '$name at $width px: the metal stays inside and the pipe runs out at both ends',

@@ -3,7 +3,7 @@ import { describe, expect, it, vi } from 'vitest';
 import { pullRange, ratioByDistance, ratioByKey } from '../../../src/views/drawing/Pull.tsx';
 import { PipeDrawing } from '../../../src/views/drawing/pipe.tsx';
 import { SectionDrawing } from '../../../src/views/drawing/section.tsx';
-import { heads, pipeLabels, row, sectionLabels, shapeOf, shapesAt } from './shapes.ts';
+import { barAt, heads, pipeLabels, row, sectionLabels, shapeOf, shapesAt } from './shapes.ts';
 
 const flange = shapeOf('orifice-plate.flange', 0.10226, 0.611, 0.0254, 0.0254);
 const picture = (width: number, onPullBore?: (ratio: number) => void): string =>
@@ -44,16 +44,30 @@ describe('the picture', () => {
     expect(markup).not.toContain(pipeLabels.tappings);
   });
 
-  it.each(shapesAt(0.2, 0.6))('$element carries no inline style and no number that is not one', (shape) => {
-    const drawn = renderToStaticMarkup(<PipeDrawing shape={shape} heads={heads} labels={pipeLabels} width={1024} />);
-    const sheet = renderToStaticMarkup(
-      <SectionDrawing shape={shape} dimensions={[]} caption="dimensions in mm at 20 °C" labels={sectionLabels} />,
-    );
-    for (const markup of [drawn, sheet]) {
-      expect(markup).not.toMatch(/\sstyle=|<style/);
-      expect(markup).not.toMatch(/NaN|Infinity|undefined/);
-    }
+  it('without head lines is lower, and says nothing of them', () => {
+    const bar = barAt(0.2, 0.02);
+    const draw = (known?: typeof heads) =>
+      renderToStaticMarkup(<PipeDrawing shape={bar} heads={known} labels={pipeLabels} width={1024} />);
+    const height = (markup: string) => Number(/height="(\d+)"/.exec(markup)?.[1]);
+    expect(draw()).not.toContain(pipeLabels.totalHead);
+    expect(draw()).not.toContain(pipeLabels.legend);
+    expect(draw(heads)).toContain(pipeLabels.totalHead);
+    expect(height(draw())).toBeLessThan(height(draw(heads)));
   });
+
+  it.each([...shapesAt(0.2, 0.6), barAt(0.2, 0.02)])(
+    '$element carries no inline style and no number that is not one',
+    (shape) => {
+      const drawn = renderToStaticMarkup(<PipeDrawing shape={shape} heads={heads} labels={pipeLabels} width={1024} />);
+      const sheet = renderToStaticMarkup(
+        <SectionDrawing shape={shape} dimensions={[]} caption="dimensions in mm at 20 °C" labels={sectionLabels} />,
+      );
+      for (const markup of [drawn, sheet]) {
+        expect(markup).not.toMatch(/\sstyle=|<style/);
+        expect(markup).not.toMatch(/NaN|Infinity|undefined/);
+      }
+    },
+  );
 });
 
 describe('the handle on the edge of the bore', () => {

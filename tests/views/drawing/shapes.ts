@@ -20,7 +20,11 @@ export const shapeOf = (
   recovery_D: recovery,
 });
 
-/** One of each kind and variant at a pipe bore and a diameter ratio. */
+/** An averaging pitot, which leaves its pipe open. */
+export const barAt = (pipe: number, width = 0): Shape =>
+  shapeOf('averaging-pitot.pipe', pipe, 1, width / 2, width / 2, 0);
+
+/** One of each kind and variant with a bore at a pipe bore and a diameter ratio. */
 export const shapesAt = (pipe: number, ratio: number): readonly Shape[] => [
   shapeOf('orifice-plate.flange', pipe, ratio, inch, inch),
   shapeOf('orifice-plate.D-D/2', pipe, ratio, pipe, pipe / 2),

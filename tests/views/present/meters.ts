@@ -111,6 +111,26 @@ export const meters: readonly MeterText[] = [
     upstream: { pressure: '7 bar(a)', temperature: '165 degC' },
     duty: { maximum: '2 t/h' },
   },
+  { ...feedWater, tag: 'bar', element: { kind: 'averaging-pitot', coefficient: 0.65 }, find: 'flow' },
+  {
+    ...gas,
+    tag: 'bar in gas',
+    element: {
+      kind: 'averaging-pitot',
+      coefficient: '0.7213',
+      area: 'clear',
+      width: '25.4 mm',
+      coefficientUncertainty: '1 %',
+      expansion: 0.2,
+      reynoldsMin: 20000,
+      velocityMax: '40 m/s',
+      straightBefore: '9 D',
+      straightAfter: '3 D',
+      loss: '8 %',
+    },
+    uncertainty,
+    installation: { before: '10 D', after: '2 D' },
+  },
 ];
 
 export const projectOf = (display: Display, ...list: MeterText[]): Project => ({

@@ -35,7 +35,7 @@ export function sheetText(meter: PresentedSizing): string {
     `${meter.tag} ${meter.service} — ${meter.element}, ${meter.standard} — ${meter.verdict.words}`,
     meter.answer.map(({ text, role }) => (role === 'found' ? `*${text}*` : text)).join(''),
     meter.under,
-    `found: ${meter.found.value.text}, ${meter.found.from}; loss ${meter.loss.text}`,
+    `found: ${meter.found.value.text}, ${meter.found.from}; loss ${meter.loss?.text ?? 'not known'}`,
     `fluid: ${meter.fluid.name}, ${meter.fluid.phase}`,
     ...meter.state.map(rowText),
     'pipe:',
@@ -72,7 +72,9 @@ export function sheetText(meter: PresentedSizing): string {
     ...meter.straight.map(({ label, full, reduced, note, chosen }) =>
       `  ${chosen ? '*' : ''}${label}: ${full}, ${reduced} ${note ?? ''}`.trimEnd(),
     ),
-    `heads: ${meter.heads.tappingDrop.text} across the tappings, ${meter.heads.loss.text} lost`,
+    meter.heads === undefined
+      ? 'heads: none'
+      : `heads: ${meter.heads.tappingDrop.text} across the tappings, ${meter.heads.loss.text} lost`,
     `chart: ${meter.chart.flowUnit} against ${meter.chart.differentialUnit}. ${meter.chart.summary}`,
     'notes:',
     ...[...meter.notes, ...meter.cautions].map((note) => `  ${note}`),

@@ -35,6 +35,25 @@ const words = (markup: string): string =>
 const labels = (markup: string): readonly string[] =>
   [...markup.matchAll(/<section[^>]*aria-label="([^"]+)"/g)].map(([, label = '']) => label);
 
+describe('the sheets of an averaging pitot', () => {
+  const bars = meters.filter(({ element }) => element?.kind === 'averaging-pitot');
+  it('show the bar in its pipe, and speak of no bore', () => {
+    expect(bars).toHaveLength(2);
+    for (const bar of bars) {
+      const text = words(printed([bar], { include: ['sizing', 'dimensions'] }));
+      expect(text).toContain('Averaging pitot, K on the');
+      expect(text).toContain('bar not to scale; scale of the pipe 1 :');
+      expect(text).toContain('Ports clear, front ports facing the flow');
+      expect(text).not.toMatch(/Diameter ratio|Bore, four diameters|Edge and faces|NaN|undefined/);
+    }
+  });
+  it('have no empty table of dimensions', () => {
+    const [bare = feedWater, full = feedWater] = bars;
+    expect(words(printed([bare], { include: ['dimensions'] }))).not.toContain('Dimensions and tolerances');
+    expect(words(printed([full], { include: ['dimensions'] }))).toContain('Width of the bar w 25.4 mm');
+  });
+});
+
 describe('pages', () => {
   it('numbers the sheets of each meter apart', () => {
     expect(labels(printed(meters.slice(0, 2)))).toEqual([

@@ -72,6 +72,17 @@ export interface ElementText {
   measuredAt?: string;
   plateThickness?: string; // E
   edgeThickness?: string; // e
+  coefficient?: string | number; // K of an averaging pitot; what follows is of its sheet
+  area?: string; // 'pipe' | 'clear': what K counts
+  width?: string; // of the bar, across the flow
+  coefficientUncertainty?: string; // '1 %'
+  expansion?: string | number; // a of ε = 1 - a Δp/(κ p₁)
+  reynoldsMin?: string | number;
+  reynoldsMax?: string | number;
+  velocityMax?: string;
+  straightBefore?: string; // '9 D'
+  straightAfter?: string;
+  loss?: string; // share of the differential, '8 %'
   calibration?: CalibrationRow[];
   [key: string]: unknown;
 }

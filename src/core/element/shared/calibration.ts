@@ -16,7 +16,8 @@ const source: Source = { clause: 'Calibration of this meter', seen: 'read' };
 export const calibrated = (primary: Primary, rows: readonly CalibrationPoint[]): Primary => {
   const points = ordered(rows);
   const held = points.length === 1 ? 'calibration-constant' : 'calibration-held';
-  const said = { source, between: 'calibration-interpolated', held };
+  const symbol = primary.insertion === undefined ? 'C' : 'K';
+  const said = { symbol, source, between: 'calibration-interpolated', held };
   return {
     ...primary,
     discharge: () => (reynolds) => coefficientAt(points, reynolds),

@@ -28,18 +28,19 @@ export const coefficientAt = (points: readonly CurvePoint[], reynolds: number): 
 export const curveWorking = (
   points: readonly CurvePoint[],
   reynolds: number,
-  said: { readonly source: Source; readonly between: string; readonly held: string },
+  said: { readonly symbol: string; readonly source: Source; readonly between: string; readonly held: string },
 ): Working => {
   const [low, high] = around(points, reynolds);
-  const base = { id: 'C', symbol: 'C', value: coefficientAt(points, reynolds), unit: '', source: said.source };
+  const { symbol } = said;
+  const base = { id: 'C', symbol, value: coefficientAt(points, reynolds), unit: '', source: said.source };
   if (low === high) return { ...base, given: [], remark: said.held };
   const given: readonly Given[] = [
-    { symbol: 'C_1', value: low.coefficient, unit: '', words: 'curve-coefficient' },
-    { symbol: 'C_2', value: high.coefficient, unit: '', words: 'curve-coefficient' },
+    { symbol: `${symbol}_1`, value: low.coefficient, unit: '', words: 'curve-coefficient' },
+    { symbol: `${symbol}_2`, value: high.coefficient, unit: '', words: 'curve-coefficient' },
     { symbol: 'Re_1', value: low.reynolds, unit: '', words: 'curve-reynolds' },
     { symbol: 'Re_2', value: high.reynolds, unit: '', words: 'curve-reynolds' },
     { symbol: 'Re_D', value: reynolds, unit: '', words: 'reynolds-pipe' },
   ];
-  const formula = 'C_1 + (C_2 - C_1) * ln(Re_D / Re_1) / ln(Re_2 / Re_1)';
+  const formula = `${symbol}_1 + (${symbol}_2 - ${symbol}_1) * ln(Re_D / Re_1) / ln(Re_2 / Re_1)`;
   return { ...base, formula, given, remark: said.between };
 };

@@ -15,9 +15,11 @@ interface Props {
   readonly choices: readonly Choice[];
   /** Words for leaving the choice open; without them one of the list must be chosen. */
   readonly open?: string;
+  /** Takes the choice, where it changes more than its own field. */
+  readonly choose?: (value: string) => void;
 }
 
-export function ChoiceField({ path, label = fieldLabel(path), choices, open }: Props) {
+export function ChoiceField({ path, label = fieldLabel(path), choices, open, choose }: Props) {
   const text = useMeterText(path);
   const problem = useProblem(path);
   const write = useWrite();
@@ -32,7 +34,8 @@ export function ChoiceField({ path, label = fieldLabel(path), choices, open }: P
           className={styles.select}
           value={text}
           onChange={(event) => {
-            write(path, event.target.value);
+            if (choose) choose(event.target.value);
+            else write(path, event.target.value);
             settle();
           }}
         >

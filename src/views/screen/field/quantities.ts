@@ -20,6 +20,7 @@ const diameter = kind(['length'], 'mm', 'in');
 const flow = kind(['mass flow', 'volume flow', 'base volume flow'], 't/h', 'lb/h');
 const density = kind(['density'], 'kg/m3', 'lb/ft3');
 const straight = kind(['bores', 'length'], 'D', 'D');
+const bores = kind(['bores'], 'D', 'D');
 const viscosity = kind(['dynamic viscosity', 'kinematic viscosity'], 'mPa.s', 'cP');
 const boiling = kind(['absolute pressure', 'gauge pressure'], 'bar(a)', 'psi(a)');
 const share = kind(['share'], '%', '%');
@@ -46,6 +47,12 @@ export const QUANTITIES: Readonly<Record<string, QuantityKind>> = {
   'pipe.measuredAt': temperature,
   'element.bore': diameter,
   'element.measuredAt': temperature,
+  'element.width': diameter,
+  'element.coefficientUncertainty': share,
+  'element.velocityMax': kind(['velocity'], 'm/s', 'ft/s'),
+  'element.straightBefore': bores,
+  'element.straightAfter': bores,
+  'element.loss': share,
   'element.plateThickness': diameter,
   'element.edgeThickness': diameter,
   'duty.maximum': flow,

@@ -9,6 +9,7 @@ import type { Solved } from '../../../core/result/record.ts';
 import type { Workbench } from '../../../state/workbench.ts';
 import { show } from '../../present/numbers.ts';
 import { roundingOf } from '../../present/rounding.ts';
+import { openingWord } from '../../words/elements.ts';
 import { textAt } from '../text.ts';
 import { quantityKind } from './quantities.ts';
 import { split } from './split.ts';
@@ -30,7 +31,8 @@ interface Figure {
 /** The found figure of a solved meter. A flow keeps the kind its field had: mass, actual or base volume. */
 function figure(unknown: Unknown, solved: Solved, measure: Unit['measure'] | undefined): Figure | undefined {
   const point = solved.points.maximum;
-  if (unknown === 'bore') return { si: solved.boreAsMeasured_m, unit: 'm' };
+  const bore = solved.boreAsMeasured_m;
+  if (unknown === 'bore') return bore === undefined ? undefined : { si: bore, unit: 'm' };
   if (point === undefined) return undefined;
   if (unknown === 'differential') return { si: point.differential_Pa, unit: 'Pa' };
   if (measure === 'volume flow') return { si: point.volumeFlow_m3_s, unit: 'm3/s' };
@@ -65,6 +67,17 @@ export function turnTo(unknown: Unknown, { project, results, selected, writeAll 
   const text =
     result?.status === 'solved' ? foundText(formerly, result, textAt(meter, path), project.display ?? 'SI') : undefined;
   writeAll([...(text === undefined ? [] : [[path, text] as const]), ['find', unknown]]);
+}
+
+/** Takes a kind of element. One without a bore cannot be asked for it: the differential becomes the question. */
+export function kindTo(kind: string, { project, selected, write, writeAll }: Workbench): void {
+  const asksBore = unknownOf(project.meters[selected]?.find) === 'bore';
+  if (asksBore && openingWord(kind) === 'none')
+    writeAll([
+      ['element.kind', kind],
+      ['find', 'differential'],
+    ]);
+  else write('element.kind', kind);
 }
 
 /**

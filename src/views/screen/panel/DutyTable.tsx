@@ -7,7 +7,12 @@ import { Panel } from './Panel.tsx';
 import { openWorking } from './working-place.ts';
 
 /** Columns in the order of reading, and the working line that each figure opens. */
-const COLUMNS: readonly { readonly id: DutyColumn; readonly label: string; readonly working: string }[] = [
+interface Column {
+  readonly id: DutyColumn;
+  readonly label: string;
+  readonly working: string;
+}
+const COLUMNS: readonly Column[] = [
   { id: 'flow', label: 'Flow', working: 'mass-flow' },
   { id: 'differential', label: 'Differential', working: 'differential' },
   { id: 'reynolds', label: 'Re (pipe)', working: 'reynolds-pipe' },
@@ -18,33 +23,42 @@ const COLUMNS: readonly { readonly id: DutyColumn; readonly label: string; reado
   { id: 'uncertainty', label: 'Uncertainty', working: 'uncertainty' },
 ];
 
+/** The columns that the flows have figures for, with the coefficient under its own symbol. */
+const columnsOf = ({ duty, coefficient }: PresentedSizing): readonly Column[] =>
+  COLUMNS.filter(({ id }) => duty.some((row) => row.cells[id] !== undefined)).map((column) =>
+    column.id === 'coefficient' ? { ...column, label: coefficient.symbol } : column,
+  );
+
 /** The one unit of a column; '' where its rows have none or are written in different ones. */
 function unitOf(rows: readonly DutyRow[], column: DutyColumn): string {
-  const [first, ...more] = new Set(rows.map((row) => row.cells[column].unit));
+  const [first, ...more] = new Set(rows.flatMap((row) => row.cells[column]?.unit ?? []));
   return first === undefined || more.length > 0 ? '' : first;
 }
 
-function cellsOf(rows: readonly DutyRow[]): readonly (readonly Cell[])[] {
-  const heads = COLUMNS.map(({ id, label }) => words([label, unitOf(rows, id)].filter(Boolean).join(' / ')));
-  const figure = (id: DutyColumn, { plain }: Value): Cell =>
-    unitOf(rows, id) === '' ? number(plain) : number(plain.split(' ')[0] ?? plain);
+function cellsOf(rows: readonly DutyRow[], columns: readonly Column[]): readonly (readonly Cell[])[] {
+  const heads = columns.map(({ id, label }) => words([label, unitOf(rows, id)].filter(Boolean).join(' / ')));
+  const figure = (id: DutyColumn, value: Value | undefined): Cell => {
+    if (value === undefined) return words('');
+    return number(unitOf(rows, id) === '' ? value.plain : (value.plain.split(' ')[0] ?? value.plain));
+  };
   const line = (row: DutyRow): readonly Cell[] => [
     words(row.label),
-    ...COLUMNS.map(({ id }) => figure(id, row.cells[id])),
+    ...columns.map(({ id }) => figure(id, row.cells[id])),
   ];
   return [[words('Duty'), ...heads], ...rows.map(line)];
 }
 
 export function DutyTable({ sizing, stale }: { readonly sizing: PresentedSizing; readonly stale: boolean }) {
   const { duty } = sizing;
+  const columns = columnsOf(sizing);
   return (
-    <Panel id="duty" title="At each flow" stale={stale} aside={<CopyTable cells={cellsOf(duty)} />}>
+    <Panel id="duty" title="At each flow" stale={stale} aside={<CopyTable cells={cellsOf(duty, columns)} />}>
       <div className={styles.scroll}>
         <table className={styles.table}>
           <thead>
             <tr>
               <td />
-              {COLUMNS.map(({ id, label }) => (
+              {columns.map(({ id, label }) => (
                 <th key={id} scope="col">
                   {label}
                   {unitOf(duty, id) !== '' && <span className={styles.unit}>/ {unitOf(duty, id)}</span>}
@@ -56,14 +70,14 @@ export function DutyTable({ sizing, stale }: { readonly sizing: PresentedSizing;
             {duty.map((row) => (
               <tr key={row.name}>
                 <th scope="row">{row.label}</th>
-                {COLUMNS.map(({ id, label, working }) => (
+                {columns.map(({ id, label, working }) => (
                   <td key={id}>
                     <button
                       type="button"
                       title={`${label}: open its working`}
                       onClick={() => openWorking(row.name, working)}
                     >
-                      {unitOf(duty, id) === '' ? row.cells[id].text : row.cells[id].number}
+                      {unitOf(duty, id) === '' ? row.cells[id]?.text : row.cells[id]?.number}
                     </button>
                   </td>
                 ))}

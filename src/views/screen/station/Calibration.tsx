@@ -1,8 +1,9 @@
 /** The element's own coefficients: rows of Reynolds number and C. One row is a constant. */
+import { coefficientWords, rulesOf } from '../../words/elements.ts';
 import { useWorkbench } from '../binding.tsx';
 import buttons from '../button.module.css';
 import { useWrite, useWritten } from '../hand.tsx';
-import { useProblem } from '../meter.ts';
+import { useMeterText, useProblem } from '../meter.ts';
 import { textAt } from '../text.ts';
 import styles from './Calibration.module.css';
 
@@ -12,17 +13,22 @@ const COLUMNS = [
   { key: 'coefficient', label: 'C' },
 ] as const;
 
+/** The columns with the symbol of the element's coefficient. */
+const columnsOf = (kind: string) =>
+  COLUMNS.map(({ key, label }) => ({ key, label: key === 'coefficient' ? coefficientWords(kind).symbol : label }));
+
 export function Calibration() {
   const problem = useProblem(PATH);
+  const kind = useMeterText('element.kind');
   const list = useWritten(PATH);
   const count = Array.isArray(list) ? list.length : 0;
   const rows = Array.from({ length: count + 1 }, (_, at) => at); // one more, to be filled
   return (
     <table className={styles.table}>
-      <caption>Calibration, replaces the coefficient of the standard</caption>
+      <caption>Calibration, replaces the coefficient of the {rulesOf(kind)}</caption>
       <thead>
         <tr>
-          {COLUMNS.map(({ key, label }) => (
+          {columnsOf(kind).map(({ key, label }) => (
             <th key={key} scope="col">
               {label}
             </th>
@@ -44,10 +50,11 @@ function CalibrationRow({ at, last }: { readonly at: number; readonly last: bool
   const row = useWritten(`${PATH}.${at}`);
   const write = useWrite();
   const settle = useWorkbench((state) => state.settle);
+  const kind = useMeterText('element.kind');
   const path = `${PATH}.${at}`;
   return (
     <tr>
-      {COLUMNS.map(({ key, label }) => (
+      {columnsOf(kind).map(({ key, label }) => (
         <td key={key}>
           <CalibrationCell
             path={`${path}.${key}`}

@@ -1,29 +1,40 @@
 /** Station 4: the permanent loss, the straight pipe around the element, and how sure the inputs are. */
 
 import type { PresentedSizing } from '../../present/model.ts';
+import { openingWord } from '../../words/elements.ts';
 import { fittingChoices } from '../../words/fittings.ts';
 import { ChoiceField } from '../field/ChoiceField.tsx';
 import { FoundField } from '../field/FoundField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
-import { useSelectedMeter } from '../meter.ts';
+import { useMeterText, useSelectedMeter } from '../meter.ts';
 import { Fold } from './Fold.tsx';
 import { Station } from './Station.tsx';
 import { StraightNeed } from './StraightNeed.tsx';
 
-const upstream = fittingChoices.filter(({ value }) => value !== 'downstream');
+const upstream = fittingChoices.filter(({ value }) => value !== 'downstream' && value !== 'any');
 
 export function Downstream() {
   const selected = useSelectedMeter();
   const sizing = selected?.sizing;
+  const hasBore = openingWord(useMeterText('element.kind')) !== 'none';
   return (
     <Station number={4} title="Downstream">
-      <FoundField
-        label="Permanent loss"
-        path="loss"
-        value={sizing?.loss}
-        stale={sizing !== undefined && selected?.stale === true}
-      />
-      <ChoiceField path="installation.fitting" label="Fitting before" choices={fittingsOf(sizing)} open="not stated" />
+      {(hasBore || sizing?.loss !== undefined) && (
+        <FoundField
+          label="Permanent loss"
+          path="loss"
+          value={sizing?.loss}
+          stale={sizing !== undefined && selected?.stale === true}
+        />
+      )}
+      {hasBore && (
+        <ChoiceField
+          path="installation.fitting"
+          label="Fitting before"
+          choices={fittingsOf(sizing)}
+          open="not stated"
+        />
+      )}
       <QuantityField
         path="installation.before"
         label="Straight before"
@@ -35,7 +46,7 @@ export function Downstream() {
         note={sizing && <StraightNeed sizing={sizing} side="downstream" />}
       />
       <Fold title="Uncertainty and steadiness">
-        <QuantityField path="uncertainty.bore" label="Bore, ±" />
+        {hasBore && <QuantityField path="uncertainty.bore" label="Bore, ±" />}
         <QuantityField path="uncertainty.pipe" label="Pipe bore, ±" />
         <QuantityField path="uncertainty.differential" label="Differential, ±" />
         <QuantityField path="uncertainty.density" label="Density, ±" />

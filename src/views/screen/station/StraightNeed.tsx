@@ -9,12 +9,18 @@ interface Props {
 
 export function StraightNeed({ sizing, side }: Props) {
   const rows = sizing.straight.filter((row) => row.side === side);
-  const row = side === 'upstream' ? rows.find(({ chosen }) => chosen) : (rows.find(({ chosen }) => chosen) ?? rows[0]);
+  const row =
+    side === 'upstream'
+      ? rows.find(({ chosen, fitting }) => chosen || fitting === 'any')
+      : (rows.find(({ chosen }) => chosen) ?? rows[0]);
   if (row === undefined) return null;
+  const hasShorter = row.reduced.includes('D');
   return (
-    <span title={`${row.cited.clause}. Column B adds 0.5\u00a0% to the uncertainty of C.`}>
+    <span
+      title={hasShorter ? `${row.cited.clause}. Column B adds 0.5\u00a0% to the uncertainty of C.` : row.cited.clause}
+    >
       needs {row.full}
-      {row.reduced.includes('D') && `, or ${row.reduced} with 0.5\u00a0% more`}
+      {hasShorter && `, or ${row.reduced} with 0.5\u00a0% more`}
       <Mark mark={row.cited.mark} />
     </span>
   );
