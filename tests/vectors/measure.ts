@@ -2,6 +2,7 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { subjects as air } from './subjects/air.ts';
+import { subjects as averagingPitot } from './subjects/averaging-pitot.ts';
 import { subjects as element } from './subjects/element.ts';
 import { subjects as gas } from './subjects/gas.ts';
 import { subjects as gasViscosity } from './subjects/gas-viscosity.ts';
@@ -56,6 +57,7 @@ const ROUNDING = 4 * Number.EPSILON;
 
 const subjects: Readonly<Record<string, (given: Given) => Record<string, number>>> = {
   ...air,
+  ...averagingPitot,
   ...element,
   ...gas,
   ...gasViscosity,
