@@ -54,6 +54,7 @@ test('a difference is seen, rounding is not', () => {
 
 test('there are documents of every version', () =>
   expect(documents.map(({ name }) => name)).toEqual([
+    '1/averaging-pitot.headwright.json',
     '1/fluids.headwright.json',
     '1/odd-order.headwright.json',
     '1/place.headwright.json',
