@@ -1,6 +1,18 @@
 /** A meter from nothing to its answer, and the question turned round. */
 import type { Page } from '@playwright/test';
-import { answer, exampleText, field, fill, open, openExample, panel, press, type Station, save } from './hand.ts';
+import {
+  answer,
+  exampleText,
+  field,
+  fill,
+  open,
+  openExample,
+  openProject,
+  panel,
+  press,
+  type Station,
+  save,
+} from './hand.ts';
 import { type Figures, solveHeadless } from './headless.ts';
 import { expect, test } from './watched.ts';
 
@@ -94,4 +106,40 @@ test('the unknown turns round with one click, and what was found goes along', as
   await press(page, 'Find the bore');
   expect(Number(await flow.inputValue())).toBeCloseTo(60, 4);
   await expect(bore).toHaveText(new RegExp(`^${found}\\s*mm$`));
+});
+
+test('an averaging pitot asks for its K in place of a bore, and is drawn and printed without one', async ({ page }) => {
+  await openExample(page);
+  await field(page, 'Element', 'Kind').selectOption('averaging-pitot');
+  await expect(page.getByRole('button', { name: 'Find the differential' })).toHaveAttribute('aria-pressed', 'true');
+  await expect(field(page, 'Element', 'Bore')).toHaveCount(0);
+  await fill(page, 'Element', 'Coefficient K', '0.65');
+  await expect(answer(page)).toHaveText(/^An averaging pitot of K\s0\.65 reads [\d.]+\smbar at 60\st\/h\.$/);
+  await press(page, 'Find the maximum flow');
+  await expect(answer(page)).toHaveText(/ passes 60\.0+\st\/h\.$/);
+  await expect(page.getByRole('slider')).toHaveCount(0);
+  const drawing = page.getByRole('img', { name: /^Averaging pitot, K on the pipe area, in its pipe$/ });
+  await expect(drawing).toBeVisible();
+  await expect(panel(page, 'At each flow').getByRole('columnheader', { name: 'Permanent loss' })).toHaveCount(0);
+  await fill(page, 'Element', 'Loss of Δp', '7');
+  await expect(page.getByRole('img', { name: /with the head lines above it$/ })).toBeVisible();
+  await expect(panel(page, 'At each flow').getByRole('columnheader', { name: 'Permanent loss' })).toBeVisible();
+  await page.getByRole('link', { name: 'Sheet' }).click();
+  const sheet = page.getByRole('region', { name: /^FE-1101, Sizing sheet/ });
+  await expect(sheet).toContainText('Averaging pitot, K on the pipe area, maker’s sheet');
+  await expect(sheet).toContainText('bar not to scale; scale of the pipe');
+  await expect(sheet).not.toContainText('Diameter ratio');
+});
+
+test('a bore that is asked of an averaging pitot is refused, and the problem leads to what can be asked', async ({
+  page,
+}) => {
+  const { meters } = JSON.parse(await exampleText());
+  const element = { kind: 'averaging-pitot', coefficient: 0.65 };
+  await openProject(page, { format: 'headwright', version: 1, meters: [{ ...meters[0], element, find: 'bore' }] });
+  await expect(page.getByText('This element has no bore that could be found.').first()).toBeVisible();
+  await page.getByRole('button', { name: 'Quantity to find' }).first().click();
+  await expect(page.getByRole('button', { name: 'Find the maximum flow' })).toBeFocused();
+  await page.keyboard.press('Enter');
+  await expect(answer(page)).toContainText('An averaging pitot of K');
 });
