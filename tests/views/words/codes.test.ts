@@ -28,7 +28,7 @@ function found(pattern: RegExp, path = /./): string[] {
 function problemCodes(): string[] {
   const statements = found(
     /((?:\bfail|\breport|\bwithin|\bcode\b)[^;{}]*(?:\{[^{}]*\}[^;{}]*)?;?)/g,
-    /document|input|fluid|solve|quantity|registry|straight\.ts|traverse|reading|log|run\.ts/,
+    /document|input|fluid|solve|quantity|registry|averaging-pitot|straight\.ts|traverse|reading|log|run\.ts/,
   );
   const literals = statements.flatMap((text) =>
     [...text.matchAll(/'([a-z]+(?:-[a-z0-9]+)+)'/g)].map((match) => match[1] ?? ''),
