@@ -42,14 +42,17 @@ export function chartOf(at: Context, result: Solved, duty: readonly DutyRow[]): 
       to: fromSI(to, differential),
       label,
     })),
-    summary: chartSummary(
-      duty.map(({ cells }) => dutyAt(cells.flow.text, cells.differential.text)),
-      outside.map(({ from, to, label }) =>
-        outsideRange(at.print.figure(from, 'differential'), at.print.figure(to, 'differential'), label),
-      ),
-      limited ? rulesOf(result.element) : undefined,
-    ),
+    summary: summaryOf(at, result, duty, outside),
   };
+}
+
+function summaryOf(at: Context, result: Solved, duty: readonly DutyRow[], outside: readonly Range[]): string {
+  const figure = (si: number): string => at.print.figure(si, 'differential');
+  return chartSummary(
+    duty.map(({ cells }) => dutyAt(cells.flow.text, cells.differential.text)),
+    outside.map(({ from, to, label }) => outsideRange(figure(from), figure(to), label)),
+    result.reynoldsLimits.source === undefined ? undefined : rulesOf(result.element),
+  );
 }
 
 interface Range {

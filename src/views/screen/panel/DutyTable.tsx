@@ -1,4 +1,5 @@
 /** The meter at each flow. Every figure opens its working; the table copies into a spreadsheet. */
+import type { ReactNode } from 'react';
 import type { DutyColumn, DutyRow, PresentedSizing, Value } from '../../present/model.ts';
 import { CopyTable } from './CopyTable.tsx';
 import { type Cell, number, words } from './clipboard.ts';
@@ -49,7 +50,7 @@ function cellsOf(rows: readonly DutyRow[], columns: readonly Column[]): readonly
 }
 
 export function DutyTable({ sizing, stale }: { readonly sizing: PresentedSizing; readonly stale: boolean }) {
-  const { duty } = sizing;
+  const { duty, certainty } = sizing;
   const columns = columnsOf(sizing);
   return (
     <Panel id="duty" title="At each flow" stale={stale} aside={<CopyTable cells={cellsOf(duty, columns)} />}>
@@ -72,13 +73,9 @@ export function DutyTable({ sizing, stale }: { readonly sizing: PresentedSizing;
                 <th scope="row">{row.label}</th>
                 {columns.map(({ id, label, working }) => (
                   <td key={id}>
-                    <button
-                      type="button"
-                      title={`${label}: open its working`}
-                      onClick={() => openWorking(row.name, working)}
-                    >
-                      {unitOf(duty, id) === '' ? row.cells[id]?.text : row.cells[id]?.number}
-                    </button>
+                    <Opens label={label} onClick={() => openWorking(row.name, working)}>
+                      {figureText(row.cells[id], unitOf(duty, id))}
+                    </Opens>
                   </td>
                 ))}
               </tr>
@@ -86,11 +83,27 @@ export function DutyTable({ sizing, stale }: { readonly sizing: PresentedSizing;
           </tbody>
         </table>
       </div>
-      {sizing.certainty !== '' && <p className={styles.certainty}>{sizing.certainty}</p>}
+      {certainty !== '' && <p className={styles.certainty}>{certainty}</p>}
       <Shares duty={duty} />
     </Panel>
   );
 }
+
+/** A figure alone where its column says the unit. */
+const figureText = (value: Value | undefined, unit: string) => (unit === '' ? value?.text : value?.number);
+
+interface OpensProps {
+  readonly label: string;
+  readonly onClick: () => void;
+  readonly children: ReactNode;
+}
+
+/** A figure that opens its working. */
+const Opens = ({ label, onClick, children }: OpensProps) => (
+  <button type="button" title={`${label}: open its working`} onClick={onClick}>
+    {children}
+  </button>
+);
 
 /** Which input makes the uncertainty of each flow, largest first. */
 function Shares({ duty }: { readonly duty: readonly DutyRow[] }) {
