@@ -42,6 +42,7 @@ export const surveyPlace = {
   stale: 'Last good result. What is typed now cannot be solved.',
   besides: 'Shown without the readings that cannot be read.',
   blank: 'The section is drawn to scale once this is given: ',
+  blankWrong: 'The section is drawn to scale once this is put right: ',
   stations: ['Section and points', 'Probe and gauge', 'Fluid in the duct', 'Plane and uncertainty'],
   none: 'none',
   forColumns: 'for readings in mm or in of liquid',

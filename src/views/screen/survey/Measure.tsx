@@ -86,7 +86,15 @@ function Entry({ survey, readings, point, go, last }: EntryProps) {
       <div className={styles.row} data-point-box={point.number}>
         <ReadingBox point={point} readings={readings} className={styles.box} go={go} />
         <span className={styles.unit}>{readings.unit.print}</span>
-        <button type="button" className={styles.sign} aria-label={words.sign} onClick={turnSign}>
+        <button
+          type="button"
+          className={styles.sign}
+          aria-label={words.sign}
+          onClick={(event) => {
+            turnSign();
+            event.currentTarget.parentElement?.querySelector('input')?.focus(); // the keys go on where they were
+          }}
+        >
           ±
         </button>
       </div>

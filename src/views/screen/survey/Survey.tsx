@@ -155,7 +155,7 @@ function Blank({ selected: { now, traverse } }: { readonly selected: SelectedSur
   const fields = [...new Set((wrong.length > 0 ? wrong : missing).map(({ field }) => field))];
   return (
     <p className={`${along.along} ${along.blank}`}>
-      {words.blank}
+      {wrong.length > 0 ? words.blankWrong : words.blank}
       {fields.map((field, at) => (
         <span key={field}>
           {at > 0 && ', '}
