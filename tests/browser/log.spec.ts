@@ -70,6 +70,26 @@ async function converted(page: Page): Promise<void> {
   await expect(button(page, 'Convert it again')).toBeEnabled({ timeout: 45_000 });
 }
 
+/** Starts, cancels once the progress is seen, and tells how many ms the page took to answer. All in the page: it is quick. */
+const cancelOnTheWay = (page: Page): Promise<number> =>
+  log(page).evaluate(async (panel: HTMLElement) => {
+    const press = (name: string): void =>
+      [...panel.querySelectorAll('button')].find((one) => one.textContent === name)?.click();
+    const until = async (words: string): Promise<number> => {
+      const began = performance.now();
+      while (!panel.innerText.includes(words)) {
+        if (performance.now() - began > 30_000) throw new Error(`expected '${words}', got ${panel.innerText}`);
+        await new Promise((resolve) => setTimeout(resolve, 10));
+      }
+      return performance.now() - began;
+    };
+    press('Convert the log');
+    await until('rows a second');
+    if (panel.querySelector('progress') === null) throw new Error('expected a bar of progress, got none');
+    press('Cancel');
+    return until('The conversion was cancelled. Nothing of it was kept.');
+  });
+
 /** What the command line makes of the same log. */
 function byCommand(
   project: string,
@@ -104,15 +124,12 @@ test('300,000 rows with faults: progress, cancelled, converted to what the comma
   test.slow();
   const project = await projectText({ log: columns });
   const text = logText(ROWS);
-  await read(page, project);
+  await read(page, await projectText({ log: { ...columns, exact: true } })); // slow enough to be cancelled at any load
   await openLog(page, 'march.csv', text);
-  await button(page, 'Convert the log').click();
-  await expect(log(page).getByText(/rows a second/)).toBeVisible();
-  await expect(log(page).getByRole('progressbar')).toBeVisible();
-  const began = Date.now();
-  await button(page, 'Cancel').click();
-  await expect(log(page).getByText('The conversion was cancelled. Nothing of it was kept.')).toBeVisible();
-  expect(Date.now() - began).toBeLessThan(2000);
+  await expect(button(page, 'Convert the log')).toBeEnabled();
+  expect(await cancelOnTheWay(page)).toBeLessThan(1000); // 100 ms, and a page on two busy cores
+  await log(page).getByText('More rules').click();
+  await log(page).getByLabel('Every row through the whole calculation').uncheck();
   await converted(page);
   const { total_kg, rows, out } = byCommand(project, text, info);
   expect(rows).toBeGreaterThan(298_000);
@@ -158,10 +175,14 @@ test('a worker that dies costs its job, and the next one works', async ({ page }
       }
     };
   });
-  await read(page, await projectText({ log: columns }));
+  await read(page, await projectText({ log: { ...columns, exact: true } }));
   await openLog(page, 'march.csv', logText(ROWS));
   await button(page, 'Convert the log').click();
-  await expect(log(page).getByText(/rows a second/)).toBeVisible();
+  await expect(
+    log(page)
+      .getByText(/rows a second/)
+      .first(),
+  ).toBeVisible();
   const waited = page.evaluate(async () => {
     (window as unknown as { workers: Worker[] }).workers.at(-1)?.terminate();
     const began = performance.now();
@@ -219,6 +240,7 @@ test('the example log is made on the spot, also without a network, and has its s
   page,
   context,
 }) => {
+  test.slow();
   await read(page, await projectText());
   await page.waitForFunction(() => navigator.serviceWorker.controller?.state === 'activated');
   await context.setOffline(true);

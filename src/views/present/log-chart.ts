@@ -12,9 +12,9 @@ const DAY = 86_400; // s
 
 export function logChart({ record, units, value, stamp }: LogContext): LogChart {
   const { chart, extremes, zone } = record;
-  const points = chart.flatMap(({ time_s, massFlow_kg_s, afterGap }) => {
+  const points = chart.flatMap(({ time_s, massFlow_kg_s, afterGap }, at) => {
     const point = { time: time_s, flow: fromSI(massFlow_kg_s, units.massFlow) };
-    return afterGap ? [{ time: time_s }, point] : [point];
+    return afterGap && at > 0 ? [{ time: time_s }, point] : [point]; // nothing lies before the first
   });
   const [least, most] = [extremes?.massFlow_kg_s.least ?? 0, extremes?.massFlow_kg_s.most ?? 0];
   return {
