@@ -3,15 +3,14 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { LogText } from '../../src/core/document/v/1-log.ts';
 import { readSite } from '../../src/core/input/site.ts';
-import { daysOf, isDate } from '../../src/core/log/calendar.ts';
+import { civilOf, daysOf, isDate } from '../../src/core/log/calendar.ts';
 import { type Chunk, TROUBLES } from '../../src/core/log/chunk.ts';
 import { mapLog } from '../../src/core/log/columns.ts';
 import { readFigure } from '../../src/core/log/figure.ts';
 import type { Mapping } from '../../src/core/log/mapping.ts';
 import { plainNumber } from '../../src/core/log/plain.ts';
-import { openRows, type Rows } from '../../src/core/log/rows.ts';
+import { openRows, type RowReader } from '../../src/core/log/rows.ts';
 import { LONGEST_ROW } from '../../src/core/log/split.ts';
-import { civilOf } from '../../src/core/log/stamp.ts';
 import { localOf, offsetAt, zoneOf } from '../../src/core/log/zone.ts';
 import { generator } from './random.ts';
 
@@ -25,7 +24,7 @@ function mappingOf(log: LogText, text: string): Mapping {
 }
 
 /** Everything that the reader answers, as lists of numbers, and its end. */
-function answers(mapping: Mapping, feed: (rows: Rows) => void, chunkRows = 4096) {
+function answers(mapping: Mapping, feed: (rows: RowReader) => void, chunkRows = 4096) {
   const found: number[][] = [];
   const take = ({ size, row, time, signal, pressure, trouble, missing }: Chunk): void => {
     for (let at = 0; at < size; at += 1)
@@ -114,7 +113,7 @@ describe('a log cut anywhere', () => {
         const whole = answers(mapping, (rows) => rows.push(bytes));
         const inside = cuts.filter((cut) => cut < bytes.length).sort((one, other) => one - other);
         const edges = [0, ...inside, bytes.length];
-        const inPieces = (rows: Rows): void => {
+        const inPieces = (rows: RowReader): void => {
           for (const [at, edge] of edges.slice(1).entries()) rows.push(bytes.slice(edges[at], edge));
         };
         expect(answers(mapping, inPieces, chunk)).toEqual(whole);

@@ -6,7 +6,6 @@
  * bend of the metal's expansion. In each a short polynomial stands for C. Where it is not within the bound, as at a bend
  * of a calibration, of Annex B or at the floor of the element, the piece stays open and the row is solved.
  */
-
 import type { Geometry, Primary } from '../element/contract.ts';
 import { chebyshevCoefficients, chebyshevPoints, chebyshevTable, powersOf, turned } from '../numeric/chebyshev.ts';
 import { heldDischarge } from '../solve/equation.ts';

@@ -2,7 +2,7 @@
  * The mapping of a log: what the document says of its columns, completed by what the preview has decided. Every
  * question that is still open is a problem that shows both readings of a cell.
  */
-import type { LogText } from '../document/v/1-log.ts';
+import type { LogText } from '../document/project.ts';
 import { type Form, failed, openForm } from '../input/form.ts';
 import type { Site } from '../input/site.ts';
 import { fail, type Outcome, ok } from '../quantity/outcome.ts';

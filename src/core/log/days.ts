@@ -1,6 +1,5 @@
 /** The days of a log: where each begins and ends, by the clock of the stated zone, and what it came to. */
-import { DAY } from './calendar.ts';
-import { civilOf } from './stamp.ts';
+import { DAY, dateText } from './calendar.ts';
 import type { DayOf } from './totals.ts';
 import { localOf, offsetAt, type Zone } from './zone.ts';
 
@@ -17,8 +16,4 @@ const dayNumber = (zone: Zone, start: number, time: number): number =>
   Math.floor((time + offsetAt(zone, time) - start) / DAY);
 
 /** The date of the day of a moment, '2026-03-14': that on which it begins. */
-export function dateOf(zone: Zone, start: number, time: number): string {
-  const { year, month, day } = civilOf(dayNumber(zone, start, time));
-  const digits = (whole: number, width: number): string => String(whole).padStart(width, '0');
-  return `${digits(year, 4)}-${digits(month, 2)}-${digits(day, 2)}`;
-}
+export const dateOf = (zone: Zone, start: number, time: number): string => dateText(dayNumber(zone, start, time));

@@ -2,7 +2,6 @@
  * The points of a chart of a log of any length: the smallest and the largest flow of each stretch of time, at their own
  * times, so that no peak is lost. Stretches double in length when they have become too many.
  */
-
 import type { ChartPoint } from '../result/log-record.ts';
 
 /** Two points of each stretch at most: 2,000. */

@@ -1,5 +1,6 @@
 /** The example log of a meter: a day around the state that its meter has. */
 import type { MeterText } from '../document/project.ts';
+import { celsius } from '../quantity/constants.ts';
 import { gather, type Outcome, ok } from '../quantity/outcome.ts';
 import { standing } from '../run/standing.ts';
 import type { Sink } from './bytes.ts';
@@ -8,10 +9,9 @@ import { writeExample } from './example.ts';
 import type { OfMeter } from './look.ts';
 
 const BAR = 1e5; // Pa
-const ZERO_CELSIUS = 273.15; // K
 const SEED = 4101;
 
-/** Writes it to a sink, whose bytes are used again after the call. Problems: those of the meter. */
+/** Writes the log of a day at one row a second to a sink, whose bytes are used again after the call. Problems: those of the meter. */
 export function writeExampleOf({ meter, index, project }: OfMeter, sink: Sink): Outcome<undefined> {
   const stands = standing(meter, index, project);
   if (!stands.ok) return gather(stands);
@@ -22,7 +22,7 @@ export function writeExampleOf({ meter, index, project }: OfMeter, sink: Sink): 
       seconds: DAY,
       seed: SEED,
       pressure: (pressure - stands.value.site.atmosphere) / BAR,
-      temperature: temperature - ZERO_CELSIUS,
+      temperature: celsius(temperature),
       root: takesRoot(stands.value.written),
     },
     sink,

@@ -1,12 +1,21 @@
 /** Rows as they are read -> rows with a differential, a pressure and a temperature, each with the first of its account. */
-import { differentialOf, type Output, type Range, type Signal, type SignalLimits } from '../reading/signal.ts';
+import {
+  differentialOf,
+  type Output,
+  placeOf,
+  type Range,
+  type Signal,
+  type SignalLimits,
+  type SignalState,
+  stateOfSignal,
+} from '../reading/signal.ts';
 import { ACCOUNT, accountOfTrouble } from './account.ts';
 import { type Batch, makeRoom } from './batch.ts';
 import { type Chunk, PRESSURE_MISSING, TEMPERATURE_MISSING, TIME_REPEATED } from './chunk.ts';
 import { isSpike, openSpikes, type Spikes } from './spike.ts';
 
 /** Figure of every row where no column holds it, and what stands in where a row of the column has none. */
-export interface Stands {
+export interface StandIn {
   readonly constant: number;
   readonly fallback?: number;
 }
@@ -23,8 +32,8 @@ export interface SignalRule {
 export interface FaultRule {
   /** Absent where the column holds the differential. */
   readonly signal?: SignalRule;
-  readonly pressure: Stands; // Pa absolute
-  readonly temperature: Stands; // K
+  readonly pressure: StandIn; // Pa absolute
+  readonly temperature: StandIn; // K
   /** A differential below it is no flow, Pa; 0 where no cut-off is stated. */
   readonly cutOff: number;
   /** Rows with one and the same signal from which on they count as frozen; absent where that is not looked for. */
@@ -71,13 +80,21 @@ export function screen(faults: Faults, chunk: Chunk, batch: Batch): void {
   batch.size += chunk.size;
 }
 
+/** What the limits of a signal make of its row. */
+const OF_STATE: Readonly<Record<SignalState, number>> = {
+  valid: ACCOUNT.converted,
+  uncertain: ACCOUNT.uncertain,
+  saturated: ACCOUNT.saturated,
+  faulty: ACCOUNT.fault,
+};
+
 /** The account of a row that has its place in time; fills in its figures. */
 function judge(faults: Faults, chunk: Chunk, at: number, batch: Batch, place: number): number {
   const { rule, spikes } = faults;
   const signal = chunk.signal[at] as number;
   const missing = chunk.missing[at] as number;
   const frozen = isFrozen(faults, signal);
-  const state = rule.signal === undefined ? ACCOUNT.converted : stateOf(rule.signal, signal);
+  const state = rule.signal === undefined ? ACCOUNT.converted : OF_STATE[stateOfSignal(signal, rule.signal.limits)];
   if (state === ACCOUNT.fault) return state;
   const differential = rule.signal === undefined ? signal : seen(rule.signal, signal);
   const spike = spikes !== undefined && isSpike(spikes, differential);
@@ -102,16 +119,9 @@ function judge(faults: Faults, chunk: Chunk, at: number, batch: Batch, place: nu
   return (missing & TIME_REPEATED) === 0 ? ACCOUNT.converted : ACCOUNT.hourRepeated;
 }
 
-/** What the limits say of a signal; the limits of a fault themselves are faults. NAMUR NE 43. */
-function stateOf({ limits }: SignalRule, signal: number): number {
-  if (signal <= limits.failLow || signal >= limits.failHigh) return ACCOUNT.fault;
-  if (signal > limits.high) return ACCOUNT.saturated;
-  return signal < limits.low ? ACCOUNT.uncertain : ACCOUNT.converted;
-}
-
 /** Differential of a signal, Pa. */
 const seen = ({ ends, range, output, zero }: SignalRule, signal: number): number =>
-  differentialOf((signal - ends.zero) / (ends.full - ends.zero), range, output) - zero;
+  differentialOf(placeOf(signal, ends), range, output) - zero;
 
 /** Whether the signal has stood still for as many rows as are stated. */
 function isFrozen(faults: Faults, signal: number): boolean {

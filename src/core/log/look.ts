@@ -1,6 +1,5 @@
 /** A look at a log before it is converted: its first rows as they are written and as they will be read. */
-import type { MeterText, Project } from '../document/project.ts';
-import type { LogText } from '../document/v/1-log.ts';
+import type { LogText, MeterText, Project } from '../document/project.ts';
 import { readSite } from '../input/site.ts';
 import { gather, type Outcome, type Problem } from '../quantity/outcome.ts';
 import type { LogLook, LookedMapping, LookedRow } from '../result/log-look.ts';

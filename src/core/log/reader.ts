@@ -20,7 +20,7 @@ export const PRESSURE = 4;
 export const TEMPERATURE = 5;
 
 /** A row that could not be read, kept to be shown. */
-export interface Sample {
+export interface UnreadRow {
   readonly trouble: Trouble;
   readonly row: number;
   /** The beginning of the row. */
@@ -60,7 +60,7 @@ export interface Reader {
   lastTime: number;
   blank: number;
   spanning: number;
-  readonly samples: Sample[];
+  readonly samples: UnreadRow[];
 }
 
 /** Decimal mark, zero, step and shift of the columns of figures, by role. */

@@ -1,11 +1,9 @@
 /** The stages of a conversion at its end -> its record. */
-
 import type { AccountRecord, DayRecord, LogResult } from '../result/log-record.ts';
 import { accounts, FIRST_REFUSED, FIRST_TROUBLE } from './account.ts';
 import { TROUBLES } from './chunk.ts';
 import { dateOf } from './days.ts';
-import type { Decimation } from './decimate.ts';
-import { chartPoints } from './decimate.ts';
+import { chartPoints, type Decimation } from './decimate.ts';
 import { type Flows, pathOf } from './flows.ts';
 import type { Period } from './period.ts';
 import type { LogPlan } from './plan.ts';

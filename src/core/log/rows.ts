@@ -8,10 +8,10 @@ import { toUtf8 } from './encoding.ts';
 import type { Mapping } from './mapping.ts';
 import { oddRow } from './odd.ts';
 import { plainRow } from './plain.ts';
-import { handOver, LINE_END, openReader, type Reader, roomOf, type Sample } from './reader.ts';
+import { handOver, LINE_END, openReader, type Reader, roomOf, type UnreadRow } from './reader.ts';
 import { afterLineEnd, CR, LF, LONGEST_ROW } from './split.ts';
 
-export type { Sample } from './reader.ts';
+export type { UnreadRow } from './reader.ts';
 
 /** What is known of a log when it has ended. */
 export interface LogEnd {
@@ -24,10 +24,10 @@ export interface LogEnd {
   /** Whether the log ends without a line end: its last row may have been cut. */
   readonly endsOpen: boolean;
   /** The first rows of each trouble. */
-  readonly samples: readonly Sample[];
+  readonly samples: readonly UnreadRow[];
 }
 
-export interface Rows {
+export interface RowReader {
   /** Reads a piece of the log; the bytes may be used again afterwards. */
   push(bytes: Uint8Array): void;
   /** Reads what is left, hands over the last rows and tells the end. */
@@ -37,7 +37,7 @@ export interface Rows {
 const CHUNK_ROWS = 4096;
 
 /** Opens a reader; the chunk that `take` gets is filled again after the call. */
-export function openRows(mapping: Mapping, take: (chunk: Chunk) => void, chunkRows = CHUNK_ROWS): Rows {
+export function openRows(mapping: Mapping, take: (chunk: Chunk) => void, chunkRows = CHUNK_ROWS): RowReader {
   const reader = openReader(mapping, take, chunkRows);
   return { push: (bytes) => push(reader, bytes), finish: () => finish(reader) };
 }

@@ -1,6 +1,6 @@
 /** The rows of the beginning of a log, and of its end, taken apart: what the preview decides on. */
 import { openTranscoder, type Spelling, spellingOf, textOf, toUtf8 } from './encoding.ts';
-import { afterLineEnd, CR, fieldBytes, LF, splitRow } from './split.ts';
+import { afterLineEnd, CR, fieldBytes, LF, QUOTE, splitRow } from './split.ts';
 
 export interface SampleRow {
   readonly fields: readonly string[];
@@ -42,7 +42,7 @@ export function sampleRows(
       fields.push(
         textOf(fieldBytes(bytes, split.edges[edge] ?? 0, split.edges[edge + 1] ?? 0), spelling.encoding).trim(),
       );
-    const quoted = split.edges.some((edge, place) => place % 2 === 0 && bytes[edge] === 34);
+    const quoted = split.edges.some((edge, place) => place % 2 === 0 && bytes[edge] === QUOTE);
     rows.push({ fields, bytes: bytes.slice(at, split.end), quoted });
     at = afterLineEnd(bytes, split.state === 'quote-open' ? at : split.end, bytes.length);
   }

@@ -1,5 +1,4 @@
 /** The first rows of each account, to be shown. */
-
 import type { ShownRow } from '../result/log-record.ts';
 import { accounts, FIRST_TROUBLE } from './account.ts';
 import type { Batch } from './batch.ts';

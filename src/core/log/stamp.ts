@@ -1,35 +1,11 @@
 /**
- * A time stamp as bytes: ISO 8601, `2026-03-14T06:00:00Z`, from seconds since 1970-01-01T00:00:00. UTC. The calendar
- * is that of ISO 8601, the Gregorian one in both directions.
+ * A time stamp as bytes: ISO 8601, `2026-03-14T06:00:00Z`, from seconds since 1970-01-01T00:00:00. UTC.
  */
 import { type Bytes, writeByte, writeDigits } from './bytes.ts';
-import { DAY } from './calendar.ts';
+import { type Civil, civilOf, DAY } from './calendar.ts';
 
 const MICRO = 1e6;
 const [HYPHEN, T, COLON, POINT, Z] = [45, 84, 58, 46, 90];
-
-export interface Civil {
-  readonly year: number;
-  readonly month: number; // 1 to 12
-  readonly day: number; // 1 to 31
-}
-
-/** The date of a day counted from 1970-01-01. Eras of 400 years from 0000-03-01, so that a leap day ends its year. */
-export function civilOf(days: number): Civil {
-  const shifted = days + 719468; // 0000-03-01 to 1970-01-01, days
-  const era = Math.floor(shifted / 146097); // days in 400 years
-  const dayOfEra = shifted - era * 146097;
-  const leaps = Math.floor(dayOfEra / 1460) - Math.floor(dayOfEra / 36524) + Math.floor(dayOfEra / 146096);
-  const yearOfEra = Math.floor((dayOfEra - leaps) / 365);
-  const dayOfYear = dayOfEra - (365 * yearOfEra + Math.floor(yearOfEra / 4) - Math.floor(yearOfEra / 100));
-  const fromMarch = Math.floor((5 * dayOfYear + 2) / 153); // months of 30.6 days
-  const month = fromMarch < 10 ? fromMarch + 3 : fromMarch - 9;
-  return {
-    year: yearOfEra + era * 400 + (month <= 2 ? 1 : 0),
-    month,
-    day: dayOfYear - Math.floor((153 * fromMarch + 2) / 5) + 1,
-  };
-}
 
 /** What the last stamp began with: most stamps of a log stand in the same minute as the one before. */
 export interface Calendar {

@@ -1,13 +1,11 @@
 /** The column of time in the mapping of a log: its place, and its format as stated or as decided from the sample. */
 import { at } from '../input/form.ts';
-import { DAY } from './calendar.ts';
-import type { Cell, Decision } from './evidence.ts';
-import { decideNumericTime } from './evidence.ts';
+import { DAY, dateText } from './calendar.ts';
+import { type Cell, type Decision, decideNumericTime } from './evidence.ts';
 import type { FigureFormat } from './figure.ts';
 import { type Desk, figuresOf, findColumn } from './find-column.ts';
 import type { TimeColumn } from './mapping.ts';
 import type { ColumnPreview } from './preview.ts';
-import { civilOf } from './stamp.ts';
 import { TIME_FORMATS, type TimeFormat } from './time.ts';
 
 const PLAIN: FigureFormat = { decimal: '.', group: '' };
@@ -62,18 +60,13 @@ type Open = Extract<Decision<TimeFormat>, { kind: 'open' }>;
 function askOrder(form: Desk['form'], column: string, { sample, readings }: Open): undefined {
   const read = (order: TimeFormat) => readings.find(({ value }) => value === order)?.reads;
   const [dayFirst, monthFirst] = [read('day-first'), read('month-first')];
+  const date = (seconds: number): string => dateText(Math.floor(seconds / DAY));
   return form.report('log-date-order-open', 'log.dateOrder', {
     column,
     written: sample.text,
-    ...(dayFirst === undefined ? {} : { dayFirst: dateText(dayFirst) }),
-    ...(monthFirst === undefined ? {} : { monthFirst: dateText(monthFirst) }),
+    ...(dayFirst === undefined ? {} : { dayFirst: date(dayFirst) }),
+    ...(monthFirst === undefined ? {} : { monthFirst: date(monthFirst) }),
   });
-}
-
-function dateText(seconds: number): string {
-  const { year, month, day } = civilOf(Math.floor(seconds / DAY));
-  const digits = (whole: number, width: number): string => String(whole).padStart(width, '0');
-  return `${digits(year, 4)}-${digits(month, 2)}-${digits(day, 2)}`;
 }
 
 function askSerial(form: Desk['form'], column: string, sample: Cell): undefined {
