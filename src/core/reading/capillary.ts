@@ -1,6 +1,6 @@
 /**
  * What the surface of a liquid makes of its level in a narrow tube. It cancels between two equal limbs; between a tube
- * and a well it does not, and belongs into the zero. Source: Jurin's law; constants at 20 degC on clean glass.
+ * and a well it does not, and belongs in the zero reading. Source: Jurin's law; constants at 20 degC on clean glass.
  */
 import type { Caution } from '../fluid/contract.ts';
 import type { GaugeLiquid } from '../input/instrument.ts';

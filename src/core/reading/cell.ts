@@ -1,8 +1,8 @@
 /** A cell at the end of two legs: from the pressure difference it sees to that of the flow equation. */
+import { MEASURED_AT } from '../document/defaults.ts';
 import type { Form } from '../input/form.ts';
 import { type InstrumentUncertainty, type Legs, readInstrumentUncertainty, readLegs } from '../input/instrument.ts';
 import { as } from '../quantity/brand.ts';
-import { kelvin } from '../quantity/constants.ts';
 import type { PressureDifference, Temperature } from '../quantity/kinds.ts';
 import { named, type Working } from '../quantity/working.ts';
 import { cellDifferential, hydrostatics } from './chain.ts';
@@ -16,22 +16,20 @@ export interface CellFields {
   readonly uncertainty: InstrumentUncertainty;
 }
 
-const AMBIENT = kelvin(20); // K
-
 export function readCellFields(form: Form, spanned: boolean): CellFields {
-  const ambient = form.positive('instrument.temperature', ['temperature'])?.si ?? as<'temperature'>(AMBIENT);
+  const ambient = form.positive('instrument.temperature', ['temperature'])?.si ?? as<'temperature'>(MEASURED_AT);
   return { legs: readLegs(form), ambient, uncertainty: readInstrumentUncertainty(form, spanned) };
 }
 
 /** What a cell says through its legs. */
-export interface Cell {
+export interface ThroughLegs {
   readonly differential: PressureDifference;
   readonly working: readonly Working[];
   readonly picture: Picture;
 }
 
-/** Legs full of the process fluid add nothing, and no line. */
-export function readCell(cell: number, { legs, ambient }: CellFields, { state, gravity }: Conditions): Cell {
+/** Takes what a cell sees, Pa, through its legs; legs full of the process fluid add nothing, and no line. */
+export function readCell(cell: number, { legs, ambient }: CellFields, { state, gravity }: Conditions): ThroughLegs {
   const densities = legsAt(legs, state, ambient);
   const differential = cellDifferential(cell, densities, gravity);
   const picture = {

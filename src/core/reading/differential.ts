@@ -4,6 +4,7 @@
  */
 import { ok } from '../quantity/outcome.ts';
 import { named, type Working } from '../quantity/working.ts';
+import { asked } from './asked.ts';
 import { readCell, readCellFields } from './cell.ts';
 import type { Instrument } from './contract.ts';
 import { reversedCautions } from './reversed.ts';
@@ -18,7 +19,7 @@ export const differential: Instrument = {
       kind: 'differential',
       asks: { shows: ['pressure difference'] },
       read({ value }, at) {
-        const shown = value?.si ?? 0;
+        const shown = asked(value, 'a value').si;
         const { differential: across, working, picture } = readCell(shown - zero, fields, at);
         const parts = statedParts(fields.uncertainty, { span: 0, reading: Math.abs(across) });
         return ok({

@@ -5,6 +5,7 @@
 import { as } from '../quantity/brand.ts';
 import { ok } from '../quantity/outcome.ts';
 import { named, type Working } from '../quantity/working.ts';
+import { asked } from './asked.ts';
 import { readCellFields } from './cell.ts';
 import { alongChain, hydrostatics } from './chain.ts';
 import type { Instrument } from './contract.ts';
@@ -21,7 +22,8 @@ export const gauges: Instrument = {
     return {
       kind: 'gauges',
       asks: { shows: [], gauges: true },
-      read({ upstream = 0, throat = 0 }, { state, gravity }) {
+      read(shown, { state, gravity }) {
+        const [upstream, throat] = [asked(shown.upstream, 'an upstream gauge'), asked(shown.throat, 'a throat gauge')];
         const legs = legsAt(fields.legs, state, fields.ambient);
         const p1 = alongChain(upstream, [{ density: legs.upstream, fall: above1 }], gravity);
         const p2 = alongChain(throat, [{ density: legs.downstream, fall: above2 }], gravity);

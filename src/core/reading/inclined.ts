@@ -3,6 +3,7 @@
  * along the tube; without a well its other side is taken to be so wide that its level stays.
  */
 import { readHigh, readInclination, readWell } from '../input/instrument.ts';
+import { asked } from './asked.ts';
 import { readColumn, readColumnFields } from './column.ts';
 import type { Instrument } from './contract.ts';
 import { tubeLevels, wellOf } from './tube.ts';
@@ -21,7 +22,11 @@ export const inclined: Instrument = {
       kind: 'inclined',
       asks: { shows: ['length'] },
       read: ({ value }, at) =>
-        readColumn(fields, tubeLevels(value?.si ?? 0, tube, fields.scale, fields.gauge.temperature, towards), at),
+        readColumn(
+          fields,
+          tubeLevels(asked(value, 'a value').si, tube, fields.scale, fields.gauge.temperature, towards),
+          at,
+        ),
     };
   },
 };

@@ -3,6 +3,7 @@
  * of the two levels; the process liquid stands higher in the limb of the higher pressure.
  */
 import { readHigh } from '../input/instrument.ts';
+import { asked } from './asked.ts';
 import { readColumn, readColumnFields } from './column.ts';
 import type { Instrument } from './contract.ts';
 import { scaleWorking, trueLength } from './scale.ts';
@@ -18,7 +19,7 @@ export const invertedUTube: Instrument = {
       kind: 'inverted-u-tube',
       asks: { shows: ['length'] },
       read({ value }, at) {
-        const read = value?.si ?? 0;
+        const read = asked(value, 'a value').si;
         const length = trueLength(read, scale, gauge.temperature);
         const h = high === 'upstream' ? length : -length;
         const working = scaleWorking(read, scale, gauge.temperature);

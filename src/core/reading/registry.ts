@@ -1,5 +1,4 @@
 /** Every instrument that can be read, and the one of a document. */
-
 import type { MeterText } from '../document/project.ts';
 import { failed, openForm } from '../input/form.ts';
 import { type Outcome, ok } from '../quantity/outcome.ts';

@@ -52,8 +52,9 @@ export const usualLimits = ({ zero, full }: Signal): SignalLimits => ({
 
 const at = (x: number, zero: number, full: number): number => zero + x * (full - zero);
 
-/** Place of a signal between its ends. */
-export const placeOf = (signal: number, { zero, full }: Signal): number => (signal - zero) / (full - zero);
+/** Place of a signal between its ends, all three in one unit. */
+export const placeOf = (signal: number, { zero, full }: Pick<Signal, 'zero' | 'full'>): number =>
+  (signal - zero) / (full - zero);
 
 /** What a limit says of a signal; the limits of failure themselves are failures. */
 export type SignalState = 'faulty' | 'uncertain' | 'valid' | 'saturated';

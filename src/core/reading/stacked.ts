@@ -3,6 +3,7 @@ import type { Caution } from '../fluid/contract.ts';
 import type { InstrumentUncertainty } from '../input/instrument.ts';
 import type { ReadingInput } from '../input/reading.ts';
 import type { Source } from '../quantity/source.ts';
+import { asked } from './asked.ts';
 import type { Cell, Picture } from './contract.ts';
 import { differentialOf, placeOf, type Range } from './signal.ts';
 import { combined, statedParts } from './stated.ts';
@@ -24,7 +25,7 @@ export interface Chosen {
  */
 export function chooseCell(reading: ReadingInput, own: TransmitterFields, inUse?: Cell): Chosen {
   const { signal, lowRange, range, zero, limits } = own;
-  const value = reading.value?.si ?? signal.zero;
+  const value = asked(reading.value, 'a value').si;
   const main: Chosen = { cell: 'main', range, zero, value, picture: {} };
   const low = reading.lowRange?.si;
   if (lowRange === undefined || low === undefined) return main;

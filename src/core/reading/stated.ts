@@ -6,10 +6,11 @@ import type { InstrumentUncertainty } from '../input/instrument.ts';
 import { named, type Working } from '../quantity/working.ts';
 import type { UncertaintyPart } from './contract.ts';
 
+/** What a stated share is a share of, Pa; `span` is 0 where the instrument has none. */
 export interface Whole {
-  readonly span: number; // Pa
-  readonly reading: number; // Pa
-  /** What one per cent of the signal's span is in the differential, Pa per unit: the span, or 2 x span of a root signal. */
+  readonly span: number;
+  readonly reading: number;
+  /** What the whole span of the signal is worth at its place: the span of a linear one, 2 x times it of a root signal. */
   readonly perSignal?: number;
 }
 

@@ -1,6 +1,5 @@
 /** The fields of a transmitter: signal, range, output, limits, cut-off, and a second cell of a lower range. */
-import type { Form } from '../input/form.ts';
-import { at } from '../input/form.ts';
+import { at, type Form } from '../input/form.ts';
 import { as } from '../quantity/brand.ts';
 import type { PressureDifference } from '../quantity/kinds.ts';
 import {

@@ -7,6 +7,7 @@ import type { ReadingInput } from '../input/reading.ts';
 import { ok } from '../quantity/outcome.ts';
 import type { Source } from '../quantity/source.ts';
 import { named, type Working } from '../quantity/working.ts';
+import { asked } from './asked.ts';
 import { type CellFields, readCell, readCellFields } from './cell.ts';
 import type { Conditions, Instrument, Shown, Standing } from './contract.ts';
 import { reversedCautions } from './reversed.ts';
@@ -66,7 +67,7 @@ function shownOf(reading: ReadingInput, own: TransmitterFields, fields: CellFiel
     cautions,
     working: [...mappingLines(value, x, own, range, zero, seen), ...working, ...combinedWorking(parts)],
     uncertainty: parts,
-    picture: { ...picture, share: placeOf(reading.value?.si ?? signal.zero, signal), ...chosen.picture },
+    picture: { ...picture, share: placeOf(asked(reading.value, 'a value').si, signal), ...chosen.picture },
     ...(own.lowRange === undefined ? {} : { inUse: chosen.cell }),
   };
 }

@@ -3,6 +3,7 @@
  * a corrected scale has shortened divisions and takes the fall of the well into account, a plain one does not.
  */
 import { readHigh, readWell } from '../input/instrument.ts';
+import { asked } from './asked.ts';
 import { readColumn, readColumnFields } from './column.ts';
 import type { Instrument } from './contract.ts';
 import { tubeLevels, wellOf } from './tube.ts';
@@ -20,7 +21,11 @@ export const well: Instrument = {
       kind: 'well',
       asks: { shows: ['length'] },
       read: ({ value }, at) =>
-        readColumn(fields, tubeLevels(value?.si ?? 0, tube, fields.scale, fields.gauge.temperature, towards), at),
+        readColumn(
+          fields,
+          tubeLevels(asked(value, 'a value').si, tube, fields.scale, fields.gauge.temperature, towards),
+          at,
+        ),
     };
   },
 };

@@ -1,6 +1,8 @@
 /** The rows of a meter together: each on its own, mean, extremes, what rooting the mean would add, compensation. */
 import { describe, expect, test } from 'vitest';
 import type { MeterText } from '../../../src/core/document/project.ts';
+import type { Conditions } from '../../../src/core/reading/contract.ts';
+import { instrumentOf } from '../../../src/core/reading/registry.ts';
 import { evaluate } from '../../../src/views/present/evaluate.ts';
 import { parseFormula } from '../../../src/views/present/formula.ts';
 import { quantityName } from '../../../src/views/words/quantities.ts';
@@ -50,6 +52,14 @@ describe('each row on its own', () => {
       'not-above-vacuum at readings.0.pressure',
     ]);
   });
+});
+
+test('a row that does not hold what its instrument asks for is a defect', () => {
+  for (const instrument of [uTube, transmitter, { kind: 'gauges' }, { kind: 'differential' }]) {
+    const settled = instrumentOf({ ...venturi, instrument });
+    if (!settled.ok) throw new Error(`expected an instrument, got ${JSON.stringify(settled.problems)}`);
+    expect(() => settled.value.read({}, {} as Conditions)).toThrow(/expected an? .+, got none/);
+  }
 });
 
 describe('together', () => {
