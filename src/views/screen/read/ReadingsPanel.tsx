@@ -39,49 +39,58 @@ export function ReadingsPanel({ kind, tag, readings, current, setCurrent }: Prop
     replace(pasted.rows);
     say(words.pasted(pasted.taken));
   };
-  const order = (
-    <div className={styles.aside}>
-      <CopyTable cells={cells} />
-      <button
-        type="button"
-        className={buttons.quiet}
-        onClick={() => saveText(asCsv(cells), `${tag || 'readings'}.csv`)}
-      >
-        {words.csv}
-      </button>
-    </div>
-  );
   return (
-    <Panel id="readings" title={words.table} aside={rows.length > 0 ? order : undefined}>
+    <Panel id="readings" title={words.table} aside={rows.length > 0 && <Orders cells={cells} tag={tag} />}>
       <p className={styles.hint}>{words.hint}</p>
       <div className={styles.scroll}>
-        <table className={styles.table} onKeyDown={(event) => onKey(event, table)}>
-          <ReadingsHead
-            columns={columns}
-            units={units}
-            found={readings?.units}
-            chooseUnit={table.chooseUnit}
-            fill={(name) => replace(filledDown(rows, name))}
-          />
-          <tbody>
-            {[...rows, undefined].map((row, at) => (
-              <ReadingsRow
-                // biome-ignore lint/suspicious/noArrayIndexKey: a row is its place in the list
-                key={at}
-                {...{ at, row, columns, units, setCurrent, paste }}
-                found={readings?.rows[at]}
-                current={at === current}
-                last={at === rows.length}
-              />
-            ))}
-          </tbody>
-        </table>
+        <Grid {...{ table, readings, current, setCurrent, paste }} />
       </div>
       <Sentences readings={readings} />
       <p className={styles.hint} aria-live="polite">
         {said}
       </p>
     </Panel>
+  );
+}
+
+type Cells = ReturnType<typeof readingCells>;
+
+const Orders = ({ cells, tag }: { readonly cells: Cells; readonly tag: string }) => (
+  <div className={styles.aside}>
+    <CopyTable cells={cells} />
+    <button type="button" className={buttons.quiet} onClick={() => saveText(asCsv(cells), `${tag || 'readings'}.csv`)}>
+      {words.csv}
+    </button>
+  </div>
+);
+
+interface GridProps extends Pick<Props, 'readings' | 'current' | 'setCurrent'> {
+  readonly table: Table;
+  readonly paste: (text: string, row: number, column: number) => void;
+}
+
+function Grid({ table, readings, current, setCurrent, paste }: GridProps) {
+  const { rows, columns, units, replace, chooseUnit } = table;
+  return (
+    <table className={styles.table} onKeyDown={(event) => onKey(event, table)}>
+      <ReadingsHead
+        {...{ columns, units, chooseUnit }}
+        found={readings?.units}
+        fill={(name) => replace(filledDown(rows, name))}
+      />
+      <tbody>
+        {[...rows, undefined].map((row, at) => (
+          <ReadingsRow
+            // biome-ignore lint/suspicious/noArrayIndexKey: a row is its place in the list
+            key={at}
+            {...{ at, row, columns, units, setCurrent, paste }}
+            found={readings?.rows[at]}
+            current={at === current}
+            last={at === rows.length}
+          />
+        ))}
+      </tbody>
+    </table>
   );
 }
 
