@@ -58,6 +58,7 @@ test('there are documents of every version', () =>
     '1/fluids.headwright.json',
     '1/odd-order.headwright.json',
     '1/place.headwright.json',
+    '1/surveys.headwright.json',
     '1/tern-island.headwright.json',
     '1/unknown-keys.headwright.json',
   ]));
@@ -82,6 +83,7 @@ describe.each(documents)('$name', ({ path }) => {
     for (const input of [text, encode(read(text))]) {
       const now = JSON.parse(solveText(input).output);
       expect(now.results).toHaveLength(kept.results.length);
+      expect(now.traverses).toHaveLength((kept.traverses ?? []).length);
       expect(differences(now, kept)).toEqual([]);
     }
   });
