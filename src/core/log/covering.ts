@@ -25,10 +25,10 @@ export interface Covering {
 }
 
 const MOST_SURFACES = 16;
-/** What a box has beyond the rows that it is built for: of its width, and at least of the figures themselves. */
+/** What a box has beyond the rows that it is built for: of its width, and at least so much of p and so many K. */
 const MARGINS = [
-  { width: 1, pressure: 0.1, temperature: 10 },
-  { width: 0.1, pressure: 0.01, temperature: 0.5 },
+  { width: 1, pressure: 0.1, temperature: 10 }, // tried first
+  { width: 0.1, pressure: 0.01, temperature: 0.5 }, // beside a border of the fluid
 ] as const;
 
 type Side = Box['pressure'];

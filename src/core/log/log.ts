@@ -3,7 +3,6 @@
  * stands the record of what it came to. What it answers does not depend on where the pieces are cut, and its memory does
  * not grow with the log.
  */
-
 import type { LogResult } from '../result/log-record.ts';
 import { FIRST_REFUSED } from './account.ts';
 import { type Batch, drop, openBatch } from './batch.ts';
@@ -18,7 +17,7 @@ import { closeOut, type Digits, type Out, openOut, writeRows } from './out.ts';
 import type { LogPlan } from './plan.ts';
 import { moveRepeats, openRepeats, type Repeats, settleRepeats } from './repeats.ts';
 import { resultOf } from './result.ts';
-import { openRows } from './rows.ts';
+import { CHUNK_ROWS, openRows } from './rows.ts';
 import { openShown, type Shown, showRows } from './shown.ts';
 import { longestBridged } from './spacing.ts';
 import { closeTotals, openTotals, type Totals, takeRows } from './totals.ts';
@@ -56,7 +55,6 @@ interface Stages {
   rows: number;
 }
 
-const CHUNK_ROWS = 4096;
 const DIGITS = 7; // as many as the bound of the surface leaves right
 
 /** Opens a conversion; its output goes to `sink`, whose bytes are used again after the call; without one it is not written. */

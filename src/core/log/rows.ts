@@ -34,7 +34,8 @@ export interface RowReader {
   finish(): LogEnd;
 }
 
-const CHUNK_ROWS = 4096;
+/** Rows in a chunk, where no other number is asked for. */
+export const CHUNK_ROWS = 4096;
 
 /** Opens a reader; the chunk that `take` gets is filled again after the call. */
 export function openRows(mapping: Mapping, take: (chunk: Chunk) => void, chunkRows = CHUNK_ROWS): RowReader {
