@@ -62,7 +62,8 @@ const flat = (text: string): string => text.replace(/[\s\u00a0\u202f\u2009]+/g, 
 async function printed(page: Page, info: TestInfo): Promise<readonly string[]> {
   const path = info.outputPath('sheets.pdf');
   writeFileSync(path, await page.pdf({ preferCSSPageSize: true, printBackground: true }));
-  const text = spawnSync('pdftotext', ['-layout', path, '-'], { encoding: 'utf8' }).stdout;
+  const read = (command: string, ...args: string[]): string => spawnSync(command, args, { encoding: 'utf8' }).stdout;
+  const text = read('pdftotext', '-layout', path, '-');
   return text.split('\f').slice(0, -1).map(flat);
 }
 

@@ -1,6 +1,6 @@
 /** A survey as the views print it: plan, readings and result in display units. */
 import type { SolvedTraverse } from '../../core/result/record.ts';
-import type { CheckGroup, Cited, PresentedProblem, Row, Segment, Value, WorkingGroup } from './model.ts';
+import type { CheckGroup, Cited, Row, Segment, Value, WorkingGroup } from './model.ts';
 import type { ListedSurvey } from './survey-list.ts';
 
 export interface SurveyPoint {
@@ -89,9 +89,4 @@ export interface PresentedSurvey extends ListedSurvey {
   readonly working: readonly WorkingGroup[];
   readonly notes: readonly string[];
   readonly cautions: readonly string[];
-}
-
-export interface RefusedSurvey extends ListedSurvey {
-  readonly status: 'refused';
-  readonly problems: readonly PresentedProblem[];
 }
