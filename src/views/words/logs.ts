@@ -82,19 +82,16 @@ export const interpretationLabel = (code: 'sampled' | 'held'): string =>
 export const assumedText = 'taken, not stated';
 export const usualGap = 'ten times the usual interval';
 
-const delimiters: Readonly<Record<string, string>> = {
-  ',': 'comma',
-  ';': 'semicolon',
-  '|': 'bar',
-  '\t': 'tab',
-};
-
 export const delimiterChoices = [
   { value: ',', label: 'comma' },
   { value: ';', label: 'semicolon' },
   { value: '|', label: 'bar' },
   { value: 'tab', label: 'tab' },
 ] as const;
+/** By the character itself. */
+const delimiters: Readonly<Record<string, string>> = Object.fromEntries(
+  delimiterChoices.map(({ value, label }) => [value === 'tab' ? '\t' : value, label]),
+);
 
 const encodings: Readonly<Record<string, string>> = {
   'utf-8': 'UTF-8',
