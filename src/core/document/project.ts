@@ -10,5 +10,5 @@ export type {
   UncertaintyText,
   Unknown,
 } from './v/1.ts';
-export type { InstrumentText, LiquidText, ReadingText } from './v/1-instrument.ts';
+export type { InstrumentText, ReadingText } from './v/1-instrument.ts';
 export type { LogColumnText, LogText, LogTimeText } from './v/1-log.ts';

@@ -72,5 +72,7 @@ export interface Picture {
   /** Place of the signal between its ends, 0 to 1 inside the range. */
   readonly share?: number;
   readonly lowRangeShare?: number;
+  /** True where the cell of the low range was used. */
+  readonly lowRangeInUse?: boolean;
   readonly cell_Pa?: number;
 }

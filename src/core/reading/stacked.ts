@@ -35,7 +35,13 @@ export function chooseCell(reading: ReadingInput, own: TransmitterFields, inUse?
   const share = own.output === 'linear' ? x : x * Math.abs(x); // of the range, as a differential
   const stays = inUse === 'main' ? share < lowRange.down : share <= lowRange.up;
   if (failed || !stays) return { ...main, picture };
-  return { cell: 'lowRange', range: lowRange.range, zero: lowRange.zero, value: low, picture };
+  return {
+    cell: 'lowRange',
+    range: lowRange.range,
+    zero: lowRange.zero,
+    value: low,
+    picture: { ...picture, lowRangeInUse: true },
+  };
 }
 
 /** The two differentials against their combined uncertainty, where both are inside their ranges and it is stated. */

@@ -3,7 +3,7 @@ import type { SolvedReading } from '../../core/result/readings-record.ts';
 import type { Solved } from '../../core/result/record.ts';
 import { fluidLabel } from '../words/fluids.ts';
 import { instrumentWords, liquidWord } from '../words/instruments.ts';
-import { endPieces, failedPieces, type ReadPiece, readPieces, underReading } from '../words/readings.ts';
+import { endPieces, failedPieces, ofLowRange, type ReadPiece, readPieces, underReading } from '../words/readings.ts';
 import { verdictWords } from '../words/verdicts.ts';
 import type { Context } from './context.ts';
 import type { Segment } from './model.ts';
@@ -42,7 +42,7 @@ export function readingAnswer(
 ): readonly Segment[] {
   const differential = row.differential_Pa === undefined ? '' : at.value(row.differential_Pa, 'differential').text;
   const figures = {
-    reading: asRead(kind === 'gauges' ? texts.upstream : texts.value),
+    reading: shownReading(row, kind, texts),
     throat: asRead(texts.throat),
     differential,
     flow: readFlow(at, row)?.text ?? '',
@@ -51,6 +51,12 @@ export function readingAnswer(
     if (typeof piece === 'string') return { text: piece, role: 'words' };
     return { text: figures[piece.figure], role: piece.figure === 'flow' ? 'found' : 'given' };
   });
+}
+
+/** What the differential was read from: of two cells the one in use. */
+function shownReading({ picture }: SolvedReading, kind: string, texts: Written): string {
+  if (picture.lowRangeInUse === true) return ofLowRange(asRead(texts.lowRange));
+  return asRead(kind === 'gauges' ? texts.upstream : texts.value);
 }
 
 function piecesOf({ meter }: Context, row: SolvedReading, kind: string, result: Solved): readonly ReadPiece[] {

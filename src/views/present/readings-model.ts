@@ -11,7 +11,7 @@ export interface InstrumentTexts {
   readonly reading: string; // '152 mm', '12 mA'
   readonly second: string; // throat gauge, or the cell of the low range; '' where there is none
   readonly liquid: string; // 'mercury, 13 540 kg/m³'
-  readonly above: string; // 'process fluid in both legs'
+  readonly above: readonly string[]; // 'the process fluid', 'in both legs'
   readonly upstream: readonly string[]; // 'upstream leg', 'stands lower'
   readonly downstream: readonly string[];
   readonly ends: readonly [string, string]; // of a signal

@@ -85,7 +85,7 @@ function liquidText({ meter, value }: Context, kind: string, { liquid_kg_m3: den
 }
 
 /** What fills the legs, where it is the process fluid by its name. */
-function aboveText({ meter }: Context, over: string): string {
+function aboveText({ meter }: Context, over: string): readonly string[] {
   const { above = 'process', aboveDownstream } = meter.instrument ?? {};
   if (aboveDownstream !== undefined) return words.filledUnlike;
   return above === 'process'

@@ -96,8 +96,8 @@ export const pictureWords = {
   high: 'high side',
   low: 'low side',
   rise: 'rise',
-  inLegs: (fluid: string): string => `${fluid} in both legs`,
-  filledUnlike: 'legs filled unlike',
+  inLegs: (fluid: string): readonly string[] => [fluid, 'in both legs'],
+  filledUnlike: ['legs filled unlike'],
   alt: (instrument: string, reading: string, differential: string): string =>
     `${instrument}, reading ${reading === '' ? 'none' : reading}${differential === '' ? '' : `, which is ${differential}`}. Heights of levels to scale, the rest is not.`,
 } as const;

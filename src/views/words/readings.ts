@@ -17,6 +17,9 @@ export function readPieces(kind: string, liquid: string, over: string): readonly
   return [];
 }
 
+/** A signal of the second of two cells. */
+export const ofLowRange = (signal: string): string => `${signal} of the low range`;
+
 /** How the sentence ends. */
 export const endPieces: Readonly<
   Record<'flows' | 'at-least' | 'cut-off' | 'still' | 'reversed', readonly ReadPiece[]>

@@ -22,7 +22,7 @@ export function CellAtLegs({ plate, texts }: Pick<InstrumentProps, 'plate' | 'te
       <rect className={styles.body} x={x1 + 22} y={218} width={x2 - x1 - 44} height={30} rx={4} />
       <Note x={8} y={118} lines={texts.upstream} />
       <Note x={x2 + 18} y={90} lines={texts.downstream} />
-      <Note x={x2 + 18} y={128} lines={[texts.above]} />
+      <Note x={x2 + 18} y={128} lines={texts.above} />
     </g>
   );
 }

@@ -22,7 +22,7 @@ export function UTube({ picture, most, plate, texts }: InstrumentProps) {
       <Pipe top={TOP} plate={plate} />
       <Note x={8} y={118} lines={texts.upstream} />
       <Note x={x2 + 18} y={96} lines={texts.downstream} />
-      <Note x={x2 + 18} y={134} lines={[texts.above]} />
+      <Note x={x2 + 18} y={134} lines={texts.above} />
       <Note x={x2 + 18} y={292} lines={texts.liquid.split(', ')} />
       <Height x={300} from={y2} to={y1} fromX={x2 + 10} toX={x1 + 10} label={texts.reading} />
     </g>

@@ -1,5 +1,5 @@
 /** Edits of the list of readings as a whole: a pasted block, a column filled down. */
-import { isTable, rowsOf } from '../fluid/paste.ts';
+import { rowsOf } from '../fluid/paste.ts';
 import { unitIn } from '../fluid/paste-table.ts';
 import { fileCell } from '../fluid/rows.ts';
 import { textAt } from '../text.ts';
@@ -74,5 +74,3 @@ export function filledDown(rows: readonly unknown[], name: string, row = 0): rea
 export function fromAbove(rows: readonly unknown[], name: string, row: number): string {
   return row > 0 ? textAt(rows[row - 1], name) : '';
 }
-
-export { isTable };
