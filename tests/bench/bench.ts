@@ -5,6 +5,7 @@
 import { mkdirSync, writeFileSync } from 'node:fs';
 import { cpus } from 'node:os';
 import { join } from 'node:path';
+import { browserLog } from './browser-log.ts';
 import { conversion } from './conversion.ts';
 import { gas } from './gas.ts';
 import { log } from './log.ts';
@@ -26,6 +27,7 @@ const parts: Readonly<Record<string, () => Line[] | Promise<Line[]>>> = {
   log,
   conversion: () => conversion(root),
   screen: () => screen(root),
+  'browser-log': () => browserLog(root),
 };
 
 const words = process.argv.slice(2).filter((word) => word in parts);

@@ -136,7 +136,8 @@ test('300,000 rows with faults: progress, cancelled, converted to what the comma
   const tonnes = Number(
     (
       await log(page)
-        .getByRole('row', { name: /^Mass\b/ })
+        .getByRole('table', { name: 'Totals' })
+        .getByRole('row', { name: /^Mass/ })
         .getByRole('cell')
         .innerText()
     ).replace(/[^\d.]/g, ''),

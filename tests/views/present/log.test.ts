@@ -2,6 +2,7 @@
 import { describe, expect, it } from 'vitest';
 import { emptyProject } from '../../../src/core/document/codec.ts';
 import type { MeterText, Project } from '../../../src/core/document/project.ts';
+import type { LogText } from '../../../src/core/document/v/1-log.ts';
 import { openLog } from '../../../src/core/log/log.ts';
 import { lookAt, planLog } from '../../../src/core/log/look.ts';
 import { solveMeter } from '../../../src/core/run.ts';
@@ -18,7 +19,7 @@ const columns = {
   pressure: { column: 'p', unit: 'bar(g)' },
   maxGap: '5 s',
 };
-const meterWith = (log: object): MeterText => ({ ...feedWater, log });
+const meterWith = (log: LogText): MeterText => ({ ...feedWater, log });
 const project: Project = { ...emptyProject(), title: 'Tern Island works' };
 const bytes = (lines: readonly string[]): Uint8Array => new TextEncoder().encode(`${lines.join('\n')}\n`);
 const stamp = (second: number): string => new Date(Date.UTC(2026, 2, 14, 23, 59, 50) + 1000 * second).toISOString();
@@ -34,7 +35,7 @@ lines.push(`${stamp(20)},100,7.0`, `${stamp(21)},100,7.0`);
 
 const text = bytes(lines);
 
-function converted(log: object = columns, display: 'SI' | 'US' = 'SI', stale = false) {
+function converted(log: LogText = columns, display: 'SI' | 'US' = 'SI', stale = false) {
   const meter = meterWith(log);
   const plan = planLog({ meter, index: 0, project }, { first: text, complete: true });
   if (!plan.ok) throw new Error(`expected a plan, got ${JSON.stringify(plan.problems)}`);
@@ -124,7 +125,7 @@ describe('a converted log', () => {
 const stampClock = (time: number): string => new Date(time * 1000).toISOString().slice(11, 19);
 
 describe('the first rows', () => {
-  const look = (log: object, written: Uint8Array = text) => {
+  const look = (log: LogText, written: Uint8Array = text) => {
     const meter = meterWith(log);
     const found = lookAt({ meter, index: 0, project }, { first: written, complete: true });
     if (found === undefined) throw new Error('expected a look, got none');
