@@ -20,6 +20,8 @@ export interface Covering {
   readonly announce: () => void;
   /** Surfaces that may still be built. */
   left: number;
+  /** The first of the margins still worth trying: beside a border of the fluid the wider one fails each time. */
+  margin: number;
   /** Why there was none, where one was wanted. */
   why?: string;
 }
@@ -46,6 +48,7 @@ export const openCovering = (
   announce,
   box: { pressure: NOWHERE, temperature: NOWHERE },
   left: exact ? 0 : MOST_SURFACES,
+  margin: 0,
 });
 
 /** Whether the surface at hand covers a state. */
@@ -55,7 +58,8 @@ export const covers = ({ box: { pressure, temperature } }: Covering, p: number, 
 /** Builds a surface that covers a state too, where that is still allowed and works; else the one at hand stays. */
 export function widen(covering: Covering, p: number, T: number): void {
   const { stands, box, fixed } = covering;
-  for (const { width, pressure, temperature } of MARGINS) {
+  for (const [at, { width, pressure, temperature }] of MARGINS.entries()) {
+    if (at < covering.margin) continue;
     if (covering.left === 0) return;
     covering.left -= 1;
     covering.announce();
@@ -68,6 +72,7 @@ export function widen(covering: Covering, p: number, T: number): void {
       covering.kernel = kernel;
       covering.bounds = covering.bounds === undefined ? kernel.bounds : largest(covering.bounds, kernel.bounds);
       covering.box = wider;
+      covering.margin = at;
       return;
     }
     covering.why = kernel.why ?? 'not-smooth';
