@@ -2,7 +2,7 @@
 
 import { fromSI } from '../../core/quantity/units.ts';
 import { chartSummaryText } from '../words/logs.ts';
-import type { LogContext } from './log.ts';
+import type { LogContext } from './log-context.ts';
 import type { LogChart } from './log-model.ts';
 
 const MARKS = 6; // at most

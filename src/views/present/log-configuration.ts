@@ -1,7 +1,7 @@
 /** How a log was converted, row by row as it is printed: file, columns, rules, and the way the rows took. */
 import { fieldLabel } from '../words/fields.ts';
 import { assumedText, interpretationLabel, logRows, logSheet, usualGap } from '../words/logs.ts';
-import type { Conversion, LogContext } from './log.ts';
+import type { Conversion, LogContext } from './log-context.ts';
 import { writtenIn } from './sheet.ts';
 import { duration } from './stamps.ts';
 

@@ -3,7 +3,7 @@ import type { AccountRecord, Extreme, ShownRow } from '../../core/result/log-rec
 import { accountWordsOf } from '../words/log-accounts.ts';
 import { extremeLabels, resultWords } from '../words/logs.ts';
 import type { Role } from '../words/print.ts';
-import type { LogContext } from './log.ts';
+import type { LogContext } from './log-context.ts';
 import type { AccountRow, DayRow, ExtremeRow } from './log-model.ts';
 import { show } from './numbers.ts';
 import { duration } from './stamps.ts';

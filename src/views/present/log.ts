@@ -1,7 +1,5 @@
 /** One converted log, ready to print: every row, sentence, table and the picture that the views show. */
-import type { MeterText, Project } from '../../core/document/project.ts';
 import type { LogResult } from '../../core/result/log-record.ts';
-import type { MeterResult } from '../../core/result/record.ts';
 import {
   blankText,
   exactBecause,
@@ -16,38 +14,15 @@ import {
   spanningText,
   logRows as words,
 } from '../words/logs.ts';
-import { contextOf } from './context.ts';
 import { logChart } from './log-chart.ts';
 import { configurationOf } from './log-configuration.ts';
+import { type Conversion, type LogContext, logContext } from './log-context.ts';
 import type { PresentedLog } from './log-model.ts';
 import { accountRows, dayRows, extremeRows } from './log-tables.ts';
 import { presentMeter } from './meter.ts';
 import type { Row, Segment, Value } from './model.ts';
-import { type Printer, printer, show } from './numbers.ts';
 import { headOf } from './sheet.ts';
-import { duration, stampsIn } from './stamps.ts';
-import { unit } from './units.ts';
-
-/** A conversion with what it was made by. */
-export interface Conversion {
-  readonly record: LogResult;
-  readonly meter: MeterText;
-  readonly project: Project;
-  readonly result: MeterResult;
-  readonly name: string; // of the file
-  readonly seconds: number; // that it took
-  /** Whether the meter or the columns are others by now. */
-  readonly stale: boolean;
-}
-
-/** What the parts of a presented log look at. */
-export interface LogContext extends Printer {
-  readonly record: LogResult;
-  readonly stamp: (seconds: number) => string;
-  readonly count: (whole: number) => Value;
-}
-
-const SMALL = 1e4; // kg: totals below are printed in kilograms
+import { duration } from './stamps.ts';
 
 export function presentLog(conversion: Conversion): PresentedLog {
   const { record, meter, project, result, stale } = conversion;
@@ -66,18 +41,6 @@ export function presentLog(conversion: Conversion): PresentedLog {
     configuration: configurationOf(at, conversion),
     notes: notesOf(record, at),
     head: headOf(meter, project, presented, stale),
-  };
-}
-
-function logContext({ record, meter, project }: Conversion): LogContext {
-  const { units, display } = contextOf(meter, project);
-  const small = display === 'SI' && record.total_kg < SMALL;
-  const printed = printer({ ...units, ...(small ? { mass: unit('kg', 'mass') } : {}) });
-  return {
-    ...printed,
-    record,
-    stamp: stampsIn(record.zone),
-    count: (whole) => show(whole, undefined, { decimals: 0 }),
   };
 }
 

@@ -3,7 +3,7 @@ import { type ComponentType, useState } from 'react';
 import type { Project } from '../../core/document/project.ts';
 import type { Results } from '../../core/result/record.ts';
 import { type ListName, standingOf } from '../../state/lists.ts';
-import type { Conversion } from '../present/log.ts';
+import type { Conversion } from '../present/log-context.ts';
 import { useCommands, useWorkbench } from './binding.tsx';
 import { useLogConversion } from './log-conversion.ts';
 import styles from './SheetPlace.module.css';

@@ -1,7 +1,7 @@
 /** The conversion of the log at hand, for the sheets. */
 import { useMemo } from 'react';
 import { isCurrent } from '../../state/logs.ts';
-import type { Conversion } from '../present/log.ts';
+import type { Conversion } from '../present/log-context.ts';
 import { useWorkbench } from './binding.tsx';
 
 /** The last conversion with the place of its meter, in the display of today; undefined while there is none. */

@@ -3,7 +3,8 @@
  * nothing else is printed: everything that neither holds nor belongs to the sheets is left off the paper.
  */
 import { type ComponentType, useMemo } from 'react';
-import { type Conversion, presentLog } from '../present/log.ts';
+import { presentLog } from '../present/log.ts';
+import type { Conversion } from '../present/log-context.ts';
 import {
   isAsked,
   type PresentedSheet,

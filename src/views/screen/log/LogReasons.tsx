@@ -39,27 +39,33 @@ export function LogReasons({ reasons }: { readonly reasons: readonly AccountRow[
           </tr>
         </thead>
         <tbody>
-          {reasons.map(({ code, label, meaning, fate, rows, share, time, mass, first }) => (
-            <tr key={code}>
-              <th scope="row">
-                {label}
-                <small>
-                  {fate}. {meaning}
-                </small>
-              </th>
-              <td>{rows.text}</td>
-              <td>{share.text}</td>
-              <td>{time?.text}</td>
-              <td>{mass?.text}</td>
-              <td className={styles.firsts}>
-                {first.map((row) => (
-                  <span key={row}>{row}</span>
-                ))}
-              </td>
-            </tr>
+          {reasons.map((reason) => (
+            <Reason key={reason.code} reason={reason} />
           ))}
         </tbody>
       </table>
     </section>
+  );
+}
+
+function Reason({ reason: { label, meaning, fate, rows, share, time, mass, first } }: { readonly reason: AccountRow }) {
+  return (
+    <tr>
+      <th scope="row">
+        {label}
+        <small>
+          {fate}. {meaning}
+        </small>
+      </th>
+      <td>{rows.text}</td>
+      <td>{share.text}</td>
+      <td>{time?.text}</td>
+      <td>{mass?.text}</td>
+      <td className={styles.firsts}>
+        {first.map((row) => (
+          <span key={row}>{row}</span>
+        ))}
+      </td>
+    </tr>
   );
 }
