@@ -58,6 +58,7 @@ test('there are documents of every version', () =>
     '1/fluids.headwright.json',
     '1/odd-order.headwright.json',
     '1/place.headwright.json',
+    '1/readings.headwright.json',
     '1/surveys.headwright.json',
     '1/tern-island.headwright.json',
     '1/unknown-keys.headwright.json',

@@ -163,6 +163,9 @@ export const flowRecord = (massFlow: number, { density, baseDensity }: FluidStat
   ...(baseDensity === undefined ? {} : { baseVolumeFlow_m3_s: massFlow / baseDensity }),
 });
 
+/** A percentage that rounding alone leaves is nothing. */
+const beyondRounding = (percent: number): number => (Math.abs(percent) < 1e-10 ? 0 : percent);
+
 /** What the mass flow of a root signal grows by from one density to another, at one differential: q_m ~ sqrt(dp rho). */
 export const densityFactor = (density: number, design: number): number => Math.sqrt(density / design);
 
@@ -185,6 +188,6 @@ function compensationOf(
     indicated: flowRecord(indicated, design),
     densityFactor: factor,
     corrected: flowRecord(corrected, state),
-    residual_percent: 100 * (corrected / exact - 1),
+    residual_percent: beyondRounding(100 * (corrected / exact - 1)),
   };
 }

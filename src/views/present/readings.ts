@@ -156,12 +156,9 @@ function compensationOf(
     corrected,
     exact,
     factor: at.value(compensation.densityFactor, 'factor'),
-    residual: at.value(residual(compensation.residual_percent), 'uncertainty'),
+    residual: at.value(compensation.residual_percent, 'uncertainty'),
   };
 }
-
-/** What rounding alone leaves is nothing. */
-const residual = (percent: number): number => (Math.abs(percent) < 1e-9 ? 0 : percent);
 
 function notesOf(rows: readonly ReadingRecord[]): readonly string[] {
   const solved = rows.find((row) => row.status === 'solved');
