@@ -50,7 +50,9 @@ export function createLogOrders(options: LogDeskOptions): LogOrders {
       if (file === undefined) options.store.getState().setNotice({ code: 'open-cancelled', detail: {}, kind: 'info' });
       else open(desk, file);
     },
-    openDroppedLog: (file) => open(desk, file),
+    openDroppedLog: (file) => {
+      if (open(desk, file)) window.location.hash = '#/read';
+    },
     openExampleLog: () => openExample(desk),
     convertLog: () => convert(desk),
     cancelLog: () => desk.job?.cancel(),
@@ -86,15 +88,20 @@ function report({ store }: LogDesk, change: Partial<OpenLog>, without: readonly 
   setLog(next);
 }
 
-/** Puts a file at the selected meter in place of the log at hand. */
-function open(desk: LogDesk, file: File): void {
-  const { keys, selected, setLog } = desk.store.getState();
+/** Puts a file at the selected meter in place of the log at hand; false where there is no meter, or a log is on its way. */
+function open(desk: LogDesk, file: File): boolean {
+  const { keys, selected, log, setLog, setNotice } = desk.store.getState();
   const key = keys[selected];
-  if (key === undefined) return;
+  if (key === undefined || log?.progress !== undefined) {
+    const code = key === undefined ? 'log-without-meter' : 'log-on-its-way';
+    setNotice({ code, detail: { name: file.name }, kind: 'problem' });
+    return false;
+  }
   letGo(desk);
   desk.file = file;
   setLog({ key, name: file.name, bytes: file.size, troubles: [], cancelled: false });
   void look(desk);
+  return true;
 }
 
 /** Ends what runs and forgets what was converted. */

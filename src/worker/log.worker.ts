@@ -51,7 +51,7 @@ async function carryOut(job: number, order: Order): Promise<Ending> {
     isCancelled: () => cancelled.has(job),
     announce: () => post({ kind: 'busy', job }),
     report: (progress) => post({ kind: 'progress', job, progress }),
-    openOutput: () => openOutput(order.owner, storage),
+    openOutput: () => openOutput(order.owner, storage, order.file.size),
   });
 }
 

@@ -36,11 +36,16 @@ export const MOST_IN_MEMORY = 256 << 20;
 type Folder = FileSystemDirectoryHandle & { keys(): AsyncIterable<string> };
 type WorkerFile = FileSystemFileHandle & { createSyncAccessHandle?(): Promise<SyncFile> };
 
-/** An output for a page; what the same page had before is removed. */
-export async function openOutput(owner: string, storage: StorageManager | undefined): Promise<Output> {
+/**
+ * An output of at least so many bytes for a page; what the same page had before is removed. Throws an OutputFull where
+ * the store has no room for it.
+ */
+export async function openOutput(owner: string, storage: StorageManager | undefined, least: number): Promise<Output> {
   const folder = await folderOf(storage);
   if (folder === undefined) return inMemory();
   await tidy(owner, folder);
+  const { quota = Number.POSITIVE_INFINITY, usage = 0 } = (await storage?.estimate?.()) ?? {};
+  if (quota - usage < least) throw new OutputFull('log-store-short', { free: Math.max(0, quota - usage), least });
   const name = `${owner}.csv`;
   const file: WorkerFile = await folder.getFileHandle(name, { create: true });
   const sync = await file.createSyncAccessHandle?.();

@@ -14,7 +14,7 @@ import type { Line } from './report.ts';
 
 const DAY = 86_400;
 const PAIRS = 15;
-const PAIR_DAYS = 12; // about a million rows
+const PAIR_DAYS = 35; // three million rows, beside which a surface costs little
 const MEMORY_DAYS = [35, 353] as const; // three million rows, thirty million
 const LONG = 1_800_000; // ms
 

@@ -65,7 +65,7 @@ test('a file that is dropped is opened', async ({ page }) => {
   const text = await exampleText();
   const carried = await carry(page, text);
   await main(page).dispatchEvent('dragover', { dataTransfer: carried });
-  await expect(page.getByText('Let go to open the project file')).toBeVisible();
+  await expect(page.getByText('Let go to open the project or the log')).toBeVisible();
   await main(page).dispatchEvent('drop', { dataTransfer: carried });
   await expect(answer(page)).toContainText('mm bore reads');
   expect(String(await save(page))).toBe(text);

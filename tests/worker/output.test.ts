@@ -108,10 +108,24 @@ describe('the store of the browser', () => {
   afterEach(() => vi.unstubAllGlobals());
 
   test('a new output takes the place of the last one, and of those of pages that are gone', async () => {
-    const output = await openOutput('this', storage);
+    const output = await openOutput('this', storage, 100);
     expect([...names].sort()).toEqual(['other.csv', 'this.csv']);
     await output.discard();
     expect([...names]).toEqual(['other.csv']);
+  });
+
+  test('a store without room for it is no place for it', async () => {
+    const short = Object.assign(Object.create(storage), {
+      getDirectory: storage.getDirectory,
+      estimate: async () => ({ quota: 1000, usage: 950 }),
+    });
+    const fault = await openOutput('this', short, 100).catch((cause: unknown) => cause);
+    expect(fault instanceof OutputFull && fault.trouble).toEqual({
+      code: 'log-store-short',
+      field: 'log',
+      detail: { free: 50, least: 100 },
+    });
+    expect(await openOutput('this', short, 50)).toBeDefined();
   });
 
   test('tidied: what other pages hold stays', async () => {
@@ -123,7 +137,7 @@ describe('the store of the browser', () => {
     ['no store', undefined],
     ['a store that is closed to this window', { getDirectory: () => Promise.reject(new DOMException('no')) }],
   ])('%s: memory', async (_, none) => {
-    const output = await openOutput('this', none as StorageManager | undefined);
+    const output = await openOutput('this', none as StorageManager | undefined, 100);
     output.write(bytesOf(2));
     expect((await output.finish()).size).toBe(2);
     expect(names.size).toBe(3);

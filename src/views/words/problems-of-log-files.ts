@@ -14,6 +14,12 @@ export const logFileProblems: ProblemWords = {
       `after ${d.figure('bytes', 'count')} bytes, at row ${d.figure('row', 'count')}.`,
     next: 'Open the log unpacked, or pack it again. Nothing was converted.',
   }),
+  'log-store-short': (d) => ({
+    cause:
+      `The browser has room for ${d.figure('free', 'count')} bytes, ` +
+      `and the converted rows are at least ${d.figure('least', 'count')}.`,
+    next: 'Put the log through in parts, or free some space on the disk. Nothing was converted.',
+  }),
   'log-store-full': (d) => ({
     cause: `The browser has no more room for the converted rows, after ${d.figure('bytes', 'count')} bytes.`,
     next: 'Put the log through in parts, or free some space on the disk. Nothing was converted.',

@@ -1,4 +1,4 @@
-/** The whole window takes a dropped project file. */
+/** The whole window takes a dropped project file, or a log for the meter at hand. */
 import { type DragEvent, type ReactNode, useState } from 'react';
 import { useCommands } from '../binding.tsx';
 import styles from './DropZone.module.css';
@@ -28,7 +28,7 @@ export function DropZone({ children }: { readonly children: ReactNode }) {
       onDrop={onDrop}
     >
       {children}
-      {over && <p className={styles.over}>Let go to open the project file</p>}
+      {over && <p className={styles.over}>Let go to open the project or the log</p>}
     </div>
   );
 }

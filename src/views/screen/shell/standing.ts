@@ -41,6 +41,9 @@ const NOTICES: Readonly<Record<string, Words>> = {
   'file-refused': (d) => `${named(d)} could not be written there. Save it to another place.`,
   'file-downloaded': (d) => `${named(d)} went to the downloads of this browser.`,
   'file-saved': (d) => `Saved as ${named(d)}.`,
+  'log-without-meter': ({ name }) =>
+    `${name} is a log, and there is no meter to convert it by. Add or open a meter first.`,
+  'log-on-its-way': (d) => `A log is being converted: ${named(d)} can be opened when it is done, or cancelled.`,
   'example-log-missing': () =>
     'This meter cannot be solved as it stands, so that there is no example log for it. Mend the meter first.',
   'example-missing': () => 'The example is not at hand without a network. Open it once while online.',
