@@ -38,12 +38,6 @@ export interface LogQuestion {
   readonly answers: readonly { readonly label: string; readonly value: string }[];
 }
 
-/** A table of figures under the heads of its columns. */
-export interface LogTable {
-  readonly heads: readonly string[];
-  readonly rows: readonly { readonly key: string; readonly head: string; readonly cells: readonly Value[] }[];
-}
-
 export interface AccountRow {
   readonly code: string;
   readonly label: string;

@@ -79,7 +79,7 @@ function totalRows(at: LogContext): readonly Row[] {
       : [
           {
             ...row('gaps', words.gaps, duration(record.gap_s)),
-            note: `${gapsText(count(record.gaps).number, duration(record.gap_s).text)}, ${longestGapText(duration(longestGap.seconds).text, stamp(longestGap.from_s))}`,
+            note: `${gapsText(count(record.gaps).number)}, ${longestGapText(duration(longestGap.seconds).text, stamp(longestGap.from_s))}`,
           },
           row('substitute-held', words.substituteHeld, value(substitutes.held_kg, 'mass')),
           row('substitute-line', words.substituteLine, value(substitutes.straightLine_kg, 'mass')),

@@ -64,7 +64,6 @@ export const logFields = {
   dayStart: 'Day begins at',
   frozen: 'Frozen after so many equal rows',
   spike: 'Spike beyond so many deviations',
-  exact: 'Every row through the whole calculation',
   exactNote: 'Slower, and the same within the bound that is printed with the result.',
   delimiter: 'Delimiter',
   decided: 'as found',
@@ -195,7 +194,6 @@ export const resultWords = {
   flagged: 'Flagged',
   gap: 'Gaps',
   tooHigh: 'too high',
-  sum: 'All rows',
   fates: { converted: 'converted', remarked: 'converted, with a remark', refused: 'not converted' },
 } as const;
 
@@ -217,7 +215,7 @@ export const logAnswer = (mass: string, from: string, to: string, mean: string):
   `${mass} passed between ${from} and ${to}, ${mean} in the mean.`;
 export const logNoAnswer = 'No two rows could be joined: there is no total.';
 
-export const gapsText = (count: string, time: string): string => `${time} in ${count}`;
+export const gapsText = (count: string): string => `${count} of them`;
 export const longestGapText = (time: string, at: string): string => `the longest ${time}, from ${at}`;
 export const chartSummaryText = (least: string, most: string): string =>
   `Mass flow from ${least} to ${most}. Each stretch of time shows its least and its largest flow, so that no peak is lost; gaps are left open.`;
@@ -244,6 +242,5 @@ export const sizeText = { bytes: 'bytes', kilo: 'kB', mega: 'MB', giga: 'GB' } a
 export const logSheet = {
   type: 'Summary of a log',
   file: 'Log',
-  converted: 'Rows',
   more: (count: string): string => `${count} more days are left out here; they are in the table on the screen.`,
 } as const;

@@ -48,14 +48,16 @@ export function LogReasons({ reasons }: { readonly reasons: readonly AccountRow[
   );
 }
 
-function Reason({ reason: { label, meaning, fate, rows, share, time, mass, first } }: { readonly reason: AccountRow }) {
+function Reason({
+  reason: { code, label, meaning, fate, rows, share, time, mass, first },
+}: {
+  readonly reason: AccountRow;
+}) {
   return (
     <tr>
       <th scope="row">
         {label}
-        <small>
-          {fate}. {meaning}
-        </small>
+        <small>{code === 'converted' ? meaning : `${fate}. ${meaning}`}</small>
       </th>
       <td>{rows.text}</td>
       <td>{share.text}</td>
