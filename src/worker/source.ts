@@ -40,7 +40,15 @@ interface Read {
 }
 
 async function* plainPieces(file: Blob, read: Read): AsyncGenerator<Uint8Array, void> {
-  const reader = file.stream().getReader({ mode: 'byob' });
+  const stream = file.stream();
+  const reader = withOwnBuffer(stream);
+  if (reader === undefined) {
+    for await (const piece of handedOver(stream.getReader())) {
+      read.bytes += piece.length;
+      yield piece;
+    }
+    return;
+  }
   let buffer = new ArrayBuffer(PIECE);
   try {
     for (;;) {
@@ -50,6 +58,25 @@ async function* plainPieces(file: Blob, read: Read): AsyncGenerator<Uint8Array, 
       yield value;
       buffer = value.buffer;
     }
+  } finally {
+    await reader.cancel().catch(() => undefined); // nothing is left to cancel after the end or a fault
+  }
+}
+
+type Stream = ReadableStream<Uint8Array<ArrayBuffer>>;
+
+/** A reader that fills our own buffer; undefined in a browser that has none for files. */
+function withOwnBuffer(stream: Stream): ReadableStreamBYOBReader | undefined {
+  try {
+    return stream.getReader({ mode: 'byob' });
+  } catch {
+    return undefined; // the pieces that the browser hands over are read instead
+  }
+}
+
+async function* handedOver(reader: ReadableStreamDefaultReader<Uint8Array<ArrayBuffer>>) {
+  try {
+    for (let next = await reader.read(); !next.done; next = await reader.read()) yield next.value;
   } finally {
     await reader.cancel().catch(() => undefined); // nothing is left to cancel after the end or a fault
   }

@@ -68,6 +68,25 @@ describe('a log that is converted', () => {
     expect(output.discarded).toBe(false);
   });
 
+  test('also where the browser fills no buffer of ours', async () => {
+    const given = new Blob([text]);
+    const plainStream = (): ReadableStream<Uint8Array<ArrayBuffer>> => {
+      const bytes = new TextEncoder().encode(text);
+      let at = 0;
+      return new ReadableStream({
+        pull: (to) => {
+          if (at >= bytes.length) to.close();
+          else to.enqueue(bytes.slice(at, at + 50_000));
+          at += 50_000;
+        },
+      });
+    };
+    const file = { size: given.size, slice: given.slice.bind(given), stream: plainStream } as Blob;
+    const { output, surroundings } = around();
+    expect(converted(await convert(ofMeter, file, surroundings)).record.total_kg).toBe(whole.total);
+    expect(output.text()).toBe(whole.out);
+  });
+
   test('says so before it builds a surface', async () => {
     const { announced, surroundings } = around();
     await convert(ofMeter, new Blob([text]), surroundings);
