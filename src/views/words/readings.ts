@@ -34,6 +34,10 @@ export const failedPieces: readonly ReadPiece[] = [reading, ': the instrument re
 
 export const readWords = {
   wait: (tag: string): string => `${tag === '' ? 'The meter' : tag} waits for a reading.`,
+  empty: 'What flows, by what the instrument shows?',
+  emptyText:
+    'Readings and logs are put to a meter. Describe it first: pipe, fluid and element; then come back to read it.',
+  begin: 'Describe a meter',
   refused: 'This reading cannot be used.',
   unsolved: 'The meter itself cannot be solved as it stands; its readings wait for it.',
   toSize: 'Go to its form',

@@ -2,12 +2,13 @@
 import { type KeyboardEvent, lazy, Suspense, useState } from 'react';
 import type { ReadingRow } from '../../present/readings-model.ts';
 import { Boundary } from '../Boundary.tsx';
-import { EmptyProject } from '../EmptyProject.tsx';
+
 import { focusNext } from '../focus.ts';
 import { type SelectedMeter, useMeterText, useSelectedMeter } from '../meter.ts';
 import { Notes } from '../panel/Notes.tsx';
 import size from '../Size.module.css';
 import { Compensate } from './Compensate.tsx';
+import { EmptyRead } from './EmptyRead.tsx';
 import { InstrumentPanel } from './InstrumentPanel.tsx';
 import styles from './Read.module.css';
 import { ReadAnswer } from './ReadAnswer.tsx';
@@ -27,7 +28,7 @@ function onEnter(event: KeyboardEvent): void {
 
 export function Read() {
   const selected = useSelectedMeter();
-  if (selected === undefined) return <EmptyProject />;
+  if (selected === undefined) return <EmptyRead />;
   return (
     // biome-ignore lint/a11y/noStaticElementInteractions: Enter is only passed on to the next field
     <div className={size.size} onKeyDown={onEnter}>
