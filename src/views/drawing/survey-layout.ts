@@ -159,7 +159,7 @@ function isLevel(spot: Bare, spots: readonly Bare[]): boolean {
   return other !== undefined && Math.abs(other.y - spot.y) < 0.2 * Math.abs(other.x - spot.x);
 }
 
-/** A number stands right of its point, or where there is room; it is left out where it would cover something. */
+/** A number stands beside its point, or where there is room; it is left out where it would cover something. */
 function labelled(
   spots: readonly Bare[],
   radius: number,
@@ -167,6 +167,7 @@ function labelled(
   inside: (x: number, y: number) => boolean,
 ): readonly Spot[] {
   const taken: { readonly x: number; readonly y: number; readonly half: number }[] = [];
+  const middle = spots.reduce((sum, { x }) => sum + x, 0) / spots.length;
   return spots.map((spot) => {
     const half = type * 0.31 * String(spot.number).length;
     const [aside, above] = [radius + 2 + half, radius + 1 + type * 0.5];
@@ -178,7 +179,9 @@ function labelled(
       { x: spot.x, y: spot.y - above },
       { x: spot.x, y: spot.y + above },
     ];
-    const places = isLevel(spot, spots) ? [...over, ...beside] : [...beside, ...over];
+    const toMiddle = Math.sign(middle - spot.x) * half;
+    const inward = over.map(({ x, y }) => ({ x: x + toMiddle, y })); // near the wall of a circle
+    const places = isLevel(spot, spots) ? [...over, ...beside, ...inward] : [...beside, ...over];
     const free = places.find(
       ({ x, y }) =>
         inside(x - half, y) &&

@@ -56,6 +56,14 @@ describe.each(plans)('%s', (_name, traverse) => {
   });
 });
 
+it.each([92, 168, 280])('names every point of two diameters of six, %i high', (height) => {
+  const six = { ...round, lines: 2, pointsPerLine: 6, readings: [] };
+  const { spots } = surveyLayout(survey(six).shape, { ...box, height });
+  const named = spots.filter(({ label }) => label !== undefined).map(({ number }) => number);
+  if (height < 168) expect(named.length).toBeLessThan(12);
+  else expect(named).toEqual(spots.map(({ number }) => number));
+});
+
 it('is to scale, and the probe goes in from the side that holds the ports', () => {
   const { outline, spots, ports } = layoutOf(rectangular);
   if (outline.shape !== 'rect') throw new Error('expected a rectangle');
