@@ -80,7 +80,7 @@ test('a survey is planned from nothing', async ({ page }) => {
   await expect(answer(page)).toHaveText('25 points wait to be read.');
   await expect(main(page).getByRole('img', { name: 'Section of the duct with its points' })).toBeVisible();
   await expect(panel(page, 'Readings').getByRole('row', { name: /^1 84\.1/ })).toBeVisible();
-  await press(page, /^Take: Air balancing: log-tchebycheff/);
+  await press(page, /^Take: Air balancing: log-Tchebycheff/);
   await expect(answer(page)).toHaveText('30 points wait to be read.');
   await page.getByRole('button', { name: 'Undo' }).click();
   await expect(answer(page)).toHaveText('25 points wait to be read.');

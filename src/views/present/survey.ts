@@ -11,7 +11,7 @@ import {
   openAnswer,
   pointsRead,
   practiceLabel,
-  ruleLabel,
+  ruleInLine,
   surveyMeanings,
   surveyWords as words,
 } from '../words/surveys.ts';
@@ -85,7 +85,7 @@ function underOf(at: Context, { tag, rule, lines, uncertainty, points }: SolvedT
   const grid = others.every((count) => count === first) ? gridText(lines.length, first) : `${points} points`;
   const sure = uncertainty && `±${at.value(uncertainty.expanded_percent, 'uncertainty').text}, 95\u00a0%`;
   const open = uncertainty?.terms.some(({ stated, percentOfFlow }) => !stated && percentOfFlow === 0);
-  const parts = [tag, ruleLabel(rule).toLowerCase(), grid, sure && `${open ? 'at least ' : ''}${sure}`];
+  const parts = [tag, ruleInLine(rule), grid, sure && `${open ? 'at least ' : ''}${sure}`];
   return parts.filter(Boolean).join(' · ');
 }
 
@@ -101,7 +101,7 @@ function workingOf({ working }: SolvedTraverse): readonly WorkingGroup[] {
 function suggestionsOf({ suggestions, rule, lines }: SolvedTraverse): readonly SurveySuggestion[] {
   return suggestions.map((one) => ({
     key: one.practice,
-    text: words.suggestion(practiceLabel(one.practice), ruleLabel(one.rule), gridText(one.lines, one.pointsPerLine)),
+    text: words.suggestion(practiceLabel(one.practice), ruleInLine(one.rule), gridText(one.lines, one.pointsPerLine)),
     rule: one.rule,
     lines: one.lines,
     pointsPerLine: one.pointsPerLine,

@@ -61,12 +61,16 @@ export const probeLabel = (kind: string): string => labelIn(probeChoices, kind);
 
 export const ruleLabel = (rule: string): string => labelIn(ruleChoices, rule);
 
+const lowered = (label: string): string => label.charAt(0).toLowerCase() + label.slice(1);
+
+/** The rule in the middle of a line: 'log-Tchebycheff', a name within keeping its capital. */
+export const ruleInLine = (rule: string): string => lowered(ruleLabel(rule));
+
 const shapeWords: Readonly<Record<string, string>> = { circular: 'Circular duct', rectangular: 'Rectangular duct' };
 
 /** 'Rectangular duct, log-Tchebycheff'; what is not known stands as written. */
 export function surveyLabel(shape: string, rule: string): string {
-  const name = ruleLabel(rule);
-  const parts = [shapeWords[shape] ?? 'Duct', name.charAt(0).toLowerCase() + name.slice(1)];
+  const parts = [shapeWords[shape] ?? 'Duct', ruleInLine(rule)];
   return parts.filter(Boolean).join(', ');
 }
 
@@ -148,7 +152,7 @@ export const surveyWords = {
   fromWall: 'from the inside of the wall',
   mean: 'Mean',
   moved: 'moved',
-  suggestion: (practice: string, rule: string, grid: string): string => `${practice}: ${rule.toLowerCase()}, ${grid}`,
+  suggestion: (practice: string, rule: string, grid: string): string => `${practice}: ${rule}, ${grid}`,
 } as const;
 
 /** The answer in pieces: words, and the figures that are found. */

@@ -31,6 +31,14 @@ describe('the answer', () => {
     expect(sentence({ ...rectangular, readings: [['61 Pa', '60 Pa']] })).toBe('2 of 25 points are read.');
   });
 
+  it('keeps the capital of a name within the rule', () => {
+    expect(shown(rectangular).under).toMatch(/ · log-Tchebycheff · /);
+    expect(
+      shown(rectangular)
+        .suggestions.map(({ text }) => text)
+        .join(),
+    ).toContain(': log-Tchebycheff, ');
+  });
   it('is in the units of the trade of the display', () => {
     const { answer, units } = shown(round, 'US');
     expect(answer[0]?.text).toMatch(/ft³\/min$/);
