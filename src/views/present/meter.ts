@@ -2,7 +2,7 @@
 import type { MeterText, Project } from '../../core/document/project.ts';
 import type { MeterResult, Refused, Solved } from '../../core/result/record.ts';
 import { cautions } from '../words/cautions.ts';
-import { coefficientWords, elementLabel, rulesOf } from '../words/elements.ts';
+import { coefficientWords, elementLabel, rulesOf, variantField } from '../words/elements.ts';
 import { fieldLabel } from '../words/fields.ts';
 import { fluidLabel, phaseWord } from '../words/fluids.ts';
 import { provenanceNotes } from '../words/provenance.ts';
@@ -35,8 +35,8 @@ export function presentMeter(
 
 function refusedMeter(at: Context, result: Refused): PresentedMeter {
   const { service, element } = at.meter;
-  const variant = element?.tappings ?? element?.convergent ?? element?.area;
   const kind = textOf(element?.kind);
+  const variant = element?.[variantField(kind) ?? '']; // what an earlier kind left in the file is not its own
   return {
     tag: result.tag,
     service: textOf(service),

@@ -91,6 +91,9 @@ export function variantWords(code: string): string | undefined {
   return variants[code.split('.')[1] ?? ''];
 }
 
+/** The field that holds the variant of a kind: 'tappings'; absent where the kind has none. */
+export const variantField = (kind: string): string | undefined => choiceOf(kind)?.fields[0]?.name;
+
 /** What the smallest section of the element is called. */
 export function openingWord(code: string): Opening {
   return choiceOf(code)?.opening ?? 'bore';

@@ -76,6 +76,17 @@ describe('units', () => {
 });
 
 describe('a refused meter', () => {
+  it('is named by its kind and the variant of that kind alone', () => {
+    const named = (element: object): string => {
+      const meter = { ...feedWater, element };
+      const project = projectOf('SI', meter as never);
+      const [result] = run(project).results;
+      if (result === undefined) throw new Error('expected a result, got none');
+      return presentMeter(meter as never, project, result).element;
+    };
+    expect(named({ kind: 'averaging-pitot', tappings: 'flange' })).toBe('Averaging pitot');
+    expect(named({ kind: 'averaging-pitot', tappings: 'flange', area: 'pipe' })).toContain('K on the pipe area');
+  });
   it.each([
     [{}],
     [{ find: 'bore' }],

@@ -1,6 +1,6 @@
 /** A field that can be the unknown: an input, or the shaded figure that was found, with the button that turns it round. */
 import type { Unknown as UnknownName } from '../../../core/document/project.ts';
-import { foundFrom } from '../../words/verdicts.ts';
+import { foundFrom, foundFromBar } from '../../words/verdicts.ts';
 import { FoundField } from '../field/FoundField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
 import { FIELD_OF, unknownOf } from '../field/turn.ts';
@@ -35,12 +35,13 @@ interface FoundProps {
 function Found({ unknown, label, path, aside }: FoundProps) {
   const selected = useSelectedMeter();
   const sizing = selected?.sizing?.find === unknown ? selected.sizing : undefined;
+  const bar = useMeterText('element.kind') === 'averaging-pitot';
   return (
     <FoundField
       label={label}
       path={path}
       value={sizing?.found.value}
-      from={sizing?.found.from ?? foundFrom[unknown]}
+      from={sizing?.found.from ?? (bar ? foundFromBar : foundFrom)[unknown]}
       stale={sizing !== undefined && selected?.stale === true}
       aside={aside}
     />
