@@ -66,18 +66,21 @@ function rowOf(
   drawing: Drawing,
 ): ReadingRow {
   const common = { index, time: row.time ?? '', written: writtenOf(at.meter, index) };
-  if (row.status === 'refused')
+  if (row.status === 'refused') {
+    const problems = row.problems.map((problem) => presentProblem(problem, at.print));
+    const ofInstrument = problems[0]?.field.startsWith('instrument') === true;
     return {
       ...common,
       status: 'refused',
       figures: {},
       note: { verdict: 'refused', words: notSolved },
-      answer: [{ text: readWords.refused, role: 'words' }],
-      under: '',
-      problems: row.problems.map((problem) => presentProblem(problem, at.print)),
+      answer: [{ text: ofInstrument ? readWords.unready : readWords.refused, role: 'words' }],
+      under: problems[0]?.sentence ?? '',
+      problems,
       checks: [],
       working: [],
     };
+  }
   const compensation = compensationOf(at, row, common.written);
   return {
     ...common,

@@ -39,6 +39,7 @@ export const readWords = {
     'Readings and logs are put to a meter. Describe it first: pipe, fluid and element; then come back to read it.',
   begin: 'Describe a meter',
   refused: 'This reading cannot be used.',
+  unready: 'The reading waits for its instrument.',
   unsolved: 'The meter itself cannot be solved as it stands; its readings wait for it.',
   toSize: 'Go to its form',
   table: 'Readings',

@@ -44,6 +44,14 @@ describe('the sentence of a row', () => {
     );
     expect(sentence(transmitter, { value: '22 mA' })).toBe('22 mA: the instrument reports a failure.');
   });
+  it('of a row that cannot be solved says why, be it the row or its instrument', () => {
+    const row = (instrument: InstrumentText, value: string) => present(instrument, [{ value }]).readings.rows[0];
+    const { liquid: _, ...unfilled } = uTube;
+    expect(row(unfilled, '152 mm')?.answer[0]?.text).toBe('The reading waits for its instrument.');
+    expect(row(unfilled, '152 mm')?.under).toContain('gauge liquid is not given');
+    expect(row(uTube, '15o')?.answer[0]?.text).toBe('This reading cannot be used.');
+    expect(row(uTube, '15o')?.under).toContain("The unit 'o'");
+  });
   it('names the cell that was used', () => {
     const stacked = { ...transmitter, lowRange: { upper: '25 mbar' } };
     expect(sentence(stacked, { value: '5.3 mA', lowRange: '17.2 mA' })).toMatch(/^17\.2 mA of the low range is /);
