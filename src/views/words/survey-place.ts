@@ -70,4 +70,5 @@ export const measureWords = {
   close: 'Close',
   sign: 'Change the sign',
   last: 'That was the last point.',
+  unread: (number: number): string => `Point ${number} cannot be read: back to it`,
 } as const;

@@ -4,7 +4,7 @@ import { SurveySection } from '../../drawing/SurveySection.tsx';
 import type { PresentedSurvey, SurveyPoint } from '../../present/survey-model.ts';
 import { measureWords as words } from '../../words/survey-place.ts';
 import { surveyWords } from '../../words/surveys.ts';
-import { useProblem } from '../meter.ts';
+import { useProblem, useProblems } from '../meter.ts';
 import styles from './Measure.module.css';
 import { ReadingBox, readingPath } from './ReadingBox.tsx';
 import type { Readings } from './readings.ts';
@@ -53,6 +53,7 @@ export function Measure({ survey, readings, from, close }: Props) {
         <SurveySection survey={survey} width={300} height={190} type={10} current={point.number} />
       </div>
       <Entry key={point.number} {...{ survey, readings, point, go }} last={number === points.length} />
+      <Unread {...{ readings, points, number }} to={setNumber} />
     </dialog>
   );
 }
@@ -61,6 +62,34 @@ const whereOf = ({ lines }: PresentedSurvey, { line }: SurveyPoint): string => {
   const at = lines[line];
   return [at?.title, at?.place].filter(Boolean).join(', ');
 };
+
+interface UnreadProps {
+  readonly readings: Readings;
+  readonly points: readonly SurveyPoint[];
+  /** The point at hand, which says its own trouble. */
+  readonly number: number;
+  readonly to: (number: number) => void;
+}
+
+/** The way back to the points whose text is no reading. */
+function Unread({ readings, points, number, to }: UnreadProps) {
+  const problems = useProblems();
+  const unread = points.filter(
+    (point) =>
+      point.number !== number &&
+      readings.textAt(point.line, point.point) !== '' &&
+      problems.some(({ field }) => field === readingPath(point)),
+  );
+  return (
+    <p className={styles.unread} role="status">
+      {unread.map((point) => (
+        <button key={point.number} type="button" onClick={() => to(point.number)}>
+          {words.unread(point.number)}
+        </button>
+      ))}
+    </p>
+  );
+}
 
 interface EntryProps {
   readonly survey: PresentedSurvey;
