@@ -155,6 +155,7 @@ export async function browserLog(root: string): Promise<Line[]> {
     context.setDefaultTimeout(LONG);
     await context.addInitScript(() => Reflect.deleteProperty(window, 'showOpenFilePicker'));
     const page = await context.newPage();
+    page.on('filechooser', () => undefined); // without a listener the browser closes a dialog at once
     const project = join(folder, 'project.json');
     writeFileSync(project, JSON.stringify(projectOf(steamMeter)));
     const path = join(folder, 'pairs.csv');
