@@ -1,10 +1,9 @@
 /** The sheets on paper, read back from the PDF: figures, pages, size of the paper. */
-import { spawnSync } from 'node:child_process';
-import { writeFileSync } from 'node:fs';
 import type { Page, TestInfo } from '@playwright/test';
 import type { MeterText, Project } from '../../src/core/document/project.ts';
 import { answer, exampleText, field, openExample, openProject } from './hand.ts';
 import { type Figures, solveHeadless } from './headless.ts';
+import { flat, printed } from './paper.ts';
 import { expect, test } from './watched.ts';
 
 type Paper = 'A4' | 'Letter';
@@ -18,24 +17,12 @@ const sheetsOf = ({ readings }: MeterText): readonly string[] => [
 ];
 const surveySheets = ['Survey sheet', 'Readings, checks and sources'];
 
-interface Printed {
-  readonly pages: readonly string[];
-  readonly about: string;
-}
-
-async function print(page: Page, paper: Paper, info: TestInfo): Promise<Printed> {
+async function print(page: Page, paper: Paper, info: TestInfo) {
   await page.getByRole('link', { name: 'Sheet' }).click();
   await page.getByRole('radio', { name: paper }).check();
   await expect(page.getByRole('region', { name: /Sizing sheet/ }).first()).toBeVisible();
-  const path = info.outputPath(`${paper}.pdf`);
-  writeFileSync(path, await page.pdf({ preferCSSPageSize: true, printBackground: true }));
-  const read = (command: string, ...args: string[]): string => spawnSync(command, args, { encoding: 'utf8' }).stdout;
-  const text = read('pdftotext', '-layout', path, '-');
-  return { pages: text.split('\f').slice(0, -1), about: read('pdfinfo', path) };
+  return printed(page, info, paper);
 }
-
-/** Spaces of any kind and width are one. */
-const flat = (text: string): string => text.replace(/[\s\u00a0\u202f\u2009]+/g, ' ');
 
 /** The words of one line of the table of flows, its figures in the order of its columns. */
 const lineOf = (text: string, name: string): string =>

@@ -230,6 +230,16 @@ test('usable at 390 px, and nothing for axe to find, light and dark', async ({ p
   expect(width).toBeLessThanOrEqual(390);
 });
 
+test('flow and note of a row stand on a screen of 1024 px', async ({ page }) => {
+  await page.setViewportSize({ width: 1024, height: 768 });
+  await openReadings(page, await seaWater({ kind: 'u-tube', liquid: 'mercury' }, [{ value: '152 mm' }]));
+  const table = panel(page, 'Readings').getByRole('table');
+  const { right } = await figure(page, 1, 'flow').evaluate((node) => node.getBoundingClientRect());
+  expect(right).toBeLessThan(
+    await table.evaluate((node) => node.closest('section')?.getBoundingClientRect().right ?? 0),
+  );
+});
+
 test('works without a network', async ({ page, context }) => {
   await openReadings(page, await seaWater({ kind: 'differential' }, [{ value: '100 mbar' }]));
   await page.evaluate(() => navigator.serviceWorker.ready);

@@ -11,4 +11,4 @@ export type {
   Unknown,
 } from './v/1.ts';
 export type { InstrumentText, ReadingText } from './v/1-instrument.ts';
-export type { LogColumnText, LogText, LogTimeText } from './v/1-log.ts';
+export type { LogText } from './v/1-log.ts';
