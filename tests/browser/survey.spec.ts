@@ -1,11 +1,11 @@
 /** A duct is surveyed: planned, printed, read by keyboard, by paste and with one hand, put right again, printed filled. */
 import { spawnSync } from 'node:child_process';
-import { writeFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import type { Locator, Page, TestInfo } from '@playwright/test';
 import type { Project } from '../../src/core/document/project.ts';
 import { surveyContext } from '../../src/views/present/survey-list.ts';
 import { answer, exampleText, keeping, main, openExample, openProject, panel, press, save } from './hand.ts';
+import { flat, printed } from './paper.ts';
 import { expect, test } from './watched.ts';
 
 interface Found {
@@ -57,16 +57,6 @@ const paste = (box: Locator, text: string): Promise<void> =>
     node.dispatchEvent(new ClipboardEvent('paste', { clipboardData, bubbles: true, cancelable: true }));
   }, text);
 
-const flat = (text: string): string => text.replace(/[\s\u00a0\u202f\u2009]+/g, ' ');
-
-async function printed(page: Page, info: TestInfo): Promise<readonly string[]> {
-  const path = info.outputPath('sheets.pdf');
-  writeFileSync(path, await page.pdf({ preferCSSPageSize: true, printBackground: true }));
-  const read = (command: string, ...args: string[]): string => spawnSync(command, args, { encoding: 'utf8' }).stdout;
-  const text = read('pdftotext', '-layout', path, '-');
-  return text.split('\f').slice(0, -1).map(flat);
-}
-
 test('a survey is planned from nothing', async ({ page }) => {
   await page.goto('/#/survey');
   await press(page, 'Plan a survey');
@@ -91,7 +81,7 @@ test('the form for the field has every depth of the command line', async ({ page
   await openSurvey(page, project);
   await page.getByRole('link', { name: 'Sheet' }).click();
   await expect(page.getByRole('region', { name: /Form for the field/ })).toBeVisible();
-  const [form = '', ...more] = await printed(page, info);
+  const [form = '', ...more] = (await printed(page, info)).pages.map(flat);
   expect(more).toEqual([]);
   const { value } = surveyContext(project.traverses?.[0], project);
   const [line = []] = headless(project, info).depths_m;
@@ -197,7 +187,7 @@ test('the filled sheet has every velocity of the command line, its checks and ca
   await openProject(page, project);
   await page.getByRole('link', { name: 'Sheet' }).click();
   await expect(page.getByRole('region', { name: /FP-5102, Survey sheet, 1 of 2/ })).toBeVisible();
-  const pages = await printed(page, info);
+  const pages = (await printed(page, info)).pages.map(flat);
   expect(pages).toHaveLength(2);
   const [first = '', points = ''] = pages;
   const { velocities_m_s = [], meanVelocity_m_s = 0, volumeFlow_m3_s = 0 } = headless(project, info);
