@@ -1,5 +1,6 @@
 /** A duct is surveyed: planned, printed, read by keyboard, by paste and with one hand, put right again, printed filled. */
 import { spawnSync } from 'node:child_process';
+import { writeFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import type { Locator, Page, TestInfo } from '@playwright/test';
 import type { Project } from '../../src/core/document/project.ts';
@@ -179,6 +180,24 @@ test.describe('a phone at the duct', () => {
     await expect(answer(page)).toContainText('flows through the section');
     const next = page.viewportSize();
     expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBeLessThanOrEqual(next?.width ?? 0);
+  });
+
+  test('a point that cannot be read stays in sight and leads back to itself', async ({ page }) => {
+    await openProject(page, { ...(await example()), meters: [] });
+    await page.getByRole('link', { name: 'Survey' }).click();
+    await press(page, 'Measure point by point');
+    const dialog = page.getByRole('dialog', { name: 'Measure' });
+    const back = dialog.getByRole('button', { name: 'Point 1 cannot be read: back to it' });
+    await page.keyboard.type('5o');
+    await page.keyboard.press('Enter');
+    await expect(dialog).toContainText('Point 2 of 25');
+    await back.tap();
+    await expect(dialog).toContainText('Point 1 of 25');
+    await expect(back).toHaveCount(0); // the point at hand says it itself
+    await page.keyboard.type('24.4');
+    await page.keyboard.press('Enter');
+    await expect(dialog).toContainText('Point 2 of 25');
+    await expect(back).toHaveCount(0);
   });
 });
 
