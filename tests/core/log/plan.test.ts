@@ -37,7 +37,11 @@ test('the cut-off of the log goes before that of the transmitter', () => {
 
 describe('is refused', () => {
   test.each<[string, Partial<MeterText>, string]>([
-    ['a signal of no transmitter', { instrument: { kind: 'differential' } }, 'log-transmitter-missing at instrument.kind'],
+    [
+      'a signal of no transmitter',
+      { instrument: { kind: 'differential' } },
+      'log-transmitter-missing at instrument.kind',
+    ],
     ['a signal of another kind', instrument({ signal: '1-5 V' }), 'log-signal-unlike at log.signal.unit'],
     ['a transmitter without a range', instrument({ upper: '' }), 'field-missing at instrument.upper'],
     ['legs that weigh', instrument({ above: 'water', rise: '1 m' }), 'log-legs at instrument.above'],
