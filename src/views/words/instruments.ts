@@ -70,6 +70,8 @@ export const instrumentWords = {
   own: 'By its density',
   ownDensity: 'Density of the gauge liquid',
   legs: 'Legs and heights',
+  legsHint:
+    'The process fluid counts with its density in the line. Legs colder than the line: water, or their density.',
   scale: 'Zero and scale',
   sure: 'How sure it is',
   limits: 'Limits of the signal',

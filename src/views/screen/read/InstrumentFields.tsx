@@ -87,7 +87,11 @@ function LegFields({ kind }: { readonly kind: string }) {
     <Fold title={words.legs}>
       <LiquidField path="instrument.above" choices={fillChoices.slice(1)} open={fillChoices[0]?.label ?? ''} />
       <LiquidField path="instrument.aboveDownstream" choices={fillChoices} open={words.sameFilling} />
-      {!COLUMNS.includes(kind) && <QuantityField path="instrument.temperature" />}
+      {COLUMNS.includes(kind) ? (
+        <p className={styles.hint}>{words.legsHint}</p>
+      ) : (
+        <QuantityField path="instrument.temperature" />
+      )}
       <QuantityField path="instrument.rise" />
       {kind === 'gauges' ? (
         <>
