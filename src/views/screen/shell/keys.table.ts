@@ -42,7 +42,7 @@ const TYPING: readonly Order[] = ['undo', 'redo'];
 export function orderOf(event: KeyboardEvent): Order | undefined {
   const row = KEYS.find(({ key, with: modifier }) => key === (event.key.length === 1 ? event.key.toLowerCase() : event.key) && modifier === held(event));
   if (row?.order === undefined) return undefined;
-  if (event.target instanceof HTMLSelectElement && row.with !== 'command') return undefined;
+  if (event.target instanceof HTMLSelectElement && (row.with === undefined || row.with === 'alt')) return undefined;
   if (isText(event.target) && (row.with === undefined || TYPING.includes(row.order))) return undefined;
   return row.order;
 }
