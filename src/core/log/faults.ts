@@ -34,7 +34,7 @@ export interface FaultRule {
   readonly signal?: SignalRule;
   readonly pressure: StandIn; // Pa absolute
   readonly temperature: StandIn; // K
-  /** A differential below it is no flow, Pa; 0 where no cut-off is stated. */
+  /** A differential below it, on either side of zero, is no flow, Pa; 0 where no cut-off is stated. */
   readonly cutOff: number;
   /** Rows with one and the same signal from which on they count as frozen; absent where that is not looked for. */
   readonly frozen?: number;
@@ -110,8 +110,8 @@ function judge(faults: Faults, chunk: Chunk, at: number, batch: Batch, place: nu
   batch.pressure[place] = pressure;
   batch.temperature[place] = temperature;
   if (state !== ACCOUNT.converted) return state;
+  if (Math.abs(differential) < rule.cutOff) return ACCOUNT.belowCutOff;
   if (differential < 0) return ACCOUNT.negative;
-  if (differential < rule.cutOff) return ACCOUNT.belowCutOff;
   if (noPressure) return ACCOUNT.pressureSubstituted;
   if (noTemperature) return ACCOUNT.temperatureSubstituted;
   if (spike) return ACCOUNT.spike;

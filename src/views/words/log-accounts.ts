@@ -18,11 +18,12 @@ const accountWords: Readonly<Record<string, AccountWords>> = {
   },
   'differential-negative': {
     label: 'Differential below zero',
-    meaning: 'A meter does not measure backward flow: the row counts as no flow.',
+    meaning:
+      'The differential lies below zero, beyond any cut-off; backward flow is not measured: the row counts as no flow.',
   },
   'below-cut-off': {
     label: 'Below the cut-off',
-    meaning: 'The differential lies below the cut-off: the row counts as no flow.',
+    meaning: 'The differential lies within the cut-off of zero, above or below: the row counts as no flow.',
   },
   'outside-limits': {
     label: 'Outside the limits',
