@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { unitOf } from '../../../src/core/quantity/units.ts';
 import { echoOf } from '../../../src/views/screen/field/echo.ts';
-import { QUANTITIES, quantityKind } from '../../../src/views/screen/field/quantities.ts';
+import { QUANTITIES, quantityKind, SHARED_KINDS } from '../../../src/views/screen/field/quantities.ts';
 import { split, unitMenu } from '../../../src/views/screen/field/split.ts';
 import { textAt, valueAt } from '../../../src/views/screen/text.ts';
 import { fieldLabel } from '../../../src/views/words/fields.ts';
@@ -12,6 +12,11 @@ describe('quantity fields', () => {
     expect(unitOf(unit.US, measures)).toBeDefined();
     expect(unitMenu(measures).every(({ units }) => units.length > 0)).toBe(true);
     expect(fieldLabel(path)).not.toBe(path);
+  });
+
+  it.each(Object.entries(SHARED_KINDS))('%s starts in units it can read', (_, { measures, unit }) => {
+    expect(unitOf(unit.SI, measures)).toBeDefined();
+    expect(unitOf(unit.US, measures)).toBeDefined();
   });
 
   it('throws a defect for a path that is no quantity', () => {

@@ -88,7 +88,6 @@ export const QUANTITIES: Readonly<Record<string, QuantityKind>> = {
   'instrument.heightUpstream': kind(['length'], 'm', 'ft'),
   'instrument.heightThroat': kind(['length'], 'm', 'ft'),
   'instrument.zero': diameter,
-  'instrument.zero.cell': difference,
   'instrument.division': diameter,
   'instrument.scaleTrueAt': temperature,
   'instrument.tube': diameter,
@@ -97,20 +96,11 @@ export const QUANTITIES: Readonly<Record<string, QuantityKind>> = {
   'instrument.lower': difference,
   'instrument.upper': difference,
   'instrument.cutOff': kind(['share', 'pressure difference'], '%', '%'),
-  'instrument.limits.current': kind(['current'], 'mA', 'mA'),
-  'instrument.limits.voltage': kind(['voltage'], 'V', 'V'),
-  'instrument.limits.share': share,
   'instrument.lowRange.lower': difference,
   'instrument.lowRange.upper': difference,
   'instrument.lowRange.zero': difference,
   'instrument.lowRange.up': share,
   'instrument.lowRange.down': share,
-  'instrument.uncertainty.spanned': kind(
-    ['share of span', 'share of reading', 'pressure difference'],
-    '% of span',
-    '% of span',
-  ),
-  'instrument.uncertainty.plain': kind(['share of reading', 'pressure difference'], '% of reading', '% of reading'),
   'instrument.uncertainty.angle': kind(['angle'], 'deg', 'deg'),
   nullAngle: kind(['angle'], 'deg', 'deg'),
   'corrections.turbulence': share,
@@ -137,9 +127,23 @@ export const QUANTITIES: Readonly<Record<string, QuantityKind>> = {
   'base.temperature': temperature,
 };
 
+/** Kinds that several fields of an instrument share, or one takes in place of its own. */
+export const SHARED_KINDS: Readonly<Record<string, QuantityKind>> = {
+  'instrument.zero.cell': difference,
+  'instrument.limits.current': kind(['current'], 'mA', 'mA'),
+  'instrument.limits.voltage': kind(['voltage'], 'V', 'V'),
+  'instrument.limits.share': share,
+  'instrument.uncertainty.spanned': kind(
+    ['share of span', 'share of reading', 'pressure difference'],
+    '% of span',
+    '% of span',
+  ),
+  'instrument.uncertainty.plain': kind(['share of reading', 'pressure difference'], '% of reading', '% of reading'),
+};
+
 /** The kind of a field. A path without a row here is a mistake of ours. */
 export function quantityKind(path: string): QuantityKind {
-  const found = QUANTITIES[path];
+  const found = QUANTITIES[path] ?? SHARED_KINDS[path];
   if (found === undefined) throw new Error(`expected a quantity field, got ${path}`);
   return found;
 }
