@@ -65,6 +65,10 @@ test('a survey is planned from nothing', async ({ page }) => {
   await box('Inside width').fill('900');
   await box('Inside height').fill('600');
   await box('Length of the port').fill('40');
+  await expect(answer(page)).toHaveText('25 points wait to be read.');
+  await expect(main(page).getByText('Velocities and flow wait for the fluid in the duct.')).toBeVisible();
+  await expect(main(page).getByRole('img', { name: 'Section of the duct with its points' })).toBeVisible();
+  await expect(panel(page, 'Readings').getByRole('row', { name: /^1 84\.1/ })).toBeVisible();
   const duct = panel(page, 'Fluid in the duct');
   await duct.getByLabel('Static pressure', { exact: true }).fill('240');
   await duct.getByLabel('Temperature', { exact: true }).fill('27.5');
@@ -75,6 +79,20 @@ test('a survey is planned from nothing', async ({ page }) => {
   await expect(answer(page)).toHaveText('30 points wait to be read.');
   await page.getByRole('button', { name: 'Undo' }).click();
   await expect(answer(page)).toHaveText('25 points wait to be read.');
+});
+
+test('another shape of section brings a plan that it has, in one step of undo', async ({ page }) => {
+  await openSurvey(page, await unread());
+  await main(page).locator('summary').filter({ hasText: 'Plan' }).first().click();
+  const section = panel(page, 'Section and points');
+  await section.getByLabel('Shape', { exact: true }).selectOption('circular');
+  await section.getByLabel('Inside diameter', { exact: true }).fill('600');
+  await expect(answer(page)).toHaveText('12 points wait to be read.');
+  await expect(section.getByLabel('Rule', { exact: true })).toHaveValue('log-linear');
+  await page.getByRole('button', { name: 'Undo' }).click();
+  await page.getByRole('button', { name: 'Undo' }).click();
+  await expect(answer(page)).toHaveText('25 points wait to be read.');
+  await expect(section.getByLabel('Rule', { exact: true })).toHaveValue('log-tchebycheff');
 });
 
 test('the form for the field has every depth of the command line', async ({ page }, info) => {

@@ -2,6 +2,7 @@
 import { beforeEach, describe, expect, test } from 'vitest';
 import type { Project } from '../../src/core/document/project.ts';
 import { createWorkbench } from '../../src/state/create.ts';
+import { withShape } from '../../src/state/plans.ts';
 import { readingAt, withReadings } from '../../src/state/readings.ts';
 import { textOf } from '../../src/state/text.ts';
 import type { Workbench, WorkbenchStore } from '../../src/state/workbench.ts';
@@ -73,6 +74,29 @@ describe('traverses', () => {
     at().writeProject('site.atmosphere', '1 bar(a)');
     expect([core.solved, core.surveyed]).toEqual([4, 3]);
   });
+});
+
+describe('a change of shape', () => {
+  test('writes the shape and a plan that it has as one step of undo', () => {
+    at().addTraverse();
+    const before = survey();
+    at().writeAll(withShape(planOf(before), 'circular'), 'traverses');
+    expect(survey()).toMatchObject({
+      section: { shape: 'circular' },
+      rule: 'log-linear',
+      lines: 2,
+      pointsPerLine: 6,
+    });
+    expect(withShape(planOf(survey()), 'circular')).toEqual([['section.shape', 'circular']]);
+    at().undo();
+    expect(survey()).toEqual(before);
+  });
+});
+
+const planOf = (traverse: ReturnType<typeof survey>) => ({
+  rule: traverse?.rule,
+  lines: traverse?.lines,
+  pointsPerLine: traverse?.pointsPerLine,
 });
 
 describe('readings', () => {

@@ -55,7 +55,7 @@ export interface TraverseInput {
   readonly uncertainty: TraverseUncertainty;
 }
 
-const MOST_COUNT = 40; // lines, or points on one
+export const MOST_COUNT = 40; // lines, or points on one
 
 /** Reads a traverse whose shape is checked. */
 export function readTraverse(traverse: TraverseText): Outcome<TraverseInput> {

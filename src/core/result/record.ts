@@ -184,10 +184,18 @@ export interface SolvedTraverse extends TraverseFigures {
   readonly state: StateRecord;
 }
 
+/** The points of a traverse whose fluid is not known yet: nothing that needs a density. */
+export interface PlannedTraverse extends TraverseFigures {
+  readonly tag: string;
+  readonly status: 'planned';
+}
+
 /** A traverse that was not solved. */
 export interface RefusedTraverse extends Refused {
   /** Where readings alone stand in the way: the traverse as it is without them. */
   readonly besides?: SolvedTraverse;
+  /** Where the state of the fluid stands in the way: the plan, which needs the section alone. */
+  readonly planned?: PlannedTraverse;
 }
 
 export type TraverseResult = SolvedTraverse | RefusedTraverse;

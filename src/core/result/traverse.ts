@@ -6,12 +6,13 @@ import type { TraverseInput } from '../input/traverse.ts';
 import type { Section } from '../input/traverse-section.ts';
 import type { Source } from '../quantity/source.ts';
 import { biasOnPowerLaw } from '../traverse/bias.ts';
+import type { Plan } from '../traverse/plan.ts';
 import type { Quality } from '../traverse/quality.ts';
 import { suggestionsFor } from '../traverse/suggest.ts';
 import type { Survey, SurveyLine, SurveyPoint } from '../traverse/survey.ts';
 import type { TraverseBudget } from '../uncertainty/traverse.ts';
 import { sourcesOnce, stateRecord } from './assemble.ts';
-import type { SolvedTraverse } from './record.ts';
+import type { PlannedTraverse, SolvedTraverse } from './record.ts';
 import type {
   QualityRecord,
   TraverseFigures,
@@ -36,22 +37,14 @@ const POWER_LAW = 7; // u ~ y^(1/7)
 export function assembleTraverse(parts: TraverseParts): SolvedTraverse {
   const { written, input, survey, quality, budget, checks } = parts;
   const { plan, flow } = survey;
-  const suggestions = suggestionsFor(input.section, input.straight);
+  const planned = planRecord(written, input, plan);
   const working = [...survey.state.working, ...traverseWorking(input, survey)];
   return {
-    tag: input.tag,
+    ...planned,
     status: 'solved',
-    ...(written.service === undefined ? {} : { service: written.service }),
-    rule: input.rule,
-    section: sectionRecord(input.section),
-    area_m2: plan.area,
-    hydraulicDiameter_m: plan.hydraulicDiameter,
-    port_m: input.port,
     state: stateRecord(survey.state, []),
     lines: linesOf(survey.lines),
-    points: plan.lines.reduce((sum, { points }) => sum + points.length, 0),
     measured: survey.measured.length,
-    suggestions,
     ...(flow === undefined ? {} : { flow: flowRecord(flow) }),
     ...(quality === undefined ? {} : { quality: qualityRecord(quality, input, survey) }),
     ...(budget === undefined ? {} : { uncertainty: uncertaintyRecord(budget) }),
@@ -59,8 +52,32 @@ export function assembleTraverse(parts: TraverseParts): SolvedTraverse {
     unchecked: uncheckedTraverse(input),
     working,
     sources: sourcesOnce(
-      sourcesOf(survey, [...working, ...checks, ...suggestions, ...(budget === undefined ? [] : [budget])]),
+      sourcesOf(plan, [...working, ...checks, ...planned.suggestions, ...(budget === undefined ? [] : [budget])]),
     ),
+  };
+}
+
+/** The plan by itself, before the fluid is known: a reading counts as read, its velocity waits. */
+export function assemblePlan(written: TraverseText, input: TraverseInput, plan: Plan): PlannedTraverse {
+  const planned = planRecord(written, input, plan);
+  const measured = input.readings.flat().filter((reading) => reading !== undefined).length;
+  const sources = sourcesOnce(sourcesOf(plan, planned.suggestions));
+  const none = { checks: [], unchecked: [], working: [] };
+  return { ...planned, status: 'planned', lines: linesOf(plan.lines), measured, ...none, sources };
+}
+
+/** What the section and the rule alone decide. */
+function planRecord(written: TraverseText, input: TraverseInput, plan: Plan) {
+  return {
+    tag: input.tag,
+    ...(written.service === undefined ? {} : { service: written.service }),
+    rule: input.rule,
+    section: sectionRecord(input.section),
+    area_m2: plan.area,
+    hydraulicDiameter_m: plan.hydraulicDiameter,
+    port_m: input.port,
+    points: plan.lines.reduce((sum, { points }) => sum + points.length, 0),
+    suggestions: suggestionsFor(input.section, input.straight),
   };
 }
 
@@ -132,7 +149,7 @@ const uncertaintyRecord = ({ expandedPercent, terms, source }: TraverseBudget): 
   source,
 });
 
-const sourcesOf = ({ plan }: Survey, parts: readonly { readonly source: Source }[]): readonly Source[] => [
+const sourcesOf = (plan: Plan, parts: readonly { readonly source: Source }[]): readonly Source[] => [
   plan.source,
   ...(plan.wall === undefined ? [] : [plan.wall.source]),
   ...parts.map(({ source }) => source),

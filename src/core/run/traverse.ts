@@ -7,9 +7,9 @@ import { readTraverse } from '../input/traverse.ts';
 import { traverseShape } from '../input/traverse-shape.ts';
 import { readUpstream } from '../input/upstream.ts';
 import { gather, type Outcome, ok, type Problem } from '../quantity/outcome.ts';
-import type { SolvedTraverse, TraverseResult } from '../result/record.ts';
+import type { PlannedTraverse, SolvedTraverse, TraverseResult } from '../result/record.ts';
 import { refused, tagOf } from '../result/refuse.ts';
-import { assembleTraverse } from '../result/traverse.ts';
+import { assemblePlan, assembleTraverse } from '../result/traverse.ts';
 import { planOf } from '../traverse/plan.ts';
 import { qualityOf } from '../traverse/quality.ts';
 import { surveyOf } from '../traverse/survey.ts';
@@ -27,7 +27,9 @@ export function solveTraverse(
   const [first, ...rest] = solved.problems;
   const refusal = refused(tag, [placed(first, index), ...rest.map((problem) => placed(problem, index))]);
   const others = besides(traverse, solved.problems, project);
-  return others === undefined ? refusal : { ...refusal, besides: { ...others, tag } };
+  if (others !== undefined) return { ...refusal, besides: { ...others, tag } };
+  const plan = planned(traverse, solved.problems, project);
+  return plan === undefined ? refusal : { ...refusal, planned: { ...plan, tag } };
 }
 
 /** The traverse without the readings that stand in the way, so that one slip of the keys does not hide the others. */
@@ -36,13 +38,36 @@ function besides(
   problems: readonly Problem[],
   project: Pick<Project, 'site' | 'base'>,
 ): SolvedTraverse | undefined {
+  if (!problems.every(({ field }) => READING.test(field))) return undefined;
+  const others = survey(withoutReadings(traverse, problems), project);
+  return others.ok ? others.value : undefined;
+}
+
+/** The plan where only the fluid, or readings beside it, stand in the way: the points need the section alone. */
+function planned(
+  traverse: TraverseText,
+  problems: readonly Problem[],
+  project: Pick<Project, 'site' | 'base'>,
+): PlannedTraverse | undefined {
+  if (!problems.every(({ field }) => FLUID.test(field) || READING.test(field))) return undefined;
+  const shape = traverseShape(withoutReadings(traverse, problems));
+  if (!shape.ok || !readSite(project).ok) return undefined;
+  const input = readTraverse(shape.value);
+  const plan = input.ok ? planOf(input.value) : input;
+  return input.ok && plan.ok ? assemblePlan(shape.value, input.value, plan.value) : undefined;
+}
+
+const READING = /^readings\.\d+\.\d+$/;
+const FLUID = /^(state|fluid)(\.|$)/;
+
+/** The traverse with the readings emptied that have a problem. */
+function withoutReadings(traverse: TraverseText, problems: readonly Problem[]): TraverseText {
   const wrong = new Set(problems.map(({ field }) => field));
-  if (![...wrong].every((field) => /^readings\.\d+\.\d+$/.test(field))) return undefined;
+  if (!problems.some(({ field }) => READING.test(field))) return traverse;
   const readings = (traverse.readings ?? []).map((line, at) =>
     line.map((text, point) => (wrong.has(`readings.${at}.${point}`) ? '' : text)),
   );
-  const others = survey({ ...traverse, readings }, project);
-  return others.ok ? others.value : undefined;
+  return { ...traverse, readings };
 }
 
 /** What is no traverse at all is named by its place in the list. */

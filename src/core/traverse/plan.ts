@@ -1,6 +1,7 @@
 /** The plan of a traverse: every point with its place in the duct, its weight and its depth on the tube. */
-import type { TraverseInput } from '../input/traverse.ts';
+import { MOST_COUNT, type TraverseInput } from '../input/traverse.ts';
 import { hydraulicDiameter, type Section } from '../input/traverse-section.ts';
+import { isInside } from '../numeric/bounds.ts';
 import type { Length } from '../quantity/kinds.ts';
 import { fail, gather, type Outcome, ok } from '../quantity/outcome.ts';
 import type { Source } from '../quantity/source.ts';
@@ -75,7 +76,20 @@ const placeOf = ({ angle, across = 0.5 }: Line, section: Section): Omit<PlannedL
   return { across: (across * (section.ports === 'width' ? section.width : section.height)) as Length };
 };
 
-function layoutOf({ section, rule, lines = 0, pointsPerLine = 0, profile }: TraverseInput): Outcome<Layout> {
+/** What is chosen of a plan, whatever the sizes of the section. */
+export type Chosen = Pick<TraverseInput, 'rule' | 'lines' | 'pointsPerLine'>;
+
+/** Whether a shape of section has a rule with so many lines and points. */
+export function fits(shape: Section['shape'], chosen: Chosen): boolean {
+  if (chosen.rule === 'single-point') return shape === 'circular';
+  const { lines = 0 } = chosen;
+  const turned = Number.isInteger(lines) && isInside(lines, { min: 1, max: MOST_COUNT });
+  return (shape === 'rectangular' || turned) && layoutOf({ section: { shape }, ...chosen }).ok;
+}
+
+type Laid = Chosen & Pick<TraverseInput, 'profile'> & { readonly section: Pick<Section, 'shape'> };
+
+function layoutOf({ section, rule, lines = 0, pointsPerLine = 0, profile }: Laid): Outcome<Layout> {
   const counted = (field: string, written: number, counts: readonly number[]): Outcome<number> =>
     counts.includes(written)
       ? ok(written)

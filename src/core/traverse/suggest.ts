@@ -45,10 +45,11 @@ const GOOD = { before: 7.5, after: 3 };
 
 /** The suggestions for a section and its straight duct. */
 export function suggestionsFor(section: Section, straight: Straight): readonly Suggestion[] {
-  return [iso(section), ...method1(section, straight), balancing(section, straight)];
+  return [usualPlan(section), ...method1(section, straight), balancing(section, straight)];
 }
 
-function iso({ shape }: Section): Suggestion {
+/** The least points of ISO 3966, the plan to begin with. */
+export function usualPlan({ shape }: Pick<Section, 'shape'>): Suggestion {
   const practice = { practice: 'iso-3966', source: ISO } as const;
   if (shape === 'circular') return { ...practice, rule: 'log-linear', lines: 2, pointsPerLine: 6 }; // 12 points
   return { ...practice, rule: 'log-tchebycheff', lines: 5, pointsPerLine: 5 }; // 25 points

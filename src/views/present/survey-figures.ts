@@ -1,5 +1,5 @@
 /** The figures of a survey as rows: result, quality of the readings, plan, terms of the uncertainty. */
-import type { SolvedTraverse } from '../../core/result/record.ts';
+import type { TraverseFigures } from '../../core/result/traverse-record.ts';
 import type { Role } from '../words/print.ts';
 import { surveyRows, termNamesOfTraverse, uncertaintyOpen, unstatedTerm } from '../words/surveys.ts';
 import { cited } from './cited.ts';
@@ -14,7 +14,7 @@ function rowOf(at: Context, id: Id, si: number | undefined, role: Role, more: Pa
 }
 
 /** Flow and mean; until all is read the mean so far. */
-export function resultRows(at: Context, { flow, quality, uncertainty }: SolvedTraverse): readonly Row[] {
+export function resultRows(at: Context, { flow, quality, uncertainty }: TraverseFigures): readonly Row[] {
   if (flow === undefined) return rowOf(at, 'meanSoFar', quality?.meanSoFar_m_s, 'velocity');
   return [
     ...rowOf(at, 'meanVelocity', flow.meanVelocity_m_s, 'velocity', { symbol: 'V', working: 'traverse-mean' }),
@@ -32,7 +32,7 @@ export function resultRows(at: Context, { flow, quality, uncertainty }: SolvedTr
   ];
 }
 
-export function qualityRows(at: Context, { quality }: SolvedTraverse): readonly Row[] {
+export function qualityRows(at: Context, { quality }: TraverseFigures): readonly Row[] {
   if (quality === undefined) return [];
   return [
     ...rowOf(at, 'least', quality.leastVelocity_m_s, 'velocity'),
@@ -48,7 +48,7 @@ export function qualityRows(at: Context, { quality }: SolvedTraverse): readonly 
   ];
 }
 
-export function planRows(at: Context, { area_m2, hydraulicDiameter_m, port_m }: SolvedTraverse): readonly Row[] {
+export function planRows(at: Context, { area_m2, hydraulicDiameter_m, port_m }: TraverseFigures): readonly Row[] {
   return [
     ...rowOf(at, 'area', area_m2, 'area', { symbol: 'A' }),
     ...rowOf(at, 'hydraulicDiameter', hydraulicDiameter_m, 'length', { symbol: 'D_h' }),
@@ -57,7 +57,7 @@ export function planRows(at: Context, { area_m2, hydraulicDiameter_m, port_m }: 
 }
 
 /** The terms of the uncertainty, the largest first; what is not stated says what stands in for it. */
-export function termRows(at: Context, { uncertainty }: SolvedTraverse): readonly Row[] {
+export function termRows(at: Context, { uncertainty }: TraverseFigures): readonly Row[] {
   const terms = uncertainty?.terms ?? [];
   return terms
     .toSorted((one, other) => other.percentOfFlow - one.percentOfFlow)
@@ -70,7 +70,7 @@ export function termRows(at: Context, { uncertainty }: SolvedTraverse): readonly
 }
 
 /** What the uncertainty leaves out. */
-export function certaintyOf({ uncertainty }: SolvedTraverse): string {
+export function certaintyOf({ uncertainty }: TraverseFigures): string {
   const open = (uncertainty?.terms ?? []).filter(({ stated, percentOfFlow }) => !stated && percentOfFlow === 0);
   return uncertaintyOpen(open.map(({ name }) => termNamesOfTraverse[name]));
 }

@@ -1,6 +1,6 @@
 /** A survey as the list of the project shows it: names, verdict, what stands in the way. */
 import type { MeterText, Project, TraverseText } from '../../core/document/project.ts';
-import type { TraverseResult } from '../../core/result/record.ts';
+import type { PlannedTraverse, TraverseResult } from '../../core/result/record.ts';
 import { readShort, surveyLabel } from '../words/surveys.ts';
 import { meterVerdict, notSolved } from '../words/verdicts.ts';
 import { type Context, contextOf } from './context.ts';
@@ -19,27 +19,31 @@ export interface ListedSurvey {
   readonly progress: { readonly measured: number; readonly points: number } | undefined;
 }
 
-export function listSurvey(traverse: TraverseText, project: Project, result: TraverseResult): ListedSurvey {
+/** A result, or the plan of a survey whose fluid is not known yet. */
+type Listed = TraverseResult | PlannedTraverse;
+
+export function listSurvey(traverse: TraverseText, project: Project, result: Listed): ListedSurvey {
   const own = isGroup(traverse) ? traverse : {};
-  const plan = result.status === 'solved' ? result : result.besides;
+  const plan = result.status === 'refused' ? (result.besides ?? result.planned) : result;
   return {
     tag: result.tag,
     service: textOf(own.service),
     title: surveyLabel(textOf(own.section?.shape), textOf(own.rule)),
     problems:
-      result.status === 'solved'
-        ? []
-        : result.problems.map((problem) => presentProblem(problem, surveyContext(traverse, project).print)),
+      result.status === 'refused'
+        ? result.problems.map((problem) => presentProblem(problem, surveyContext(traverse, project).print))
+        : [],
     verdict: verdictOf(result),
     progress: plan === undefined ? undefined : { measured: plan.measured, points: plan.points },
   };
 }
 
 /** A survey is judged once it is read to the end. */
-function verdictOf(result: TraverseResult): ListedSurvey['verdict'] {
+function verdictOf(result: Listed): ListedSurvey['verdict'] {
   if (result.status === 'refused') return { worst: 'refused', words: notSolved };
   const { measured, points, checks } = result;
-  if (measured < points) return { worst: 'unchecked', words: readShort(measured, points) };
+  if (result.status === 'planned' || measured < points)
+    return { worst: 'unchecked', words: readShort(measured, points) };
   return meterVerdict(checks.map(({ verdict }) => verdict));
 }
 

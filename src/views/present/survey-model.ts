@@ -65,7 +65,8 @@ export interface SurveyProfile {
 
 /** A survey with its plan; figures as far as it is read. */
 export interface PresentedSurvey extends ListedSurvey {
-  readonly status: 'solved';
+  /** 'planned' while the fluid is not known: points and depths stand, velocities and flow wait. */
+  readonly status: 'solved' | 'planned';
   readonly answer: readonly Segment[];
   readonly under: string;
   readonly measured: number;

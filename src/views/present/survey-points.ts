@@ -1,6 +1,6 @@
 /** The points of a survey in the order of measuring, and the picture of their velocities. */
 import { fromSI } from '../../core/quantity/units.ts';
-import type { SolvedTraverse } from '../../core/result/record.ts';
+import type { TraverseFigures } from '../../core/result/traverse-record.ts';
 import { pointsRead, surveyWords as words } from '../words/surveys.ts';
 import type { Context } from './context.ts';
 import type { Value } from './model.ts';
@@ -9,7 +9,7 @@ import { written } from './units.ts';
 
 type Figures = Pick<Context, 'value' | 'units'>;
 
-export function linesOf(at: Context, { lines, port_m }: SolvedTraverse, readings: unknown): readonly SurveyLine[] {
+export function linesOf(at: Context, { lines, port_m }: TraverseFigures, readings: unknown): readonly SurveyLine[] {
   return lines.map(({ points, across_m, angle_rad, meanVelocity_m_s }, line): SurveyLine => {
     const place =
       across_m !== undefined
@@ -32,7 +32,7 @@ export function linesOf(at: Context, { lines, port_m }: SolvedTraverse, readings
   });
 }
 
-type Point = SolvedTraverse['lines'][number]['points'][number] & { readonly text: unknown };
+type Point = TraverseFigures['lines'][number]['points'][number] & { readonly text: unknown };
 
 /** What is written for a point; a file may hold anything there. */
 function textIn(readings: unknown, line: number, point: number): unknown {
@@ -63,7 +63,7 @@ function pointOf(at: Context, point: Point, line: number, order: number, fromPor
 }
 
 /** Inside length of the lines, m. */
-export function reachOf({ section }: SolvedTraverse): number {
+export function reachOf({ section }: TraverseFigures): number {
   if (section.shape === 'circular') return section.diameter_m;
   return section.ports === 'width' ? section.height_m : section.width_m;
 }
@@ -71,7 +71,7 @@ export function reachOf({ section }: SolvedTraverse): number {
 /** Steps of the scale of velocities: 1, 2, 5 in each power of ten, in pairs. */
 const STEPS = [1, 1.2, 1.6, 2, 2.4, 3, 4, 5, 6, 8, 10];
 
-export function profileOf(at: Figures, result: SolvedTraverse): SurveyProfile {
+export function profileOf(at: Figures, result: TraverseFigures): SurveyProfile {
   const { quality, flow, lines, measured, points } = result;
   const unit = at.units.velocity;
   const shown = (si: number): number => fromSI(si, unit);
@@ -106,7 +106,7 @@ function scaleTop(most: number): number {
   return Number((step * power).toPrecision(6));
 }
 
-function summaryOf(at: Figures, { quality }: SolvedTraverse, progress: string): string {
+function summaryOf(at: Figures, { quality }: TraverseFigures, progress: string): string {
   if (quality === undefined) return `${progress}.`;
   const figure = (si: number): string => at.value(si, 'velocity').text;
   const [least, most] = [figure(quality.leastVelocity_m_s), figure(quality.mostVelocity_m_s)];
@@ -116,7 +116,7 @@ function summaryOf(at: Figures, { quality }: SolvedTraverse, progress: string): 
 /** The section in words: '900 mm by 600 mm', as it is written where it is at home in the display. */
 export function sectionText(
   at: Context,
-  { section }: SolvedTraverse,
+  { section }: TraverseFigures,
   texts: Readonly<Record<string, unknown>>,
 ): string {
   const side = (name: string, si: number): Value => {

@@ -1,6 +1,6 @@
 /** Everything the sheets of a survey show, as text: the form for the field, and the survey once it is read. */
 import type { Project, TraverseText } from '../../core/document/project.ts';
-import type { TraverseResult } from '../../core/result/record.ts';
+import type { RefusedTraverse, TraverseResult } from '../../core/result/record.ts';
 import { fieldLabel } from '../words/fields.ts';
 import { stated as asStated, dash, whole } from '../words/sheet.ts';
 import { formFacts, sheetOfSurvey as words } from '../words/survey-sheet.ts';
@@ -29,7 +29,15 @@ export interface SurveySheet {
   readonly facts: readonly { readonly label: string; readonly text: string }[];
 }
 
-export type PresentedSurveySheet = SurveySheet | RefusedSheet;
+/** The form to take to the duct: the plan, which needs no fluid. */
+export type FieldForm = Pick<SurveySheet, 'head' | 'survey' | 'facts'>;
+
+/** A survey without a result; its form where the points can be planned all the same. */
+export interface RefusedSurveySheet extends RefusedSheet {
+  readonly form?: FieldForm;
+}
+
+export type PresentedSurveySheet = SurveySheet | RefusedSurveySheet;
 
 /** One for each survey, or for the one that is asked. */
 export function presentSurveySheets({
@@ -62,6 +70,7 @@ export function presentSurveySheet(
       problems: problems.map(({ field, sentence }) => ({ field: fieldLabel(field), sentence })),
       inputs: writtenIn(traverse, '').map(([path, text]) => ({ field: fieldLabel(path), text })),
       cautions: ductCautions,
+      ...formOf(traverse, project, result, head),
     };
   const survey = presentSurvey(traverse, project, result);
   const sources = numbering();
@@ -80,6 +89,17 @@ export function presentSurveySheet(
     sources: sources.list(),
     facts: factsOf(survey, traverse),
   };
+}
+
+function formOf(
+  traverse: TraverseText,
+  project: Project,
+  { planned }: RefusedTraverse,
+  head: SheetHead,
+): Pick<RefusedSurveySheet, 'form'> {
+  if (planned === undefined) return {};
+  const survey = presentSurvey(traverse, project, planned);
+  return { form: { head, survey, facts: factsOf(survey, traverse) } };
 }
 
 const blocksOf = ({ checks }: PresentedSurvey, keyOf: KeyOf): readonly CheckBlock[] => checkBlocks({ checks }, keyOf);

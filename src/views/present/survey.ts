@@ -1,6 +1,6 @@
 /** One survey, ready to print: every row, sentence and picture that the views show. */
 import type { Project, TraverseText } from '../../core/document/project.ts';
-import type { SolvedTraverse } from '../../core/result/record.ts';
+import type { PlannedTraverse, SolvedTraverse } from '../../core/result/record.ts';
 import { cautions } from '../words/cautions.ts';
 import { fluidLabel } from '../words/fluids.ts';
 import { provenanceNotes } from '../words/provenance.ts';
@@ -26,16 +26,19 @@ import type { PresentedSurvey, SurveySuggestion } from './survey-model.ts';
 import { linesOf, profileOf, sectionText, unitsOf } from './survey-points.ts';
 import { workingRow } from './working.ts';
 
+type Planned = SolvedTraverse | PlannedTraverse;
+
 /** A survey that has its plan. */
-export function presentSurvey(traverse: TraverseText, project: Project, result: SolvedTraverse): PresentedSurvey {
+export function presentSurvey(traverse: TraverseText, project: Project, result: Planned): PresentedSurvey {
   const at = surveyContext(traverse, project);
   const lines = linesOf(at, result, traverse.readings);
   const weights = result.lines.flatMap(({ points }) => points.map(({ weight }) => weight));
   const kind = typeof traverse.fluid?.kind === 'string' ? traverse.fluid.kind : '';
+  const phase = result.status === 'solved' ? result.state.phase : undefined;
   const name = typeof traverse.fluid?.name === 'string' ? traverse.fluid.name : '';
   return {
     ...listSurvey(traverse, project, result),
-    status: 'solved',
+    status: result.status,
     answer: answerOf(at, result),
     under: underOf(at, result),
     measured: result.measured,
@@ -49,8 +52,8 @@ export function presentSurvey(traverse: TraverseText, project: Project, result: 
     results: resultRows(at, result),
     quality: qualityRows(at, result),
     plan: planRows(at, result),
-    state: ductState(at, result),
-    fluid: fluidLabel(kind, result.state.phase, name),
+    state: result.status === 'solved' ? ductState(at, result) : [],
+    fluid: fluidLabel(kind, phase, name),
     overridable: kind !== 'stated',
     terms: termRows(at, result),
     certainty: certaintyOf(result),
@@ -61,11 +64,11 @@ export function presentSurvey(traverse: TraverseText, project: Project, result: 
     })),
     working: workingOf(result),
     notes: provenanceNotes(result.sources),
-    cautions: cautionsOf(traverse, kind, result),
+    cautions: cautionsOf(traverse, kind, phase),
   };
 }
 
-function answerOf(at: Context, { flow, measured, points }: SolvedTraverse): readonly Segment[] {
+function answerOf(at: Context, { flow, measured, points }: Planned): readonly Segment[] {
   const figures = {
     volumeFlow: flow && at.value(flow.volumeFlow_m3_s, 'volumeFlow').text,
     meanVelocity: flow && at.value(flow.meanVelocity_m_s, 'velocity').text,
@@ -80,7 +83,7 @@ function answerOf(at: Context, { flow, measured, points }: SolvedTraverse): read
 }
 
 /** Tag, rule, grid, uncertainty. */
-function underOf(at: Context, { tag, rule, lines, uncertainty, points }: SolvedTraverse): string {
+function underOf(at: Context, { tag, rule, lines, uncertainty, points }: Planned): string {
   const [first = 0, ...others] = lines.map((line) => line.points.length);
   const grid = others.every((count) => count === first) ? gridText(lines.length, first) : `${points} points`;
   const sure = uncertainty && `±${at.value(uncertainty.expanded_percent, 'uncertainty').text}, 95\u00a0%`;
@@ -94,11 +97,11 @@ const ductState = (at: Context, result: SolvedTraverse): readonly Row[] =>
     row.id === 'pressure' ? { ...row, label: words.staticPressure, symbol: 'p' } : row,
   );
 
-function workingOf({ working }: SolvedTraverse): readonly WorkingGroup[] {
+function workingOf({ working }: Planned): readonly WorkingGroup[] {
   return [{ id: 'meter', title: words.working, rows: working.map(workingRow) }];
 }
 
-function suggestionsOf({ suggestions, rule, lines }: SolvedTraverse): readonly SurveySuggestion[] {
+function suggestionsOf({ suggestions, rule, lines }: Planned): readonly SurveySuggestion[] {
   return suggestions.map((one) => ({
     key: one.practice,
     text: words.suggestion(practiceLabel(one.practice), ruleInLine(one.rule), gridText(one.lines, one.pointsPerLine)),
@@ -111,9 +114,9 @@ function suggestionsOf({ suggestions, rule, lines }: SolvedTraverse): readonly S
 }
 
 /** Those of ducts; of the general ones those that a liquid of a gauge or steam bring. */
-function cautionsOf({ manometer }: TraverseText, fluid: string, { state }: SolvedTraverse): readonly string[] {
+function cautionsOf({ manometer }: TraverseText, fluid: string, phase = ''): readonly string[] {
   const liquid = manometer?.liquid;
-  const service = { fluid, phase: state.phase, ...(typeof liquid === 'string' ? { gaugeLiquid: liquid } : {}) };
+  const service = { fluid, phase, ...(typeof liquid === 'string' ? { gaugeLiquid: liquid } : {}) };
   const general = cautions({ fluid: '', phase: '' });
   return [...ductCautions, ...cautions(service).filter((text) => !general.includes(text))];
 }

@@ -1,7 +1,7 @@
 /** The blank form for the field: the section with its points, a box for each reading at its depth, what else to note. */
 import { SurveySection } from '../drawing/SurveySection.tsx';
 import type { SurveyLine } from '../present/survey-model.ts';
-import type { SurveySheet } from '../present/survey-sheet.ts';
+import type { FieldForm } from '../present/survey-sheet.ts';
 import { fieldNotes, formFacts, sheetOfSurvey as words } from '../words/survey-sheet.ts';
 import { surveyWords } from '../words/surveys.ts';
 import { Block } from './Block.tsx';
@@ -14,7 +14,7 @@ import tables from './table.module.css';
 
 const PICTURE = { width: 340, height: 210, type: 10.8 }; // px; 90 mm by 55 mm
 
-export function FormSheet({ sheet, place }: { readonly sheet: SurveySheet; readonly place: Place }) {
+export function FormSheet({ sheet, place }: { readonly sheet: FieldForm; readonly place: Place }) {
   const { head, survey: plan, facts } = sheet;
   const blank = { ...plan, shape: { ...plan.shape, lines: plan.shape.lines.map(withoutVelocities) } };
   const from = plan.fromPort ? surveyWords.fromPort : surveyWords.fromWall;

@@ -1,6 +1,6 @@
 /** The sheets of one survey: the form to take along, and once something is read what it found. */
 import type { ComponentType } from 'react';
-import type { PresentedSurveySheet, SurveySheet as Sheet } from '../present/survey-sheet.ts';
+import type { PresentedSurveySheet, RefusedSurveySheet, SurveySheet as Sheet } from '../present/survey-sheet.ts';
 import { sheetOfSurvey as words } from '../words/survey-sheet.ts';
 import { ChecksSheet } from './ChecksSheet.tsx';
 import { FormSheet } from './FormSheet.tsx';
@@ -24,7 +24,7 @@ interface Props {
 }
 
 export function SurveyPages({ sheet, include }: Props) {
-  if (sheet.status === 'refused') return <RefusedSheet sheet={sheet} />;
+  if (sheet.status === 'refused') return <Refused sheet={sheet} />;
   const chosen = pagesOf(sheet, include);
   const form = include.includes('form') || sheet.survey.measured === 0;
   return (
@@ -34,6 +34,17 @@ export function SurveyPages({ sheet, include }: Props) {
         // biome-ignore lint/suspicious/noArrayIndexKey: a page is its place among the sheets
         <One key={at} sheet={sheet} place={{ sheet: at + 1, of: chosen.length }} />
       ))}
+    </>
+  );
+}
+
+/** Why there is no result; before anything is read the form alone, where the points are planned. */
+function Refused({ sheet }: { readonly sheet: RefusedSurveySheet }) {
+  const { form } = sheet;
+  return (
+    <>
+      {form && <FormSheet sheet={form} place={{ sheet: 1, of: 1 }} />}
+      {(form === undefined || form.survey.measured > 0) && <RefusedSheet sheet={sheet} />}
     </>
   );
 }

@@ -41,6 +41,7 @@ export const surveyPlace = {
   wrong: 'cannot be solved as it stands',
   stale: 'Last good result. What is typed now cannot be solved.',
   besides: 'Shown without the readings that cannot be read.',
+  planned: 'The points are planned. Velocities and flow wait for the fluid in the duct.',
   blank: 'The section is drawn to scale once this is given: ',
   blankWrong: 'The section is drawn to scale once this is put right: ',
   stations: ['Section and points', 'Probe and gauge', 'Fluid in the duct', 'Plane and uncertainty'],

@@ -128,6 +128,21 @@ describe('the picture of the velocities', () => {
 });
 
 describe('sheets', () => {
+  it('the form is there before the fluid is known, with every depth of the solved one', () => {
+    const { state: __, ...dry } = unread;
+    const sheetOf = (traverse: TraverseText) =>
+      presentSurveySheet(traverse, project(), solveTraverse(traverse, 0, project()));
+    const [open, whole] = [sheetOf(dry), sheetOf(unread)];
+    if (open.status !== 'refused' || whole.status !== 'survey') throw new Error('expected a form and a survey');
+    expect(open.form?.survey.lines).toEqual(whole.survey.lines);
+    expect(open.form?.facts).toEqual(whole.facts);
+    expect(open.form?.survey).toMatchObject({ status: 'planned', state: [], results: [], checks: [] });
+    expect(open.form?.survey.verdict).toEqual({ worst: 'unchecked', words: '0 of 25 read' });
+    expect(open.problems.map(({ field }) => field)).toHaveLength(2);
+    const result = solveTraverse(dry, 0, project());
+    expect(listSurvey(dry, project(), result).progress).toEqual({ measured: 0, points: 25 });
+  });
+
   it('a survey without a result prints why, with its inputs as written', () => {
     const sheet = presentSurveySheet(
       { tag: 'FP-9', rule: 'log-linear' },

@@ -1,4 +1,6 @@
 /** Station 1: the section, the rule of the points, and how the probe gets in. */
+
+import { withShape } from '../../../state/plans.ts';
 import { surveyPlace as words } from '../../words/survey-place.ts';
 import {
   placeChoices,
@@ -12,17 +14,19 @@ import { ChoiceField } from '../field/ChoiceField.tsx';
 import { MeterTextField } from '../field/MeterTextField.tsx';
 import { QuantityField } from '../field/QuantityField.tsx';
 import { UsualChoice } from '../fluid/UsualChoice.tsx';
+import { useWriteAll, useWritten } from '../hand.tsx';
 import { useMeterText } from '../meter.ts';
 import { Station } from '../station/Station.tsx';
 
 export function SectionStation() {
   const shape = useMeterText('section.shape');
   const rule = useMeterText('rule');
+  const choose = useShape();
   const single = rule === 'single-point';
   const pattern = rule === 'log-linear' && shape === 'rectangular';
   return (
     <Station number={1} title={words.stations[0]}>
-      <ChoiceField path="section.shape" label="Shape" choices={shapeChoices} />
+      <ChoiceField path="section.shape" label="Shape" choices={shapeChoices} choose={choose} />
       {shape === 'rectangular' ? (
         <>
           <QuantityField path="section.width" />
@@ -45,6 +49,13 @@ export function SectionStation() {
       <UsualChoice path="wallRule" label="Points near the wall" choices={wallChoices} />
     </Station>
   );
+}
+
+/** Takes a shape, and in the same step a plan that it has where the one at hand is of the other shape. */
+function useShape(): (shape: string) => void {
+  const writeAll = useWriteAll();
+  const plan = { rule: useWritten('rule'), lines: useWritten('lines'), pointsPerLine: useWritten('pointsPerLine') };
+  return (shape) => writeAll(withShape(plan, shape));
 }
 
 function Profile() {

@@ -92,9 +92,9 @@ interface PlanProps {
   readonly readings: Readings;
 }
 
-/** The form, folded away at first where the plan is made. */
-function Plan({ selected: { now }, readings }: PlanProps) {
-  const [open] = useState(now.progress === undefined);
+/** The form, folded away at first where the plan is made and its fluid known. */
+function Plan({ selected: { now, survey }, readings }: PlanProps) {
+  const [open] = useState(now.progress === undefined || survey?.status === 'planned');
   return (
     <details className={styles.plan} open={open}>
       <summary>
@@ -178,7 +178,7 @@ function Found({ selected: { survey, stale } }: { readonly selected: SelectedSur
           <Suggestions survey={survey} stale={stale} />
           <States sizing={{ state, overridable, pipe: plan, metal: [] }} stale={stale} />
         </div>
-        <Checks groups={survey.checks} stale={stale} />
+        {survey.status === 'solved' && <Checks groups={survey.checks} stale={stale} />}
       </div>
       {working.some(({ rows }) => rows.length > 0) && <Working sizing={{ working }} stale={stale} />}
       <Notes sizing={{ notes, cautions }} />

@@ -37,6 +37,7 @@ export function SurveyAnswer({ selected }: { readonly selected: SelectedSurvey }
         </p>
       )}
       {besides && <p className={styles.staleWords}>{words.besides}</p>}
+      {survey?.status === 'planned' && <p className={styles.staleWords}>{words.planned}</p>}
       {now.problems.length > 0 && <ProblemList selected={troubled} />}
       <p className={styles.spoken} aria-live="polite">
         {spoken}

@@ -1,6 +1,6 @@
 /** The selected survey as the place needs it: its text, its result, and the last good result while it cannot be solved. */
 import type { Project, TraverseText } from '../../../core/document/project.ts';
-import type { SolvedTraverse } from '../../../core/result/record.ts';
+import type { PlannedTraverse, SolvedTraverse } from '../../../core/result/record.ts';
 import { presentSurvey } from '../../present/survey.ts';
 import type { ListedSurvey } from '../../present/survey-list.ts';
 import type { PresentedSurvey } from '../../present/survey-model.ts';
@@ -12,7 +12,7 @@ export interface SelectedSurvey {
   readonly key: string;
   readonly traverse: TraverseText;
   readonly now: ListedSurvey;
-  /** What is shown: the result as it stands, without readings that cannot be read, or the last good one. */
+  /** What is shown: the result as it stands, without readings that cannot be read, its plan, or the last good one. */
   readonly survey: PresentedSurvey | undefined;
   /** True while `survey` belongs to an earlier input. */
   readonly stale: boolean;
@@ -29,7 +29,7 @@ export function useSelectedSurvey(): SelectedSurvey | undefined {
   const last = useWorkbench((state) => state.lastSurveyed);
   const [traverse, result, key] = [project.traverses?.[index], results[index], keys[index]];
   if (traverse === undefined || result === undefined || key === undefined) return undefined;
-  const solved = result.status === 'solved' ? result : result.besides;
+  const solved = result.status === 'solved' ? result : (result.besides ?? result.planned);
   const earlier = last[key];
   const from = earlier && originOf(earlier);
   const survey =
@@ -45,7 +45,7 @@ export function useSelectedSurvey(): SelectedSurvey | undefined {
     now: listed(traverse, project, result),
     survey,
     stale: solved === undefined,
-    besides: result.status === 'refused' && solved !== undefined,
+    besides: result.status === 'refused' && result.besides !== undefined,
   };
 }
 
@@ -54,10 +54,14 @@ interface Entry extends Pick<Project, 'display' | 'site' | 'base'> {
   readonly survey: PresentedSurvey;
 }
 
-const entries = new WeakMap<SolvedTraverse, Entry>();
+const entries = new WeakMap<SolvedTraverse | PlannedTraverse, Entry>();
 
 /** Presents each result once. */
-function presented(traverse: TraverseText, project: Project, result: SolvedTraverse): PresentedSurvey {
+function presented(
+  traverse: TraverseText,
+  project: Project,
+  result: SolvedTraverse | PlannedTraverse,
+): PresentedSurvey {
   const { display, site, base } = project;
   const known = entries.get(result);
   if (known && known.traverse === traverse && known.display === display && known.site === site && known.base === base)
