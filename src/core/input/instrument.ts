@@ -15,6 +15,8 @@ export interface Legs {
   readonly rise: Length;
   /** From the upstream tapping down to the zero mark or the cell. */
   readonly drop: Length;
+  /** Whether the temperature at the instrument is written. */
+  readonly temperatureStated: boolean;
 }
 
 /** The lighter fluid of an inverted tube may be air at the pressure of the line. */
@@ -61,7 +63,8 @@ export function readLegs(form: Form): Legs {
   const downstream = readFill(form, 'instrument.aboveDownstream') ?? upstream;
   const rise = signed(form, 'instrument.rise', 'length') ?? as<'length'>(0);
   const drop = form.quantity('instrument.drop', ['length'], upstream !== downstream)?.si ?? as<'length'>(0);
-  return { upstream, downstream, rise, drop };
+  const temperatureStated = String(at(form.group, 'instrument.temperature') ?? '').trim() !== '';
+  return { upstream, downstream, rise, drop, temperatureStated };
 }
 
 function readFill(form: Form, field: string): Fill | undefined {

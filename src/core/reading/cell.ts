@@ -1,5 +1,6 @@
 /** A cell at the end of two legs: from the pressure difference it sees to that of the flow equation. */
 import { MEASURED_AT } from '../document/defaults.ts';
+import type { Caution } from '../fluid/contract.ts';
 import type { Form } from '../input/form.ts';
 import { type InstrumentUncertainty, type Legs, readInstrumentUncertainty, readLegs } from '../input/instrument.ts';
 import { as } from '../quantity/brand.ts';
@@ -7,6 +8,7 @@ import type { PressureDifference, Temperature } from '../quantity/kinds.ts';
 import { named, type Working } from '../quantity/working.ts';
 import { cellDifferential, hydrostatics } from './chain.ts';
 import type { Conditions, Picture } from './contract.ts';
+import { legTemperatureCautions } from './leg-temperature.ts';
 import { fillingOf, type LegDensities, legsAt, legsGiven } from './legs.ts';
 
 export interface CellFields {
@@ -24,6 +26,7 @@ export function readCellFields(form: Form, spanned: boolean): CellFields {
 /** What a cell says through its legs. */
 export interface ThroughLegs {
   readonly differential: PressureDifference;
+  readonly cautions: readonly Caution[];
   readonly working: readonly Working[];
   readonly picture: Picture;
 }
@@ -32,14 +35,17 @@ export interface ThroughLegs {
 export function readCell(cell: number, { legs, ambient }: CellFields, { state, gravity }: Conditions): ThroughLegs {
   const densities = legsAt(legs, state, ambient);
   const differential = cellDifferential(cell, densities, gravity);
+  const lengths = { upstream: -legs.drop, downstream: legs.drop + legs.rise };
+  const seen = { temperature: ambient, differential, state, gravity };
+  const cautions = legTemperatureCautions(legs, lengths, seen);
   const picture = {
     cell_Pa: cell,
     upstreamLeg_kg_m3: densities.upstream,
     downstreamLeg_kg_m3: densities.downstream,
   };
   if (fillingOf(densities) === 'process')
-    return { differential: as<'pressure difference'>(cell), working: [], picture };
-  return { differential, working: [legsLine(cell, densities, gravity, differential)], picture };
+    return { differential: as<'pressure difference'>(cell), cautions, working: [], picture };
+  return { differential, cautions, working: [legsLine(cell, densities, gravity, differential)], picture };
 }
 
 function legsLine(cell: number, legs: LegDensities, gravity: number, value: number): Working {

@@ -15,6 +15,7 @@ import { named, type Working } from '../quantity/working.ts';
 import { capillaryCautions } from './capillary.ts';
 import { columnsDifferential, hydrostatics } from './chain.ts';
 import type { Conditions, Shown, UncertaintyPart } from './contract.ts';
+import { legTemperatureCautions } from './leg-temperature.ts';
 import { fillingOf, type LegDensities, legsAt, legsGiven } from './legs.ts';
 import { gaugeDensity, liquidCautions, liquidWorking } from './liquid.ts';
 import { reversedCautions } from './reversed.ts';
@@ -72,13 +73,23 @@ export function readColumn(fields: ColumnFields, levels: Levels, { state, gravit
     return fail(code, 'instrument.liquid', { liquid: density, fluid });
   }
   const differential = columnsDifferential(levels, density, legs, gravity);
+  const lengths = {
+    upstream: levels.upstream - legs.drop,
+    downstream: legs.drop + legs.rise - levels.downstream,
+  };
+  const seen = { temperature: gauge.temperature, differential, state, gravity };
   const parts = partsOf(fields, levels, net * gravity, differential);
   const narrow = levels.bore === undefined ? [] : capillaryCautions(gauge.liquid, density, levels.bore, gravity);
   const line = { ...lineOf(levels, density, legs, gravity, inverted), value: differential };
   return ok({
     standing: 'as-shown',
     differential,
-    cautions: [...reversedCautions(differential), ...liquidCautions(gauge), ...narrow],
+    cautions: [
+      ...reversedCautions(differential),
+      ...liquidCautions(gauge),
+      ...legTemperatureCautions(fields.legs, lengths, seen),
+      ...narrow,
+    ],
     working: [liquidWorking(gauge, liquid.value), ...levels.working, line, ...combinedWorking(parts)],
     uncertainty: parts,
     picture: {

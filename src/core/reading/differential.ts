@@ -20,12 +20,12 @@ export const differential: Instrument = {
       asks: { shows: ['pressure difference'] },
       read({ value }, at) {
         const shown = asked(value, 'a value').si;
-        const { differential: across, working, picture } = readCell(shown - zero, fields, at);
+        const { differential: across, cautions, working, picture } = readCell(shown - zero, fields, at);
         const parts = statedParts(fields.uncertainty, { span: 0, reading: Math.abs(across) });
         return ok({
           standing: 'as-shown',
           differential: across,
-          cautions: reversedCautions(across),
+          cautions: [...reversedCautions(across), ...cautions],
           working: [...zeroLine(shown, zero), ...working, ...combinedWorking(parts)],
           uncertainty: parts,
           picture,

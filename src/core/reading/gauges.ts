@@ -9,6 +9,7 @@ import { asked } from './asked.ts';
 import { readCellFields } from './cell.ts';
 import { alongChain, hydrostatics } from './chain.ts';
 import type { Instrument } from './contract.ts';
+import { legTemperatureCautions } from './leg-temperature.ts';
 import { type LegDensities, legsAt } from './legs.ts';
 import { reversedCautions } from './reversed.ts';
 import { combinedWorking, statedParts } from './stated.ts';
@@ -28,12 +29,14 @@ export const gauges: Instrument = {
         const p1 = alongChain(upstream, [{ density: legs.upstream, fall: above1 }], gravity);
         const p2 = alongChain(throat, [{ density: legs.downstream, fall: above2 }], gravity);
         const value = as<'pressure difference'>(p1 - p2 - legs.process * gravity * legs.rise);
+        const lengths = { upstream: above1, downstream: -above2 };
+        const seen = { temperature: fields.ambient, differential: value, state, gravity };
         const parts = statedParts(fields.uncertainty, { span: 0, reading: Math.abs(value) });
         const line = lineOf({ upstream, throat, above1, above2, value }, legs, gravity);
         return ok({
           standing: 'as-shown',
           differential: value,
-          cautions: reversedCautions(value),
+          cautions: [...reversedCautions(value), ...legTemperatureCautions(fields.legs, lengths, seen)],
           working: [line, ...combinedWorking(parts)],
           uncertainty: parts,
           picture: { upstream_Pa: upstream, throat_Pa: throat },

@@ -2,8 +2,11 @@
 import type { Caution } from '../fluid/contract.ts';
 import { hydrostatics } from './chain.ts';
 
-/** One finding where the differential is below zero. */
-export const reversedCautions = (differential: number): readonly Caution[] =>
+/** Share of the span below zero that a zero which has drifted explains as well. */
+const DRIFT = 0.02; // custom of the trade
+
+/** One finding where the differential is below zero; `span`, Pa, of a transmitter without a cut-off, else 0. */
+export const reversedCautions = (differential: number, span = 0): readonly Caution[] =>
   differential < 0
     ? [
         {
@@ -13,6 +16,7 @@ export const reversedCautions = (differential: number): readonly Caution[] =>
           unit: 'Pa',
           limit: { min: 0 },
           source: hydrostatics,
+          ...(-differential < DRIFT * span ? { detail: { near: 'zero' } } : {}),
         },
       ]
     : [];

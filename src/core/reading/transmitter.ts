@@ -49,7 +49,7 @@ function shownOf(reading: ReadingInput, own: TransmitterFields, fields: CellFiel
   const { range, zero, value } = chosen;
   const x = placeOf(value, signal);
   const seen = differentialOf(x, range, output) - zero;
-  const { differential, working, picture } = readCell(seen, fields, at);
+  const { differential, cautions: ofLegs, working, picture } = readCell(seen, fields, at);
   const state = stateOfSignal(value, limits);
   const standing = standingOf(state, differential, own.cutOff);
   const span = range.upper - range.lower;
@@ -58,7 +58,10 @@ function shownOf(reading: ReadingInput, own: TransmitterFields, fields: CellFiel
   const cautions = [
     ...signalCautions(state, value, signal, limits),
     ...cutOffCautions(standing, differential, own.cutOff),
-    ...(standing === 'as-shown' || standing === 'at-least' ? reversedCautions(differential) : []),
+    ...(standing === 'as-shown' || standing === 'at-least'
+      ? reversedCautions(differential, own.cutOff > 0 ? 0 : span)
+      : []),
+    ...(standing === 'failed' ? [] : ofLegs),
     ...overlapCautions(reading, own, fields.uncertainty),
   ];
   return {

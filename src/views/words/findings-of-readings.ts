@@ -12,8 +12,11 @@ const ofSignal = (text: (figure: string) => string): FindingWords => ({
 export const checksOfReadings: Readonly<Record<string, FindingWords>> = {
   'reading-reversed': {
     role: 'differential',
-    text: (figure) =>
-      `Differential ${figure}: the flow runs backwards, the legs are crossed, or a leg holds something else`,
+    text: (figure, detail) => {
+      const causes = 'the flow runs backwards, the legs are crossed, or a leg holds something else';
+      if (!detail.has('near')) return `Differential ${figure}: ${causes}`;
+      return `Differential ${figure}, close to zero: the zero has drifted, ${causes}`;
+    },
   },
   'reading-above-span': {
     role: 'differential',
@@ -22,6 +25,13 @@ export const checksOfReadings: Readonly<Record<string, FindingWords>> = {
   'gauge-liquid-range': {
     role: 'temperature',
     text: (figure) => `Gauge liquid at ${figure}, outside the formula of its density`,
+  },
+  'legs-at-line-temperature': {
+    role: 'temperature',
+    text: (figure) =>
+      `Instrument at ${figure}, and the process fluid in the legs counts with its density in the line: ` +
+      'if the legs stand at the temperature of the instrument, state their density as what fills them',
+    limit: (bounds) => `${bounds}, about that of the line`,
   },
   'signal-failed': ofSignal((figure) => `Signal ${figure}: the instrument reports a failure, there is no reading`),
   'signal-saturated': ofSignal((figure) => `Signal ${figure}: saturated, the flow is at least what stands here`),
@@ -49,6 +59,7 @@ export const readingFlags: Readonly<Record<string, string>> = {
   'signal-saturated': 'saturated: at least',
   'signal-uncertain': 'signal uncertain',
   'below-cut-off': 'below the cut-off',
+  'legs-at-line-temperature': 'legs at another temperature',
   'cells-apart': 'cells differ',
   'capillary-level': 'narrow tube',
   'reynolds-pipe': 'Reynolds number outside',

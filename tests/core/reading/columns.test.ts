@@ -1,7 +1,7 @@
 /** Columns of liquid: which limb is high, what fills the legs, what a scale says, and when the liquids change places. */
 import { describe, expect, test } from 'vitest';
-import type { InstrumentText } from '../../../src/core/document/project.ts';
-import { flags, reading, refusalOf, uTube } from './sample.ts';
+import type { InstrumentText, MeterText } from '../../../src/core/document/project.ts';
+import { flags, reading, refusalOf, uTube, venturi } from './sample.ts';
 
 const dp = (instrument: InstrumentText, value: string): number => {
   const { differential_Pa } = reading(instrument, { value });
@@ -41,7 +41,8 @@ describe('U-tube', () => {
     expect(refusalOf(stated(1000), { value: '152 mm' })).toEqual(['manometer-liquid-light at instrument.liquid']);
   });
   test('mercury outside its formula is a finding', () => {
-    expect(flags(reading({ ...uTube, temperature: '-30 degC' }, { value: '152 mm' }))).toEqual(['gauge-liquid-range']);
+    const filled: InstrumentText = { ...uTube, above: { density: '1025 kg/m3' }, temperature: '-30 degC' };
+    expect(flags(reading(filled, { value: '152 mm' }))).toEqual(['gauge-liquid-range']);
   });
   test('half a division at each level, rectangular', () => {
     const row = reading({ ...stated(13600), division: '1 mm' }, { value: '152 mm' });
@@ -73,6 +74,52 @@ describe('legs', () => {
     expect(dp(cell, '100 mbar')).toBeCloseTo(10000 + (1000 - 1025) * g * -0.3, 8);
     expect(dp({ kind: 'differential', rise: '4 m' }, '100 mbar')).toBe(10000);
     expect(dp({ kind: 'differential', zero: '1 mbar' }, '100 mbar')).toBe(9900);
+  });
+});
+
+describe('legs of the process fluid at another temperature', () => {
+  const id = 'legs-at-line-temperature';
+  const cold: InstrumentText = { ...stated(13600), temperature: '40 degC' }; // the line has 17.5 degC
+  const found = (instrument: InstrumentText, value: string, meter = venturi) =>
+    reading(instrument, { value }, meter).checks.filter((check) => check.id === id);
+  test('are a caution beside a column, from 20 K on', () => {
+    expect(found(cold, '152 mm')).toMatchObject([
+      { verdict: 'caution', assumption: 'range-and-span', value: 313.15, limit: { min: 270.65, max: 310.65 } },
+    ]);
+    expect(found({ ...cold, temperature: '37.4 degC' }, '152 mm')).toEqual([]);
+    expect(found({ ...cold, temperature: '-3 degC' }, '152 mm')).toHaveLength(1);
+  });
+  test('are none where nothing is stated, where the filling is, and at rest', () => {
+    const hot = { ...venturi, upstream: { pressure: '3.1 bar(g)', temperature: '60 degC' } };
+    expect(found(stated(13600), '152 mm', hot)).toEqual([]);
+    expect(found({ ...cold, above: { density: '1017 kg/m3' } }, '152 mm')).toEqual([]);
+    expect(found(cold, '0 mm')).toEqual([]);
+    expect(found({ ...cold, rise: '1 m' }, '0 mm')).toHaveLength(1);
+  });
+  test('are one for a cell or gauges only where their heights differ', () => {
+    const cell: InstrumentText = { kind: 'differential', temperature: '40 degC' };
+    expect(found({ ...cell, drop: '3 m' }, '100 mbar')).toEqual([]);
+    expect(found({ ...cell, rise: '0.3 m' }, '100 mbar')).toHaveLength(1);
+    const above: InstrumentText = { ...cell, above: 'process', aboveDownstream: 'water' };
+    expect(found({ ...above, drop: '0 m', rise: '1 m' }, '100 mbar')).toEqual([]);
+    expect(found({ ...above, drop: '1 m' }, '100 mbar')).toHaveLength(1);
+    const gauges = (heightThroat: string): InstrumentText => ({
+      kind: 'gauges',
+      temperature: '40 degC',
+      heightUpstream: '1 m',
+      heightThroat,
+    });
+    const row = { upstream: '3.1 bar(g)', throat: '2.9 bar(g)' };
+    expect(flags(reading(gauges('1 m'), row))).not.toContain(id);
+    expect(flags(reading(gauges('0.5 m'), row))).toContain(id);
+  });
+  test('are none where a gas weighs too little beside the liquid', () => {
+    const gas = (density: string): MeterText => ({
+      ...venturi,
+      fluid: { kind: 'stated', phase: 'gas', density, viscosity: '0.018 mPa.s', isentropicExponent: 1.4 },
+    });
+    expect(found(cold, '152 mm', gas('4.9 kg/m3'))).toEqual([]);
+    expect(found(cold, '152 mm', gas('490 kg/m3'))).toHaveLength(1);
   });
 });
 

@@ -61,6 +61,16 @@ describe('limits', () => {
   });
 });
 
+describe('below zero', () => {
+  const detailOf = (value: string, more: InstrumentText = {}) =>
+    at(value, more).checks.find(({ id }) => id === 'reading-reversed')?.detail;
+  test('less than 2 % of the span, a zero that has drifted may be the cause too', () => {
+    expect(detailOf('3.9 mA')).toEqual({ near: 'zero' });
+    expect(detailOf('3.9 mA', { cutOff: '1 %' })).toBeUndefined();
+    expect(detailOf('3.67 mA')).toBeUndefined(); // -2.06 %
+  });
+});
+
 describe('cut-off', () => {
   test('a share of the flow at the end of the range, or a differential', () => {
     const row = at('4.03 mA', { cutOff: '5 %' }); // 47 Pa of 62.5 Pa
