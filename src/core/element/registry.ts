@@ -30,9 +30,10 @@ export const notOffered: readonly string[] = [
 
 /** The element of a kind. Problems at `element.kind`: field-missing, element-not-offered, element-unknown. */
 export const elementOf = (kind: string | undefined): Outcome<Element> => {
-  if (kind === undefined || kind === '') return fail('field-missing', 'element.kind');
+  const known = elements.map((one) => one.kind).join(', ');
+  if (kind === undefined || kind === '') return fail('field-missing', 'element.kind', { choices: known });
   const element = elements.find((one) => one.kind === kind);
   if (element !== undefined) return ok(element);
   const code = notOffered.includes(kind) ? 'element-not-offered' : 'element-unknown';
-  return fail(code, 'element.kind', { written: kind, known: elements.map((one) => one.kind).join(', ') });
+  return fail(code, 'element.kind', { written: kind, known });
 };

@@ -58,10 +58,10 @@ function completed(model: FluidModel, parsed: Parsed, known: Partial<State>, pat
 
 function modelOf({ kind }: FluidText, field: string): Outcome<FluidModel> {
   const path = `${field}.kind`;
-  if (kind === undefined || kind === '') return fail('field-missing', path);
+  const offered = fluids.map((candidate) => candidate.kind).join(', ');
+  if (kind === undefined || kind === '') return fail('field-missing', path, { choices: offered });
   if (typeof kind !== 'string') return fail('text-expected', path, { written: typeof kind });
   const model = fluids.find((candidate) => candidate.kind === kind);
   if (model !== undefined) return { ok: true, value: model };
-  const offered = fluids.map((candidate) => candidate.kind).join(', ');
   return fail('fluid-unknown', path, { written: kind.slice(0, 40), offered });
 }

@@ -43,7 +43,7 @@ export function failed({ problems: [first, ...rest] }: Form): Outcome<never> {
 interface Desk {
   readonly report: Form['report'];
   /** What stands in a field; undefined when it is empty, which is a problem where it is required. */
-  written(field: string, required: boolean): unknown;
+  written(field: string, required: boolean, detail?: Problem['detail']): unknown;
   /** The value of an outcome; its problems are kept. */
   take<Value>(outcome: Outcome<Value>): Value | undefined;
 }
@@ -54,10 +54,10 @@ export function openForm(group: object): Form {
   const report: Form['report'] = (code, field, detail = {}) => void problems.push({ code, field, detail });
   const desk: Desk = {
     report,
-    written(field, required) {
+    written(field, required, detail) {
       const value = at(group, field);
       const empty = value === undefined || (typeof value === 'string' && value.trim() === '');
-      if (empty && required) report('field-missing', field);
+      if (empty && required) report('field-missing', field, detail);
       return empty ? undefined : value;
     },
     take(outcome) {
@@ -89,18 +89,19 @@ function quantityReaders({ report, written, take }: Desk): Pick<Form, 'quantity'
 }
 
 function wordReaders({ report, written, take }: Desk): Pick<Form, 'choice' | 'word' | 'number'> {
-  const word = (field: string, required = false): string | undefined => {
-    const text = written(field, required);
+  const word = (field: string, required = false, detail?: Problem['detail']): string | undefined => {
+    const text = written(field, required, detail);
     if (text === undefined || typeof text === 'string') return text;
     return report('text-expected', field, { written: typeof text });
   };
   return {
-    word,
+    word: (field) => word(field),
     choice(field, choices, required = false) {
-      const text = word(field, required);
+      const listed = choices.join(', ');
+      const text = word(field, required, { choices: listed });
       if (text === undefined) return undefined;
       const choice = choices.find((candidate) => candidate === text);
-      return choice ?? report('choice-unknown', field, { written: text, choices: choices.join(', ') });
+      return choice ?? report('choice-unknown', field, { written: text, choices: listed });
     },
     number(field, required = false) {
       const value = written(field, required);

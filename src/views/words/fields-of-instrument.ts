@@ -49,6 +49,25 @@ export const instrumentLabels: Readonly<Record<string, string>> = {
   'instrument.uncertainty.angle': 'Angle of the tube, uncertainty',
 };
 
+/** Fields whose label reads only beside its field, as they stand inside a sentence. */
+export const instrumentPlaces: Readonly<Record<string, string>> = {
+  'instrument.above': 'what fills the legs',
+  'instrument.aboveDownstream': 'what fills the downstream leg',
+  'instrument.high': 'which limb stands higher',
+  'instrument.scaleTrueAt': 'the temperature at which the scale is true',
+  'instrument.lower': 'the lower end of the range',
+  'instrument.upper': 'the upper end of the range',
+  'instrument.limits.failLow': 'the signal of a failure at the lower end',
+  'instrument.limits.low': 'the lower end of the valid signal',
+  'instrument.limits.high': 'the upper end of the valid signal',
+  'instrument.limits.failHigh': 'the signal of a failure at the upper end',
+  'instrument.lowRange.lower': 'the lower end of the low range',
+  'instrument.lowRange.upper': 'the upper end of the low range',
+  'instrument.lowRange.up': 'the signal at which the low range is left',
+  'instrument.lowRange.down': 'the signal at which the low range is taken again',
+  'instrument.uncertainty.as': 'what the uncertainties of the instrument are',
+};
+
 /** Parts of a row of readings, as they stand after its number. */
 export const readingParts: Readonly<Record<string, string>> = {
   time: 'time',

@@ -1,7 +1,7 @@
 /** Labels of the document's fields by path, and how a sentence names each. */
 
 import { componentLabel } from './components.ts';
-import { instrumentLabels, readingParts } from './fields-of-instrument.ts';
+import { instrumentLabels, instrumentPlaces, readingParts } from './fields-of-instrument.ts';
 import { logLabels } from './fields-of-log.ts';
 import { readingLabel, traverseLabels } from './fields-of-traverse.ts';
 
@@ -139,6 +139,8 @@ const lowered = (letter: string): string => letter.toLowerCase();
 
 /** The field as it stands inside a sentence: 'the upstream pressure', 'the tappings'. */
 export function fieldPlace(path: string): string {
+  const place = instrumentPlaces[own(path)];
+  if (place !== undefined) return place;
   const label = fieldLabel(path);
   const plain = /^[A-Z][a-z]/.test(label) ? label.charAt(0).toLowerCase() + label.slice(1) : label;
   return `the ${plain}`;

@@ -2,7 +2,10 @@
 import type { ProblemWords } from './detail.ts';
 
 export const inputProblems: ProblemWords = {
-  'field-missing': (d) => ({ cause: `${d.place} is not given.`, next: 'Fill it in.' }),
+  'field-missing': (d) => ({
+    cause: `${d.place} is not given.`,
+    next: d.has('choices') ? 'Choose one.' : 'Fill it in.',
+  }),
   'text-expected': (d) => ({
     cause: `${d.place} should be text, and the file has ${d.text('written')}.`,
     next: 'Write the number with its unit between quotation marks.',

@@ -61,6 +61,15 @@ describe('wording', () => {
     expect(problemSentence({ code: 'field-missing', field: 'duty.maximum', detail: {} })).toBe(
       'The maximum flow is not given. Fill it in.',
     );
+    expect(problemSentence({ code: 'field-missing', field: 'meters.0.instrument.upper', detail: {} })).toBe(
+      'The upper end of the range is not given. Fill it in.',
+    );
+  });
+  it('a missing choice', () => {
+    const detail = { choices: 'u-tube, well' };
+    expect(problemSentence({ code: 'field-missing', field: 'instrument.kind', detail })).toBe(
+      'The instrument is not given. Choose one.',
+    );
   });
   it('a code or a detail that is not there is a defect', () => {
     expect(() => problemSentence({ code: 'nonsense', field: '', detail: {} })).toThrow(/expected words .*got none/);
