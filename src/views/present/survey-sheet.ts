@@ -34,7 +34,10 @@ export type FieldForm = Pick<SurveySheet, 'head' | 'survey' | 'facts'>;
 
 /** A survey without a result; its form where the points can be planned all the same. */
 export interface RefusedSurveySheet extends RefusedSheet {
-  readonly form?: FieldForm;
+  readonly form?: FieldForm & {
+    /** Nothing is read, and nothing is wrong: the fluid in the duct is only not stated yet. */
+    readonly alone: boolean;
+  };
 }
 
 export type PresentedSurveySheet = SurveySheet | RefusedSurveySheet;
@@ -94,12 +97,13 @@ export function presentSurveySheet(
 function formOf(
   traverse: TraverseText,
   project: Project,
-  { planned }: RefusedTraverse,
+  { planned, problems }: RefusedTraverse,
   head: SheetHead,
 ): Pick<RefusedSurveySheet, 'form'> {
   if (planned === undefined) return {};
   const survey = presentSurvey(traverse, project, planned);
-  return { form: { head, survey, facts: factsOf(survey, traverse) } };
+  const alone = survey.measured === 0 && problems.every(({ code }) => code === 'field-missing');
+  return { form: { head, survey, facts: factsOf(survey, traverse), alone } };
 }
 
 const blocksOf = ({ checks }: PresentedSurvey, keyOf: KeyOf): readonly CheckBlock[] => checkBlocks({ checks }, keyOf);

@@ -24,7 +24,7 @@ interface Props {
 }
 
 export function SurveyPages({ sheet, include }: Props) {
-  if (sheet.status === 'refused') return <Refused sheet={sheet} />;
+  if (sheet.status === 'refused') return <Refused sheet={sheet} include={include} />;
   const chosen = pagesOf(sheet, include);
   const form = include.includes('form') || sheet.survey.measured === 0;
   return (
@@ -38,13 +38,18 @@ export function SurveyPages({ sheet, include }: Props) {
   );
 }
 
-/** Why there is no result; before anything is read the form alone, where the points are planned. */
-function Refused({ sheet }: { readonly sheet: RefusedSurveySheet }) {
+interface RefusedProps extends Pick<Props, 'include'> {
+  readonly sheet: RefusedSurveySheet;
+}
+
+/** Why there is no result; the form for the field, alone where nothing but what is measured there is missing. */
+function Refused({ sheet, include }: RefusedProps) {
   const { form } = sheet;
+  const alone = form?.alone === true;
   return (
     <>
-      {form && <FormSheet sheet={form} place={{ sheet: 1, of: 1 }} />}
-      {(form === undefined || form.survey.measured > 0) && <RefusedSheet sheet={sheet} />}
+      {form && (alone || include.includes('form')) && <FormSheet sheet={form} place={{ sheet: 1, of: 1 }} />}
+      {!alone && <RefusedSheet sheet={sheet} />}
     </>
   );
 }

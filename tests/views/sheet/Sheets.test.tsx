@@ -1,11 +1,12 @@
 import { readFileSync } from 'node:fs';
 import { renderToStaticMarkup } from 'react-dom/server';
 import { describe, expect, it } from 'vitest';
-import type { MeterText } from '../../../src/core/document/project.ts';
+import type { MeterText, TraverseText } from '../../../src/core/document/project.ts';
 import { run } from '../../../src/core/run.ts';
 import { presentSheets } from '../../../src/views/present/sheet.ts';
 import type { SheetKind } from '../../../src/views/sheet/paper.ts';
 import { Sheets } from '../../../src/views/sheet/Sheets.tsx';
+import { rectangular } from '../../core/traverse/sample.ts';
 import { feedWater, meters, projectOf } from '../present/meters.ts';
 
 interface Asked {
@@ -138,6 +139,31 @@ describe('what cannot be signed', () => {
     const warning = 'Not current: the inputs have changed';
     expect(words(printed([feedWater], { stale: true })).split(warning)).toHaveLength(4);
     expect(words(printed([feedWater]))).not.toContain(warning);
+  });
+});
+
+describe('a survey whose fluid is not known yet', () => {
+  const { state: _, readings, ...planned } = rectangular;
+  const paper = (traverse: TraverseText, include?: readonly SheetKind[]): string => {
+    const project = { ...projectOf('SI'), traverses: [traverse] };
+    const asked = include === undefined ? {} : { include };
+    return renderToStaticMarkup(<Sheets project={project} results={run(project)} paper="A4" {...asked} />);
+  };
+  it('prints the form for the field alone before anything is read', () => {
+    const markup = paper(planned);
+    expect(labels(markup)).toEqual(['SA-402, Form for the field, 1 of 1']);
+    expect(words(markup)).toContain('1 84.1');
+    expect(words(markup)).toContain('Static pressure in the duct');
+  });
+  it('says with readings why there is no result, and prints the form where it is asked for', () => {
+    const read = { ...planned, ...(readings === undefined ? {} : { readings }) };
+    expect(labels(paper(read, ['survey']))).toEqual(['SA-402, Survey sheet, 1 of 1']);
+    expect(words(paper(read, ['survey']))).toContain('This survey has no result.');
+    expect(labels(paper(read, ['form', 'survey']))).toHaveLength(2);
+  });
+  it('says what is wrong with the fluid also before anything is read', () => {
+    const wrong = { ...planned, state: { pressure: '250', temperature: '22 degC' } };
+    expect(words(paper(wrong, ['survey']))).toContain('This survey has no result.');
   });
 });
 
