@@ -42,9 +42,12 @@ const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
     await expect(page.getByRole('listbox')).toBeVisible();
   },
   'the sheets': async (page) => {
-    await openExample(page);
+    const project = JSON.parse(await exampleText());
+    project.meters = project.meters.filter(({ tag }: { tag: string }) => tag === 'FE-4101'); // one of each kind of sheet
+    await openProject(page, project);
     await page.getByRole('link', { name: 'Sheet' }).click();
     await expect(page.getByRole('region', { name: /FE-4101, Sizing sheet/ })).toBeVisible();
+    await expect(page.getByRole('region', { name: /FP-5102/ }).first()).toBeVisible();
   },
   'a survey, its folds open': async (page) => {
     await openExample(page);
