@@ -6,10 +6,10 @@ import AxeBuilder from '@axe-core/playwright';
 import type { Locator, Page, TestInfo } from '@playwright/test';
 import type { InstrumentText, MeterText, Project, ReadingText } from '../../src/core/document/project.ts';
 import { answer, choose, exampleText, main, openExample, openProject, panel, save } from './hand.ts';
+import { flat, printed } from './paper.ts';
 import { expect, test } from './watched.ts';
 
 const root = fileURLToPath(new URL('../..', import.meta.url));
-const flat = (text: string): string => text.replace(/[\s\u00a0\u202f\u2009]+/g, ' ');
 const read = (page: Page): Promise<void> => page.getByRole('link', { name: 'Read', exact: true }).click();
 const box = (page: Page, column: string, row: number): Locator =>
   panel(page, 'Readings').getByLabel(`${column}, row ${row}`, { exact: true });
@@ -205,11 +205,8 @@ test('the sheet of readings is printed with the instrument and its cautions', as
   await choose(page, 'FE-4101');
   await read(page);
   await expect(answer(page)).toContainText('mercury');
-  const path = info.outputPath('sheets.pdf');
   await page.waitForTimeout(1500); // the sheets follow when the typing rests
-  writeFileSync(path, await page.pdf({ preferCSSPageSize: true, printBackground: true }));
-  const text = spawnSync('pdftotext', ['-layout', path, '-'], { encoding: 'utf8' }).stdout;
-  const pages = text.split('\f').slice(0, -1).map(flat);
+  const pages = (await printed(page, info)).pages.map(flat);
   const sheet = pages.find((one) => one.includes('legs crossed or flow reversed')) ?? '';
   expect(sheet).toContain('152 mm of mercury under the process fluid is 186.5 mbar');
   expect(sheet).toContain('Mercury: poisonous vapour');
