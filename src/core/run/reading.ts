@@ -33,6 +33,9 @@ export interface SolvedRow {
   readonly inUse?: Cell;
 }
 
+/** A share of the line pressure that its own rounding hides: the two tappings differ by nothing. */
+const NO_DIFFERENCE = Number.EPSILON;
+
 /** Solves one row. Problems: those of the state, of the instrument and of the flow, at the fields of the row. */
 export function solveReading(
   stands: Standing,
@@ -50,7 +53,7 @@ export function solveReading(
   if (!shown.ok) return shown;
   const { standing, differential } = shown.value;
   const time = reading.time === undefined ? {} : { time: reading.time };
-  const flows = differential > 0 && (standing === 'as-shown' || standing === 'at-least');
+  const flows = differential > NO_DIFFERENCE * state.pressure && (standing === 'as-shown' || standing === 'at-least');
   const flow = flows ? flowAt(stands, moment, differential, row) : undefined; // 3 the flow
   if (flow === undefined) return ok({ record: { ...still(shown.value, state), ...time }, ...inUseOf(shown.value) });
   if (!flow.ok) return placed(flow.problems, row, instrument);
@@ -85,7 +88,8 @@ const stateFigures = ({ pressure, temperature, density }: FluidState) => ({
 
 /** A reading that makes no flow: cut off, at rest, reversed, or no reading at all. */
 function still({ standing, differential, cautions, working, picture }: Shown, state: FluidState): SolvedReading {
-  const none = standing === 'cut-off' || (standing === 'as-shown' && differential === 0);
+  const equal = differential >= 0 && differential <= NO_DIFFERENCE * state.pressure;
+  const none = standing === 'cut-off' || (standing === 'as-shown' && equal);
   const rest = state.baseDensity === undefined ? {} : { baseVolumeFlow_m3_s: 0 };
   return {
     status: 'solved',

@@ -43,6 +43,13 @@ describe('each row on its own', () => {
       'differential-exceeds-pressure at readings.0.value',
     ]);
   });
+  test('a difference that the pressure of the line hides is none', () => {
+    const [hidden, least] = readings(uTube, [{ value: '7.4e-321 mm' }, { value: '1e-9 mm' }]).rows;
+    expect(hidden).toMatchObject({ status: 'solved', counted: true, massFlow_kg_s: 0 });
+    expect(hidden).not.toHaveProperty('uncertainty');
+    expect(least).toMatchObject({ status: 'solved', counted: true });
+    expect(least?.status === 'solved' && Number.isFinite(least.uncertainty?.expanded_percent)).toBe(true);
+  });
   test('a state that cannot be is the fault of the row', () => {
     const cold = { ...transmitter, upper: '500 mbar' };
     expect(refusalOf(cold, { value: '12 mA', temperature: '9000 degC' }, steam)).toEqual([
