@@ -8,7 +8,7 @@ import { useCommands, useWorkbenchStore } from './binding.tsx';
 import buttons from './button.module.css';
 import { drawingLabels } from './drawing-labels.ts';
 import { pullTo } from './field/turn.ts';
-import { MeterHead } from './MeterHead.tsx';
+import { ItemHead } from './ItemHead.tsx';
 import type { SelectedMeter } from './meter.ts';
 import { Way } from './ProblemList.tsx';
 import { Downstream } from './station/Downstream.tsx';
@@ -23,7 +23,7 @@ export function Along({ selected }: { readonly selected: SelectedMeter }) {
   const [frame, width] = useWidth();
   return (
     <div className={styles.along}>
-      <MeterHead index={selected.index} />
+      <ItemHead index={selected.index} list="meters" />
       <div className={styles.drawing} data-stale={stale && sizing !== undefined} ref={frame}>
         {sizing ? width > 0 && <Drawn sizing={sizing} width={width} /> : <Blank selected={selected} />}
         {sizing && stale && <p className={styles.stale}>last good result</p>}

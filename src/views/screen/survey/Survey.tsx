@@ -8,6 +8,7 @@ import along from '../Along.module.css';
 import { Boundary } from '../Boundary.tsx';
 import { focusField, focusNext } from '../focus.ts';
 import { HandProvider } from '../hand.tsx';
+import { ItemHead } from '../ItemHead.tsx';
 import { Way } from '../ProblemList.tsx';
 import { Checks } from '../panel/Checks.tsx';
 import { Notes } from '../panel/Notes.tsx';
@@ -28,7 +29,6 @@ import { type Readings, useReadings } from './readings.ts';
 import { SectionStation } from './SectionStation.tsx';
 import styles from './Survey.module.css';
 import { SurveyAnswer } from './SurveyAnswer.tsx';
-import { SurveyHead } from './SurveyHead.tsx';
 import { type SelectedSurvey, useSelectedSurvey } from './selected.ts';
 
 /** Enter in a text box goes on to the next field; the boxes of readings have their own way. */
@@ -70,7 +70,7 @@ function One({ selected }: { readonly selected: SelectedSurvey }) {
         </button>
       )}
       <div className={along.along}>
-        <SurveyHead index={selected.index} />
+        <ItemHead index={selected.index} list="traverses" />
         <Plan selected={selected} readings={readings} />
       </div>
       <Boundary of={survey}>

@@ -1,8 +1,9 @@
-/** The name of the meter, and what can be done with it as a whole. */
+/** The name of a meter or a survey, and what can be done with it as a whole. */
+import { itemsIn, type ListName } from '../../state/lists.ts';
 import { useWorkbench } from './binding.tsx';
 import buttons from './button.module.css';
 import { focusSoon } from './focus.ts';
-import styles from './MeterHead.module.css';
+import styles from './ItemHead.module.css';
 import { textAt } from './text.ts';
 
 const FIELDS = [
@@ -10,8 +11,13 @@ const FIELDS = [
   { path: 'service', label: 'Service', size: 34 },
 ] as const;
 
-export function MeterHead({ index }: { readonly index: number }) {
-  const meter = useWorkbench((state) => state.project.meters[index]);
+interface Props {
+  readonly index: number;
+  readonly list: ListName;
+}
+
+export function ItemHead({ index, list }: Props) {
+  const item = useWorkbench((state) => itemsIn(state.project, list)[index]);
   const write = useWorkbench((state) => state.write);
   const settle = useWorkbench((state) => state.settle);
   return (
@@ -25,26 +31,28 @@ export function MeterHead({ index }: { readonly index: number }) {
             size={size}
             autoComplete="off"
             spellCheck={path === 'service'}
-            value={textAt(meter, path)}
-            onChange={(event) => write(path, event.target.value)}
+            value={textAt(item, path)}
+            onChange={(event) => write(path, event.target.value, list)}
             onBlur={settle}
           />
         </label>
       ))}
-      <MeterActions index={index} />
+      <Actions index={index} list={list} />
     </div>
   );
 }
 
-function MeterActions({ index }: { readonly index: number }) {
-  const count = useWorkbench((state) => state.project.meters.length);
-  const duplicate = useWorkbench((state) => state.duplicateMeter);
-  const move = useWorkbench((state) => state.moveMeter);
-  const remove = useWorkbench((state) => state.deleteMeter);
+function Actions({ index, list }: Props) {
+  const meters = list === 'meters';
+  const count = useWorkbench((state) => itemsIn(state.project, list).length);
+  const duplicate = useWorkbench((state) => (meters ? state.duplicateMeter : state.duplicateTraverse));
+  const move = useWorkbench((state) => (meters ? state.moveMeter : state.moveTraverse));
+  const remove = useWorkbench((state) => (meters ? state.deleteMeter : state.deleteTraverse));
   const discard = () => {
     remove(index);
-    focusSoon('#content'); // the button goes with its meter
+    focusSoon('#content'); // the button goes with its item
   };
+  const key = (keys: string) => (meters ? { title: keys } : {}); // the keys move a meter
   return (
     <div className={styles.actions}>
       <button type="button" className={buttons.quiet} onClick={() => duplicate(index)}>
@@ -54,7 +62,7 @@ function MeterActions({ index }: { readonly index: number }) {
         type="button"
         className={buttons.quiet}
         disabled={index === 0}
-        title="Alt + ↑"
+        {...key('Alt + ↑')}
         onClick={() => move(index, index - 1)}
       >
         Move up
@@ -63,7 +71,7 @@ function MeterActions({ index }: { readonly index: number }) {
         type="button"
         className={buttons.quiet}
         disabled={index + 1 >= count}
-        title="Alt + ↓"
+        {...key('Alt + ↓')}
         onClick={() => move(index, index + 1)}
       >
         Move down
